@@ -1,0 +1,202 @@
+package org.soakwright.solver.chain;
+
+/**
+ * A chain followed for one choice of durations. Readings can be taken at the end of every stage, with their error and their
+ * derivatives by every duration (one backward pass, the adjoint).
+ */
+public final class Course {
+    /** Rounding of one coefficient, as a multiple of the machine's precision: measured below 10, bounded here by 32. */
+    private static final double ROUNDING = 32 * 0x1p-53;
+
+    private final Chain chain;
+    private final double[] seconds;
+    private final int[] count;
+    private final double[][] decay;
+    private final double[][] end;
+    private final double[] liquor;
+    private final double[] error;
+
+    Course(Chain chain, double[] seconds) {
+        int stages = seconds.length;
+        if (stages == 0 || stages > chain.size()) {
+            throw new IllegalArgumentException(
+                    "durations must be given for 1 to " + chain.size() + " stages, found " + stages);
+        }
+        this.chain = chain;
+        this.seconds = seconds;
+        count = new int[stages];
+        decay = new double[stages][];
+        end = new double[stages][];
+        liquor = new double[stages];
+        error = new double[stages];
+        double[] state = new double[0];
+        double clinging = 0;
+        for (int k = 0; k < stages; k++) {
+            double t = seconds[k];
+            if (!(t > 0) || Double.isInfinite(t)) {
+                throw new IllegalArgumentException("duration of stage " + k + " must be above 0, found " + t + " s");
+            }
+            Link link = chain.link(k);
+            int n = link.needed(t, k);
+            count[k] = n;
+            state = link.begin(n, state, state.length, clinging);
+            error[k] = (k == 0 ? 0 : error[k - 1] * Math.sqrt(link.ratio)) + ownError(link, n, state);
+            double[] factor = new double[n];
+            double[] after = new double[n];
+            for (int m = 0; m < n; m++) {
+                factor[m] = Math.exp(-link.modes.rate(m) * t);
+                after[m] = state[m] * factor[m];
+            }
+            decay[k] = factor;
+            end[k] = after;
+            state = after;
+            clinging = liquorAtEnd(link, n, after, clinging);
+            liquor[k] = clinging;
+        }
+    }
+
+    private static double ownError(Link link, int count, double[] state) {
+        return (link.defect(count) + ROUNDING) * Math.sqrt(Link.dot(state, state, count));
+    }
+
+    private static double liquorAtEnd(Link link, int count, double[] after, double before) {
+        Surroundings around = link.stage.surroundings();
+        if (around instanceof Surroundings.Vessel) {
+            double sum = link.offset;
+            for (int m = 0; m < count; m++) {
+                sum += after[m] * link.modes.liquor(m);
+            }
+            return sum;
+        }
+        return around instanceof Surroundings.Plenty ? link.offset : before;
+    }
+
+    /** Number of stages followed. */
+    public int size() {
+        return seconds.length;
+    }
+
+    /** A reading at the end of a stage, from 0. */
+    public Reading read(Probe probe, int stage) {
+        int modes = 0;
+        for (int k = 0; k <= stage; k++) {
+            modes += count[k];
+        }
+        return new Reading(value(probe, stage), error(probe, stage), modes, Reading.Method.MODES);
+    }
+
+    /** The value alone of {@link #read}. */
+    public double value(Probe probe, int stage) {
+        if (probe instanceof Probe.Liquor) {
+            return liquor[stage];
+        }
+        if (probe instanceof Probe.Range range) {
+            return value(new Probe.Highest(range.grade()), stage) - value(new Probe.Lowest(range.grade()), stage);
+        }
+        Link link = chain.link(stage);
+        double theta = link.offset + Link.dot(row(probe, stage), end[stage], count[stage]);
+        return link.stage.partition() * theta;
+    }
+
+    /** Where the probe looks: for extrema their place, else the place asked for. */
+    public double place(Probe.Highest probe, int stage) {
+        return chain.extrema(stage, probe.grade()).place(end[stage], count[stage], 1);
+    }
+
+    /** Where the content is lowest, 0 the core to 1 the surface. */
+    public double place(Probe.Lowest probe, int stage) {
+        return chain.extrema(stage, probe.grade()).place(end[stage], count[stage], -1);
+    }
+
+    /**
+     * Derivatives of a reading by the durations of all stages up to its own, kg/m3 per second. For extrema the place is held: by
+     * the envelope theorem that is the derivative wherever it exists.
+     */
+    public double[] gradient(Probe probe, int stage) {
+        return sensitivity(probe, stage).bySeconds();
+    }
+
+    /** Derivatives of a reading by durations and by the contents of all liquors. */
+    public Sensitivity sensitivity(Probe probe, int stage) {
+        if (probe instanceof Probe.Range range) {
+            return sensitivity(new Probe.Highest(range.grade()), stage)
+                    .minus(sensitivity(new Probe.Lowest(range.grade()), stage));
+        }
+        return Adjoint.of(this, probe, stage);
+    }
+
+    Link link(int stage) {
+        return chain.link(stage);
+    }
+
+    int count(int stage) {
+        return count[stage];
+    }
+
+    double[] decay(int stage) {
+        return decay[stage];
+    }
+
+    double[] end(int stage) {
+        return end[stage];
+    }
+
+    /** The functional that the reading is, on the coefficients at the end of the stage; theta, without the offset. */
+    double[] row(Probe probe, int stage) {
+        Link link = chain.link(stage);
+        int n = count[stage];
+        double[] row = new double[n];
+        if (probe instanceof Probe.Mean mean) {
+            for (int m = 0; m < n; m++) {
+                row[m] = link.modes.mean(mean.grade(), m);
+            }
+        } else if (probe instanceof Probe.LotMean) {
+            double whole = 0;
+            for (int j = 0; j < chain.lot().size(); j++) {
+                whole += link.modes.capacity(j);
+            }
+            for (int m = 0; m < n; m++) {
+                row[m] = link.modes.uniform(m) / whole;
+            }
+        } else if (probe instanceof Probe.Liquor) {
+            for (int m = 0; m < n; m++) {
+                row[m] = link.modes.liquor(m);
+            }
+        } else {
+            int grade;
+            double x;
+            if (probe instanceof Probe.At at) {
+                grade = at.grade();
+                x = at.position();
+            } else if (probe instanceof Probe.Highest highest) {
+                grade = highest.grade();
+                x = place(highest, stage);
+            } else if (probe instanceof Probe.Lowest lowest) {
+                grade = lowest.grade();
+                x = place(lowest, stage);
+            } else {
+                throw new IllegalArgumentException("no single functional reads " + probe);
+            }
+            for (int m = 0; m < n; m++) {
+                row[m] = link.modes.at(grade, m, x);
+            }
+        }
+        return row;
+    }
+
+    private double error(Probe probe, int stage) {
+        Link link = chain.link(stage);
+        double scale = link.stage.partition();
+        if (probe instanceof Probe.Liquor) {
+            if (!(link.stage.surroundings() instanceof Surroundings.Vessel)) {
+                return stage == 0 || link.stage.wets() ? 0 : error(probe, stage - 1);
+            }
+            scale = 1;
+        }
+        if (probe instanceof Probe.Range range) {
+            return error(new Probe.Highest(range.grade()), stage) + error(new Probe.Lowest(range.grade()), stage);
+        }
+        double[] row = row(probe, stage);
+        return scale * (error[stage] * Math.sqrt(Link.dot(row, row, count[stage])) + ROUNDING * Math.abs(link.offset));
+    }
+}

@@ -1,0 +1,38 @@
+package org.soakwright.solver.chain;
+
+import org.soakwright.solver.Require;
+
+/** What can be read at the end of a stage: contents of pieces in kg/m3 of piece, of the liquor in kg/m3. */
+public sealed interface Probe {
+    /** Mean over one grade's pieces. */
+    record Mean(int grade) implements Probe {}
+
+    /** Mean over the lot, by volume. */
+    record LotMean() implements Probe {}
+
+    /**
+     * At one place of one grade's pieces.
+     *
+     * @param position 0, the core or sealed face, to 1, the wetted surface
+     */
+    record At(int grade, double position) implements Probe {
+        public At {
+            Require.notNegative("position", position, "1");
+            if (position > 1) {
+                throw new IllegalArgumentException("position must be at most 1, found " + position);
+            }
+        }
+    }
+
+    /** Largest content anywhere in one grade's pieces. */
+    record Highest(int grade) implements Probe {}
+
+    /** Smallest content anywhere in one grade's pieces. */
+    record Lowest(int grade) implements Probe {}
+
+    /** Highest less lowest. */
+    record Range(int grade) implements Probe {}
+
+    /** The liquor last met. */
+    record Liquor() implements Probe {}
+}
