@@ -1,5 +1,7 @@
 package org.soakwright.solver.chain;
 
+import java.util.Arrays;
+
 /**
  * A chain followed for one choice of durations. Readings can be taken at the end of every stage, with their error and their
  * derivatives by every duration (one backward pass, the adjoint).
@@ -13,8 +15,10 @@ public final class Course {
     private final int[] count;
     private final double[][] decay;
     private final double[][] end;
+    private final double[] poured;
     private final double[] liquor;
     private final double[] error;
+    private final double[][] places;
 
     Course(Chain chain, double[] seconds) {
         int stages = seconds.length;
@@ -27,8 +31,10 @@ public final class Course {
         count = new int[stages];
         decay = new double[stages][];
         end = new double[stages][];
+        poured = new double[stages];
         liquor = new double[stages];
         error = new double[stages];
+        places = new double[stages][];
         double[] state = new double[0];
         double clinging = 0;
         for (int k = 0; k < stages; k++) {
@@ -41,6 +47,7 @@ public final class Course {
             count[k] = n;
             state = link.begin(n, state, state.length, clinging);
             error[k] = (k == 0 ? 0 : error[k - 1] * Math.sqrt(link.ratio)) + ownError(link, n, state);
+            poured[k] = link.stage.wets() ? (1 - link.mixed) * link.fresh + link.mixed * clinging : clinging;
             double[] factor = new double[n];
             double[] after = new double[n];
             for (int m = 0; m < n; m++) {
@@ -85,6 +92,11 @@ public final class Course {
         return new Reading(value(probe, stage), error(probe, stage), modes, Reading.Method.MODES);
     }
 
+    /** Content of the liquor at the beginning of a stage, with what clung to the pieces mixed in; kg/m3. */
+    public double liquorAtStart(int stage) {
+        return poured[stage];
+    }
+
     /** The value alone of {@link #read}. */
     public double value(Probe probe, int stage) {
         if (probe instanceof Probe.Liquor) {
@@ -98,14 +110,26 @@ public final class Course {
         return link.stage.partition() * theta;
     }
 
-    /** Where the probe looks: for extrema their place, else the place asked for. */
+    /** Where the content is highest, from 0, the core, to 1, the surface. */
     public double place(Probe.Highest probe, int stage) {
-        return chain.extrema(stage, probe.grade()).place(end[stage], count[stage], 1);
+        return place(2 * probe.grade(), stage, 1);
     }
 
-    /** Where the content is lowest, 0 the core to 1 the surface. */
+    /** Where the content is lowest, from 0, the core, to 1, the surface. */
     public double place(Probe.Lowest probe, int stage) {
-        return chain.extrema(stage, probe.grade()).place(end[stage], count[stage], -1);
+        return place(2 * probe.grade() + 1, stage, -1);
+    }
+
+    /** Searched for once: value, error and derivatives all ask. */
+    private double place(int slot, int stage, double sign) {
+        if (places[stage] == null) {
+            places[stage] = new double[2 * chain.lot().size()];
+            Arrays.fill(places[stage], Double.NaN);
+        }
+        if (Double.isNaN(places[stage][slot])) {
+            places[stage][slot] = chain.extrema(stage, slot / 2).place(end[stage], count[stage], sign);
+        }
+        return places[stage][slot];
     }
 
     /**

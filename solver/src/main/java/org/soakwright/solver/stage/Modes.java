@@ -19,7 +19,7 @@ public final class Modes {
     private final List<Grade> lot;
     private final Conditions conditions;
     private final PlainRoots[] roots;
-    private final double[] slowest;
+    private final double slowestOfQuickest;
     private double complete = -1;
     private double lastPole;
     private int size;
@@ -37,12 +37,13 @@ public final class Modes {
         this.conditions = conditions;
         int grades = lot.size();
         roots = new PlainRoots[grades];
-        slowest = new double[grades];
+        double quickest = 0;
         for (int j = 0; j < grades; j++) {
             roots[j] = new PlainRoots(lot.get(j), conditions);
             roots[j].upTo(0);
-            slowest[j] = roots[j].rate(0);
+            quickest = Math.max(quickest, roots[j].rate(0));
         }
+        slowestOfQuickest = quickest;
         amplitude = new double[grades][16];
         frequency = new double[grades][16];
         wave = new double[grades][16];
@@ -61,7 +62,7 @@ public final class Modes {
 
     /** The largest of the grades' slowest rates, 1/s, each grade taken alone in unlimited liquor. */
     public double slowestOfQuickest() {
-        return Arrays.stream(slowest).max().orElse(0);
+        return slowestOfQuickest;
     }
 
     /** How many modes have a rate at or below the limit, roughly, without finding them. */

@@ -1,0 +1,135 @@
+package org.soakwright.planner.batch;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.text.Unsound;
+import org.soakwright.solver.chain.Chain;
+import org.soakwright.solver.chain.Course;
+import org.soakwright.solver.chain.StageTooShort;
+
+/**
+ * A recipe ready to be followed: one chain for each species, all sharing the durations of the steps. Not safe for use by several
+ * threads at once.
+ */
+public final class Batch {
+    private final Recipe recipe;
+    private final Translation translation;
+    private final List<Translation.Slot> slots;
+    private final List<Chain> chains;
+    private final int[] lastStage;
+    private final Cost cost;
+    private final List<Requirement> requirements;
+    private long evaluations;
+
+    public Batch(Recipe recipe) {
+        this.recipe = recipe;
+        translation = new Translation(recipe);
+        slots = translation.slots();
+        chains = recipe.species().stream().map(translation::chain).toList();
+        lastStage = new int[recipe.steps().size()];
+        for (int k = 0; k < slots.size(); k++) {
+            if (slots.get(k).part() > 0) {
+                lastStage[slots.get(k).step()] = k;
+            }
+        }
+        cost = new Cost(recipe);
+        requirements = Requirements.of(this);
+    }
+
+    public Recipe recipe() {
+        return recipe;
+    }
+
+    /** How many choices of durations have been followed so far. */
+    public long evaluations() {
+        return evaluations;
+    }
+
+    /**
+     * Follows the recipe for given durations.
+     *
+     * @param stepSeconds one for each step, s; above 0
+     * @throws Unsound when a step is too short to be computed, at the place of its time
+     */
+    public Run follow(double... stepSeconds) {
+        List<Step> steps = recipe.steps();
+        if (stepSeconds.length != steps.size()) {
+            throw new IllegalArgumentException(steps.size() + " durations wanted, found " + stepSeconds.length);
+        }
+        evaluations++;
+        double[] seconds = new double[slots.size()];
+        for (int k = 0; k < seconds.length; k++) {
+            seconds[k] = slots.get(k).seconds(stepSeconds);
+        }
+        List<Course> courses = new ArrayList<>(chains.size());
+        for (int s = 0; s < chains.size(); s++) {
+            try {
+                courses.add(chains.get(s).follow(seconds));
+            } catch (StageTooShort tooShort) {
+                throw tooShort(tooShort, s, seconds);
+            }
+        }
+        return new Run(this, stepSeconds.clone(), courses);
+    }
+
+    private Unsound tooShort(StageTooShort cause, int species, double[] seconds) {
+        Translation.Slot slot = slots.get(cause.stage());
+        Step step = recipe.steps().get(slot.step());
+        boolean between = slot.part() == 0 && recipe.between() != null;
+        double shortest = between ? cause.shortest() : cause.shortest() / slot.part();
+        Unsound unsound = new Unsound(
+                between && recipe.between() != null
+                        ? recipe.between().place()
+                        : step.time().place(),
+                (between ? "the time between steps" : "the time of " + step.name())
+                        + " is too short to be computed for "
+                        + recipe.species().get(species).name()
+                        + " by this version: found " + Durations.practical(seconds[cause.stage()])
+                        + (slot.part() > 0 && slot.part() < 1 ? " per fill" : "") + ", which needs more than "
+                        + Chain.MOST_MODES + " modes; write at least " + Durations.practical(Math.ceil(shortest)));
+        unsound.initCause(cause);
+        return unsound;
+    }
+
+    Translation translation() {
+        return translation;
+    }
+
+    List<Translation.Slot> slots() {
+        return slots;
+    }
+
+    List<Requirement> requirements() {
+        return requirements;
+    }
+
+    Cost cost() {
+        return cost;
+    }
+
+    int lastStage(int step) {
+        return lastStage[step];
+    }
+
+    int step(String name) {
+        for (int i = 0; i < recipe.steps().size(); i++) {
+            if (recipe.steps().get(i).name().equals(name)) {
+                return i;
+            }
+        }
+        throw new IllegalArgumentException("no step " + name);
+    }
+
+    int species(String name) {
+        List<Species> species = recipe.species();
+        for (int i = 0; i < species.size(); i++) {
+            if (species.get(i).name().equals(name)) {
+                return i;
+            }
+        }
+        throw new IllegalArgumentException("no species " + name);
+    }
+}

@@ -1,0 +1,92 @@
+package org.soakwright.planner.batch;
+
+import java.util.List;
+import java.util.OptionalDouble;
+import org.soakwright.recipes.model.Goal;
+import org.soakwright.recipes.model.Prices;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Renewal;
+import org.soakwright.recipes.model.Step;
+
+/** The totals of a recipe, all linear in the durations of its steps. */
+final class Cost {
+    private final double transferSeconds;
+    private final double standingM3;
+    private final double standingMoney;
+    private final double[] flowM3;
+    private final double[] moneyPerSecond;
+    private final boolean countable;
+    private final boolean priced;
+    private final double moneyPerSecondOverall;
+
+    Cost(Recipe recipe) {
+        List<Step> steps = recipe.steps();
+        Prices prices = recipe.prices();
+        transferSeconds = recipe.between() == null ? 0 : recipe.between().si() * (steps.size() - 1);
+        flowM3 = new double[steps.size()];
+        moneyPerSecond = new double[steps.size()];
+        moneyPerSecondOverall = prices == null ? 0 : prices.perSecond();
+        priced = prices != null || steps.stream().anyMatch(step -> step.head().price() != null);
+        double volume = 0;
+        double money = 0;
+        boolean all = true;
+        for (int i = 0; i < steps.size(); i++) {
+            moneyPerSecond[i] = moneyPerSecondOverall;
+            if (steps.get(i) instanceof Step.Wet wet) {
+                OptionalDouble fill = wet.liquor().volumeM3(recipe.lot());
+                if (fill.isEmpty()) {
+                    all = false;
+                    continue;
+                }
+                double price = recipe.liquorPrice(wet).map(one -> one.perM3()).orElse(0.0);
+                int fills = 1;
+                if (wet instanceof Step.Rinse rinse) {
+                    if (rinse.renewal() instanceof Renewal.Fills several) {
+                        fills = several.count();
+                    } else if (rinse.renewal() instanceof Renewal.Flow flow) {
+                        flowM3[i] = flow.rate().si();
+                        moneyPerSecond[i] += price * flowM3[i];
+                    }
+                }
+                volume += fills * fill.getAsDouble();
+                money += price * fills * fill.getAsDouble();
+            }
+        }
+        standingM3 = volume;
+        standingMoney = money + moneyPerSecondOverall * transferSeconds;
+        countable = all;
+    }
+
+    Totals of(double[] seconds) {
+        OptionalDouble liquor = countable ? OptionalDouble.of(of(Goal.LIQUOR, seconds)) : OptionalDouble.empty();
+        OptionalDouble cost = countable && priced ? OptionalDouble.of(of(Goal.COST, seconds)) : OptionalDouble.empty();
+        return new Totals(of(Goal.TIME, seconds), liquor, cost);
+    }
+
+    /** Seconds, m3 or money. */
+    double of(Goal goal, double[] seconds) {
+        double sum = standing(goal);
+        for (int i = 0; i < seconds.length; i++) {
+            sum += rate(goal, i) * seconds[i];
+        }
+        return sum;
+    }
+
+    /** What a total is before any step has lasted. */
+    private double standing(Goal goal) {
+        return switch (goal) {
+            case TIME -> transferSeconds;
+            case LIQUOR -> standingM3;
+            case COST -> standingMoney;
+        };
+    }
+
+    /** What one second of a step adds to a total. */
+    double rate(Goal goal, int step) {
+        return switch (goal) {
+            case TIME -> 1;
+            case LIQUOR -> flowM3[step];
+            case COST -> moneyPerSecond[step];
+        };
+    }
+}

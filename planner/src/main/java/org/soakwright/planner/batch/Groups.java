@@ -1,0 +1,101 @@
+package org.soakwright.planner.batch;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.soakwright.recipes.model.Film;
+import org.soakwright.recipes.model.Medium;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Renewal;
+import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.stage.Bath;
+import org.soakwright.solver.stage.Conditions;
+import org.soakwright.solver.stage.Surface;
+
+/** The dimensionless groups of a recipe: what decides each step, before anything is followed. */
+public final class Groups {
+    private Groups() {}
+
+    /**
+     * The groups of one step for one species in one grade.
+     *
+     * @param foLow Fourier number D t/L^2 at the step's shortest duration (its definite one where it has one), 1; L is
+     *     the depth from the wetted surface to the core, t the whole time of the step, all fills together
+     * @param foHigh the same at the longest
+     * @param biot k L/(K D), 1; 0 where nothing passes the surface, infinite where there is no film
+     * @param capacityRatio volume of liquor over partition times volume of all pieces, 1, of one fill; empty where the
+     *     surroundings are unlimited or there are none
+     * @param regime what that means, in words
+     */
+    public record Group(
+            String step,
+            String species,
+            String piece,
+            double foLow,
+            double foHigh,
+            double biot,
+            OptionalDouble capacityRatio,
+            String regime) {}
+
+    /** Every group, in the order of steps, then species, then grades. */
+    public static List<Group> of(Recipe recipe) {
+        double[] shortest = StepTimes.shortest(recipe);
+        double[] longest = StepTimes.longest(recipe);
+        List<Grade> lot = new Translation(recipe).lot();
+        List<Group> groups = new ArrayList<>();
+        for (int i = 0; i < recipe.steps().size(); i++) {
+            Step step = recipe.steps().get(i);
+            for (Species species : recipe.species()) {
+                // Neither the pace nor the Biot number asks about the bath.
+                Conditions conditions = new Conditions(
+                        Translation.diffusivity(species, step),
+                        step instanceof Step.Dry ? 1 : Translation.partition(species, step),
+                        surface(species, step),
+                        new Bath.Unlimited());
+                OptionalDouble ratio = capacityRatio(recipe, species, step);
+                for (int j = 0; j < lot.size(); j++) {
+                    Grade grade = lot.get(j);
+                    double biot = conditions.biot(grade);
+                    double low = conditions.pace(grade) * shortest[i];
+                    double high = conditions.pace(grade) * longest[i];
+                    String piece = recipe.lot().grades().get(j).name();
+                    String regime = new Regime(grade.axis(), biot, low, high)
+                            .inWords(isClosed(step) ? ratio : OptionalDouble.empty());
+                    groups.add(new Group(step.name(), species.name(), piece, low, high, biot, ratio, regime));
+                }
+            }
+        }
+        return List.copyOf(groups);
+    }
+
+    private static Surface surface(Species species, Step step) {
+        if (step instanceof Step.Wet wet && species.exchangesWith(Medium.LIQUOR)) {
+            return behind(wet.film());
+        }
+        if (step instanceof Step.Dry dry && species.exchangesWith(Medium.AIR)) {
+            return behind(dry.film());
+        }
+        return new Surface.Sealed();
+    }
+
+    private static Surface behind(Film film) {
+        return film instanceof Film.Coefficient coefficient
+                ? new Surface.Film(coefficient.value().si())
+                : new Surface.Open();
+    }
+
+    private static OptionalDouble capacityRatio(Recipe recipe, Species species, Step step) {
+        if (!(step instanceof Step.Wet wet) || !species.exchangesWith(Medium.LIQUOR)) {
+            return OptionalDouble.empty();
+        }
+        OptionalDouble volume = wet.liquor().volumeM3(recipe.lot());
+        double pieces = Translation.partition(species, step) * recipe.lot().volumeM3();
+        return volume.isPresent() ? OptionalDouble.of(volume.getAsDouble() / pieces) : OptionalDouble.empty();
+    }
+
+    private static boolean isClosed(Step step) {
+        return !(step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Flow);
+    }
+}

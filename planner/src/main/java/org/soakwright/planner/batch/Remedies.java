@@ -1,0 +1,302 @@
+package org.soakwright.planner.batch;
+
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Function;
+import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.model.Goal;
+import org.soakwright.recipes.model.Liquor;
+import org.soakwright.recipes.model.LiquorVolume;
+import org.soakwright.recipes.model.Product;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Renewal;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.StepHead;
+import org.soakwright.recipes.model.Target;
+import org.soakwright.recipes.model.Time;
+import org.soakwright.recipes.text.Kind;
+import org.soakwright.recipes.text.Unit;
+import org.soakwright.recipes.text.Unsound;
+
+/** Single changes to a recipe that no choice can satisfy, each planned again before it is offered. */
+final class Remedies {
+    /** Cold holding of food, FDA Food Code 3-501.16: at most 5 Cel. */
+    private static final double COLDEST_LIMIT_KELVIN = 278.15;
+
+    private static final double[] LONGER = {1.25, 1.5, 2, 3, 4, 8};
+    private static final double[] WARMER = {2, 5, 10, 15, 20};
+    private static final double[] MORE = {1.25, 1.5, 2, 3, 5};
+    private static final int MOST_FILLS_ADDED = 3;
+
+    private final Recipe recipe;
+    private final List<Plan.Remedy> found = new ArrayList<>();
+
+    private Remedies(Recipe recipe) {
+        this.recipe = recipe;
+    }
+
+    static List<Plan.Remedy> of(Recipe recipe, Progress progress) {
+        Remedies remedies = new Remedies(recipe);
+        List<Runnable> kinds = List.of(
+                remedies::longer, remedies::moreFills, remedies::warmer, remedies::moreLiquor, remedies::laterTotal);
+        for (int i = 0; i < kinds.size(); i++) {
+            progress.at("looking for a remedy", (double) i / kinds.size());
+            kinds.get(i).run();
+        }
+        return List.copyOf(remedies.found);
+    }
+
+    private boolean offer(String kind, @Nullable Recipe changed, Function<Run, String> words, String caution) {
+        if (changed == null) {
+            return false;
+        }
+        try {
+            Optional<Run> run = Planner.best(changed);
+            run.ifPresent(met -> found.add(new Plan.Remedy(kind, words.apply(met), met.totals(), caution)));
+            return run.isPresent();
+        } catch (Unsound tooShort) {
+            return false;
+        }
+    }
+
+    private void longer() {
+        for (double factor : LONGER) {
+            if (offer("longer", recipe.withSteps(each(step -> stretched(step, factor))), this::longest, "")) {
+                return;
+            }
+        }
+    }
+
+    private String longest(Run run) {
+        StringBuilder text = new StringBuilder("allow ");
+        double[] seconds = run.seconds();
+        boolean first = true;
+        for (int i = 0; i < seconds.length; i++) {
+            Time time = recipe.steps().get(i).time();
+            double most = time.seconds(time.choices() - 1);
+            if (seconds[i] > most * (1 + 1e-12)) {
+                text.append(first ? "" : ", ")
+                        .append(Durations.practical(seconds[i]))
+                        .append(" for ")
+                        .append(recipe.steps().get(i).name());
+                first = false;
+            }
+        }
+        return text.toString();
+    }
+
+    private static Step stretched(Step step, double factor) {
+        Time time = step.time();
+        Quantity longest;
+        Quantity from;
+        Quantity grain;
+        if (time instanceof Time.Between between) {
+            longest = between.to();
+            from = between.from();
+            grain = between.grain();
+        } else {
+            from = time instanceof Time.AnyOf any ? any.durations().get(0) : ((Time.Fixed) time).duration();
+            longest = time instanceof Time.AnyOf several
+                    ? several.durations().get(several.durations().size() - 1)
+                    : from;
+            grain = new Quantity(BigDecimal.ONE, minute(), time.place());
+        }
+        Quantity to = new Quantity(longest.value().multiply(BigDecimal.valueOf(factor)), longest.unit(), time.place());
+        if (to.si() - from.si() < grain.si()) {
+            return step;
+        }
+        return step.with(step.head().withTime(new Time.Between(time.place(), from, to, grain, null)));
+    }
+
+    private static Unit minute() {
+        return Kind.DURATION.unit("min").orElseThrow();
+    }
+
+    private void moreFills() {
+        for (int added = 1; added <= MOST_FILLS_ADDED; added++) {
+            int more = added;
+            String words = more == 1 ? "one more" : more + " more";
+            int last = lastWet();
+            if (last < 0) {
+                return;
+            }
+            Step step = recipe.steps().get(last);
+            boolean fills = step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Fills;
+            if (((Step.Wet) step).liquor().isUnlimited()
+                    || step instanceof Step.Rinse running && running.renewal() instanceof Renewal.Flow) {
+                return;
+            }
+            Recipe changed = fills ? withFills(last, more) : withCopies(last, more);
+            String change = fills
+                    ? "use " + words + " fill" + (more == 1 ? "" : "s") + " in " + step.name()
+                    : "add " + words + " step" + (more == 1 ? "" : "s") + " like " + step.name() + " after it";
+            if (offer("fill", changed, run -> change, "")) {
+                return;
+            }
+        }
+    }
+
+    private int lastWet() {
+        int last = -1;
+        for (int i = 0; i < recipe.steps().size(); i++) {
+            last = recipe.steps().get(i) instanceof Step.Wet ? i : last;
+        }
+        return last;
+    }
+
+    private Recipe withFills(int index, int added) {
+        List<Step> steps = new ArrayList<>(recipe.steps());
+        Step.Rinse rinse = (Step.Rinse) steps.get(index);
+        Renewal.Fills fills = (Renewal.Fills) rinse.renewal();
+        steps.set(index, rinse.with(new Renewal.Fills(fills.count() + added, fills.place())));
+        return recipe.withSteps(steps);
+    }
+
+    private Recipe withCopies(int index, int added) {
+        List<Step> steps = new ArrayList<>(recipe.steps());
+        for (int i = 1; i <= added; i++) {
+            Step step = steps.get(index);
+            StepHead head = step.head();
+            steps.add(
+                    index + i,
+                    step.with(new StepHead(
+                            head.place(),
+                            head.name() + " (again " + i + ")",
+                            head.time(),
+                            head.temperature(),
+                            head.overrides(),
+                            head.price())));
+        }
+        return recipe.withSteps(steps);
+    }
+
+    private void warmer() {
+        boolean matters = recipe.species().stream()
+                .anyMatch(species -> species.diffusivity().dependsOnTemperature());
+        if (!matters) {
+            return;
+        }
+        boolean food = recipe.products().contains(Product.FOOD);
+        double limit = food ? COLDEST_LIMIT_KELVIN : Double.POSITIVE_INFINITY;
+        String caution = food
+                ? "food kept at or below 5 Cel; check what the warmth does to the product"
+                : "check what the warmth does to the product and to vapours";
+        for (double kelvins : WARMER) {
+            List<Step> steps = each(step -> warmed(step, kelvins, limit));
+            if (steps.equals(recipe.steps())) {
+                return;
+            }
+            if (offer(
+                    "warmer",
+                    recipe.withSteps(steps),
+                    run -> temperatures(run.batch().recipe()),
+                    caution)) {
+                return;
+            }
+        }
+    }
+
+    private static Step warmed(Step step, double kelvins, double limit) {
+        Quantity temperature = step.temperature();
+        if (!(step instanceof Step.Wet) || temperature == null || temperature.si() >= limit) {
+            return step;
+        }
+        double to = Math.min(limit, temperature.si() + kelvins);
+        return step.with(step.head().withTemperature(Quantity.ofSi(to, temperature.unit(), temperature.place())));
+    }
+
+    private String temperatures(Recipe warmed) {
+        StringBuilder text = new StringBuilder("warm ");
+        boolean first = true;
+        for (int i = 0; i < warmed.steps().size(); i++) {
+            Quantity now = warmed.steps().get(i).temperature();
+            if (now != null && !now.equals(recipe.steps().get(i).temperature())) {
+                text.append(first ? "" : ", ")
+                        .append(warmed.steps().get(i).name())
+                        .append(" to ")
+                        .append(now);
+                first = false;
+            }
+        }
+        return text.toString();
+    }
+
+    private void moreLiquor() {
+        for (double factor : MORE) {
+            List<Step> steps = each(step -> enlarged(step, factor));
+            if (steps.equals(recipe.steps())) {
+                return;
+            }
+            String words =
+                    "use " + BigDecimal.valueOf(factor).stripTrailingZeros().toPlainString()
+                            + " times the liquor in every closed step";
+            if (offer("liquor", recipe.withSteps(steps), run -> words, "check that it fits the vessel")) {
+                return;
+            }
+        }
+    }
+
+    private static Step enlarged(Step step, double factor) {
+        if (!(step instanceof Step.Wet wet)
+                || wet.liquor().isUnlimited()
+                || step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Flow) {
+            return step;
+        }
+        Liquor liquor = wet.liquor();
+        LiquorVolume volume = liquor.volume() instanceof LiquorVolume.Ratio ratio
+                ? new LiquorVolume.Ratio(times(ratio.value(), factor))
+                : new LiquorVolume.Volume(times(((LiquorVolume.Volume) liquor.volume()).value(), factor));
+        return wet.with(new Liquor(liquor.place(), volume, liquor.contents(), liquor.othersZero(), liquor.density()));
+    }
+
+    private static Quantity times(Quantity quantity, double factor) {
+        return new Quantity(quantity.value().multiply(BigDecimal.valueOf(factor)), quantity.unit(), quantity.place());
+    }
+
+    /** Where only a total stands in the way: what it would have to be. */
+    private void laterTotal() {
+        List<Target> others = recipe.targets().stream()
+                .filter(target -> !(target instanceof Target.OfTotal))
+                .toList();
+        if (others.size() == recipe.targets().size()) {
+            return;
+        }
+        Recipe changed = new Recipe(
+                recipe.place(),
+                recipe.title(),
+                recipe.products(),
+                recipe.lot(),
+                recipe.species(),
+                recipe.between(),
+                recipe.steps(),
+                others,
+                recipe.minimise(),
+                recipe.prices());
+        offer("total", changed, run -> "allow totals of " + totals(run), "");
+    }
+
+    private String totals(Run run) {
+        List<String> words = new ArrayList<>();
+        for (Target target : recipe.targets()) {
+            if (target instanceof Target.OfTotal total) {
+                double value = run.batch().cost().of(total.total(), run.seconds());
+                words.add(
+                        total.total() == Goal.TIME
+                                ? Durations.practical(value)
+                                : String.format(
+                                        java.util.Locale.ROOT,
+                                        "%.4g %s",
+                                        total.atMost().unit().fromSi(value),
+                                        total.atMost().unit()));
+            }
+        }
+        return String.join(" and ", words);
+    }
+
+    private List<Step> each(Function<Step, Step> change) {
+        return recipe.steps().stream().map(change).toList();
+    }
+}

@@ -1,0 +1,55 @@
+package org.soakwright.planner.batch;
+
+import org.soakwright.recipes.model.Goal;
+import org.soakwright.solver.chain.Probe;
+
+/**
+ * One side of one target for one grade, in SI. Its miss is above zero while it is not met; it is the logarithm of value over limit, in
+ * which residuals are nearly straight lines of time, continued linearly below a hundredth of the limit so that zero and rounding
+ * noise do no harm.
+ */
+sealed interface Requirement {
+    int target();
+
+    double limit();
+
+    /** Whether the value must not exceed the limit; else it must not fall short. */
+    boolean upper();
+
+    /** What a species' chain reads at the end of a stage. */
+    record OfContent(int target, int species, int stage, Probe probe, double limit, boolean upper, double scale)
+            implements Requirement {}
+
+    /** What a total adds up to. */
+    record OfTotal(int target, Goal goal, double limit) implements Requirement {
+        @Override
+        public boolean upper() {
+            return true;
+        }
+    }
+
+    double KNEE = 0.01;
+
+    default double miss(double value) {
+        double ratio = value / divisor();
+        double offset = limit() > 0 ? 0 : 1;
+        double logarithm =
+                ratio + offset >= KNEE ? Math.log(ratio + offset) : Math.log(KNEE) + (ratio + offset - KNEE) / KNEE;
+        return upper() ? logarithm : -logarithm;
+    }
+
+    /** d miss / d value. */
+    default double missSlope(double value) {
+        double ratio = value / divisor() + (limit() > 0 ? 0 : 1);
+        double slope = 1 / (divisor() * Math.max(ratio, KNEE));
+        return upper() ? slope : -slope;
+    }
+
+    /** The limit, or where that is zero the scale of what is read. */
+    private double divisor() {
+        if (limit() > 0) {
+            return limit();
+        }
+        return this instanceof OfContent content && content.scale() > 0 ? content.scale() : 1;
+    }
+}

@@ -1,0 +1,148 @@
+package org.soakwright.planner.batch;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.soakwright.recipes.model.Medium;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.text.Unit;
+import org.soakwright.solver.chain.Course;
+import org.soakwright.solver.chain.Probe;
+import org.soakwright.solver.chain.Reading;
+
+/** A recipe followed for one choice of durations. */
+public final class Run {
+    private final Batch batch;
+    private final double[] seconds;
+    private final List<Course> courses;
+
+    Run(Batch batch, double[] seconds, List<Course> courses) {
+        this.batch = batch;
+        this.seconds = seconds;
+        this.courses = courses;
+    }
+
+    public Batch batch() {
+        return batch;
+    }
+
+    /** Duration of each step, s. */
+    public double[] seconds() {
+        return seconds.clone();
+    }
+
+    public Totals totals() {
+        return batch.cost().of(seconds);
+    }
+
+    /** The end of a step, from 0. */
+    public StepEnd end(int step) {
+        Recipe recipe = batch.recipe();
+        int stage = batch.lastStage(step);
+        double between = recipe.between() == null ? 0 : recipe.between().si();
+        double from = step * between;
+        for (int i = 0; i < step; i++) {
+            from += seconds[i];
+        }
+        List<StepEnd.Liquor> liquor = new ArrayList<>();
+        List<StepEnd.LotMean> means = new ArrayList<>();
+        for (int s = 0; s < recipe.species().size(); s++) {
+            Species species = recipe.species().get(s);
+            Course course = courses.get(s);
+            if (recipe.steps().get(step) instanceof Step.Wet && species.exchangesWith(Medium.LIQUOR)) {
+                liquor.add(new StepEnd.Liquor(
+                        species.name(), course.liquorAtStart(stage), course.value(new Probe.Liquor(), stage)));
+            }
+            Unit unit = species.start().unit();
+            double mean = course.value(new Probe.LotMean(), stage);
+            means.add(new StepEnd.LotMean(species.name(), recipe.lot().express(mean, unit), unit));
+        }
+        List<StepEnd.Piece> pieces = new ArrayList<>();
+        for (int j = 0; j < recipe.lot().grades().size(); j++) {
+            List<StepEnd.Content> contents = new ArrayList<>();
+            for (int s = 0; s < recipe.species().size(); s++) {
+                contents.add(content(s, j, stage));
+            }
+            pieces.add(new StepEnd.Piece(recipe.lot().grades().get(j).name(), List.copyOf(contents)));
+        }
+        Step done = recipe.steps().get(step);
+        return new StepEnd(
+                done, from, from + seconds[step], List.copyOf(liquor), List.copyOf(means), List.copyOf(pieces));
+    }
+
+    private StepEnd.Content content(int s, int grade, int stage) {
+        Recipe recipe = batch.recipe();
+        Species species = recipe.species().get(s);
+        Course course = courses.get(s);
+        Unit unit = species.start().unit();
+        double[] values = new double[org.soakwright.recipes.model.Reading.values().length];
+        double error = 0;
+        for (org.soakwright.recipes.model.Reading kind : org.soakwright.recipes.model.Reading.values()) {
+            Reading reading = course.read(Requirements.probe(kind, grade), stage);
+            values[kind.ordinal()] = recipe.lot().express(reading.value(), unit);
+            error = Math.max(error, recipe.lot().express(reading.error(), unit));
+        }
+        return new StepEnd.Content(species.name(), values, error, unit);
+    }
+
+    /** Every target of the recipe, for `grade: each` the grade nearest to failing. */
+    public List<TargetState> targets() {
+        List<TargetState> states = new ArrayList<>();
+        for (int i = 0; i < batch.recipe().targets().size(); i++) {
+            Requirement worst = null;
+            double most = Double.NEGATIVE_INFINITY;
+            for (Requirement requirement : batch.requirements()) {
+                if (requirement.target() == i && miss(requirement) > most) {
+                    most = miss(requirement);
+                    worst = requirement;
+                }
+            }
+            if (worst != null) {
+                states.add(TargetState.of(this, worst));
+            }
+        }
+        return List.copyOf(states);
+    }
+
+    public boolean meetsTargets() {
+        return batch.requirements().stream().allMatch(this::meets);
+    }
+
+    boolean meets(Requirement requirement) {
+        double value = value(requirement);
+        return requirement.upper() ? value <= requirement.limit() : value >= requirement.limit();
+    }
+
+    /** In SI: kg/m3, s, m3 or money. */
+    double value(Requirement requirement) {
+        if (requirement instanceof Requirement.OfTotal total) {
+            return batch.cost().of(total.goal(), seconds);
+        }
+        Requirement.OfContent content = (Requirement.OfContent) requirement;
+        return courses.get(content.species()).value(content.probe(), content.stage());
+    }
+
+    double miss(Requirement requirement) {
+        return requirement.miss(value(requirement));
+    }
+
+    /** Derivative of the miss by the duration of each step, 1/s. */
+    double[] missGradient(Requirement requirement) {
+        double slope = requirement.missSlope(value(requirement));
+        double[] gradient = new double[seconds.length];
+        if (requirement instanceof Requirement.OfTotal total) {
+            for (int i = 0; i < gradient.length; i++) {
+                gradient[i] = slope * batch.cost().rate(total.goal(), i);
+            }
+            return gradient;
+        }
+        Requirement.OfContent content = (Requirement.OfContent) requirement;
+        double[] byStage = courses.get(content.species()).gradient(content.probe(), content.stage());
+        for (int k = 0; k < byStage.length; k++) {
+            Translation.Slot slot = batch.slots().get(k);
+            gradient[slot.step()] += slope * slot.part() * byStage[k];
+        }
+        return gradient;
+    }
+}

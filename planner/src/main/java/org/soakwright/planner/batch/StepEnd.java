@@ -1,0 +1,58 @@
+package org.soakwright.planner.batch;
+
+import java.util.List;
+import org.soakwright.recipes.model.Reading;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.text.Unit;
+
+/**
+ * Where things stand when a step ends.
+ *
+ * @param from running clock at the step's beginning, s from the start of the batch
+ * @param to running clock at its end, s
+ * @param liquor by species that exchanges with it, for a step in liquor; of the last fill
+ * @param means the lot's mean by mass of each species
+ * @param pieces each grade
+ */
+public record StepEnd(Step step, double from, double to, List<Liquor> liquor, List<LotMean> means, List<Piece> pieces) {
+    /** What the liquor holds of a species at the beginning, what clung to the pieces mixed in, and at the end; kg/m3 = g/L. */
+    public record Liquor(String species, double start, double end) {}
+
+    /** The lot's mean of a species, in its unit. */
+    public record LotMean(String species, double value, Unit unit) {}
+
+    /** One grade. */
+    public record Piece(String name, List<Content> species) {}
+
+    /** The readings of one species in one grade, in its unit, and the largest error among them. */
+    public static final class Content {
+        private final String species;
+        private final double[] values;
+        private final double error;
+        private final Unit unit;
+
+        Content(String species, double[] values, double error, Unit unit) {
+            this.species = species;
+            this.values = values.clone();
+            this.error = error;
+            this.unit = unit;
+        }
+
+        public String species() {
+            return species;
+        }
+
+        public double value(Reading reading) {
+            return values[reading.ordinal()];
+        }
+
+        /** Bound on the numerical error of every reading. */
+        public double error() {
+            return error;
+        }
+
+        public Unit unit() {
+            return unit;
+        }
+    }
+}

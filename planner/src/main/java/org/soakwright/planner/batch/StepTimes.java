@@ -1,0 +1,61 @@
+package org.soakwright.planner.batch;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Time;
+import org.soakwright.recipes.text.Problem;
+import org.soakwright.recipes.text.Unsound;
+
+/** The durations a recipe itself names: one for each step, s. */
+public final class StepTimes {
+    private StepTimes() {}
+
+    /**
+     * The fixed or planned duration of every step.
+     *
+     * @throws Unsound where steps leave their time open, with one problem for each
+     */
+    public static double[] definite(Recipe recipe) {
+        List<Problem> problems = new ArrayList<>();
+        double[] seconds = new double[recipe.steps().size()];
+        for (int i = 0; i < seconds.length; i++) {
+            Step step = recipe.steps().get(i);
+            Optional<Quantity> time = step.time().definite();
+            if (time.isPresent()) {
+                seconds[i] = time.get().si();
+            } else {
+                problems.add(new Problem(
+                        step.time().place(),
+                        "to follow a recipe every time is definite: found the time of " + step.name()
+                                + " left free; add planned to it, such as planned: "
+                                + Durations.practical(step.time().seconds(0)) + ", or plan the recipe"));
+            }
+        }
+        if (!problems.isEmpty()) {
+            throw new Unsound(problems);
+        }
+        return seconds;
+    }
+
+    /** The definite durations, and the shortest choice where a time is left open: the hardest to compute. */
+    public static double[] shortest(Recipe recipe) {
+        return recipe.steps().stream()
+                .mapToDouble(step -> definiteOr(step.time(), 0))
+                .toArray();
+    }
+
+    /** The definite durations, and the longest choice where a time is left open. */
+    public static double[] longest(Recipe recipe) {
+        return recipe.steps().stream()
+                .mapToDouble(step -> definiteOr(step.time(), step.time().choices() - 1))
+                .toArray();
+    }
+
+    private static double definiteOr(Time time, int choice) {
+        return time.definite().map(Quantity::si).orElseGet(() -> time.seconds(choice));
+    }
+}

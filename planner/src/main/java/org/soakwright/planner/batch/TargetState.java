@@ -1,0 +1,132 @@
+package org.soakwright.planner.batch;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.model.Basis;
+import org.soakwright.recipes.model.Content;
+import org.soakwright.recipes.model.Goal;
+import org.soakwright.recipes.model.Limits;
+import org.soakwright.recipes.model.Liquor;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Target;
+import org.soakwright.solver.chain.Probe;
+
+/**
+ * A target and how it stands.
+ *
+ * @param target as written
+ * @param name how it is called in sheets and results: {@code salt mean, thick}
+ * @param grade the grade meant or, for each, the one nearest to failing; {@code lot}; empty for liquor and totals
+ * @param atMost in the target's own unit; empty where there is no such side
+ * @param value in the target's own unit
+ * @param unit the target's own unit, {@code % of start} for a share of the start
+ */
+public record TargetState(
+        Target target,
+        String name,
+        Optional<String> grade,
+        OptionalDouble atMost,
+        OptionalDouble atLeast,
+        double value,
+        String unit,
+        boolean met) {
+
+    static TargetState of(Run run, Requirement requirement) {
+        Recipe recipe = run.batch().recipe();
+        Target target = recipe.targets().get(requirement.target());
+        boolean met = run.batch().requirements().stream()
+                .filter(one -> one.target() == requirement.target())
+                .allMatch(run::meets);
+        double si = run.value(requirement);
+        String name = name(recipe, requirement);
+        if (target instanceof Target.OfTotal total) {
+            Quantity limit = total.atMost();
+            return new TargetState(
+                    target,
+                    name,
+                    Optional.empty(),
+                    OptionalDouble.of(limit.value().doubleValue()),
+                    OptionalDouble.empty(),
+                    limit.unit().fromSi(si),
+                    limit.unit().symbol(),
+                    met);
+        }
+        if (target instanceof Target.OfLiquor ofLiquor) {
+            int step = run.batch().step(ofLiquor.step().name());
+            Liquor liquor = ((Step.Wet) recipe.steps().get(step)).liquor();
+            return limited(target, name, null, ofLiquor.limits(), expressed(ofLiquor.limits(), si, liquor), met);
+        }
+        Target.OfPieces pieces = (Target.OfPieces) target;
+        Limits limits = pieces.limits();
+        Probe probe = ((Requirement.OfContent) requirement).probe();
+        double value;
+        if (limits.basis() == Basis.OF_START) {
+            double start = StartContent.of(
+                    recipe, recipe.species(pieces.species().name()).orElseThrow(), probe);
+            value = limits.unit().fromSi(si / start);
+        } else {
+            value = recipe.lot().express(si, limits.unit());
+        }
+        return limited(target, name, gradeName(recipe, probe), limits, value, met);
+    }
+
+    private static double expressed(Limits limits, double kgPerM3, Liquor liquor) {
+        if (limits.basis() == Basis.PER_VOLUME) {
+            return limits.unit().fromSi(kgPerM3);
+        }
+        // One kilogram of solute per kilogram of this liquor, in kg/m3: its density.
+        Content whole = new Content(new Quantity(
+                java.math.BigDecimal.ONE,
+                org.soakwright.recipes.text.Kind.PER_MASS.unit("kg/kg").orElseThrow(),
+                limits.place()));
+        return limits.unit().fromSi(kgPerM3 / liquor.kgPerM3(whole));
+    }
+
+    private static TargetState limited(
+            Target target, String name, @Nullable String grade, Limits limits, double value, boolean met) {
+        String unit = limits.unit().symbol();
+        return new TargetState(
+                target,
+                name,
+                Optional.ofNullable(grade),
+                side(limits.atMost()),
+                side(limits.atLeast()),
+                value,
+                limits.basis() == Basis.OF_START ? unit + " of start" : unit,
+                met);
+    }
+
+    private static OptionalDouble side(@Nullable Quantity limit) {
+        return limit == null
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(limit.value().doubleValue());
+    }
+
+    /** {@code salt mean, thick}; {@code salt core after rest, thick}; {@code salt in first water}; {@code total time}. */
+    static String name(Recipe recipe, Requirement requirement) {
+        if (requirement instanceof Requirement.OfTotal total) {
+            return "total " + total.goal().name().toLowerCase(java.util.Locale.ROOT);
+        }
+        Target target = recipe.targets().get(requirement.target());
+        if (target instanceof Target.OfLiquor liquor) {
+            return liquor.species().name() + " in " + liquor.step().name();
+        }
+        Target.OfPieces pieces = (Target.OfPieces) target;
+        String after = pieces.after() == null ? "" : " after " + pieces.after().name();
+        return pieces.species().name() + " " + pieces.reading().word() + after + ", "
+                + gradeName(recipe, ((Requirement.OfContent) requirement).probe());
+    }
+
+    private static String gradeName(Recipe recipe, Probe probe) {
+        int grade = StartContent.grade(probe);
+        return grade < 0 ? "lot" : recipe.lot().grades().get(grade).name();
+    }
+
+    /** The goal of a total, for those who show it. */
+    public Optional<Goal> total() {
+        return target instanceof Target.OfTotal ofTotal ? Optional.of(ofTotal.total()) : Optional.empty();
+    }
+}

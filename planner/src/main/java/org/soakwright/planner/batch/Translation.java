@@ -1,0 +1,172 @@
+package org.soakwright.planner.batch;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.soakwright.recipes.model.Content;
+import org.soakwright.recipes.model.Diffusivity;
+import org.soakwright.recipes.model.Film;
+import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.Medium;
+import org.soakwright.recipes.model.Partition;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Renewal;
+import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.solver.chain.Chain;
+import org.soakwright.solver.chain.Stage;
+import org.soakwright.solver.chain.Start;
+import org.soakwright.solver.chain.Surroundings;
+import org.soakwright.solver.shape.Axis;
+import org.soakwright.solver.stage.Surface;
+
+/**
+ * A recipe in the solver's terms. A step is one stage, or one for each of its fills; the time between two steps is a stage
+ * of rest at the conditions of the step before.
+ */
+final class Translation {
+    /** Gas constant, J/(mol K); exact since the SI of 2019. */
+    private static final double GAS_CONSTANT = 8.31446261815324;
+
+    private final Recipe recipe;
+
+    Translation(Recipe recipe) {
+        this.recipe = recipe;
+    }
+
+    /** Which step each stage belongs to and what part of its time it takes; a stage between steps has a fixed time. */
+    record Slot(int step, double part, double fixedSeconds) {
+        double seconds(double[] stepSeconds) {
+            return fixedSeconds + part * stepSeconds[step];
+        }
+    }
+
+    List<Slot> slots() {
+        List<Slot> slots = new ArrayList<>();
+        for (int i = 0; i < recipe.steps().size(); i++) {
+            if (i > 0 && transfer() > 0) {
+                slots.add(new Slot(i - 1, 0, transfer()));
+            }
+            int fills = fills(recipe.steps().get(i));
+            for (int f = 0; f < fills; f++) {
+                slots.add(new Slot(i, 1.0 / fills, 0));
+            }
+        }
+        return List.copyOf(slots);
+    }
+
+    static int fills(Step step) {
+        return step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Fills fills ? fills.count() : 1;
+    }
+
+    private double transfer() {
+        return recipe.between() == null ? 0 : recipe.between().si();
+    }
+
+    List<org.soakwright.solver.shape.Grade> lot() {
+        double volume = recipe.lot().volumeM3();
+        return recipe.lot().grades().stream()
+                .map(grade -> new org.soakwright.solver.shape.Grade(axis(grade), grade.depth(), grade.share() * volume))
+                .toList();
+    }
+
+    private static Axis axis(Grade grade) {
+        return switch (grade.shape()) {
+            case SLAB -> Axis.SLAB;
+            case CYLINDER -> Axis.CYLINDER;
+            case SPHERE -> Axis.SPHERE;
+        };
+    }
+
+    Chain chain(Species species) {
+        return Chain.of(lot(), start(species), stages(species));
+    }
+
+    private Start start(Species species) {
+        if (species.start() instanceof org.soakwright.recipes.model.Start.Uniform uniform) {
+            return new Start.Uniform(recipe.lot().kgPerM3(uniform.content()));
+        }
+        return new Start.Polyline(((org.soakwright.recipes.model.Start.Profile) species.start())
+                .points().stream()
+                        .map(point ->
+                                new Start.Point(point.position(), recipe.lot().kgPerM3(point.content())))
+                        .toList());
+    }
+
+    private List<Stage> stages(Species species) {
+        List<Stage> stages = new ArrayList<>();
+        Step before = null;
+        for (Step step : recipe.steps()) {
+            if (before != null && transfer() > 0) {
+                stages.add(rest(species, before));
+            }
+            Stage stage = stage(species, step);
+            for (int f = 0; f < fills(step); f++) {
+                stages.add(stage);
+            }
+            before = step;
+        }
+        return stages;
+    }
+
+    private Stage rest(Species species, Step at) {
+        return new Stage(
+                diffusivity(species, at), partition(species, at), new Surface.Sealed(), new Surroundings.Rest(), 0);
+    }
+
+    private Stage stage(Species species, Step step) {
+        double diffusivity = diffusivity(species, step);
+        if (step instanceof Step.Wet wet && species.exchangesWith(Medium.LIQUOR)) {
+            Quantity dragOut = wet.dragOut();
+            double clinging =
+                    dragOut == null ? 0 : dragOut.si() * recipe.lot().massKg().orElseThrow();
+            return new Stage(
+                    diffusivity, partition(species, step), surface(wet.film()), liquor(species, wet), clinging);
+        }
+        if (step instanceof Step.Dry dry && species.exchangesWith(Medium.AIR)) {
+            Content equilibrium = dry.air().equilibrium().get(species.name());
+            double content = equilibrium == null ? 0 : recipe.lot().kgPerM3(equilibrium);
+            return new Stage(diffusivity, 1, surface(dry.film()), new Surroundings.Air(content), 0);
+        }
+        return rest(species, step);
+    }
+
+    private Surroundings liquor(Species species, Step.Wet wet) {
+        double content = wet.liquor().kgPerM3(species.name());
+        if (wet.liquor().isUnlimited()) {
+            return new Surroundings.Plenty(content);
+        }
+        double volume = wet.liquor().volumeM3(recipe.lot()).orElseThrow();
+        double flow = wet instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Flow running
+                ? running.rate().si()
+                : 0;
+        return new Surroundings.Vessel(volume, content, flow, content);
+    }
+
+    private static Surface surface(Film film) {
+        return film instanceof Film.Coefficient coefficient
+                ? new Surface.Film(coefficient.value().si())
+                : new Surface.Open();
+    }
+
+    /** D(T) = D exp(-E/R (1/T - 1/T0)), Arrhenius' law; a step's own diffusivity is taken as it stands. */
+    static double diffusivity(Species species, Step step) {
+        Quantity own = step.head().overrides().diffusivity().get(species.name());
+        if (own != null) {
+            return own.si();
+        }
+        Diffusivity stated = species.diffusivity();
+        Quantity at = stated.at();
+        Quantity energy = stated.activationEnergy();
+        Quantity temperature = step.temperature();
+        if (at == null || energy == null || temperature == null) {
+            return stated.value().si();
+        }
+        return stated.value().si() * Math.exp(energy.si() / GAS_CONSTANT * (1 / at.si() - 1 / temperature.si()));
+    }
+
+    static double partition(Species species, Step step) {
+        Partition own = step.head().overrides().partition().get(species.name());
+        return own != null ? own.value() : species.partition().value();
+    }
+}
