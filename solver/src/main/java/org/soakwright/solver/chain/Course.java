@@ -46,7 +46,7 @@ public final class Course {
             int n = link.needed(t, k);
             count[k] = n;
             state = link.begin(n, state, state.length, clinging);
-            error[k] = (k == 0 ? 0 : error[k - 1] * Math.sqrt(link.ratio)) + ownError(link, n, state);
+            double entered = (k == 0 ? 0 : error[k - 1] * Math.sqrt(link.ratio)) + ownError(link, n, state);
             poured[k] = link.stage.wets() ? (1 - link.mixed) * link.fresh + link.mixed * clinging : clinging;
             double[] factor = new double[n];
             double[] after = new double[n];
@@ -56,6 +56,8 @@ public final class Course {
             }
             decay[k] = factor;
             end[k] = after;
+            // What was wrong at the beginning decays at least as the slowest mode does.
+            error[k] = entered * factor[0] + ROUNDING * Math.sqrt(Link.dot(after, after, n));
             state = after;
             clinging = liquorAtEnd(link, n, after, clinging);
             liquor[k] = clinging;

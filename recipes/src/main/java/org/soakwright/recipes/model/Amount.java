@@ -1,0 +1,43 @@
+package org.soakwright.recipes.model;
+
+import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Unsound;
+
+/** How much product the lot holds. */
+public sealed interface Amount {
+    Place place();
+
+    /** By mass, as loaded. */
+    record ByMass(Quantity mass) implements Amount {
+        public ByMass {
+            Rules.positive("the mass", mass);
+        }
+
+        @Override
+        public Place place() {
+            return mass.place();
+        }
+    }
+
+    /** By the volume of the pieces themselves, without the gaps between them. */
+    record ByVolume(Quantity volume) implements Amount {
+        public ByVolume {
+            Rules.positive("the volume", volume);
+        }
+
+        @Override
+        public Place place() {
+            return volume.place();
+        }
+    }
+
+    /** By the number of pieces, one or more. */
+    record ByCount(long count, Place place) implements Amount {
+        public ByCount {
+            if (count < 1) {
+                throw new Unsound(
+                        place, "a lot holds one piece or more: found " + count + "; write a count such as 500");
+            }
+        }
+    }
+}

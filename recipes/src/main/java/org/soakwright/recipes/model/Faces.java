@@ -1,0 +1,7 @@
+package org.soakwright.recipes.model;
+
+/** Which faces of a slab are wetted. */
+public enum Faces implements Word {
+    ONE,
+    BOTH
+}

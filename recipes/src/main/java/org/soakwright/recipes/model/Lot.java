@@ -1,0 +1,64 @@
+package org.soakwright.recipes.model;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Unit;
+
+/**
+ * The product in the vessel: how much of it, in which grades.
+ *
+ * @param density of the piece as loaded; required with a mass, and wherever the recipe counts per mass
+ * @param grades one or more, of different names, whose shares sum to 1
+ */
+public record Lot(Place place, Amount amount, @Nullable Quantity density, List<Grade> grades) {
+    public Lot {
+        grades = List.copyOf(grades);
+        LotRules.check(place, amount, density, grades);
+    }
+
+    /** The volume of all pieces, m3. */
+    public double volumeM3() {
+        if (amount instanceof Amount.ByVolume byVolume) {
+            return byVolume.volume().si();
+        }
+        if (amount instanceof Amount.ByCount byCount) {
+            double piecesPerM3 = grades.stream()
+                    .mapToDouble(grade -> grade.share() / LotRules.sphereVolumeM3(grade))
+                    .sum();
+            return byCount.count() / piecesPerM3;
+        }
+        return ((Amount.ByMass) amount).mass().si() / densityKgPerM3();
+    }
+
+    /** The mass of all pieces as loaded, kg; empty without a density. */
+    public OptionalDouble massKg() {
+        if (amount instanceof Amount.ByMass byMass) {
+            return OptionalDouble.of(byMass.mass().si());
+        }
+        return density == null ? OptionalDouble.empty() : OptionalDouble.of(volumeM3() * density.si());
+    }
+
+    public Optional<Grade> grade(String name) {
+        return grades.stream().filter(grade -> grade.name().equals(name)).findFirst();
+    }
+
+    /** A content of the piece as kg/m3 of piece. */
+    public double kgPerM3(Content content) {
+        return content.basis() == Basis.PER_MASS ? content.si() * densityKgPerM3() : content.si();
+    }
+
+    /** A content of kg/m3 of piece as a number in the unit, by mass or by volume. */
+    public double express(double kgPerM3, Unit unit) {
+        return unit.fromSi(Basis.of(unit) == Basis.PER_MASS ? kgPerM3 / densityKgPerM3() : kgPerM3);
+    }
+
+    private double densityKgPerM3() {
+        if (density == null) {
+            throw new IllegalStateException("the lot has no density");
+        }
+        return density.si();
+    }
+}

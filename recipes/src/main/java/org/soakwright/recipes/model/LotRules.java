@@ -1,0 +1,56 @@
+package org.soakwright.recipes.model;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Problem;
+import org.soakwright.recipes.text.Unsound;
+
+/** What makes a lot whole. */
+final class LotRules {
+    /** Bounds the error of shares written in decimals. */
+    private static final double SHARE_SUM_TOLERANCE = 1e-9;
+
+    private LotRules() {}
+
+    static void check(Place place, Amount amount, @Nullable Quantity density, List<Grade> grades) {
+        List<Problem> problems = new ArrayList<>();
+        if (grades.isEmpty()) {
+            problems.add(new Problem(
+                    place,
+                    "a lot has at least one grade of pieces; write one such as {shape: slab, thickness: 18 mm}"));
+        }
+        if (density != null) {
+            problems.addAll(Rules.ifNotPositive("the density", density));
+        } else if (amount instanceof Amount.ByMass) {
+            problems.add(new Problem(place, "the lot is given by mass and has no density; add one such as 1120 kg/m3"));
+        }
+        if (amount instanceof Amount.ByCount) {
+            grades.stream()
+                    .filter(grade -> grade.shape() != OneAxisShape.SPHERE)
+                    .forEach(grade -> problems.add(new Problem(
+                            grade.place(),
+                            "a count of pieces of shape " + grade.shape().word()
+                                    + " is not computed yet by this version; write the lot's mass or volume instead")));
+        }
+        problems.addAll(Names.duplicates(
+                "grades",
+                grades.stream()
+                        .map(grade -> new Reference(grade.name(), grade.place()))
+                        .toList()));
+        double sum = grades.stream().mapToDouble(Grade::share).sum();
+        if (!grades.isEmpty() && Math.abs(sum - 1) > SHARE_SUM_TOLERANCE) {
+            problems.add(new Problem(
+                    grades.get(0).place(),
+                    "the shares of the grades sum to " + Rules.percent(sum) + "; they must sum to 100 %"));
+        }
+        if (!problems.isEmpty()) {
+            throw new Unsound(problems);
+        }
+    }
+
+    static double sphereVolumeM3(Grade grade) {
+        return Math.PI / 6 * Math.pow(grade.size().si(), 3);
+    }
+}

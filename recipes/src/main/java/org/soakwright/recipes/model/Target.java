@@ -1,0 +1,48 @@
+package org.soakwright.recipes.model;
+
+import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Unsound;
+
+/** What the batch has to reach. */
+public sealed interface Target {
+    Place place();
+
+    /**
+     * A limit on what is read off the pieces.
+     *
+     * @param after the step at whose end it is read; null is the end of the recipe
+     */
+    record OfPieces(
+            Place place,
+            Reference species,
+            Reading reading,
+            Limits limits,
+            GradeScope grade,
+            @Nullable Reference after) implements Target {
+        public OfPieces {
+            if (grade instanceof GradeScope.WholeLot && reading != Reading.MEAN) {
+                throw new Unsound(
+                        place,
+                        "the whole lot has only a mean: found reading " + reading.word()
+                                + " with grade lot; write reading: mean, or a grade");
+            }
+        }
+    }
+
+    /** A limit on the liquor at the end of a step, in its last fill. */
+    record OfLiquor(Place place, Reference step, Reference species, Limits limits) implements Target {
+        public OfLiquor {
+            if (limits.basis() == Basis.OF_START) {
+                throw new Unsound(place, "a liquor target is a content such as 30 g/L; remove `of: start`");
+            }
+        }
+    }
+
+    /** A limit on a total: seconds, m3 of liquor, or money; above zero. */
+    record OfTotal(Place place, Goal total, Quantity atMost) implements Target {
+        public OfTotal {
+            Rules.positive("the limit of a total", atMost);
+        }
+    }
+}

@@ -1,0 +1,168 @@
+package org.soakwright.recipes.parsing;
+
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.EnumSet;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.model.Content;
+import org.soakwright.recipes.model.Diffusivity;
+import org.soakwright.recipes.model.Medium;
+import org.soakwright.recipes.model.Partition;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Start;
+import org.soakwright.recipes.text.Kind;
+import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Problems;
+import org.soakwright.recipes.text.Tree;
+
+/** Reads the species and what the pieces hold of them. */
+final class SpeciesReader {
+    private static final String POINT = "[0, 190 g/kg]";
+
+    private final Values values;
+    private final Problems problems;
+    private final Set<String> names = new LinkedHashSet<>();
+
+    SpeciesReader(Values values) {
+        this.values = values;
+        this.problems = values.problems();
+    }
+
+    /** The names of every species written, once they are read. */
+    Set<String> names() {
+        return names;
+    }
+
+    List<Species> species(Tree tree) {
+        Fields fields = Fields.open(tree, Section.BY_SPECIES, problems);
+        if (fields == null) {
+            return List.of();
+        }
+        if (fields.all().isEmpty()) {
+            problems.add(tree.place(), "species is empty: found none; write such as {salt: {start: 190 g/kg, …}}");
+        }
+        List<Species> species = new ArrayList<>();
+        for (Tree.Entry entry : fields.all()) {
+            Species one = one(entry);
+            if (one != null) {
+                species.add(one);
+            }
+        }
+        return species;
+    }
+
+    private @Nullable Species one(Tree.Entry entry) {
+        String name = entry.key();
+        names.add(name);
+        boolean named = values.isName("a species name", name, entry.place());
+        if (Section.RINSE_LIQUOR.keys().contains(name)) {
+            problems.add(
+                    entry.place(),
+                    "a species cannot be named " + name + ", which is a key of a liquor; choose another name");
+        }
+        Fields fields = Fields.of(entry.value(), Section.ONE_SPECIES, problems);
+        if (fields == null) {
+            return null;
+        }
+        Start start = start(name, fields.need("start", "190 g/kg"));
+        Diffusivity diffusivity = diffusivity(name, fields.need("diffusivity", "8e-10 m2/s"));
+        Set<Medium> media = media(fields.get("exchanges-with"));
+        boolean inLiquor = media == null || media.contains(Medium.LIQUOR);
+        Tree written = inLiquor ? fields.need("partition", "0.8") : fields.get("partition");
+        Partition partition = written == null && !inLiquor
+                ? new Partition(1, fields.place())
+                : partition("the partition of " + name, written);
+        if (!named || start == null || diffusivity == null || media == null || partition == null) {
+            return null;
+        }
+        return problems.attempt(() -> new Species(entry.place(), name, start, diffusivity, partition, media));
+    }
+
+    private @Nullable Start start(String species, @Nullable Tree tree) {
+        String what = "the start of " + species;
+        if (tree instanceof Tree.Entries entries
+                && entries.entries().stream().anyMatch(entry -> entry.key().equals("profile"))) {
+            Fields fields = Fields.of(tree, Section.PROFILE, problems);
+            Tree profile = fields == null ? null : fields.get("profile");
+            return profile == null ? null : profile(what, profile);
+        }
+        Content content = values.content(what, tree);
+        return content == null ? null : new Start.Uniform(content);
+    }
+
+    private @Nullable Start profile(String what, Tree tree) {
+        if (!(tree instanceof Tree.Items items)) {
+            problems.add(
+                    tree.place(),
+                    what + ": a profile is a list of points: found " + tree.label() + "; write such as [" + POINT
+                            + ", [1, 150 g/kg]]");
+            return null;
+        }
+        List<Start.Point> points = new ArrayList<>();
+        for (Tree item : items.items()) {
+            Start.Point point = point(what, item);
+            if (point != null) {
+                points.add(point);
+            }
+        }
+        return points.size() == items.items().size()
+                ? problems.attempt(() -> new Start.Profile(tree.place(), points))
+                : null;
+    }
+
+    private Start.@Nullable Point point(String what, Tree tree) {
+        if (!(tree instanceof Tree.Items items) || items.items().size() != 2) {
+            problems.add(
+                    tree.place(),
+                    what + ": a point is a position and a content: found " + tree.label() + "; write such as " + POINT);
+            return null;
+        }
+        BigDecimal position = values.number(what + ": a position", items.items().get(0), "0.5");
+        Content content = values.content(what, items.items().get(1));
+        return position == null || content == null
+                ? null
+                : new Start.Point(position.doubleValue(), content, tree.place());
+    }
+
+    private @Nullable Diffusivity diffusivity(String species, @Nullable Tree tree) {
+        String what = "the diffusivity of " + species;
+        if (!(tree instanceof Tree.Entries)) {
+            Quantity value = values.quantity(what, tree, Kind.DIFFUSIVITY);
+            return value == null ? null : problems.attempt(() -> new Diffusivity(value, null, null));
+        }
+        Fields fields = Fields.of(tree, Section.DIFFUSIVITY, problems);
+        if (fields == null) {
+            return null;
+        }
+        Quantity value = values.quantity(what, fields.need("value", "8e-10 m2/s"), Kind.DIFFUSIVITY);
+        Quantity at = values.quantity("at", fields.get("at"), Kind.TEMPERATURE);
+        Quantity energy = values.quantity("activation-energy", fields.get("activation-energy"), Kind.MOLAR_ENERGY);
+        boolean broken = (at == null && fields.has("at")) || (energy == null && fields.has("activation-energy"));
+        return value == null || broken ? null : problems.attempt(() -> new Diffusivity(value, at, energy));
+    }
+
+    @Nullable
+    Partition partition(String what, @Nullable Tree tree) {
+        BigDecimal value = values.number(what, tree, "0.8");
+        if (value == null || tree == null) {
+            return null;
+        }
+        Place place = tree.place();
+        return problems.attempt(() -> new Partition(value.doubleValue(), place));
+    }
+
+    private @Nullable Set<Medium> media(@Nullable Tree tree) {
+        if (tree == null) {
+            return EnumSet.of(Medium.LIQUOR);
+        }
+        if (tree instanceof Tree.Leaf leaf && leaf.text().equals("both")) {
+            return EnumSet.allOf(Medium.class);
+        }
+        List<Medium> media = values.someWords("exchanges-with", tree, Medium.class);
+        return media.isEmpty() ? null : EnumSet.copyOf(media);
+    }
+}

@@ -1,0 +1,248 @@
+package org.soakwright.recipes.parsing;
+
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Set;
+import java.util.function.UnaryOperator;
+import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.model.Content;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Word;
+import org.soakwright.recipes.text.Kind;
+import org.soakwright.recipes.text.Measurement;
+import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Problems;
+import org.soakwright.recipes.text.Shown;
+import org.soakwright.recipes.text.Tree;
+import org.soakwright.recipes.text.Unit;
+
+/** Reads single values; each reader returns null where it has added a problem, or where there is nothing to read. */
+final class Values {
+    private static final int LONGEST_NAME = 200;
+    private static final Set<String> FREE = Set.of("from", "to", "any-of", "grain", "planned");
+    private static final List<Kind> CONTENTS = List.of(Kind.PER_MASS, Kind.PER_VOLUME);
+
+    private final Problems problems;
+
+    Values(Problems problems) {
+        this.problems = problems;
+    }
+
+    /** The text of a value, written bare or as {@code {value: …}}. */
+    Tree.@Nullable Leaf leaf(String what, @Nullable Tree tree, String example) {
+        if (tree instanceof Tree.Leaf leaf) {
+            return leaf;
+        }
+        if (tree instanceof Tree.Entries entries) {
+            boolean free = entries.entries().stream().anyMatch(entry -> FREE.contains(entry.key()));
+            if (free) {
+                problems.add(
+                        tree.place(),
+                        what + ": free values other than time are not computed yet by this version; write a fixed one"
+                                + " such as " + example);
+                return null;
+            }
+            Fields fields = Fields.of(tree, Section.VALUE, problems);
+            Tree value = fields == null ? null : fields.need("value", example);
+            if (value instanceof Tree.Leaf leaf) {
+                return leaf;
+            }
+            tree = value;
+        }
+        if (tree != null && !(tree instanceof Tree.Broken)) {
+            problems.add(tree.place(), what + " is one value: found " + tree.label() + "; write such as " + example);
+        }
+        return null;
+    }
+
+    @Nullable
+    Quantity quantity(String what, @Nullable Tree tree, Kind kind) {
+        return quantity(what, tree, List.of(kind));
+    }
+
+    /** The quantity, if there is one and it passes the check. */
+    @Nullable
+    Quantity checked(@Nullable Quantity quantity, UnaryOperator<Quantity> check) {
+        return quantity == null ? null : problems.attempt(() -> check.apply(quantity));
+    }
+
+    @Nullable
+    Quantity contentQuantity(String what, @Nullable Tree tree) {
+        return quantity(what, tree, CONTENTS);
+    }
+
+    @Nullable
+    Content content(String what, @Nullable Tree tree) {
+        Quantity amount = contentQuantity(what, tree);
+        return amount == null ? null : problems.attempt(() -> new Content(amount));
+    }
+
+    private @Nullable Quantity quantity(String what, @Nullable Tree tree, List<Kind> kinds) {
+        Tree.Leaf leaf = leaf(what, tree, kinds.get(0).example());
+        if (leaf == null) {
+            return null;
+        }
+        Measurement measured = measurement(what, leaf, Measurement.remedy(kinds));
+        if (measured == null) {
+            return null;
+        }
+        Unit unit = kinds.stream()
+                .flatMap(kind -> kind.unit(measured.unit()).stream())
+                .findFirst()
+                .orElse(null);
+        if (unit == null) {
+            problems.add(
+                    leaf.place(),
+                    what + ": " + Measurement.wrongUnit(leaf.text(), measured.unit(), kinds) + "; "
+                            + Measurement.remedy(kinds));
+            return null;
+        }
+        return problems.attempt(() -> new Quantity(measured.number(), unit, leaf.place()));
+    }
+
+    private @Nullable Measurement measurement(String what, Tree.Leaf leaf, String remedy) {
+        Measurement measured = Measurement.of(leaf.text()).orElse(null);
+        if (measured == null) {
+            problems.add(leaf.place(), what + ": " + Measurement.whyNot(leaf.text()) + "; " + remedy);
+        }
+        return measured;
+    }
+
+    /** Money, or money per a unit of the kind: {@code 120 EUR}, {@code 40 EUR/h}. */
+    @Nullable
+    Quantity money(String what, @Nullable Tree tree, @Nullable Kind per, String example) {
+        String remedy = "write " + (per == null ? "money" : "a price") + " such as " + example;
+        Tree.Leaf leaf = leaf(what, tree, example);
+        Measurement measured = leaf == null ? null : measurement(what, leaf, remedy);
+        if (leaf == null || measured == null) {
+            return null;
+        }
+        Unit unit = moneyUnit(measured.unit(), per);
+        if (unit == null) {
+            problems.add(
+                    leaf.place(),
+                    what + ": found " + Shown.quoted(leaf.text()) + ", where a three-letter currency"
+                            + (per == null ? "" : " per " + per.label().replaceFirst("^an? ", ""))
+                            + " is needed; " + remedy);
+            return null;
+        }
+        return problems.attempt(() -> new Quantity(measured.number(), unit, leaf.place()));
+    }
+
+    private static @Nullable Unit moneyUnit(String symbol, @Nullable Kind per) {
+        int slash = symbol.indexOf('/');
+        String currency = slash < 0 ? symbol : symbol.substring(0, slash);
+        if (!Unit.isCurrency(currency) || (slash < 0) != (per == null)) {
+            return null;
+        }
+        if (per == null) {
+            return Unit.currency(currency);
+        }
+        return per.unit(symbol.substring(slash + 1))
+                .map(unit -> Unit.currency(currency).per(unit))
+                .orElse(null);
+    }
+
+    /** A number without a unit. */
+    @Nullable
+    BigDecimal number(String what, @Nullable Tree tree, String example) {
+        Tree.Leaf leaf = leaf(what, tree, example);
+        String remedy = "write a plain number such as " + example;
+        Measurement measured = leaf == null ? null : measurement(what, leaf, remedy);
+        if (leaf == null || measured == null) {
+            return null;
+        }
+        if (!measured.unit().isEmpty()) {
+            problems.add(leaf.place(), what + " has no unit: found " + Shown.quoted(leaf.text()) + "; " + remedy);
+            return null;
+        }
+        return measured.number();
+    }
+
+    /** A whole number. */
+    @Nullable
+    Long count(String what, @Nullable Tree tree, String example) {
+        BigDecimal number = number(what, tree, example);
+        if (number == null || tree == null) {
+            return null;
+        }
+        try {
+            return number.longValueExact();
+        } catch (ArithmeticException e) {
+            problems.add(tree.place(), what + " is a whole number: found \"" + number + "\"; write such as " + example);
+            return null;
+        }
+    }
+
+    /** A name or a title: text on one line, never wrapped in {@code {value: …}}. */
+    @Nullable
+    String name(String what, @Nullable Tree tree, String example) {
+        if (tree instanceof Tree.Leaf leaf) {
+            return isName(what, leaf.text(), leaf.place()) ? leaf.text() : null;
+        }
+        if (tree != null && !(tree instanceof Tree.Broken)) {
+            problems.add(tree.place(), what + " is text: found " + tree.label() + "; write such as " + example);
+        }
+        return null;
+    }
+
+    /** Whether the text may be a name, with a problem added where it may not. */
+    boolean isName(String what, String text, Place place) {
+        if (text.isBlank() || text.length() > LONGEST_NAME || !Shown.isOneLine(text)) {
+            problems.add(
+                    place,
+                    what + " is text on one line, of 1 to " + LONGEST_NAME + " characters: found "
+                            + (text.isEmpty() ? "nothing" : Shown.quoted(text)));
+            return false;
+        }
+        return true;
+    }
+
+    /** One of the words of a choice. */
+    <E extends Enum<E> & Word> @Nullable E word(String what, @Nullable Tree tree, Class<E> choices) {
+        List<String> words = words(choices);
+        Tree.Leaf leaf = leaf(what, tree, words.get(0));
+        if (leaf == null) {
+            return null;
+        }
+        for (E choice : choices.getEnumConstants()) {
+            if (choice.word().equals(leaf.text())) {
+                return choice;
+            }
+        }
+        problems.add(leaf.place(), what + ": found " + leaf.label() + "; write " + String.join(", ", words));
+        return null;
+    }
+
+    /** One word, or a list of different ones. */
+    <E extends Enum<E> & Word> List<E> someWords(String what, @Nullable Tree tree, Class<E> choices) {
+        if (!(tree instanceof Tree.Items items)) {
+            E only = word(what, tree, choices);
+            return only == null ? List.of() : List.of(only);
+        }
+        if (items.items().isEmpty()) {
+            problems.add(tree.place(), what + ": found an empty list; write " + String.join(", ", words(choices)));
+        }
+        List<E> found = new ArrayList<>();
+        for (Tree item : items.items()) {
+            E choice = word(what, item, choices);
+            if (choice != null && found.contains(choice)) {
+                problems.add(item.place(), what + " names " + choice.word() + " twice; keep one");
+            } else if (choice != null) {
+                found.add(choice);
+            }
+        }
+        return found;
+    }
+
+    static <E extends Enum<E> & Word> List<String> words(Class<E> choices) {
+        return Arrays.stream(choices.getEnumConstants()).map(Word::word).collect(Collectors.toList());
+    }
+
+    Problems problems() {
+        return problems;
+    }
+}

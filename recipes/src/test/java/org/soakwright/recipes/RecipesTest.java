@@ -1,0 +1,117 @@
+package org.soakwright.recipes;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Objects;
+import java.util.Random;
+import java.util.Set;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.soakwright.recipes.model.Goal;
+import org.soakwright.recipes.model.Lot;
+import org.soakwright.recipes.model.Medium;
+import org.soakwright.recipes.model.Product;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.text.Problem;
+
+class RecipesTest {
+    private static final Path LOINS = Path.of("examples/loin-desalting.yaml");
+
+    @Test
+    void aRecipeIsReadAsWritten() {
+        Recipe recipe = accepted(LOINS).recipe();
+        assertEquals("Desalting of dry-salted loins", recipe.title());
+        assertEquals(Set.of(Product.FOOD), recipe.products());
+        Lot lot = recipe.lot();
+        assertEquals(600, lot.massKg().orElseThrow());
+        assertEquals(600.0 / 1120, lot.volumeM3(), 1e-15);
+        assertEquals(0.009, lot.grade("thin").orElseThrow().depth(), 1e-18);
+        assertEquals(0.6, lot.grade("thick").orElseThrow().share());
+        assertTrue(recipe.species("salt").orElseThrow().exchangesWith(Medium.LIQUOR));
+        assertEquals(1200, Objects.requireNonNull(recipe.between()).si());
+        Step.Soak soak = assertInstanceOf(Step.Soak.class, recipe.steps().get(0));
+        assertEquals(1.2, soak.liquor().volumeM3(lot).orElseThrow(), 1e-12);
+        assertEquals(277.15, Objects.requireNonNull(soak.temperature()).si());
+        assertEquals(129, soak.time().choices(), "4 h to 36 h in quarters of an hour");
+        assertEquals(List.of(Goal.TIME), recipe.minimise());
+        assertEquals(3.1, recipe.liquorPrice(soak).orElseThrow().perM3(), 1e-15);
+        assertEquals("EUR", Objects.requireNonNull(recipe.prices()).currency());
+        assertEquals(40.0 / 3600, Objects.requireNonNull(recipe.prices()).perSecond(), 1e-17);
+    }
+
+    @Test
+    void valuesKnowTheirPlace() {
+        Recipe recipe = accepted(LOINS).recipe();
+        assertEquals(LOINS + ":7:9", recipe.lot().amount().place().toString());
+        assertEquals(LOINS + ":19:5", recipe.steps().get(0).place().toString());
+    }
+
+    @Test
+    void theFingerprintChangesWithAnyByte(@TempDir Path folder) throws IOException {
+        Path copy = folder.resolve("copy.yaml");
+        Files.writeString(copy, Files.readString(LOINS));
+        assertEquals(accepted(LOINS).sha256(), accepted(copy).sha256());
+        Files.writeString(copy, Files.readString(LOINS) + "\n");
+        assertTrue(!accepted(LOINS).sha256().equals(accepted(copy).sha256()));
+    }
+
+    @Test
+    void aFileThatIsNotThereIsAProblemOfItsName(@TempDir Path folder) {
+        Path missing = folder.resolve("loins.yaml");
+        assertEquals(
+                missing + ": there is no such file; check the name and the folder",
+                only(Recipes.read(missing)).toString());
+        assertEquals(
+                folder + ": this is a folder; name a recipe file in it",
+                only(Recipes.read(folder)).toString());
+    }
+
+    @Test
+    void aLargeFileIsRefusedUnread(@TempDir Path folder) throws IOException {
+        Path large = folder.resolve("large.yaml");
+        Files.writeString(large, "# much\n".repeat(300_000));
+        assertTrue(only(Recipes.read(large)).what().startsWith("the file is too large"));
+    }
+
+    @Test
+    void noDamageToARecipeEverEscapesAsAnException() throws IOException {
+        String whole = Files.readString(LOINS);
+        Random random = new Random(20260101);
+        String alphabet = "{}[]:,-&*!%|>'\"#\t\n 019eE.@`?<\\\u0007é";
+        int refused = 0;
+        for (int trial = 0; trial < 2000; trial++) {
+            StringBuilder damaged = new StringBuilder(whole);
+            for (int hit = random.nextInt(3); hit >= 0; hit--) {
+                int at = random.nextInt(damaged.length());
+                char c = alphabet.charAt(random.nextInt(alphabet.length()));
+                switch (random.nextInt(3)) {
+                    case 0 -> damaged.setCharAt(at, c);
+                    case 1 -> damaged.insert(at, c);
+                    default -> damaged.delete(at, Math.min(damaged.length(), at + 1 + random.nextInt(20)));
+                }
+            }
+            if (Recipes.read("damaged", damaged.toString()) instanceof Outcome.Refused) {
+                refused++;
+            }
+        }
+        assertTrue(refused > 1000, "most damage is noticed: " + refused);
+    }
+
+    private static Outcome.Accepted accepted(Path file) {
+        return assertInstanceOf(Outcome.Accepted.class, Recipes.read(file));
+    }
+
+    private static Problem only(Outcome outcome) {
+        List<Problem> problems =
+                assertInstanceOf(Outcome.Refused.class, outcome).problems();
+        assertEquals(1, problems.size(), problems::toString);
+        return problems.get(0);
+    }
+}
