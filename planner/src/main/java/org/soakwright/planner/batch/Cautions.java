@@ -21,41 +21,42 @@ public final class Cautions {
     /** A caution of a product, and where what it says is published; empty where it is plain good practice. */
     private record Entry(Product product, String text, String source) {
         String shown() {
-            return source.isEmpty() ? text : text + " (" + source + ")";
+            return (source.isEmpty() ? text : text + " (" + source + ")") + ".";
         }
     }
 
     private static final List<Entry> TABLE = List.of(
             new Entry(
                     Product.FOOD,
-                    "Water that touches food must be safe and of adequate sanitary quality.",
+                    "Water that touches food must be safe and of adequate sanitary quality",
                     "21 CFR 117.37(a)"),
             new Entry(
                     Product.FOOD,
-                    "Cold holding is at 5 °C or below, hot holding at 57 °C or above; time in between lets microbes grow.",
+                    "Cold holding is at 5 °C or below, hot holding at 57 °C or above; time in between lets microbes grow",
                     "FDA Food Code 3-501.16"),
             new Entry(
                     Product.FLAMMABLE,
                     "Keep ignition sources away and bond and earth vessels against static; solvent vapours spread along"
-                            + " the floor.",
+                            + " the floor",
                     ""),
             new Entry(
                     Product.FLAMMABLE,
                     "Never load a hot dryer before the solvent is drained and vented. Ventilate so that exhaust vapour stays"
-                            + " at or below 25 % of the lower flammable limit.",
+                            + " at or below 25 % of the lower flammable limit",
                     "NFPA 86"),
-            new Entry(Product.CORROSIVE, "Wear eye and skin protection.", ""),
-            new Entry(Product.CORROSIVE, "Add caustic slowly to cold water, never water to caustic.", "CCOHS"),
+            new Entry(Product.CORROSIVE, "Wear eye and skin protection", ""),
+            new Entry(Product.CORROSIVE, "Add caustic slowly to cold water, never water to caustic", "CCOHS"),
             new Entry(
                     Product.CORROSIVE,
-                    "Have suitable facilities for drenching eyes and body within the work area.",
+                    "Have suitable facilities for drenching eyes and body within the work area",
                     "29 CFR 1910.151(c)"));
 
     private Cautions() {}
 
-    /** For a recipe whose free times are not chosen yet: time between cold and hot holding is the longest there can be. */
+    /** For a recipe not followed yet: where times are free, counted is the longest that there can be. */
     public static List<String> of(Recipe recipe) {
-        return of(recipe, StepTimes.longest(recipe), "up to ");
+        boolean free = recipe.steps().stream().anyMatch(step -> step.time().isFree());
+        return of(recipe, StepTimes.longest(recipe), free ? "up to " : "");
     }
 
     /** For a recipe followed. */

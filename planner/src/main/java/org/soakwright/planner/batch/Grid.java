@@ -12,7 +12,6 @@ final class Grid {
     private final List<Steps> durations = new ArrayList<>();
 
     /** Durations as plain numbers: even steps from the first, or a list where there is no grain. */
-    @SuppressWarnings("ArrayRecordComponent") // never compared
     private record Steps(int choices, double first, double grain, double[] listed) {
         static Steps of(Time time) {
             if (time instanceof Time.Between between) {

@@ -21,8 +21,8 @@ public final class Groups {
     /**
      * The groups of one step for one species in one grade.
      *
-     * @param foLow Fourier number D t/L^2 at the step's shortest duration (its definite one where it has one), 1; L is
-     *     the depth from the wetted surface to the core, t the whole time of the step, all fills together
+     * @param foLow Fourier number D t/L^2 at the shortest duration the step may take, 1; L is the depth from
+     *     the wetted surface to the core, t the whole time of the step, all fills together
      * @param foHigh the same at the longest
      * @param biot k L/(K D), 1; 0 where nothing passes the surface, infinite where there is no film
      * @param capacityRatio volume of liquor over partition times volume of all pieces, 1, of one fill; empty where the

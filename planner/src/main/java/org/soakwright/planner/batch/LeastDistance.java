@@ -96,7 +96,7 @@ final class LeastDistance {
             boolean first = true;
             while (true) {
                 double[] z = leastSquares(rows, limits, size, passive);
-                if (z == null || first && z[enter] <= 0) {
+                if (z == null || (first && z[enter] <= 0)) {
                     // Dependent on those already in: leave it out and stop, the fit cannot improve measurably.
                     passive[enter] = false;
                     return u;

@@ -126,7 +126,7 @@ final class Remedies {
             Step step = recipe.steps().get(last);
             boolean fills = step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Fills;
             if (((Step.Wet) step).liquor().isUnlimited()
-                    || step instanceof Step.Rinse running && running.renewal() instanceof Renewal.Flow) {
+                    || (step instanceof Step.Rinse running && running.renewal() instanceof Renewal.Flow)) {
                 return;
             }
             Recipe changed = fills ? withFills(last, more) : withCopies(last, more);
@@ -242,7 +242,7 @@ final class Remedies {
     private static Step enlarged(Step step, double factor) {
         if (!(step instanceof Step.Wet wet)
                 || wet.liquor().isUnlimited()
-                || step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Flow) {
+                || (step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Flow)) {
             return step;
         }
         Liquor liquor = wet.liquor();

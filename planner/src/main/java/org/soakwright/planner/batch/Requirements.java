@@ -63,8 +63,8 @@ final class Requirements {
         List<Probe> probes = new ArrayList<>();
         for (int j = 0; j < grades.size(); j++) {
             if (target.grade() instanceof GradeScope.Each
-                    || target.grade() instanceof GradeScope.Named named
-                            && named.name().name().equals(grades.get(j).name())) {
+                    || (target.grade() instanceof GradeScope.Named named
+                            && named.name().name().equals(grades.get(j).name()))) {
                 probes.add(probe(target.reading(), j));
             }
         }

@@ -1,7 +1,9 @@
 package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
@@ -76,11 +78,12 @@ public final class Run {
         Species species = recipe.species().get(s);
         Course course = courses.get(s);
         Unit unit = species.start().unit();
-        double[] values = new double[org.soakwright.recipes.model.Reading.values().length];
+        Map<org.soakwright.recipes.model.Reading, Double> values =
+                new EnumMap<>(org.soakwright.recipes.model.Reading.class);
         double error = 0;
         for (org.soakwright.recipes.model.Reading kind : org.soakwright.recipes.model.Reading.values()) {
             Reading reading = course.read(Requirements.probe(kind, grade), stage);
-            values[kind.ordinal()] = recipe.lot().express(reading.value(), unit);
+            values.put(kind, recipe.lot().express(reading.value(), unit));
             error = Math.max(error, recipe.lot().express(reading.error(), unit));
         }
         return new StepEnd.Content(species.name(), values, error, unit);

@@ -1,6 +1,9 @@
 package org.soakwright.planner.batch;
 
+import java.util.Collections;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.text.Unit;
@@ -24,35 +27,23 @@ public record StepEnd(Step step, double from, double to, List<Liquor> liquor, Li
     /** One grade. */
     public record Piece(String name, List<Content> species) {}
 
-    /** The readings of one species in one grade, in its unit, and the largest error among them. */
-    public static final class Content {
-        private final String species;
-        private final double[] values;
-        private final double error;
-        private final Unit unit;
-
-        Content(String species, double[] values, double error, Unit unit) {
-            this.species = species;
-            this.values = values.clone();
-            this.error = error;
-            this.unit = unit;
-        }
-
-        public String species() {
-            return species;
+    /**
+     * The readings of one species in one grade.
+     *
+     * @param values by reading, in the unit
+     * @param error bound on the numerical error of every reading, in the unit
+     */
+    public record Content(String species, Map<Reading, Double> values, double error, Unit unit) {
+        public Content {
+            values = Collections.unmodifiableMap(new EnumMap<>(values));
         }
 
         public double value(Reading reading) {
-            return values[reading.ordinal()];
-        }
-
-        /** Bound on the numerical error of every reading. */
-        public double error() {
-            return error;
-        }
-
-        public Unit unit() {
-            return unit;
+            Double value = values.get(reading);
+            if (value == null) {
+                throw new IllegalArgumentException("not read: " + reading);
+            }
+            return value;
         }
     }
 }

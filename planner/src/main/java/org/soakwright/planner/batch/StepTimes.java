@@ -6,7 +6,6 @@ import java.util.Optional;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Step;
-import org.soakwright.recipes.model.Time;
 import org.soakwright.recipes.text.Problem;
 import org.soakwright.recipes.text.Unsound;
 
@@ -41,21 +40,27 @@ public final class StepTimes {
         return seconds;
     }
 
-    /** The definite durations, and the shortest choice where a time is left open: the hardest to compute. */
-    public static double[] shortest(Recipe recipe) {
+    /** The definite durations and, where a time is left open, the shortest choice: the hardest one to compute. */
+    public static double[] definiteOrShortest(Recipe recipe) {
         return recipe.steps().stream()
-                .mapToDouble(step -> definiteOr(step.time(), 0))
+                .mapToDouble(step -> step.time()
+                        .definite()
+                        .map(Quantity::si)
+                        .orElseGet(() -> step.time().seconds(0)))
                 .toArray();
     }
 
-    /** The definite durations, and the longest choice where a time is left open. */
-    public static double[] longest(Recipe recipe) {
+    /** The shortest choice of every step. */
+    static double[] shortest(Recipe recipe) {
         return recipe.steps().stream()
-                .mapToDouble(step -> definiteOr(step.time(), step.time().choices() - 1))
+                .mapToDouble(step -> step.time().seconds(0))
                 .toArray();
     }
 
-    private static double definiteOr(Time time, int choice) {
-        return time.definite().map(Quantity::si).orElseGet(() -> time.seconds(choice));
+    /** The longest choice of every step. */
+    static double[] longest(Recipe recipe) {
+        return recipe.steps().stream()
+                .mapToDouble(step -> step.time().seconds(step.time().choices() - 1))
+                .toArray();
     }
 }
