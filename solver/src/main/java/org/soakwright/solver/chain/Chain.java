@@ -87,6 +87,11 @@ public final class Chain {
         return links.size();
     }
 
+    /** A stage, from 0. */
+    public Stage stage(int index) {
+        return links.get(index).stage;
+    }
+
     Link link(int stage) {
         return links.get(stage);
     }

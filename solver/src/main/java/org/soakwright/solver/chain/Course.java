@@ -37,6 +37,7 @@ public final class Course {
         places = new double[stages][];
         double[] state = new double[0];
         double clinging = 0;
+        double clingingError = 0;
         for (int k = 0; k < stages; k++) {
             double t = seconds[k];
             if (!(t > 0) || Double.isInfinite(t)) {
@@ -46,21 +47,33 @@ public final class Course {
             int n = link.needed(t, k);
             count[k] = n;
             state = link.begin(n, state, state.length, clinging);
-            double entered = (k == 0 ? 0 : error[k - 1] * Math.sqrt(link.ratio)) + ownError(link, n, state);
+            double entered = (k == 0 ? 0 : error[k - 1] * Math.sqrt(link.ratio))
+                    + link.rootVolume() * link.mixed * clingingError
+                    + ownError(link, n, state);
             poured[k] = link.stage.wets() ? (1 - link.mixed) * link.fresh + link.mixed * clinging : clinging;
             double[] factor = new double[n];
             double[] after = new double[n];
+            double blurred = 0;
             for (int m = 0; m < n; m++) {
-                factor[m] = Math.exp(-link.modes.rate(m) * t);
+                double exponent = link.modes.rate(m) * t;
+                factor[m] = Math.exp(-exponent);
                 after[m] = state[m] * factor[m];
+                // A rate is known to a few units in the last place; what that leaves of the decay grows with its
+                // exponent.
+                double blur = (1 + 0.25 * exponent) * after[m];
+                blurred += blur * blur;
             }
             decay[k] = factor;
             end[k] = after;
             // What was wrong at the beginning decays at least as the slowest mode does.
-            error[k] = entered * factor[0] + ROUNDING * Math.sqrt(Link.dot(after, after, n));
+            error[k] = entered * factor[0] + ROUNDING * Math.sqrt(blurred);
             state = after;
             clinging = liquorAtEnd(link, n, after, clinging);
             liquor[k] = clinging;
+            if (link.stage.wets()) {
+                double rootVolume = link.rootVolume();
+                clingingError = rootVolume == 0 ? 0 : error[k] / rootVolume;
+            }
         }
     }
 
@@ -110,6 +123,20 @@ public final class Course {
         Link link = chain.link(stage);
         double theta = link.offset + Link.dot(row(probe, stage), end[stage], count[stage]);
         return link.stage.partition() * theta;
+    }
+
+    /**
+     * Contents along the depth of one grade's pieces at the end of a stage.
+     *
+     * @param positions 0, the core or sealed face, to 1, the wetted surface
+     * @return kg/m3 of piece, by position
+     */
+    public double[] profile(int grade, int stage, double... positions) {
+        double[] contents = new double[positions.length];
+        for (int i = 0; i < positions.length; i++) {
+            contents[i] = value(new Probe.At(grade, positions[i]), stage);
+        }
+        return contents;
     }
 
     /** Where the content is highest, from 0, the core, to 1, the surface. */

@@ -1,5 +1,6 @@
 package org.soakwright.solver.chain;
 
+import org.soakwright.solver.stage.Bath;
 import org.soakwright.solver.stage.Modes;
 
 /**
@@ -72,6 +73,11 @@ final class Link {
             defect = modes.defect(count);
         }
         return defect;
+    }
+
+    /** Root of the liquor's volume, its weight in the norm of a state; 0 where there is no vessel. */
+    double rootVolume() {
+        return modes.conditions().bath() instanceof Bath.Vessel vessel ? Math.sqrt(vessel.volume()) : 0;
     }
 
     /** Coefficients at the beginning of the stage, from those at the end of the stage before. */

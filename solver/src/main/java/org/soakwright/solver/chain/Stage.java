@@ -25,7 +25,7 @@ public record Stage(double diffusivity, double partition, Surface surface, Surro
     }
 
     /** Whether the pieces leave this stage with liquor of its own. */
-    boolean wets() {
+    public boolean wets() {
         return wets(surroundings);
     }
 

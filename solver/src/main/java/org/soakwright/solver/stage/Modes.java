@@ -14,7 +14,7 @@ import org.soakwright.solver.shape.Grade;
  */
 public final class Modes {
     /** Poles closer than this, relatively, are one pole: beyond it their difference is known well enough to be used. */
-    private static final double SAME_POLE = 1e-13;
+    private static final double SAME_POLE = 4e-15;
 
     private final List<Grade> lot;
     private final Conditions conditions;
@@ -196,7 +196,7 @@ public final class Modes {
     private void growCoupled(double target) {
         Secular secular = new Secular(lot, conditions, roots);
         List<List<Pole>> groups =
-                Pole.groups(roots, Pole.upTo(roots, Math.max(target, slowestOfQuickest())), SAME_POLE);
+                Pole.groups(roots, Pole.upTo(roots, betweenPoles(Math.max(target, slowestOfQuickest()))), SAME_POLE);
         boolean closed = ((Bath.Vessel) conditions.bath()).flow() == 0;
         if (size == 0 && closed) {
             secular.atRest();
@@ -223,6 +223,18 @@ public final class Modes {
             }
             growCoupled(beyond);
         }
+    }
+
+    /** The limit, or more where it would part poles that count as one: their modes are found together. */
+    private double betweenPoles(double limit) {
+        double last = 0;
+        double next = Double.POSITIVE_INFINITY;
+        for (PlainRoots plain : roots) {
+            int n = plain.upTo(limit);
+            last = n == 0 ? last : Math.max(last, plain.rate(n - 1));
+            next = Math.min(next, plain.rate(n));
+        }
+        return next - last > SAME_POLE * last ? limit : betweenPoles(next);
     }
 
     private void addCoupled(Secular secular, double lambda) {

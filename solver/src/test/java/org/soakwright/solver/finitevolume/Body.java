@@ -1,0 +1,10 @@
+package org.soakwright.solver.finitevolume;
+
+/**
+ * Equal bodies of a lot.
+ *
+ * @param power 0 between plates, 1 in a long cylinder, 2 in a sphere
+ * @param length m, from the core to the wetted surface
+ * @param volume m3, of all these bodies
+ */
+record Body(int power, double length, double volume) {}
