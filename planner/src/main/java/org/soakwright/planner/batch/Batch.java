@@ -8,6 +8,7 @@ import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.text.Unsound;
 import org.soakwright.solver.chain.Chain;
 import org.soakwright.solver.chain.Course;
+import org.soakwright.solver.chain.Stage;
 import org.soakwright.solver.chain.StageTooShort;
 
 /**
@@ -96,6 +97,14 @@ public final class Batch {
 
     Translation translation() {
         return translation;
+    }
+
+    Chain chain(int species) {
+        return chains.get(species);
+    }
+
+    Stage stage(int species, int stage) {
+        return chains.get(species).stage(stage);
     }
 
     List<Translation.Slot> slots() {

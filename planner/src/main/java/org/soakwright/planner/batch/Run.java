@@ -34,6 +34,15 @@ public final class Run {
         return seconds.clone();
     }
 
+    Course course(int species) {
+        return courses.get(species);
+    }
+
+    /** Where the solute of a species went, from 0. */
+    public Balance balance(int species) {
+        return Balance.of(this, species);
+    }
+
     public Totals totals() {
         return batch.cost().of(seconds);
     }

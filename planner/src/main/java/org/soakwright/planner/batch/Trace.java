@@ -1,0 +1,123 @@
+package org.soakwright.planner.batch;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.solver.chain.Course;
+import org.soakwright.solver.chain.Probe;
+import org.soakwright.solver.chain.StageTooShort;
+
+/**
+ * A run looked at in between: profiles and readings of every species in every grade over the running clock, denser where a stage has
+ * just begun. Contents are in the species' own unit, liquors in g/L.
+ */
+public final class Trace {
+    private static final int PER_STEP = 28;
+    private static final int PER_TRANSFER = 6;
+
+    private final Run run;
+    private final double[] depths;
+    private final List<Moment> moments;
+
+    /**
+     * One look.
+     *
+     * @param step the step it belongs to; a transfer belongs to the step before
+     * @param transfer whether it lies between steps
+     * @param clock s since the start of the batch
+     */
+    public record Moment(int step, boolean transfer, double clock, List<Sight> sights) {}
+
+    /**
+     * One species at one moment.
+     *
+     * @param liquor g/L of the liquor the pieces are in; NaN where they are in none
+     * @param profiles by grade, then by depth
+     * @param means by grade
+     */
+    public record Sight(double liquor, double[][] profiles, double[] means) {}
+
+    private Trace(Run run, double[] depths, List<Moment> moments) {
+        this.run = run;
+        this.depths = depths;
+        this.moments = List.copyOf(moments);
+    }
+
+    public Run run() {
+        return run;
+    }
+
+    /** Positions of the profiles: 0, the core or sealed face, to 1, the wetted surface. */
+    public double[] depths() {
+        return depths.clone();
+    }
+
+    /** In the order of the clock; a stage's beginning is shown as the profile it began with. */
+    public List<Moment> moments() {
+        return moments;
+    }
+
+    /**
+     * Follows the run again at many moments.
+     *
+     * @param layers how many depths, at least 2
+     */
+    public static Trace of(Run run, int layers) {
+        double[] depths = new double[layers];
+        for (int i = 0; i < layers; i++) {
+            depths[i] = (double) i / (layers - 1);
+        }
+        Batch batch = run.batch();
+        double[] seconds = run.seconds();
+        List<Moment> moments = new ArrayList<>();
+        double clock = 0;
+        double[] done = new double[0];
+        for (int k = 0; k < batch.slots().size(); k++) {
+            Translation.Slot slot = batch.slots().get(k);
+            boolean transfer = slot.part() == 0;
+            double whole = slot.seconds(seconds);
+            int count = transfer ? PER_TRANSFER : Math.max(PER_TRANSFER, (int) Math.ceil(PER_STEP * slot.part()));
+            double[] upTo = java.util.Arrays.copyOf(done, k + 1);
+            for (int i = 1; i <= count; i++) {
+                // Squares: the profile moves with the root of time.
+                upTo[k] = whole * i * i / ((double) count * count);
+                try {
+                    moments.add(look(batch, slot.step(), transfer, clock + upTo[k], upTo, depths));
+                } catch (StageTooShort early) {
+                    // Before this moment the profile would need more modes than are kept; the next look will do.
+                    continue;
+                }
+            }
+            done = upTo;
+            clock += whole;
+        }
+        return new Trace(run, depths, moments);
+    }
+
+    private static Moment look(
+            Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
+        Recipe recipe = batch.recipe();
+        int stage = upTo.length - 1;
+        List<Sight> sights = new ArrayList<>();
+        for (int s = 0; s < recipe.species().size(); s++) {
+            Course course = batch.chain(s).follow(upTo);
+            int grades = recipe.lot().grades().size();
+            double[][] profiles = new double[grades][];
+            double[] means = new double[grades];
+            for (int j = 0; j < grades; j++) {
+                profiles[j] = course.profile(j, stage, depths);
+                for (int i = 0; i < depths.length; i++) {
+                    profiles[j][i] = express(recipe, s, profiles[j][i]);
+                }
+                means[j] = express(recipe, s, course.value(new Probe.Mean(j), stage));
+            }
+            boolean wet = batch.stage(s, stage).wets();
+            sights.add(new Sight(wet ? course.value(new Probe.Liquor(), stage) : Double.NaN, profiles, means));
+        }
+        return new Moment(step, transfer, clock, List.copyOf(sights));
+    }
+
+    private static double express(Recipe recipe, int species, double kgPerM3) {
+        return recipe.lot().express(kgPerM3, recipe.species().get(species).start().unit());
+    }
+}
