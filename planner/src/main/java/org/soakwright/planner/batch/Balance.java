@@ -65,7 +65,10 @@ public record Balance(String species, List<Entry> sources, List<Entry> sinks, bo
                 double carried = clinging * clingingContent;
                 if (vessel.flow() > 0) {
                     closed = false;
-                    taken[step] += released + carried + vessel.volume() * vessel.content() + run0 * vessel.feed()
+                    taken[step] += released
+                            + carried
+                            + vessel.volume() * vessel.content()
+                            + run0 * vessel.feed()
                             - stage.clinging() * end;
                 } else {
                     taken[step] += (vessel.volume() + clinging - stage.clinging()) * end;

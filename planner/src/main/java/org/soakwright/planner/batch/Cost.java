@@ -1,5 +1,7 @@
 package org.soakwright.planner.batch;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.List;
 import java.util.OptionalDouble;
 import org.soakwright.recipes.model.Goal;
@@ -58,9 +60,15 @@ final class Cost {
     }
 
     Totals of(double[] seconds) {
-        OptionalDouble liquor = countable ? OptionalDouble.of(of(Goal.LIQUOR, seconds)) : OptionalDouble.empty();
-        OptionalDouble cost = countable && priced ? OptionalDouble.of(of(Goal.COST, seconds)) : OptionalDouble.empty();
-        return new Totals(of(Goal.TIME, seconds), liquor, cost);
+        OptionalDouble liquor = countable ? OptionalDouble.of(shown(Goal.LIQUOR, seconds)) : OptionalDouble.empty();
+        OptionalDouble cost =
+                countable && priced ? OptionalDouble.of(shown(Goal.COST, seconds)) : OptionalDouble.empty();
+        return new Totals(shown(Goal.TIME, seconds), liquor, cost);
+    }
+
+    /** Sums of decimals carry binary rounding in their last digits; what is shown does not. */
+    private double shown(Goal goal, double[] seconds) {
+        return new BigDecimal(of(goal, seconds)).round(new MathContext(13)).doubleValue();
     }
 
     /** Seconds, m3 or money. */

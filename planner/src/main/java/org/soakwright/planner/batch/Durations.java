@@ -4,8 +4,11 @@ package org.soakwright.planner.batch;
 public final class Durations {
     private Durations() {}
 
-    /** Days, hours and minutes, with seconds only below an hour: {@code 2 d 3 h 15 min}, {@code 4 min 30 s}. */
+    /** Days, hours and minutes, with seconds only below an hour: {@code 2 d 3 h 15 min}, {@code 4 min 30 s}, {@code 0.020 s}. */
     public static String practical(double seconds) {
+        if (seconds > 0 && seconds < 1) {
+            return String.format(java.util.Locale.ROOT, "%.2g s", seconds);
+        }
         boolean fine = seconds < 3600 && Math.abs(seconds - 60 * Math.rint(seconds / 60)) > 0.05;
         if (fine) {
             double tenths = Math.rint(seconds * 10) / 10;

@@ -20,15 +20,30 @@ sealed interface Requirement {
     record OfContent(int target, int species, int stage, Probe probe, double limit, boolean upper, double scale)
             implements Requirement {}
 
-    /** What a total adds up to. */
+    /** What a total adds up to: a sum of what was written, so that equal to the limit is within it, rounding or not. */
     record OfTotal(int target, Goal goal, double limit) implements Requirement {
+        static final double ROUNDING = 1e-10;
+
         @Override
         public boolean upper() {
             return true;
         }
+
+        @Override
+        public double miss(double value) {
+            return Requirement.super.miss(value) - ROUNDING;
+        }
     }
 
     double KNEE = 0.01;
+
+    /** Whether a value is within the limit. */
+    default boolean allows(double value) {
+        if (this instanceof OfTotal) {
+            return miss(value) <= 0;
+        }
+        return upper() ? value <= limit() : value >= limit();
+    }
 
     default double miss(double value) {
         double ratio = value / divisor();

@@ -122,8 +122,7 @@ public final class Run {
     }
 
     boolean meets(Requirement requirement) {
-        double value = value(requirement);
-        return requirement.upper() ? value <= requirement.limit() : value >= requirement.limit();
+        return requirement.allows(value(requirement));
     }
 
     /** In SI: kg/m3, s, m3 or money. */

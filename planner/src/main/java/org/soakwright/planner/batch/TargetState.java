@@ -12,6 +12,7 @@ import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
+import org.soakwright.recipes.text.Unit;
 import org.soakwright.solver.chain.Probe;
 
 /**
@@ -92,17 +93,20 @@ public record TargetState(
                 target,
                 name,
                 Optional.ofNullable(grade),
-                side(limits.atMost()),
-                side(limits.atLeast()),
+                side(limits.atMost(), limits.unit()),
+                side(limits.atLeast(), limits.unit()),
                 value,
                 limits.basis() == Basis.OF_START ? unit + " of start" : unit,
                 met);
     }
 
-    private static OptionalDouble side(@Nullable Quantity limit) {
-        return limit == null
-                ? OptionalDouble.empty()
-                : OptionalDouble.of(limit.value().doubleValue());
+    /** In the unit of the target, which is that of its upper limit when there are two. */
+    private static OptionalDouble side(@Nullable Quantity limit, Unit unit) {
+        if (limit == null) {
+            return OptionalDouble.empty();
+        }
+        boolean same = limit.unit().equals(unit);
+        return OptionalDouble.of(same ? limit.value().doubleValue() : unit.fromSi(limit.si()));
     }
 
     /** {@code salt mean, thick}; {@code salt core after rest, thick}; {@code salt in first water}; {@code total time}. */

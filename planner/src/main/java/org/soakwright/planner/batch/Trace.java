@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Probe;
@@ -81,12 +82,8 @@ public final class Trace {
             for (int i = 1; i <= count; i++) {
                 // Squares: the profile moves with the root of time.
                 upTo[k] = whole * i * i / ((double) count * count);
-                try {
-                    moments.add(look(batch, slot.step(), transfer, clock + upTo[k], upTo, depths));
-                } catch (StageTooShort early) {
-                    // Before this moment the profile would need more modes than are kept; the next look will do.
-                    continue;
-                }
+                look(batch, slot.step(), transfer, clock + upTo[k], upTo, depths)
+                        .ifPresent(moments::add);
             }
             done = upTo;
             clock += whole;
@@ -94,8 +91,17 @@ public final class Trace {
         return new Trace(run, depths, moments);
     }
 
-    private static Moment look(
+    /** Empty so early in a stage that the profile would need more modes than are kept: the next look will do. */
+    private static Optional<Moment> look(
             Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
+        try {
+            return Optional.of(see(batch, step, transfer, clock, upTo, depths));
+        } catch (StageTooShort early) {
+            return Optional.empty();
+        }
+    }
+
+    private static Moment see(Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
         Recipe recipe = batch.recipe();
         int stage = upTo.length - 1;
         List<Sight> sights = new ArrayList<>();
@@ -118,6 +124,7 @@ public final class Trace {
     }
 
     private static double express(Recipe recipe, int species, double kgPerM3) {
-        return recipe.lot().express(kgPerM3, recipe.species().get(species).start().unit());
+        return recipe.lot()
+                .express(kgPerM3, recipe.species().get(species).start().unit());
     }
 }

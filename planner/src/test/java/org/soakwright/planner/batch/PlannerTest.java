@@ -247,6 +247,21 @@ class PlannerTest {
         assertTrue(recipe.targets().get(1) instanceof Target.OfTotal);
     }
 
+    /** 4 h and 8 h make exactly the 12 h allowed, 2 x 2400 L exactly the 4800 L. */
+    @Test
+    void aTotalEqualToItsLimitIsWithinIt() {
+        Plan plan = Planner.plan(
+                twoWaters(
+                        "{any-of: [4 h, 5 h]}",
+                        "8 h",
+                        "  - {species: salt, reading: mean, at-most: 190 g/kg}",
+                        "  - {total: time, at-most: 12 h}",
+                        "  - {total: liquor, at-most: 4800 L}"),
+                Progress.NONE);
+        assertTrue(plan.met());
+        assertEquals(12 * 3600, plan.run().totals().seconds());
+    }
+
     @Test
     void whatBindsIsWhatAShorterStepWouldBreak() {
         Plan plan = Planner.plan(

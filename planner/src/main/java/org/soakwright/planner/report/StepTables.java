@@ -1,0 +1,220 @@
+package org.soakwright.planner.report;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import org.soakwright.planner.batch.Durations;
+import org.soakwright.planner.batch.Run;
+import org.soakwright.planner.batch.StepEnd;
+import org.soakwright.recipes.model.Basis;
+import org.soakwright.recipes.model.Content;
+import org.soakwright.recipes.model.Medium;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Reading;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Renewal;
+import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Step;
+
+/** What to do in each step, what to make up for it, and what to expect at its end. */
+final class StepTables {
+    /** More grades than these have no room beside each other; their last values stand in the targets. */
+    private static final int MOST_GRADES = 3;
+
+    private final Recipe recipe;
+    private final List<StepEnd> ends = new ArrayList<>();
+
+    StepTables(Run run) {
+        recipe = run.batch().recipe();
+        for (int i = 0; i < recipe.steps().size(); i++) {
+            ends.add(run.end(i));
+        }
+    }
+
+    Table steps() {
+        Table table = new Table()
+                .number("")
+                .text("Step")
+                .text("Kind")
+                .text("Time")
+                .text("Clock")
+                .text("At");
+        for (int i = 0; i < ends.size(); i++) {
+            StepEnd end = ends.get(i);
+            table.row(List.of(
+                    number(i),
+                    end.step().name(),
+                    end.step().kind(),
+                    Durations.practical(end.to() - end.from()),
+                    Durations.clock(end.from()) + " – " + Durations.clock(end.to()),
+                    Wording.temperature(end.step())));
+        }
+        return table;
+    }
+
+    List<String> transfers() {
+        Quantity between = recipe.between();
+        return between == null || ends.size() < 2
+                ? List.of()
+                : List.of("Between steps " + Durations.practical(between.si())
+                        + " to drain and transfer; the clock counts them.");
+    }
+
+    Table liquor() {
+        Table table = new Table()
+                .number("")
+                .text("Step")
+                .text("Fill")
+                .text("Flow")
+                .number("In all")
+                .text("Solute")
+                .number("Strength")
+                .number("To dissolve in all");
+        for (int i = 0; i < ends.size(); i++) {
+            if (ends.get(i).step() instanceof Step.Wet wet) {
+                makeUp(table, i, wet);
+            }
+        }
+        return table;
+    }
+
+    private void makeUp(Table table, int step, Step.Wet wet) {
+        OptionalDouble fill = wet.liquor().volumeM3(recipe.lot());
+        OptionalDouble all = total(step, wet, fill);
+        List<String> head = List.of(number(step), wet.name(), fill(wet, fill), flow(wet), litres(all));
+        List<Species> solutes = recipe.species().stream()
+                .filter(species ->
+                        species.exchangesWith(Medium.LIQUOR) && wet.liquor().kgPerM3(species.name()) > 0)
+                .toList();
+        if (solutes.isEmpty()) {
+            table.row(with(head, "none", "", ""));
+        }
+        List<String> before = head;
+        for (Species species : solutes) {
+            double strength = wet.liquor().kgPerM3(species.name());
+            table.row(with(
+                    before, species.name(), strength(wet, species, strength), toDissolve(strength, all, fills(wet))));
+            before = List.of("", "", "", "", "");
+        }
+    }
+
+    private static List<String> with(List<String> head, String... tail) {
+        List<String> row = new ArrayList<>(head);
+        row.addAll(List.of(tail));
+        return row;
+    }
+
+    private static String strength(Step.Wet wet, Species species, double kgPerM3) {
+        Content content = wet.liquor().contents().get(species.name());
+        String written = content != null && content.basis() == Basis.PER_MASS ? " = " + content : "";
+        return Figures.made(kgPerM3) + " g/L" + written;
+    }
+
+    private OptionalDouble total(int step, Step.Wet wet, OptionalDouble fill) {
+        if (fill.isEmpty()) {
+            return fill;
+        }
+        double volume = fills(wet) * fill.getAsDouble();
+        if (wet instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Flow flow) {
+            volume += flow.rate().si() * (ends.get(step).to() - ends.get(step).from());
+        }
+        return OptionalDouble.of(volume);
+    }
+
+    private static String toDissolve(double kgPerM3, OptionalDouble all, int fills) {
+        if (all.isEmpty()) {
+            return "";
+        }
+        double kg = kgPerM3 * all.getAsDouble();
+        return Figures.made(kg) + " kg" + (fills > 1 ? ", " + Figures.made(kg / fills) + " kg a fill" : "");
+    }
+
+    private static String fill(Step.Wet wet, OptionalDouble fill) {
+        return (fills(wet) > 1 ? fills(wet) + " x " : "") + litres(fill);
+    }
+
+    private static int fills(Step.Wet wet) {
+        return wet instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Fills fills ? fills.count() : 1;
+    }
+
+    private static String flow(Step.Wet wet) {
+        return wet instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Flow flow
+                ? flow.rate().toString()
+                : "";
+    }
+
+    private static String litres(OptionalDouble m3) {
+        return m3.isPresent() ? Figures.made(m3.getAsDouble() * 1000) + " L" : "unlimited";
+    }
+
+    /** What clings to the pieces and where it goes. */
+    List<String> clinging() {
+        Map<String, List<String>> after = new LinkedHashMap<>();
+        for (int i = 0; i < ends.size(); i++) {
+            if (ends.get(i).step() instanceof Step.Wet wet && wet.dragOut() != null) {
+                Quantity dragOut = wet.dragOut();
+                double litres = dragOut.si() * recipe.lot().massKg().orElseThrow() * 1000;
+                String what = Figures.made(litres) + " L (" + dragOut + ") cling to the pieces"
+                        + (liquorAfter(i) ? " and go into the next liquor" : "");
+                after.computeIfAbsent(what, key -> new ArrayList<>()).add(wet.name());
+            }
+        }
+        return after.entrySet().stream()
+                .map(note -> "After " + String.join(", ", note.getValue()) + ": " + note.getKey() + ".")
+                .toList();
+    }
+
+    private boolean liquorAfter(int step) {
+        return ends.stream().skip(step + 1L).anyMatch(end -> end.step() instanceof Step.Wet);
+    }
+
+    Table expected() {
+        boolean liquor = ends.stream().anyMatch(end -> !end.liquor().isEmpty());
+        boolean several = recipe.lot().grades().size() > 1;
+        boolean each = several && recipe.lot().grades().size() <= MOST_GRADES;
+        Table table = new Table().number("").text("Step").text("Species");
+        if (liquor) {
+            table.number("Liquor at start").number("Liquor at end");
+        }
+        table.number(several ? "Lot mean" : "Mean in pieces");
+        if (each) {
+            recipe.lot().grades().forEach(grade -> table.number(Prose.clipped(grade.name(), 10) + " mean"));
+        }
+        for (int i = 0; i < ends.size(); i++) {
+            for (int s = 0; s < recipe.species().size(); s++) {
+                table.row(expected(i, s, liquor, each));
+            }
+        }
+        return table;
+    }
+
+    private List<String> expected(int step, int species, boolean liquor, boolean each) {
+        StepEnd end = ends.get(step);
+        StepEnd.LotMean mean = end.means().get(species);
+        List<String> row = new ArrayList<>();
+        row.add(species == 0 ? number(step) : "");
+        row.add(species == 0 ? end.step().name() : "");
+        row.add(mean.species());
+        if (liquor) {
+            StepEnd.Liquor held = end.liquor().stream()
+                    .filter(one -> one.species().equals(mean.species()))
+                    .findFirst()
+                    .orElse(null);
+            row.add(held == null ? "" : Figures.measured(held.start()) + " g/L");
+            row.add(held == null ? "" : Figures.measured(held.end()) + " g/L");
+        }
+        row.add(Figures.measured(mean.value()) + " " + mean.unit());
+        if (each) {
+            end.pieces()
+                    .forEach(piece -> row.add(
+                            Figures.measured(piece.species().get(species).value(Reading.MEAN))));
+        }
+        return row;
+    }
+
+    private static String number(int step) {
+        return Integer.toString(step + 1);
+    }
+}
