@@ -2,13 +2,11 @@ package org.soakwright.recipes.text;
 
 import java.io.StringReader;
 import java.util.ArrayList;
-import java.util.Iterator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import org.yaml.snakeyaml.LoaderOptions;
-import org.yaml.snakeyaml.Yaml;
 import org.yaml.snakeyaml.error.Mark;
 import org.yaml.snakeyaml.error.MarkedYAMLException;
 import org.yaml.snakeyaml.error.YAMLException;
@@ -17,6 +15,9 @@ import org.yaml.snakeyaml.events.CollectionStartEvent;
 import org.yaml.snakeyaml.events.Event;
 import org.yaml.snakeyaml.events.NodeEvent;
 import org.yaml.snakeyaml.events.ScalarEvent;
+import org.yaml.snakeyaml.parser.Parser;
+import org.yaml.snakeyaml.parser.ParserImpl;
+import org.yaml.snakeyaml.reader.StreamReader;
 
 /**
  * Reads one YAML document into a {@link Tree}. It works on the parser's events: nothing is ever constructed, resolved or
@@ -33,7 +34,7 @@ public final class YamlReader {
 
     private final String file;
     private final Problems problems;
-    private final Iterator<Event> events;
+    private final Parser events;
     private int values;
 
     private YamlReader(String file, String text, Problems problems) {
@@ -41,7 +42,8 @@ public final class YamlReader {
         options.setCodePointLimit(Source.MOST_BYTES);
         this.file = file;
         this.problems = problems;
-        this.events = new Yaml(options).parse(new StringReader(text)).iterator();
+        // The parser alone: constructing and resolving, which are never wanted, cost a good part of the start-up.
+        this.events = new ParserImpl(new StreamReader(new StringReader(text)), options);
     }
 
     /** The document in the text; null, with the problem added, where there is none to read. */
@@ -70,15 +72,15 @@ public final class YamlReader {
     }
 
     private Tree document() {
-        Event event = events.next();
+        Event event = events.getEvent();
         while (event.is(Event.ID.StreamStart) || event.is(Event.ID.DocumentStart)) {
-            event = events.next();
+            event = events.getEvent();
         }
         if (event.is(Event.ID.StreamEnd)) {
             throw new Unsound(Place.of(file), "the file is empty; write a recipe that begins with language: 1");
         }
         Tree root = node(event, 0);
-        for (Event rest = events.next(); !rest.is(Event.ID.StreamEnd); rest = events.next()) {
+        for (Event rest = events.getEvent(); !rest.is(Event.ID.StreamEnd); rest = events.getEvent()) {
             if (rest.is(Event.ID.DocumentStart)) {
                 throw new Unsound(place(rest), "a second document begins here; one file holds one recipe, split it");
             }
@@ -128,7 +130,7 @@ public final class YamlReader {
 
     private Tree items(Place place, int depth) {
         List<Tree> items = new ArrayList<>();
-        for (Event event = events.next(); !event.is(Event.ID.SequenceEnd); event = events.next()) {
+        for (Event event = events.getEvent(); !event.is(Event.ID.SequenceEnd); event = events.getEvent()) {
             items.add(node(event, depth + 1));
         }
         return new Tree.Items(place, items);
@@ -136,9 +138,9 @@ public final class YamlReader {
 
     private Tree entries(Place place, int depth) {
         Map<String, Tree.Entry> entries = new LinkedHashMap<>();
-        for (Event event = events.next(); !event.is(Event.ID.MappingEnd); event = events.next()) {
+        for (Event event = events.getEvent(); !event.is(Event.ID.MappingEnd); event = events.getEvent()) {
             Tree key = node(event, depth + 1);
-            Tree value = node(events.next(), depth + 1);
+            Tree value = node(events.getEvent(), depth + 1);
             if (key instanceof Tree.Leaf leaf) {
                 enter(entries, leaf, value);
             } else if (!(key instanceof Tree.Broken)) {
