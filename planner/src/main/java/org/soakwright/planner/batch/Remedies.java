@@ -247,13 +247,9 @@ final class Remedies {
         }
         Liquor liquor = wet.liquor();
         LiquorVolume volume = liquor.volume() instanceof LiquorVolume.Ratio ratio
-                ? new LiquorVolume.Ratio(times(ratio.value(), factor))
-                : new LiquorVolume.Volume(times(((LiquorVolume.Volume) liquor.volume()).value(), factor));
+                ? new LiquorVolume.Ratio(Rescaled.times(ratio.value(), factor))
+                : new LiquorVolume.Volume(Rescaled.times(((LiquorVolume.Volume) liquor.volume()).value(), factor));
         return wet.with(new Liquor(liquor.place(), volume, liquor.contents(), liquor.othersZero(), liquor.density()));
-    }
-
-    private static Quantity times(Quantity quantity, double factor) {
-        return new Quantity(quantity.value().multiply(BigDecimal.valueOf(factor)), quantity.unit(), quantity.place());
     }
 
     /** Where only a total stands in the way: what it would have to be. */

@@ -1,0 +1,204 @@
+package org.soakwright.planner.batch;
+
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.soakwright.recipes.model.Diffusivity;
+import org.soakwright.recipes.model.Medium;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Time;
+import org.soakwright.recipes.text.Kind;
+import org.soakwright.recipes.text.Unsound;
+import org.soakwright.solver.chain.Probe;
+
+/**
+ * A moment within a step at which the liquor is read, and what to do when the reading is off. A reading that is off is taken for pieces
+ * that diffuse faster or slower than the recipe says: the steps that remain are planned again with that diffusivity.
+ *
+ * @param step from 0
+ * @param seconds after the step's beginning
+ * @param species whose content is read
+ * @param expected g/L
+ */
+public record Checkpoint(int step, double seconds, String species, double expected, List<Deviation> deviations) {
+    /** The diffusivities tried, as shares of the recipe's. */
+    private static final double[] FACTORS = {0.8, 1.25};
+
+    private static final double[] MOMENTS = {1.0 / 3, 2.0 / 3};
+
+    /** Readings nearer to the expected one than this, relatively, tell nothing: meters and samples are no better. */
+    private static final double TELLING = 0.03;
+
+    /** How many times its planned duration a step may last when nothing else is free. */
+    private static final double STRETCH = 3;
+
+    /**
+     * A reading that is off.
+     *
+     * @param reading g/L
+     * @param factor of the diffusivity that explains it
+     * @param seconds new durations of all steps, those before as they were; empty where none meets the targets
+     * @param added change of the whole batch, s
+     */
+    public record Deviation(double reading, double factor, List<Double> seconds, OptionalDouble added) {
+        public Deviation {
+            seconds = List.copyOf(seconds);
+        }
+    }
+
+    public Checkpoint {
+        deviations = List.copyOf(deviations);
+    }
+
+    /** Two for each step in a vessel, of the species that the first target looks at, or of the first that is read there. */
+    public static List<Checkpoint> of(Run run) {
+        Recipe recipe = run.batch().recipe();
+        List<Checkpoint> all = new ArrayList<>();
+        for (int i = 0; i < recipe.steps().size(); i++) {
+            Optional<Species> watched = watched(recipe);
+            boolean vessel = recipe.steps().get(i) instanceof Step.Wet wet
+                    && !wet.liquor().isUnlimited();
+            if (vessel
+                    && watched.isPresent()
+                    && Translation.fills(recipe.steps().get(i)) == 1) {
+                for (double moment : MOMENTS) {
+                    at(run, i, watched.get(), moment).ifPresent(all::add);
+                }
+            }
+        }
+        return List.copyOf(all);
+    }
+
+    private static Optional<Species> watched(Recipe recipe) {
+        return recipe.targets().stream()
+                .filter(org.soakwright.recipes.model.Target.OfPieces.class::isInstance)
+                .map(target -> ((org.soakwright.recipes.model.Target.OfPieces) target)
+                        .species()
+                        .name())
+                .flatMap(name -> recipe.species(name).stream())
+                .filter(species -> species.exchangesWith(Medium.LIQUOR))
+                .findFirst()
+                .or(() -> recipe.species().stream()
+                        .filter(species -> species.exchangesWith(Medium.LIQUOR))
+                        .findFirst());
+    }
+
+    private static Optional<Checkpoint> at(Run run, int step, Species species, double moment) {
+        double planned = run.seconds()[step];
+        double grain = planned > 4 * 3600 ? 900 : planned > 1800 ? 300 : 60;
+        double seconds = Math.max(grain, grain * Math.rint(moment * planned / grain));
+        if (seconds >= planned) {
+            return Optional.empty();
+        }
+        Recipe recipe = run.batch().recipe();
+        double expected = reading(run.batch(), run.seconds(), step, seconds, species.name());
+        List<Deviation> deviations = new ArrayList<>();
+        for (double factor : FACTORS) {
+            Recipe other = withDiffusivity(recipe, species, factor);
+            double reading = reading(new Batch(other), run.seconds(), step, seconds, species.name());
+            if (Math.abs(reading - expected) > TELLING * Math.max(Math.abs(expected), Math.abs(reading))) {
+                deviations.add(deviation(run, other, step, seconds, reading, factor));
+            }
+        }
+        return Optional.of(new Checkpoint(step, seconds, species.name(), expected, deviations));
+    }
+
+    private static double reading(Batch batch, double[] stepSeconds, int step, double seconds, String species) {
+        int s = batch.species(species);
+        int stage = batch.lastStage(step);
+        double[] upTo = new double[stage + 1];
+        for (int k = 0; k < stage; k++) {
+            upTo[k] = batch.slots().get(k).seconds(stepSeconds);
+        }
+        upTo[stage] = seconds;
+        return batch.chain(s).follow(upTo).value(new Probe.Liquor(), stage);
+    }
+
+    private static Deviation deviation(Run run, Recipe other, int step, double seconds, double reading, double factor) {
+        double[] planned = run.seconds();
+        try {
+            Optional<Run> again = Planner.best(remaining(other, planned, step, seconds));
+            if (again.isPresent()) {
+                List<Double> times = new ArrayList<>();
+                for (double time : again.get().seconds()) {
+                    times.add(time);
+                }
+                double added = again.get().totals().seconds() - run.totals().seconds();
+                return new Deviation(reading, factor, times, OptionalDouble.of(added));
+            }
+        } catch (Unsound tooShort) {
+            return new Deviation(reading, factor, List.of(), OptionalDouble.empty());
+        }
+        return new Deviation(reading, factor, List.of(), OptionalDouble.empty());
+    }
+
+    /** What is past stands; this step lasts at least until now; where nothing that remains is free, this step is. */
+    private static Recipe remaining(Recipe recipe, double[] planned, int step, double now) {
+        List<Step> steps = new ArrayList<>();
+        boolean anythingFree =
+                recipe.steps().stream().skip(step).anyMatch(one -> one.time().isFree());
+        for (int i = 0; i < planned.length; i++) {
+            Step one = recipe.steps().get(i);
+            Time time = one.time();
+            if (i < step) {
+                time = new Time.Fixed(seconds(planned[i], time));
+            } else if (i == step) {
+                double most = time.isFree() ? time.seconds(time.choices() - 1) : planned[i];
+                if (time.isFree() || !anythingFree) {
+                    double to = anythingFree ? most : STRETCH * planned[i];
+                    double grain = time instanceof Time.Between between
+                            ? between.grain().si()
+                            : 300;
+                    // From now in whole grains, so that the planned duration stays on offer.
+                    double from = planned[i] - grain * Math.floor((planned[i] - now) / grain);
+                    time = to - from < grain
+                            ? new Time.Fixed(seconds(planned[i], time))
+                            : new Time.Between(
+                                    time.place(), seconds(from, time), seconds(to, time), seconds(grain, time), null);
+                }
+            }
+            steps.add(one.with(one.head().withTime(time)));
+        }
+        return recipe.withSteps(steps);
+    }
+
+    private static Quantity seconds(double seconds, Time like) {
+        return new Quantity(BigDecimal.valueOf(seconds), Kind.DURATION.unit("s").orElseThrow(), like.place());
+    }
+
+    private static Recipe withDiffusivity(Recipe recipe, Species changed, double factor) {
+        List<Species> species = recipe.species().stream()
+                .map(one -> one.equals(changed) ? faster(one, factor) : one)
+                .toList();
+        List<Step> steps = recipe.steps().stream()
+                .map(step -> Rescaled.step(step, changed.name(), factor))
+                .toList();
+        return new Recipe(
+                recipe.place(),
+                recipe.title(),
+                recipe.products(),
+                recipe.lot(),
+                species,
+                recipe.between(),
+                steps,
+                recipe.targets(),
+                recipe.minimise(),
+                recipe.prices());
+    }
+
+    private static Species faster(Species species, double factor) {
+        Diffusivity stated = species.diffusivity();
+        return new Species(
+                species.place(),
+                species.name(),
+                species.start(),
+                new Diffusivity(Rescaled.times(stated.value(), factor), stated.at(), stated.activationEnergy()),
+                species.partition(),
+                species.exchangesWith());
+    }
+}
