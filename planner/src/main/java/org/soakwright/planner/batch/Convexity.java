@@ -1,8 +1,5 @@
 package org.soakwright.planner.batch;
 
-import java.util.ArrayList;
-import java.util.List;
-import java.util.Optional;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Recipe;
@@ -17,9 +14,6 @@ import org.soakwright.recipes.model.Target;
  * durations, so its tangents bound it everywhere.
  */
 final class Convexity {
-    /** Grid points looked at before a proof is given up. */
-    private static final int MOST_POINTS = 200_000;
-
     private Convexity() {}
 
     /** Whether every target of the recipe is of that kind. */
@@ -68,33 +62,14 @@ final class Convexity {
     }
 
     /**
-     * Tries to show that no grid point beats a known one: those the tangents allow are followed.
+     * A lower bound on a goal over all durations in a box that meet the requirements, grid or not: the least of goal plus multipliers
+     * times tangents, valid for any multipliers at or above zero.
      *
-     * @return a lower bound on the blended goal over all durations, grid or not; empty when the proof did not succeed
+     * @param at where the tangents are taken
      */
-    static Optional<Double> proveBest(
-            Grid grid, Landscape landscape, Merit merit, Descent.End relaxed, double[] known) {
-        double[] at = relaxed.free();
-        Run run = landscape.run(at);
-        double[] misses = landscape.misses(run);
-        double[][] slopes = landscape.gradients(run);
-        List<double[]> candidates = new ArrayList<>();
-        if (!gather(grid, merit, at, misses, slopes, known, new int[grid.size()], 0, candidates, new int[1])) {
-            return Optional.empty();
-        }
-        for (double[] candidate : candidates) {
-            if (landscape.worst(candidate) <= -GridSearch.ROOM) {
-                return Optional.empty();
-            }
-        }
-        return Optional.of(bound(grid, merit, at, misses, slopes, relaxed.multipliers()));
-    }
-
-    /** Minimum over the ranges of goal plus multipliers times tangents: a lower bound for any multipliers at or above zero. */
-    private static double bound(
-            Grid grid, Merit merit, double[] at, double[] misses, double[][] slopes, double[] multipliers) {
+    static double bound(Box box, Linear goal, double[] at, double[] misses, double[][] slopes, double[] multipliers) {
         double sum = 0;
-        double[] rate = merit.weights().clone();
+        double[] rate = goal.weights().clone();
         for (int i = 0; i < misses.length; i++) {
             double m = Math.max(0, multipliers[i]);
             sum += m * misses[i];
@@ -104,68 +79,8 @@ final class Convexity {
             }
         }
         for (int a = 0; a < at.length; a++) {
-            sum += Math.min(rate[a] * grid.low(a), rate[a] * grid.high(a));
+            sum += Math.min(rate[a] * box.low(a), rate[a] * box.high(a));
         }
         return sum;
-    }
-
-    private static boolean gather(
-            Grid grid,
-            Merit merit,
-            double[] at,
-            double[] misses,
-            double[][] slopes,
-            double[] known,
-            int[] choice,
-            int depth,
-            List<double[]> found,
-            int[] looked) {
-        if (++looked[0] > MOST_POINTS) {
-            return false;
-        }
-        if (depth == choice.length) {
-            double[] values = grid.values(choice);
-            if (merit.compare(values, known) < 0) {
-                found.add(values);
-            }
-            return true;
-        }
-        for (int c = 0; c < grid.choices(depth); c++) {
-            choice[depth] = c;
-            if (cheapest(grid, merit, choice, depth) > merit.blended(known)) {
-                break;
-            }
-            if (possible(grid, at, misses, slopes, choice, depth)
-                    && !gather(grid, merit, at, misses, slopes, known, choice, depth + 1, found, looked)) {
-                return false;
-            }
-        }
-        return true;
-    }
-
-    private static double cheapest(Grid grid, Merit merit, int[] choice, int depth) {
-        double sum = 0;
-        for (int a = 0; a < choice.length; a++) {
-            sum += merit.weights()[a] * (a <= depth ? grid.value(a, choice[a]) : grid.low(a));
-        }
-        return sum;
-    }
-
-    private static boolean possible(
-            Grid grid, double[] at, double[] misses, double[][] slopes, int[] choice, int depth) {
-        for (int i = 0; i < misses.length; i++) {
-            double least = misses[i];
-            for (int a = 0; a < at.length; a++) {
-                if (a <= depth) {
-                    least += slopes[i][a] * (grid.value(a, choice[a]) - at[a]);
-                } else {
-                    least += Math.min(slopes[i][a] * (grid.low(a) - at[a]), slopes[i][a] * (grid.high(a) - at[a]));
-                }
-            }
-            if (least > 0) {
-                return false;
-            }
-        }
-        return true;
     }
 }

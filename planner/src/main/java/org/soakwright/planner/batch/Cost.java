@@ -18,7 +18,7 @@ final class Cost {
     private final double[] flowM3;
     private final double[] moneyPerSecond;
     private final boolean countable;
-    private final boolean priced;
+    private final boolean costed;
     private final double moneyPerSecondOverall;
 
     Cost(Recipe recipe) {
@@ -28,19 +28,22 @@ final class Cost {
         flowM3 = new double[steps.size()];
         moneyPerSecond = new double[steps.size()];
         moneyPerSecondOverall = prices == null ? 0 : prices.perSecond();
-        priced = prices != null || steps.stream().anyMatch(step -> step.head().price() != null);
+        boolean priced =
+                prices != null || steps.stream().anyMatch(step -> step.head().price() != null);
         double volume = 0;
         double money = 0;
         boolean all = true;
+        boolean allPriced = true;
         for (int i = 0; i < steps.size(); i++) {
             moneyPerSecond[i] = moneyPerSecondOverall;
             if (steps.get(i) instanceof Step.Wet wet) {
                 OptionalDouble fill = wet.liquor().volumeM3(recipe.lot());
+                double price = recipe.liquorPrice(wet).map(one -> one.perM3()).orElse(0.0);
                 if (fill.isEmpty()) {
                     all = false;
+                    allPriced &= price == 0;
                     continue;
                 }
-                double price = recipe.liquorPrice(wet).map(one -> one.perM3()).orElse(0.0);
                 int fills = 1;
                 if (wet instanceof Step.Rinse rinse) {
                     if (rinse.renewal() instanceof Renewal.Fills several) {
@@ -57,12 +60,12 @@ final class Cost {
         standingM3 = volume;
         standingMoney = money + moneyPerSecondOverall * transferSeconds;
         countable = all;
+        costed = priced && allPriced;
     }
 
     Totals of(double[] seconds) {
         OptionalDouble liquor = countable ? OptionalDouble.of(shown(Goal.LIQUOR, seconds)) : OptionalDouble.empty();
-        OptionalDouble cost =
-                countable && priced ? OptionalDouble.of(shown(Goal.COST, seconds)) : OptionalDouble.empty();
+        OptionalDouble cost = costed ? OptionalDouble.of(shown(Goal.COST, seconds)) : OptionalDouble.empty();
         return new Totals(shown(Goal.TIME, seconds), liquor, cost);
     }
 

@@ -1,6 +1,7 @@
 package org.soakwright.planner.batch;
 
 import java.util.Arrays;
+import java.util.List;
 
 /**
  * Sequential quadratic programming over the free durations, each scaled to 0..1 on its range. Every requirement's straight line may
@@ -21,30 +22,30 @@ final class Descent {
     private static final double HIGHEST_PRICE = 1e5;
     private static final double FIRST_TRUST = 0.5;
 
-    private final Grid grid;
+    private final Box box;
     private final Landscape landscape;
-    private final double[] weights;
+    private final double[] goal;
     private final boolean nearest;
-    private final double ceiling;
+    private final List<Linear.Cap> caps;
     private final int size;
 
-    /**
-     * Prepares a search.
-     *
-     * @param weights what a second of each free step costs
-     * @param nearest whether to go for the smallest largest miss instead of the least cost
-     * @param ceiling the cost must not exceed this; infinite for none
-     */
-    Descent(Grid grid, Landscape landscape, double[] weights, boolean nearest, double ceiling) {
-        this.grid = grid;
+    private Descent(Box box, Landscape landscape, Linear goal, boolean nearest, List<Linear.Cap> caps) {
+        this.box = box;
         this.landscape = landscape;
         this.nearest = nearest;
-        this.ceiling = ceiling;
-        size = grid.size();
-        this.weights = new double[size];
-        for (int a = 0; a < size; a++) {
-            this.weights[a] = weights[a] * range(a);
-        }
+        this.caps = caps;
+        size = box.size();
+        this.goal = scaled(goal);
+    }
+
+    /** Towards the least goal that meets the requirements within the box, no cap exceeded. */
+    static Descent toLeast(Linear goal, Box box, Landscape landscape, List<Linear.Cap> caps) {
+        return new Descent(box, landscape, goal, false, caps);
+    }
+
+    /** Towards the smallest largest miss within the box, no cap exceeded. */
+    static Descent toNearest(Box box, Landscape landscape, List<Linear.Cap> caps) {
+        return new Descent(box, landscape, new Linear(new double[box.size()]), true, caps);
     }
 
     /**
@@ -54,50 +55,38 @@ final class Descent {
      * @param miss the largest miss there
      * @param multipliers price of each requirement in the goal
      */
-    record End(double[] free, double cost, double miss, double[] multipliers) {
+    record End(double[] free, double miss, double[] multipliers) {
         boolean met() {
             return miss <= MET;
         }
     }
 
-    private double range(int axis) {
-        return grid.high(axis) - grid.low(axis);
-    }
-
-    private double[] free(double[] u) {
-        double[] free = new double[size];
+    private double[] scaled(Linear sum) {
+        double[] scaled = new double[size];
         for (int a = 0; a < size; a++) {
-            free[a] = grid.low(a) + u[a] * range(a);
+            scaled[a] = sum.weights()[a] * box.range(a);
         }
-        return free;
+        return scaled;
     }
 
     private double cost(double[] u) {
         double sum = 0;
         for (int a = 0; a < size; a++) {
-            sum += weights[a] * u[a];
+            sum += goal[a] * u[a];
         }
         return sum;
     }
 
-    private double lowestCost() {
-        double sum = 0;
-        for (int a = 0; a < size; a++) {
-            sum += weights[a] * grid.low(a) / range(a);
-        }
-        return sum;
-    }
-
-    /** Goes down from durations given as shares of the ranges. */
+    /** Goes down from durations, brought into the box. */
     End from(double[] start) {
-        double[] u = start.clone();
+        double[] u = box.shares(start);
         double[][] curvature = new double[size][size];
         for (int a = 0; a < size; a++) {
             curvature[a][a] = 0.1;
         }
         double price = FIRST_PRICE;
         double trust = FIRST_TRUST;
-        Run run = landscape.run(free(u));
+        Run run = landscape.run(box.at(u));
         double[] misses = landscape.misses(run);
         double[][] slopes = slopes(run);
         double[] multipliers = new double[misses.length];
@@ -117,7 +106,7 @@ final class Descent {
                 continue;
             }
             double[] next = moved(u, step.move());
-            Run nextRun = landscape.run(free(next));
+            Run nextRun = landscape.run(box.at(next));
             double[] nextMisses = landscape.misses(nextRun);
             double before = merit(u, misses, price);
             double kept = before - merit(next, nextMisses, price);
@@ -126,7 +115,7 @@ final class Descent {
                 double[] bent = bent(nextMisses, slopes, step.move());
                 double[] other = moved(
                         u, subproblem(u, bent, slopes, curvature, price, trust).move());
-                Run otherRun = landscape.run(free(other));
+                Run otherRun = landscape.run(box.at(other));
                 double[] otherMisses = landscape.misses(otherRun);
                 double otherKept = before - merit(other, otherMisses, price);
                 if (otherKept > kept) {
@@ -154,7 +143,7 @@ final class Descent {
                 break;
             }
         }
-        return new End(free(u), lowestCost() + cost(u), Landscape.largest(misses), multipliers);
+        return new End(box.at(u), Landscape.largest(misses), multipliers);
     }
 
     private static double[] bent(double[] found, double[][] slopes, double[] move) {
@@ -192,7 +181,7 @@ final class Descent {
         double[][] slopes = landscape.gradients(run);
         for (double[] row : slopes) {
             for (int a = 0; a < size; a++) {
-                row[a] *= range(a);
+                row[a] *= box.range(a);
             }
         }
         return slopes;
@@ -200,18 +189,14 @@ final class Descent {
 
     private Subproblem.Step subproblem(
             double[] u, double[] misses, double[][] slopes, double[][] curvature, double price, double trust) {
-        double room = ceiling == Double.POSITIVE_INFINITY ? ceiling : ceiling - lowestCost() - cost(u);
-        return Subproblem.solve(
-                u,
-                nearest ? new double[size] : weights,
-                misses,
-                slopes,
-                curvature,
-                price,
-                nearest,
-                weights,
-                room,
-                trust);
+        double[] free = box.at(u);
+        double[][] capRows = new double[caps.size()][];
+        double[] capRoom = new double[caps.size()];
+        for (int i = 0; i < capRows.length; i++) {
+            capRows[i] = scaled(caps.get(i).sum());
+            capRoom[i] = caps.get(i).limit() - caps.get(i).sum().of(free);
+        }
+        return new Subproblem(u, goal, misses, slopes, curvature, nearest, capRows, capRoom).solve(price, trust);
     }
 
     private void bend(

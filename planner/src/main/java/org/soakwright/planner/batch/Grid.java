@@ -92,6 +92,37 @@ final class Grid {
         return product;
     }
 
+    /** The shortest of all free steps. */
+    double[] lowest() {
+        double[] values = new double[size()];
+        for (int a = 0; a < values.length; a++) {
+            values[a] = low(a);
+        }
+        return values;
+    }
+
+    /** The longest of all free steps. */
+    double[] highest() {
+        double[] values = new double[size()];
+        for (int a = 0; a < values.length; a++) {
+            values[a] = high(a);
+        }
+        return values;
+    }
+
+    /** The distances between neighbouring choices, rounded to microseconds; even ones once. */
+    long[] gapsInMicroseconds(int axis) {
+        Steps steps = durations.get(axis);
+        if (steps.listed.length == 0) {
+            return new long[] {Math.round(steps.grain * 1e6)};
+        }
+        long[] gaps = new long[steps.choices - 1];
+        for (int c = 0; c < gaps.length; c++) {
+            gaps[c] = Math.round((steps.listed[c + 1] - steps.listed[c]) * 1e6);
+        }
+        return gaps;
+    }
+
     double[] values(int[] choice) {
         double[] values = new double[choice.length];
         for (int a = 0; a < choice.length; a++) {

@@ -6,84 +6,90 @@ import org.soakwright.recipes.model.Goal;
 
 /**
  * What is to be least: the recipe's goals, first first, and time after them, so that of two equals the shorter wins. All are linear in
- * the durations.
+ * the durations; each is measured in its span over the grid.
  */
 final class Merit {
-    /** Relative differences below this are rounding, not preference. */
-    private static final double SAME = 1e-11;
+    /** Differences below this, as shares of a goal's span, are rounding, not preference. */
+    static final double SAME = 1e-11;
 
-    private final Cost cost;
-    private final List<Goal> goals;
-    private final Grid grid;
-    private final double[] weights;
+    private final List<Goal> goals = new ArrayList<>();
+    private final List<Linear> sums = new ArrayList<>();
+    private final List<Double> spans = new ArrayList<>();
+    private final Goal first;
 
     Merit(Batch batch, Grid grid) {
-        this.cost = batch.cost();
-        this.grid = grid;
         List<Goal> all = new ArrayList<>(batch.recipe().minimise());
         if (!all.contains(Goal.TIME)) {
             all.add(Goal.TIME);
         }
-        goals = List.copyOf(all);
-        weights = blend();
-    }
-
-    /**
-     * One weight a second for each free step, scaled so that the first goal that a free step can change spans one over the grid, each
-     * later goal a millionth of the one before.
-     */
-    private double[] blend() {
-        double[] blend = new double[grid.size()];
-        double share = 1;
-        for (Goal goal : goals) {
+        first = all.get(0);
+        for (Goal goal : all) {
+            double[] weights = new double[grid.size()];
             double span = 0;
-            for (int a = 0; a < blend.length; a++) {
-                span += Math.abs(rate(goal, a)) * (grid.high(a) - grid.low(a));
+            for (int a = 0; a < weights.length; a++) {
+                weights[a] = batch.cost().rate(goal, grid.step(a));
+                span += weights[a] * (grid.high(a) - grid.low(a));
             }
             if (span > 0) {
-                for (int a = 0; a < blend.length; a++) {
-                    blend[a] += share * rate(goal, a) / span;
+                for (int a = 0; a < weights.length; a++) {
+                    weights[a] /= span;
                 }
-                share *= 1e-6;
+                goals.add(goal);
+                sums.add(new Linear(weights));
+                spans.add(span);
             }
         }
-        return blend;
     }
 
-    private double rate(Goal goal, int axis) {
-        return cost.rate(goal, grid.step(axis));
-    }
-
+    /** The goal that matters most, whether or not a free step can change it. */
     Goal first() {
-        return goals.get(0);
+        return first;
     }
 
-    /** The blended goals, by second of each free step. */
-    double[] weights() {
-        return weights;
+    /** How many goals the free steps can change. */
+    int size() {
+        return goals.size();
     }
 
-    double blended(double[] free) {
-        double sum = 0;
-        for (int a = 0; a < free.length; a++) {
-            sum += weights[a] * free[a];
+    Goal goal(int index) {
+        return goals.get(index);
+    }
+
+    /** A goal as a share of its span. */
+    Linear sum(int index) {
+        return sums.get(index);
+    }
+
+    /** What one share of a goal's span is in seconds, m3 or money. */
+    double span(int index) {
+        return spans.get(index);
+    }
+
+    /** Whether two durations that agree in the first goals, so many, can still differ. */
+    boolean undecidedAfter(int count) {
+        if (goals.isEmpty()) {
+            return false;
         }
-        return sum;
+        double[] any = sums.get(0).weights();
+        for (int a = 0; a < any.length; a++) {
+            boolean weighed = false;
+            for (int g = 0; g < count; g++) {
+                weighed |= sums.get(g).weights()[a] > 0;
+            }
+            if (!weighed) {
+                return true;
+            }
+        }
+        return false;
     }
 
-    double first(double[] free) {
-        return cost.of(first(), grid.seconds(free));
-    }
-
-    /** Below zero when the first is better; zero when neither is. */
+    /** Below zero when the first is better; zero when neither is. Rounded to a lattice, so that the order is transitive. */
     int compare(double[] free, double[] other) {
-        double[] a = grid.seconds(free);
-        double[] b = grid.seconds(other);
-        for (Goal goal : goals) {
-            double x = cost.of(goal, a);
-            double y = cost.of(goal, b);
-            if (Math.abs(x - y) > SAME * Math.max(Math.abs(x), Math.abs(y))) {
-                return Double.compare(x, y);
+        for (Linear sum : sums) {
+            long a = Math.round(sum.of(free) / SAME);
+            long b = Math.round(sum.of(other) / SAME);
+            if (a != b) {
+                return Long.compare(a, b);
             }
         }
         return 0;

@@ -1,6 +1,8 @@
 package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -10,7 +12,8 @@ import org.soakwright.recipes.model.Recipe;
 
 /**
  * Chooses the free durations of a recipe: the best point of their grid that meets every target. Small grids are gone through whole;
- * larger ones by descents from fixed starts, then on the grid around the best of their ends. Deterministic.
+ * larger ones by descents from fixed starts and branching over the grid between their ends. Goals are taken one after the other, each
+ * kept while the next is made least. Deterministic.
  */
 public final class Planner {
     private static final int SEEDED_STARTS = 5;
@@ -18,18 +21,23 @@ public final class Planner {
     /** Ends whose goals differ by less, as shares of the goal's span over the grid, are the same end. */
     private static final double AGREED = 1e-5;
 
+    private static final int MOST_NUDGES = 400;
+
     private final Batch batch;
     private final Grid grid;
     private final Merit merit;
     private final Landscape landscape;
-    private final GridSearch search;
+    private final Progress progress;
 
-    private Planner(Recipe recipe) {
+    private Planner(Recipe recipe, Progress progress) {
+        this.progress = progress;
         batch = new Batch(recipe);
         grid = new Grid(recipe);
         merit = new Merit(batch, grid);
         landscape = new Landscape(batch, grid);
-        search = new GridSearch(grid, landscape, merit);
+        // The shortest durations need most modes: what cannot be computed is refused here, not when a search happens on
+        // it.
+        landscape.run(grid.lowest());
     }
 
     /**
@@ -38,8 +46,7 @@ public final class Planner {
      * @throws org.soakwright.recipes.text.Unsound when a step is too short to be computed
      */
     public static Plan plan(Recipe recipe, Progress progress) {
-        progress.at("choosing durations", 0);
-        Planner planner = new Planner(recipe);
+        Planner planner = new Planner(recipe, progress);
         Choice choice = planner.choose();
         Run run = planner.landscape.run(choice.free());
         boolean met = choice.met();
@@ -57,7 +64,7 @@ public final class Planner {
 
     /** Only the choice, without explanations; empty where no choice meets the targets. */
     static Optional<Run> best(Recipe recipe) {
-        Planner planner = new Planner(recipe);
+        Planner planner = new Planner(recipe, Progress.NONE);
         Choice choice = planner.choose();
         return choice.met() ? Optional.of(planner.landscape.run(choice.free())) : Optional.empty();
     }
@@ -65,34 +72,36 @@ public final class Planner {
     private record Choice(double[] free, boolean met, Plan.Proof proof) {}
 
     private Choice choose() {
-        if (grid.points() <= GridSearch.WHOLE) {
-            GridSearch.Found found = search.whole();
+        progress.at("choosing durations", 0);
+        if (grid.points() <= WholeGrid.MOST_POINTS) {
+            Found found = WholeGrid.best(grid, landscape, merit);
             OptionalDouble bound = found.met() && merit.first() == Goal.TIME
-                    ? OptionalDouble.of(merit.first(found.free()))
+                    ? OptionalDouble.of(batch.cost().of(Goal.TIME, grid.seconds(found.free())))
                     : OptionalDouble.empty();
             return choice(found, Plan.Claim.EXHAUSTIVE, 1, 1, bound);
         }
         List<double[]> starts = starts();
         List<Descent.End> ends = new ArrayList<>();
-        Descent descent = new Descent(grid, landscape, merit.weights(), false, Double.POSITIVE_INFINITY);
+        Descent descent = Descent.toLeast(merit.sum(0), Box.whole(grid), landscape, List.of());
         for (double[] start : starts) {
+            progress.at("choosing durations", (double) ends.size() / (2 * starts.size()));
             ends.add(descent.from(start));
         }
-        Optional<Descent.End> best =
-                ends.stream().filter(Descent.End::met).min(java.util.Comparator.comparingDouble(Descent.End::cost));
-        Descent.End inside = inside(starts, best);
+        Optional<Descent.End> best = ends.stream()
+                .filter(Descent.End::met)
+                .min(Comparator.comparingDouble(end -> merit.sum(0).of(end.free())));
+        double[] inside = inside(starts, best.isPresent()).free();
         if (best.isPresent()) {
-            Descent.End relaxed = best.get();
+            double least = merit.sum(0).of(best.get().free());
             int agreed = (int) ends.stream()
-                    .filter(end -> end.met() && end.cost() <= relaxed.cost() + AGREED)
+                    .filter(end -> end.met() && merit.sum(0).of(end.free()) <= least + AGREED)
                     .count();
-            Optional<GridSearch.Found> found = search.around(relaxed.free(), inside.free());
-            if (found.isPresent()) {
-                return proven(found.get(), relaxed, starts.size(), agreed);
+            Optional<Choice> choice = branched(best.get(), inside, starts.size(), agreed);
+            if (choice.isPresent()) {
+                return choice.get();
             }
         }
-        GridSearch.Found miss = search.closest(inside.free());
-        return choice(miss, Plan.Claim.LOCAL, starts.size(), agreeing(ends), OptionalDouble.empty());
+        return choice(nudged(inside), Plan.Claim.LOCAL, starts.size(), agreeing(ends), OptionalDouble.empty());
     }
 
     private static int agreeing(List<Descent.End> ends) {
@@ -102,56 +111,117 @@ public final class Planner {
                 .count();
     }
 
-    private Choice proven(GridSearch.Found found, Descent.End relaxed, int starts, int agreed) {
-        if (Convexity.holds(batch.recipe())) {
-            Optional<Double> bound = Convexity.proveBest(grid, landscape, merit, relaxed, found.free());
-            if (bound.isPresent()) {
-                return choice(found, Plan.Claim.GLOBAL, starts, agreed, secondsOf(bound.get(), found));
+    /** Goal by goal, those before it capped at what was reached. */
+    private Optional<Choice> branched(Descent.End relaxed, double[] inside, int starts, int agreed) {
+        boolean convex = Convexity.holds(batch.recipe());
+        List<Linear.Cap> caps = new ArrayList<>();
+        Found found = null;
+        boolean complete = true;
+        Descent.End from = relaxed;
+        for (int g = 0; g < merit.size() && (g == 0 || merit.undecidedAfter(g)); g++) {
+            progress.at("choosing durations", 0.5 + 0.5 * g / merit.size());
+            Linear goal = merit.sum(g);
+            if (found != null) {
+                from = Descent.toLeast(goal, Box.whole(grid), landscape, caps).from(found.free());
+                if (!from.met()) {
+                    break;
+                }
             }
+            Branching.Outcome outcome =
+                    new Branching(grid, landscape, merit, goal, caps, convex, found).from(from, inside);
+            if (outcome.best().isEmpty()) {
+                return Optional.empty();
+            }
+            found = outcome.best().get();
+            complete &= outcome.complete();
+            caps.add(new Linear.Cap(goal, goal.of(found.free()) + Merit.SAME));
         }
-        return choice(found, Plan.Claim.LOCAL, starts, agreed, OptionalDouble.empty());
+        if (found == null) {
+            return Optional.empty();
+        }
+        Plan.Claim claim = convex && complete ? Plan.Claim.GLOBAL : Plan.Claim.LOCAL;
+        return Optional.of(choice(
+                found, claim, starts, agreed, claim == Plan.Claim.GLOBAL ? bound(relaxed) : OptionalDouble.empty()));
     }
 
-    /** A bound on the blended goal as one on the total time, where time is what is minimised. */
-    private OptionalDouble secondsOf(double blended, GridSearch.Found found) {
+    /** A proven bound on the total time, where time is what is minimised. */
+    private OptionalDouble bound(Descent.End relaxed) {
         if (merit.first() != Goal.TIME) {
             return OptionalDouble.empty();
         }
-        double perSecond = merit.weights()[0];
-        return OptionalDouble.of(merit.first(found.free()) + (blended - merit.blended(found.free())) / perSecond);
+        Run run = landscape.run(relaxed.free());
+        double share = Convexity.bound(
+                Box.whole(grid),
+                merit.sum(0),
+                relaxed.free(),
+                landscape.misses(run),
+                landscape.gradients(run),
+                relaxed.multipliers());
+        double slack = merit.sum(0).of(relaxed.free()) - share;
+        return OptionalDouble.of(run.totals().seconds() - slack * merit.span(0));
     }
 
-    private Choice choice(GridSearch.Found found, Plan.Claim claim, int starts, int agreed, OptionalDouble bound) {
+    private Choice choice(Found found, Plan.Claim claim, int starts, int agreed, OptionalDouble bound) {
         return new Choice(found.free(), found.met(), new Plan.Proof(claim, starts, agreed, bound, batch.evaluations()));
     }
 
-    /** The place with most room: from the longest durations, the middle, or the best descent's end. */
-    private Descent.End inside(List<double[]> starts, Optional<Descent.End> best) {
-        Descent towards = new Descent(grid, landscape, merit.weights(), true, Double.POSITIVE_INFINITY);
+    /** The place with most room: from the longest durations and the middle; from every start where none met the targets. */
+    private Descent.End inside(List<double[]> starts, boolean met) {
+        Descent towards = Descent.toNearest(Box.whole(grid), landscape, List.of());
         Descent.End inside = towards.from(starts.get(0));
-        int tries = best.isPresent() ? 2 : starts.size();
+        int tries = met ? 2 : starts.size();
         for (int i = 1; i < tries; i++) {
+            progress.at("looking for the nearest miss", (double) i / tries);
             Descent.End other = towards.from(starts.get(i));
             inside = other.miss() < inside.miss() ? other : inside;
         }
         return inside;
     }
 
-    /** Shares of the ranges: the longest, the middle, the shortest, and some drawn from a fixed seed. */
+    /** The nearest miss on the grid: rounded, then moved a choice at a time as long as that helps. */
+    private Found nudged(double[] at) {
+        int[] choice = new int[grid.size()];
+        for (int a = 0; a < choice.length; a++) {
+            choice[a] = grid.below(a, at[a]);
+        }
+        Found best = Found.of(landscape, grid.values(choice));
+        boolean moved = true;
+        for (int nudges = 0; moved && nudges < MOST_NUDGES; nudges++) {
+            moved = false;
+            for (int a = 0; a < choice.length; a++) {
+                for (int by = -1; by <= 1; by += 2) {
+                    int[] other = choice.clone();
+                    other[a] += by;
+                    if (other[a] >= 0 && other[a] < grid.choices(a)) {
+                        Found found = Found.of(landscape, grid.values(other));
+                        if (found.miss() < best.miss()) {
+                            best = found;
+                            choice = other;
+                            moved = true;
+                        }
+                    }
+                }
+            }
+        }
+        return best;
+    }
+
+    /** The longest durations, the middle, the shortest, and some drawn from a fixed seed. */
     private List<double[]> starts() {
         SplittableRandom random = new SplittableRandom(SEED);
+        Box whole = Box.whole(grid);
         List<double[]> starts = new ArrayList<>();
         for (double share : new double[] {1, 0.5, 0.02}) {
             double[] start = new double[grid.size()];
-            java.util.Arrays.fill(start, share);
-            starts.add(start);
+            Arrays.fill(start, share);
+            starts.add(whole.at(start));
         }
         for (int i = 0; i < SEEDED_STARTS; i++) {
             double[] start = new double[grid.size()];
             for (int a = 0; a < start.length; a++) {
                 start[a] = random.nextDouble();
             }
-            starts.add(start);
+            starts.add(whole.at(start));
         }
         return starts;
     }

@@ -5,7 +5,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
-import org.jspecify.annotations.Nullable;
+import java.util.function.Supplier;
 import org.soakwright.recipes.model.Goal;
 import org.soakwright.recipes.model.Liquor;
 import org.soakwright.recipes.model.LiquorVolume;
@@ -32,39 +32,41 @@ final class Remedies {
     private static final int MOST_FILLS_ADDED = 3;
 
     private final Recipe recipe;
+    private final Progress progress;
     private final List<Plan.Remedy> found = new ArrayList<>();
+    private double share;
 
-    private Remedies(Recipe recipe) {
+    private Remedies(Recipe recipe, Progress progress) {
         this.recipe = recipe;
+        this.progress = progress;
     }
 
     static List<Plan.Remedy> of(Recipe recipe, Progress progress) {
-        Remedies remedies = new Remedies(recipe);
+        Remedies remedies = new Remedies(recipe, progress);
         List<Runnable> kinds = List.of(
                 remedies::longer, remedies::moreFills, remedies::warmer, remedies::moreLiquor, remedies::laterTotal);
         for (int i = 0; i < kinds.size(); i++) {
-            progress.at("looking for a remedy", (double) i / kinds.size());
+            remedies.share = (double) i / kinds.size();
             kinds.get(i).run();
         }
         return List.copyOf(remedies.found);
     }
 
-    private boolean offer(String kind, @Nullable Recipe changed, Function<Run, String> words, String caution) {
-        if (changed == null) {
-            return false;
-        }
+    /** A change that cannot be written or computed is no remedy. */
+    private boolean offer(String kind, Supplier<Recipe> change, Function<Run, String> words, String caution) {
+        progress.at("looking for a remedy", share);
         try {
-            Optional<Run> run = Planner.best(changed);
+            Optional<Run> run = Planner.best(change.get());
             run.ifPresent(met -> found.add(new Plan.Remedy(kind, words.apply(met), met.totals(), caution)));
             return run.isPresent();
-        } catch (Unsound tooShort) {
+        } catch (Unsound impossible) {
             return false;
         }
     }
 
     private void longer() {
         for (double factor : LONGER) {
-            if (offer("longer", recipe.withSteps(each(step -> stretched(step, factor))), this::longest, "")) {
+            if (offer("longer", () -> recipe.withSteps(each(step -> stretched(step, factor))), this::longest, "")) {
                 return;
             }
         }
@@ -129,7 +131,7 @@ final class Remedies {
                     || (step instanceof Step.Rinse running && running.renewal() instanceof Renewal.Flow)) {
                 return;
             }
-            Recipe changed = fills ? withFills(last, more) : withCopies(last, more);
+            Supplier<Recipe> changed = () -> fills ? withFills(last, more) : withCopies(last, more);
             String change = fills
                     ? "use " + words + " fill" + (more == 1 ? "" : "s") + " in " + step.name()
                     : "add " + words + " step" + (more == 1 ? "" : "s") + " like " + step.name() + " after it";
@@ -164,13 +166,18 @@ final class Remedies {
                     index + i,
                     step.with(new StepHead(
                             head.place(),
-                            head.name() + " (again " + i + ")",
+                            unused(head.name() + " again", steps),
                             head.time(),
                             head.temperature(),
                             head.overrides(),
                             head.price())));
         }
         return recipe.withSteps(steps);
+    }
+
+    private static String unused(String name, List<Step> steps) {
+        boolean used = steps.stream().anyMatch(step -> step.name().equals(name));
+        return used ? unused(name + " again", steps) : name;
     }
 
     private void warmer() {
@@ -191,7 +198,7 @@ final class Remedies {
             }
             if (offer(
                     "warmer",
-                    recipe.withSteps(steps),
+                    () -> recipe.withSteps(steps),
                     run -> temperatures(run.batch().recipe()),
                     caution)) {
                 return;
@@ -233,7 +240,7 @@ final class Remedies {
             String words =
                     "use " + BigDecimal.valueOf(factor).stripTrailingZeros().toPlainString()
                             + " times the liquor in every closed step";
-            if (offer("liquor", recipe.withSteps(steps), run -> words, "check that it fits the vessel")) {
+            if (offer("liquor", () -> recipe.withSteps(steps), run -> words, "check that it fits the vessel")) {
                 return;
             }
         }
@@ -271,7 +278,7 @@ final class Remedies {
                 others,
                 recipe.minimise(),
                 recipe.prices());
-        offer("total", changed, run -> "allow totals of " + totals(run), "");
+        offer("total", () -> changed, run -> "allow totals of " + totals(run), "");
     }
 
     private String totals(Run run) {

@@ -20,7 +20,10 @@ sealed interface Requirement {
     record OfContent(int target, int species, int stage, Probe probe, double limit, boolean upper, double scale)
             implements Requirement {}
 
-    /** What a total adds up to: a sum of what was written, so that equal to the limit is within it, rounding or not. */
+    /**
+     * What a total adds up to: linear in the durations, and so is its miss. A total is a sum of what was written, so equal to the
+     * limit is within it, rounding or not.
+     */
     record OfTotal(int target, Goal goal, double limit) implements Requirement {
         static final double ROUNDING = 1e-10;
 
@@ -31,7 +34,12 @@ sealed interface Requirement {
 
         @Override
         public double miss(double value) {
-            return Requirement.super.miss(value) - ROUNDING;
+            return value / limit - 1 - ROUNDING;
+        }
+
+        @Override
+        public double missSlope(double value) {
+            return 1 / limit;
         }
     }
 

@@ -40,18 +40,8 @@ public final class StepTimes {
         return seconds;
     }
 
-    /** The definite durations and, where a time is left open, the shortest choice: the hardest one to compute. */
-    public static double[] definiteOrShortest(Recipe recipe) {
-        return recipe.steps().stream()
-                .mapToDouble(step -> step.time()
-                        .definite()
-                        .map(Quantity::si)
-                        .orElseGet(() -> step.time().seconds(0)))
-                .toArray();
-    }
-
-    /** The shortest choice of every step. */
-    static double[] shortest(Recipe recipe) {
+    /** The shortest choice of every step: the hardest durations to compute. */
+    public static double[] shortest(Recipe recipe) {
         return recipe.steps().stream()
                 .mapToDouble(step -> step.time().seconds(0))
                 .toArray();

@@ -4,12 +4,18 @@ import org.apache.commons.math3.linear.Array2DRowRealMatrix;
 import org.apache.commons.math3.linear.CholeskyDecomposition;
 
 /**
- * One step of the descent: quadratic goal, straight requirements that may all be overstepped by one amount at a price. Turned into the
+ * One step of a descent, in shares of the ranges: quadratic goal, straight requirements that may all be overstepped by one amount at a price. Turned into the
  * point nearest to the origin by the Cholesky factor of the curvature.
  */
-final class Subproblem {
-    private Subproblem() {}
-
+record Subproblem(
+        double[] u,
+        double[] goal,
+        double[] misses,
+        double[][] slopes,
+        double[][] curvature,
+        boolean nearest,
+        double[][] capRows,
+        double[] capRoom) {
     /**
      * The solution.
      *
@@ -19,30 +25,25 @@ final class Subproblem {
      */
     record Step(double[] move, double over, double[] multipliers) {}
 
-    static Step solve(
-            double[] u,
-            double[] goal,
-            double[] misses,
-            double[][] slopes,
-            double[][] curvature,
-            double price,
-            boolean nearest,
-            double[] cost,
-            double room,
-            double trust) {
+    /**
+     * Solves it.
+     *
+     * @param price of one unit of the overstep, where the goal is not the overstep itself
+     * @param trust no share may change by more
+     */
+    Step solve(double price, double trust) {
         int size = u.length;
         int n = size + 1;
         double[][] b = new double[n][n];
         double[] g = new double[n];
         for (int a = 0; a < size; a++) {
             System.arraycopy(curvature[a], 0, b[a], 0, size);
-            g[a] = goal[a];
+            g[a] = nearest ? 0 : goal[a];
         }
         b[size][size] = nearest ? 1e-3 : 1;
         g[size] = nearest ? 1 : price;
         double[][] l = lower(b, n);
-        boolean capped = room != Double.POSITIVE_INFINITY;
-        int rows = misses.length + 2 * size + (nearest ? 0 : 1) + (capped ? 1 : 0);
+        int rows = misses.length + 2 * size + (nearest ? 0 : 1) + capRows.length;
         double[][] a = new double[rows][n];
         double[] c = new double[rows];
         int at = 0;
@@ -62,11 +63,11 @@ final class Subproblem {
         if (!nearest) {
             a[at++][size] = 1;
         }
-        if (capped) {
+        for (int i = 0; i < capRows.length; i++, at++) {
             for (int k = 0; k < size; k++) {
-                a[at][k] = -cost[k];
+                a[at][k] = -capRows[i][k];
             }
-            c[at] = -room;
+            c[at] = -capRoom[i];
         }
         double[] shift = forward(l, g);
         for (int i = 0; i < rows; i++) {

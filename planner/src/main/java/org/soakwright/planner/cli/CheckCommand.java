@@ -30,7 +30,7 @@ final class CheckCommand extends RecipeCommand {
     @Override
     Finding find(Recipe recipe, Stamp stamp, Session session) {
         // What is too short to be computed shows now rather than when it is followed.
-        new Batch(recipe).follow(StepTimes.definiteOrShortest(recipe));
+        new Batch(recipe).follow(StepTimes.shortest(recipe));
         List<Groups.Group> groups = Groups.of(recipe);
         List<String> cautions = Cautions.of(recipe);
         return new Finding(

@@ -16,6 +16,26 @@ public final class Counting {
             List<Step> steps, List<Target> targets, List<Goal> minimise, @Nullable Prices prices) {
         List<Problem> problems = new ArrayList<>(countableLiquor(steps, targets, minimise, prices));
         problems.addAll(oneCurrency(money(steps, targets, prices)));
+        problems.addAll(liquorByMass(steps, targets));
+        return problems;
+    }
+
+    /** A liquor's content is counted by mass only where its density is known. */
+    private static List<Problem> liquorByMass(List<Step> steps, List<Target> targets) {
+        List<Problem> problems = new ArrayList<>();
+        for (Target target : targets) {
+            if (target instanceof Target.OfLiquor limited && limited.limits().basis() == Basis.PER_MASS) {
+                steps.stream()
+                        .filter(step -> step.name().equals(limited.step().name()))
+                        .filter(step ->
+                                step instanceof Step.Wet wet && wet.liquor().density() == null)
+                        .map(step -> new Problem(
+                                limited.limits().place(),
+                                "a limit by mass needs the liquor's density: found none in " + step.name()
+                                        + "; add density to its liquor, such as 1080 kg/m3, or write the limit as g/L"))
+                        .forEach(problems::add);
+            }
+        }
         return problems;
     }
 

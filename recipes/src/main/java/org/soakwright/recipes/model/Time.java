@@ -126,6 +126,14 @@ public sealed interface Time {
             durations = durations.stream()
                     .sorted(Comparator.comparingDouble(Quantity::si))
                     .toList();
+            for (int i = 1; i < durations.size(); i++) {
+                if (durations.get(i).si() == durations.get(i - 1).si()) {
+                    throw new Unsound(
+                            durations.get(i).place(),
+                            "`any-of` offers one time twice: found \"" + durations.get(i) + "\" and \""
+                                    + durations.get(i - 1) + "\"; remove one");
+                }
+            }
             if (planned != null && durations.stream().noneMatch(duration -> duration.si() == planned.si())) {
                 throw new Unsound(
                         planned.place(), "`planned` is not one of the times offered: found \"" + planned + "\"");

@@ -75,6 +75,19 @@ final class Link {
         return defect;
     }
 
+    /** A bound on the norm of what enters the stage, all modes counted. */
+    double mostEntering(double normBefore, double clinging) {
+        double inside = 0;
+        for (int j = 0; j < modes.grades(); j++) {
+            inside += modes.capacity(j);
+        }
+        double shift = entry instanceof Entry.Carried carried
+                ? Math.abs(ratio * carried.offset - offset)
+                : ((Entry.Loaded) entry).loading.most() + Math.abs(offset);
+        double poured = Math.abs((1 - mixed) * fresh + mixed * clinging - offset);
+        return normBefore * Math.sqrt(ratio) + Math.sqrt(inside) * shift + rootVolume() * poured;
+    }
+
     /** Root of the liquor's volume, its weight in the norm of a state; 0 where there is no vessel. */
     double rootVolume() {
         return modes.conditions().bath() instanceof Bath.Vessel vessel ? Math.sqrt(vessel.volume()) : 0;

@@ -31,6 +31,18 @@ final class Loading {
         }
     }
 
+    /** Largest theta anywhere. */
+    double most() {
+        double content = start instanceof Start.Uniform uniform
+                ? uniform.content()
+                : ((Start.Polyline) start)
+                        .points().stream()
+                                .mapToDouble(Start.Point::content)
+                                .max()
+                                .orElse(0);
+        return content / modes.conditions().partition();
+    }
+
     private double of(int mode) {
         double partition = modes.conditions().partition();
         if (start instanceof Start.Uniform uniform) {

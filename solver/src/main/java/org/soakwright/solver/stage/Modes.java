@@ -55,6 +55,11 @@ public final class Modes {
         return conditions;
     }
 
+    /** How many grades there are. */
+    public int grades() {
+        return lot.size();
+    }
+
     /** K times volume of a grade, m3 of liquor that would hold as much. */
     public double capacity(int grade) {
         return conditions.partition() * lot.get(grade).volume();
