@@ -90,7 +90,11 @@ public final class Batch {
                         + recipe.species().get(species).name()
                         + " by this version: found " + Durations.practical(seconds[cause.stage()])
                         + (slot.part() > 0 && slot.part() < 1 ? " per fill" : "") + ", which needs more than "
-                        + Chain.MOST_MODES + " modes; write at least " + Durations.practical(Math.ceil(shortest)));
+                        + Chain.MOST_MODES + " modes"
+                        + (recipe.lot().grades().size() > 1
+                                ? " over " + recipe.lot().grades().size() + " grades"
+                                : "")
+                        + "; write at least " + Durations.practical(Math.ceil(shortest)));
         unsound.initCause(cause);
         return unsound;
     }

@@ -58,7 +58,7 @@ public record Plan(
     /**
      * One change of the recipe with which every target can be met.
      *
-     * @param kind longer, fill, warmer, liquor or total
+     * @param kind longer, finer, fill, warmer, liquor or total
      * @param change in words: {@code allow up to 48 h in each step}
      * @param totals what the batch then takes
      * @param caution what speaks against it; empty where nothing does

@@ -44,7 +44,12 @@ final class Remedies {
     static List<Plan.Remedy> of(Recipe recipe, Progress progress) {
         Remedies remedies = new Remedies(recipe, progress);
         List<Runnable> kinds = List.of(
-                remedies::longer, remedies::moreFills, remedies::warmer, remedies::moreLiquor, remedies::laterTotal);
+                remedies::longer,
+                remedies::finer,
+                remedies::moreFills,
+                remedies::warmer,
+                remedies::moreLiquor,
+                remedies::laterTotal);
         for (int i = 0; i < kinds.size(); i++) {
             remedies.share = (double) i / kinds.size();
             kinds.get(i).run();
@@ -70,6 +75,24 @@ final class Remedies {
                 return;
             }
         }
+    }
+
+    /** Where the grain leaps over what would do. */
+    private void finer() {
+        List<Step> steps = each(step -> {
+            boolean coarse = step.time() instanceof Time.Between between
+                    && between.grain().si() > 60
+                    && between.to().si() - between.from().si() >= 60;
+            return coarse ? fine(step, (Time.Between) step.time()) : step;
+        });
+        if (!steps.equals(recipe.steps())) {
+            offer("finer", () -> recipe.withSteps(steps), run -> "choose times by the minute: grain 1 min", "");
+        }
+    }
+
+    private static Step fine(Step step, Time.Between time) {
+        Quantity grain = new Quantity(BigDecimal.ONE, minute(), time.place());
+        return step.with(step.head().withTime(new Time.Between(time.place(), time.from(), time.to(), grain, null)));
     }
 
     private String longest(Run run) {

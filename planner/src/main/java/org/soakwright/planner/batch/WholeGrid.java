@@ -12,12 +12,12 @@ final class WholeGrid {
 
     private WholeGrid() {}
 
-    /** The best point that meets the targets, of equals the one with most room; else the nearest miss. */
+    /** The best point that meets the targets, of equals the one with most room; else a nearest miss. */
     static Found best(Grid grid, Landscape landscape, Merit merit) {
         List<double[]> points = points(grid);
         points.sort(((Comparator<double[]>) merit::compare).thenComparing(Arrays::compare));
         Found best = null;
-        Found nearest = null;
+        List<Found> missed = new ArrayList<>();
         for (double[] point : points) {
             if (best != null && merit.compare(point, best.free()) > 0) {
                 return best;
@@ -26,17 +26,18 @@ final class WholeGrid {
             if (found.met() && (best == null || found.miss() < best.miss())) {
                 best = found;
             }
-            if (nearest == null || found.miss() < nearest.miss()) {
-                nearest = found;
-            }
+            missed.add(found);
         }
-        if (best != null) {
-            return best;
-        }
-        if (nearest == null) {
-            throw new IllegalStateException("a grid has at least one point");
-        }
-        return nearest;
+        return best != null ? best : nearest(missed);
+    }
+
+    /** Of the points that miss by all but the least, the one that comes first. */
+    private static Found nearest(List<Found> missed) {
+        double least = missed.stream().mapToDouble(Found::miss).min().orElseThrow();
+        return missed.stream()
+                .filter(found -> found.miss() <= least + Found.ALIKE)
+                .findFirst()
+                .orElseThrow();
     }
 
     private static List<double[]> points(Grid grid) {

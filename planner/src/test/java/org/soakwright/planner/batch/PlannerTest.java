@@ -196,6 +196,34 @@ class PlannerTest {
         assertTrue(miss.by() > 0);
     }
 
+    /** Far beyond equilibrium nothing changes any more: the nearest miss does not ask for the longest times. */
+    @Test
+    void aMissThatTimeCannotMendTakesNoMoreTimeThanItNeeds() {
+        Plan plan = Planner.plan(
+                twoWaters(
+                        "{from: 4 h, to: 2000 h, grain: 15 min}",
+                        "{from: 4 h, to: 2000 h, grain: 15 min}",
+                        "  - {species: salt, reading: mean, at-most: 3 g/kg}"),
+                Progress.NONE);
+        assertFalse(plan.met());
+        assertTrue(
+                plan.run().totals().seconds() < 700 * 3600, plan.run().totals().toString());
+    }
+
+    @Test
+    void whereTheGrainLeapsOverTheBandAFinerOneIsOffered() {
+        Plan plan = Planner.plan(
+                twoWaters(
+                        "{from: 4 h, to: 40 h, grain: 4 h}",
+                        "{from: 4 h, to: 40 h, grain: 4 h}",
+                        "  - {species: salt, reading: mean, at-least: 30 g/kg, at-most: 30.05 g/kg, grade: thick}"),
+                Progress.NONE);
+        assertFalse(plan.met());
+        assertTrue(
+                plan.remedies().stream().anyMatch(remedy -> remedy.kind().equals("finer")),
+                plan.remedies().toString());
+    }
+
     @Test
     void everyRemedyOfferedWasPlannedAndMeetsTheTargets() {
         Recipe recipe = twoWaters(
@@ -220,14 +248,24 @@ class PlannerTest {
                 0.01 * longer.totals().seconds());
     }
 
+    /** FDA Food Code 3-501.16, cold holding at 5 Cel or below: the first warming tried, by 2 kelvins from 4 Cel, stops there. */
     @Test
-    void foodIsNotOfferedWarmthAboveFiveDegrees() {
-        Recipe recipe = twoWaters("4 h", "4 h", "  - {species: salt, reading: mean, at-most: 20 g/kg}");
-        for (Plan.Remedy remedy : Planner.plan(recipe, Progress.NONE).remedies()) {
-            if (remedy.kind().equals("warmer")) {
-                assertTrue(remedy.change().contains(" 5 Cel"), remedy.change());
-            }
-        }
+    void foodIsOfferedWarmthUpToFiveDegreesAndNoMore() {
+        Recipe recipe = twoWaters(
+                "{from: 4 h, to: 24 h, grain: 15 min}",
+                "{from: 4 h, to: 25 h, grain: 15 min}",
+                "  - {species: salt, reading: mean, at-most: 30 g/kg}");
+        Plan.Remedy warmer = Planner.plan(recipe, Progress.NONE).remedies().stream()
+                .filter(remedy -> remedy.kind().equals("warmer"))
+                .findFirst()
+                .orElseThrow();
+        assertTrue(warmer.change().startsWith("warm first to 5.0 Cel, second to 5.0 Cel"), warmer.change());
+        Recipe hot = twoWaters(
+                "{from: 4 h, to: 12 h, grain: 15 min}",
+                "{from: 4 h, to: 12 h, grain: 15 min}",
+                "  - {species: salt, reading: mean, at-most: 30 g/kg}");
+        assertTrue(Planner.plan(hot, Progress.NONE).remedies().stream()
+                .noneMatch(remedy -> remedy.kind().equals("warmer")));
     }
 
     @Test
