@@ -2,6 +2,7 @@ package org.soakwright.recipes;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
+import static org.junit.jupiter.api.Assertions.assertNotNull;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
@@ -11,6 +12,8 @@ import java.util.List;
 import java.util.Objects;
 import java.util.Random;
 import java.util.Set;
+import java.util.regex.MatchResult;
+import java.util.regex.Pattern;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.soakwright.recipes.model.Goal;
@@ -23,6 +26,7 @@ import org.soakwright.recipes.text.Problem;
 
 class RecipesTest {
     private static final Path LOINS = Path.of("examples/loin-desalting.yaml");
+    private static final Path EVERY_KEY = Path.of("src/test/resources/org/soakwright/recipes/accepted/every-key.yaml");
 
     @Test
     void aRecipeIsReadAsWritten() {
@@ -102,6 +106,39 @@ class RecipesTest {
             }
         }
         assertTrue(refused > 1000, "most damage is noticed: " + refused);
+    }
+
+    @Test
+    void aNumberBeyondAllMeasureIsRefusedWhereverItStands() throws IOException {
+        List<MatchResult> numbers = numbers();
+        assertTrue(numbers.size() > 90, "numbers: " + numbers.size());
+        for (MatchResult number : numbers) {
+            for (String large : List.of("1e300", "-1e300", "1e999")) {
+                String changed = with(number, large);
+                Outcome outcome = Recipes.read("large", changed);
+                assertInstanceOf(Outcome.Refused.class, outcome, changed);
+            }
+        }
+    }
+
+    @Test
+    void aNumberNextToNothingIsReadOrRefusedButNeverFails() throws IOException {
+        for (MatchResult number : numbers()) {
+            for (String small : List.of("1e-300", "1e-999", "-1e-300", "0")) {
+                assertNotNull(Recipes.read("small", with(number, small)));
+            }
+        }
+    }
+
+    private static List<MatchResult> numbers() throws IOException {
+        Pattern number = Pattern.compile("(?<=[:\\[,] |\\[|\")[0-9][0-9.e-]*");
+        return number.matcher(Files.readString(EVERY_KEY)).results().toList();
+    }
+
+    private static String with(MatchResult number, String other) throws IOException {
+        return new StringBuilder(Files.readString(EVERY_KEY))
+                .replace(number.start(), number.end(), other)
+                .toString();
     }
 
     private static Outcome.Accepted accepted(Path file) {

@@ -27,6 +27,7 @@ public final class Batch {
 
     public Batch(Recipe recipe) {
         this.recipe = recipe;
+        Warming.of(recipe);
         translation = new Translation(recipe);
         slots = translation.slots();
         chains = recipe.species().stream().map(translation::chain).toList();

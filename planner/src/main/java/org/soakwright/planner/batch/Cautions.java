@@ -75,6 +75,7 @@ public final class Cautions {
             cautions.add("Here steps between 5 °C and 57 °C last " + hedge + Durations.practical(between)
                     + " together: have a food safety plan that allows it.");
         }
+        Warming.of(recipe).ifPresent(cautions::add);
         return List.copyOf(cautions);
     }
 

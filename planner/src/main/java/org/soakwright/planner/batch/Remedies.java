@@ -235,7 +235,11 @@ final class Remedies {
             return step;
         }
         double to = Math.min(limit, temperature.si() + kelvins);
-        return step.with(step.head().withTemperature(Quantity.ofSi(to, temperature.unit(), temperature.place())));
+        try {
+            return step.with(step.head().withTemperature(Quantity.ofSi(to, temperature.unit(), temperature.place())));
+        } catch (Unsound tooHot) {
+            return step;
+        }
     }
 
     private String temperatures(Recipe warmed) {

@@ -49,6 +49,16 @@ public final class Consistency {
         return problems;
     }
 
+    /** Between steps time passes, or nothing is said. */
+    public static List<Problem> ofBetween(@Nullable Quantity between) {
+        return between == null || between.si() > 0
+                ? Rules.ifTooLong(between)
+                : List.of(new Problem(
+                        between.place(),
+                        "the time between steps must be above zero: found \"" + between
+                                + "\"; write such as 20 min, or remove between"));
+    }
+
     /** Drag-out is per mass of lot. */
     public List<Problem> ofDragOut(@Nullable Quantity dragOut) {
         return dragOut == null ? List.of() : needsLotDensity(dragOut.place(), "drag-out per mass of lot");

@@ -6,7 +6,7 @@ import org.soakwright.recipes.text.Unit;
 /** How much of a species is in a piece or a liquor: kg/kg or kg/m3 in SI, zero or more. */
 public record Content(Quantity amount) {
     public Content {
-        Rules.notNegative("a content", amount);
+        Rules.require(Rules.ifNoContent("a content", amount));
     }
 
     public Basis basis() {

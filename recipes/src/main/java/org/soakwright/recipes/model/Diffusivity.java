@@ -1,5 +1,6 @@
 package org.soakwright.recipes.model;
 
+import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Unsound;
 
@@ -8,14 +9,15 @@ import org.soakwright.recipes.text.Unsound;
  *
  * @param value m2/s, above zero
  * @param at the temperature the value belongs to; given exactly when the activation energy is
- * @param activationEnergy J/mol, zero or more; without it the value holds at every temperature
+ * @param activationEnergy J/mol, from 0 to 500 kJ/mol; without it the value holds at every temperature
  */
 public record Diffusivity(
         Quantity value, @Nullable Quantity at, @Nullable Quantity activationEnergy) {
     public Diffusivity {
-        Rules.positive("a diffusivity", value);
-        Rules.aboveAbsoluteZero(at);
-        Rules.notNegative("an activation energy", activationEnergy);
+        Rules.requireAll(List.of(
+                Rules.ifNotPositive("a diffusivity", value),
+                Rules.ifNoTemperature(at),
+                Rules.ifNoActivationEnergy(activationEnergy)));
         if (at == null && activationEnergy != null) {
             throw new Unsound(
                     activationEnergy.place(),

@@ -1,8 +1,10 @@
 package org.soakwright.recipes.model;
 
+import java.util.List;
 import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Problem;
 import org.soakwright.recipes.text.Unit;
 import org.soakwright.recipes.text.Unsound;
 
@@ -13,8 +15,7 @@ public record Limits(
         @Nullable Quantity atMost,
         @Nullable Quantity atLeast) {
     public Limits {
-        Rules.notNegative("`at-most`", atMost);
-        Rules.notNegative("`at-least`", atLeast);
+        Rules.requireAll(List.of(problems("`at-most`", basis, atMost), problems("`at-least`", basis, atLeast)));
         if (atMost == null && atLeast == null) {
             throw new Unsound(place, "a target needs a limit; add at-most, at-least or both");
         }
@@ -31,6 +32,11 @@ public record Limits(
                         "`at-least` is above `at-most`: found \"" + atLeast + "\" above \"" + atMost + "\"");
             }
         }
+    }
+
+    /** What a piece holds can grow beyond its start, but not beyond the whole. */
+    private static List<Problem> problems(String what, Basis basis, @Nullable Quantity limit) {
+        return basis == Basis.OF_START ? Rules.ifNegative(what, limit) : Rules.ifNoContent(what, limit);
     }
 
     /** The unit in which the target is shown. */

@@ -11,11 +11,18 @@ import org.soakwright.recipes.text.Unit;
  * The product in the vessel: how much of it, in which grades.
  *
  * @param density of the piece as loaded; required with a mass, and wherever the recipe counts per mass
+ * @param temperature of the product when it starts; null is not stated
  * @param grades one or more, of different names, whose shares sum to 1
  */
-public record Lot(Place place, Amount amount, @Nullable Quantity density, List<Grade> grades) {
+public record Lot(
+        Place place,
+        Amount amount,
+        @Nullable Quantity density,
+        @Nullable Quantity temperature,
+        List<Grade> grades) {
     public Lot {
         grades = List.copyOf(grades);
+        Rules.temperature(temperature);
         LotRules.check(place, amount, density, grades);
     }
 

@@ -2,16 +2,35 @@ package org.soakwright.recipes.model;
 
 import java.math.BigDecimal;
 import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Shown;
 import org.soakwright.recipes.text.Unit;
 import org.soakwright.recipes.text.Unsound;
 
-/** A number with its unit, exactly as written, at its place. Money and prices are quantities too. */
-public record Quantity(BigDecimal value, Unit unit, Place place) {
+/**
+ * A number with its unit, exactly as written, at its place. Money and prices are quantities too.
+ *
+ * @param written the number in the characters of the file
+ */
+public record Quantity(BigDecimal value, Unit unit, Place place, String written) {
+    /** What is said of a number that no quantity holds. */
+    public static final String TOO_LARGE = "larger than anything a recipe holds";
+
+    /** The largest magnitude in SI: far beyond any real lot, and near enough that its powers stay finite. */
+    private static final double MOST = 1e12;
+
     public Quantity {
-        if (!Double.isFinite(unit.toSi(value))) {
-            throw new Unsound(
-                    place, "the value is too large: found \"" + value + " " + unit + "\"; write a finite one");
+        if (isTooLarge(value, unit)) {
+            throw new Unsound(place, "a value is " + TOO_LARGE + ": found \"" + written + " " + unit + "\"");
         }
+    }
+
+    public Quantity(BigDecimal value, Unit unit, Place place) {
+        this(value, unit, place, Shown.number(value));
+    }
+
+    /** Whether the number in the unit is beyond what a quantity holds: 1e12 in SI. */
+    public static boolean isTooLarge(BigDecimal value, Unit unit) {
+        return Math.abs(unit.toSi(value)) > MOST;
     }
 
     /** From an SI value, to be shown in the unit. */
@@ -47,18 +66,18 @@ public record Quantity(BigDecimal value, Unit unit, Place place) {
     }
 
     /**
-     * This temperature, if it lies above absolute zero.
+     * This temperature, if it lies from 100 K to 3000 K.
      *
      * @throws Unsound otherwise
      */
     public Quantity possible() {
-        Rules.aboveAbsoluteZero(this);
+        Rules.temperature(this);
         return this;
     }
 
     /** As one would write it: {@code 6 h}. */
     @Override
     public String toString() {
-        return value.toString().replace('E', 'e') + " " + unit;
+        return written + " " + unit;
     }
 }

@@ -38,10 +38,11 @@ public record Recipe(
         steps = List.copyOf(steps);
         targets = List.copyOf(targets);
         minimise = List.copyOf(minimise);
-        Rules.positive("the time between steps", between);
         Declared declared = declared(products, lot, species, steps, prices);
         List<Problem> problems = new ArrayList<>(RecipeRules.counts(place, title, products, species, steps, minimise));
         problems.addAll(RecipeRules.agreement(declared, place, species, steps, targets, minimise));
+        problems.addAll(Consistency.ofBetween(between));
+        problems.addAll(Clinging.problems(steps, lot.massKg()));
         problems.addAll(Counting.problems(steps, targets, minimise, prices));
         Rules.require(problems);
         products = Collections.unmodifiableSet(EnumSet.copyOf(products));

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Problem;
+import org.soakwright.recipes.text.Shown;
 import org.soakwright.recipes.text.Unit;
 
 /** What a piece holds of a species as loaded. */
@@ -58,19 +59,21 @@ public sealed interface Start {
             if (first.position() != 0) {
                 problems.add(new Problem(
                         first.place(),
-                        "a profile begins at position 0, the centre or sealed face: found " + first.position()));
+                        "a profile begins at position 0, the centre or sealed face: found "
+                                + Shown.number(first.position())));
             }
             if (last.position() != 1) {
                 problems.add(new Problem(
-                        last.place(), "a profile ends at position 1, the wetted surface: found " + last.position()));
+                        last.place(),
+                        "a profile ends at position 1, the wetted surface: found " + Shown.number(last.position())));
             }
             for (int i = 1; i < points.size(); i++) {
                 Point point = points.get(i);
                 if (!(point.position() > points.get(i - 1).position())) {
                     problems.add(new Problem(
                             point.place(),
-                            "the positions of a profile increase: found " + point.position() + " after "
-                                    + points.get(i - 1).position()));
+                            "the positions of a profile increase: found " + Shown.number(point.position()) + " after "
+                                    + Shown.number(points.get(i - 1).position())));
                 }
                 if (point.content().basis() != first.content().basis()) {
                     problems.add(new Problem(

@@ -13,7 +13,7 @@ public record StepHead(
         @Nullable LiquorPrice price) {
     public StepHead {
         Rules.named("a step", name, place);
-        Rules.aboveAbsoluteZero(temperature);
+        Rules.temperature(temperature);
     }
 
     public StepHead withTime(Time other) {

@@ -29,10 +29,10 @@ public sealed interface Time {
         return !(this instanceof Fixed);
     }
 
-    /** One duration, above zero. */
+    /** One duration, above zero and up to 36525 d, as every time here. */
     record Fixed(Quantity duration) implements Time {
         public Fixed {
-            Rules.positive("a time", duration);
+            Rules.require(Rules.ifNoTime("a time", duration));
         }
 
         @Override
@@ -64,8 +64,11 @@ public sealed interface Time {
             Quantity grain,
             @Nullable Quantity planned) implements Time {
         public Between {
-            Rules.positive("`from`", from);
-            Rules.positive("`grain`", grain);
+            Rules.requireAll(List.of(
+                    Rules.ifNoTime("`from`", from),
+                    Rules.ifNoTime("`to`", to),
+                    Rules.ifNoTime("`grain`", grain),
+                    Rules.ifNoTime("`planned`", planned)));
             if (!(from.si() < to.si())) {
                 throw new Unsound(
                         to.place(), "`to` must be longer than `from`: found \"" + to + "\" after \"" + from + "\"");
@@ -122,7 +125,9 @@ public sealed interface Time {
             if (durations.isEmpty()) {
                 throw new Unsound(place, "`any-of` offers nothing; write one or more times such as [6 h, 9 h]");
             }
-            durations.forEach(duration -> Rules.positive("a time", duration));
+            Rules.requireAll(durations.stream()
+                    .map(duration -> Rules.ifNoTime("a time", duration))
+                    .toList());
             durations = durations.stream()
                     .sorted(Comparator.comparingDouble(Quantity::si))
                     .toList();

@@ -85,6 +85,12 @@ final class Fields {
         return entries.place();
     }
 
+    /** Where the key stands; the section itself where it does not. */
+    Place place(String key) {
+        Tree.Entry entry = byKey.get(key);
+        return entry == null ? place() : entry.place();
+    }
+
     boolean has(String key) {
         return byKey.containsKey(key);
     }
@@ -127,9 +133,8 @@ final class Fields {
             return null;
         }
         for (String extra : found.subList(1, found.size())) {
-            Tree.Entry entry = byKey.get(extra);
             problems.add(
-                    entry == null ? place() : entry.place(),
+                    place(extra),
                     section.label() + " takes only one of " + String.join(", ", keys) + ": found " + extra + " beside "
                             + found.get(0) + "; keep one");
         }

@@ -57,12 +57,14 @@ final class LotReader {
         Quantity density = values.checked(
                 values.quantity("density", fields.get("density"), Kind.DENSITY),
                 found -> found.positive("the density"));
+        Quantity temperature = values.temperature(fields.get("temperature"));
         List<Grade> grades = grades(fields.need("pieces", PIECES));
         problems.addAll(Names.duplicates("grades", names));
-        if (amount == null || grades == null || (density == null && fields.has("density"))) {
-            return null;
-        }
-        return problems.attempt(() -> new Lot(fields.place(), amount, density, grades));
+        boolean broken =
+                (density == null && fields.has("density")) || (temperature == null && fields.has("temperature"));
+        return amount == null || grades == null || broken
+                ? null
+                : problems.attempt(() -> new Lot(fields.place(), amount, density, temperature, grades));
     }
 
     private @Nullable Amount amount(Fields fields) {
@@ -117,7 +119,8 @@ final class LotReader {
             return null;
         }
         if (shape != OneAxisShape.SLAB && fields.has("faces")) {
-            problems.add(fields.place(), "only a slab has faces: found faces on a " + shape.word() + "; remove it");
+            problems.add(
+                    fields.place("faces"), "only a slab has faces: found faces on a " + shape.word() + "; remove it");
             return null;
         }
         double fraction = share == null ? 1 : share.si();
@@ -156,15 +159,16 @@ final class LotReader {
     }
 
     private @Nullable Quantity size(Fields fields, OneAxisShape shape) {
-        String wrong = shape.measure().equals("thickness") ? "diameter" : "thickness";
+        String right = shape.measure();
+        String wrong = right.equals("thickness") ? "diameter" : "thickness";
         if (fields.has(wrong)) {
             problems.add(
-                    fields.place(),
-                    "a " + shape.word() + " has no " + wrong + ": found one; write its " + shape.measure()
-                            + " such as 12 mm");
+                    fields.place(wrong),
+                    "a " + shape.word() + " has no " + wrong + ": found one; "
+                            + (fields.has(right) ? "keep only " + right : "write such as " + right + ": 12 mm"));
             return null;
         }
-        return values.quantity(shape.measure(), fields.need(shape.measure(), "12 mm"), Kind.LENGTH);
+        return values.quantity(right, fields.need(right, "12 mm"), Kind.LENGTH);
     }
 
     private @Nullable Quantity share(Fields fields, boolean only) {

@@ -4,8 +4,10 @@ import java.math.BigDecimal;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.model.Clinging;
 import org.soakwright.recipes.model.Consistency;
 import org.soakwright.recipes.model.Counting;
 import org.soakwright.recipes.model.Declared;
@@ -60,10 +62,10 @@ public final class RecipeReader {
                 products, speciesReader.names(), species, stepKinds, lots.gradeNames(), lots.hasDensity(), priced);
         Consistency consistency = new Consistency(declared);
         species.forEach(one -> problems.addAll(consistency.of(one)));
-        Quantity between = values.checked(
-                values.quantity("between", fields.get("between"), Kind.DURATION),
-                found -> found.positive("the time between steps"));
+        Quantity between = values.quantity("between", fields.get("between"), Kind.DURATION);
+        problems.addAll(Consistency.ofBetween(between));
         List<Step> steps = stepsTree == null ? List.of() : new StepReader(values, declared).steps(stepsTree);
+        problems.addAll(Clinging.problems(steps, lot == null ? OptionalDouble.empty() : lot.massKg()));
         List<Target> targets = new TargetReader(values, declared).targets(fields.get("targets"));
         List<Goal> goals = goals(fields.get("minimise"), consistency);
         Tree pricesTree = fields.get("prices");

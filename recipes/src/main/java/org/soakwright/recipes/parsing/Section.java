@@ -26,8 +26,8 @@ enum Section {
             List.of("measured", "confidence")),
     LOT(
             "a lot",
-            List.of("mass", "volume", "count", "density", "pieces"),
-            List.of("temperature", "spread", "moisture", "containers", "measured")),
+            List.of("mass", "volume", "count", "density", "temperature", "pieces"),
+            List.of("spread", "moisture", "containers", "measured")),
     GRADE(
             "a grade",
             List.of("name", "shape", "thickness", "diameter", "faces", "share"),

@@ -156,8 +156,7 @@ final class StepReader {
     private @Nullable StepHead head(Fields fields, Tree.Entry kind) {
         String name = values.name(kind.key(), kind.value(), "first water");
         Time time = new TimeReader(values).time(fields.need("time", TIME));
-        Quantity temperature = values.checked(
-                values.quantity("temperature", fields.get("temperature"), Kind.TEMPERATURE), Quantity::possible);
+        Quantity temperature = values.temperature(fields.get("temperature"));
         Overrides overrides = overrides(fields);
         Tree prices = fields.known("prices");
         LiquorPrice price = prices == null ? null : new PriceReader(values).ofStep(prices);

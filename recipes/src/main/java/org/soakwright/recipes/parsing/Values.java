@@ -63,6 +63,12 @@ final class Values {
         return quantity(what, tree, List.of(kind));
     }
 
+    /** A temperature that matter can have. */
+    @Nullable
+    Quantity temperature(@Nullable Tree tree) {
+        return checked(quantity("temperature", tree, Kind.TEMPERATURE), Quantity::possible);
+    }
+
     /** The quantity, if there is one and it passes the check. */
     @Nullable
     Quantity checked(@Nullable Quantity quantity, UnaryOperator<Quantity> check) {
@@ -85,7 +91,8 @@ final class Values {
         if (leaf == null) {
             return null;
         }
-        Measurement measured = measurement(what, leaf, Measurement.remedy(kinds));
+        String remedy = Measurement.remedy(kinds);
+        Measurement measured = measurement(what, leaf, remedy);
         if (measured == null) {
             return null;
         }
@@ -96,11 +103,20 @@ final class Values {
         if (unit == null) {
             problems.add(
                     leaf.place(),
-                    what + ": " + Measurement.wrongUnit(leaf.text(), measured.unit(), kinds) + "; "
-                            + Measurement.remedy(kinds));
+                    what + ": " + Measurement.wrongUnit(leaf.text(), measured.unit(), kinds) + "; " + remedy);
             return null;
         }
-        return problems.attempt(() -> new Quantity(measured.number(), unit, leaf.place()));
+        return made(what, leaf, measured, unit, remedy);
+    }
+
+    private @Nullable Quantity made(String what, Tree.Leaf leaf, Measurement measured, Unit unit, String remedy) {
+        if (Quantity.isTooLarge(measured.number(), unit)) {
+            problems.add(
+                    leaf.place(),
+                    what + ": found " + Shown.quoted(leaf.text()) + ", " + Quantity.TOO_LARGE + "; " + remedy);
+            return null;
+        }
+        return new Quantity(measured.number(), unit, leaf.place(), measured.written());
     }
 
     private @Nullable Measurement measurement(String what, Tree.Leaf leaf, String remedy) {
@@ -129,7 +145,7 @@ final class Values {
                             + " is needed; " + remedy);
             return null;
         }
-        return problems.attempt(() -> new Quantity(measured.number(), unit, leaf.place()));
+        return made(what, leaf, measured, unit, remedy);
     }
 
     private static @Nullable Unit moneyUnit(String symbol, @Nullable Kind per) {
@@ -149,6 +165,11 @@ final class Values {
     /** A number without a unit. */
     @Nullable
     BigDecimal number(String what, @Nullable Tree tree, String example) {
+        Quantity number = plain(what, tree, example);
+        return number == null ? null : number.value();
+    }
+
+    private @Nullable Quantity plain(String what, @Nullable Tree tree, String example) {
         Tree.Leaf leaf = leaf(what, tree, example);
         String remedy = "write a plain number such as " + example;
         Measurement measured = leaf == null ? null : measurement(what, leaf, remedy);
@@ -159,20 +180,28 @@ final class Values {
             problems.add(leaf.place(), what + " has no unit: found " + Shown.quoted(leaf.text()) + "; " + remedy);
             return null;
         }
-        return measured.number();
+        if (measured.number().signum() != 0 && measured.number().doubleValue() == 0) {
+            problems.add(
+                    leaf.place(),
+                    what + ": found " + Shown.quoted(leaf.text()) + ", too small to be told from zero; " + remedy);
+            return null;
+        }
+        return made(what, leaf, measured, Unit.ONE, remedy);
     }
 
     /** A whole number. */
     @Nullable
     Long count(String what, @Nullable Tree tree, String example) {
-        BigDecimal number = number(what, tree, example);
-        if (number == null || tree == null) {
+        Quantity number = plain(what, tree, example);
+        if (number == null) {
             return null;
         }
         try {
-            return number.longValueExact();
+            return number.value().longValueExact();
         } catch (ArithmeticException e) {
-            problems.add(tree.place(), what + " is a whole number: found \"" + number + "\"; write such as " + example);
+            problems.add(
+                    number.place(),
+                    what + " is a whole number: found \"" + number.written() + "\"; write such as " + example);
             return null;
         }
     }

@@ -89,7 +89,7 @@ public enum Kind {
         static final List<Unit> MOLAR_ENERGY = List.of(Unit.of("kJ/mol", "1e3"), Unit.of("J/mol", "1"));
         static final List<Unit> TEMPERATURE =
                 List.of(new Unit("Cel", BigDecimal.ONE, BigDecimal.ONE, new BigDecimal("273.15")), Unit.of("K", "1"));
-        static final List<Unit> FRACTION = List.of(Unit.of("%", "1e-2"), Unit.of("[ppth]", "1e-3"), Unit.of("1", "1"));
+        static final List<Unit> FRACTION = List.of(Unit.of("%", "1e-2"), Unit.of("[ppth]", "1e-3"), Unit.ONE);
         static final List<Unit> CONTENT_BY_MASS = List.of(
                 Unit.of("g/kg", "1e-3"),
                 Unit.of("%", "1e-2"),

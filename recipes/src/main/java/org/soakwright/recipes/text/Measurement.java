@@ -8,11 +8,18 @@ import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 
-/** A number and what follows it, as written: {@code 8e-10 m2/s}. The number is decimal and finite. */
-public record Measurement(BigDecimal number, String unit) {
+/**
+ * A number and what follows it, as written: {@code 8e-10 m2/s}. The number is decimal and finite.
+ *
+ * @param written the number in the characters of the file
+ */
+public record Measurement(String written, BigDecimal number, String unit) {
     // Possessive, and no unit like an exponent, so that a unit never begins with the end of a number.
     private static final Pattern NUMBER_AND_UNIT = Pattern.compile(
             "([+-]?+[0-9]{1,20}+(?:\\.[0-9]{1,20}+)?+(?:[eE][+-]?+[0-9]{1,3}+)?+)(?: *+((?![eE][+-]?[0-9])[^0-9., _:+-].*+)|  *+(1))?+");
+    private static final Pattern TOO_MANY_DIGITS = Pattern.compile("[+-]?+(?:[0-9]{21}|[0-9]{1,20}\\.[0-9]{21}).*+");
+    private static final Pattern TOO_LONG_EXPONENT =
+            Pattern.compile("[+-]?+[0-9]++(?:\\.[0-9]++)?+[eE][+-]?+[0-9]{4}.*+");
     private static final Pattern COMMA = Pattern.compile("[+-]?[0-9]+,[0-9]+.*");
     private static final Pattern NOT_FINITE = Pattern.compile("[+-]?\\.?(nan|inf|infinity)\\b.*");
 
@@ -23,7 +30,8 @@ public record Measurement(BigDecimal number, String unit) {
             return Optional.empty();
         }
         String unit = matcher.group(2) != null ? matcher.group(2) : matcher.group(3);
-        return Optional.of(new Measurement(new BigDecimal(matcher.group(1)), unit == null ? "" : unit.strip()));
+        return Optional.of(
+                new Measurement(matcher.group(1), new BigDecimal(matcher.group(1)), unit == null ? "" : unit.strip()));
     }
 
     /** Why the text is no measurement: what was found and, where it can be guessed, what was meant. */
@@ -37,6 +45,12 @@ public record Measurement(BigDecimal number, String unit) {
         }
         if (NOT_FINITE.matcher(text.toLowerCase(Locale.ROOT)).matches()) {
             return found + ", which is not a finite number";
+        }
+        if (TOO_LONG_EXPONENT.matcher(text).matches()) {
+            return found + ", a number too large or too small to hold";
+        }
+        if (TOO_MANY_DIGITS.matcher(text).matches()) {
+            return found + ", a number too long to hold, of more than 20 digits before or after its point";
         }
         return found + ", which does not begin with a plain number";
     }

@@ -1,5 +1,7 @@
 package org.soakwright.recipes.text;
 
+import java.math.BigDecimal;
+
 /** Text from a file as it may appear in a message: one line, quoted, of bounded length, nothing a terminal would obey. */
 public final class Shown {
     private static final int LONGEST = 60;
@@ -22,6 +24,16 @@ public final class Shown {
         });
         boolean cut = text.codePointCount(0, text.length()) > longest;
         return shown.append(cut ? "…" : "").toString();
+    }
+
+    /** A number as one would write it: {@code 1e300}, {@code 8e-10}. */
+    public static String number(BigDecimal value) {
+        return value.toString().replace("E+", "e").replace('E', 'e');
+    }
+
+    /** A finite number as one would write it: {@code 0}, {@code 0.8}. */
+    public static String number(double value) {
+        return number(BigDecimal.valueOf(value).stripTrailingZeros());
     }
 
     /** Whether every character is one that prints on a line. */

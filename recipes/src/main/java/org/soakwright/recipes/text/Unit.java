@@ -9,6 +9,9 @@ import java.util.regex.Pattern;
  * no SI unit; a currency counts as its own, so that {@code EUR/h} is 1/3600 EUR/s.
  */
 public record Unit(String symbol, BigDecimal numerator, BigDecimal denominator, BigDecimal offset) {
+    /** The unit of a plain number. */
+    public static final Unit ONE = of("1", "1");
+
     private static final Pattern CURRENCY = Pattern.compile("[A-Z]{3}");
 
     public Unit {

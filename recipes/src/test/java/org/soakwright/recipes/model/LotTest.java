@@ -21,7 +21,7 @@ class LotTest {
 
     private static Lot lot(Amount amount, @Nullable String density, Grade... grades) {
         Quantity stated = density == null ? null : Given.quantity(density, "kg/m3", Kind.DENSITY);
-        return new Lot(HERE, amount, stated, List.of(grades));
+        return new Lot(HERE, amount, stated, null, List.of(grades));
     }
 
     @Test
@@ -64,6 +64,16 @@ class LotTest {
         assertEquals(0.018, new Grade(HERE, "a", OneAxisShape.SLAB, size, Faces.ONE, 1).depth());
         assertEquals(0.009, new Grade(HERE, "a", OneAxisShape.SLAB, size, Faces.BOTH, 1).depth());
         assertThrows(Unsound.class, () -> new Grade(HERE, "a", OneAxisShape.CYLINDER, size, Faces.ONE, 1));
+    }
+
+    @Test
+    void aLotMayStateItsTemperature() {
+        Amount amount = new Amount.ByVolume(Given.quantity("1", "L", Kind.VOLUME));
+        List<Grade> grades = List.of(sphere("a", "3", 1));
+        Quantity cold = Given.quantity("3", "Cel", Kind.TEMPERATURE);
+        assertEquals(cold, new Lot(HERE, amount, null, cold, grades).temperature());
+        Quantity molten = Given.quantity("3001", "K", Kind.TEMPERATURE);
+        assertThrows(Unsound.class, () -> new Lot(HERE, amount, null, molten, grades));
     }
 
     @Test

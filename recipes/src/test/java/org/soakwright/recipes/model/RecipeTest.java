@@ -94,6 +94,19 @@ class RecipeTest {
     }
 
     @Test
+    void lessClingsThanThereIsLiquor() {
+        Step.Soak soak = first();
+        Quantity all = Given.quantity("2", "L/kg", Kind.LIQUOR_RATIO);
+        Step.Soak clinging = new Step.Soak(soak.head(), soak.liquor(), soak.film(), all);
+        assertEquals(
+                "more would cling than the liquor holds: found \"2 L/kg\"; write less than 2 L/kg, which is the whole liquor",
+                refusal(() -> withFirst(clinging)));
+        LiquorVolume volume = new LiquorVolume.Volume(Given.quantity("1201", "L", Kind.VOLUME));
+        Liquor larger = new Liquor(HERE, volume, Map.of(), true, null);
+        assertEquals(all, ((Step.Soak) withFirst(clinging.with(larger)).steps().get(0)).dragOut());
+    }
+
+    @Test
     void aBandHasItsLimitsInOrderAndInOneBasis() {
         Quantity low = Given.quantity("10", "g/kg", Kind.PER_MASS);
         Quantity high = Given.quantity("2", "%", Kind.PER_MASS);

@@ -64,6 +64,24 @@ class MeasurementTest {
     }
 
     @Test
+    void aNumberTooLongOrTooLargeIsCalledThat() {
+        assertEquals("found \"1e9999 kg\", a number too large or too small to hold", Measurement.whyNot("1e9999 kg"));
+        assertEquals(
+                "found \"123456789012345678901 kg\", a number too long to hold, of more than 20 digits before or after"
+                        + " its point",
+                Measurement.whyNot("123456789012345678901 kg"));
+        assertEquals("found \"h\", which does not begin with a plain number", Measurement.whyNot("h"));
+    }
+
+    @Test
+    void aNumberIsKeptAsWritten() {
+        assertEquals("1.50E+3", Measurement.of("1.50E+3 kg").orElseThrow().written());
+        assertEquals("0", Shown.number(0.0));
+        assertEquals("-0.8", Shown.number(-0.8));
+        assertEquals("1e300", Shown.number(1e300));
+    }
+
+    @Test
     void aWrongUnitIsNamedByWhatItMeasures() {
         assertEquals(
                 "found \"6 kg\", a mass, where a duration is needed",
