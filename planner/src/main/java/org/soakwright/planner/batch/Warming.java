@@ -47,8 +47,8 @@ public final class Warming {
             worth = Math.max(worth, warming * Math.abs(here / there - 1));
         }
         String said = "the lot starts at " + lot + ", " + first.name() + " is at " + step
-                + ": warming through takes about " + Durations.practical(warming) + " and is worth at most "
-                + Durations.practical(worth) + " of that step";
+                + ": warming through takes about " + minutes(warming) + " and is worth at most "
+                + minutes(worth) + " of that step";
         if (worth > NEGLIGIBLE * first.time().seconds(0)) {
             throw new Unsound(
                     lot.place(),
@@ -56,5 +56,9 @@ public final class Warming {
                             + "; bring the lot to the step's temperature first, or remove it and allow for it");
         }
         return Optional.of("Left out: " + said + ".");
+    }
+
+    private static String minutes(double seconds) {
+        return Durations.practical(60 * Math.ceil(seconds / 60));
     }
 }

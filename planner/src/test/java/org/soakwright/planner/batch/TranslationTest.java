@@ -129,7 +129,7 @@ class TranslationTest {
                 Recipes.LOINS.replace("  density:", "  temperature: 3 Cel\n  density:") + "steps:",
                 Recipes.water("one", "ratio: 2 L/kg", "6 h"));
         String said = Warming.of(recipe).orElseThrow();
-        assertTrue(said.contains("takes about 37 min and is worth at most 1 min"), said);
+        assertTrue(said.contains("takes about 37 min and is worth at most 2 min"), said);
         assertTrue(Cautions.of(recipe).contains(said));
     }
 
