@@ -5,6 +5,7 @@ import java.util.List;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Time;
 import org.soakwright.recipes.text.Unsound;
 import org.soakwright.solver.chain.Chain;
 import org.soakwright.solver.chain.Course;
@@ -17,7 +18,6 @@ import org.soakwright.solver.chain.StageTooShort;
  */
 public final class Batch {
     private final Recipe recipe;
-    private final Translation translation;
     private final List<Translation.Slot> slots;
     private final List<Chain> chains;
     private final int[] lastStage;
@@ -25,12 +25,20 @@ public final class Batch {
     private final List<Requirement> requirements;
     private long evaluations;
 
+    /**
+     * Prepares a recipe.
+     *
+     * @throws Unsound where it asks for something that is not computed yet
+     */
     public Batch(Recipe recipe) {
-        this.recipe = recipe;
+        this(recipe, new Translation(recipe).chains());
+    }
+
+    private Batch(Recipe recipe, List<Chain> chains) {
         Warming.of(recipe);
-        translation = new Translation(recipe);
-        slots = translation.slots();
-        chains = recipe.species().stream().map(translation::chain).toList();
+        this.recipe = recipe;
+        this.chains = chains;
+        slots = new Translation(recipe).slots();
         lastStage = new int[recipe.steps().size()];
         for (int k = 0; k < slots.size(); k++) {
             if (slots.get(k).part() > 0) {
@@ -39,6 +47,16 @@ public final class Batch {
         }
         cost = new Cost(recipe);
         requirements = Requirements.of(this);
+    }
+
+    /** The same physics with other times to choose from; what was found of it is shared. */
+    Batch retimed(List<Time> times) {
+        List<Step> steps = new ArrayList<>();
+        for (int i = 0; i < times.size(); i++) {
+            Step step = recipe.steps().get(i);
+            steps.add(step.with(step.head().withTime(times.get(i))));
+        }
+        return new Batch(recipe.withSteps(steps), chains);
     }
 
     public Recipe recipe() {
@@ -98,10 +116,6 @@ public final class Batch {
                         + "; write at least " + Durations.practical(Math.ceil(shortest)));
         unsound.initCause(cause);
         return unsound;
-    }
-
-    Translation translation() {
-        return translation;
     }
 
     Chain chain(int species) {

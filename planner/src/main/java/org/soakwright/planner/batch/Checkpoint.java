@@ -58,20 +58,36 @@ public record Checkpoint(int step, double seconds, String species, double expect
     /** Two for each step in a vessel, of the species that the first target looks at, or of the first that is read there. */
     public static List<Checkpoint> of(Run run) {
         Recipe recipe = run.batch().recipe();
+        Optional<Species> watched = watched(recipe);
         List<Checkpoint> all = new ArrayList<>();
+        if (watched.isEmpty()) {
+            return all;
+        }
+        List<Batch> others = new ArrayList<>();
+        for (double factor : FACTORS) {
+            others.add(new Batch(withDiffusivity(recipe, watched.get(), factor)));
+        }
         for (int i = 0; i < recipe.steps().size(); i++) {
-            Optional<Species> watched = watched(recipe);
-            boolean vessel = recipe.steps().get(i) instanceof Step.Wet wet
-                    && !wet.liquor().isUnlimited();
-            if (vessel
-                    && watched.isPresent()
-                    && Translation.fills(recipe.steps().get(i)) == 1) {
+            Step step = recipe.steps().get(i);
+            boolean vessel = step instanceof Step.Wet wet && !wet.liquor().isUnlimited();
+            if (vessel && Translation.fills(step) == 1) {
+                double before = 0;
                 for (double moment : MOMENTS) {
-                    at(run, i, watched.get(), moment).ifPresent(all::add);
+                    double seconds = clocked(moment, run.seconds()[i]);
+                    if (seconds > before && seconds < run.seconds()[i]) {
+                        all.add(at(run, others, i, watched.get().name(), seconds));
+                    }
+                    before = seconds;
                 }
             }
         }
         return List.copyOf(all);
+    }
+
+    /** To a quarter of an hour in long steps, to five minutes or one in short ones. */
+    private static double clocked(double moment, double planned) {
+        double grain = planned > 4 * 3600 ? 900 : planned > 1800 ? 300 : 60;
+        return Math.max(grain, grain * Math.rint(moment * planned / grain));
     }
 
     private static Optional<Species> watched(Recipe recipe) {
@@ -88,24 +104,16 @@ public record Checkpoint(int step, double seconds, String species, double expect
                         .findFirst());
     }
 
-    private static Optional<Checkpoint> at(Run run, int step, Species species, double moment) {
-        double planned = run.seconds()[step];
-        double grain = planned > 4 * 3600 ? 900 : planned > 1800 ? 300 : 60;
-        double seconds = Math.max(grain, grain * Math.rint(moment * planned / grain));
-        if (seconds >= planned) {
-            return Optional.empty();
-        }
-        Recipe recipe = run.batch().recipe();
-        double expected = reading(run.batch(), run.seconds(), step, seconds, species.name());
+    private static Checkpoint at(Run run, List<Batch> others, int step, String species, double seconds) {
+        double expected = reading(run.batch(), run.seconds(), step, seconds, species);
         List<Deviation> deviations = new ArrayList<>();
-        for (double factor : FACTORS) {
-            Recipe other = withDiffusivity(recipe, species, factor);
-            double reading = reading(new Batch(other), run.seconds(), step, seconds, species.name());
+        for (int f = 0; f < FACTORS.length; f++) {
+            double reading = reading(others.get(f), run.seconds(), step, seconds, species);
             if (Math.abs(reading - expected) > TELLING * Math.max(Math.abs(expected), Math.abs(reading))) {
-                deviations.add(deviation(run, other, step, seconds, reading, factor));
+                deviations.add(deviation(run, others.get(f), step, seconds, reading, FACTORS[f]));
             }
         }
-        return Optional.of(new Checkpoint(step, seconds, species.name(), expected, deviations));
+        return new Checkpoint(step, seconds, species, expected, deviations);
     }
 
     private static double reading(Batch batch, double[] stepSeconds, int step, double seconds, String species) {
@@ -119,7 +127,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
         return batch.chain(s).follow(upTo).value(new Probe.Liquor(), stage);
     }
 
-    private static Deviation deviation(Run run, Recipe other, int step, double seconds, double reading, double factor) {
+    private static Deviation deviation(Run run, Batch other, int step, double seconds, double reading, double factor) {
         double[] planned = run.seconds();
         try {
             Optional<Run> again = Planner.best(remaining(other, planned, step, seconds));
@@ -138,8 +146,9 @@ public record Checkpoint(int step, double seconds, String species, double expect
     }
 
     /** What is past stands; this step lasts at least until now; where nothing that remains is free, this step is. */
-    private static Recipe remaining(Recipe recipe, double[] planned, int step, double now) {
-        List<Step> steps = new ArrayList<>();
+    private static Batch remaining(Batch batch, double[] planned, int step, double now) {
+        Recipe recipe = batch.recipe();
+        List<Time> times = new ArrayList<>();
         boolean anythingFree =
                 recipe.steps().stream().skip(step).anyMatch(one -> one.time().isFree());
         for (int i = 0; i < planned.length; i++) {
@@ -162,9 +171,9 @@ public record Checkpoint(int step, double seconds, String species, double expect
                                     time.place(), seconds(from, time), seconds(to, time), seconds(grain, time), null);
                 }
             }
-            steps.add(one.with(one.head().withTime(time)));
+            times.add(time);
         }
-        return recipe.withSteps(steps);
+        return batch.retimed(times);
     }
 
     private static Quantity seconds(double seconds, Time like) {

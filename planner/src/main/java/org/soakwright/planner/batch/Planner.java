@@ -29,10 +29,10 @@ public final class Planner {
     private final Landscape landscape;
     private final Progress progress;
 
-    private Planner(Recipe recipe, Progress progress) {
+    private Planner(Batch batch, Progress progress) {
         this.progress = progress;
-        batch = new Batch(recipe);
-        grid = new Grid(recipe);
+        this.batch = batch;
+        grid = new Grid(batch.recipe());
         merit = new Merit(batch, grid);
         landscape = new Landscape(batch, grid);
         // The shortest durations need most modes: what cannot be computed is refused here, not when a search happens on
@@ -46,7 +46,7 @@ public final class Planner {
      * @throws org.soakwright.recipes.text.Unsound when a step is too short to be computed
      */
     public static Plan plan(Recipe recipe, Progress progress) {
-        Planner planner = new Planner(recipe, progress);
+        Planner planner = new Planner(new Batch(recipe), progress);
         Choice choice = planner.choose();
         Run run = planner.landscape.run(choice.free());
         boolean met = choice.met();
@@ -63,8 +63,8 @@ public final class Planner {
     }
 
     /** Only the choice, without explanations; empty where no choice meets the targets. */
-    static Optional<Run> best(Recipe recipe) {
-        Planner planner = new Planner(recipe, Progress.NONE);
+    static Optional<Run> best(Batch batch) {
+        Planner planner = new Planner(batch, Progress.NONE);
         Choice choice = planner.choose();
         return choice.met() ? Optional.of(planner.landscape.run(choice.free())) : Optional.empty();
     }

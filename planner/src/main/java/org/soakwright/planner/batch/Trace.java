@@ -15,6 +15,10 @@ import org.soakwright.solver.chain.StageTooShort;
 public final class Trace {
     private static final int PER_STEP = 28;
     private static final int PER_TRANSFER = 6;
+    private static final int FEWEST = 4;
+
+    /** What the first look of a stage may need: looks as squares need as many times the end's modes as there are looks. */
+    private static final int MOST_MODES = 300;
 
     private final Run run;
     private final double[] depths;
@@ -78,6 +82,7 @@ public final class Trace {
             boolean transfer = slot.part() == 0;
             double whole = slot.seconds(seconds);
             int count = transfer ? PER_TRANSFER : Math.max(PER_TRANSFER, (int) Math.ceil(PER_STEP * slot.part()));
+            count = Math.max(FEWEST, Math.min(count, MOST_MODES / modes(run, k)));
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);
             for (int i = 1; i <= count; i++) {
                 // Squares: the profile moves with the root of time.
@@ -89,6 +94,14 @@ public final class Trace {
             clock += whole;
         }
         return new Trace(run, depths, moments);
+    }
+
+    private static int modes(Run run, int stage) {
+        int most = 1;
+        for (int s = 0; s < run.batch().recipe().species().size(); s++) {
+            most = Math.max(most, run.course(s).modes(stage));
+        }
+        return most;
     }
 
     /** Empty so early in a stage that the profile would need more modes than are kept: the next look will do. */

@@ -78,8 +78,11 @@ final class Translation {
         };
     }
 
-    Chain chain(Species species) {
-        return Chain.of(lot(), start(species), stages(species));
+    /** One for each species. */
+    List<Chain> chains() {
+        return recipe.species().stream()
+                .map(species -> Chain.of(lot(), start(species), stages(species)))
+                .toList();
     }
 
     private Start start(Species species) {

@@ -25,11 +25,13 @@ public final class Chain {
     private final List<Grade> lot;
     private final List<Link> links;
     private final Extrema[][] extrema;
+    private final Samples[][] samples;
 
     private Chain(List<Grade> lot, List<Link> links) {
         this.lot = lot;
         this.links = links;
         extrema = new Extrema[links.size()][lot.size()];
+        samples = new Samples[links.size()][lot.size()];
     }
 
     /**
@@ -85,6 +87,16 @@ public final class Chain {
     /** Number of stages. */
     public int size() {
         return links.size();
+    }
+
+    /** Waves at positions, kept from one look along a profile to the next. */
+    Samples samples(int stage, int grade, double[] positions) {
+        Samples known = samples[stage][grade];
+        if (known == null || !known.isAt(positions)) {
+            known = new Samples(link(stage).modes, grade, positions);
+            samples[stage][grade] = known;
+        }
+        return known;
     }
 
     /** A stage, from 0. */

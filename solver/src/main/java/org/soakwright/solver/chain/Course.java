@@ -104,6 +104,11 @@ public final class Course {
         return seconds.length;
     }
 
+    /** Modes evaluated in a stage. */
+    public int modes(int stage) {
+        return count[stage];
+    }
+
     /** A reading at the end of a stage, from 0. */
     public Reading read(Probe probe, int stage) {
         int modes = 0;
@@ -138,9 +143,12 @@ public final class Course {
      * @return kg/m3 of piece, by position
      */
     public double[] profile(int grade, int stage, double... positions) {
+        Link link = chain.link(stage);
+        double[][] rows = chain.samples(stage, grade, positions).of(count[stage]);
         double[] contents = new double[positions.length];
         for (int i = 0; i < positions.length; i++) {
-            contents[i] = value(new Probe.At(grade, positions[i]), stage);
+            double theta = link.offset + Link.dot(rows[i], end[stage], count[stage]);
+            contents[i] = link.stage.partition() * theta;
         }
         return contents;
     }
