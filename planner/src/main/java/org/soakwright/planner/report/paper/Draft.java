@@ -1,0 +1,233 @@
+package org.soakwright.planner.report.paper;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import org.soakwright.planner.batch.Cautions;
+import org.soakwright.planner.batch.Checkpoint;
+import org.soakwright.planner.batch.Durations;
+import org.soakwright.planner.batch.EachGrade;
+import org.soakwright.planner.batch.PullWindow;
+import org.soakwright.planner.batch.Run;
+import org.soakwright.planner.batch.StepEnd;
+import org.soakwright.planner.batch.TargetState;
+import org.soakwright.planner.report.Figures;
+import org.soakwright.planner.report.Stamp;
+import org.soakwright.planner.report.Wording;
+import org.soakwright.recipes.model.Faces;
+import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.Lot;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Reference;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Target;
+
+/** Puts a sheet together from a batch that was followed. */
+final class Draft {
+    /** More fills than these are not listed one by one. */
+    private static final int MOST_FILLS = 24;
+
+    private final Run run;
+    private final List<String> binds;
+    private final Stamp stamp;
+    private final Clock clock;
+    private final Recipe recipe;
+    private final List<PullWindow> windows;
+    private final List<Checkpoint> checkpoints;
+    private final Advice advice;
+
+    /**
+     * A draft.
+     *
+     * @param binds names of the targets that decide
+     */
+    Draft(Run run, List<String> binds, Stamp stamp, Clock clock) {
+        this.run = run;
+        this.binds = binds;
+        this.stamp = stamp;
+        this.clock = clock;
+        recipe = run.batch().recipe();
+        boolean followable = run.meetsTargets();
+        windows = followable && !recipe.targets().isEmpty() ? PullWindow.of(run) : List.of();
+        checkpoints = followable ? Checkpoint.of(run) : List.of();
+        advice = new Advice(run, windows, clock);
+    }
+
+    Sheet sheet() {
+        List<String> misses = EachGrade.of(run).stream()
+                .filter(state -> !state.met())
+                .map(state -> Wording.miss(state) + ".")
+                .toList();
+        List<Sheet.Part> parts = new ArrayList<>();
+        for (int i = 0; i < recipe.steps().size(); i++) {
+            parts.add(part(i));
+        }
+        return new Sheet(
+                recipe.title(),
+                misses,
+                List.of(
+                        new Sheet.Blank("Lot code", ""),
+                        new Sheet.Blank("Loaded", recipe.lot().massKg().isPresent() ? "kg" : "L")),
+                lot(),
+                timing(),
+                parts,
+                targets(),
+                misses.isEmpty() ? Sampling.of(run, clock) : List.of(),
+                Cautions.of(run),
+                misses.isEmpty() ? List.of("Prepared", "Checked", "Released") : List.of("Prepared", "Checked"),
+                stamp);
+    }
+
+    private List<String> lot() {
+        Lot lot = recipe.lot();
+        String volume = MakeUp.litres(lot.volumeM3()) + " of pieces";
+        String amount = lot.massKg().isPresent() ? Figures.made(lot.massKg().getAsDouble()) + " kg, " + volume : volume;
+        return List.of(amount + ": " + lot.grades().stream().map(Draft::grade).collect(Collectors.joining("; ")) + ".");
+    }
+
+    private static String grade(Grade grade) {
+        String share = grade.share() < 1 ? Figures.made(grade.share() * 100) + " % " : "";
+        String sealed = grade.faces() == Faces.ONE ? " with one face sealed" : "";
+        return share + grade.name() + ", " + grade.shape().word() + " of " + grade.size() + sealed;
+    }
+
+    private List<String> timing() {
+        double total = run.totals().seconds();
+        List<String> lines = new ArrayList<>();
+        String span = clock.hasWall() ? ", from " + clock.wallWithYear(0) + " to " + clock.wallWithYear(total) : "";
+        lines.add("Takes " + Durations.practical(total) + span + between() + ".");
+        lines.add("The clock runs in hours and minutes from the start of the first step."
+                + (clock.hasWall()
+                        ? " Times of day are local, with 60 minutes to every hour: where summer time begins or ends,"
+                                + " go by the clock."
+                        : ""));
+        if (!windows.isEmpty()) {
+            lines.add(
+                    "A window says when a step may end with every target still met, if all other steps last as planned. Use one"
+                            + " window only; when two steps ended off their times, call the planner.");
+        }
+        return lines;
+    }
+
+    private String between() {
+        Quantity between = recipe.between();
+        return between == null || recipe.steps().size() < 2
+                ? ""
+                : ", with " + Durations.practical(between.si()) + " between steps to drain and transfer";
+    }
+
+    private Sheet.Part part(int index) {
+        StepEnd end = run.end(index);
+        Step step = end.step();
+        double seconds = end.to() - end.from();
+        String temperature = Wording.temperature(step);
+        List<Sheet.Moment> moments = new ArrayList<>();
+        moments.add(moment("Start", end.from(), step instanceof Step.Wet ? "pieces in the liquor" : "", "", List.of()));
+        moments.addAll(fills(end));
+        List<Sheet.Moment> readings = readings(index, end);
+        moments.addAll(readings);
+        moments.add(moment("End", end.to(), atEnd(end), "", window(index, end)));
+        moments.sort(Comparator.comparingDouble(Sheet.Moment::seconds));
+        return new Sheet.Part(
+                index + 1,
+                step.name(),
+                (run.meetsTargets() ? "" : Sheet.NO_PLAN + ": ") + step.kind() + ", " + Durations.practical(seconds)
+                        + (temperature.isEmpty() ? "" : ", at " + temperature),
+                new MakeUp(recipe).of(index, seconds),
+                moments,
+                readings.isEmpty() ? List.of() : List.of(Advice.OTHERWISE));
+    }
+
+    private Sheet.Moment moment(String what, double seconds, String planned, String unit, List<String> notes) {
+        return new Sheet.Moment(what, seconds, clock.running(seconds), clock.wall(seconds), planned, unit, notes);
+    }
+
+    /** Every fill but the first, which is the start. */
+    private List<Sheet.Moment> fills(StepEnd end) {
+        int fills = MakeUp.fills(end.step());
+        if (!(end.step() instanceof Step.Wet wet) || fills == 1) {
+            return List.of();
+        }
+        double each = (end.to() - end.from()) / fills;
+        if (fills > MOST_FILLS) {
+            String words = "a fresh fill every " + Durations.practical(each) + ", " + fills + " in all";
+            return List.of(moment("Fills", end.from() + each, words, "", List.of()));
+        }
+        String words = "drain, then "
+                + MakeUp.litres(wet.liquor().volumeM3(recipe.lot()).orElseThrow()) + " fresh";
+        List<Sheet.Moment> moments = new ArrayList<>();
+        for (int k = 1; k < fills; k++) {
+            moments.add(moment("Fill " + (k + 1), end.from() + k * each, words, "", List.of()));
+        }
+        return moments;
+    }
+
+    private List<Sheet.Moment> readings(int index, StepEnd end) {
+        List<Sheet.Moment> moments = new ArrayList<>();
+        double before = 0;
+        for (Checkpoint checkpoint : checkpoints) {
+            if (checkpoint.step() == index && checkpoint.seconds() > before) {
+                Advice.Given given = advice.at(checkpoint);
+                moments.add(moment(
+                        "Read",
+                        end.from() + checkpoint.seconds(),
+                        checkpoint.species() + " " + Advice.figure(checkpoint.expected()) + " g/L; go on at "
+                                + given.asPlanned().shown(),
+                        "g/L",
+                        given.off()));
+                before = checkpoint.seconds();
+            }
+        }
+        return moments;
+    }
+
+    private static String atEnd(StepEnd end) {
+        return end.step() instanceof Step.Wet ? "pieces out" : "";
+    }
+
+    private List<String> window(int index, StepEnd end) {
+        Optional<PullWindow> window =
+                windows.stream().filter(one -> one.step() == index).findFirst();
+        return window.map(one -> List.of("Window: not before " + clock.both(end.from() + one.earliest())
+                        + (one.latest().isPresent()
+                                ? ", not after "
+                                        + clock.both(end.from() + one.latest().getAsDouble()) + "."
+                                : "; no later limit within three times the planned time.")))
+                .orElse(List.of());
+    }
+
+    private List<Sheet.TargetLine> targets() {
+        List<Sheet.TargetLine> lines = new ArrayList<>();
+        for (TargetState state : EachGrade.of(run)) {
+            String grade = state.grade().orElse("");
+            String name = grade.isEmpty()
+                    ? state.name()
+                    : state.name().substring(0, state.name().length() - grade.length() - 2);
+            lines.add(new Sheet.TargetLine(
+                    name,
+                    grade,
+                    when(state),
+                    Wording.limit(state),
+                    Wording.value(state),
+                    !state.met() ? "MISSED" : binds.contains(state.name()) ? "decides" : "",
+                    state.total().isPresent() ? "" : state.unit()));
+        }
+        return lines;
+    }
+
+    private String when(TargetState state) {
+        if (state.target() instanceof Target.OfLiquor liquor) {
+            return liquor.step().name();
+        }
+        if (state.total().isPresent()) {
+            return "the batch";
+        }
+        Reference after = state.target() instanceof Target.OfPieces pieces ? pieces.after() : null;
+        return after != null
+                ? after.name()
+                : recipe.steps().get(recipe.steps().size() - 1).name();
+    }
+}

@@ -1,0 +1,120 @@
+package org.soakwright.planner.report.paper;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import org.soakwright.planner.batch.EachGrade;
+import org.soakwright.planner.batch.Run;
+import org.soakwright.planner.batch.TargetState;
+import org.soakwright.recipes.model.Faces;
+import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.GradeScope;
+import org.soakwright.recipes.model.OneAxisShape;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Reference;
+import org.soakwright.recipes.model.Target;
+
+/** How to take what the targets speak of. */
+final class Sampling {
+    private final Recipe recipe;
+
+    private Sampling(Recipe recipe) {
+        this.recipe = recipe;
+    }
+
+    /** What is taken together: pieces of these grades, after this step, prepared in this way. */
+    private record Take(String after, String reading, String how) {}
+
+    private record Of(Set<String> species, Set<String> grades) {}
+
+    static List<String> of(Run run, Clock clock) {
+        Recipe recipe = run.batch().recipe();
+        Sampling sampling = new Sampling(recipe);
+        Map<Take, Of> takes = new LinkedHashMap<>();
+        for (TargetState state : EachGrade.of(run)) {
+            if (state.target() instanceof Target.OfPieces pieces) {
+                Take take = new Take(sampling.after(pieces), pieces.reading().word(), sampling.how(pieces, state));
+                Of of = takes.computeIfAbsent(take, key -> new Of(new LinkedHashSet<>(), new LinkedHashSet<>()));
+                of.species().add(pieces.species().name());
+                of.grades().add(state.grade().orElseThrow());
+            }
+        }
+        List<String> lines = new ArrayList<>();
+        takes.forEach((take, of) -> lines.add(
+                "After " + take.after() + ", at " + clock.both(endOf(run, take.after())) + ": " + listed(of.species())
+                        + " " + take.reading() + grades(recipe, of.grades()) + ". " + take.how()));
+        for (TargetState state : EachGrade.of(run)) {
+            if (state.target() instanceof Target.OfLiquor liquor) {
+                lines.add("At the end of " + liquor.step().name()
+                        + ", before the liquor is drained: stir, take a sample of" + " the liquor, assay it for "
+                        + liquor.species().name() + ".");
+            }
+        }
+        if (!takes.isEmpty()) {
+            lines.add("How many pieces are taken, and where in the lot, is for the local sampling plan.");
+        }
+        return lines.stream().distinct().toList();
+    }
+
+    private static String grades(Recipe recipe, Set<String> grades) {
+        return recipe.lot().grades().size() == 1 ? "" : ", " + listed(grades);
+    }
+
+    private static String listed(Set<String> names) {
+        List<String> all = new ArrayList<>(names);
+        int last = all.size() - 1;
+        return last == 0 ? all.get(0) : String.join(", ", all.subList(0, last)) + " and " + all.get(last);
+    }
+
+    private String after(Target.OfPieces target) {
+        Reference after = target.after();
+        return after != null
+                ? after.name()
+                : recipe.steps().get(recipe.steps().size() - 1).name();
+    }
+
+    static double endOf(Run run, String step) {
+        for (int i = 0; i < run.seconds().length; i++) {
+            if (run.end(i).step().name().equals(step)) {
+                return run.end(i).to();
+            }
+        }
+        throw new IllegalArgumentException("no step " + step);
+    }
+
+    private String how(Target.OfPieces target, TargetState state) {
+        if (target.grade() instanceof GradeScope.WholeLot) {
+            return "Homogenise whole pieces of all grades, taken in the shares in which they are loaded.";
+        }
+        Grade grade = recipe.lot().grade(state.grade().orElseThrow()).orElseThrow();
+        return switch (target.reading()) {
+            case MEAN -> "Homogenise whole pieces" + apart();
+            case CORE -> "Cut a plug from " + core(grade) + apart();
+            case SURFACE -> "Shave a thin layer off the wetted surface" + apart();
+            case HIGHEST -> layers(grade) + ", assay each; the highest counts" + apart();
+            case LOWEST -> layers(grade) + ", assay each; the lowest counts" + apart();
+            case RANGE -> layers(grade) + ", assay each; the highest less the lowest counts" + apart();
+        };
+    }
+
+    private String apart() {
+        return recipe.lot().grades().size() == 1 ? "." : ", each grade by itself.";
+    }
+
+    private static String core(Grade grade) {
+        return switch (grade.shape()) {
+            case SLAB -> grade.faces() == Faces.ONE ? "the sealed face" : "the middle of the thickness";
+            case CYLINDER -> "around the axis";
+            case SPHERE -> "the centre";
+        };
+    }
+
+    private static String layers(Grade grade) {
+        String through =
+                grade.shape() == OneAxisShape.SLAB ? "through the whole thickness" : "from the surface to the core";
+        return "Cut a plug " + through + " into thin layers";
+    }
+}

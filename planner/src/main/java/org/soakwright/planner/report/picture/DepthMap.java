@@ -1,0 +1,332 @@
+package org.soakwright.planner.report.picture;
+
+import java.awt.Graphics2D;
+import java.awt.geom.Path2D;
+import java.awt.geom.Point2D;
+import java.awt.geom.Rectangle2D;
+import java.awt.geom.RoundRectangle2D;
+import java.util.ArrayList;
+import java.util.List;
+import org.soakwright.planner.batch.Durations;
+import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.OneAxisShape;
+import org.soakwright.recipes.model.Reading;
+
+/** One species in one grade: the clock across, the depth into the piece down, the content as a shade; core, mean and surface below. */
+final class DepthMap {
+    private static final int COLUMNS = 276;
+    private static final int ROWS = 56;
+    private static final int LEFT = 52;
+    private static final int RIGHT = 148;
+    private static final int MAP_TOP = 104;
+    private static final int MAP_HEIGHT = 212;
+    private static final int COURSE_TOP = MAP_TOP + MAP_HEIGHT + 40;
+    private static final int COURSE_HEIGHT = 124;
+    private static final int HEIGHT = COURSE_TOP + COURSE_HEIGHT + 40;
+    private static final List<Reading> COURSES = List.of(Reading.CORE, Reading.MEAN, Reading.SURFACE);
+
+    private final History history;
+    private final Clock clock;
+    private final Ribbon ribbon;
+    private final int species;
+    private final Grade grade;
+    private final double[][] profiles;
+    private final List<Bound> bounds;
+    private final Scale contents;
+    private final Scale depths;
+    private final List<double[]> courses = new ArrayList<>();
+    private final double[][] shares;
+
+    DepthMap(History history, Clock clock, int species, int gradeIndex) {
+        this.history = history;
+        this.clock = clock;
+        ribbon = new Ribbon(clock, history.ends(), Look.WIDTH - LEFT - RIGHT);
+        this.species = species;
+        grade = history.grades().get(gradeIndex);
+        profiles = history.profiles(species, gradeIndex);
+        bounds = Bound.of(history, species, gradeIndex);
+        double most = 0;
+        double least = Double.POSITIVE_INFINITY;
+        for (double[] profile : profiles) {
+            most = Math.max(most, History.highest(profile));
+            least = Math.min(least, History.lowest(profile));
+        }
+        contents = Scale.holding(least, most, 5);
+        depths = Scale.full(1000 * grade.depth(), 6).reversed();
+        for (Reading reading : COURSES) {
+            courses.add(history.readings(species, gradeIndex, reading));
+        }
+        shares = resampled();
+    }
+
+    Picture picture() {
+        String name = history.recipe().species().get(species).name();
+        return new Picture(
+                "map-" + Words.identifier(grade.name()) + "-" + Words.identifier(name),
+                title(),
+                caption(),
+                altText(),
+                Look.WIDTH,
+                height(),
+                this::draw);
+    }
+
+    private int height() {
+        return HEIGHT + ribbon.keyHeight();
+    }
+
+    private String title() {
+        return Words.capital(history.recipe().species().get(species).name()) + " in " + grade.name()
+                + ", by depth and time";
+    }
+
+    private void draw(Graphics2D g, Theme theme) {
+        Sheet sheet = new Sheet(g, theme, Look.WIDTH, height());
+        Look look = sheet.look();
+        sheet.head(
+                title(),
+                "Shade: the content. Above: the steps. Below: core, mean and surface."
+                        + (bounds.isEmpty() ? "" : " Lines: contents that targets name."));
+        int width = Look.WIDTH - LEFT - RIGHT;
+        Panel map = new Panel(new Rectangle2D.Double(LEFT, MAP_TOP, width, MAP_HEIGHT), clock, depths);
+        map.image(Shades.image(shares, look.contents()));
+        map.on(sheet);
+        map.nameRows(sheet, "depth from the " + (surfaceIsFace() ? "wetted face" : "surface") + ", mm");
+        ribbon.over(sheet, map, Sheet.TOP + 4);
+        contours(sheet, map);
+        shadeScale(sheet, map);
+        Panel course = new Panel(new Rectangle2D.Double(LEFT, COURSE_TOP, width, COURSE_HEIGHT), clock, contents);
+        ribbon.through(sheet, course);
+        Labels labels = new Labels(course.area().getMaxX(), RIGHT);
+        for (Bound bound : bounds) {
+            course.line(
+                    new double[] {0, history.end()},
+                    new double[] {bound.level(), bound.level()},
+                    look.limit(),
+                    Look.dashed(1.2f, 4, 4));
+            labels.add(bound.text(), course.y(bound.level()), look.limit());
+        }
+        for (int i = 0; i < COURSES.size(); i++) {
+            double[] values = courses.get(i);
+            course.line(history.clocks(), values, look.series(i), Look.line(i));
+            double last = values[values.length - 1];
+            labels.add(COURSES.get(i).word() + " " + Words.number(last), course.y(last), look.series(i));
+        }
+        course.on(sheet);
+        course.nameRows(sheet, "content, " + history.unit(species));
+        course.nameColumns(sheet, clock.name());
+        labels.on(sheet, COURSE_TOP, COURSE_TOP + COURSE_HEIGHT);
+        ribbon.key(sheet, course);
+    }
+
+    private boolean surfaceIsFace() {
+        return grade.shape() == OneAxisShape.SLAB;
+    }
+
+    /** Shares of the shade scale by column of the image and by row, the surface first. */
+    private double[][] resampled() {
+        double[][] image = new double[COLUMNS][ROWS];
+        double[] clocks = history.clocks();
+        int after = 1;
+        for (int i = 0; i < COLUMNS; i++) {
+            double at = clock.clock((i + 0.5) / COLUMNS);
+            while (after < clocks.length - 1 && clocks[after] < at) {
+                after++;
+            }
+            double share = Math.max(0, Math.min(1, (at - clocks[after - 1]) / (clocks[after] - clocks[after - 1])));
+            for (int j = 0; j < ROWS; j++) {
+                double position = 1 - (j + 0.5) / ROWS;
+                double before = along(profiles[after - 1], position);
+                image[i][j] = contents.at(before + share * (along(profiles[after], position) - before));
+            }
+        }
+        return image;
+    }
+
+    private static double along(double[] profile, double position) {
+        double at = position * (profile.length - 1);
+        int i = Math.min(profile.length - 2, (int) at);
+        return profile[i] + (at - i) * (profile[i + 1] - profile[i]);
+    }
+
+    private void contours(Sheet sheet, Panel map) {
+        Look look = sheet.look();
+        List<List<Point2D>> drawn = new ArrayList<>();
+        List<List<Point2D>> longest = new ArrayList<>();
+        for (Bound bound : bounds) {
+            List<Point2D> most = List.of();
+            for (List<Point2D> line : Contour.of(profiles, bound.level())) {
+                List<Point2D> placed =
+                        line.stream().map(point -> placed(map, point)).toList();
+                Path2D path = path(placed);
+                sheet.draw(path, look.ground(), Look.dashed(4));
+                sheet.draw(path, look.limit(), Look.dashed(1.8f));
+                drawn.add(placed);
+                most = span(placed) > span(most) ? placed : most;
+            }
+            longest.add(most);
+        }
+        for (int i = 0; i < bounds.size(); i++) {
+            List<Point2D> own = longest.get(i);
+            chip(
+                    sheet,
+                    map,
+                    own,
+                    drawn.stream().filter(line -> line != own).toList(),
+                    bounds.get(i).text());
+        }
+    }
+
+    private Point2D placed(Panel map, Point2D point) {
+        return new Point2D.Double(map.x(clockAt(point.getX())), map.y(depthAt(point.getY())));
+    }
+
+    private static Path2D path(List<Point2D> points) {
+        Path2D path = new Path2D.Double();
+        path.moveTo(points.get(0).getX(), points.get(0).getY());
+        points.stream().skip(1).forEach(point -> path.lineTo(point.getX(), point.getY()));
+        return path;
+    }
+
+    private static double span(List<Point2D> line) {
+        return line.isEmpty() ? 0 : line.get(0).distance(line.get(line.size() - 1)) + line.size() / 1000.0;
+    }
+
+    /** Names a line upon itself, where the name covers no other. */
+    private static void chip(Sheet sheet, Panel map, List<Point2D> line, List<List<Point2D>> others, String text) {
+        double width = Typeface.width(text, Look.SMALL) + 10;
+        for (int i = 0; i < 40 && !line.isEmpty(); i++) {
+            // From the middle outwards.
+            double share = 0.5 + (i % 2 == 0 ? 0.0125 : -0.0125) * i;
+            Point2D at = line.get((int) Math.rint(share * (line.size() - 1)));
+            for (double aside : new double[] {0, 1, -1}) {
+                double left = at.getX() - width / 2 + aside * (width / 2 + 8);
+                RoundRectangle2D ground = new RoundRectangle2D.Double(left, at.getY() - 8.5, width, 17, 6, 6);
+                Rectangle2D kept = new Rectangle2D.Double(left - 3, at.getY() - 11, width + 6, 22);
+                if (map.area().contains(ground.getBounds2D())
+                        && others.stream().flatMap(List::stream).noneMatch(kept::contains)
+                        && sheet.isFree(text, left + 5, at.getY() + 4, Sheet.Anchor.LEFT, Look.SMALL)) {
+                    sheet.fill(ground, sheet.look().ground());
+                    sheet.text(
+                            text,
+                            left + 5,
+                            at.getY() + 4,
+                            Sheet.Anchor.LEFT,
+                            Look.SMALL,
+                            sheet.look().ink());
+                    return;
+                }
+            }
+        }
+    }
+
+    private double clockAt(double column) {
+        double[] clocks = history.clocks();
+        int i = Math.min(clocks.length - 2, (int) column);
+        return clocks[i] + (column - i) * (clocks[i + 1] - clocks[i]);
+    }
+
+    private double depthAt(double row) {
+        return 1000 * grade.depth() * (1 - row / (history.depths().length - 1));
+    }
+
+    private void shadeScale(Sheet sheet, Panel map) {
+        Look look = sheet.look();
+        double[][] ramp = new double[1][128];
+        for (int j = 0; j < ramp[0].length; j++) {
+            ramp[0][j] = 1 - (j + 0.5) / ramp[0].length;
+        }
+        Rectangle2D bar = new Rectangle2D.Double(map.area().getMaxX() + 22, MAP_TOP, 14, MAP_HEIGHT);
+        Panel scale = new Panel(bar, clock, contents);
+        scale.image(Shades.image(ramp, look.contents()));
+        scale.on(sheet);
+        sheet.text(
+                "content, " + history.unit(species),
+                bar.getX(),
+                MAP_TOP - 13,
+                Sheet.Anchor.LEFT,
+                Look.STRONG,
+                look.ink());
+        for (Scale.Tick tick : contents.ticks()) {
+            sheet.text(
+                    tick.label(),
+                    bar.getMaxX() + 7,
+                    scale.y(tick.value()) + 4,
+                    Sheet.Anchor.LEFT,
+                    Look.TEXT,
+                    look.muted());
+        }
+    }
+
+    private String caption() {
+        String unit = " " + history.unit(species);
+        double[] core = courses.get(0);
+        double[] surface = courses.get(2);
+        int last = core.length - 1;
+        String text = "In " + grade.name() + " the core goes from " + Words.number(core[0]) + " to "
+                + Words.number(core[last]) + unit + " and the surface to " + Words.number(surface[last]) + unit;
+        for (Bound bound : bounds) {
+            int after = crossing(core, bound.level());
+            if (after > 0) {
+                double share = (bound.level() - core[after - 1]) / (core[after] - core[after - 1]);
+                double at =
+                        history.clocks()[after - 1] + share * (history.clocks()[after] - history.clocks()[after - 1]);
+                return text + "; the core comes to " + Words.written(round(bound.level())) + unit + " at "
+                        + Durations.clock(at) + ".";
+            }
+        }
+        for (Bound bound : bounds) {
+            double depth = depthReached(bound.level());
+            if (depth > 0) {
+                return text + "; at the end " + Words.written(round(bound.level())) + unit + " is found "
+                        + Words.number(depth) + " mm deep, the core at " + Words.number(1000 * grade.depth())
+                        + " mm.";
+            }
+        }
+        return text + ".";
+    }
+
+    /** Contents of targets are round, but for the rounding of units. */
+    private static double round(double level) {
+        return new java.math.BigDecimal(level)
+                .round(new java.math.MathContext(6))
+                .doubleValue();
+    }
+
+    private static int crossing(double[] values, double level) {
+        for (int i = values.length - 1; i > 0; i--) {
+            if (values[i] >= level != values[i - 1] >= level) {
+                return i;
+            }
+        }
+        return 0;
+    }
+
+    /** mm; 0 where the last profile does not cross. */
+    private double depthReached(double level) {
+        double[] profile = profiles[profiles.length - 1];
+        int i = crossing(profile, level);
+        return i == 0 ? 0 : depthAt(i - 1 + (level - profile[i - 1]) / (profile[i] - profile[i - 1]));
+    }
+
+    private String altText() {
+        String unit = " " + history.unit(species);
+        StringBuilder text = new StringBuilder("Map of "
+                + title().substring(0, 1).toLowerCase(java.util.Locale.ROOT)
+                + title().substring(1) + ": across the running clock from 0:00 to " + Durations.clock(history.end())
+                + ", down the depth from the surface to the core at " + Words.number(1000 * grade.depth())
+                + " mm. At the end of each step:");
+        for (int i = 0; i < history.ends().size(); i++) {
+            int at = history.momentAt(history.ends().get(i).to());
+            text.append(i == 0 ? " " : "; ").append(history.ends().get(i).step().name());
+            for (int k = 0; k < COURSES.size(); k++) {
+                text.append(k == 0 ? " " : ", ")
+                        .append(COURSES.get(k).word())
+                        .append(' ')
+                        .append(Words.number(courses.get(k)[at]))
+                        .append(unit);
+            }
+        }
+        return text.append('.').toString();
+    }
+}

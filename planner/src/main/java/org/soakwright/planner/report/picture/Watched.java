@@ -1,0 +1,222 @@
+package org.soakwright.planner.report.picture;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.soakwright.planner.batch.EachGrade;
+import org.soakwright.planner.batch.TargetState;
+import org.soakwright.recipes.model.Basis;
+import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.Liquor;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Target;
+
+/**
+ * One target over the clock, in its own unit.
+ *
+ * @param name what is read, without the grade
+ * @param courses one for each grade looked at, or one
+ */
+record Watched(String name, String unit, List<Limit> limits, List<Course> courses) {
+    /** A limit is drawn by orders of magnitude when it lies below this share of the most. */
+    private static final double SMALL = 0.04;
+
+    record Limit(double value, String text) {}
+
+    /** A line without a break. */
+    record Piece(double[] clocks, double[] values) {}
+
+    /**
+     * What is read in one grade or liquor.
+     *
+     * @param name as in sheets
+     * @param step at whose end it is read
+     */
+    record Course(
+            String name,
+            String label,
+            int series,
+            List<Piece> pieces,
+            double readAt,
+            String step,
+            double value,
+            boolean met,
+            boolean decides) {
+        String verdict() {
+            return met ? decides ? ", decides" : "" : ", missed";
+        }
+    }
+
+    /** Every target but the totals, in the order written. */
+    static List<Watched> of(History history, List<String> binds) {
+        Map<Target, List<TargetState>> byTarget = new LinkedHashMap<>();
+        for (TargetState state : EachGrade.of(history.run())) {
+            if (!(state.target() instanceof Target.OfTotal)) {
+                byTarget.computeIfAbsent(state.target(), target -> new ArrayList<>())
+                        .add(state);
+            }
+        }
+        List<Watched> watched = new ArrayList<>();
+        byTarget.forEach((target, states) -> watched.add(of(history, states, binds)));
+        return watched;
+    }
+
+    private static Watched of(History history, List<TargetState> states, List<String> binds) {
+        TargetState first = states.get(0);
+        String tail = first.grade().map(grade -> ", " + grade).orElse("");
+        String name = first.name().endsWith(tail)
+                ? first.name().substring(0, first.name().length() - tail.length())
+                : first.name();
+        List<Limit> limits = new ArrayList<>();
+        first.atMost().ifPresent(most -> limits.add(new Limit(most, "at most " + Words.written(most))));
+        first.atLeast().ifPresent(least -> limits.add(new Limit(least, "at least " + Words.written(least))));
+        List<Course> courses = new ArrayList<>();
+        for (TargetState state : states) {
+            courses.add(course(history, state, binds.contains(state.name())));
+        }
+        return new Watched(name, first.unit(), limits, courses);
+    }
+
+    private static Course course(History history, TargetState state, boolean decides) {
+        boolean ofPieces = state.target() instanceof Target.OfPieces;
+        int step = ofPieces
+                ? step(history, ((Target.OfPieces) state.target()).after())
+                : step(history, ((Target.OfLiquor) state.target()).step());
+        int grade = grade(history, state.grade().orElse(""));
+        return new Course(
+                state.name(),
+                state.grade().orElse("liquor"),
+                Math.max(0, grade),
+                ofPieces
+                        ? ofPieces(history, (Target.OfPieces) state.target(), grade)
+                        : ofLiquor(history, (Target.OfLiquor) state.target()),
+                history.ends().get(step).to(),
+                history.ends().get(step).step().name(),
+                state.value(),
+                state.met(),
+                decides);
+    }
+
+    private static List<Piece> ofPieces(History history, Target.OfPieces target, int grade) {
+        int species = species(history, target.species().name());
+        double factor = Bound.perTargetUnit(history, species, grade, target);
+        double[] values = grade < 0 ? history.lotMeans(species) : history.readings(species, grade, target.reading());
+        for (int i = 0; i < values.length; i++) {
+            values[i] /= factor;
+        }
+        return List.of(new Piece(history.clocks(), values));
+    }
+
+    private static List<Piece> ofLiquor(History history, Target.OfLiquor target) {
+        int step = step(history, target.step());
+        Liquor liquor = ((Step.Wet) history.ends().get(step).step()).liquor();
+        double one = target.limits().unit().toSi(java.math.BigDecimal.ONE);
+        Quantity density = liquor.density();
+        double factor = target.limits().basis() == Basis.PER_MASS && density != null ? one * density.si() : one;
+        List<Piece> pieces = new ArrayList<>();
+        for (History.Fill fill : history.fills(species(history, target.species().name()))) {
+            if (fill.step() == step) {
+                double[] values = fill.contents().clone();
+                for (int i = 0; i < values.length; i++) {
+                    values[i] /= factor;
+                }
+                pieces.add(new Piece(fill.clocks(), values));
+            }
+        }
+        return pieces;
+    }
+
+    /** Whether the limit would vanish at the foot of an even axis. */
+    boolean spansOrders() {
+        double least = limits.stream().mapToDouble(Limit::value).min().orElseThrow();
+        return least > 0 && least < SMALL * most();
+    }
+
+    Scale scale() {
+        double least = Double.POSITIVE_INFINITY;
+        for (Course course : courses) {
+            for (Piece piece : course.pieces()) {
+                least = Math.min(least, History.lowest(piece.values()));
+            }
+        }
+        for (Limit limit : limits) {
+            least = Math.min(least, limit.value());
+        }
+        if (spansOrders()) {
+            double foot = limits.stream().mapToDouble(Limit::value).min().orElseThrow() / 10;
+            return Scale.logarithmic(Math.max(foot, least > 0 ? least : foot), most());
+        }
+        return Scale.holding(least, most(), 5);
+    }
+
+    /** The parts of a course that its axis can show: by orders of magnitude there is no zero. */
+    List<Piece> shown(Course course) {
+        if (!spansOrders()) {
+            return course.pieces();
+        }
+        double foot = scale().ticks().get(0).value();
+        List<Piece> parts = new ArrayList<>();
+        for (Piece piece : course.pieces()) {
+            int from = 0;
+            for (int i = 0; i <= piece.values().length; i++) {
+                if (i == piece.values().length || piece.values()[i] < foot) {
+                    if (i - from > 1) {
+                        parts.add(new Piece(
+                                Arrays.copyOfRange(piece.clocks(), from, i),
+                                Arrays.copyOfRange(piece.values(), from, i)));
+                    }
+                    from = i + 1;
+                }
+            }
+        }
+        return parts;
+    }
+
+    private double most() {
+        double most = 0;
+        for (Course course : courses) {
+            for (Piece piece : course.pieces()) {
+                most = Math.max(most, History.highest(piece.values()));
+            }
+        }
+        for (Limit limit : limits) {
+            most = Math.max(most, limit.value());
+        }
+        return most;
+    }
+
+    private static int step(
+            History history, org.soakwright.recipes.model.@org.jspecify.annotations.Nullable Reference after) {
+        for (int i = 0; i < history.ends().size(); i++) {
+            if (after != null && history.ends().get(i).step().name().equals(after.name())) {
+                return i;
+            }
+        }
+        return history.ends().size() - 1;
+    }
+
+    private static int species(History history, String name) {
+        List<Species> species = history.recipe().species();
+        for (int i = 0; i < species.size(); i++) {
+            if (species.get(i).name().equals(name)) {
+                return i;
+            }
+        }
+        throw new IllegalArgumentException("no species " + name);
+    }
+
+    /** Below 0 where there is none of this name: the lot, or a liquor. */
+    private static int grade(History history, String name) {
+        List<Grade> grades = history.grades();
+        for (int i = 0; i < grades.size(); i++) {
+            if (grades.get(i).name().equals(name)) {
+                return i;
+            }
+        }
+        return -1;
+    }
+}
