@@ -14,7 +14,7 @@ import picocli.CommandLine.Model.CommandSpec;
 /** {@code check}: whether a recipe is sound, and what decides each of its steps. */
 final class CheckCommand extends RecipeCommand {
     CheckCommand(Session session) {
-        super(session);
+        super(session, false);
     }
 
     @Override

@@ -95,8 +95,8 @@ final class JsonTarget {
         } catch (IOException e) {
             throw new Refusal(
                     Exit.FAILED,
-                    "--json " + given + " could not be written (" + reason(e) + "); nothing was written, make room or"
-                            + " name another file",
+                    "--json " + given + " could not be written (" + Refusal.reason(e)
+                            + "); nothing was written, make room or" + " name another file",
                     e);
         }
     }
@@ -119,10 +119,5 @@ final class JsonTarget {
         } finally {
             Files.deleteIfExists(aside);
         }
-    }
-
-    private static String reason(IOException e) {
-        String message = e.getMessage();
-        return message == null || e instanceof java.nio.file.AccessDeniedException ? "access denied" : message;
     }
 }

@@ -20,6 +20,10 @@ final class Misuse {
         }
         if (problem instanceof MissingParameterException missing
                 && missing.getMissing().stream().anyMatch(arg -> arg.isPositional())) {
+            if (spec.positionalParameters().size() > 1) {
+                return "two batches are compared; name both such as " + spec.name()
+                        + " three-waters.yaml four-waters.yaml";
+            }
             return "no recipe is named; name one such as " + spec.name() + " loin-desalting.yaml";
         }
         String message = String.valueOf(problem.getMessage());
@@ -31,7 +35,8 @@ final class Misuse {
     private static String unmatched(String word, CommandSpec spec) {
         boolean option = word.startsWith("-");
         if (!option && spec.subcommands().isEmpty()) {
-            return "one recipe at a time: found " + Shown.quoted(word) + " as well";
+            String most = spec.positionalParameters().size() > 1 ? "two batches" : "one recipe";
+            return most + " at a time: found " + Shown.quoted(word) + " as well";
         }
         Collection<String> known =
                 option ? spec.optionsMap().keySet() : spec.subcommands().keySet();

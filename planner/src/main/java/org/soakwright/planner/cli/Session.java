@@ -90,7 +90,7 @@ final class Session {
     synchronized void write(String file, Writing writing) throws Refusal {
         if (!interrupted) {
             writing.write();
-            written = file;
+            written = written == null ? file : written + " and " + file;
         }
     }
 
@@ -103,7 +103,10 @@ final class Session {
     synchronized void interrupt() {
         if (!finished) {
             interrupted = true;
-            say("interrupted; " + (written == null ? "nothing was written" : written + " was written"));
+            say("interrupted; "
+                    + (written == null
+                            ? "nothing was written"
+                            : written + (written.contains(" and ") ? " were" : " was") + " written"));
         }
     }
 }

@@ -61,13 +61,15 @@ public final class Soakwright {
                 "Exit status: 0 done, follow also when targets are missed; 1 plan found no choice that meets",
                 "the targets; 2 bad input or usage; 3 internal error");
         top.usageMessage()
-                .customSynopsis("soakwright COMMAND RECIPE [--json FILE] [--quiet]")
+                .customSynopsis("soakwright COMMAND RECIPE [--json FILE] [--report DIR] [--quiet]")
                 .optionListHeading("%n")
                 .commandListHeading("%nCommands:%n");
         Help.withHelpAndVersion(top);
         Stream.of(new CheckCommand(session), new FollowCommand(session), new PlanCommand(session))
                 .map(RecipeCommand::spec)
                 .forEach(spec -> top.addSubcommand(spec.name(), spec));
+        CommandSpec compare = new CompareCommand(session).spec();
+        top.addSubcommand(compare.name(), compare);
         CommandLine commands = new CommandLine(top)
                 .setOut(out)
                 .setErr(err)

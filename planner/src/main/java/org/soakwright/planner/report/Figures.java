@@ -5,7 +5,7 @@ import java.math.MathContext;
 import java.math.RoundingMode;
 
 /** Numbers with as many digits as a person can use. */
-final class Figures {
+public final class Figures {
     private static final int DIGITS = 4;
 
     /** Rounding noise of contents that are zero in truth lies below this; so does whatever no assay could find. */
@@ -16,7 +16,7 @@ final class Figures {
     private Figures() {}
 
     /** Four significant digits, trailing zeros kept, whole numbers from a thousand on: {@code 25.00}. */
-    static String measured(double value) {
+    public static String measured(double value) {
         if (value == 0) {
             return "0";
         }
@@ -27,23 +27,23 @@ final class Figures {
     }
 
     /** Four significant digits without trailing zeros: {@code 600}. */
-    static String made(double value) {
+    public static String made(double value) {
         String text = measured(value);
         return text.contains(".") && !text.contains("e") ? strip(new BigDecimal(text)) : text;
     }
 
     /** As someone wrote it. */
-    static String written(double value) {
+    public static String written(double value) {
         return strip(BigDecimal.valueOf(value));
     }
 
     /** With a sign, for a change. */
-    static String change(double value) {
+    public static String change(double value) {
         return value > 0 ? "+" + measured(value) : measured(value);
     }
 
     /** Four digits, or as many more as it takes to see that the value is not the limit it fails. */
-    static String apart(double value, double limit) {
+    public static String apart(double value, double limit) {
         for (int digits = DIGITS; digits < 17; digits++) {
             String text = rounded(value, digits);
             if (new BigDecimal(text).compareTo(BigDecimal.valueOf(limit)) == Double.compare(value, limit)) {
@@ -54,7 +54,7 @@ final class Figures {
     }
 
     /** So many significant digits, whole numbers from as many on; powers of ten below 1e-4. */
-    static String rounded(double value, int digits) {
+    public static String rounded(double value, int digits) {
         if (value == 0) {
             return "0";
         }

@@ -12,14 +12,14 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** A JSON object being written into memory. No number is ever NaN or infinite: one that would be is a fault, not a value. */
-final class JsonText {
+public final class JsonText {
     private static final DefaultIndenter INDENTER = new DefaultIndenter("  ", "\n");
 
     private final StringWriter text = new StringWriter();
     private final JsonGenerator json;
 
     /** Something written with a generator, which can fail in principle. */
-    interface Part {
+    public interface Part {
         void write() throws IOException;
     }
 
@@ -32,12 +32,12 @@ final class JsonText {
     }
 
     /** What writes the members of an object. */
-    interface Members {
+    public interface Members {
         void write(JsonText json) throws IOException;
     }
 
     /** One object as text, with a line feed at its end. */
-    static String object(Members members) {
+    public static String object(Members members) {
         try {
             JsonText json = new JsonText();
             json.json.writeStartObject();
@@ -50,26 +50,26 @@ final class JsonText {
         }
     }
 
-    void object(String name, Part members) throws IOException {
+    public void object(String name, Part members) throws IOException {
         json.writeObjectFieldStart(name);
         members.write();
         json.writeEndObject();
     }
 
     /** An element of the array being written. */
-    void element(Part members) throws IOException {
+    public void element(Part members) throws IOException {
         json.writeStartObject();
         members.write();
         json.writeEndObject();
     }
 
-    void array(String name, Part elements) throws IOException {
+    public void array(String name, Part elements) throws IOException {
         json.writeArrayFieldStart(name);
         elements.write();
         json.writeEndArray();
     }
 
-    void strings(String name, List<String> values) throws IOException {
+    public void strings(String name, List<String> values) throws IOException {
         array(name, () -> {
             for (String value : values) {
                 json.writeString(value);
@@ -77,11 +77,11 @@ final class JsonText {
         });
     }
 
-    void number(String name, double value) throws IOException {
+    public void number(String name, double value) throws IOException {
         json.writeNumberField(name, finite(name, value));
     }
 
-    void numbers(String name, double... values) throws IOException {
+    public void numbers(String name, double... values) throws IOException {
         array(name, () -> {
             for (double value : values) {
                 json.writeNumber(finite(name, value));
@@ -89,7 +89,7 @@ final class JsonText {
         });
     }
 
-    void numberOrNull(String name, OptionalDouble value) throws IOException {
+    public void numberOrNull(String name, OptionalDouble value) throws IOException {
         if (value.isPresent()) {
             number(name, value.getAsDouble());
         } else {
@@ -98,21 +98,21 @@ final class JsonText {
     }
 
     /** A member only where there is a number. */
-    void numberIfAny(String name, OptionalDouble value) throws IOException {
+    public void numberIfAny(String name, OptionalDouble value) throws IOException {
         if (value.isPresent()) {
             number(name, value.getAsDouble());
         }
     }
 
-    void whole(String name, long value) throws IOException {
+    public void whole(String name, long value) throws IOException {
         json.writeNumberField(name, value);
     }
 
-    void string(String name, String value) throws IOException {
+    public void string(String name, String value) throws IOException {
         json.writeStringField(name, value);
     }
 
-    void stringOrNull(String name, Optional<String> value) throws IOException {
+    public void stringOrNull(String name, Optional<String> value) throws IOException {
         if (value.isPresent()) {
             string(name, value.get());
         } else {
@@ -120,11 +120,11 @@ final class JsonText {
         }
     }
 
-    void truth(String name, boolean value) throws IOException {
+    public void truth(String name, boolean value) throws IOException {
         json.writeBooleanField(name, value);
     }
 
-    void nothing(String name) throws IOException {
+    public void nothing(String name) throws IOException {
         json.writeNullField(name);
     }
 

@@ -1,9 +1,12 @@
 package org.soakwright.planner.report;
 
+import java.time.LocalDateTime;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.batch.Run;
@@ -33,25 +36,34 @@ final class StepTables {
         }
     }
 
-    Table steps() {
-        Table table = new Table()
-                .number("")
+    Table steps(Optional<LocalDateTime> start) {
+        Table table = numbered(false)
                 .text("Step")
                 .text("Kind")
                 .text("Time")
                 .text("Clock")
                 .text("At");
+        if (start.isPresent()) {
+            table.text("Starts").text("Ends");
+        }
         for (int i = 0; i < ends.size(); i++) {
             StepEnd end = ends.get(i);
-            table.row(List.of(
+            List<String> row = new ArrayList<>(List.of(
                     number(i),
                     end.step().name(),
                     end.step().kind(),
                     Durations.practical(end.to() - end.from()),
                     Durations.clock(end.from()) + " – " + Durations.clock(end.to()),
                     Wording.temperature(end.step())));
+            start.ifPresent(
+                    begin -> row.addAll(List.of(Wording.wall(begin, end.from()), Wording.wall(begin, end.to()))));
+            table.row(row);
         }
         return table;
+    }
+
+    private static Table numbered(boolean grouped) {
+        return new Table().column("", "No.", Table.Kind.NUMBER, grouped);
     }
 
     List<String> transfers() {
@@ -63,12 +75,11 @@ final class StepTables {
     }
 
     Table liquor() {
-        Table table = new Table()
-                .number("")
-                .text("Step")
-                .text("Fill")
-                .text("Flow")
-                .number("In all")
+        Table table = numbered(true)
+                .group("Step")
+                .group("Fill")
+                .group("Flow")
+                .column("In all", "In all", Table.Kind.NUMBER, true)
                 .text("Solute")
                 .number("Strength")
                 .number("To dissolve in all");
@@ -91,12 +102,10 @@ final class StepTables {
         if (solutes.isEmpty()) {
             table.row(with(head, "none", "", ""));
         }
-        List<String> before = head;
         for (Species species : solutes) {
             double strength = wet.liquor().kgPerM3(species.name());
             table.row(with(
-                    before, species.name(), strength(wet, species, strength), toDissolve(strength, all, fills(wet))));
-            before = List.of("", "", "", "", "");
+                    head, species.name(), strength(wet, species, strength), toDissolve(strength, all, fills(wet))));
         }
     }
 
@@ -174,13 +183,19 @@ final class StepTables {
         boolean liquor = ends.stream().anyMatch(end -> !end.liquor().isEmpty());
         boolean several = recipe.lot().grades().size() > 1;
         boolean each = several && recipe.lot().grades().size() <= MOST_GRADES;
-        Table table = new Table().number("").text("Step").text("Species");
+        Table table = numbered(true).group("Step").text("Species");
         if (liquor) {
             table.number("Liquor at start").number("Liquor at end");
         }
         table.number(several ? "Lot mean" : "Mean in pieces");
         if (each) {
-            recipe.lot().grades().forEach(grade -> table.number(Prose.clipped(grade.name(), 10) + " mean"));
+            recipe.lot()
+                    .grades()
+                    .forEach(grade -> table.column(
+                            Prose.clipped(grade.name(), 10) + " mean",
+                            grade.name() + " mean",
+                            Table.Kind.NUMBER,
+                            false));
         }
         for (int i = 0; i < ends.size(); i++) {
             for (int s = 0; s < recipe.species().size(); s++) {
@@ -194,8 +209,8 @@ final class StepTables {
         StepEnd end = ends.get(step);
         StepEnd.LotMean mean = end.means().get(species);
         List<String> row = new ArrayList<>();
-        row.add(species == 0 ? number(step) : "");
-        row.add(species == 0 ? end.step().name() : "");
+        row.add(number(step));
+        row.add(end.step().name());
         row.add(mean.species());
         if (liquor) {
             StepEnd.Liquor held = end.liquor().stream()
@@ -212,6 +227,31 @@ final class StepTables {
                             Figures.measured(piece.species().get(species).value(Reading.MEAN))));
         }
         return row;
+    }
+
+    /** Every reading, in the unit of its species. */
+    Table contents() {
+        Table table = numbered(true).group("Step").group("Species").text("Grade");
+        for (Reading reading : Reading.values()) {
+            String word = reading.word();
+            table.number(word.substring(0, 1).toUpperCase(Locale.ROOT) + word.substring(1));
+        }
+        table.text("Unit");
+        for (int i = 0; i < ends.size(); i++) {
+            for (int s = 0; s < recipe.species().size(); s++) {
+                for (StepEnd.Piece piece : ends.get(i).pieces()) {
+                    StepEnd.Content content = piece.species().get(s);
+                    List<String> row = new ArrayList<>(
+                            List.of(number(i), ends.get(i).step().name(), content.species(), piece.name()));
+                    for (Reading reading : Reading.values()) {
+                        row.add(Figures.measured(content.value(reading)));
+                    }
+                    row.add(content.unit().symbol());
+                    table.row(row);
+                }
+            }
+        }
+        return table;
     }
 
     private static String number(int step) {

@@ -1,103 +1,133 @@
 package org.soakwright.planner.report;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
-import java.util.function.BiFunction;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
-/** Rows under a header, numbers aligned on their decimal points, never wider than a sheet as long as the numbers fit. */
-final class Table {
-    private static final String INDENT = "  ";
-    private static final String GAP = "  ";
-    private static final int NARROWEST_TEXT = 8;
+/** Rows under a header, as content: {@link TableText} and pages show it. Cells are words and figures ready to be read. */
+public final class Table {
     private static final Pattern NUMBER = Pattern.compile("([-+~]?[0-9]+)(.*)");
 
-    private record Column(String header, boolean isNumber, BiFunction<Style, String, String> paint) {}
+    /** How the cells of a column are to be read. */
+    public enum Kind {
+        /** Words. */
+        TEXT,
+        /** Figures, perhaps with a unit, to be aligned on their decimal points. */
+        NUMBER,
+        /** Words that say whether something is good: {@link #isGood}. */
+        VERDICT
+    }
+
+    /**
+     * One column.
+     *
+     * @param header as shown where room is short; may be empty
+     * @param spoken the header in full
+     * @param grouped whether a cell like the one above it, in a row whose grouped cells before it are like those above as well,
+     *     need not be said again
+     */
+    public record Column(String header, String spoken, Kind kind, boolean grouped) {}
+
+    /** One row; a heading is a single cell above the rows that follow. */
+    public record Row(List<String> cells, boolean isHeading) {
+        public Row {
+            cells = List.copyOf(cells);
+        }
+    }
 
     private final List<Column> columns = new ArrayList<>();
-    private final List<String[]> rows = new ArrayList<>();
+    private final List<Row> rows = new ArrayList<>();
 
-    /** A column flush left, shortened where the table would be too wide. */
-    Table text(String header) {
-        return text(header, (style, text) -> text);
+    public Table text(String header) {
+        return column(header, header, Kind.TEXT, false);
     }
 
-    /** A column flush left, each cell painted. */
-    Table text(String header, BiFunction<Style, String, String> paint) {
-        columns.add(new Column(header, false, paint));
+    /** Text that is said once for the rows it belongs to. */
+    public Table group(String header) {
+        return column(header, header, Kind.TEXT, true);
+    }
+
+    public Table number(String header) {
+        return column(header, header, Kind.NUMBER, false);
+    }
+
+    public Table verdict(String spoken) {
+        return column("", spoken, Kind.VERDICT, false);
+    }
+
+    public Table column(String header, String spoken, Kind kind, boolean grouped) {
+        columns.add(new Column(header, spoken, kind, grouped));
         return this;
     }
 
-    /** A column on the decimal point. */
-    Table number(String header) {
-        columns.add(new Column(header, true, (style, text) -> text));
-        return this;
-    }
-
-    void row(List<String> cells) {
+    public void row(List<String> cells) {
         if (cells.size() != columns.size()) {
             throw new IllegalArgumentException(columns.size() + " cells wanted, found " + cells);
         }
-        rows.add(cells.toArray(String[]::new));
+        rows.add(new Row(cells, false));
     }
 
     /** A line of its own above the rows that follow. */
-    void heading(String text) {
-        rows.add(new String[] {text});
+    public void heading(String text) {
+        rows.add(new Row(List.of(text), true));
     }
 
-    boolean isEmpty() {
+    public List<Column> columns() {
+        return List.copyOf(columns);
+    }
+
+    public List<Row> rows() {
+        return List.copyOf(rows);
+    }
+
+    public boolean isEmpty() {
         return rows.isEmpty();
     }
 
-    List<String> lines(Style style) {
-        alignNumbers();
-        int[] widths = widths();
-        List<String> lines = new ArrayList<>();
-        String[] header = columns.stream().map(Column::header).toArray(String[]::new);
-        lines.add(style.faint(line(header, widths, Style.PLAIN)));
-        rows.forEach(row ->
-                lines.add(isHeading(row) ? Prose.clipped(INDENT + row[0], Prose.WIDTH) : line(row, widths, style)));
-        return lines;
-    }
-
-    private String line(String[] cells, int[] widths, Style style) {
-        StringBuilder line = new StringBuilder(INDENT);
-        StringBuilder pending = new StringBuilder();
-        for (int i = 0; i < cells.length; i++) {
-            String text = Prose.clipped(cells[i], widths[i]);
-            if (!text.isEmpty()) {
-                line.append(pending).append(columns.get(i).paint().apply(style, text));
-                pending.setLength(0);
-            }
-            pending.append(" ".repeat(widths[i] - Prose.length(text))).append(GAP);
+    /** Whether a cell of a grouped column repeats what stands above it. */
+    public boolean repeats(int row, int column) {
+        if (row == 0 || rows.get(row).isHeading() || rows.get(row - 1).isHeading()) {
+            return false;
         }
-        return line.toString();
+        for (int i = 0; i <= column; i++) {
+            boolean matters = columns.get(i).grouped();
+            if (matters
+                    && !rows.get(row)
+                            .cells()
+                            .get(i)
+                            .equals(rows.get(row - 1).cells().get(i))) {
+                return false;
+            }
+        }
+        return columns.get(column).grouped();
     }
 
-    private static boolean isHeading(String[] row) {
-        return row.length == 1;
-    }
-
-    private List<String[]> cells() {
-        return rows.stream().filter(row -> !isHeading(row)).toList();
-    }
-
-    private void alignNumbers() {
+    /** What a row is about: its first column of words. */
+    public int headColumn() {
         for (int i = 0; i < columns.size(); i++) {
-            if (columns.get(i).isNumber()) {
-                int before = 0;
-                for (String[] row : cells()) {
-                    before = Math.max(before, whole(row[i]));
-                }
-                for (String[] row : cells()) {
-                    int whole = whole(row[i]);
-                    row[i] = whole == 0 ? row[i] : " ".repeat(before - whole) + row[i];
-                }
+            if (columns.get(i).kind() == Kind.TEXT) {
+                return i;
             }
         }
+        return 0;
+    }
+
+    /** For each row how many characters its cell of a column of figures lacks before the decimal point, compared with the longest. */
+    public int[] shifts(int column) {
+        int[] shifts = new int[rows.size()];
+        if (columns.get(column).kind() != Kind.NUMBER) {
+            return shifts;
+        }
+        int longest = 0;
+        for (Row row : rows) {
+            longest = Math.max(longest, row.isHeading() ? 0 : whole(row.cells().get(column)));
+        }
+        for (int i = 0; i < shifts.length; i++) {
+            int whole = rows.get(i).isHeading() ? 0 : whole(rows.get(i).cells().get(column));
+            shifts[i] = whole == 0 ? 0 : longest - whole;
+        }
+        return shifts;
     }
 
     /** Characters before the decimal point; 0 where there is no number. */
@@ -106,34 +136,8 @@ final class Table {
         return matcher.matches() ? matcher.group(1).length() : 0;
     }
 
-    private int[] widths() {
-        int[] widths = new int[columns.size()];
-        for (int i = 0; i < widths.length; i++) {
-            widths[i] = Prose.length(columns.get(i).header());
-            for (String[] row : cells()) {
-                widths[i] = Math.max(widths[i], Prose.length(row[i]));
-            }
-        }
-        int room = Prose.WIDTH - INDENT.length() - GAP.length() * (widths.length - 1);
-        while (Arrays.stream(widths).sum() > room) {
-            int widest = widestText(widths);
-            if (widest < 0) {
-                break;
-            }
-            widths[widest]--;
-        }
-        return widths;
-    }
-
-    private int widestText(int[] widths) {
-        int widest = -1;
-        for (int i = 0; i < widths.length; i++) {
-            if (!columns.get(i).isNumber()
-                    && widths[i] > NARROWEST_TEXT
-                    && (widest < 0 || widths[i] > widths[widest])) {
-                widest = i;
-            }
-        }
-        return widest;
+    /** Whether a verdict is a good one. */
+    public static boolean isGood(String verdict) {
+        return verdict.startsWith("met");
     }
 }

@@ -36,7 +36,7 @@ class ScreensTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"check", "follow", "plan"})
+    @ValueSource(strings = {"check", "follow", "plan", "compare"})
     void everyCommandHelpsWithAnExample(String command) throws IOException {
         Desk.Printed printed = desk.give(command, "--help");
         assertEquals(Exit.DONE, printed.status());
@@ -64,6 +64,27 @@ class ScreensTest {
 
     @ParameterizedTest
     @CsvSource({
+        "unplanned.yaml, desalting.yaml,    compare-two-plans.txt",
+        "desalting.yaml, washing.yaml,      compare-unlike.txt",
+        "odd-names.yaml, desalting.yaml,    compare-odd-names.txt",
+    })
+    void aComparisonReadsAsItIsMeantTo(String a, String b, String screen) throws IOException {
+        Desk.Printed printed = desk.give("compare", desk.recipe(a), desk.recipe(b));
+        assertEquals(Exit.DONE, printed.status());
+        assertEquals("", printed.err());
+        assertTrue(printed.out().lines().allMatch(line -> line.codePointCount(0, line.length()) <= WIDEST));
+        assertShown(screen, printed.out());
+    }
+
+    @Test
+    void timesOfDayStandBesideTheClock() throws IOException {
+        Desk.Printed printed = desk.give("follow", desk.recipe("desalting.yaml"), "--start", "2026-12-31T18:00");
+        assertTrue(printed.out().lines().allMatch(line -> line.codePointCount(0, line.length()) <= WIDEST));
+        assertShown("follow-started.txt", printed.out());
+    }
+
+    @ParameterizedTest
+    @CsvSource({
         "check,  broken.yaml,    problems.txt",
         "plan,   broken.yaml,    problems.txt",
         "follow, unplanned.yaml, problems-unplanned.txt",
@@ -83,6 +104,8 @@ class ScreensTest {
         "'plan',                 misuse-no-recipe.txt",
         "'plan a.yaml b.yaml',   misuse-two-recipes.txt",
         "'plan a.yaml --json',   misuse-no-file.txt",
+        "'compare a.yaml',       misuse-no-second.txt",
+        "'compare a b c',        misuse-three.txt",
     })
     void aMisspeltCommandLineGetsAHint(String line, String screen) throws IOException {
         Desk.Printed printed = desk.give(line.split(" ", -1));

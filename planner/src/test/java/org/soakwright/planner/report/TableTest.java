@@ -19,28 +19,28 @@ class TableTest {
                         "  a       9.281 g/kg",
                         "  b     120 g/kg",
                         "  c     unlimited"),
-                table.lines(Style.PLAIN));
+                TableText.lines(table, Style.PLAIN));
     }
 
     @Test
     void longNamesGiveWayBeforeASheetGetsTooWide() {
         Table table = new Table().text("Name").number("Value");
         table.row(List.of("n".repeat(300), "9.281 g/kg"));
-        List<String> lines = table.lines(Style.PLAIN);
+        List<String> lines = TableText.lines(table, Style.PLAIN);
         assertTrue(lines.get(1).endsWith("…  9.281 g/kg"), lines.get(1));
         assertEquals(Prose.WIDTH, Prose.length(lines.get(1)));
     }
 
     @Test
     void colourDoesNotMoveAColumn() {
-        Table table = new Table().text("Verdict", Style::good).text("Note");
+        Table table = new Table().verdict("Verdict").text("Note");
         table.row(List.of("met", "x"));
         table.row(List.of("MISSED", "y"));
-        List<String> plain = table.lines(Style.PLAIN);
-        List<String> coloured = table.lines(Style.ANSI).stream()
+        List<String> plain = TableText.lines(table, Style.PLAIN);
+        List<String> coloured = TableText.lines(table, Style.ANSI).stream()
                 .map(line -> line.replaceAll("\u001b\\[[0-9;]*m", ""))
                 .toList();
         assertEquals(plain, coloured);
-        assertTrue(table.lines(Style.ANSI).get(1).contains("\u001b[32m"));
+        assertTrue(TableText.lines(table, Style.ANSI).get(1).contains("\u001b[32m"));
     }
 }

@@ -22,6 +22,8 @@ final class PlainRoots {
     private double[] u = new double[8];
     private double[] v = new double[8];
     private double[] rate = new double[8];
+    /** Taylor coefficients about the roots, found when first asked for. */
+    private double[][] series = new double[8][0];
 
     PlainRoots(Grade grade, Conditions conditions) {
         axis = grade.axis();
@@ -44,6 +46,13 @@ final class PlainRoots {
 
     double rate(int n) {
         return rate[n];
+    }
+
+    double[] series(int n) {
+        if (series[n].length == 0) {
+            series[n] = Wave.taylor(axis, z[n], u[n], v[n]);
+        }
+        return series[n];
     }
 
     /** Another grade's pole at the same place: from now on both are this number, so that offsets from it agree. */
@@ -85,6 +94,8 @@ final class PlainRoots {
             u = Arrays.copyOf(u, 2 * size);
             v = Arrays.copyOf(v, 2 * size);
             rate = Arrays.copyOf(rate, 2 * size);
+            series = Arrays.copyOf(series, 2 * size);
+            Arrays.fill(series, size, 2 * size, new double[0]);
         }
         double root = find(size + 1);
         double wave = axis.wave(root);

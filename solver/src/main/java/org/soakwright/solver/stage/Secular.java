@@ -55,7 +55,7 @@ final class Secular {
         double root = plain.z(n);
         double h = (anchor - plain.rate(n) + offset) / (plain.pace * (z + root));
         if (Math.abs(h) <= Wave.NEAR * Math.min(1, root)) {
-            wave.near(plain.axis, plain.beta, root, plain.u(n), plain.v(n), h);
+            wave.near(plain.series(n), plain.beta, root, h);
         } else {
             wave.direct(plain.axis, plain.beta, z);
         }

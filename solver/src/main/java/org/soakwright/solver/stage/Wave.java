@@ -24,9 +24,11 @@ final class Wave {
         defect = (1 - beta) * at * v + beta * u;
     }
 
-    /** At root + h, where the defect vanishes at the root: everything keeps its relative precision as h goes to 0. */
-    void near(Axis axis, double beta, double root, double rootU, double rootV, double h) {
-        double[] a = taylor(axis, root, rootU, rootV);
+    /**
+     * At root + h, from the Taylor coefficients about a root, where the defect vanishes: everything keeps its relative precision as h
+     * goes to 0.
+     */
+    void near(double[] a, double beta, double root, double h) {
         double uSum = 0;
         double vSum = 0;
         double dSum = 0;

@@ -1,0 +1,141 @@
+package org.soakwright.planner.report.page;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.stream.Collectors;
+import org.soakwright.planner.batch.Durations;
+import org.soakwright.planner.report.Figures;
+import org.soakwright.planner.report.Wording;
+import org.soakwright.recipes.model.Diffusivity;
+import org.soakwright.recipes.model.Faces;
+import org.soakwright.recipes.model.Film;
+import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.Medium;
+import org.soakwright.recipes.model.OneAxisShape;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Start;
+import org.soakwright.recipes.model.Step;
+
+/** What a batch is taken to be like, from its recipe, in plain words: what is constant, what is neglected, by which conventions. */
+final class Assumptions {
+    private final Recipe recipe;
+    private final List<String> points = new ArrayList<>();
+
+    private Assumptions(Recipe recipe) {
+        this.recipe = recipe;
+    }
+
+    static List<String> of(Recipe recipe) {
+        Assumptions assumptions = new Assumptions(recipe);
+        assumptions.pieces();
+        recipe.species().forEach(assumptions::species);
+        assumptions.surroundings();
+        assumptions.films();
+        assumptions.between();
+        return List.copyOf(assumptions.points);
+    }
+
+    private void pieces() {
+        String shapes = recipe.lot().grades().stream()
+                .map(Assumptions::shape)
+                .distinct()
+                .collect(Collectors.joining("; "));
+        points.add("Pieces are " + shapes
+                + ". All pieces of a grade have the size stated; they neither shrink nor swell, and liquor or air reaches"
+                + " the whole of every open face.");
+        points.add(
+                "Inside a piece solutes move by diffusion (Fick) alone, each by itself, at a diffusivity that does not depend on"
+                        + " content. Nothing reacts, and contents count against the piece as loaded.");
+        points.add("A piece has the temperature of its step from the step's beginning.");
+    }
+
+    private static String shape(Grade grade) {
+        if (grade.shape() == OneAxisShape.SLAB) {
+            return "slabs open on " + (grade.faces() == Faces.ONE ? "one face" : "both faces")
+                    + ", their edges neglected";
+        }
+        return grade.shape() == OneAxisShape.CYLINDER ? "long cylinders, their ends neglected" : "spheres";
+    }
+
+    private void species(Species species) {
+        Diffusivity diffusivity = species.diffusivity();
+        String name = species.name();
+        String start = species.start() instanceof Start.Uniform uniform
+                ? uniform.content() + " everywhere in the piece at the start"
+                : "the stated profile in the piece at the start";
+        String pace = diffusivity.dependsOnTemperature()
+                ? Wording.quantity(diffusivity.value()) + " at "
+                        + Wording.quantity(Objects.requireNonNull(diffusivity.at())) + ", changing with temperature by "
+                        + diffusivity.activationEnergy() + " (Arrhenius)"
+                : Wording.quantity(diffusivity.value()) + " at every temperature";
+        points.add(name + ": " + start + "; diffusivity " + pace + ".");
+        if (species.exchangesWith(Medium.LIQUOR)) {
+            points.add(name + ": at equilibrium a piece holds "
+                    + Figures.written(species.partition().value())
+                    + " times the content of the liquor, both per volume, at every content"
+                    + overridden(name) + ".");
+        }
+        if (!species.exchangesWith(Medium.LIQUOR) || !species.exchangesWith(Medium.AIR)) {
+            points.add(name + " passes into " + (species.exchangesWith(Medium.LIQUOR) ? "liquor" : "air") + " only.");
+        }
+    }
+
+    private String overridden(String species) {
+        List<String> others = new ArrayList<>();
+        for (Step step : recipe.steps()) {
+            if (step.head().overrides().partition().containsKey(species)) {
+                others.add(Figures.written(
+                                step.head().overrides().partition().get(species).value())
+                        + " in " + step.name());
+            }
+        }
+        return others.isEmpty() ? "" : "; " + String.join(", ", others);
+    }
+
+    private void surroundings() {
+        if (recipe.steps().stream().anyMatch(Step.Wet.class::isInstance)) {
+            points.add("A liquor is well mixed: it has one content throughout its vessel, and grades share it.");
+        }
+        if (recipe.steps().stream().anyMatch(step -> step instanceof Step.Wet wet && wet.dragOut() != null)) {
+            points.add("Liquor that clings to the pieces joins the next liquor and counts in its volume.");
+        }
+        if (recipe.steps().stream()
+                .anyMatch(step -> step instanceof Step.Wet wet && wet.liquor().isUnlimited())) {
+            points.add("Liquor called unlimited keeps its content whatever enters it.");
+        }
+    }
+
+    private void films() {
+        Map<String, List<String>> films = new LinkedHashMap<>();
+        for (Step step : recipe.steps()) {
+            Film film = step instanceof Step.Wet wet ? wet.film() : step instanceof Step.Dry dry ? dry.film() : null;
+            if (film != null) {
+                films.computeIfAbsent(film(film, step), key -> new ArrayList<>())
+                        .add(step.name());
+            }
+        }
+        films.forEach((film, steps) -> points.add(String.join(", ", steps) + ": " + film + "."));
+    }
+
+    private static String film(Film film, Step step) {
+        if (film instanceof Film.Coefficient coefficient) {
+            return "the film between piece and " + (step instanceof Step.Dry ? "air" : "liquor") + " passes "
+                    + Wording.quantity(coefficient.value())
+                    + (step instanceof Step.Dry ? ", referred to the content of the piece" : ", the same all the time");
+        }
+        return "no film: the surface is at equilibrium at once";
+    }
+
+    private void between() {
+        Quantity between = recipe.between();
+        if (between != null && recipe.steps().size() > 1) {
+            points.add("Between steps the pieces rest for " + Durations.practical(between.si())
+                    + " at the temperature of the step before; nothing leaves or enters them.");
+        }
+    }
+}
