@@ -18,6 +18,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestFactory;
+import org.junit.jupiter.api.io.TempDir;
 import org.soakwright.planner.cli.Soakwright;
 import org.soakwright.recipes.Outcome;
 import org.soakwright.recipes.Recipes;
@@ -57,6 +58,18 @@ class DocsTest {
         Printed printed = run("plan", TOP.resolve(recipe).toString());
         assertEquals(0, printed.status(), printed.err());
         assertEquals(blocks(readme, "text").get(0).strip(), printed.out().strip());
+    }
+
+    /** The pictures' bytes do not depend on the machine, so the one shown can be held against the one written. */
+    @Test
+    void theReadmesPictureIsWhatTheReportWrites(@TempDir Path folder) throws IOException {
+        Path report = folder.resolve("report");
+        Printed printed = run(
+                "plan", TOP.resolve("recipes/examples/loin-desalting.yaml").toString(), "--report", report.toString());
+        assertEquals(0, printed.status(), printed.err());
+        assertEquals(
+                Files.readString(report.resolve("pictures/map-thick-salt.svg")),
+                Files.readString(TOP.resolve("planner/docs/depth-time-map.svg")));
     }
 
     @Test

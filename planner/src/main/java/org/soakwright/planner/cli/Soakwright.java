@@ -59,7 +59,7 @@ public final class Soakwright {
                 "java -jar soakwright.jar COMMAND --help tells more.",
                 "",
                 "Exit status: 0 done, follow also when targets are missed; 1 plan found no choice that meets",
-                "the targets; 2 bad input or usage; 3 internal error");
+                "the targets; 2 bad input or usage; 3 internal error or output that could not be written");
         top.usageMessage()
                 .customSynopsis("soakwright COMMAND RECIPE [--json FILE] [--report DIR] [--quiet]")
                 .optionListHeading("%n")
