@@ -120,24 +120,22 @@ public final class Trace {
         List<Sight> sights = new ArrayList<>();
         for (int s = 0; s < recipe.species().size(); s++) {
             Course course = batch.chain(s).follow(upTo);
+            // Contents are proportional to kg/m3, and there are many: one exact conversion serves them all.
+            double unit =
+                    recipe.lot().express(1, recipe.species().get(s).start().unit());
             int grades = recipe.lot().grades().size();
             double[][] profiles = new double[grades][];
             double[] means = new double[grades];
             for (int j = 0; j < grades; j++) {
                 profiles[j] = course.profile(j, stage, depths);
                 for (int i = 0; i < depths.length; i++) {
-                    profiles[j][i] = express(recipe, s, profiles[j][i]);
+                    profiles[j][i] *= unit;
                 }
-                means[j] = express(recipe, s, course.value(new Probe.Mean(j), stage));
+                means[j] = unit * course.value(new Probe.Mean(j), stage);
             }
             boolean wet = batch.stage(s, stage).wets();
             sights.add(new Sight(wet ? course.value(new Probe.Liquor(), stage) : Double.NaN, profiles, means));
         }
         return new Moment(step, transfer, clock, List.copyOf(sights));
-    }
-
-    private static double express(Recipe recipe, int species, double kgPerM3) {
-        return recipe.lot()
-                .express(kgPerM3, recipe.species().get(species).start().unit());
     }
 }

@@ -16,6 +16,7 @@ public final class Picture {
     private final int width;
     private final int height;
     private final Drawing drawing;
+    private String inside = "";
 
     Picture(String id, String title, String caption, String altText, int width, int height, Drawing drawing) {
         this.id = id;
@@ -77,6 +78,14 @@ public final class Picture {
         own.translate(Sheet.MARGIN, Sheet.MARGIN);
         drawing.on(own, theme);
         own.dispose();
+    }
+
+    /** The light drawing as SVG, drawn once for file and page. */
+    synchronized String inside() {
+        if (inside.isEmpty()) {
+            inside = Svg.inside(this);
+        }
+        return inside;
     }
 
     /** The same with its origin inside the margin. */

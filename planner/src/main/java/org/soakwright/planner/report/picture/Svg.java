@@ -33,6 +33,7 @@ final class Svg {
     private static final Set<String> PEN =
             Set.of("stroke-width", "stroke-dasharray", "stroke-linecap", "stroke-linejoin");
     private static final Pattern NUMBER = Pattern.compile("-?\\d+\\.\\d+(?:[eE]-?\\d+)?");
+    private static final Pattern ROLE = Pattern.compile("var\\(--soak-([a-z0-9-]+)\\)");
     private static final Pattern RGB = Pattern.compile("rgb\\((\\d+),(\\d+),(\\d+)\\)");
 
     /** What Batik calls the colours that have a name in SVG 1.0. */
@@ -70,16 +71,32 @@ final class Svg {
         svg.open(picture, "");
         svg.out.append("<title>").append(escaped(picture.title())).append("</title>\n<desc>");
         svg.out.append(escaped(picture.altText())).append("</desc>\n");
-        svg.body(picture, theme);
+        if (theme == Theme.LIGHT) {
+            svg.out.append(coloured(picture.inside()));
+        } else {
+            svg.body(picture, theme);
+        }
         return svg.out.append("</svg>\n").toString();
+    }
+
+    /** The light drawing with the names of its colours; the costly part, which file and element share. */
+    static String inside(Picture picture) {
+        Svg svg = new Svg(Theme.LIGHT, true);
+        svg.body(picture, Theme.LIGHT);
+        return svg.out.toString();
+    }
+
+    private static String coloured(String inside) {
+        Map<String, String> colours = new LinkedHashMap<>();
+        Look.of(Theme.LIGHT).roles().forEach((role, color) -> colours.put(role, Look.hex(color)));
+        return ROLE.matcher(inside).replaceAll(found -> colours.getOrDefault(found.group(1), found.group()));
     }
 
     /** An element whose colours are names of {@link #stylesheet()}. */
     static String element(Picture picture) {
         Svg svg = new Svg(Theme.LIGHT, true);
         svg.open(picture, " aria-label=\"" + escaped(picture.altText()) + "\"");
-        svg.body(picture, Theme.LIGHT);
-        return svg.out.append("</svg>\n").toString();
+        return svg.out.append(picture.inside()).append("</svg>\n").toString();
     }
 
     static String stylesheet() {
