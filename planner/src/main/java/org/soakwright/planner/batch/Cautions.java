@@ -10,7 +10,7 @@ import org.soakwright.recipes.model.Recipe;
 /** What whoever runs the batch should know beside the numbers. */
 public final class Cautions {
     /** Between these a food is neither kept cold nor kept hot, K: 5 and 57 Cel, FDA Food Code 3-501.16. */
-    private static final double COLD = 278.15;
+    static final double COLD = 278.15;
 
     private static final double HOT = 330.15;
 

@@ -23,9 +23,6 @@ import org.soakwright.recipes.text.Unsound;
 
 /** Single changes to a recipe that no choice can satisfy, each planned again before it is offered. */
 final class Remedies {
-    /** Cold holding of food, FDA Food Code 3-501.16: at most 5 Cel. */
-    private static final double COLDEST_LIMIT_KELVIN = 278.15;
-
     private static final double[] LONGER = {1.25, 1.5, 2, 3, 4, 8};
     private static final double[] WARMER = {2, 5, 10, 15, 20};
     private static final double[] MORE = {1.25, 1.5, 2, 3, 5};
@@ -210,9 +207,9 @@ final class Remedies {
             return;
         }
         boolean food = recipe.products().contains(Product.FOOD);
-        double limit = food ? COLDEST_LIMIT_KELVIN : Double.POSITIVE_INFINITY;
+        double limit = food ? Cautions.COLD : Double.POSITIVE_INFINITY;
         String caution = food
-                ? "food kept at or below 5 Cel; check what the warmth does to the product"
+                ? "food kept at or below 5 °C; check what the warmth does to the product"
                 : "check what the warmth does to the product and to vapours";
         for (double kelvins : WARMER) {
             List<Step> steps = each(step -> warmed(step, kelvins, limit));

@@ -48,11 +48,7 @@ final class StartContent {
 
     /** Straight lines times x^s, integrated exactly. */
     private static double mean(Recipe recipe, List<Start.Point> points, Grade grade) {
-        int s = switch (grade.shape()) {
-            case SLAB -> 0;
-            case CYLINDER -> 1;
-            case SPHERE -> 2;
-        };
+        int s = Translation.axis(grade).power();
         double sum = 0;
         for (int i = 1; i < points.size(); i++) {
             double a = points.get(i - 1).position();

@@ -70,7 +70,7 @@ final class Translation {
                 .toList();
     }
 
-    private static Axis axis(Grade grade) {
+    static Axis axis(Grade grade) {
         return switch (grade.shape()) {
             case SLAB -> Axis.SLAB;
             case CYLINDER -> Axis.CYLINDER;
