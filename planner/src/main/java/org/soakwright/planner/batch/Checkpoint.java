@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.math.BigDecimal;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -88,6 +89,22 @@ public record Checkpoint(int step, double seconds, String species, double expect
     private static double clocked(double moment, double planned) {
         double grain = planned > 4 * 3600 ? 900 : planned > 1800 ? 300 : 60;
         return Math.max(grain, grain * Math.rint(moment * planned / grain));
+    }
+
+    /**
+     * What going on as planned ends with when the liquor reads something between what is expected and what a deviation explains; the
+     * target that is then missed by most, empty where all are met.
+     */
+    public Optional<TargetState> goingOnAt(Run run, Deviation explained, double read) {
+        double share = (read - expected) / (explained.reading() - expected);
+        double factor = 1 + share * (explained.factor() - 1);
+        Recipe recipe = run.batch().recipe();
+        Species watched = recipe.species(species).orElseThrow();
+        Run other = new Batch(withDiffusivity(recipe, watched, factor)).follow(run.seconds());
+        return other.batch().requirements().stream()
+                .filter(requirement -> !other.meets(requirement))
+                .max(Comparator.comparingDouble(other::miss))
+                .map(requirement -> TargetState.of(other, requirement));
     }
 
     private static Optional<Species> watched(Recipe recipe) {

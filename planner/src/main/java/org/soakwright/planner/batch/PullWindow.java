@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.DoublePredicate;
+import org.soakwright.recipes.model.Time;
 import org.soakwright.recipes.text.Unsound;
 
 /**
@@ -11,9 +12,11 @@ import org.soakwright.recipes.text.Unsound;
  *
  * @param step from 0
  * @param earliest shortest duration, s, to the minute above; the least one looked at where none is too short
- * @param latest longest duration, s, to the minute below; empty where nothing up to {@link #STRETCH} times the plan is too long
+ * @param latest longest duration, s, to the minute below, of a free step no longer than the recipe offers; empty where a fixed step may
+ *     last {@link #STRETCH} times its time
+ * @param open whether no longer duration that was looked at misses a target
  */
-public record PullWindow(int step, double earliest, OptionalDouble latest) {
+public record PullWindow(int step, double earliest, OptionalDouble latest, boolean open) {
     /** How many times its planned duration a step is followed for. */
     static final double STRETCH = 3;
 
@@ -32,13 +35,19 @@ public record PullWindow(int step, double earliest, OptionalDouble latest) {
             int step = i;
             DoublePredicate meets = seconds -> meets(run, step, seconds);
             double at = planned[i];
-            double shortest = Math.max(MINUTE, SHORTEST * at);
+            Time time = run.batch().recipe().steps().get(i).time();
+            boolean free = time.isFree();
+            double shortest = free ? time.seconds(0) : Math.max(MINUTE, SHORTEST * at);
+            double longest = free ? Math.max(at, time.seconds(time.choices() - 1)) : STRETCH * at;
             double early = at <= shortest ? at : edge(meets, at, shortest);
-            double late = edge(meets, at, STRETCH * at);
+            double late = at >= longest ? at : edge(meets, at, longest);
             double earliest = Math.min(at, MINUTE * Math.ceil(early / MINUTE - 1e-9));
             double latest = Math.max(at, MINUTE * Math.floor(late / MINUTE + 1e-9));
             windows.add(new PullWindow(
-                    i, earliest, late >= STRETCH * at ? OptionalDouble.empty() : OptionalDouble.of(latest)));
+                    i,
+                    earliest,
+                    !free && late >= longest ? OptionalDouble.empty() : OptionalDouble.of(latest),
+                    late >= longest));
         }
         return List.copyOf(windows);
     }

@@ -127,6 +127,16 @@ public final class Folder {
 
     private void checkContent() throws IOException, Unusable {
         FileList ours = FileList.in(path);
+        // At its own level first: whatever else lies here, it is not walked through.
+        try (Stream<Path> top = Files.list(path)) {
+            for (Path file : top.sorted().toList()) {
+                String name = name(file);
+                boolean folder = Files.isDirectory(file, LinkOption.NOFOLLOW_LINKS);
+                if (!isPart(name) && !(folder ? ours.hasFolder(name) : ours.has(name))) {
+                    throw foreign(name, folder ? "folder" : "file");
+                }
+            }
+        }
         for (Path file : content()) {
             String name = name(file);
             if (Files.isDirectory(file, LinkOption.NOFOLLOW_LINKS)) {

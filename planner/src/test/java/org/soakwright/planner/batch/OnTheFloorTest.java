@@ -81,6 +81,37 @@ class OnTheFloorTest {
         assertTrue(checkpoints.get(3).deviations().size() < 2);
     }
 
+    /** The plan sits on its limit: at the explained reading itself, going on misses it as much as following slow pieces says. */
+    @Test
+    void goingOnWithSlowPiecesEndsWhereFollowingThemSays() {
+        Recipe recipe = Recipes.of(
+                Recipes.LOINS + "steps:",
+                Recipes.water("first", "ratio: 4 L/kg", "{from: 4 h, to: 40 h, grain: 15 min}"),
+                Recipes.water("second", "ratio: 4 L/kg", "{from: 4 h, to: 40 h, grain: 15 min}"),
+                "targets:",
+                "  - {species: salt, reading: mean, at-most: 30 g/kg}");
+        Run run = Planner.plan(recipe, Progress.NONE).run();
+        Checkpoint checkpoint = Checkpoint.of(run).get(0);
+        Checkpoint.Deviation slow = checkpoint.deviations().get(0);
+        TargetState missed = checkpoint.goingOnAt(run, slow, slow.reading()).orElseThrow();
+        Recipe slower = Recipes.of(
+                Recipes.LOINS.replace("8e-10", "6.4e-10") + "steps:",
+                Recipes.water("first", "ratio: 4 L/kg", "4 h"),
+                Recipes.water("second", "ratio: 4 L/kg", "4 h"));
+        double mean = new Batch(slower)
+                .follow(run.seconds())
+                .end(1)
+                .pieces()
+                .get(1)
+                .species()
+                .get(0)
+                .value(org.soakwright.recipes.model.Reading.MEAN);
+        assertEquals("salt mean, thick", missed.name());
+        assertEquals(mean, missed.value(), 1e-9);
+        assertTrue(missed.value() > 30);
+        assertTrue(checkpoint.goingOnAt(run, slow, checkpoint.expected()).isEmpty());
+    }
+
     private static Run followed(Recipe recipe, Checkpoint.Deviation deviation) {
         double d = 8e-10 * deviation.factor();
         Recipe other = Recipes.of(

@@ -1,5 +1,8 @@
 package org.soakwright.planner.report.paper;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -23,6 +26,9 @@ final class Advice {
     static final String OTHERWISE =
             "A reading in none of the ranges given: stir and read again. If it stays, call the planner, do not"
                     + " improvise.";
+
+    static final String RECORD =
+            "* Slow and fast pieces hardly show in this reading: write it down, nothing follows from it.";
 
     private static final String NO_PLAN =
             "No times that the recipe allows reach the targets from here. Call the planner, do not improvise.";
@@ -48,7 +54,7 @@ final class Advice {
     }
 
     private static boolean isOpen(List<PullWindow> windows) {
-        return windows.stream().allMatch(window -> window.latest().isEmpty());
+        return windows.stream().allMatch(PullWindow::open);
     }
 
     /** What a plan takes in all is known whatever the pieces do: only limits on contents can make longer steps harmful. */
@@ -74,13 +80,29 @@ final class Advice {
             return new Range(Math.max(0, Math.min(one, other)), Math.max(one, other));
         }
 
+        /** Rounded inwards: no reading shown lies outside. */
         String shown() {
-            return figure(from) + " to " + figure(to);
+            String low = inward(from, RoundingMode.CEILING);
+            String high = inward(to, RoundingMode.FLOOR);
+            return new BigDecimal(low).compareTo(new BigDecimal(high)) > 0
+                    ? figure(from) + " to " + figure(to)
+                    : low + " to " + high;
+        }
+
+        private static String inward(double value, RoundingMode mode) {
+            // Twelve digits first: a bound that is a round number stays one.
+            BigDecimal exact = new BigDecimal(value).round(new MathContext(12));
+            int scale = Math.max(0, DIGITS - (exact.precision() - exact.scale()));
+            return exact.signum() == 0 ? "0" : exact.setScale(scale, mode).toPlainString();
         }
     }
 
-    /** For one checkpoint, the readings with which to go on as planned, and what to do at others. */
-    record Given(Range asPlanned, List<String> off) {}
+    /**
+     * For one checkpoint, the readings with which to go on as planned, and what to do at others.
+     *
+     * @param telling whether pieces that are slow or fast show in the reading at all
+     */
+    record Given(Range asPlanned, boolean telling, List<String> off) {}
 
     static String figure(double value) {
         return Figures.rounded(value, DIGITS);
@@ -98,7 +120,24 @@ final class Advice {
                                     + remedy(checkpoint.step(), deviation)
                             : beyond(checkpoint, deviation) + ": " + pieces + NO_PLAN);
         }
-        return new Given(asPlanned, List.copyOf(off));
+        told.stream()
+                .filter(Advice::isSlow)
+                .findFirst()
+                .ifPresent(slow -> goingOn(checkpoint, slow, asPlanned).ifPresent(off::add));
+        return new Given(asPlanned, !told.isEmpty(), List.copyOf(off));
+    }
+
+    /** A plan that just meets its targets leaves slow pieces no room: what going on costs at the slow end of the range. */
+    private Optional<String> goingOn(Checkpoint checkpoint, Checkpoint.Deviation slow, Range asPlanned) {
+        String[] shown = asPlanned.shown().split(" to ", -1);
+        double read = Double.parseDouble(side(checkpoint, slow) < 0 ? shown[0] : shown[1]);
+        return checkpoint
+                .goingOnAt(run, slow, read)
+                .map(missed -> "Going on with " + figure(read) + " g/L would end with " + missed.name() + " at "
+                        + figure(missed.value()) + " " + missed.unit() + ", its limit "
+                        + figure(
+                                missed.atMost().orElseGet(() -> missed.atLeast().orElseThrow()))
+                        + ": then as for slow pieces, or assay before release.");
     }
 
     private static boolean isSlow(Checkpoint.Deviation deviation) {

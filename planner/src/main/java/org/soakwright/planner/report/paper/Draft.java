@@ -138,7 +138,7 @@ final class Draft {
                         + (temperature.isEmpty() ? "" : ", at " + temperature),
                 new MakeUp(recipe).of(index, seconds),
                 moments,
-                readings.isEmpty() ? List.of() : List.of(Advice.OTHERWISE));
+                notes(readings));
     }
 
     private Sheet.Moment moment(String what, double seconds, String planned, String unit, List<String> notes) {
@@ -174,14 +174,31 @@ final class Draft {
                 moments.add(moment(
                         "Read",
                         end.from() + checkpoint.seconds(),
-                        checkpoint.species() + " " + Advice.figure(checkpoint.expected()) + " g/L; go on at "
-                                + given.asPlanned().shown(),
+                        checkpoint.species() + " " + Advice.figure(checkpoint.expected()) + " g/L; "
+                                + (given.telling()
+                                        ? "go on at " + given.asPlanned().shown()
+                                        : "for the record*"),
                         "g/L",
                         given.off()));
                 before = checkpoint.seconds();
             }
         }
         return moments;
+    }
+
+    /** What holds for all readings of a step. */
+    private static List<String> notes(List<Sheet.Moment> readings) {
+        boolean some = readings.stream().anyMatch(reading -> !reading.planned().endsWith("*"));
+        boolean recorded =
+                readings.stream().anyMatch(reading -> reading.planned().endsWith("*"));
+        List<String> notes = new ArrayList<>();
+        if (some) {
+            notes.add(Advice.OTHERWISE);
+        }
+        if (recorded) {
+            notes.add(Advice.RECORD);
+        }
+        return notes;
     }
 
     private static String atEnd(StepEnd end) {

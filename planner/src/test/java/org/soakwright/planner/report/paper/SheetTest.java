@@ -120,8 +120,8 @@ class SheetTest {
         String said = moment(sheet.parts().get(0), "End").notes().get(0);
         Clock clock = new Clock(Optional.of(Batches.START));
         assertEquals(
-                "Window: not before " + clock.both(window.earliest())
-                        + "; no later limit within three times the planned time.",
+                "Window: not before " + clock.both(window.earliest()) + ", not after "
+                        + clock.both(window.latest().orElseThrow()) + ".",
                 said);
     }
 
