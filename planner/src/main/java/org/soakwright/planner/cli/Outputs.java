@@ -1,5 +1,6 @@
 package org.soakwright.planner.cli;
 
+import java.nio.file.Path;
 import java.util.List;
 import org.soakwright.planner.report.Folder;
 import org.soakwright.recipes.text.Problem;
@@ -66,6 +67,10 @@ final class Outputs {
         JsonTarget jsonTarget = file == null || toOut ? null : JsonTarget.of(file);
         String folder = report.getValue();
         ReportTarget reportTarget = folder == null ? null : ReportTarget.of(folder);
+        if (jsonTarget != null && folder != null && samePlace(String.valueOf(file), folder)) {
+            throw new Refusal(
+                    Exit.BAD_INPUT, "--json and --report both name " + folder + "; a report holds its own result.json");
+        }
         Finding finding = work.find();
         List<Folder.Entry> entries =
                 reportTarget == null ? List.of() : finding.report().get();
@@ -83,6 +88,13 @@ final class Outputs {
             session.out().print(finding.sheet().get() + (reportTarget == null ? "" : reportTarget.told()));
         }
         return finding.status();
+    }
+
+    private static boolean samePlace(String one, String other) {
+        return Path.of(one)
+                .toAbsolutePath()
+                .normalize()
+                .equals(Path.of(other).toAbsolutePath().normalize());
     }
 
     private boolean isQuiet() {

@@ -67,6 +67,15 @@ class ReportCommandTest {
     }
 
     @Test
+    void aReportAndAResultCannotHaveOneName() throws IOException {
+        Desk.Printed printed =
+                desk.give("follow", desk.recipe("desalting.yaml"), "--report", report(), "--json", report());
+        assertEquals(Exit.BAD_INPUT, printed.status());
+        assertTrue(printed.err().contains("--json and --report both name report"), printed.err());
+        assertTrue(Files.notExists(desk.path("report")));
+    }
+
+    @Test
     void jsonOnStandardOutputStandsAloneBesideAReport() throws IOException {
         Desk.Printed printed = desk.give("follow", desk.recipe("desalting.yaml"), "--report", report(), "--json", "-");
         assertEquals(printed.out(), Files.readString(desk.path("report/result.json")));

@@ -87,7 +87,8 @@ final class JsonTree {
         if (token == JsonToken.VALUE_TRUE || token == JsonToken.VALUE_FALSE) {
             return token == JsonToken.VALUE_TRUE;
         }
-        return token == JsonToken.VALUE_STRING ? parser.getText() : null;
+        // A terminal obeys control characters; a name has none.
+        return token == JsonToken.VALUE_STRING ? parser.getText().replaceAll("\\p{Cntrl}", " ") : null;
     }
 
     private Unsound wrong(String wanted) {
