@@ -71,7 +71,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
         for (int i = 0; i < recipe.steps().size(); i++) {
             Step step = recipe.steps().get(i);
             boolean vessel = step instanceof Step.Wet wet && !wet.liquor().isUnlimited();
-            if (vessel && Translation.fills(step) == 1) {
+            if (vessel) {
                 double before = 0;
                 for (double moment : MOMENTS) {
                     double seconds = clocked(moment, run.seconds()[i]);
@@ -135,12 +135,15 @@ public record Checkpoint(int step, double seconds, String species, double expect
 
     private static double reading(Batch batch, double[] stepSeconds, int step, double seconds, String species) {
         int s = batch.species(species);
-        int stage = batch.lastStage(step);
+        int fills = Translation.fills(batch.recipe().steps().get(step));
+        double each = stepSeconds[step] / fills;
+        int fill = Math.min(fills - 1, (int) Math.ceil(seconds / each - 1e-9) - 1);
+        int stage = batch.lastStage(step) - fills + 1 + fill;
         double[] upTo = new double[stage + 1];
         for (int k = 0; k < stage; k++) {
             upTo[k] = batch.slots().get(k).seconds(stepSeconds);
         }
-        upTo[stage] = seconds;
+        upTo[stage] = seconds - fill * each;
         return batch.chain(s).follow(upTo).value(new Probe.Liquor(), stage);
     }
 
@@ -166,12 +169,15 @@ public record Checkpoint(int step, double seconds, String species, double expect
     private static Batch remaining(Batch batch, double[] planned, int step, double now) {
         Recipe recipe = batch.recipe();
         List<Time> times = new ArrayList<>();
-        boolean anythingFree =
-                recipe.steps().stream().skip(step).anyMatch(one -> one.time().isFree());
+        // Equal fills cannot be changed half-way: such a step goes on as planned, those after it make up for it.
+        boolean several = Translation.fills(recipe.steps().get(step)) > 1;
+        boolean anythingFree = recipe.steps().stream()
+                .skip(several ? step + 1 : step)
+                .anyMatch(one -> one.time().isFree());
         for (int i = 0; i < planned.length; i++) {
             Step one = recipe.steps().get(i);
             Time time = one.time();
-            if (i < step) {
+            if (i < step || (i == step && several)) {
                 time = new Time.Fixed(seconds(planned[i], time));
             } else if (i == step) {
                 double most = time.isFree() ? time.seconds(time.choices() - 1) : planned[i];

@@ -81,6 +81,35 @@ class OnTheFloorTest {
         assertTrue(checkpoints.get(3).deviations().size() < 2);
     }
 
+    /** Three fills of 3 h: a third and two thirds of the step are the ends of the first and the second. */
+    @Test
+    void fillsAreReadAsTheSoaksTheyAre() {
+        Recipe fills = Recipes.of(
+                Recipes.LOINS + "steps:",
+                "  - {rinse: three, liquor: {ratio: 3 L/kg, salt: 0 g/L}, fills: 3, temperature: 4 Cel,"
+                        + " film: {coefficient: 2e-6 m/s}, drag-out: 0.1 L/kg, time: 9 h}",
+                Recipes.water("last", "ratio: 4 L/kg", "{from: 4 h, to: 80 h, grain: 30 min}"),
+                "targets:",
+                "  - {species: salt, reading: mean, at-most: 30 g/kg}");
+        Recipe soaks = Recipes.of(
+                Recipes.LOINS + "steps:",
+                Recipes.water("a", "ratio: 3 L/kg", "3 h, drag-out: 0.1 L/kg"),
+                Recipes.water("b", "ratio: 3 L/kg", "3 h, drag-out: 0.1 L/kg"));
+        Run run = Planner.plan(fills, Progress.NONE).run();
+        List<Checkpoint> checkpoints = Checkpoint.of(run);
+        Run apart = new Batch(soaks).follow(3 * 3600, 3 * 3600);
+        for (int i = 0; i < 2; i++) {
+            assertEquals(0, checkpoints.get(i).step());
+            assertEquals((i + 1) * 3 * 3600, checkpoints.get(i).seconds());
+            assertEquals(apart.end(i).liquor().get(0).end(), checkpoints.get(i).expected(), 1e-9);
+            for (Checkpoint.Deviation deviation : checkpoints.get(i).deviations()) {
+                assertEquals(9 * 3600, deviation.seconds().get(0));
+                assertEquals(deviation.factor() < 1, deviation.seconds().get(1) > run.seconds()[1]);
+            }
+        }
+        assertFalse(checkpoints.get(0).deviations().isEmpty());
+    }
+
     /** The plan sits on its limit: at the explained reading itself, going on misses it as much as following slow pieces says. */
     @Test
     void goingOnWithSlowPiecesEndsWhereFollowingThemSays() {
