@@ -214,6 +214,9 @@ public final class ResultJson {
         json.number("value", state.value());
         json.number("limit", Wording.side(state));
         json.number("by", miss.by());
-        json.string("unit", state.unit());
+        if (state.unit().endsWith(OF_START)) {
+            json.string("of", "start");
+        }
+        json.string("unit", plainUnit(state.unit()));
     }
 }

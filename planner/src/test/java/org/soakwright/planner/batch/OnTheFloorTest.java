@@ -21,6 +21,16 @@ class OnTheFloorTest {
                 "  - {species: salt, reading: mean, at-least: 9 g/kg, grade: thin}");
     }
 
+    /** Two waters and one limit. */
+    private static Recipe leaching() {
+        return Recipes.of(
+                Recipes.LOINS + "steps:",
+                Recipes.water("first", "ratio: 4 L/kg", "{from: 4 h, to: 40 h, grain: 15 min}"),
+                Recipes.water("second", "ratio: 4 L/kg", "{from: 4 h, to: 40 h, grain: 15 min}"),
+                "targets:",
+                "  - {species: salt, reading: mean, at-most: 30 g/kg}");
+    }
+
     @Test
     void insideThePullWindowTargetsAreMetAndAMinuteOutsideMissed() {
         Run run = Planner.plan(desalting(), Progress.NONE).run();
@@ -51,12 +61,7 @@ class OnTheFloorTest {
 
     @Test
     void checkpointsComeTwiceInEveryVesselAndSayWhatToDo() {
-        Recipe recipe = Recipes.of(
-                Recipes.LOINS + "steps:",
-                Recipes.water("first", "ratio: 4 L/kg", "{from: 4 h, to: 40 h, grain: 15 min}"),
-                Recipes.water("second", "ratio: 4 L/kg", "{from: 4 h, to: 40 h, grain: 15 min}"),
-                "targets:",
-                "  - {species: salt, reading: mean, at-most: 30 g/kg}");
+        Recipe recipe = leaching();
         Run run = Planner.plan(recipe, Progress.NONE).run();
         List<Checkpoint> checkpoints = Checkpoint.of(run);
         assertEquals(
@@ -113,12 +118,7 @@ class OnTheFloorTest {
     /** The plan sits on its limit: at the explained reading itself, going on misses it as much as following slow pieces says. */
     @Test
     void goingOnWithSlowPiecesEndsWhereFollowingThemSays() {
-        Recipe recipe = Recipes.of(
-                Recipes.LOINS + "steps:",
-                Recipes.water("first", "ratio: 4 L/kg", "{from: 4 h, to: 40 h, grain: 15 min}"),
-                Recipes.water("second", "ratio: 4 L/kg", "{from: 4 h, to: 40 h, grain: 15 min}"),
-                "targets:",
-                "  - {species: salt, reading: mean, at-most: 30 g/kg}");
+        Recipe recipe = leaching();
         Run run = Planner.plan(recipe, Progress.NONE).run();
         Checkpoint checkpoint = Checkpoint.of(run).get(0);
         Checkpoint.Deviation slow = checkpoint.deviations().get(0);
