@@ -73,7 +73,7 @@ public final class Chain {
             double volume = vessel.flow() > 0 ? vessel.volume() : vessel.volume() + clinging;
             bath = new Bath.Vessel(volume, vessel.flow());
         }
-        return new Conditions(stage.diffusivity(), stage.partition(), stage.surface(), bath);
+        return new Conditions(stage.diffusivity(), stage.partition(), stage.surface(), bath, stage.grain());
     }
 
     private static double mixed(Stage stage, double clinging) {

@@ -235,6 +235,9 @@ public final class Course {
             if (probe instanceof Probe.At at) {
                 grade = at.grade();
                 x = at.position();
+            } else if (probe instanceof Probe.Surface surface) {
+                grade = surface.grade();
+                x = 1;
             } else if (probe instanceof Probe.Highest highest) {
                 grade = highest.grade();
                 x = place(highest, stage);

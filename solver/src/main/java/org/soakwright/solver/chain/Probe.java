@@ -11,7 +11,7 @@ public sealed interface Probe {
     record LotMean() implements Probe {}
 
     /**
-     * At one place of one grade's pieces.
+     * At one place of one grade's pieces, on the shortest way from the core to the surface.
      *
      * @param position 0, the core or sealed face, to 1, the wetted surface
      */
@@ -23,6 +23,9 @@ public sealed interface Probe {
             }
         }
     }
+
+    /** Mean over the wetted surface of one grade's pieces. */
+    record Surface(int grade) implements Probe {}
 
     /** Largest content anywhere in one grade's pieces. */
     record Highest(int grade) implements Probe {}
