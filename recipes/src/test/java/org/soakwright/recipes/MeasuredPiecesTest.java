@@ -14,6 +14,7 @@ import java.security.MessageDigest;
 import java.util.HexFormat;
 import java.util.List;
 import java.util.Objects;
+import java.util.Random;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
@@ -282,5 +283,18 @@ class MeasuredPiecesTest {
                 refusal("{shape: slab, measured: wrong.csv, weight: 9 g}")
                         .lines()
                         .count());
+    }
+
+    @Test
+    void noDamageToAListEverEscapesAsAnException() throws IOException {
+        String whole =
+                "# Loins\nthickness [mm], weight [g]\n14.2, 310\n15.8, 352\n16.4, 371\n17.3, 402\n18.4, 420\n18.8, 446\n";
+        Random random = new Random(20260102);
+        int refused = 0;
+        for (int trial = 0; trial < 1000; trial++) {
+            list("damaged.csv", Damage.to(whole, random));
+            refused += read("{shape: slab, measured: damaged.csv}") instanceof Outcome.Refused ? 1 : 0;
+        }
+        assertTrue(refused > 300 && refused < 1000, "some damage only changes a figure: " + refused);
     }
 }
