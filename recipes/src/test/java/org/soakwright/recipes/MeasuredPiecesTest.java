@@ -286,6 +286,15 @@ class MeasuredPiecesTest {
     }
 
     @Test
+    void piecesAnAtomThinAndAMountainThickAreNoGrade() throws IOException {
+        list("wild.csv", "thickness [m]\n1e-9\n1e-9\n1e-9\n1e6\n1e6\n1e6\n");
+        assertEquals(
+                "recipe.yaml:8:31: the pieces differ too much for one grade: found a spread of more than 1000 % where 60 % is"
+                        + " the most; make grades of the list, such as {file: wild.csv, grades: 3}",
+                refusal("{shape: slab, measured: wild.csv, weight: 9 g}"));
+    }
+
+    @Test
     void noDamageToAListEverEscapesAsAnException() throws IOException {
         String whole =
                 "# Loins\nthickness [mm], weight [g]\n14.2, 310\n15.8, 352\n16.4, 371\n17.3, 402\n18.4, 420\n18.8, 446\n";

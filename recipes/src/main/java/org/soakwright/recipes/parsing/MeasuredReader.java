@@ -20,6 +20,9 @@ final class MeasuredReader {
     /** As many pieces as any median and spread should stand on. */
     private static final int FEWEST_IN_A_GRADE = 5;
 
+    /** A lognormal this wide has a number of many digits that says no more. */
+    private static final double LARGEST_SHOWN = 10;
+
     private static final Unit PERCENT = Kind.FRACTION.unit("%").orElseThrow();
 
     private final Values values;
@@ -137,7 +140,7 @@ final class MeasuredReader {
             Quantity each = unit == null ? weight : Quantity.derived(part.averageMass(), unit, measured.place());
             Spread spread = spread(part.lognormal().cv(), measured);
             List<Quantity> sizes = sizes(list, proportions, part, measured);
-            if (sizes == null || (spread == null && part.lognormal().sigma() > 0)) {
+            if (sizes == null || (spread == null && part.lognormal().cv() > 0)) {
                 return null;
             }
             sized.add(new Sized(sizes, each, spread, fit(list, fitting, part, measured)));
@@ -158,12 +161,16 @@ final class MeasuredReader {
             problems.add(
                     measured.place(),
                     "the pieces differ too much for one grade: found a spread of "
-                            + Quantity.derived(cv, PERCENT, measured.place()) + " where 60 % is the most; make "
+                            + (cv > LARGEST_SHOWN
+                                    ? "more than 1000 %"
+                                    : Quantity.derived(cv, PERCENT, measured.place())
+                                            .toString())
+                            + " where 60 % is the most; make "
                             + (measured.grades() == 1 ? "" : "more ") + "grades of the list, such as {file: "
                             + measured.named() + ", grades: " + (measured.grades() + 2) + "}");
             return null;
         }
-        return cv > 0 ? new Spread(Quantity.derived(cv, PERCENT, measured.place())) : null;
+        return cv > 0 ? problems.attempt(() -> new Spread(Quantity.derived(cv, PERCENT, measured.place()))) : null;
     }
 
     private @Nullable List<Quantity> sizes(

@@ -62,14 +62,18 @@ record Sample(List<Piece> pieces) {
             return new Lognormal(smallest, 0);
         }
         double mass = mass();
-        double mean = pieces.stream()
-                        .mapToDouble(piece -> piece.mass() * Math.log(piece.size()))
-                        .sum()
-                / mass;
-        double squares = pieces.stream()
-                .mapToDouble(piece -> piece.mass() * Math.pow(Math.log(piece.size()) - mean, 2))
-                .sum();
-        return new Lognormal(Math.exp(mean), Math.sqrt(squares / mass / (1 - 1 / worth())));
+        double mean = 0;
+        for (Piece piece : pieces) {
+            mean += piece.mass() / mass * Math.log(piece.size());
+        }
+        double squares = 0;
+        double free =
+                0; // the mass less the sum of squares over it, of positive terms so that no heavy piece cancels it
+        for (Piece piece : pieces) {
+            squares += piece.mass() * Math.pow(Math.log(piece.size()) - mean, 2);
+            free += piece.mass() * ((mass - piece.mass()) / mass);
+        }
+        return new Lognormal(Math.exp(mean), Math.sqrt(squares / free));
     }
 
     /** So many samples of equal mass, smallest sizes first; a piece on the border counts in part on either side. */

@@ -42,6 +42,15 @@ class SampleTest {
     }
 
     @Test
+    void onePieceThatOutweighsAllOthersStillHasASpread() {
+        // Of two pieces, whatever they weigh, half the square of their difference.
+        Sample lopsided = new Sample(List.of(new Sample.Piece(1, 1e6, 1), new Sample.Piece(1.2, 1e-6, 1)));
+        assertEquals(Math.log(1.2) / Math.sqrt(2), lopsided.lognormal().sigma(), 1e-5);
+        Sample hopeless = new Sample(List.of(new Sample.Piece(1, 1e9, 1), new Sample.Piece(1.2, 1e-9, 1)));
+        assertTrue(hopeless.lognormal().sigma() <= Math.log(1.2), "at the end of the digits it stays within the sizes");
+    }
+
+    @Test
     void whatWasDrawnFromALognormalIsFound() {
         for (long seed = 1; seed <= 20; seed++) {
             Sample.Lognormal fitted = drawn(seed, 20_000, 0.018, 0.2).lognormal();
