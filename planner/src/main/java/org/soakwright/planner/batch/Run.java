@@ -11,7 +11,6 @@ import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.text.Unit;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Probe;
-import org.soakwright.solver.chain.Reading;
 
 /** A recipe followed for one choice of durations. */
 public final class Run {
@@ -89,13 +88,35 @@ public final class Run {
         Unit unit = species.start().unit();
         Map<org.soakwright.recipes.model.Reading, Double> values =
                 new EnumMap<>(org.soakwright.recipes.model.Reading.class);
+        Population population = batch.classes(s).populations().get(grade);
         double error = 0;
         for (org.soakwright.recipes.model.Reading kind : org.soakwright.recipes.model.Reading.values()) {
-            Reading reading = course.read(Requirements.probe(kind, grade), stage);
-            values.put(kind, recipe.lot().express(reading.value(), unit));
-            error = Math.max(error, recipe.lot().express(reading.error(), unit));
+            Gauge.Average gauge = new Gauge.Average(grade, population, kind);
+            values.put(kind, recipe.lot().express(gauge.value(course, stage), unit));
+            error = Math.max(error, recipe.lot().express(gauge.error(course, stage), unit));
         }
-        return new StepEnd.Content(species.name(), values, error, unit);
+        return new StepEnd.Content(species.name(), values, distribution(s, population, stage), error, unit);
+    }
+
+    private Map<org.soakwright.recipes.model.Reading, List<Double>> distribution(
+            int s, Population population, int stage) {
+        Map<org.soakwright.recipes.model.Reading, List<Double>> distribution =
+                new EnumMap<>(org.soakwright.recipes.model.Reading.class);
+        if (!population.varies()) {
+            return distribution;
+        }
+        Recipe recipe = batch.recipe();
+        Unit unit = recipe.species().get(s).start().unit();
+        List<Population> alone = List.of(population);
+        for (org.soakwright.recipes.model.Reading kind : org.soakwright.recipes.model.Reading.values()) {
+            Scatter scatter = new Scatter(alone, Gauge.values(alone, kind, courses.get(s), stage));
+            distribution.put(
+                    kind,
+                    StepEnd.SHARES.stream()
+                            .map(share -> recipe.lot().express(scatter.percentile(share), unit))
+                            .toList());
+        }
+        return distribution;
     }
 
     /** Every target of the recipe, for `grade: each` the grade nearest to failing. */
@@ -131,7 +152,7 @@ public final class Run {
             return batch.cost().of(total.goal(), seconds);
         }
         Requirement.OfContent content = (Requirement.OfContent) requirement;
-        return courses.get(content.species()).value(content.probe(), content.stage());
+        return content.gauge().value(courses.get(content.species()), content.stage());
     }
 
     double miss(Requirement requirement) {
@@ -149,7 +170,7 @@ public final class Run {
             return gradient;
         }
         Requirement.OfContent content = (Requirement.OfContent) requirement;
-        double[] byStage = courses.get(content.species()).gradient(content.probe(), content.stage());
+        double[] byStage = content.gauge().gradient(courses.get(content.species()), content.stage());
         for (int k = 0; k < byStage.length; k++) {
             Translation.Slot slot = batch.slots().get(k);
             gradient[slot.step()] += slope * slot.part() * byStage[k];

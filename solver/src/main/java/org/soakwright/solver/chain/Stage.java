@@ -1,6 +1,9 @@
 package org.soakwright.solver.chain;
 
 import org.soakwright.solver.Require;
+import org.soakwright.solver.shape.Grain;
+import org.soakwright.solver.stage.Bath;
+import org.soakwright.solver.stage.Conditions;
 import org.soakwright.solver.stage.Surface;
 
 /**
@@ -10,8 +13,15 @@ import org.soakwright.solver.stage.Surface;
  * @param partition content of the piece over content of the surroundings at equilibrium; above 0
  * @param surface sealed if and only if the surroundings are a rest
  * @param clinging liquor that the pieces carry away at the end, m3; it joins the next liquor. 0 where no liquor is met
+ * @param grain how the diffusivity differs by direction
  */
-public record Stage(double diffusivity, double partition, Surface surface, Surroundings surroundings, double clinging) {
+public record Stage(
+        double diffusivity,
+        double partition,
+        Surface surface,
+        Surroundings surroundings,
+        double clinging,
+        Grain grain) {
     public Stage {
         Require.positive("diffusivity", diffusivity, "m2/s");
         Require.positive("partition", partition, "1");
@@ -24,9 +34,40 @@ public record Stage(double diffusivity, double partition, Surface surface, Surro
         }
     }
 
+    /** The same diffusivity in every direction. */
+    public Stage(double diffusivity, double partition, Surface surface, Surroundings surroundings, double clinging) {
+        this(diffusivity, partition, surface, surroundings, clinging, Grain.NONE);
+    }
+
     /** Whether the pieces leave this stage with liquor of its own. */
     public boolean wets() {
         return wets(surroundings);
+    }
+
+    /** What decides the stage's modes, when so much liquor, m3, clings to the pieces from before. */
+    Conditions conditions(double clinging) {
+        Bath bath = new Bath.Unlimited();
+        if (surroundings instanceof Surroundings.Vessel vessel) {
+            double volume = vessel.flow() > 0 ? vessel.volume() : vessel.volume() + clinging;
+            bath = new Bath.Vessel(volume, vessel.flow());
+        }
+        return new Conditions(diffusivity, partition, surface, bath, grain);
+    }
+
+    /** Share of what clings in the liquor that the stage starts with. */
+    double mixed(double clinging) {
+        return surroundings instanceof Surroundings.Vessel vessel ? clinging / (vessel.volume() + clinging) : 0;
+    }
+
+    /** Content of the surroundings from which the pieces are counted, kg/m3: of the feed, of the liquor, of the equilibrium in air. */
+    double offset() {
+        if (surroundings instanceof Surroundings.Vessel vessel) {
+            return vessel.flow() > 0 ? vessel.feed() : vessel.content();
+        }
+        if (surroundings instanceof Surroundings.Plenty plenty) {
+            return plenty.content();
+        }
+        return surroundings instanceof Surroundings.Air air ? air.equilibrium() : 0;
     }
 
     private static boolean wets(Surroundings surroundings) {

@@ -2,6 +2,8 @@ package org.soakwright.solver.stage;
 
 import org.soakwright.solver.Require;
 import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.shape.Grain;
+import org.soakwright.solver.shape.Side;
 
 /**
  * What decides the modes of a stage: everything but contents and duration. Equal conditions share one spectrum.
@@ -9,23 +11,44 @@ import org.soakwright.solver.shape.Grade;
  * @param diffusivity in the piece, m2/s; above 0
  * @param partition content of the piece over content of the liquor at equilibrium, (kg/m3)/(kg/m3); above 0
  */
-public record Conditions(double diffusivity, double partition, Surface surface, Bath bath) {
+public record Conditions(double diffusivity, double partition, Surface surface, Bath bath, Grain grain) {
     public Conditions {
         Require.positive("diffusivity", diffusivity, "m2/s");
         Require.positive("partition", partition, "1");
     }
 
-    /** D/L^2, 1/s: what turns a squared frequency into a rate. */
-    public double pace(Grade grade) {
-        return diffusivity / (grade.length() * grade.length());
+    /** The same in every direction. */
+    public Conditions(double diffusivity, double partition, Surface surface, Bath bath) {
+        this(diffusivity, partition, surface, bath, Grain.NONE);
     }
 
-    /** Biot number k L/(K D): 0 when sealed, infinite when there is no film. */
+    /** D/L^2 along the first side, 1/s: what turns a squared frequency into a rate. */
+    public double pace(Grade grade) {
+        return pace(grade, 0);
+    }
+
+    /** D/L^2 along a side, 1/s. */
+    public double pace(Grade grade, int side) {
+        Side along = grade.sides().get(side);
+        return diffusivity(grade, along) / (along.length() * along.length());
+    }
+
+    /** Biot number k L/(K D) of the first side: 0 when sealed, infinite when there is no film. */
     public double biot(Grade grade) {
+        return biot(grade, 0);
+    }
+
+    /** Biot number k L/(K D) of a side. */
+    public double biot(Grade grade, int side) {
+        Side along = grade.sides().get(side);
         if (surface instanceof Surface.Film film) {
-            return film.coefficient() * grade.length() / (partition * diffusivity);
+            return film.coefficient() * along.length() / (partition * diffusivity(grade, along));
         }
         return surface instanceof Surface.Sealed ? 0 : Double.POSITIVE_INFINITY;
+    }
+
+    private double diffusivity(Grade grade, Side side) {
+        return diffusivity * grade.ease() * grain.of(side);
     }
 
     /** Whether pieces and liquor change each other, so that their modes are coupled. */
