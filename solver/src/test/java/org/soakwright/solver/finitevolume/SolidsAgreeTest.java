@@ -1,0 +1,154 @@
+package org.soakwright.solver.finitevolume;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Set;
+import java.util.TreeMap;
+import java.util.TreeSet;
+import org.junit.jupiter.api.Test;
+import org.soakwright.solver.chain.Chain;
+import org.soakwright.solver.chain.Course;
+import org.soakwright.solver.chain.Probe;
+import org.soakwright.solver.chain.Stage;
+import org.soakwright.solver.chain.Start;
+import org.soakwright.solver.chain.Surroundings;
+import org.soakwright.solver.finitevolume.Batches.Shape;
+import org.soakwright.solver.finitevolume.Step.Kind;
+import org.soakwright.solver.shape.Axis;
+import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.shape.Grain;
+import org.soakwright.solver.shape.Side;
+import org.soakwright.solver.stage.Surface;
+
+/** Chains of pieces of several axes against elements, which agree with the limit of finite volumes. */
+class SolidsAgreeTest {
+    private static final List<Axis> AXES = List.of(Axis.SLAB, Axis.CYLINDER, Axis.SPHERE);
+
+    /** Of the largest difference that has driven anything so far. */
+    private static final double AGREEMENT = 1e-6;
+
+    @Test
+    void everyReadingAgreesAtTheEndOfEveryPhase() {
+        Map<String, Double> worst = new TreeMap<>();
+        int readings = 0;
+        for (Batch batch : Batches.all()) {
+            readings += compare(batch, worst);
+        }
+        StringBuilder line = new StringBuilder();
+        worst.forEach((what, difference) -> line.append(String.format(Locale.ROOT, " %s %.1e", what, difference)));
+        System.out.println("elements against modes of several axes: " + readings + " readings, worst" + line);
+        assertEquals(8, worst.size());
+        worst.forEach((what, difference) -> assertTrue(difference < AGREEMENT, what + " differ by " + difference));
+    }
+
+    @Test
+    void theBatchesPutEveryShapeIntoAllSurroundings() {
+        Set<String> met = new TreeSet<>();
+        Set<String> beforeRest = new TreeSet<>();
+        Set<String> afterRest = new TreeSet<>();
+        Set<String> mixed = new TreeSet<>();
+        Set<String> dragged = new TreeSet<>();
+        Set<Shape> grained = new TreeSet<>();
+        for (Batch batch : Batches.all()) {
+            Step wetting = null;
+            for (int k = 0; k < batch.phases().size(); k++) {
+                Step step = batch.phases().get(k).step();
+                for (Solid solid : batch.lot()) {
+                    if (solid.edges().size() == 1) {
+                        continue;
+                    }
+                    Shape shape = Shape.of(solid);
+                    if (step.kind() != Kind.REST) {
+                        met.add(shape + " " + step.kind() + " " + step.open());
+                        if (k + 1 < batch.phases().size()
+                                && batch.phases().get(k + 1).step().kind() == Kind.REST) {
+                            beforeRest.add(shape + " " + step.kind());
+                        }
+                        if (k > 0 && batch.phases().get(k - 1).step().kind() == Kind.REST) {
+                            afterRest.add(shape + " " + step.kind());
+                        }
+                    }
+                    if (!batch.phases().get(k).grain().isEmpty()) {
+                        grained.add(shape);
+                    }
+                    mixed.add(shape + " among " + batch.lot().size());
+                    if (wetting != null && wetting.clinging() > 0 && step.kind().limited()) {
+                        dragged.add(shape + " into " + step.kind());
+                    }
+                }
+                wetting = step.kind() == Kind.REST || step.kind() == Kind.AIR ? wetting : step;
+            }
+        }
+        System.out.println("elements cover " + met.size() + " of 24 shape x surroundings x film, " + beforeRest.size()
+                + " of 12 before and " + afterRest.size() + " of 12 after a rest");
+        assertEquals(24, met.size(), () -> "only " + met);
+        assertEquals(12, beforeRest.size(), () -> "only " + beforeRest);
+        assertEquals(12, afterRest.size(), () -> "only " + afterRest);
+        assertEquals(9, mixed.size(), () -> "only " + mixed);
+        assertEquals(6, dragged.size(), () -> "only " + dragged);
+        assertEquals(Set.of(Shape.values()), grained);
+    }
+
+    private static int compare(Batch batch, Map<String, Double> worst) {
+        List<State> ends = Solids.onElements(batch, Batches.degree(batch));
+        Course course = follow(batch);
+        int readings = 0;
+        for (int k = 0; k < ends.size(); k++) {
+            State end = ends.get(k);
+            double inPieces = end.drive() * batch.phases().get(k).step().partition();
+            for (int j = 0; j < batch.lot().size(); j++) {
+                Field field = end.fields().get(j);
+                note(worst, "means", field.mean(), course.value(new Probe.Mean(j), k), inPieces);
+                note(worst, "cores", field.core(), course.value(new Probe.At(j, 0), k), inPieces);
+                note(worst, "depths", field.on(0.6), course.value(new Probe.At(j, 0.6), k), inPieces);
+                note(worst, "surfaces", field.wetted(), course.value(new Probe.Surface(j), k), inPieces);
+                note(worst, "highest", field.highest(), course.value(new Probe.Highest(j), k), inPieces);
+                note(worst, "lowest", field.lowest(), course.value(new Probe.Lowest(j), k), inPieces);
+                readings += 6;
+            }
+            note(worst, "lots", end.lotMean(batch.lot()), course.value(new Probe.LotMean(), k), inPieces);
+            note(worst, "liquors", end.liquor(), course.value(new Probe.Liquor(), k), end.drive());
+            readings += 2;
+        }
+        return readings;
+    }
+
+    private static void note(Map<String, Double> worst, String what, double expected, double found, double scale) {
+        worst.merge(what, Math.abs(expected - found) / scale, Math::max);
+    }
+
+    /** The same batch in the solver's own terms. */
+    static Course follow(Batch batch) {
+        List<Grade> lot = new ArrayList<>();
+        for (Solid solid : batch.lot()) {
+            List<Side> sides = solid.edges().stream()
+                    .map(edge -> new Side(AXES.get(edge.power()), edge.length(), edge.direction()))
+                    .toList();
+            lot.add(new Grade(sides, solid.volume(), solid.ease()));
+        }
+        List<Stage> stages = new ArrayList<>();
+        for (Phase phase : batch.phases()) {
+            Step step = phase.step();
+            Surface surface = step.kind() == Kind.REST
+                    ? new Surface.Sealed()
+                    : step.open() ? new Surface.Open() : new Surface.Film(step.film());
+            Surroundings around = switch (step.kind()) {
+                case REST -> new Surroundings.Rest();
+                case AIR -> new Surroundings.Air(step.content());
+                case UNLIMITED -> new Surroundings.Plenty(step.content());
+                case CLOSED, FLOWING ->
+                    new Surroundings.Vessel(step.volume(), step.content(), step.flow(), step.feed());
+            };
+            stages.add(new Stage(
+                    step.diffusivity(), step.partition(), surface, around, step.clinging(), new Grain(phase.grain())));
+        }
+        double[] seconds =
+                batch.phases().stream().mapToDouble(p -> p.step().seconds()).toArray();
+        return Chain.of(lot, new Start.Uniform(batch.start()), stages).follow(seconds);
+    }
+}
