@@ -6,7 +6,6 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import org.soakwright.recipes.model.Diffusivity;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
@@ -224,13 +223,6 @@ public record Checkpoint(int step, double seconds, String species, double expect
     }
 
     private static Species faster(Species species, double factor) {
-        Diffusivity stated = species.diffusivity();
-        return new Species(
-                species.place(),
-                species.name(),
-                species.start(),
-                new Diffusivity(Rescaled.times(stated.value(), factor), stated.at(), stated.activationEnergy()),
-                species.partition(),
-                species.exchangesWith());
+        return species.withDiffusivity(Rescaled.times(species.diffusivity(), factor));
     }
 }

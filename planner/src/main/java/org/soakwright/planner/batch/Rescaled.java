@@ -3,6 +3,8 @@ package org.soakwright.planner.batch;
 import java.math.BigDecimal;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import org.soakwright.recipes.model.Diffusivities;
+import org.soakwright.recipes.model.Diffusivity;
 import org.soakwright.recipes.model.Overrides;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Step;
@@ -16,14 +18,19 @@ final class Rescaled {
         return new Quantity(quantity.value().multiply(BigDecimal.valueOf(factor)), quantity.unit(), quantity.place());
     }
 
+    static Diffusivities times(Diffusivities diffusivities, double factor) {
+        return diffusivities.each(one -> new Diffusivity(times(one.value(), factor), one.at(), one.activationEnergy()));
+    }
+
     /** A step's own diffusivity of a species multiplied, where it has one. */
     static Step step(Step step, String species, double factor) {
         StepHead head = step.head();
-        Quantity own = head.overrides().diffusivity().get(species);
+        Diffusivities own = head.overrides().diffusivity().get(species);
         if (own == null) {
             return step;
         }
-        Map<String, Quantity> diffusivity = new LinkedHashMap<>(head.overrides().diffusivity());
+        Map<String, Diffusivities> diffusivity =
+                new LinkedHashMap<>(head.overrides().diffusivity());
         diffusivity.put(species, times(own, factor));
         return step.with(new StepHead(
                 head.place(),

@@ -3,6 +3,7 @@ package org.soakwright.planner.batch;
 import java.util.ArrayList;
 import java.util.List;
 import org.soakwright.recipes.model.Content;
+import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Diffusivity;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Grade;
@@ -31,6 +32,7 @@ final class Translation {
     private final Recipe recipe;
 
     Translation(Recipe recipe) {
+        NotYet.check(recipe);
         this.recipe = recipe;
     }
 
@@ -75,6 +77,7 @@ final class Translation {
             case SLAB -> Axis.SLAB;
             case CYLINDER -> Axis.CYLINDER;
             case SPHERE -> Axis.SPHERE;
+            case SHORT_CYLINDER, BRICK -> throw new IllegalStateException("NotYet refuses these");
         };
     }
 
@@ -154,11 +157,8 @@ final class Translation {
 
     /** D(T) = D exp(-E/R (1/T - 1/T0)), Arrhenius' law; a step's own diffusivity is taken as it stands. */
     static double diffusivity(Species species, Step step) {
-        Quantity own = step.head().overrides().diffusivity().get(species.name());
-        if (own != null) {
-            return own.si();
-        }
-        Diffusivity stated = species.diffusivity();
+        Diffusivities own = step.head().overrides().diffusivity().get(species.name());
+        Diffusivity stated = (own == null ? species.diffusivity() : own).of(null);
         Quantity at = stated.at();
         Quantity energy = stated.activationEnergy();
         Quantity temperature = step.temperature();

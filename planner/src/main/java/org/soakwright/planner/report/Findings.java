@@ -87,7 +87,8 @@ public record Findings(String title, List<String> about, List<String> answer, bo
 
     private static String grade(Grade grade) {
         String share = grade.share() < 1 ? Figures.made(grade.share() * 100) + " % " : "";
-        return share + grade.name() + ", " + grade.shape().word() + " of " + grade.size();
+        return share + grade.name() + ", " + grade.shape().word() + " of "
+                + grade.shortest().size();
     }
 
     private static void body(Run run, List<String> binds, Optional<LocalDateTime> start, List<Section> sections) {

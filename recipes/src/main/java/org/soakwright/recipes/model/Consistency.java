@@ -21,11 +21,15 @@ public final class Consistency {
         this.declared = declared;
     }
 
-    /** A start by mass needs the lot's density. */
+    /** A start by mass needs the lot's density; a profile and a grain need shapes that have them. */
     public List<Problem> of(Species species) {
-        return species.start().basis() == Basis.PER_MASS
-                ? needsLotDensity(startPlace(species.start()), "a content by mass")
-                : List.of();
+        ShapeRules shapes = new ShapeRules(declared);
+        List<Problem> problems = new ArrayList<>(shapes.ofStart(species.start()));
+        problems.addAll(shapes.ofGrain(species.name(), species.diffusivity()));
+        if (species.start().basis() == Basis.PER_MASS) {
+            problems.addAll(needsLotDensity(startPlace(species.start()), "a content by mass"));
+        }
+        return problems;
     }
 
     /** Every species that exchanges with liquor is named, and no other; a ratio needs the lot's mass. */
@@ -90,12 +94,13 @@ public final class Consistency {
         return problems;
     }
 
-    /** Overrides are of declared species. */
+    /** Overrides are of declared species, a diffusivity in the directions that the pieces have. */
     public List<Problem> of(Overrides overrides) {
         List<Problem> problems = new ArrayList<>();
-        overrides
-                .diffusivity()
-                .forEach((name, value) -> problems.addAll(knownSpecies(new Reference(name, value.place()))));
+        overrides.diffusivity().forEach((name, value) -> {
+            problems.addAll(knownSpecies(new Reference(name, value.place())));
+            problems.addAll(new ShapeRules(declared).ofGrain(name, value));
+        });
         overrides
                 .partition()
                 .forEach((name, value) -> problems.addAll(knownSpecies(new Reference(name, value.place()))));

@@ -16,6 +16,7 @@ import java.util.Set;
  * @param species those that could be read
  * @param steps every step written, with its kind
  * @param grades every grade written
+ * @param shapes of the grades whose shape could be read
  * @param lotHasDensity whether the lot states a density
  * @param priced whether anything has a price in the recipe
  */
@@ -25,6 +26,7 @@ public record Declared(
         List<Species> species,
         Map<String, String> steps,
         Set<String> grades,
+        Map<String, Shape> shapes,
         boolean lotHasDensity,
         boolean priced) {
     public Declared {
@@ -33,6 +35,7 @@ public record Declared(
         species = List.copyOf(species);
         steps = Collections.unmodifiableMap(new LinkedHashMap<>(steps));
         grades = Collections.unmodifiableSet(new LinkedHashSet<>(grades));
+        shapes = Collections.unmodifiableMap(new LinkedHashMap<>(shapes));
     }
 
     Optional<Species> species(String name) {

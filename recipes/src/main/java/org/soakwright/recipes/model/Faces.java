@@ -1,6 +1,6 @@
 package org.soakwright.recipes.model;
 
-/** Which faces of a slab are wetted. */
+/** Which of the two faces at the ends of a side are wetted. */
 public enum Faces implements Word {
     ONE,
     BOTH

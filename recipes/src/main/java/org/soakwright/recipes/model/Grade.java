@@ -1,29 +1,83 @@
 package org.soakwright.recipes.model;
 
+import java.util.Comparator;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unsound;
 
 /**
- * Pieces of one shape and size.
+ * Pieces of one shape and, but for their spread, one size.
  *
- * @param size thickness of a slab, diameter of a cylinder or a sphere; above zero
- * @param faces both, unless the shape is a slab sealed on one side
+ * @param sides one for each of the shape's dimensions, in their order; with a spread, those of the median by mass
  * @param share of the lot's mass, above 0 up to 1
+ * @param weight of the average piece; null is not stated
+ * @param spread of the size of the pieces, all sides alike; null is none
+ * @param fit how well the spread describes the sizes measured; null where none were
  */
-public record Grade(Place place, String name, OneAxisShape shape, Quantity size, Faces faces, double share) {
+public record Grade(
+        Place place,
+        String name,
+        Shape shape,
+        List<Side> sides,
+        double share,
+        @Nullable Quantity weight,
+        @Nullable Spread spread,
+        @Nullable Fit fit) {
     public Grade {
         Rules.named("a grade", name, place);
-        Rules.positive("the " + shape.measure(), size);
-        if (faces == Faces.ONE && shape != OneAxisShape.SLAB) {
-            throw new Unsound(place, "only a slab has faces: found faces on a " + shape.word() + "; remove them");
+        sides = List.copyOf(sides);
+        List<Dimension> measured = sides.stream().map(Side::dimension).toList();
+        if (!measured.equals(shape.dimensions())) {
+            throw new Unsound(
+                    place,
+                    "the sides of a " + shape.word() + " are " + Word.list(shape.dimensions()) + ": found "
+                            + Word.list(measured));
         }
         if (!(share > 0 && share <= 1)) {
             throw new Unsound(place, "a share lies above 0 % and up to 100 %: found " + Rules.percent(share));
         }
+        Rules.positive("the weight", weight);
     }
 
-    /** Metres from the wetted surface to the core: half the size, or all of it where one face is sealed. */
+    /** The side whose solute has the shortest way out; the first of several. */
+    public Side shortest() {
+        return sides.stream().min(Comparator.comparingDouble(Side::depth)).orElseThrow();
+    }
+
+    /** Metres from the wetted face of the shortest side to the core. */
     public double depth() {
-        return faces == Faces.ONE ? size.si() : size.si() / 2;
+        return shortest().depth();
+    }
+
+    /** The direction of diffusion of one of its sides; null for a sphere, which has none. */
+    public @Nullable Grain grain(Side side) {
+        return shape.grain(side.dimension());
+    }
+
+    /** The volume of a piece of the sizes stated; empty for a slab and a long cylinder. */
+    public OptionalDouble volumeM3() {
+        return switch (shape) {
+            case SLAB, CYLINDER -> OptionalDouble.empty();
+            case SPHERE -> OptionalDouble.of(Math.PI / 6 * Math.pow(size(0), 3));
+            case SHORT_CYLINDER -> OptionalDouble.of(Math.PI / 4 * Math.pow(size(0), 2) * size(1));
+            case BRICK -> OptionalDouble.of(size(0) * size(1) * size(2));
+        };
+    }
+
+    /**
+     * The volume of the average piece. With a spread it is smaller than that of the sizes stated, which are the median by
+     * mass: of a lognormal, exp(-9 sigma^2 / 2) times.
+     */
+    public OptionalDouble averageM3() {
+        OptionalDouble volume = volumeM3();
+        return spread == null || volume.isEmpty()
+                ? volume
+                : OptionalDouble.of(volume.getAsDouble() * Math.exp(-4.5 * spread.sigma() * spread.sigma()));
+    }
+
+    private double size(int side) {
+        return sides.get(side).size().si();
     }
 }

@@ -33,11 +33,16 @@ public record Lot(
         }
         if (amount instanceof Amount.ByCount byCount) {
             double piecesPerM3 = grades.stream()
-                    .mapToDouble(grade -> grade.share() / LotRules.sphereVolumeM3(grade))
+                    .mapToDouble(grade -> grade.share() / pieceM3(grade).orElseThrow())
                     .sum();
             return byCount.count() / piecesPerM3;
         }
         return ((Amount.ByMass) amount).mass().si() / densityKgPerM3();
+    }
+
+    /** The volume of the average piece of a grade: by its weight where it is stated, else by its sizes; empty for neither. */
+    public OptionalDouble pieceM3(Grade grade) {
+        return LotRules.pieceM3(grade, density);
     }
 
     /** The mass of all pieces as loaded, kg; empty without a density. */

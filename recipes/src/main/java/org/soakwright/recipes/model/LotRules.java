@@ -2,6 +2,7 @@ package org.soakwright.recipes.model;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Problem;
@@ -28,11 +29,8 @@ final class LotRules {
         }
         if (amount instanceof Amount.ByCount) {
             grades.stream()
-                    .filter(grade -> grade.shape() != OneAxisShape.SPHERE)
-                    .forEach(grade -> problems.add(new Problem(
-                            grade.place(),
-                            "a count of pieces of shape " + grade.shape().word()
-                                    + " is not computed yet by this version; write the lot's mass or volume instead")));
+                    .filter(grade -> pieceM3(grade, density).isEmpty())
+                    .forEach(grade -> problems.add(uncountable(grade)));
         }
         problems.addAll(Names.duplicates(
                 "grades",
@@ -50,7 +48,19 @@ final class LotRules {
         }
     }
 
-    static double sphereVolumeM3(Grade grade) {
-        return Math.PI / 6 * Math.pow(grade.size().si(), 3);
+    private static Problem uncountable(Grade grade) {
+        boolean weighed = grade.weight() != null;
+        return new Problem(
+                grade.place(),
+                "a count needs the volume of each piece: found " + (weighed ? "no density" : "no weight") + " for the "
+                        + grade.shape().word() + " " + grade.name() + "; "
+                        + (weighed ? "add density to the lot, such as 1120 kg/m3" : "add weight, such as 350 g")
+                        + ", or write the lot's mass or volume");
+    }
+
+    static OptionalDouble pieceM3(Grade grade, @Nullable Quantity density) {
+        return grade.weight() != null && density != null
+                ? OptionalDouble.of(grade.weight().si() / density.si())
+                : grade.averageM3();
     }
 }

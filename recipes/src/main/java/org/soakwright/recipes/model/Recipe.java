@@ -52,12 +52,15 @@ public record Recipe(
             Set<Product> products, Lot lot, List<Species> species, List<Step> steps, @Nullable Prices prices) {
         Map<String, String> kinds = new LinkedHashMap<>();
         steps.forEach(step -> kinds.put(step.name(), step.kind()));
+        Map<String, Shape> shapes = new LinkedHashMap<>();
+        lot.grades().forEach(grade -> shapes.put(grade.name(), grade.shape()));
         return new Declared(
                 products,
                 species.stream().map(Species::name).collect(Collectors.toSet()),
                 species,
                 kinds,
-                lot.grades().stream().map(Grade::name).collect(Collectors.toSet()),
+                shapes.keySet(),
+                shapes,
                 lot.density() != null,
                 prices != null || steps.stream().anyMatch(step -> step.head().price() != null));
     }

@@ -3,12 +3,16 @@ package org.soakwright.recipes.model;
 import java.util.Collections;
 import java.util.EnumSet;
 import java.util.Set;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unsound;
 
 /**
  * Something dissolved that moves in the pieces.
  *
+ * @param startVaries how the start differs from piece to piece, each piece uniform; null is not at all
+ * @param diffusivityVaries how the diffusivity differs from piece to piece, in all directions and steps alike; null is not
+ *     at all
  * @param partition (kg/m3 of piece) / (kg/m3 of liquor) at equilibrium, above zero
  * @param exchangesWith one medium or both; towards any other the piece is sealed for this species
  */
@@ -16,11 +20,23 @@ public record Species(
         Place place,
         String name,
         Start start,
-        Diffusivity diffusivity,
+        @Nullable Spread startVaries,
+        Diffusivities diffusivity,
+        @Nullable Spread diffusivityVaries,
         Partition partition,
         Set<Medium> exchangesWith) {
     public Species {
         Rules.named("a species", name, place);
+        if (startVaries != null && start instanceof Start.Profile) {
+            throw new Unsound(
+                    startVaries.place(),
+                    "a profile cannot vary from piece to piece; write one content, or remove varies");
+        }
+        if (startVaries != null && start.isZero()) {
+            throw new Unsound(
+                    startVaries.place(),
+                    "a start of nothing is the same in every piece; remove varies, or write a content");
+        }
         if (exchangesWith.isEmpty()) {
             throw new Unsound(place, name + " exchanges with nothing; write [liquor], [air] or [liquor, air]");
         }
@@ -29,5 +45,10 @@ public record Species(
 
     public boolean exchangesWith(Medium medium) {
         return exchangesWith.contains(medium);
+    }
+
+    /** The same species with another diffusivity. */
+    public Species withDiffusivity(Diffusivities other) {
+        return new Species(place, name, start, startVaries, other, diffusivityVaries, partition, exchangesWith);
     }
 }

@@ -12,6 +12,7 @@ public sealed interface Target {
      * A limit on what is read off the pieces.
      *
      * @param after the step at whose end it is read; null is the end of the recipe
+     * @param share of the pieces looked at, by mass, that meet the limits, above 0 and below 1; null is not counted
      */
     record OfPieces(
             Place place,
@@ -19,13 +20,21 @@ public sealed interface Target {
             Reading reading,
             Limits limits,
             GradeScope grade,
-            @Nullable Reference after) implements Target {
+            @Nullable Reference after,
+            @Nullable Quantity share)
+            implements Target {
         public OfPieces {
-            if (grade instanceof GradeScope.WholeLot && reading != Reading.MEAN) {
+            if (grade instanceof GradeScope.WholeLot && reading != Reading.MEAN && share == null) {
                 throw new Unsound(
                         place,
                         "the whole lot has only a mean: found reading " + reading.word()
-                                + " with grade lot; write reading: mean, or a grade");
+                                + " with grade lot; write reading: mean, a grade, or the share of its pieces such as 95 %");
+            }
+            if (share != null && !(share.si() > 0 && share.si() < 1)) {
+                throw new Unsound(
+                        share.place(),
+                        "the share of the pieces lies above 0 % and below 100 %: found \"" + share
+                                + "\"; write such as 95 %");
             }
         }
     }

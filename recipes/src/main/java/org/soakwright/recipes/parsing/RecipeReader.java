@@ -59,7 +59,14 @@ public final class RecipeReader {
         Map<String, String> stepKinds = StepReader.declared(stepsTree, problems);
         boolean priced = fields.has("prices") || StepReader.anyPriced(stepsTree);
         Declared declared = new Declared(
-                products, speciesReader.names(), species, stepKinds, lots.gradeNames(), lots.hasDensity(), priced);
+                products,
+                speciesReader.names(),
+                species,
+                stepKinds,
+                lots.gradeNames(),
+                lots.shapes(),
+                lots.hasDensity(),
+                priced);
         Consistency consistency = new Consistency(declared);
         species.forEach(one -> problems.addAll(consistency.of(one)));
         Quantity between = values.quantity("between", fields.get("between"), Kind.DURATION);

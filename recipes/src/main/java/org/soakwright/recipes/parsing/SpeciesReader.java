@@ -8,13 +8,12 @@ import java.util.List;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Content;
-import org.soakwright.recipes.model.Diffusivity;
+import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Partition;
-import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Spread;
 import org.soakwright.recipes.model.Start;
-import org.soakwright.recipes.text.Kind;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Problems;
 import org.soakwright.recipes.text.Tree;
@@ -68,18 +67,46 @@ final class SpeciesReader {
         if (fields == null) {
             return null;
         }
-        Start start = start(name, fields.need("start", "190 g/kg"));
-        Diffusivity diffusivity = diffusivity(name, fields.need("diffusivity", "8e-10 m2/s"));
+        Tree startTree = fields.need("start", "190 g/kg");
+        Start start = start(name, startTree);
+        Tree diffusivityTree = fields.need("diffusivity", "8e-10 m2/s");
+        Diffusivities diffusivity = new DiffusivityReader(values).ofSpecies(name, diffusivityTree);
+        Varies startVaries = varies(start instanceof Start.Profile ? null : startTree);
+        Varies diffusivityVaries = varies(diffusivityTree);
         Set<Medium> media = media(fields.get("exchanges-with"));
         boolean inLiquor = media == null || media.contains(Medium.LIQUOR);
         Tree written = inLiquor ? fields.need("partition", "0.8") : fields.get("partition");
         Partition partition = written == null && !inLiquor
                 ? new Partition(1, fields.place())
                 : partition("the partition of " + name, written);
-        if (!named || start == null || diffusivity == null || media == null || partition == null) {
+        boolean broken = startVaries.broken() || diffusivityVaries.broken();
+        if (!named || start == null || diffusivity == null || media == null || partition == null || broken) {
             return null;
         }
-        return problems.attempt(() -> new Species(entry.place(), name, start, diffusivity, partition, media));
+        return problems.attempt(() -> new Species(
+                entry.place(),
+                name,
+                start,
+                startVaries.spread(),
+                diffusivity,
+                diffusivityVaries.spread(),
+                partition,
+                media));
+    }
+
+    /** What `varies` says beside a value. */
+    private record Varies(@Nullable Spread spread, boolean broken) {}
+
+    private Varies varies(@Nullable Tree tree) {
+        Tree stated = tree instanceof Tree.Entries entries
+                ? entries.entries().stream()
+                        .filter(entry -> entry.key().equals("varies"))
+                        .map(Tree.Entry::value)
+                        .findFirst()
+                        .orElse(null)
+                : null;
+        Spread spread = values.spread("varies", stated);
+        return new Varies(spread, stated != null && spread == null);
     }
 
     private @Nullable Start start(String species, @Nullable Tree tree) {
@@ -90,8 +117,16 @@ final class SpeciesReader {
             Tree profile = fields == null ? null : fields.get("profile");
             return profile == null ? null : profile(what, profile);
         }
-        Content content = values.content(what, tree);
+        Content content = values.content(what, tree instanceof Tree.Entries wrapped ? unwrapped(wrapped) : tree);
         return content == null ? null : new Start.Uniform(content);
+    }
+
+    private @Nullable Tree unwrapped(Tree.Entries start) {
+        if (Values.isFree(start)) {
+            return start;
+        }
+        Fields fields = Fields.of(start, Section.START, problems);
+        return fields == null ? null : fields.need("value", "190 g/kg");
     }
 
     private @Nullable Start profile(String what, Tree tree) {
@@ -126,23 +161,6 @@ final class SpeciesReader {
         return position == null || content == null
                 ? null
                 : new Start.Point(position.doubleValue(), content, tree.place());
-    }
-
-    private @Nullable Diffusivity diffusivity(String species, @Nullable Tree tree) {
-        String what = "the diffusivity of " + species;
-        if (!(tree instanceof Tree.Entries)) {
-            Quantity value = values.quantity(what, tree, Kind.DIFFUSIVITY);
-            return value == null ? null : problems.attempt(() -> new Diffusivity(value, null, null));
-        }
-        Fields fields = Fields.of(tree, Section.DIFFUSIVITY, problems);
-        if (fields == null) {
-            return null;
-        }
-        Quantity value = values.quantity(what, fields.need("value", "8e-10 m2/s"), Kind.DIFFUSIVITY);
-        Quantity at = values.quantity("at", fields.get("at"), Kind.TEMPERATURE);
-        Quantity energy = values.quantity("activation-energy", fields.get("activation-energy"), Kind.MOLAR_ENERGY);
-        boolean broken = (at == null && fields.has("at")) || (energy == null && fields.has("activation-energy"));
-        return value == null || broken ? null : problems.attempt(() -> new Diffusivity(value, at, energy));
     }
 
     @Nullable

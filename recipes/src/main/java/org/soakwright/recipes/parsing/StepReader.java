@@ -9,6 +9,7 @@ import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Air;
 import org.soakwright.recipes.model.Consistency;
 import org.soakwright.recipes.model.Declared;
+import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Liquor;
 import org.soakwright.recipes.model.LiquorPrice;
@@ -173,11 +174,11 @@ final class StepReader {
     }
 
     private @Nullable Overrides overrides(Fields fields) {
-        Map<String, Quantity> diffusivity = new LinkedHashMap<>();
+        Map<String, Diffusivities> diffusivity = new LinkedHashMap<>();
         Map<String, Partition> partition = new LinkedHashMap<>();
         boolean allRead = true;
         for (Tree.Entry entry : bySpecies(fields.get("diffusivity"))) {
-            Quantity value = values.quantity("the diffusivity of " + entry.key(), entry.value(), Kind.DIFFUSIVITY);
+            Diffusivities value = new DiffusivityReader(values).ofStep(entry.key(), entry.value());
             allRead &= value != null;
             if (value != null) {
                 diffusivity.put(entry.key(), value);

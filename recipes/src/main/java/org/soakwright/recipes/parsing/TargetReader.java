@@ -73,13 +73,12 @@ final class TargetReader {
         Limits limits = limits(fields);
         GradeScope grade = grade(fields.get("grade"));
         Reference after = reference("after", fields.get("after"), consistency::knownStep);
-        return species == null
-                        || reading == null
-                        || limits == null
-                        || grade == null
-                        || (after == null && fields.has("after"))
+        Quantity share = values.quantity("share", fields.get("share"), Kind.FRACTION);
+        boolean broken = (after == null && fields.has("after")) || (share == null && fields.has("share"));
+        return species == null || reading == null || limits == null || grade == null || broken
                 ? null
-                : problems.attempt(() -> new Target.OfPieces(fields.place(), species, reading, limits, grade, after));
+                : problems.attempt(
+                        () -> new Target.OfPieces(fields.place(), species, reading, limits, grade, after, share));
     }
 
     private @Nullable Target ofLiquor(@Nullable Fields fields) {

@@ -10,6 +10,7 @@ import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Content;
 import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Spread;
 import org.soakwright.recipes.model.Word;
 import org.soakwright.recipes.text.Kind;
 import org.soakwright.recipes.text.Measurement;
@@ -37,8 +38,7 @@ final class Values {
             return leaf;
         }
         if (tree instanceof Tree.Entries entries) {
-            boolean free = entries.entries().stream().anyMatch(entry -> FREE.contains(entry.key()));
-            if (free) {
+            if (isFree(entries)) {
                 problems.add(
                         tree.place(),
                         what + ": free values other than time are not computed yet by this version; write a fixed one"
@@ -58,6 +58,11 @@ final class Values {
         return null;
     }
 
+    /** Whether the keys leave the value to the planner. */
+    static boolean isFree(Tree.Entries entries) {
+        return entries.entries().stream().anyMatch(entry -> FREE.contains(entry.key()));
+    }
+
     @Nullable
     Quantity quantity(String what, @Nullable Tree tree, Kind kind) {
         return quantity(what, tree, List.of(kind));
@@ -73,6 +78,13 @@ final class Values {
     @Nullable
     Quantity checked(@Nullable Quantity quantity, UnaryOperator<Quantity> check) {
         return quantity == null ? null : problems.attempt(() -> check.apply(quantity));
+    }
+
+    /** How much something differs from piece to piece, under the name of its key. */
+    @Nullable
+    Spread spread(String key, @Nullable Tree tree) {
+        Quantity cv = quantity(key, tree, Kind.FRACTION);
+        return cv == null ? null : problems.attempt(() -> Spread.of("`" + key + "`", cv));
     }
 
     @Nullable

@@ -15,8 +15,7 @@ class LotTest {
     private static final Place HERE = new Place("f", 1, 1);
 
     private static Grade sphere(String name, String millimetres, double share) {
-        return new Grade(
-                HERE, name, OneAxisShape.SPHERE, Given.quantity(millimetres, "mm", Kind.LENGTH), Faces.BOTH, share);
+        return Given.grade(name, Shape.SPHERE, share, Given.side(Dimension.DIAMETER, millimetres));
     }
 
     private static Lot lot(Amount amount, @Nullable String density, Grade... grades) {
@@ -61,9 +60,9 @@ class LotTest {
     @Test
     void theCoreOfASlabSealedOnOneSideIsAtThatSide() {
         Quantity size = Given.quantity("18", "mm", Kind.LENGTH);
-        assertEquals(0.018, new Grade(HERE, "a", OneAxisShape.SLAB, size, Faces.ONE, 1).depth());
-        assertEquals(0.009, new Grade(HERE, "a", OneAxisShape.SLAB, size, Faces.BOTH, 1).depth());
-        assertThrows(Unsound.class, () -> new Grade(HERE, "a", OneAxisShape.CYLINDER, size, Faces.ONE, 1));
+        assertEquals(0.018, new Side(Dimension.THICKNESS, size, Faces.ONE).depth());
+        assertEquals(0.009, new Side(Dimension.THICKNESS, size, Faces.BOTH).depth());
+        assertThrows(Unsound.class, () -> new Side(Dimension.DIAMETER, size, Faces.ONE));
     }
 
     @Test

@@ -126,7 +126,7 @@ class RecipeTest {
         Reference salt = new Reference("salt", HERE);
         assertThrows(
                 Unsound.class,
-                () -> new Target.OfPieces(HERE, salt, Reading.CORE, limits, new GradeScope.WholeLot(), null));
+                () -> new Target.OfPieces(HERE, salt, Reading.CORE, limits, new GradeScope.WholeLot(), null, null));
     }
 
     @Test

@@ -4,7 +4,7 @@ package org.soakwright.solver.chain;
 final class Adjoint {
     private Adjoint() {}
 
-    static Sensitivity of(Course course, Probe probe, int stage) {
+    static Sensitivity of(WaveCourse course, Probe probe, int stage) {
         double[] bySeconds = new double[stage + 1];
         double[] byContent = new double[stage + 1];
         double[] byFeed = new double[stage + 1];

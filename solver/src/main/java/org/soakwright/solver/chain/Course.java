@@ -1,179 +1,52 @@
 package org.soakwright.solver.chain;
 
-import java.util.Arrays;
-
 /**
  * A chain followed for one choice of durations. Readings can be taken at the end of every stage, with their error and their
- * derivatives by every duration (one backward pass, the adjoint).
+ * derivatives by every duration.
  */
-public final class Course {
-    /** Rounding of one coefficient, as a multiple of the machine's precision: measured below 10, bounded here by 32. */
-    private static final double ROUNDING = 32 * 0x1p-53;
-
-    /** What the modes left out keep, as a share of what enters the stage: exp(-40), with room for their readings. */
-    private static final double LEFT_OUT = 4e-17;
-
-    private final Chain chain;
-    private final double[] seconds;
-    private final int[] count;
-    private final double[][] decay;
-    private final double[][] end;
-    private final double[] poured;
-    private final double[] liquor;
-    private final double[] error;
-    private final double[][] places;
-
-    Course(Chain chain, double[] seconds) {
-        int stages = seconds.length;
-        if (stages == 0 || stages > chain.size()) {
-            throw new IllegalArgumentException(
-                    "durations must be given for 1 to " + chain.size() + " stages, found " + stages);
-        }
-        this.chain = chain;
-        this.seconds = seconds;
-        count = new int[stages];
-        decay = new double[stages][];
-        end = new double[stages][];
-        poured = new double[stages];
-        liquor = new double[stages];
-        error = new double[stages];
-        places = new double[stages][];
-        double[] state = new double[0];
-        double clinging = 0;
-        double clingingError = 0;
-        double beforeNorm = 0;
-        for (int k = 0; k < stages; k++) {
-            double t = seconds[k];
-            if (!(t > 0) || Double.isInfinite(t)) {
-                throw new IllegalArgumentException("duration of stage " + k + " must be above 0, found " + t + " s");
-            }
-            Link link = chain.link(k);
-            int n = link.needed(t, k);
-            count[k] = n;
-            state = link.begin(n, state, state.length, clinging);
-            double entered = (k == 0 ? 0 : error[k - 1] * Math.sqrt(link.ratio))
-                    + link.rootVolume() * link.mixed * clingingError
-                    + ownError(link, n, state)
-                    + LEFT_OUT * link.mostEntering(beforeNorm, clinging);
-            beforeNorm = Math.sqrt(Link.dot(state, state, n));
-            poured[k] = link.stage.wets() ? (1 - link.mixed) * link.fresh + link.mixed * clinging : clinging;
-            double[] factor = new double[n];
-            double[] after = new double[n];
-            double blurred = 0;
-            for (int m = 0; m < n; m++) {
-                double exponent = link.modes.rate(m) * t;
-                factor[m] = Math.exp(-exponent);
-                after[m] = state[m] * factor[m];
-                // A rate is known to a few units in the last place; what that leaves of the decay grows with its
-                // exponent.
-                double blur = (1 + 0.25 * exponent) * after[m];
-                blurred += blur * blur;
-            }
-            decay[k] = factor;
-            end[k] = after;
-            // What was wrong at the beginning decays at least as the slowest mode does.
-            error[k] = entered * factor[0] + ROUNDING * Math.sqrt(blurred);
-            state = after;
-            clinging = liquorAtEnd(link, n, after, clinging);
-            liquor[k] = clinging;
-            if (link.stage.wets()) {
-                double rootVolume = link.rootVolume();
-                clingingError = rootVolume == 0 ? 0 : error[k] / rootVolume;
-            }
-        }
-    }
-
-    private static double ownError(Link link, int count, double[] state) {
-        return (link.defect(count) + ROUNDING) * Math.sqrt(Link.dot(state, state, count));
-    }
-
-    private static double liquorAtEnd(Link link, int count, double[] after, double before) {
-        Surroundings around = link.stage.surroundings();
-        if (around instanceof Surroundings.Vessel) {
-            double sum = link.offset;
-            for (int m = 0; m < count; m++) {
-                sum += after[m] * link.modes.liquor(m);
-            }
-            return sum;
-        }
-        return around instanceof Surroundings.Plenty ? link.offset : before;
-    }
-
+public abstract sealed class Course permits WaveCourse, LaunchCourse, ProductCourse, RitzCourse {
     /** Number of stages followed. */
-    public int size() {
-        return seconds.length;
-    }
+    public abstract int size();
 
     /** Modes evaluated in a stage. */
-    public int modes(int stage) {
-        return count[stage];
-    }
+    public abstract int modes(int stage);
 
     /** A reading at the end of a stage, from 0. */
-    public Reading read(Probe probe, int stage) {
-        int modes = 0;
-        for (int k = 0; k <= stage; k++) {
-            modes += count[k];
-        }
-        return new Reading(value(probe, stage), error(probe, stage), modes, Reading.Method.MODES);
-    }
+    public abstract Reading read(Probe probe, int stage);
 
     /** Content of the liquor at the beginning of a stage, with what clung to the pieces mixed in; kg/m3. */
-    public double liquorAtStart(int stage) {
-        return poured[stage];
-    }
+    public abstract double liquorAtStart(int stage);
 
     /** The value alone of {@link #read}. */
-    public double value(Probe probe, int stage) {
-        if (probe instanceof Probe.Liquor) {
-            return liquor[stage];
-        }
-        if (probe instanceof Probe.Range range) {
-            return value(new Probe.Highest(range.grade()), stage) - value(new Probe.Lowest(range.grade()), stage);
-        }
-        Link link = chain.link(stage);
-        double theta = link.offset + Link.dot(row(probe, stage), end[stage], count[stage]);
-        return link.stage.partition() * theta;
-    }
+    public abstract double value(Probe probe, int stage);
 
     /**
-     * Contents along the depth of one grade's pieces at the end of a stage.
+     * Contents of one grade's pieces at the end of a stage, on the shortest way from the core to the surface.
      *
      * @param positions 0, the core or sealed face, to 1, the wetted surface
      * @return kg/m3 of piece, by position
      */
-    public double[] profile(int grade, int stage, double... positions) {
-        Link link = chain.link(stage);
-        double[][] rows = chain.samples(stage, grade, positions).of(count[stage]);
-        double[] contents = new double[positions.length];
-        for (int i = 0; i < positions.length; i++) {
-            double theta = link.offset + Link.dot(rows[i], end[stage], count[stage]);
-            contents[i] = link.stage.partition() * theta;
-        }
-        return contents;
-    }
+    public abstract double[] profile(int grade, int stage, double... positions);
 
-    /** Where the content is highest, from 0, the core, to 1, the surface. */
-    public double place(Probe.Highest probe, int stage) {
-        return place(2 * probe.grade(), stage, 1);
-    }
+    /**
+     * Contents on a cut through the core along two of a grade's sides at the end of a stage.
+     *
+     * @param first the side across, from 0
+     * @param second the side down, from 0, another one
+     * @param across positions along the first, 0, the core, to 1, the surface
+     * @param down positions along the second
+     * @return kg/m3 of piece, by position down, then across
+     */
+    public abstract double[][] section(int grade, int stage, int first, int second, double[] across, double[] down);
 
-    /** Where the content is lowest, from 0, the core, to 1, the surface. */
-    public double place(Probe.Lowest probe, int stage) {
-        return place(2 * probe.grade() + 1, stage, -1);
-    }
+    /** Where the content is highest: by side, from 0, the core, to 1, the surface. */
+    public abstract double[] place(Probe.Highest probe, int stage);
 
-    /** Searched for once: value, error and derivatives all ask. */
-    private double place(int slot, int stage, double sign) {
-        if (places[stage] == null) {
-            places[stage] = new double[2 * chain.lot().size()];
-            Arrays.fill(places[stage], Double.NaN);
-        }
-        if (Double.isNaN(places[stage][slot])) {
-            places[stage][slot] = chain.extrema(stage, slot / 2).place(end[stage], count[stage], sign);
-        }
-        return places[stage][slot];
-    }
+    /** Where the content is lowest: by side, from 0, the core, to 1, the surface. */
+    public abstract double[] place(Probe.Lowest probe, int stage);
+
+    /** Derivatives of a reading by durations and by the contents of all liquors. */
+    public abstract Sensitivity sensitivity(Probe probe, int stage);
 
     /**
      * Derivatives of a reading by the durations of all stages up to its own, kg/m3 per second. For extrema the place is held: by
@@ -181,92 +54,5 @@ public final class Course {
      */
     public double[] gradient(Probe probe, int stage) {
         return sensitivity(probe, stage).bySeconds();
-    }
-
-    /** Derivatives of a reading by durations and by the contents of all liquors. */
-    public Sensitivity sensitivity(Probe probe, int stage) {
-        if (probe instanceof Probe.Range range) {
-            return sensitivity(new Probe.Highest(range.grade()), stage)
-                    .minus(sensitivity(new Probe.Lowest(range.grade()), stage));
-        }
-        return Adjoint.of(this, probe, stage);
-    }
-
-    Link link(int stage) {
-        return chain.link(stage);
-    }
-
-    int count(int stage) {
-        return count[stage];
-    }
-
-    double[] decay(int stage) {
-        return decay[stage];
-    }
-
-    double[] end(int stage) {
-        return end[stage];
-    }
-
-    /** The functional that the reading is, on the coefficients at the end of the stage; theta, without the offset. */
-    double[] row(Probe probe, int stage) {
-        Link link = chain.link(stage);
-        int n = count[stage];
-        double[] row = new double[n];
-        if (probe instanceof Probe.Mean mean) {
-            for (int m = 0; m < n; m++) {
-                row[m] = link.modes.mean(mean.grade(), m);
-            }
-        } else if (probe instanceof Probe.LotMean) {
-            double whole = 0;
-            for (int j = 0; j < chain.lot().size(); j++) {
-                whole += link.modes.capacity(j);
-            }
-            for (int m = 0; m < n; m++) {
-                row[m] = link.modes.uniform(m) / whole;
-            }
-        } else if (probe instanceof Probe.Liquor) {
-            for (int m = 0; m < n; m++) {
-                row[m] = link.modes.liquor(m);
-            }
-        } else {
-            int grade;
-            double x;
-            if (probe instanceof Probe.At at) {
-                grade = at.grade();
-                x = at.position();
-            } else if (probe instanceof Probe.Surface surface) {
-                grade = surface.grade();
-                x = 1;
-            } else if (probe instanceof Probe.Highest highest) {
-                grade = highest.grade();
-                x = place(highest, stage);
-            } else if (probe instanceof Probe.Lowest lowest) {
-                grade = lowest.grade();
-                x = place(lowest, stage);
-            } else {
-                throw new IllegalArgumentException("no single functional reads " + probe);
-            }
-            for (int m = 0; m < n; m++) {
-                row[m] = link.modes.at(grade, m, x);
-            }
-        }
-        return row;
-    }
-
-    private double error(Probe probe, int stage) {
-        Link link = chain.link(stage);
-        double scale = link.stage.partition();
-        if (probe instanceof Probe.Liquor) {
-            if (!(link.stage.surroundings() instanceof Surroundings.Vessel)) {
-                return stage == 0 || link.stage.wets() ? 0 : error(probe, stage - 1);
-            }
-            scale = 1;
-        }
-        if (probe instanceof Probe.Range range) {
-            return error(new Probe.Highest(range.grade()), stage) + error(new Probe.Lowest(range.grade()), stage);
-        }
-        double[] row = row(probe, stage);
-        return scale * (error[stage] * Math.sqrt(Link.dot(row, row, count[stage])) + ROUNDING * Math.abs(link.offset));
     }
 }

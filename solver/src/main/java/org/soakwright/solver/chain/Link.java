@@ -38,17 +38,10 @@ final class Link {
         this.mixed = mixed;
         this.ratio = ratio;
         this.entry = entry;
-        Surroundings around = stage.surroundings();
-        if (around instanceof Surroundings.Vessel vessel) {
-            fresh = vessel.content();
-            offset = vessel.flow() > 0 ? vessel.feed() : fresh;
-        } else if (around instanceof Surroundings.Plenty plenty) {
-            fresh = plenty.content();
-            offset = fresh;
-        } else {
-            fresh = 0;
-            offset = around instanceof Surroundings.Air air ? air.equilibrium() : 0;
-        }
+        offset = stage.offset();
+        fresh = stage.surroundings() instanceof Surroundings.Vessel vessel
+                ? vessel.content()
+                : stage.surroundings() instanceof Surroundings.Plenty ? offset : 0;
     }
 
     /** How many modes matter after so long: all that {@link Chain#DECAYED} leaves, and each grade's slowest. */

@@ -8,13 +8,13 @@ import org.soakwright.solver.stage.Modes;
 /** The pieces as loaded, in the modes of the first stage; found as far as it is asked for. */
 final class Loading {
     private final List<Grade> lot;
-    private final Start start;
+    private final List<Start> starts;
     private final Modes modes;
     private double[] coefficient = new double[0];
 
-    Loading(List<Grade> lot, Start start, Modes modes) {
+    Loading(List<Grade> lot, List<Start> starts, Modes modes) {
         this.lot = lot;
-        this.start = start;
+        this.starts = starts;
         this.modes = modes;
     }
 
@@ -33,31 +33,19 @@ final class Loading {
 
     /** Largest theta anywhere. */
     double most() {
-        double content = start instanceof Start.Uniform uniform
-                ? uniform.content()
-                : ((Start.Polyline) start)
-                        .points().stream()
-                                .mapToDouble(Start.Point::content)
-                                .max()
-                                .orElse(0);
-        return content / modes.conditions().partition();
+        return starts.stream().mapToDouble(Start::most).max().orElseThrow()
+                / modes.conditions().partition();
     }
 
     private double of(int mode) {
         double partition = modes.conditions().partition();
-        if (start instanceof Start.Uniform uniform) {
-            return uniform.content() / partition * modes.uniform(mode);
-        }
         double sum = 0;
         for (int j = 0; j < lot.size(); j++) {
-            double amplitude = modes.amplitude(j, mode);
-            if (amplitude != 0) {
-                Grade grade = lot.get(j);
-                sum += modes.capacity(j)
-                        * amplitude
-                        * Projection.mean(start, grade.axis(), modes.frequency(j, mode))
-                        / partition;
-            }
+            double mean = starts.get(j) instanceof Start.Uniform uniform
+                    ? uniform.content() * modes.mean(j, mode)
+                    : modes.amplitude(j, mode)
+                            * Projection.mean(starts.get(j), lot.get(j).axis(), modes.frequency(j, mode));
+            sum += modes.capacity(j) * mean / partition;
         }
         return sum;
     }

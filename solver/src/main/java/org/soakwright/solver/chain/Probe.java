@@ -4,6 +4,31 @@ import org.soakwright.solver.Require;
 
 /** What can be read at the end of a stage: contents of pieces in kg/m3 of piece, of the liquor in kg/m3. */
 public sealed interface Probe {
+    /** The grade read; -1 where it is not one grade. */
+    default int grade() {
+        return -1;
+    }
+
+    /** The same reading of another grade. */
+    default Probe of(int other) {
+        if (this instanceof At at) {
+            return new At(other, at.position);
+        }
+        if (this instanceof Surface) {
+            return new Surface(other);
+        }
+        if (this instanceof Highest) {
+            return new Highest(other);
+        }
+        if (this instanceof Lowest) {
+            return new Lowest(other);
+        }
+        if (this instanceof Range) {
+            return new Range(other);
+        }
+        return new Mean(other);
+    }
+
     /** Mean over one grade's pieces. */
     record Mean(int grade) implements Probe {}
 

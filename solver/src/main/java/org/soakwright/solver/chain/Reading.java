@@ -13,6 +13,10 @@ public record Reading(double value, double error, int modes, Method method) {
     /** Representations of the profile. */
     public enum Method {
         /** Superposed modes, projected exactly from stage to stage. */
-        MODES
+        MODES,
+        /** Sums of products of one-axis solutions, one for each new surrounding. */
+        PRODUCTS,
+        /** Products of polynomial modes of the sides, with the liquor by an inverse Laplace transform. */
+        POLYNOMIALS
     }
 }

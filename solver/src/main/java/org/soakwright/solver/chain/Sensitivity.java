@@ -27,6 +27,34 @@ public final class Sensitivity {
         return byFeed.clone();
     }
 
+    /** Of a liquor that nothing changes: of its own content, the one last met. */
+    static Sensitivity ofStillLiquor(Chain chain, int stage) {
+        double[] byContent = new double[stage + 1];
+        for (int k = stage; k >= 0; k--) {
+            if (chain.stage(k).wets()) {
+                byContent[k] = 1;
+                break;
+            }
+        }
+        return new Sensitivity(new double[stage + 1], byContent, new double[stage + 1]);
+    }
+
+    Sensitivity times(double factor) {
+        return new Sensitivity(times(bySeconds, factor), times(byContent, factor), times(byFeed, factor));
+    }
+
+    private static double[] times(double[] a, double factor) {
+        double[] product = a.clone();
+        for (int i = 0; i < product.length; i++) {
+            product[i] *= factor;
+        }
+        return product;
+    }
+
+    Sensitivity plus(Sensitivity other) {
+        return minus(other.times(-1));
+    }
+
     Sensitivity minus(Sensitivity other) {
         return new Sensitivity(
                 minus(bySeconds, other.bySeconds), minus(byContent, other.byContent), minus(byFeed, other.byFeed));

@@ -2,6 +2,8 @@ package org.soakwright.solver.chain;
 
 import org.soakwright.solver.Require;
 import org.soakwright.solver.shape.Grain;
+import org.soakwright.solver.stage.Bath;
+import org.soakwright.solver.stage.Conditions;
 import org.soakwright.solver.stage.Surface;
 
 /**
@@ -40,6 +42,32 @@ public record Stage(
     /** Whether the pieces leave this stage with liquor of its own. */
     public boolean wets() {
         return wets(surroundings);
+    }
+
+    /** What decides the stage's modes, when so much liquor, m3, clings to the pieces from before. */
+    Conditions conditions(double clinging) {
+        Bath bath = new Bath.Unlimited();
+        if (surroundings instanceof Surroundings.Vessel vessel) {
+            double volume = vessel.flow() > 0 ? vessel.volume() : vessel.volume() + clinging;
+            bath = new Bath.Vessel(volume, vessel.flow());
+        }
+        return new Conditions(diffusivity, partition, surface, bath, grain);
+    }
+
+    /** Share of what clings in the liquor that the stage starts with. */
+    double mixed(double clinging) {
+        return surroundings instanceof Surroundings.Vessel vessel ? clinging / (vessel.volume() + clinging) : 0;
+    }
+
+    /** Content of the surroundings from which the pieces are counted, kg/m3: of the feed, of the liquor, of the equilibrium in air. */
+    double offset() {
+        if (surroundings instanceof Surroundings.Vessel vessel) {
+            return vessel.flow() > 0 ? vessel.feed() : vessel.content();
+        }
+        if (surroundings instanceof Surroundings.Plenty plenty) {
+            return plenty.content();
+        }
+        return surroundings instanceof Surroundings.Air air ? air.equilibrium() : 0;
     }
 
     private static boolean wets(Surroundings surroundings) {

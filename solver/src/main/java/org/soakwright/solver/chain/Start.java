@@ -5,6 +5,9 @@ import org.soakwright.solver.Require;
 
 /** The profile with which the pieces begin. */
 public sealed interface Start {
+    /** The largest content anywhere, kg/m3. */
+    double most();
+
     /**
      * The same throughout.
      *
@@ -14,6 +17,11 @@ public sealed interface Start {
         public Uniform {
             Require.notNegative("start content", content, "kg/m3");
         }
+
+        @Override
+        public double most() {
+            return content;
+        }
     }
 
     /**
@@ -22,6 +30,23 @@ public sealed interface Start {
      * @param points from position 0, the core or sealed face, to position 1, the wetted surface, in rising order
      */
     record Polyline(List<Point> points) implements Start {
+        @Override
+        public double most() {
+            return points.stream().mapToDouble(Point::content).max().orElseThrow();
+        }
+
+        /** kg/m3 at a position. */
+        double at(double position) {
+            int i = 1;
+            while (i < points.size() - 1 && position > points.get(i).position()) {
+                i++;
+            }
+            Point from = points.get(i - 1);
+            Point to = points.get(i);
+            double part = (position - from.position()) / (to.position() - from.position());
+            return from.content() + part * (to.content() - from.content());
+        }
+
         public Polyline {
             points = List.copyOf(points);
             int last = points.size() - 1;

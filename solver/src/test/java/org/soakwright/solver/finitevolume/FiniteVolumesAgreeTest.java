@@ -129,7 +129,7 @@ class FiniteVolumesAgreeTest {
                     FiniteVolumes.extrapolated(recipe, CELLS).get(1).profiles().get(0);
             Course course = follow(recipe);
             Probe.Highest highest = new Probe.Highest(0);
-            double place = course.place(highest, 1);
+            double place = course.place(highest, 1)[0];
             assertTrue(place > 0.3 && place < 0.9, "inside, not at " + place);
             assertEquals(Mesh.place(profile.highestNode()), place, 0.03);
             assertTrue(course.value(highest, 1) > 1.05 * course.value(new Probe.At(0, 1), 1));
@@ -153,8 +153,8 @@ class FiniteVolumesAgreeTest {
                 note(worst, "highest", profile.highest(), course.value(new Probe.Highest(j), k), inPieces);
                 note(worst, "lowest", profile.lowest(), course.value(new Probe.Lowest(j), k), inPieces);
                 readings += 5;
-                inside += isInside(course.place(new Probe.Highest(j), k)) ? 1 : 0;
-                inside += isInside(course.place(new Probe.Lowest(j), k)) ? 1 : 0;
+                inside += isInside(course.place(new Probe.Highest(j), k)[0]) ? 1 : 0;
+                inside += isInside(course.place(new Probe.Lowest(j), k)[0]) ? 1 : 0;
             }
             note(worst, "liquors", end.liquor(), course.value(new Probe.Liquor(), k), end.drive());
             readings++;

@@ -62,7 +62,7 @@ class ExtremaTest {
             Course course = saltedThenRinsed(axis).follow(soak, rinse);
             double high = course.value(new Probe.Highest(0), 1);
             double low = course.value(new Probe.Lowest(0), 1);
-            double place = course.place(new Probe.Highest(0), 1);
+            double place = course.place(new Probe.Highest(0), 1)[0];
             inside += place > 0 && place < 1 ? 1 : 0;
             nearCore += place > 0 && place < 0.03 ? 1 : 0;
             double seenHigh = Double.NEGATIVE_INFINITY;

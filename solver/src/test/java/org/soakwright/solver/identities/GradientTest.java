@@ -62,7 +62,7 @@ class GradientTest {
                     continue;
                 }
                 Course course = chain.follow(Timed.seconds(drawn.steps));
-                double place = course.place(new Probe.Highest(0), last);
+                double place = course.place(new Probe.Highest(0), last)[0];
                 inside += place > 0 && place < 1 ? 1 : 0;
                 tally.note(byDuration(chain, drawn, new Probe.Highest(0), which));
                 tally.note(byDuration(chain, drawn, new Probe.Lowest(0), which));
@@ -152,7 +152,8 @@ class GradientTest {
             double[] changed = Timed.seconds(drawn.steps);
             changed[which] *= 1 + i * CHANGE;
             Course course = chain.follow(changed);
-            double place = highest ? course.place(new Probe.Highest(0), last) : course.place(new Probe.Lowest(0), last);
+            double place =
+                    highest ? course.place(new Probe.Highest(0), last)[0] : course.place(new Probe.Lowest(0), last)[0];
             least = Math.min(least, place);
             most = Math.max(most, place);
         }

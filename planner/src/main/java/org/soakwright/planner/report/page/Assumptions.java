@@ -14,9 +14,9 @@ import org.soakwright.recipes.model.Faces;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Medium;
-import org.soakwright.recipes.model.OneAxisShape;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Shape;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Start;
 import org.soakwright.recipes.model.Step;
@@ -55,15 +55,15 @@ final class Assumptions {
     }
 
     private static String shape(Grade grade) {
-        if (grade.shape() == OneAxisShape.SLAB) {
-            return "slabs open on " + (grade.faces() == Faces.ONE ? "one face" : "both faces")
+        if (grade.shape() == Shape.SLAB) {
+            return "slabs open on " + (grade.shortest().faces() == Faces.ONE ? "one face" : "both faces")
                     + ", their edges neglected";
         }
-        return grade.shape() == OneAxisShape.CYLINDER ? "long cylinders, their ends neglected" : "spheres";
+        return grade.shape() == Shape.CYLINDER ? "long cylinders, their ends neglected" : "spheres";
     }
 
     private void species(Species species) {
-        Diffusivity diffusivity = species.diffusivity();
+        Diffusivity diffusivity = species.diffusivity().all().get(0);
         String name = species.name();
         String start = species.start() instanceof Start.Uniform uniform
                 ? uniform.content() + " everywhere in the piece at the start"

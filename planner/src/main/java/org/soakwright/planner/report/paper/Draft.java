@@ -90,8 +90,9 @@ final class Draft {
 
     private static String grade(Grade grade) {
         String share = grade.share() < 1 ? Figures.made(grade.share() * 100) + " % " : "";
-        String sealed = grade.faces() == Faces.ONE ? " with one face sealed" : "";
-        return share + grade.name() + ", " + grade.shape().word() + " of " + grade.size() + sealed;
+        String sealed = grade.shortest().faces() == Faces.ONE ? " with one face sealed" : "";
+        return share + grade.name() + ", " + grade.shape().word() + " of "
+                + grade.shortest().size() + sealed;
     }
 
     private List<String> timing() {

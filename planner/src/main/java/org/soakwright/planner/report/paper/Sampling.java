@@ -12,9 +12,9 @@ import org.soakwright.planner.batch.TargetState;
 import org.soakwright.recipes.model.Faces;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.GradeScope;
-import org.soakwright.recipes.model.OneAxisShape;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Reference;
+import org.soakwright.recipes.model.Shape;
 import org.soakwright.recipes.model.Target;
 
 /** How to take what the targets speak of. */
@@ -106,15 +106,14 @@ final class Sampling {
 
     private static String core(Grade grade) {
         return switch (grade.shape()) {
-            case SLAB -> grade.faces() == Faces.ONE ? "the sealed face" : "the middle of the thickness";
+            case SLAB -> grade.shortest().faces() == Faces.ONE ? "the sealed face" : "the middle of the thickness";
             case CYLINDER -> "around the axis";
-            case SPHERE -> "the centre";
+            case SPHERE, SHORT_CYLINDER, BRICK -> "the centre";
         };
     }
 
     private static String layers(Grade grade) {
-        String through =
-                grade.shape() == OneAxisShape.SLAB ? "through the whole thickness" : "from the surface to the core";
+        String through = grade.shape() == Shape.SLAB ? "through the whole thickness" : "from the surface to the core";
         return "Cut a plug " + through + " into thin layers";
     }
 }

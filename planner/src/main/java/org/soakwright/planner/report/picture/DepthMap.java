@@ -9,8 +9,8 @@ import java.util.ArrayList;
 import java.util.List;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.recipes.model.Grade;
-import org.soakwright.recipes.model.OneAxisShape;
 import org.soakwright.recipes.model.Reading;
+import org.soakwright.recipes.model.Shape;
 
 /** One species in one grade: the clock across, the depth into the piece down, the content as a shade; core, mean and surface below. */
 final class DepthMap {
@@ -120,7 +120,7 @@ final class DepthMap {
     }
 
     private boolean surfaceIsFace() {
-        return grade.shape() == OneAxisShape.SLAB;
+        return grade.shape() == Shape.SLAB;
     }
 
     /** Shares of the shade scale by column of the image and by row, the surface first. */

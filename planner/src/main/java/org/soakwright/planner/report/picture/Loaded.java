@@ -36,6 +36,7 @@ final class Loaded {
             case SLAB -> 0;
             case CYLINDER -> 1;
             case SPHERE -> 2;
+            case SHORT_CYLINDER, BRICK -> throw new IllegalStateException("a profile belongs to one axis");
         };
         List<Start.Point> points = ((Start.Profile) start).points();
         double sum = 0;

@@ -94,9 +94,9 @@ final class Profiles {
 
     private static String core(Grade grade) {
         return switch (grade.shape()) {
-            case SLAB -> grade.faces() == Faces.ONE ? "sealed face" : "middle";
+            case SLAB -> grade.shortest().faces() == Faces.ONE ? "sealed face" : "middle";
             case CYLINDER -> "axis";
-            case SPHERE -> "centre";
+            case SPHERE, SHORT_CYLINDER, BRICK -> "centre";
         };
     }
 

@@ -1,0 +1,117 @@
+package org.soakwright.solver.chain;
+
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
+import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.stage.Conditions;
+
+/**
+ * A lot with pieces of several sides that share a liquor. Every grade is a product of its sides' polynomial modes; their space is cut as
+ * finely as the shortest stage asks, so that short and long stages cost about the same. The polynomials' degree decides the error, which a
+ * second following with a lower degree shows.
+ */
+final class RitzChain extends Chain {
+    /** Within 1e-8 of the driving difference, most readings far within; measured in the tests of this package. */
+    private static final int FINE = 13;
+
+    /** Some 1e-4, for pictures. */
+    private static final int ROUGH = 6;
+
+    /** How far the degree goes down to show the error. */
+    private static final int STEP = 2;
+
+    /** Spaces kept for later: each belongs to shortest stages within a factor of sixteen. */
+    private static final int MOST_SPACES = 6;
+
+    private final List<Grade> lot;
+    private final List<Start> starts;
+    private final List<Stage> stages;
+    private final int degree;
+    private final double[] mixed;
+    private final Conditions[] conditions;
+    private final Map<List<Integer>, Space> spaces = new LinkedHashMap<>(8, 0.75f, true) {
+        private static final long serialVersionUID = 1;
+
+        @Override
+        protected boolean removeEldestEntry(Map.Entry<List<Integer>, Space> eldest) {
+            return size() > MOST_SPACES;
+        }
+    };
+    private @Nullable RitzChain lower;
+    private @Nullable RitzChain sketch;
+
+    RitzChain(List<Grade> lot, List<Start> starts, List<Stage> stages) {
+        this(lot, starts, stages, FINE);
+    }
+
+    RitzChain(List<Grade> lot, List<Start> starts, List<Stage> stages, int degree) {
+        this.lot = lot;
+        this.starts = starts;
+        this.stages = stages;
+        this.degree = degree;
+        mixed = new double[stages.size()];
+        conditions = new Conditions[stages.size()];
+        double clinging = 0;
+        for (int k = 0; k < mixed.length; k++) {
+            mixed[k] = stages.get(k).mixed(clinging);
+            conditions[k] = stages.get(k).conditions(clinging);
+            clinging = stages.get(k).wets() ? stages.get(k).clinging() : clinging;
+        }
+    }
+
+    @Override
+    public List<Grade> lot() {
+        return lot;
+    }
+
+    @Override
+    public int size() {
+        return stages.size();
+    }
+
+    @Override
+    public Stage stage(int index) {
+        return stages.get(index);
+    }
+
+    List<Start> starts() {
+        return starts;
+    }
+
+    int degree() {
+        return degree;
+    }
+
+    double mixed(int stage) {
+        return mixed[stage];
+    }
+
+    Conditions conditions(int stage) {
+        return conditions[stage];
+    }
+
+    @Override
+    public RitzCourse follow(double... seconds) {
+        requireDurations(seconds, stages.size());
+        List<Integer> fineness = Space.fineness(this, seconds);
+        return new RitzCourse(this, spaces.computeIfAbsent(fineness, key -> new Space(this, key)), seconds.clone());
+    }
+
+    /** The same with a lower degree: what it differs by is more than the error of this one. */
+    RitzChain lower() {
+        if (lower == null) {
+            lower = new RitzChain(lot, starts, stages, degree - STEP);
+        }
+        return lower;
+    }
+
+    @Override
+    public Chain sketch() {
+        if (sketch == null) {
+            sketch = new RitzChain(lot, starts, stages, ROUGH);
+        }
+        return sketch;
+    }
+}

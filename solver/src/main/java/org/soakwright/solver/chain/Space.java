@@ -1,0 +1,197 @@
+package org.soakwright.solver.chain;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
+import org.soakwright.solver.shape.Axis;
+import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.shape.Side;
+import org.soakwright.solver.stage.Bath;
+import org.soakwright.solver.stage.Bathing;
+import org.soakwright.solver.stage.Conditions;
+import org.soakwright.solver.stage.Mesh;
+import org.soakwright.solver.stage.Product;
+import org.soakwright.solver.stage.Ritz;
+
+/** Everything of a {@link RitzChain} that belongs to one cutting of its pieces' sides into elements; found when first asked for. */
+final class Space {
+    /** Shortest stages within this factor share a space. */
+    private static final double FACTOR = 16;
+
+    /** Unknowns of all grades together that a stage is given, some ten milliseconds. */
+    private static final int MOST_UNKNOWNS = 30_000;
+
+    /** Passages prepared and kept: repeated equal fills and gradients ask again. */
+    private static final int MOST_PASSAGES = 32;
+
+    private final RitzChain chain;
+    private final List<List<Mesh>> meshes = new ArrayList<>();
+    private final Map<Wanted, Ritz> sides = new HashMap<>();
+    private final Map<Conditions, List<Product>> products = new HashMap<>();
+    private final Map<Crossing, List<double[][]>> carries = new HashMap<>();
+    private final Map<Passing, Bathing> passages = new HashMap<>();
+    private final Passed passed = new Passed();
+
+    private record Wanted(Axis axis, Mesh mesh, double biot) {}
+
+    private record Crossing(Conditions before, Conditions after, int grade) {}
+
+    private record Passing(Conditions conditions, double seconds) {}
+
+    /** The course last followed in this space: another with the same beginning starts where they part. */
+    static final class Passed {
+        @Nullable
+        RitzCourse course;
+    }
+
+    Space(RitzChain chain, List<Integer> fineness) {
+        this.chain = chain;
+        Map<List<Object>, Mesh> known = new HashMap<>();
+        int at = 0;
+        for (int j = 0; j < chain.lot().size(); j++) {
+            List<Mesh> ofGrade = new ArrayList<>();
+            double[] corners = chain.starts().get(j) instanceof Start.Polyline line
+                    ? line.points().stream().mapToDouble(Start.Point::position).toArray()
+                    : new double[0];
+            for (int i = 0; i < chain.lot().get(j).sides().size(); i++) {
+                int step = fineness.get(at++);
+                ofGrade.add(
+                        corners.length == 0
+                                ? known.computeIfAbsent(
+                                        List.of(step), key -> Mesh.of(Math.pow(FACTOR, step), chain.degree()))
+                                : Mesh.of(Math.pow(FACTOR, step), chain.degree(), corners));
+            }
+            meshes.add(ofGrade);
+        }
+    }
+
+    /**
+     * Of each side of each grade, the shortest stage's Fourier number in powers of the factor, rounded down. Where that asks for too many
+     * unknowns the finest sides are taken coarser: a short stage's own end is then less sharp, which its error says, and what
+     * comes after longer ones hardly suffers.
+     */
+    static List<Integer> fineness(RitzChain chain, double[] seconds) {
+        List<Integer> steps = new ArrayList<>(asked(chain, seconds));
+        while (unknowns(chain, steps) > MOST_UNKNOWNS && Collections.min(steps) < 0) {
+            int finest = Collections.min(steps);
+            steps.replaceAll(step -> step == finest ? finest + 1 : step);
+        }
+        return List.copyOf(steps);
+    }
+
+    private static double unknowns(RitzChain chain, List<Integer> steps) {
+        double sum = 0;
+        int at = 0;
+        for (Grade grade : chain.lot()) {
+            double product = 1;
+            for (int i = 0; i < grade.sides().size(); i++) {
+                product *= Mesh.of(Math.pow(FACTOR, steps.get(at++)), chain.degree())
+                        .size();
+            }
+            sum += product;
+        }
+        return sum;
+    }
+
+    private static List<Integer> asked(RitzChain chain, double[] seconds) {
+        List<Integer> steps = new ArrayList<>();
+        for (Grade grade : chain.lot()) {
+            for (int i = 0; i < grade.sides().size(); i++) {
+                double least = Double.POSITIVE_INFINITY;
+                for (int k = 0; k < seconds.length; k++) {
+                    least = Math.min(least, chain.conditions(k).pace(grade, i) * seconds[k]);
+                }
+                steps.add((int) Math.floor(Math.min(0, Math.log(least) / Math.log(FACTOR))));
+            }
+        }
+        return steps;
+    }
+
+    Passed passed() {
+        return passed;
+    }
+
+    List<Product> products(int stage) {
+        return products(chain.conditions(stage));
+    }
+
+    private List<Product> products(Conditions conditions) {
+        List<Product> known = products.get(conditions);
+        if (known == null) {
+            known = new ArrayList<>();
+            for (int j = 0; j < chain.lot().size(); j++) {
+                known.add(new Product(chain.lot().get(j), conditions, sides(j, conditions)));
+            }
+            products.put(conditions, known);
+        }
+        return known;
+    }
+
+    private List<Ritz> sides(int grade, Conditions conditions) {
+        List<Ritz> found = new ArrayList<>();
+        Grade pieces = chain.lot().get(grade);
+        for (int i = 0; i < pieces.sides().size(); i++) {
+            Side side = pieces.sides().get(i);
+            Wanted wanted = new Wanted(side.axis(), meshes.get(grade).get(i), conditions.biot(pieces, i));
+            found.add(sides.computeIfAbsent(wanted, key -> new Ritz(key.axis, key.mesh, key.biot)));
+        }
+        return found;
+    }
+
+    /** A matrix for each side of a grade, from the stage before to this one; the ratio of the partitions is in the first. */
+    List<double[][]> carry(int stage, int grade) {
+        Conditions before = chain.conditions(stage - 1);
+        Conditions after = chain.conditions(stage);
+        return carries.computeIfAbsent(new Crossing(before, after, grade), key -> {
+            List<double[][]> matrices = new ArrayList<>();
+            double ratio = before.partition() / after.partition();
+            List<Product> from = products(before);
+            List<Product> to = products(after);
+            for (int i = 0; i < chain.lot().get(grade).sides().size(); i++) {
+                double[][] matrix =
+                        to.get(grade).side(i).carryFrom(from.get(grade).side(i));
+                for (double[] row : matrix) {
+                    for (int n = 0; i == 0 && n < row.length; n++) {
+                        row[n] *= ratio;
+                    }
+                }
+                matrices.add(matrix);
+            }
+            return matrices;
+        });
+    }
+
+    /** A grade as loaded, theta in the modes of the first stage. */
+    double[] loaded(int grade) {
+        double partition = chain.conditions(0).partition();
+        Product product = products(0).get(grade);
+        if (chain.starts().get(grade) instanceof Start.Polyline line) {
+            return product.side(0).project(position -> line.at(position) / partition);
+        }
+        double content = ((Start.Uniform) chain.starts().get(grade)).content() / partition;
+        double[] theta = product.uniform().clone();
+        for (int n = 0; n < theta.length; n++) {
+            theta[n] *= content;
+        }
+        return theta;
+    }
+
+    /** Mean theta of a grade as loaded. */
+    double loadedMean(int grade) {
+        double partition = chain.conditions(0).partition();
+        return Projection.mean(chain.starts().get(grade), chain.lot().get(grade).axis(), 0) / partition;
+    }
+
+    Bathing bathing(int stage, double seconds) {
+        if (passages.size() >= MOST_PASSAGES) {
+            passages.clear();
+        }
+        Conditions conditions = chain.conditions(stage);
+        return passages.computeIfAbsent(
+                new Passing(conditions, seconds),
+                key -> new Bathing(products(conditions), (Bath.Vessel) conditions.bath(), seconds));
+    }
+}

@@ -1,0 +1,79 @@
+package org.soakwright.solver.chain;
+
+/**
+ * The highest or lowest place in a piece of several sides. A grid, denser towards the surface, finds the neighbourhood; windows of five
+ * points a side, halved about their best, narrow it down until the place is known to 1e-9 of each side, where the value is flat.
+ */
+final class Summit {
+    private static final double PLACE = 1e-9;
+    private static final int MOST_WINDOWS = 80;
+    private static final int GRID = 20;
+
+    private Summit() {}
+
+    /** Contents at all combinations of positions, the last side's running fastest. */
+    interface Body {
+        double[] grid(double[][] positions);
+    }
+
+    /** By side. */
+    static double[] place(Body body, int sides, double sign) {
+        double[][] positions = new double[sides][GRID + 1];
+        for (double[] side : positions) {
+            for (int i = 0; i <= GRID; i++) {
+                double fromSurface = (double) (GRID - i) / GRID;
+                side[i] = 1 - fromSurface * fromSurface;
+            }
+        }
+        double[] best = new double[sides];
+        double[] span = new double[sides];
+        int[] at = best(body.grid(positions), positions, sign);
+        for (int s = 0; s < sides; s++) {
+            double[] side = positions[s];
+            best[s] = side[at[s]];
+            span[s] = Math.max(
+                    at[s] > 0 ? side[at[s]] - side[at[s] - 1] : 0, at[s] < GRID ? side[at[s] + 1] - side[at[s]] : 0);
+        }
+        for (int i = 0; i < MOST_WINDOWS && widest(span) > PLACE; i++) {
+            double[][] window = new double[sides][5];
+            for (int s = 0; s < sides; s++) {
+                for (int p = 0; p < 5; p++) {
+                    // The middle first, so that it is kept where nothing is better.
+                    double step = p == 0 ? 0 : 0.5 * (p < 3 ? p - 3 : p - 2);
+                    window[s][p] = Math.min(1, Math.max(0, best[s] + step * span[s]));
+                }
+            }
+            at = best(body.grid(window), window, sign);
+            for (int s = 0; s < sides; s++) {
+                boolean edge = at[s] == 1 || at[s] == 4;
+                boolean stuck = window[s][at[s]] == best[s];
+                best[s] = window[s][at[s]];
+                span[s] *= edge && !stuck ? 1 : 0.5;
+            }
+        }
+        return best;
+    }
+
+    private static double widest(double[] spans) {
+        double widest = 0;
+        for (double span : spans) {
+            widest = Math.max(widest, span);
+        }
+        return widest;
+    }
+
+    private static int[] best(double[] values, double[][] positions, double sign) {
+        int found = 0;
+        for (int i = 1; i < values.length; i++) {
+            if (sign * values[i] > sign * values[found]) {
+                found = i;
+            }
+        }
+        int[] at = new int[positions.length];
+        for (int s = positions.length - 1; s >= 0; s--) {
+            at[s] = found % positions[s].length;
+            found /= positions[s].length;
+        }
+        return at;
+    }
+}
