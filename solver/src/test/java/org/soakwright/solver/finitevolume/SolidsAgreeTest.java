@@ -124,6 +124,13 @@ class SolidsAgreeTest {
 
     /** The same batch in the solver's own terms. */
     static Course follow(Batch batch) {
+        double[] seconds =
+                batch.phases().stream().mapToDouble(p -> p.step().seconds()).toArray();
+        return Chain.of(lot(batch), new Start.Uniform(batch.start()), stages(batch))
+                .follow(seconds);
+    }
+
+    static List<Grade> lot(Batch batch) {
         List<Grade> lot = new ArrayList<>();
         for (Solid solid : batch.lot()) {
             List<Side> sides = solid.edges().stream()
@@ -131,6 +138,10 @@ class SolidsAgreeTest {
                     .toList();
             lot.add(new Grade(sides, solid.volume(), solid.ease()));
         }
+        return lot;
+    }
+
+    static List<Stage> stages(Batch batch) {
         List<Stage> stages = new ArrayList<>();
         for (Phase phase : batch.phases()) {
             Step step = phase.step();
@@ -147,8 +158,6 @@ class SolidsAgreeTest {
             stages.add(new Stage(
                     step.diffusivity(), step.partition(), surface, around, step.clinging(), new Grain(phase.grain())));
         }
-        double[] seconds =
-                batch.phases().stream().mapToDouble(p -> p.step().seconds()).toArray();
-        return Chain.of(lot, new Start.Uniform(batch.start()), stages).follow(seconds);
+        return stages;
     }
 }
