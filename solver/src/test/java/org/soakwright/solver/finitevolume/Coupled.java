@@ -58,25 +58,37 @@ final class Coupled {
         Complex load = new Complex(mass * bath, 0);
         Complex diagonal = z.times(mass).plus(loss);
         for (Share share : shares) {
-            Complex given = Complex.ZERO;
-            Complex taken = Complex.ZERO;
-            for (int n = 0; n < share.rate.value.length; n++) {
-                double rate = share.rate.value[n];
-                Complex pull = z.plus(rate).reciprocal().times(rate * share.uniform.value[n]);
-                given = given.plus(pull.times(share.held.value[n]));
-                taken = taken.plus(pull.times(share.uniform.value[n]));
+            double[] rate = share.rate.value;
+            double[] uniform = share.uniform.value;
+            double[] held = share.held.value;
+            double givenRe = 0;
+            double givenIm = 0;
+            double takenRe = 0;
+            double takenIm = 0;
+            for (int n = 0; n < rate.length; n++) {
+                double re = z.re() + rate[n];
+                double pull = rate[n] * uniform[n] / (re * re + z.im() * z.im());
+                givenRe += pull * held[n] * re;
+                givenIm -= pull * held[n] * z.im();
+                takenRe += pull * uniform[n] * re;
+                takenIm -= pull * uniform[n] * z.im();
             }
-            load = load.plus(given.times(share.capacity));
-            diagonal = diagonal.plus(taken.times(z).times(share.capacity));
+            load = load.plus(new Complex(givenRe, givenIm).times(share.capacity));
+            diagonal = diagonal.plus(new Complex(takenRe, takenIm).times(z).times(share.capacity));
         }
         return load.times(diagonal.reciprocal());
     }
 
     private static void add(Share share, Complex z, Complex weight, Complex bath, double[] sum) {
+        Complex pulled = bath.times(weight);
         for (int n = 0; n < sum.length; n++) {
             double rate = share.rate.value[n];
-            Complex pulled = bath.times(rate * share.uniform.value[n]).plus(share.held.value[n]);
-            sum[n] += pulled.times(z.plus(rate).reciprocal()).times(weight).re();
+            double drawn = rate * share.uniform.value[n];
+            double re = z.re() + rate;
+            double square = re * re + z.im() * z.im();
+            double topRe = drawn * pulled.re() + share.held.value[n] * weight.re();
+            double topIm = drawn * pulled.im() + share.held.value[n] * weight.im();
+            sum[n] += (topRe * re + topIm * z.im()) / square;
         }
     }
 }

@@ -57,12 +57,22 @@ final class Tensor {
         double[] next = new double[outer * to * inner];
         for (int o = 0; o < outer; o++) {
             for (int r = 0; r < to; r++) {
+                double[] row = matrix[r];
                 int target = (o * to + r) * inner;
+                int source = o * from * inner;
+                if (inner == 1) {
+                    double sum = 0;
+                    for (int c = 0; c < from; c++) {
+                        sum += row[c] * value[source + c];
+                    }
+                    next[target] = sum;
+                    continue;
+                }
                 for (int c = 0; c < from; c++) {
-                    double factor = matrix[r][c];
-                    int source = (o * from + c) * inner;
+                    double factor = row[c];
+                    int start = source + c * inner;
                     for (int i = 0; i < inner; i++) {
-                        next[target + i] += factor * value[source + i];
+                        next[target + i] += factor * value[start + i];
                     }
                 }
             }
