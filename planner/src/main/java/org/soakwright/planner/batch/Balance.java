@@ -44,7 +44,7 @@ public record Balance(String species, List<Entry> sources, List<Entry> sinks, bo
         double[] seconds = run.seconds();
         List<Entry> sources = new ArrayList<>();
         List<Entry> sinks = new ArrayList<>();
-        double inside = volume * StartContent.of(recipe, species, new Probe.LotMean());
+        double inside = volume * StartContent.of(recipe, species, -1);
         sources.add(new Entry("pieces as loaded", inside));
         double[] brought = new double[recipe.steps().size()];
         double[] taken = new double[recipe.steps().size()];

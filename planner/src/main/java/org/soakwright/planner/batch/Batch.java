@@ -20,6 +20,7 @@ public final class Batch {
     private final Recipe recipe;
     private final List<Translation.Slot> slots;
     private final List<Chain> chains;
+    private final List<Classes> classes;
     private final int[] lastStage;
     private final Cost cost;
     private final List<Requirement> requirements;
@@ -38,6 +39,9 @@ public final class Batch {
         Warming.of(recipe);
         this.recipe = recipe;
         this.chains = chains;
+        classes = recipe.species().stream()
+                .map(species -> Classes.of(recipe, species))
+                .toList();
         slots = new Translation(recipe).slots();
         lastStage = new int[recipe.steps().size()];
         for (int k = 0; k < slots.size(); k++) {
@@ -110,12 +114,17 @@ public final class Batch {
                         + " by this version: found " + Durations.practical(seconds[cause.stage()])
                         + (slot.part() > 0 && slot.part() < 1 ? " per fill" : "") + ", which needs more than "
                         + Chain.MOST_MODES + " modes"
-                        + (recipe.lot().grades().size() > 1
-                                ? " over " + recipe.lot().grades().size() + " grades"
+                        + (chains.get(species).lot().size() > 1
+                                ? " over " + chains.get(species).lot().size() + " grades and classes of pieces"
                                 : "")
                         + "; write at least " + Durations.practical(Math.ceil(shortest)));
         unsound.initCause(cause);
         return unsound;
+    }
+
+    /** How a species tells the pieces apart. */
+    Classes classes(int species) {
+        return classes.get(species);
     }
 
     Chain chain(int species) {

@@ -1,10 +1,9 @@
 package org.soakwright.planner.batch;
 
 import org.soakwright.recipes.model.Goal;
-import org.soakwright.solver.chain.Probe;
 
 /**
- * One side of one target for one grade, in SI. Its miss is above zero while it is not met; it is the logarithm of value over limit, in
+ * One side of one target for one grade or the lot, in SI. Its miss is above zero while it is not met; it is the logarithm of value over limit, in
  * which residuals are nearly straight lines of time, continued linearly below a hundredth of the limit so that zero and rounding
  * noise do no harm.
  */
@@ -17,7 +16,7 @@ sealed interface Requirement {
     boolean upper();
 
     /** What a species' chain reads at the end of a stage. */
-    record OfContent(int target, int species, int stage, Probe probe, double limit, boolean upper, double scale)
+    record OfContent(int target, int species, int stage, Gauge gauge, double limit, boolean upper, double scale)
             implements Requirement {}
 
     /**

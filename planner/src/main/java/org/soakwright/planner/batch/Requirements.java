@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Basis;
 import org.soakwright.recipes.model.Content;
 import org.soakwright.recipes.model.Grade;
@@ -9,11 +10,9 @@ import org.soakwright.recipes.model.GradeScope;
 import org.soakwright.recipes.model.Limits;
 import org.soakwright.recipes.model.Liquor;
 import org.soakwright.recipes.model.Quantity;
-import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
-import org.soakwright.solver.chain.Probe;
 
 /** Targets taken apart into requirements on single numbers. */
 final class Requirements {
@@ -41,7 +40,7 @@ final class Requirements {
             int species = batch.species(liquor.species().name());
             int step = batch.step(liquor.step().name());
             Liquor held = ((Step.Wet) recipe.steps().get(step)).liquor();
-            sides(index, species, batch.lastStage(step), new Probe.Liquor(), liquor.limits(), held);
+            sides(index, species, batch.lastStage(step), new Gauge.OfLiquor(), liquor.limits(), held);
         } else {
             Target.OfPieces pieces = (Target.OfPieces) target;
             int species = batch.species(pieces.species().name());
@@ -49,61 +48,83 @@ final class Requirements {
                     pieces.after() == null
                             ? recipe.steps().size() - 1
                             : batch.step(pieces.after().name()));
-            for (Probe probe : probes(pieces)) {
-                sides(index, species, stage, probe, pieces.limits(), null);
+            List<Population> populations = batch.classes(species).populations();
+            if (pieces.grade() instanceof GradeScope.WholeLot) {
+                pieces(index, species, stage, pieces, -1, populations);
+                return;
+            }
+            List<Grade> grades = recipe.lot().grades();
+            for (int j = 0; j < grades.size(); j++) {
+                if (pieces.grade() instanceof GradeScope.Each
+                        || (pieces.grade() instanceof GradeScope.Named named
+                                && named.name().name().equals(grades.get(j).name()))) {
+                    pieces(index, species, stage, pieces, j, List.of(populations.get(j)));
+                }
             }
         }
     }
 
-    private List<Probe> probes(Target.OfPieces target) {
-        if (target.grade() instanceof GradeScope.WholeLot) {
-            return List.of(new Probe.LotMean());
+    /**
+     * Without a share the average piece is meant, or the lot's mean. With one, at most is a limit on the piece at that share from below, at
+     * least from above; of a band each side may be missed by half of the rest.
+     */
+    private void pieces(
+            int index, int species, int stage, Target.OfPieces target, int grade, List<Population> populations) {
+        Quantity share = target.share();
+        Limits limits = target.limits();
+        if (share == null) {
+            Gauge gauge =
+                    grade < 0 ? new Gauge.OfLot() : new Gauge.Average(grade, populations.get(0), target.reading());
+            sides(index, species, stage, gauge, limits, null);
+            return;
         }
-        List<Grade> grades = recipe.lot().grades();
-        List<Probe> probes = new ArrayList<>();
-        for (int j = 0; j < grades.size(); j++) {
-            if (target.grade() instanceof GradeScope.Each
-                    || (target.grade() instanceof GradeScope.Named named
-                            && named.name().name().equals(grades.get(j).name()))) {
-                probes.add(probe(target.reading(), j));
-            }
-        }
-        return probes;
+        boolean band = limits.atMost() != null && limits.atLeast() != null;
+        double inside = band ? (1 + share.si()) / 2 : share.si();
+        upper(index, species, stage, new Gauge.Percentile(grade, populations, target.reading(), inside), limits, null);
+        lower(
+                index,
+                species,
+                stage,
+                new Gauge.Percentile(grade, populations, target.reading(), 1 - inside),
+                limits,
+                null);
     }
 
-    static Probe probe(Reading reading, int grade) {
-        return switch (reading) {
-            case MEAN -> new Probe.Mean(grade);
-            case CORE -> new Probe.At(grade, 0);
-            case SURFACE -> new Probe.At(grade, 1);
-            case HIGHEST -> new Probe.Highest(grade);
-            case LOWEST -> new Probe.Lowest(grade);
-            case RANGE -> new Probe.Range(grade);
-        };
+    private void sides(int index, int species, int stage, Gauge gauge, Limits limits, @Nullable Liquor liquor) {
+        upper(index, species, stage, gauge, limits, liquor);
+        lower(index, species, stage, gauge, limits, liquor);
     }
 
-    private void sides(
+    private void upper(int index, int species, int stage, Gauge gauge, Limits limits, @Nullable Liquor liquor) {
+        Quantity atMost = limits.atMost();
+        if (atMost != null) {
+            side(index, species, stage, gauge, limits.basis(), atMost, true, liquor);
+        }
+    }
+
+    private void lower(int index, int species, int stage, Gauge gauge, Limits limits, @Nullable Liquor liquor) {
+        Quantity atLeast = limits.atLeast();
+        if (atLeast != null) {
+            side(index, species, stage, gauge, limits.basis(), atLeast, false, liquor);
+        }
+    }
+
+    private void side(
             int index,
             int species,
             int stage,
-            Probe probe,
-            Limits limits,
-            @org.jspecify.annotations.Nullable Liquor liquor) {
-        double start = StartContent.of(recipe, recipe.species().get(species), probe);
-        Quantity atMost = limits.atMost();
-        Quantity atLeast = limits.atLeast();
+            Gauge gauge,
+            Basis basis,
+            Quantity limit,
+            boolean upper,
+            @Nullable Liquor liquor) {
+        double start = StartContent.of(recipe, recipe.species().get(species), gauge.grade());
         double scale = Math.max(start, Double.MIN_NORMAL);
-        if (atMost != null) {
-            double limit = si(limits.basis(), atMost, start, liquor);
-            all.add(new Requirement.OfContent(index, species, stage, probe, limit, true, scale));
-        }
-        if (atLeast != null) {
-            double limit = si(limits.basis(), atLeast, start, liquor);
-            all.add(new Requirement.OfContent(index, species, stage, probe, limit, false, scale));
-        }
+        double si = si(basis, limit, start, liquor);
+        all.add(new Requirement.OfContent(index, species, stage, gauge, si, upper, scale));
     }
 
-    private double si(Basis basis, Quantity limit, double start, @org.jspecify.annotations.Nullable Liquor liquor) {
+    private double si(Basis basis, Quantity limit, double start, @Nullable Liquor liquor) {
         if (basis == Basis.OF_START) {
             return limit.si() * start;
         }

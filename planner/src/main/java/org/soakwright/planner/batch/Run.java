@@ -11,7 +11,6 @@ import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.text.Unit;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Probe;
-import org.soakwright.solver.chain.Reading;
 
 /** A recipe followed for one choice of durations. */
 public final class Run {
@@ -89,11 +88,12 @@ public final class Run {
         Unit unit = species.start().unit();
         Map<org.soakwright.recipes.model.Reading, Double> values =
                 new EnumMap<>(org.soakwright.recipes.model.Reading.class);
+        Population population = batch.classes(s).populations().get(grade);
         double error = 0;
         for (org.soakwright.recipes.model.Reading kind : org.soakwright.recipes.model.Reading.values()) {
-            Reading reading = course.read(Requirements.probe(kind, grade), stage);
-            values.put(kind, recipe.lot().express(reading.value(), unit));
-            error = Math.max(error, recipe.lot().express(reading.error(), unit));
+            Gauge.Average gauge = new Gauge.Average(grade, population, kind);
+            values.put(kind, recipe.lot().express(gauge.value(course, stage), unit));
+            error = Math.max(error, recipe.lot().express(gauge.error(course, stage), unit));
         }
         return new StepEnd.Content(species.name(), values, error, unit);
     }
@@ -131,7 +131,7 @@ public final class Run {
             return batch.cost().of(total.goal(), seconds);
         }
         Requirement.OfContent content = (Requirement.OfContent) requirement;
-        return courses.get(content.species()).value(content.probe(), content.stage());
+        return content.gauge().value(courses.get(content.species()), content.stage());
     }
 
     double miss(Requirement requirement) {
@@ -149,7 +149,7 @@ public final class Run {
             return gradient;
         }
         Requirement.OfContent content = (Requirement.OfContent) requirement;
-        double[] byStage = courses.get(content.species()).gradient(content.probe(), content.stage());
+        double[] byStage = content.gauge().gradient(courses.get(content.species()), content.stage());
         for (int k = 0; k < byStage.length; k++) {
             Translation.Slot slot = batch.slots().get(k);
             gradient[slot.step()] += slope * slot.part() * byStage[k];

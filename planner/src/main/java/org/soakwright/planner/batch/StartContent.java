@@ -5,20 +5,23 @@ import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Start;
-import org.soakwright.solver.chain.Probe;
 
 /** What the pieces hold as loaded, against which a limit `of: start` counts: the mean over the pieces looked at. */
 final class StartContent {
     private StartContent() {}
 
-    /** kg/m3 of piece. */
-    static double of(Recipe recipe, Species species, Probe probe) {
+    /**
+     * Of one grade, or of the lot.
+     *
+     * @param only the grade, from 0; -1 for the lot
+     * @return kg/m3 of piece
+     */
+    static double of(Recipe recipe, Species species, int only) {
         if (species.start() instanceof Start.Uniform uniform) {
-            return recipe.lot().kgPerM3(uniform.content());
+            return Classes.meanStart(species) * recipe.lot().kgPerM3(uniform.content());
         }
         List<Grade> grades = recipe.lot().grades();
         List<Start.Point> points = ((Start.Profile) species.start()).points();
-        int only = grade(probe);
         double sum = 0;
         double shares = 0;
         for (int j = 0; j < grades.size(); j++) {
@@ -28,22 +31,6 @@ final class StartContent {
             }
         }
         return sum / shares;
-    }
-
-    static int grade(Probe probe) {
-        if (probe instanceof Probe.Mean mean) {
-            return mean.grade();
-        }
-        if (probe instanceof Probe.At at) {
-            return at.grade();
-        }
-        if (probe instanceof Probe.Highest highest) {
-            return highest.grade();
-        }
-        if (probe instanceof Probe.Lowest lowest) {
-            return lowest.grade();
-        }
-        return probe instanceof Probe.Range range ? range.grade() : -1;
     }
 
     /** Straight lines times x^s, integrated exactly. */

@@ -13,7 +13,6 @@ import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
 import org.soakwright.recipes.text.Unit;
-import org.soakwright.solver.chain.Probe;
 
 /**
  * A target and how it stands.
@@ -62,16 +61,16 @@ public record TargetState(
         }
         Target.OfPieces pieces = (Target.OfPieces) target;
         Limits limits = pieces.limits();
-        Probe probe = ((Requirement.OfContent) requirement).probe();
+        int grade = ((Requirement.OfContent) requirement).gauge().grade();
         double value;
         if (limits.basis() == Basis.OF_START) {
             double start = StartContent.of(
-                    recipe, recipe.species(pieces.species().name()).orElseThrow(), probe);
+                    recipe, recipe.species(pieces.species().name()).orElseThrow(), grade);
             value = limits.unit().fromSi(si / start);
         } else {
             value = recipe.lot().express(si, limits.unit());
         }
-        return limited(target, name, gradeName(recipe, probe), limits, value, met);
+        return limited(target, name, gradeName(recipe, grade), limits, value, met);
     }
 
     private static double expressed(Limits limits, double kgPerM3, Liquor liquor) {
@@ -120,12 +119,14 @@ public record TargetState(
         }
         Target.OfPieces pieces = (Target.OfPieces) target;
         String after = pieces.after() == null ? "" : " after " + pieces.after().name();
-        return pieces.species().name() + " " + pieces.reading().word() + after + ", "
-                + gradeName(recipe, ((Requirement.OfContent) requirement).probe());
+        Quantity share = pieces.share();
+        String of = share == null ? "" : " in " + share;
+        return pieces.species().name() + " " + pieces.reading().word() + of + after + ", "
+                + gradeName(
+                        recipe, ((Requirement.OfContent) requirement).gauge().grade());
     }
 
-    private static String gradeName(Recipe recipe, Probe probe) {
-        int grade = StartContent.grade(probe);
+    private static String gradeName(Recipe recipe, int grade) {
         return grade < 0 ? "lot" : recipe.lot().grades().get(grade).name();
     }
 

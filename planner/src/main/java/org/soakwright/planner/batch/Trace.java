@@ -3,6 +3,7 @@ package org.soakwright.planner.batch;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Probe;
@@ -119,7 +120,8 @@ public final class Trace {
         int stage = upTo.length - 1;
         List<Sight> sights = new ArrayList<>();
         for (int s = 0; s < recipe.species().size(); s++) {
-            Course course = batch.chain(s).follow(upTo);
+            Course course = batch.chain(s).sketch().follow(upTo);
+            List<Population> populations = batch.classes(s).populations();
             // Contents are proportional to kg/m3, and there are many: one exact conversion serves them all.
             double unit =
                     recipe.lot().express(1, recipe.species().get(s).start().unit());
@@ -127,11 +129,11 @@ public final class Trace {
             double[][] profiles = new double[grades][];
             double[] means = new double[grades];
             for (int j = 0; j < grades; j++) {
-                profiles[j] = course.profile(j, stage, depths);
+                profiles[j] = course.profile(populations.get(j).median(), stage, depths);
                 for (int i = 0; i < depths.length; i++) {
                     profiles[j][i] *= unit;
                 }
-                means[j] = unit * course.value(new Probe.Mean(j), stage);
+                means[j] = unit * new Gauge.Average(j, populations.get(j), Reading.MEAN).value(course, stage);
             }
             boolean wet = batch.stage(s, stage).wets();
             sights.add(new Sight(wet ? course.value(new Probe.Liquor(), stage) : Double.NaN, profiles, means));

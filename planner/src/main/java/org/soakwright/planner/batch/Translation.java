@@ -1,12 +1,15 @@
 package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import org.soakwright.recipes.model.Content;
 import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Diffusivity;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.Grain;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Partition;
 import org.soakwright.recipes.model.Quantity;
@@ -19,6 +22,7 @@ import org.soakwright.solver.chain.Stage;
 import org.soakwright.solver.chain.Start;
 import org.soakwright.solver.chain.Surroundings;
 import org.soakwright.solver.shape.Axis;
+import org.soakwright.solver.shape.Side;
 import org.soakwright.solver.stage.Surface;
 
 /**
@@ -29,10 +33,12 @@ final class Translation {
     /** Gas constant, J/(mol K); exact since the SI of 2019. */
     private static final double GAS_CONSTANT = 8.31446261815324;
 
+    /** In the order in which the solver counts them. */
+    private static final List<Grain> DIRECTIONS = List.of(Grain.values());
+
     private final Recipe recipe;
 
     Translation(Recipe recipe) {
-        NotYet.check(recipe);
         this.recipe = recipe;
     }
 
@@ -65,32 +71,54 @@ final class Translation {
         return recipe.between() == null ? 0 : recipe.between().si();
     }
 
+    /** Each grade's pieces as the recipe states them, before any spread. */
     List<org.soakwright.solver.shape.Grade> lot() {
         double volume = recipe.lot().volumeM3();
         return recipe.lot().grades().stream()
-                .map(grade -> new org.soakwright.solver.shape.Grade(axis(grade), grade.depth(), grade.share() * volume))
+                .map(grade -> new org.soakwright.solver.shape.Grade(sides(grade), grade.share() * volume, 1))
                 .toList();
     }
 
+    static List<Side> sides(Grade grade) {
+        List<Side> sides = new ArrayList<>();
+        for (org.soakwright.recipes.model.Side side : grade.sides()) {
+            Grain grain = grade.grain(side);
+            Axis axis = sides.isEmpty() ? axis(grade) : Axis.SLAB;
+            sides.add(new Side(axis, side.depth(), grain == null ? 0 : DIRECTIONS.indexOf(grain)));
+        }
+        return sides;
+    }
+
+    /** Of the first side; any other is a slab's. */
     static Axis axis(Grade grade) {
         return switch (grade.shape()) {
-            case SLAB -> Axis.SLAB;
-            case CYLINDER -> Axis.CYLINDER;
+            case SLAB, BRICK -> Axis.SLAB;
+            case CYLINDER, SHORT_CYLINDER -> Axis.CYLINDER;
             case SPHERE -> Axis.SPHERE;
-            case SHORT_CYLINDER, BRICK -> throw new IllegalStateException("NotYet refuses these");
         };
     }
 
-    /** One for each species. */
+    /** One for each species, in which all classes of pieces share the liquor. */
     List<Chain> chains() {
-        return recipe.species().stream()
-                .map(species -> Chain.of(lot(), start(species), stages(species)))
-                .toList();
+        return recipe.species().stream().map(this::chain).toList();
     }
 
-    private Start start(Species species) {
+    private Chain chain(Species species) {
+        Classes classes = Classes.of(recipe, species);
+        Set<Integer> passing = new HashSet<>();
+        List<Slot> slots = slots();
+        for (int k = 0; k < slots.size(); k++) {
+            if (slots.get(k).part() == 0) {
+                passing.add(k);
+            }
+        }
+        return Chain.of(classes.lot(), classes.starts(), stages(species), passing);
+    }
+
+    /** As loaded, a uniform content times a factor. */
+    static Start start(Recipe recipe, Species species, double factor) {
         if (species.start() instanceof org.soakwright.recipes.model.Start.Uniform uniform) {
-            return new Start.Uniform(recipe.lot().kgPerM3(uniform.content()));
+            return new Start.Uniform(factor * recipe.lot().kgPerM3(uniform.content()));
         }
         return new Start.Polyline(((org.soakwright.recipes.model.Start.Profile) species.start())
                 .points().stream()
@@ -117,7 +145,12 @@ final class Translation {
 
     private Stage rest(Species species, Step at) {
         return new Stage(
-                diffusivity(species, at), partition(species, at), new Surface.Sealed(), new Surroundings.Rest(), 0);
+                diffusivity(species, at),
+                partition(species, at),
+                new Surface.Sealed(),
+                new Surroundings.Rest(),
+                0,
+                grain(species, at));
     }
 
     private Stage stage(Species species, Step step) {
@@ -127,12 +160,18 @@ final class Translation {
             double clinging =
                     dragOut == null ? 0 : dragOut.si() * recipe.lot().massKg().orElseThrow();
             return new Stage(
-                    diffusivity, partition(species, step), surface(wet.film()), liquor(species, wet), clinging);
+                    diffusivity,
+                    partition(species, step),
+                    surface(wet.film()),
+                    liquor(species, wet),
+                    clinging,
+                    grain(species, step));
         }
         if (step instanceof Step.Dry dry && species.exchangesWith(Medium.AIR)) {
             Content equilibrium = dry.air().equilibrium().get(species.name());
             double content = equilibrium == null ? 0 : recipe.lot().kgPerM3(equilibrium);
-            return new Stage(diffusivity, 1, surface(dry.film()), new Surroundings.Air(content), 0);
+            return new Stage(
+                    diffusivity, 1, surface(dry.film()), new Surroundings.Air(content), 0, grain(species, step));
         }
         return rest(species, step);
     }
@@ -155,10 +194,33 @@ final class Translation {
                 : new Surface.Open();
     }
 
-    /** D(T) = D exp(-E/R (1/T - 1/T0)), Arrhenius' law; a step's own diffusivity is taken as it stands. */
+    /** In the first direction stated; the others are {@link #grain} times it. */
     static double diffusivity(Species species, Step step) {
+        return at(stated(species, step).all().get(0), step);
+    }
+
+    /** How the other directions compare. */
+    static org.soakwright.solver.shape.Grain grain(Species species, Step step) {
+        if (!(stated(species, step) instanceof Diffusivities.ByGrain byGrain)) {
+            return org.soakwright.solver.shape.Grain.NONE;
+        }
+        double first = at(byGrain.all().get(0), step);
+        List<Double> factors = new ArrayList<>();
+        for (Grain grain : DIRECTIONS) {
+            Diffusivity own = byGrain.values().get(grain);
+            factors.add(own == null ? 1.0 : at(own, step) / first);
+        }
+        return new org.soakwright.solver.shape.Grain(factors);
+    }
+
+    /** A step's own diffusivity goes before the species'. */
+    private static Diffusivities stated(Species species, Step step) {
         Diffusivities own = step.head().overrides().diffusivity().get(species.name());
-        Diffusivity stated = (own == null ? species.diffusivity() : own).of(null);
+        return own == null ? species.diffusivity() : own;
+    }
+
+    /** D(T) = D exp(-E/R (1/T - 1/T0)), Arrhenius' law; a step's own diffusivity has no E and is taken as it stands. */
+    private static double at(Diffusivity stated, Step step) {
         Quantity at = stated.at();
         Quantity energy = stated.activationEnergy();
         Quantity temperature = step.temperature();

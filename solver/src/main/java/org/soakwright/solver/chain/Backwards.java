@@ -16,15 +16,28 @@ final class Backwards {
         space = course.space;
     }
 
-    Sensitivity of(Probe probe, int stage) {
+    /** Of a sum of readings: one pass serves them all. */
+    Sensitivity of(List<Part> sum, int stage) {
         double[] bySeconds = new double[stage + 1];
         double[] byContent = new double[stage + 1];
         double[] byFeed = new double[stage + 1];
         // Derivatives by the coefficients at the end of stage k, by what all theta there stand on, and by the liquor
         // last met.
-        double[][] byPieces = byPieces(probe, stage);
-        double byBase = probe instanceof Probe.Liquor ? 0 : chain.stage(stage).partition();
-        double byMet = probe instanceof Probe.Liquor ? 1 : 0;
+        double[][] byPieces = new double[chain.lot().size()][];
+        for (int j = 0; j < byPieces.length; j++) {
+            byPieces[j] = new double[space.products(stage).get(j).size()];
+        }
+        double byBase = 0;
+        double byMet = 0;
+        for (Part part : sum) {
+            if (part.probe() instanceof Probe.Liquor) {
+                byMet += part.weight();
+            } else {
+                double scale = part.weight() * chain.stage(stage).partition();
+                byBase += scale;
+                add(byPieces, scale, part.probe(), stage);
+            }
+        }
         for (int k = stage; k >= 0; k--) {
             Stage here = chain.stage(k);
             List<Product> products = space.products(k);
@@ -75,19 +88,16 @@ final class Backwards {
         return new Sensitivity(bySeconds, byContent, byFeed);
     }
 
-    private double[][] byPieces(Probe probe, int stage) {
-        double[][] byPieces = new double[chain.lot().size()][];
-        double[] shares = probe instanceof Probe.Liquor ? new double[byPieces.length] : course.shares(probe);
+    private void add(double[][] byPieces, double scale, Probe probe, int stage) {
+        double[] shares = course.shares(probe);
         for (int j = 0; j < byPieces.length; j++) {
-            byPieces[j] = new double[space.products(stage).get(j).size()];
             if (shares[j] > 0) {
                 double[] row = course.row(probe, stage, j);
                 for (int n = 0; n < row.length; n++) {
-                    byPieces[j][n] = chain.stage(stage).partition() * shares[j] * row[n];
+                    byPieces[j][n] += scale * shares[j] * row[n];
                 }
             }
         }
-        return byPieces;
     }
 
     /** The offset is the feed where one runs in, else the content itself. */

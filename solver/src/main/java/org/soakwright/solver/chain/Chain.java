@@ -2,6 +2,7 @@ package org.soakwright.solver.chain;
 
 import java.util.Collections;
 import java.util.List;
+import java.util.Set;
 import org.soakwright.solver.shape.Grade;
 
 /**
@@ -23,15 +24,17 @@ public abstract sealed class Chain permits WaveChain, LaunchChain, RitzChain {
      * @param stages at least one
      */
     public static Chain of(List<Grade> lot, Start start, List<Stage> stages) {
-        return of(lot, Collections.nCopies(lot.size(), start), stages);
+        return of(lot, Collections.nCopies(lot.size(), start), stages, Set.of());
     }
 
     /**
      * Prepares a chain of grades that start differently.
      *
      * @param starts by grade
+     * @param passing stages at whose end nothing is read, such as short transfers; where that is dear they are not resolved for
+     *     their own sake
      */
-    public static Chain of(List<Grade> lot, List<Start> starts, List<Stage> stages) {
+    public static Chain of(List<Grade> lot, List<Start> starts, List<Stage> stages, Set<Integer> passing) {
         if (lot.isEmpty() || stages.isEmpty()) {
             throw new IllegalArgumentException("a chain needs at least one grade and one stage");
         }
@@ -49,7 +52,7 @@ public abstract sealed class Chain permits WaveChain, LaunchChain, RitzChain {
         }
         boolean shared = stages.stream().anyMatch(stage -> stage.surroundings() instanceof Surroundings.Vessel);
         return shared
-                ? new RitzChain(grades, List.copyOf(starts), List.copyOf(stages))
+                ? new RitzChain(grades, List.copyOf(starts), List.copyOf(stages), Set.copyOf(passing))
                 : new LaunchChain(grades, List.copyOf(starts), List.copyOf(stages));
     }
 

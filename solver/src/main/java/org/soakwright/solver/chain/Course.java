@@ -1,5 +1,7 @@
 package org.soakwright.solver.chain;
 
+import java.util.List;
+
 /**
  * A chain followed for one choice of durations. Readings can be taken at the end of every stage, with their error and their
  * derivatives by every duration.
@@ -54,5 +56,17 @@ public abstract sealed class Course permits WaveCourse, LaunchCourse, ProductCou
      */
     public double[] gradient(Probe probe, int stage) {
         return sensitivity(probe, stage).bySeconds();
+    }
+
+    /** Derivatives of a sum of readings by the durations of all stages up to its own, kg/m3 per second. */
+    public double[] gradient(List<Part> sum, int stage) {
+        double[] gradient = new double[stage + 1];
+        for (Part part : sum) {
+            double[] one = gradient(part.probe(), stage);
+            for (int k = 0; k < one.length; k++) {
+                gradient[k] += part.weight() * one[k];
+            }
+        }
+        return gradient;
     }
 }

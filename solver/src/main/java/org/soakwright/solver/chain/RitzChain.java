@@ -3,6 +3,7 @@ package org.soakwright.solver.chain;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.solver.shape.Grade;
 import org.soakwright.solver.stage.Conditions;
@@ -28,6 +29,7 @@ final class RitzChain extends Chain {
     private final List<Grade> lot;
     private final List<Start> starts;
     private final List<Stage> stages;
+    private final Set<Integer> passing;
     private final int degree;
     private final double[] mixed;
     private final Conditions[] conditions;
@@ -42,14 +44,15 @@ final class RitzChain extends Chain {
     private @Nullable RitzChain lower;
     private @Nullable RitzChain sketch;
 
-    RitzChain(List<Grade> lot, List<Start> starts, List<Stage> stages) {
-        this(lot, starts, stages, FINE);
+    RitzChain(List<Grade> lot, List<Start> starts, List<Stage> stages, Set<Integer> passing) {
+        this(lot, starts, stages, passing, FINE);
     }
 
-    RitzChain(List<Grade> lot, List<Start> starts, List<Stage> stages, int degree) {
+    RitzChain(List<Grade> lot, List<Start> starts, List<Stage> stages, Set<Integer> passing, int degree) {
         this.lot = lot;
         this.starts = starts;
         this.stages = stages;
+        this.passing = passing;
         this.degree = degree;
         mixed = new double[stages.size()];
         conditions = new Conditions[stages.size()];
@@ -84,6 +87,11 @@ final class RitzChain extends Chain {
         return degree;
     }
 
+    /** Whether a stage's end is of no interest. */
+    boolean passing(int stage) {
+        return passing.contains(stage);
+    }
+
     double mixed(int stage) {
         return mixed[stage];
     }
@@ -102,7 +110,7 @@ final class RitzChain extends Chain {
     /** The same with a lower degree: what it differs by is more than the error of this one. */
     RitzChain lower() {
         if (lower == null) {
-            lower = new RitzChain(lot, starts, stages, degree - STEP);
+            lower = new RitzChain(lot, starts, stages, passing, degree - STEP);
         }
         return lower;
     }
@@ -110,7 +118,7 @@ final class RitzChain extends Chain {
     @Override
     public Chain sketch() {
         if (sketch == null) {
-            sketch = new RitzChain(lot, starts, stages, ROUGH);
+            sketch = new RitzChain(lot, starts, stages, passing, ROUGH);
         }
         return sketch;
     }

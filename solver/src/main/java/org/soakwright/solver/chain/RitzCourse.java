@@ -340,10 +340,25 @@ final class RitzCourse extends Course {
 
     @Override
     public Sensitivity sensitivity(Probe probe, int stage) {
-        if (probe instanceof Probe.Range range) {
-            return sensitivity(new Probe.Highest(range.grade()), stage)
-                    .minus(sensitivity(new Probe.Lowest(range.grade()), stage));
+        return new Backwards(this).of(plain(List.of(new Part(1, probe))), stage);
+    }
+
+    @Override
+    public double[] gradient(List<Part> sum, int stage) {
+        return new Backwards(this).of(plain(sum), stage).bySeconds();
+    }
+
+    /** A range is a difference of two readings. */
+    private static List<Part> plain(List<Part> sum) {
+        List<Part> plain = new ArrayList<>();
+        for (Part part : sum) {
+            if (part.probe() instanceof Probe.Range range) {
+                plain.add(new Part(part.weight(), new Probe.Highest(range.grade())));
+                plain.add(new Part(-part.weight(), new Probe.Lowest(range.grade())));
+            } else {
+                plain.add(part);
+            }
         }
-        return new Backwards(this).of(probe, stage);
+        return plain;
     }
 }

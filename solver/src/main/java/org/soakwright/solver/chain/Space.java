@@ -22,10 +22,10 @@ final class Space {
     private static final double FACTOR = 16;
 
     /** Unknowns of all grades together that a stage is given, some ten milliseconds. */
-    private static final int MOST_UNKNOWNS = 30_000;
+    private static final int MOST_UNKNOWNS = 20_000;
 
     /** Passages prepared and kept: repeated equal fills and gradients ask again. */
-    private static final int MOST_PASSAGES = 32;
+    private static final int MOST_PASSAGES = 6;
 
     private final RitzChain chain;
     private final List<List<Mesh>> meshes = new ArrayList<>();
@@ -102,7 +102,9 @@ final class Space {
             for (int i = 0; i < grade.sides().size(); i++) {
                 double least = Double.POSITIVE_INFINITY;
                 for (int k = 0; k < seconds.length; k++) {
-                    least = Math.min(least, chain.conditions(k).pace(grade, i) * seconds[k]);
+                    if (!chain.passing(k)) {
+                        least = Math.min(least, chain.conditions(k).pace(grade, i) * seconds[k]);
+                    }
                 }
                 steps.add((int) Math.floor(Math.min(0, Math.log(least) / Math.log(FACTOR))));
             }

@@ -12,16 +12,18 @@ public final class Bathing {
     private final List<Product> lot;
     private final Contour contour;
     private final double flow;
-    private final double seconds;
     /** (V + sum S H + Q/z), the balance of a unit change of the liquor, by node. */
     private final double[] balanceRe = new double[Contour.COUNT];
 
     private final double[] balanceIm = new double[Contour.COUNT];
+    /** 1/|z + rate|^2 by grade, node and mode: every sum asks for it. */
+    private final double[][][] inverse;
+    /** What each mode keeps on its own, by grade. */
+    private final double[][] kept;
 
     /** Prepares a passage of so many seconds, above 0. */
     public Bathing(List<Product> lot, Bath.Vessel vessel, double seconds) {
         this.lot = lot;
-        this.seconds = seconds;
         flow = vessel.flow();
         contour = new Contour(seconds);
         for (int k = 0; k < Contour.COUNT; k++) {
@@ -29,29 +31,41 @@ public final class Bathing {
             balanceRe[k] = vessel.volume() + flow * contour.re[k] / size;
             balanceIm[k] = -flow * contour.im[k] / size;
         }
-        for (Product grade : lot) {
-            respond(grade);
+        inverse = new double[lot.size()][Contour.COUNT][];
+        kept = new double[lot.size()][];
+        for (int j = 0; j < lot.size(); j++) {
+            double[] rate = lot.get(j).rates();
+            kept[j] = new double[rate.length];
+            for (int n = 0; n < rate.length; n++) {
+                kept[j][n] = Math.exp(-rate[n] * seconds);
+            }
+            for (int k = 0; k < Contour.COUNT; k++) {
+                inverse[j][k] = inverse(rate, contour.re[k], contour.im[k]);
+            }
+            respond(j);
         }
     }
 
+    private static double[] inverse(double[] rate, double re, double im) {
+        double[] inverse = new double[rate.length];
+        for (int n = 0; n < rate.length; n++) {
+            double r = re + rate[n];
+            inverse[n] = 1 / (r * r + im * im);
+        }
+        return inverse;
+    }
+
     /** Adds S H(z), H = missing + sum of v v rate/(z + rate). */
-    private void respond(Product grade) {
-        double[] rate = grade.rates();
-        double[] uniform = grade.uniform();
-        double missing = grade.missing();
+    private void respond(int grade) {
+        Product product = lot.get(grade);
+        double[] uniform = product.uniform();
+        double[] strength = new double[uniform.length];
+        for (int n = 0; n < strength.length; n++) {
+            strength[n] = product.capacity() * product.rates()[n] * uniform[n] * uniform[n];
+        }
+        sums(grade, strength, balanceRe, balanceIm);
         for (int k = 0; k < Contour.COUNT; k++) {
-            double zr = contour.re[k];
-            double zi = contour.im[k];
-            double re = 0;
-            double im = 0;
-            for (int n = 0; n < rate.length; n++) {
-                double r = zr + rate[n];
-                double w = uniform[n] * uniform[n] * rate[n] / (r * r + zi * zi);
-                re += w * r;
-                im -= w * zi;
-            }
-            balanceRe[k] += grade.capacity() * (missing + re);
-            balanceIm[k] += grade.capacity() * im;
+            balanceRe[k] += product.capacity() * product.missing();
         }
     }
 
@@ -87,7 +101,7 @@ public final class Bathing {
         double[] re = new double[Contour.COUNT];
         double[] im = new double[Contour.COUNT];
         for (int j = 0; j < begin.length; j++) {
-            given(lot.get(j), begin[j], re, im);
+            given(j, begin[j], re, im);
         }
         double after = liquor;
         double[] pushRe = new double[Contour.COUNT];
@@ -108,56 +122,67 @@ public final class Bathing {
         double[][] end = new double[begin.length][];
         for (int j = 0; j < begin.length; j++) {
             end[j] = new double[begin[j].length];
-            over(lot.get(j), pushRe, pushIm, end[j]);
-            double[] rate = lot.get(j).rates();
+            over(j, pushRe, pushIm, end[j]);
             double[] uniform = lot.get(j).uniform();
-            for (int n = 0; n < rate.length; n++) {
-                end[j][n] = begin[j][n] * Math.exp(-rate[n] * seconds) - uniform[n] * end[j][n];
+            for (int n = 0; n < uniform.length; n++) {
+                end[j][n] = begin[j][n] * kept[j][n] - uniform[n] * end[j][n];
             }
         }
         return new Passage(begin, end, after, re, im);
     }
 
     /** Adds S times the sum of rate v y/(z + rate): what the pieces give of their own. */
-    private void given(Product grade, double[] y, double[] sumRe, double[] sumIm) {
-        double[] rate = grade.rates();
-        double[] uniform = grade.uniform();
-        double capacity = grade.capacity();
+    private void given(int grade, double[] y, double[] sumRe, double[] sumIm) {
+        Product product = lot.get(grade);
+        double[] rate = product.rates();
+        double[] uniform = product.uniform();
+        double capacity = product.capacity();
         double[] strength = new double[rate.length];
         for (int n = 0; n < rate.length; n++) {
             strength[n] = capacity * rate[n] * uniform[n] * y[n];
         }
-        sums(rate, strength, sumRe, sumIm);
+        sums(grade, strength, sumRe, sumIm);
     }
 
-    private void sums(double[] rate, double[] strength, double[] sumRe, double[] sumIm) {
+    /** Adds the sum of strength/(z + rate), at every node. */
+    private void sums(int grade, double[] strength, double[] sumRe, double[] sumIm) {
+        double[] rate = lot.get(grade).rates();
+        double[] weak = new double[rate.length];
         for (int k = 0; k < Contour.COUNT; k++) {
-            double zr = contour.re[k];
-            double zi = contour.im[k];
-            double re = 0;
-            double im = 0;
+            double[] by = inverse[grade][k];
             for (int n = 0; n < rate.length; n++) {
-                double r = zr + rate[n];
-                double w = strength[n] / (r * r + zi * zi);
-                re += w * r;
-                im -= w * zi;
+                weak[n] = strength[n] * by[n];
             }
-            sumRe[k] += re;
-            sumIm[k] += im;
+            double all = 0;
+            double all2 = 0;
+            double quick = 0;
+            double quick2 = 0;
+            int n = 0;
+            // In pairs: one sum would wait for itself at every addition.
+            for (; n + 1 < rate.length; n += 2) {
+                all += weak[n];
+                all2 += weak[n + 1];
+                quick += weak[n] * rate[n];
+                quick2 += weak[n + 1] * rate[n + 1];
+            }
+            if (n < rate.length) {
+                all += weak[n];
+                quick += weak[n] * rate[n];
+            }
+            sumRe[k] += contour.re[k] * (all + all2) + (quick + quick2);
+            sumIm[k] -= contour.im[k] * (all + all2);
         }
     }
 
     /** Adds the real part of the sum over nodes of push/(z + rate). */
-    private void over(Product grade, double[] pushRe, double[] pushIm, double[] out) {
-        double[] rate = grade.rates();
+    private void over(int grade, double[] pushRe, double[] pushIm, double[] out) {
+        double[] rate = lot.get(grade).rates();
         for (int k = 0; k < Contour.COUNT; k++) {
-            double zr = contour.re[k];
-            double zi = contour.im[k];
+            double[] by = inverse[grade][k];
             double a = pushRe[k];
-            double b = pushIm[k];
+            double b = a * contour.re[k] + pushIm[k] * contour.im[k];
             for (int n = 0; n < rate.length; n++) {
-                double r = zr + rate[n];
-                out[n] += (a * r + b * zi) / (r * r + zi * zi);
+                out[n] += (a * rate[n] + b) * by[n];
             }
         }
     }
@@ -181,7 +206,7 @@ public final class Bathing {
             for (int n = 0; n < strength.length; n++) {
                 strength[n] = -pieces[j][n] * uniform[n];
             }
-            sums(lot.get(j).rates(), strength, re, im);
+            sums(j, strength, re, im);
         }
         double before = liquor;
         for (int k = 0; k < Contour.COUNT; k++) {
@@ -206,11 +231,11 @@ public final class Bathing {
             double[] rate = grade.rates();
             double[] uniform = grade.uniform();
             first[j] = new double[rate.length];
-            over(grade, re, im, first[j]);
+            over(j, re, im, first[j]);
             for (int n = 0; n < rate.length; n++) {
-                double kept = pieces[j][n] * Math.exp(-rate[n] * seconds);
-                first[j][n] = kept + grade.capacity() * rate[n] * uniform[n] * first[j][n];
-                slope -= rate[n] * kept * passage.begin[j][n];
+                double own = pieces[j][n] * kept[j][n];
+                first[j][n] = own + grade.capacity() * rate[n] * uniform[n] * first[j][n];
+                slope -= rate[n] * own * passage.begin[j][n];
             }
         }
         return new Answer(first, before, slope);
