@@ -8,6 +8,7 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.soakwright.solver.chain.Chain;
 import org.soakwright.solver.chain.Course;
+import org.soakwright.solver.chain.Part;
 import org.soakwright.solver.chain.Probe;
 import org.soakwright.solver.chain.Sensitivity;
 import org.soakwright.solver.chain.Stage;
@@ -112,8 +113,10 @@ class SolidsReadingTest {
             }
             for (int s = 0; s < places[0].length; s++) {
                 int side = s;
-                double least = Arrays.stream(places).mapToDouble(p -> p[side]).min().orElseThrow();
-                double most = Arrays.stream(places).mapToDouble(p -> p[side]).max().orElseThrow();
+                double least =
+                        Arrays.stream(places).mapToDouble(p -> p[side]).min().orElseThrow();
+                double most =
+                        Arrays.stream(places).mapToDouble(p -> p[side]).max().orElseThrow();
                 boolean leavesAnEnd = (least == 0) != (most == 0) || (least == 1) != (most == 1);
                 jumps |= most - least > 0.02 || leavesAnEnd;
             }
@@ -131,6 +134,30 @@ class SolidsReadingTest {
         double difference = (8 * (value[3] - value[1]) - (value[4] - value[0])) / (12 * CHANGE);
         double found = chain.follow(seconds).gradient(probe, drawn.last())[which] * seconds[which];
         return Math.abs(found - difference) / drawn.scale();
+    }
+
+    @Test
+    void theDerivativeOfASumIsTheSumOfTheDerivatives() {
+        Draw draw = new Draw(1304);
+        Tally tally = new Tally("several sides: derivatives of sums");
+        for (int i = 0; i < 24; i++) {
+            Case drawn = drawn(draw, i);
+            Course course = Timed.follow(drawn.lot, drawn.start, drawn.steps);
+            List<Part> sum = List.of(
+                    new Part(0.3, new Probe.Mean(0)),
+                    new Part(-1.7, new Probe.Range(0)),
+                    new Part(2, new Probe.Liquor()));
+            double[] whole = course.gradient(sum, drawn.last());
+            for (int k = 0; k <= drawn.last(); k++) {
+                double parts = 0;
+                for (Part part : sum) {
+                    parts += part.weight() * course.gradient(part.probe(), drawn.last())[k];
+                }
+                double seconds = drawn.steps.get(k).seconds();
+                tally.note(Math.abs(whole[k] - parts) * seconds / drawn.scale());
+            }
+        }
+        tally.within(1e-13, 24);
     }
 
     @Test

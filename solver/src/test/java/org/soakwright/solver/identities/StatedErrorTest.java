@@ -72,8 +72,8 @@ class StatedErrorTest {
                 sides.add(new Side(Axis.SLAB, length * draw.log(0.5, 2)));
             }
             Stage stage = new Stage(diffusivity, 0.7, new Surface.Open(), new Surroundings.Plenty(0), 0);
-            Stage still = new Stage(
-                    diffusivity, 0.7, new Surface.Open(), new Surroundings.Vessel(1e-3, 100 / 0.7, 0, 0), 0);
+            Stage still =
+                    new Stage(diffusivity, 0.7, new Surface.Open(), new Surroundings.Vessel(1e-3, 100 / 0.7, 0, 0), 0);
             double unit = length * length / diffusivity;
             double t = unit * draw.log(5e-3, 1);
             double u = unit * draw.log(5e-3, 1);
