@@ -95,7 +95,28 @@ public final class Run {
             values.put(kind, recipe.lot().express(gauge.value(course, stage), unit));
             error = Math.max(error, recipe.lot().express(gauge.error(course, stage), unit));
         }
-        return new StepEnd.Content(species.name(), values, error, unit);
+        return new StepEnd.Content(species.name(), values, distribution(s, population, stage), error, unit);
+    }
+
+    private Map<org.soakwright.recipes.model.Reading, List<Double>> distribution(
+            int s, Population population, int stage) {
+        Map<org.soakwright.recipes.model.Reading, List<Double>> distribution =
+                new EnumMap<>(org.soakwright.recipes.model.Reading.class);
+        if (!population.varies()) {
+            return distribution;
+        }
+        Recipe recipe = batch.recipe();
+        Unit unit = recipe.species().get(s).start().unit();
+        List<Population> alone = List.of(population);
+        for (org.soakwright.recipes.model.Reading kind : org.soakwright.recipes.model.Reading.values()) {
+            Scatter scatter = new Scatter(alone, Gauge.values(alone, kind, courses.get(s), stage));
+            distribution.put(
+                    kind,
+                    StepEnd.SHARES.stream()
+                            .map(share -> recipe.lot().express(scatter.percentile(share), unit))
+                            .toList());
+        }
+        return distribution;
     }
 
     /** Every target of the recipe, for `grade: each` the grade nearest to failing. */

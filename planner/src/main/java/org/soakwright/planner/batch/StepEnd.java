@@ -18,6 +18,9 @@ import org.soakwright.recipes.text.Unit;
  * @param pieces each grade
  */
 public record StepEnd(Step step, double from, double to, List<Liquor> liquor, List<LotMean> means, List<Piece> pieces) {
+    /** Shares of the pieces, by mass, whose readings are told where pieces differ; 1. */
+    public static final List<Double> SHARES = List.of(0.01, 0.05, 0.1, 0.25, 0.5, 0.75, 0.9, 0.95, 0.99);
+
     /** What the liquor holds of a species at the beginning, what clung to the pieces mixed in, and at the end; kg/m3 = g/L. */
     public record Liquor(String species, double start, double end) {}
 
@@ -28,14 +31,21 @@ public record StepEnd(Step step, double from, double to, List<Liquor> liquor, Li
     public record Piece(String name, List<Content> species) {}
 
     /**
-     * The readings of one species in one grade.
+     * The readings of one species in one grade, averaged by mass where its pieces differ.
      *
      * @param values by reading, in the unit
+     * @param distribution by reading, what a {@link #SHARES share} of the pieces reads at most, in the unit; empty where all are alike
      * @param error bound on the numerical error of every reading, in the unit
      */
-    public record Content(String species, Map<Reading, Double> values, double error, Unit unit) {
+    public record Content(
+            String species,
+            Map<Reading, Double> values,
+            Map<Reading, List<Double>> distribution,
+            double error,
+            Unit unit) {
         public Content {
             values = Collections.unmodifiableMap(new EnumMap<>(values));
+            distribution = distribution.isEmpty() ? Map.of() : Collections.unmodifiableMap(new EnumMap<>(distribution));
         }
 
         public double value(Reading reading) {

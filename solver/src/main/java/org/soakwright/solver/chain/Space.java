@@ -3,6 +3,7 @@ package org.soakwright.solver.chain;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
@@ -25,15 +26,26 @@ final class Space {
     private static final int MOST_UNKNOWNS = 20_000;
 
     /** Passages prepared and kept: repeated equal fills and gradients ask again. */
-    private static final int MOST_PASSAGES = 6;
+    private static final int MOST_PASSAGES = 12;
 
     private final RitzChain chain;
     private final List<List<Mesh>> meshes = new ArrayList<>();
     private final Map<Wanted, Ritz> sides = new HashMap<>();
     private final Map<Conditions, List<Product>> products = new HashMap<>();
     private final Map<Crossing, List<double[][]>> carries = new HashMap<>();
-    private final Map<Passing, Bathing> passages = new HashMap<>();
+    private final Map<Passing, Bathing> passages = new LinkedHashMap<>(16, 0.75f, true) {
+        private static final long serialVersionUID = 1;
+
+        @Override
+        protected boolean removeEldestEntry(Map.Entry<Passing, Bathing> eldest) {
+            return size() > MOST_PASSAGES;
+        }
+    };
     private final Passed passed = new Passed();
+    /** What was looked up before, by stage and then by grade: the maps' keys are long. */
+    private final List<@Nullable List<Product>> byStage;
+
+    private final List<List<@Nullable List<double[][]>>> carried = new ArrayList<>();
 
     private record Wanted(Axis axis, Mesh mesh, double biot) {}
 
@@ -49,6 +61,10 @@ final class Space {
 
     Space(RitzChain chain, List<Integer> fineness) {
         this.chain = chain;
+        byStage = new ArrayList<>(Collections.nCopies(chain.size(), null));
+        for (int k = 0; k < chain.size(); k++) {
+            carried.add(new ArrayList<>(Collections.nCopies(chain.lot().size(), null)));
+        }
         Map<List<Object>, Mesh> known = new HashMap<>();
         int at = 0;
         for (int j = 0; j < chain.lot().size(); j++) {
@@ -117,7 +133,10 @@ final class Space {
     }
 
     List<Product> products(int stage) {
-        return products(chain.conditions(stage));
+        if (byStage.get(stage) == null) {
+            byStage.set(stage, products(chain.conditions(stage)));
+        }
+        return byStage.get(stage);
     }
 
     private List<Product> products(Conditions conditions) {
@@ -145,6 +164,15 @@ final class Space {
 
     /** A matrix for each side of a grade, from the stage before to this one; the ratio of the partitions is in the first. */
     List<double[][]> carry(int stage, int grade) {
+        List<double[][]> known = carried.get(stage).get(grade);
+        if (known == null) {
+            known = found(stage, grade);
+            carried.get(stage).set(grade, known);
+        }
+        return known;
+    }
+
+    private List<double[][]> found(int stage, int grade) {
         Conditions before = chain.conditions(stage - 1);
         Conditions after = chain.conditions(stage);
         return carries.computeIfAbsent(new Crossing(before, after, grade), key -> {
@@ -188,9 +216,6 @@ final class Space {
     }
 
     Bathing bathing(int stage, double seconds) {
-        if (passages.size() >= MOST_PASSAGES) {
-            passages.clear();
-        }
         Conditions conditions = chain.conditions(stage);
         return passages.computeIfAbsent(
                 new Passing(conditions, seconds),

@@ -117,26 +117,53 @@ public final class Product {
         int after = coefficients.length;
         int before = 1;
         for (double[][] matrix : matrices) {
-            int rows = matrix.length;
-            int columns = matrix[0].length;
-            after /= columns;
-            double[] next = new double[before * rows * after];
-            for (int b = 0; b < before; b++) {
-                for (int r = 0; r < rows; r++) {
-                    int to = (b * rows + r) * after;
-                    for (int c = 0; c < columns; c++) {
-                        double factor = matrix[r][c];
-                        int from = (b * columns + c) * after;
-                        for (int a = 0; a < after; a++) {
-                            next[to + a] += factor * state[from + a];
-                        }
+            after /= matrix[0].length;
+            state = after == 1 ? last(matrix, state, before) : along(matrix, state, before, after);
+            before *= matrix.length;
+        }
+        return state;
+    }
+
+    /** The side whose index runs fastest: rows times what lies side by side. */
+    private static double[] last(double[][] matrix, double[] state, int before) {
+        int rows = matrix.length;
+        int columns = matrix[0].length;
+        double[] next = new double[before * rows];
+        for (int b = 0; b < before; b++) {
+            int from = b * columns;
+            for (int r = 0; r < rows; r++) {
+                double[] row = matrix[r];
+                double even = 0;
+                double odd = 0;
+                int c = 0;
+                for (; c + 1 < columns; c += 2) {
+                    even += row[c] * state[from + c];
+                    odd += row[c + 1] * state[from + c + 1];
+                }
+                next[b * rows + r] = even + odd + (c < columns ? row[c] * state[from + c] : 0);
+            }
+        }
+        return next;
+    }
+
+    /** Any other: whole runs of the sides after it at once. */
+    private static double[] along(double[][] matrix, double[] state, int before, int after) {
+        int rows = matrix.length;
+        int columns = matrix[0].length;
+        double[] next = new double[before * rows * after];
+        for (int b = 0; b < before; b++) {
+            for (int r = 0; r < rows; r++) {
+                int to = (b * rows + r) * after;
+                for (int c = 0; c < columns; c++) {
+                    double factor = matrix[r][c];
+                    int from = (b * columns + c) * after;
+                    for (int a = 0; a < after; a++) {
+                        next[to + a] += factor * state[from + a];
                     }
                 }
             }
-            before *= rows;
-            state = next;
         }
-        return state;
+        return next;
     }
 
     /** Each matrix turned over. */
