@@ -20,7 +20,7 @@ import org.soakwright.solver.stage.Ritz;
 /** Everything of a {@link RitzChain} that belongs to one cutting of its pieces' sides into elements; found when first asked for. */
 final class Space {
     /** Shortest stages within this factor share a space. */
-    private static final double FACTOR = 16;
+    private static final double FACTOR = 4;
 
     /** Unknowns of all grades together that a stage is given, some ten milliseconds. */
     private static final int MOST_UNKNOWNS = 20_000;
