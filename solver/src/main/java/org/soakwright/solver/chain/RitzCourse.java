@@ -19,6 +19,9 @@ final class RitzCourse extends Course {
     /** Of the largest driving difference: what each inverse transform may be wrong by. */
     private static final double TRANSFORM = 4e-12;
 
+    /** Of the same: below this nobody looks at a single place. */
+    private static final double SHARP = 5e-9;
+
     /** The most by which the error is taken to fall with a step of the degree where it hardly falls. */
     private static final double SLOWEST = 0.9;
 
@@ -179,7 +182,8 @@ final class RitzCourse extends Course {
         double ratio = before > 0 ? Math.min(SLOWEST, step / before) : SLOWEST;
         double partition =
                 probe instanceof Probe.Liquor ? 1 : chain.stage(stage).partition();
-        return step * Math.max(1, 2 * ratio / (1 - ratio)) + partition * TRANSFORM * (stage + 1) * driving(stage);
+        double floor = TRANSFORM * (stage + 1) + (probe instanceof Probe.Mean || probe.grade() < 0 ? 0 : SHARP);
+        return step * Math.max(1, 4 * ratio / (1 - ratio)) + partition * floor * driving(stage);
     }
 
     private RitzCourse lower() {

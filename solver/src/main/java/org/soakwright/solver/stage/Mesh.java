@@ -1,6 +1,7 @@
 package org.soakwright.solver.stage;
 
 import java.util.Arrays;
+import java.util.List;
 import java.util.TreeSet;
 
 /**
@@ -42,18 +43,28 @@ public record Mesh(double[] ends, int degree) {
      * @param corners positions where the start profile has a corner
      */
     public static Mesh of(double fourier, int degree, double... corners) {
-        TreeSet<Double> ends = new TreeSet<>();
-        ends.add(0.0);
-        ends.add(1.0);
+        TreeSet<Double> ends = new TreeSet<>(List.of(0.0, 1.0));
+        double depth = Math.max(THINNEST, LAYERS * Math.sqrt(fourier));
         for (double corner : corners) {
             ends.add(corner);
         }
-        double depth = Math.max(THINNEST, LAYERS * Math.sqrt(fourier));
-        while (depth < 1 - REST) {
-            ends.add(1 - depth);
-            depth /= GROWTH;
+        // A corner rounds off as a layer grows, to both sides.
+        for (double from : List.copyOf(ends)) {
+            for (double away = depth; from > 0 && away < 1 - REST; away /= GROWTH) {
+                addBetween(ends, from - away, depth);
+                addBetween(ends, from + away, depth);
+            }
         }
         return new Mesh(ends.stream().mapToDouble(end -> end).toArray(), degree);
+    }
+
+    /** Not outside, and not so close to another that an element would be thinner than the outermost's half. */
+    private static void addBetween(TreeSet<Double> ends, double end, double depth) {
+        Double below = ends.floor(end);
+        Double above = ends.ceiling(end);
+        if (below != null && above != null && end - below > depth / 2 && above - end > depth / 2) {
+            ends.add(end);
+        }
     }
 
     int elements() {

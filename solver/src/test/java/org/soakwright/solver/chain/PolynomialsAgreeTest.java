@@ -38,14 +38,14 @@ class PolynomialsAgreeTest {
                 lot.add(new Grade(axis, length * log(0.4, 2.5), 1e-3 * log(0.1, 10)));
             }
             List<Double> seconds = new ArrayList<>();
-            List<Stage> stages = stages(length, true, seconds);
+            List<Stage> stages = stages(length, true, 1e-3, seconds);
             List<Start> starts = new ArrayList<>();
             lot.forEach(grade -> starts.add(start()));
             Course waves = Chain.of(lot, starts, stages, Set.of()).follow(times(seconds));
             Course polynomials = new RitzChain(lot, starts, stages, Set.of()).follow(times(seconds));
             compare(lot, waves, polynomials, seconds);
         }
-        report("against standing waves", 1e-9, 1e-6, 120);
+        report("against standing waves", 1e-11, 1e-6, 120);
     }
 
     @Test
@@ -61,14 +61,14 @@ class PolynomialsAgreeTest {
             }
             List<Grade> lot = List.of(new Grade(sides, 1e-3, log(0.5, 2)));
             List<Double> seconds = new ArrayList<>();
-            List<Stage> stages = stages(length, false, seconds);
+            List<Stage> stages = stages(length, false, 2e-2, seconds);
             List<Start> starts = List.of(new Start.Uniform(MOST * random.nextDouble()));
             Course products = Chain.of(lot, starts, stages, Set.of()).follow(times(seconds));
             assertTrue(products instanceof LaunchCourse, "these are products");
             Course polynomials = new RitzChain(lot, starts, stages, Set.of()).follow(times(seconds));
             compare(lot, products, polynomials, seconds);
         }
-        report("against launched products", 1e-8, 1e-6, 60);
+        report("against launched products", 1e-11, 1e-7, 60);
     }
 
     private void compare(List<Grade> lot, Course exact, Course course, List<Double> seconds) {
@@ -119,7 +119,7 @@ class PolynomialsAgreeTest {
         assertTrue(worstMean < mean && worstPlace < place && worstSlope < 10 * mean && worstBound < 1, line);
     }
 
-    private List<Stage> stages(double length, boolean shared, List<Double> seconds) {
+    private List<Stage> stages(double length, boolean shared, double shortest, List<Double> seconds) {
         List<Stage> stages = new ArrayList<>();
         int count = 1 + random.nextInt(4);
         for (int k = 0; k < count; k++) {
@@ -127,7 +127,7 @@ class PolynomialsAgreeTest {
             double partition = log(0.3, 3);
             double film = log(1e-2, 1e4) * partition * diffusivity / length;
             Surface surface = random.nextInt(3) == 0 ? new Surface.Open() : new Surface.Film(film);
-            seconds.add(length * length / diffusivity * log(1e-3, 1));
+            seconds.add(length * length / diffusivity * log(shortest, 1));
             double content = MOST / 4 * random.nextDouble();
             Surroundings around = new Surroundings.Plenty(content);
             double clinging = 0;
