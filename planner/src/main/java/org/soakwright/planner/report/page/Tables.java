@@ -19,6 +19,7 @@ import org.soakwright.planner.batch.Totals;
 import org.soakwright.planner.batch.Trace;
 import org.soakwright.planner.report.Csv;
 import org.soakwright.planner.report.Findings;
+import org.soakwright.planner.report.PieceWords;
 import org.soakwright.planner.report.Wording;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
@@ -55,6 +56,7 @@ final class Tables {
         tables.steps(start);
         tables.liquor();
         tables.contents();
+        tables.percentiles();
         tables.targets();
         tables.totals();
         if (plan != null) {
@@ -168,6 +170,35 @@ final class Tables {
             csv.end();
         }
         add(Findings.CONTENTS, csv);
+    }
+
+    /** What shares of the pieces of a grade, by mass, read at most; no file where all are alike. */
+    private void percentiles() {
+        List<String> headers = new ArrayList<>(List.of("step number", "step", "species", "grade", "reading"));
+        StepEnd.SHARES.forEach(share -> headers.add(PieceWords.percent(share)));
+        headers.add("unit");
+        Csv csv = new Csv(headers);
+        boolean any = false;
+        for (int i = 0; i < ends.size(); i++) {
+            for (StepEnd.Piece piece : ends.get(i).pieces()) {
+                for (StepEnd.Content content : piece.species()) {
+                    for (Map.Entry<Reading, List<Double>> one :
+                            content.distribution().entrySet()) {
+                        csv.number(i + 1)
+                                .text(ends.get(i).step().name())
+                                .text(content.species())
+                                .text(piece.name())
+                                .text(one.getKey().word());
+                        one.getValue().forEach(csv::number);
+                        csv.text(content.unit().symbol()).end();
+                        any = true;
+                    }
+                }
+            }
+        }
+        if (any) {
+            add(Findings.PERCENTILES, csv);
+        }
     }
 
     private void targets() {
