@@ -9,7 +9,8 @@ public sealed interface Outcome {
     /**
      * A recipe all of whose parts agree.
      *
-     * @param sha256 of the bytes read, in lower-case hexadecimal
+     * @param sha256 of the bytes read, in lower-case hexadecimal; with lists, of a text of one line each: the recipe's
+     *     own sum, then the sum, two spaces and the name of each list in the order of the recipe
      */
     record Accepted(Recipe recipe, String sha256) implements Outcome {}
 

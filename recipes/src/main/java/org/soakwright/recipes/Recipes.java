@@ -18,32 +18,32 @@ public final class Recipes {
 
     private Recipes() {}
 
-    /** Reads the recipe in a file of UTF-8 YAML, of 1 MiB at most. */
+    /** Reads the recipe in a file of UTF-8 YAML, of 1 MiB at most, and the lists it names beside it. */
     public static Outcome read(Path file) {
-        return read(() -> Source.of(file));
+        return read(() -> Source.of(file), Beside.of(file));
     }
 
     /**
-     * Reads the recipe in a text.
+     * Reads the recipe in a text. It has no folder, so a list it names is a problem.
      *
      * @param fileName what to call it in messages
      */
     public static Outcome read(String fileName, String text) {
-        return read(() -> Source.of(fileName, text.getBytes(StandardCharsets.UTF_8)));
+        return read(() -> Source.of(fileName, text.getBytes(StandardCharsets.UTF_8)), Beside.nothing());
     }
 
-    private static Outcome read(Supplier<Source> supplier) {
+    private static Outcome read(Supplier<Source> supplier, Beside beside) {
         Problems problems = new Problems();
         Source source = problems.attempt(supplier);
-        Recipe recipe = source == null ? null : recipe(source, problems);
+        Recipe recipe = source == null ? null : recipe(source, beside, problems);
         return source == null || recipe == null
                 ? new Outcome.Refused(problems.sorted())
-                : new Outcome.Accepted(recipe, source.sha256());
+                : new Outcome.Accepted(recipe, beside.sha256(source));
     }
 
-    private static @Nullable Recipe recipe(Source source, Problems problems) {
+    private static @Nullable Recipe recipe(Source source, Beside beside, Problems problems) {
         Tree tree = YamlReader.read(source.file(), source.text(), problems);
-        Recipe recipe = tree == null ? null : RecipeReader.read(tree, problems);
+        Recipe recipe = tree == null ? null : RecipeReader.read(tree, beside, problems);
         return problems.isEmpty() ? recipe : null;
     }
 }

@@ -45,6 +45,16 @@ final class Classes {
         return populations;
     }
 
+    /** Leaves a grade's pieces only the side with the shortest way out. */
+    void makeEndless(int grade) {
+        Population population = populations.get(grade);
+        for (int i = population.first(); i < population.first() + population.count(); i++) {
+            org.soakwright.solver.shape.Grade whole = lot.get(i);
+            Side side = whole.sides().get(whole.shortest());
+            lot.set(i, new org.soakwright.solver.shape.Grade(List.of(side), whole.volume(), whole.ease()));
+        }
+    }
+
     private void add(Recipe recipe, Species species, Grade grade) {
         double size = sigma(grade.spread());
         double ease = sigma(species.diffusivityVaries());

@@ -21,7 +21,7 @@ public final class Groups {
     /**
      * The groups of one step for one species in one grade.
      *
-     * @param foLow Fourier number D t/L^2 at the shortest duration the step may take, 1; L is the depth from
+     * @param foLow Fourier number D t/L^2 at the shortest duration the step may take, 1; L is the shortest way from
      *     the wetted surface to the core, t the whole time of the step, all fills together
      * @param foHigh the same at the longest
      * @param biot k L/(K D), 1; 0 where nothing passes the surface, infinite where there is no film
@@ -53,21 +53,36 @@ public final class Groups {
                         Translation.diffusivity(species, step),
                         step instanceof Step.Dry ? 1 : Translation.partition(species, step),
                         surface(species, step),
-                        new Bath.Unlimited());
+                        new Bath.Unlimited(),
+                        Translation.grain(species, step));
                 OptionalDouble ratio = capacityRatio(recipe, species, step);
                 for (int j = 0; j < lot.size(); j++) {
                     Grade grade = lot.get(j);
-                    double biot = conditions.biot(grade);
-                    double low = conditions.pace(grade) * shortest[i];
-                    double high = conditions.pace(grade) * longest[i];
+                    int side = grade.shortest();
+                    double biot = conditions.biot(grade, side);
+                    double low = conditions.pace(grade, side) * shortest[i];
+                    double high = conditions.pace(grade, side) * longest[i];
                     String piece = recipe.lot().grades().get(j).name();
-                    String regime = new Regime(grade.axis(), biot, low, high)
+                    String regime = new Regime(ways(conditions, grade), low, high)
                             .inWords(isClosed(step) ? ratio : OptionalDouble.empty());
                     groups.add(new Group(step.name(), species.name(), piece, low, high, biot, ratio, regime));
                 }
             }
         }
         return List.copyOf(groups);
+    }
+
+    /** The side with the shortest way out first. */
+    private static List<Regime.Way> ways(Conditions conditions, Grade grade) {
+        int shortest = grade.shortest();
+        double pace = conditions.pace(grade, shortest);
+        List<Regime.Way> ways = new ArrayList<>();
+        for (int i = 0; i < grade.sides().size(); i++) {
+            Regime.Way way = new Regime.Way(
+                    grade.sides().get(i).axis(), conditions.biot(grade, i), conditions.pace(grade, i) / pace);
+            ways.add(i == shortest ? 0 : ways.size(), way);
+        }
+        return ways;
     }
 
     private static Surface surface(Species species, Step step) {

@@ -5,8 +5,19 @@ import java.util.List;
 import java.util.OptionalDouble;
 import org.soakwright.solver.shape.Axis;
 
-/** Dimensionless groups in words. */
-record Regime(Axis axis, double biot, double foLow, double foHigh) {
+/**
+ * Dimensionless groups in words, of the side with the shortest way out.
+ *
+ * @param ways every side; the first is the one the numbers belong to
+ */
+record Regime(List<Way> ways, double foLow, double foHigh) {
+    /**
+     * One side.
+     *
+     * @param pace its D/L^2 over that of the side with the shortest way out, 1
+     */
+    record Way(Axis axis, double biot, double pace) {}
+
     /** Below it the contents inside one piece differ by less than about 5 %, so that only the film matters. */
     private static final double FILM_DECIDES = 0.1;
 
@@ -36,6 +47,7 @@ record Regime(Axis axis, double biot, double foLow, double foHigh) {
     }
 
     private String resistance() {
+        double biot = ways.get(0).biot();
         if (biot == 0) {
             return "evens out";
         }
@@ -53,16 +65,22 @@ record Regime(Axis axis, double biot, double foLow, double foHigh) {
     }
 
     /**
-     * Rate of the slowest mode over D/L^2, in plenty of liquor. Film and inside are taken as resistances in series: exact
-     * where either is alone, and in between low by at most 5 % in a slab, 8 % in a cylinder and 11 % in a sphere, so that
-     * "late" is never said too soon. A closed bath is quicker still.
+     * Rate of the slowest mode over D/L^2, in plenty of liquor: of all sides together, as their modes multiply; sealed, of the side that takes
+     * longest. Film and inside are taken as resistances in series: exact where either is alone, and in between low by at most 5 % in a
+     * slab, 8 % in a cylinder and 11 % in a sphere, so that "late" is never said too soon. A closed bath is quicker still.
      */
     private double slowest() {
-        if (biot == 0) {
-            double sealed = axis.slopeZero(1);
-            return sealed * sealed;
+        if (ways.get(0).biot() == 0) {
+            return ways.stream()
+                    .mapToDouble(way -> way.pace() * Math.pow(way.axis().slopeZero(1), 2))
+                    .min()
+                    .orElseThrow();
         }
-        double open = axis.waveZero(1);
-        return 1 / (1 / (open * open) + 1 / ((axis.power() + 1) * biot));
+        return ways.stream().mapToDouble(Regime::through).sum();
+    }
+
+    private static double through(Way way) {
+        double open = way.axis().waveZero(1);
+        return way.pace() / (1 / (open * open) + 1 / ((way.axis().power() + 1) * way.biot()));
     }
 }

@@ -98,13 +98,20 @@ final class Translation {
         };
     }
 
-    /** One for each species, in which all classes of pieces share the liquor. */
-    List<Chain> chains() {
-        return recipe.species().stream().map(this::chain).toList();
+    /**
+     * One for each species, in which all classes of pieces share the liquor.
+     *
+     * @param endless the grade whose pieces are taken for endless in all but their shortest side; -1 for none
+     */
+    List<Chain> chains(int endless) {
+        return recipe.species().stream().map(species -> chain(species, endless)).toList();
     }
 
-    private Chain chain(Species species) {
+    private Chain chain(Species species, int endless) {
         Classes classes = Classes.of(recipe, species);
+        if (endless >= 0) {
+            classes.makeEndless(endless);
+        }
         Set<Integer> passing = new HashSet<>();
         List<Slot> slots = slots();
         for (int k = 0; k < slots.size(); k++) {

@@ -1,6 +1,7 @@
 package org.soakwright.planner.cli;
 
 import java.util.List;
+import org.soakwright.planner.batch.AsInfinite;
 import org.soakwright.planner.batch.Batch;
 import org.soakwright.planner.batch.Cautions;
 import org.soakwright.planner.batch.Groups;
@@ -32,10 +33,11 @@ final class CheckCommand extends RecipeCommand {
         // What is too short to be computed shows now rather than when it is followed.
         new Batch(recipe).follow(StepTimes.shortest(recipe));
         List<Groups.Group> groups = Groups.of(recipe);
+        List<AsInfinite> shapes = AsInfinite.of(recipe);
         List<String> cautions = Cautions.of(recipe);
         return new Finding(
                 Exit.DONE,
-                () -> CheckSheet.of(recipe, groups, cautions, session.style()),
-                () -> CheckJson.of(stamp, recipe.title(), groups, cautions));
+                () -> CheckSheet.of(recipe, groups, shapes, cautions, session.style()),
+                () -> CheckJson.of(stamp, recipe, groups, shapes, cautions));
     }
 }

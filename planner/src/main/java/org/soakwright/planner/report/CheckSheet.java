@@ -3,6 +3,7 @@ package org.soakwright.planner.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Collectors;
+import org.soakwright.planner.batch.AsInfinite;
 import org.soakwright.planner.batch.Groups;
 import org.soakwright.recipes.model.Recipe;
 
@@ -14,9 +15,11 @@ public final class CheckSheet {
      * The sheet.
      *
      * @param groups of the same recipe
+     * @param shapes of the same recipe
      * @param cautions of the same recipe
      */
-    public static String of(Recipe recipe, List<Groups.Group> groups, List<String> cautions, Style style) {
+    public static String of(
+            Recipe recipe, List<Groups.Group> groups, List<AsInfinite> shapes, List<String> cautions, Style style) {
         List<String> lines = new ArrayList<>();
         Prose.lines(recipe.title()).forEach(line -> lines.add(style.heading(line)));
         lines.add("");
@@ -31,6 +34,12 @@ public final class CheckSheet {
                 + count(recipe.targets().size(), "target") + "."));
         lines.add("");
         lines.addAll(GroupTable.section(recipe, groups).lines(style));
+        List<String> pieces = PieceLines.of(recipe, shapes);
+        if (!pieces.isEmpty()) {
+            lines.add("");
+            lines.add(style.heading("Pieces"));
+            pieces.forEach(piece -> lines.addAll(Prose.point(piece)));
+        }
         lines.add("");
         lines.add(style.heading("Cautions"));
         cautions.forEach(caution -> lines.addAll(Prose.point(caution)));

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.Test;
+import org.soakwright.planner.batch.AsInfinite;
 import org.soakwright.planner.batch.Cautions;
 import org.soakwright.planner.batch.Groups;
 import org.soakwright.recipes.Outcome;
@@ -42,13 +43,15 @@ class CheckJsonTest {
 
     private static Map<String, @Nullable Object> checked() throws IOException {
         Recipe recipe = ((Outcome.Accepted) Recipes.read("recipe.yaml", RECIPE)).recipe();
-        return Json.object(
-                CheckJson.of(new Stamp("0.1.0", "00ff"), recipe.title(), Groups.of(recipe), Cautions.of(recipe)));
+        return Json.object(CheckJson.of(
+                new Stamp("0.1.0", "00ff"), recipe, Groups.of(recipe), AsInfinite.of(recipe), Cautions.of(recipe)));
     }
 
     @Test
     void theGroupsHaveTheNamesOfTheLanguage() throws IOException {
-        assertEquals(List.of("soakwright", "title", "inputs-sha256", "groups", "cautions"), Json.names(checked()));
+        assertEquals(
+                List.of("soakwright", "title", "inputs-sha256", "groups", "shapes", "fits", "cautions"),
+                Json.names(checked()));
         assertEquals(
                 List.of("step", "species", "piece", "Fo", "Bi", "capacity-ratio", "regime"),
                 Json.names(checked(), "groups", 0));

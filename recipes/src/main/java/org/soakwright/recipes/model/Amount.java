@@ -8,14 +8,40 @@ public sealed interface Amount {
     Place place();
 
     /** By mass, as loaded. */
-    record ByMass(Quantity mass) implements Amount {
+    sealed interface Weighed extends Amount {
+        double kg();
+    }
+
+    /** By the mass of all pieces together. */
+    record ByMass(Quantity mass) implements Weighed {
         public ByMass {
             Rules.positive("the mass", mass);
         }
 
         @Override
+        public double kg() {
+            return mass.si();
+        }
+
+        @Override
         public Place place() {
             return mass.place();
+        }
+    }
+
+    /** By containers, one or more, that each hold the same mass. */
+    record InContainers(Place place, long count, Quantity each) implements Weighed {
+        public InContainers {
+            if (count < 1) {
+                throw new Unsound(
+                        place, "a lot fills one container or more: found " + count + "; write a count such as 24");
+            }
+            Rules.positive("the mass in each container", each);
+        }
+
+        @Override
+        public double kg() {
+            return count * each.si();
         }
     }
 

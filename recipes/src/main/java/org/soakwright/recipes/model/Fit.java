@@ -1,14 +1,15 @@
 package org.soakwright.recipes.model;
 
 /**
- * How well a lognormal describes the sizes that were measured.
+ * How well lognormals describe the sizes that were measured.
  *
  * @param file the list, as the recipe names it
- * @param pieces how many of its rows count here
- * @param worth as many pieces of equal weight would tell as much (Kish's effective sample size)
- * @param median by mass: the weighted geometric mean
- * @param cv coefficient of variation of the lognormal; 0 where all sizes are one
- * @param worst largest gap between the measured and the fitted share of mass up to a size (Kolmogorov's distance)
+ * @param pieces how many of its pieces are in this grade; one on the border of two grades counts in both
+ * @param worth how many pieces of equal weight would tell as much as the whole list (Kish's effective sample size)
+ * @param median of this grade by mass: the weighted geometric mean
+ * @param cv coefficient of variation in this grade; 0 where all sizes are one
+ * @param worst the largest gap between the share of mass up to a size in the whole list and in all its grades together as
+ *     fitted (Kolmogorov's distance)
  */
 public record Fit(String file, int pieces, double worth, Quantity median, double cv, double worst) {
     public Fit {

@@ -58,26 +58,19 @@ public record Grade(
 
     /** The volume of a piece of the sizes stated; empty for a slab and a long cylinder. */
     public OptionalDouble volumeM3() {
-        return switch (shape) {
-            case SLAB, CYLINDER -> OptionalDouble.empty();
-            case SPHERE -> OptionalDouble.of(Math.PI / 6 * Math.pow(size(0), 3));
-            case SHORT_CYLINDER -> OptionalDouble.of(Math.PI / 4 * Math.pow(size(0), 2) * size(1));
-            case BRICK -> OptionalDouble.of(size(0) * size(1) * size(2));
-        };
+        return shape.isFinite()
+                ? OptionalDouble.of(shape.volumeM3(
+                        sides.stream().mapToDouble(side -> side.size().si()).toArray()))
+                : OptionalDouble.empty();
     }
 
     /**
-     * The volume of the average piece. With a spread it is smaller than that of the sizes stated, which are the median by
-     * mass: of a lognormal, exp(-9 sigma^2 / 2) times.
+     * The volume of the average piece: with a spread it is smaller than that of the sizes stated, which are the median by mass.
      */
     public OptionalDouble averageM3() {
         OptionalDouble volume = volumeM3();
         return spread == null || volume.isEmpty()
                 ? volume
-                : OptionalDouble.of(volume.getAsDouble() * Math.exp(-4.5 * spread.sigma() * spread.sigma()));
-    }
-
-    private double size(int side) {
-        return sides.get(side).size().si();
+                : OptionalDouble.of(volume.getAsDouble() * spread.averagePerMedianVolume());
     }
 }

@@ -37,7 +37,7 @@ public record Lot(
                     .sum();
             return byCount.count() / piecesPerM3;
         }
-        return ((Amount.ByMass) amount).mass().si() / densityKgPerM3();
+        return ((Amount.Weighed) amount).kg() / densityKgPerM3();
     }
 
     /** The volume of the average piece of a grade: by its weight where it is stated, else by its sizes; empty for neither. */
@@ -47,8 +47,8 @@ public record Lot(
 
     /** The mass of all pieces as loaded, kg; empty without a density. */
     public OptionalDouble massKg() {
-        if (amount instanceof Amount.ByMass byMass) {
-            return OptionalDouble.of(byMass.mass().si());
+        if (amount instanceof Amount.Weighed weighed) {
+            return OptionalDouble.of(weighed.kg());
         }
         return density == null ? OptionalDouble.empty() : OptionalDouble.of(volumeM3() * density.si());
     }

@@ -24,13 +24,16 @@ final class LotRules {
         }
         if (density != null) {
             problems.addAll(Rules.ifNotPositive("the density", density));
-        } else if (amount instanceof Amount.ByMass) {
+        } else if (amount instanceof Amount.Weighed) {
             problems.add(new Problem(place, "the lot is given by mass and has no density; add one such as 1120 kg/m3"));
         }
         if (amount instanceof Amount.ByCount) {
             grades.stream()
                     .filter(grade -> pieceM3(grade, density).isEmpty())
                     .forEach(grade -> problems.add(uncountable(grade)));
+        }
+        if (density != null && density.si() > 0) {
+            grades.forEach(grade -> problems.addAll(contradictions(grade, density)));
         }
         problems.addAll(Names.duplicates(
                 "grades",
@@ -46,6 +49,14 @@ final class LotRules {
         if (!problems.isEmpty()) {
             throw new Unsound(problems);
         }
+    }
+
+    /** Of a list the reader compares the pieces themselves, before a fit comes between. */
+    private static List<Problem> contradictions(Grade grade, Quantity density) {
+        OptionalDouble average = grade.averageM3();
+        return grade.weight() == null || average.isEmpty() || grade.fit() != null
+                ? List.of()
+                : Rules.ifNotWeighing(grade.weight(), average.getAsDouble() * density.si());
     }
 
     private static Problem uncountable(Grade grade) {

@@ -1,6 +1,7 @@
 package org.soakwright.recipes.model;
 
 import java.math.BigDecimal;
+import java.math.MathContext;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Shown;
 import org.soakwright.recipes.text.Unit;
@@ -9,7 +10,7 @@ import org.soakwright.recipes.text.Unsound;
 /**
  * A number with its unit, exactly as written, at its place. Money and prices are quantities too.
  *
- * @param written the number in the characters of the file
+ * @param written the number in the characters of the file, or what is shown of one that was worked out
  */
 public record Quantity(BigDecimal value, Unit unit, Place place, String written) {
     /** What is said of a number that no quantity holds. */
@@ -17,6 +18,8 @@ public record Quantity(BigDecimal value, Unit unit, Place place, String written)
 
     /** The largest magnitude in SI: far beyond any real lot, and near enough that its powers stay finite. */
     private static final double MOST = 1e12;
+
+    private static final MathContext DERIVED = new MathContext(4);
 
     public Quantity {
         if (isTooLarge(value, unit)) {
@@ -36,6 +39,14 @@ public record Quantity(BigDecimal value, Unit unit, Place place, String written)
     /** From an SI value, to be shown in the unit. */
     public static Quantity ofSi(double si, Unit unit, Place place) {
         return new Quantity(BigDecimal.valueOf(unit.fromSi(si)), unit, place);
+    }
+
+    /** What was worked out from other values, shown to four significant digits. */
+    public static Quantity derived(double si, Unit unit, Place place) {
+        BigDecimal value = BigDecimal.valueOf(unit.fromSi(si));
+        BigDecimal shown = value.round(DERIVED).stripTrailingZeros();
+        return new Quantity(
+                value, unit, place, Math.abs(shown.scale()) > 9 ? Shown.number(shown) : shown.toPlainString());
     }
 
     /** In SI units: seconds, metres, kilograms, kelvins, joules; fractions as parts of one; money per SI unit. */
@@ -72,6 +83,16 @@ public record Quantity(BigDecimal value, Unit unit, Place place, String written)
      */
     public Quantity possible() {
         Rules.temperature(this);
+        return this;
+    }
+
+    /**
+     * This weight, if it is within 10 % of what the sizes of the piece and its density make.
+     *
+     * @throws Unsound otherwise
+     */
+    public Quantity weighing(double kg) {
+        Rules.require(Rules.ifNotWeighing(this, kg));
         return this;
     }
 

@@ -22,6 +22,9 @@ final class Rules {
     /** The heaviest element weighs 22 600 kg/m3. */
     private static final double MOST_KG_PER_M3 = 25e3;
 
+    /** What edges, crusts and a density in round numbers may make of a weight. */
+    private static final double WEIGHT_TOLERANCE = 0.1;
+
     private Rules() {}
 
     static void named(String what, String name, Place place) {
@@ -100,6 +103,17 @@ final class Rules {
             return found(content, what + " by volume is at most 25000 kg/m3 (25000 g/L)", "; write such as 30 g/L");
         }
         return ifNegative(what, content);
+    }
+
+    /** A weight is near what sizes and density make. */
+    static List<Problem> ifNotWeighing(Quantity weight, double kg) {
+        return Math.abs(weight.si() - kg) <= WEIGHT_TOLERANCE * kg
+                ? List.of()
+                : found(
+                        weight,
+                        "a weight that contradicts the sizes",
+                        " where sizes and density make " + Quantity.derived(kg, weight.unit(), weight.place())
+                                + "; correct one of them, they may differ by 10 %");
     }
 
     private static List<Problem> found(Quantity quantity, String rule, String remedy) {

@@ -36,6 +36,21 @@ public enum Shape implements Word {
         return this != SLAB && this != CYLINDER;
     }
 
+    /**
+     * The volume of a piece.
+     *
+     * @param sizes in metres, in the order of the dimensions
+     * @throws IllegalStateException for a slab and a long cylinder, which have none
+     */
+    public double volumeM3(double... sizes) {
+        return switch (this) {
+            case SLAB, CYLINDER -> throw new IllegalStateException("a " + word() + " has no volume of its own");
+            case SPHERE -> Math.PI / 6 * Math.pow(sizes[0], 3);
+            case SHORT_CYLINDER -> Math.PI / 4 * Math.pow(sizes[0], 2) * sizes[1];
+            case BRICK -> sizes[0] * sizes[1] * sizes[2];
+        };
+    }
+
     /** The direction of diffusion that belongs to a dimension; null for a sphere, which has none. */
     public @Nullable Grain grain(Dimension dimension) {
         return switch (dimension) {

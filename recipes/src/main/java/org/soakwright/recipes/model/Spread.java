@@ -11,7 +11,7 @@ import org.soakwright.recipes.text.Problem;
  */
 public record Spread(Quantity cv) {
     /** Wider than any sorted lot; beyond it one bell of logarithms describes a mixture badly. */
-    static final double MOST = 0.6;
+    public static final double MOST = 0.6;
 
     public Spread {
         Rules.require(problems("a spread", cv));
@@ -37,6 +37,14 @@ public record Spread(Quantity cv) {
     /** The standard deviation of the natural logarithm. */
     public double sigma() {
         return Math.sqrt(Math.log1p(cv.si() * cv.si()));
+    }
+
+    /**
+     * The volume of the average piece over that of the piece of median size by mass, where this is a spread of size with
+     * the proportions kept: many small pieces weigh as much as a few large ones. The mean of size^-3 over a lognormal.
+     */
+    public double averagePerMedianVolume() {
+        return Math.exp(-4.5 * sigma() * sigma());
     }
 
     public Place place() {

@@ -23,13 +23,27 @@ import org.soakwright.recipes.text.Tree;
 final class LotReader {
     private static final String PIECES = "[{name: thin, shape: slab, thickness: 18 mm, share: 100 %}]";
 
+    private final Lists lists;
     private final Values values;
     private final Problems problems;
     private final Map<String, Shape> shapes = new LinkedHashMap<>();
     private final List<Reference> names = new ArrayList<>();
     private boolean hasDensity = true;
 
-    LotReader(Values values) {
+    /**
+     * What every grade needs of its lot.
+     *
+     * @param only whether there is one entry alone, which needs no name and no share
+     * @param density null where there is none, or it could not be read
+     */
+    record Common(
+            boolean only,
+            boolean statesDensity,
+            @Nullable Quantity density,
+            @Nullable Spread spread) {}
+
+    LotReader(Values values, Lists lists) {
+        this.lists = lists;
         this.values = values;
         this.problems = values.problems();
     }
@@ -58,13 +72,16 @@ final class LotReader {
             return null;
         }
         Amount amount = amount(fields);
-        hasDensity = fields.has("density") || fields.has("mass"); // a mass without one is reported once, at the lot
+        // A mass without one is reported once, at the lot.
+        hasDensity = fields.has("density") || fields.has("mass") || fields.has("containers");
         Quantity density = values.checked(
                 values.quantity("density", fields.get("density"), Kind.DENSITY),
                 found -> found.positive("the density"));
         Quantity temperature = values.temperature(fields.get("temperature"));
         Spread spread = values.spread("spread", fields.get("spread"));
-        List<Grade> grades = grades(fields.need("pieces", PIECES), spread);
+        Tree pieces = fields.need("pieces", PIECES);
+        boolean only = pieces instanceof Tree.Items items && items.items().size() == 1;
+        List<Grade> grades = grades(pieces, new Common(only, fields.has("density"), density, spread));
         problems.addAll(Names.duplicates("grades", names));
         boolean broken = (density == null && fields.has("density"))
                 || (temperature == null && fields.has("temperature"))
@@ -75,7 +92,7 @@ final class LotReader {
     }
 
     private @Nullable Amount amount(Fields fields) {
-        String key = fields.oneOf(List.of("mass", "volume", "count"), "mass: 600 kg");
+        String key = fields.oneOf(List.of("mass", "volume", "count", "containers"), "mass: 600 kg");
         if (key == null) {
             return null;
         }
@@ -83,6 +100,9 @@ final class LotReader {
         if (tree != null && key.equals("count")) {
             Long count = values.count("count", tree, "500");
             return count == null ? null : problems.attempt(() -> new Amount.ByCount(count, tree.place()));
+        }
+        if (key.equals("containers")) {
+            return containers(tree);
         }
         boolean mass = key.equals("mass");
         Quantity quantity = values.quantity(key, tree, mass ? Kind.MASS : Kind.VOLUME);
@@ -92,20 +112,31 @@ final class LotReader {
         return problems.attempt(() -> mass ? new Amount.ByMass(quantity) : new Amount.ByVolume(quantity));
     }
 
-    private @Nullable List<Grade> grades(@Nullable Tree tree, @Nullable Spread spread) {
+    private @Nullable Amount containers(@Nullable Tree tree) {
+        Fields fields = tree == null ? null : Fields.of(tree, Section.CONTAINERS, problems);
+        if (fields == null) {
+            return null;
+        }
+        Long count = values.count("count", fields.need("count", "24"), "24");
+        Quantity each = values.quantity("each", fields.need("each", "25 kg"), Kind.MASS);
+        return count == null || each == null
+                ? null
+                : problems.attempt(() -> new Amount.InContainers(fields.place(), count, each));
+    }
+
+    private @Nullable List<Grade> grades(@Nullable Tree tree, Common common) {
         if (tree instanceof Tree.Items items) {
-            boolean only = items.items().size() == 1;
+            boolean allRead = true;
             List<Grade> grades = new ArrayList<>();
             for (Tree item : items.items()) {
-                GradeReader reader = new GradeReader(values, only, spread);
-                Grade grade = reader.grade(item);
+                GradeReader reader = new GradeReader(values, lists, common);
+                List<Grade> read = reader.grades(item);
                 names.addAll(reader.names());
                 shapes.putAll(reader.shapes());
-                if (grade != null) {
-                    grades.add(grade);
-                }
+                grades.addAll(read);
+                allRead &= !read.isEmpty();
             }
-            return grades.size() == items.items().size() ? grades : null;
+            return allRead ? grades : null;
         }
         if (tree != null && !(tree instanceof Tree.Broken)) {
             problems.add(

@@ -31,25 +31,27 @@ import org.soakwright.recipes.text.Tree;
 public final class RecipeReader {
     private static final BigDecimal LANGUAGE = BigDecimal.ONE;
 
+    private final Lists lists;
     private final Values values;
     private final Problems problems;
 
-    private RecipeReader(Problems problems) {
+    private RecipeReader(Lists lists, Problems problems) {
+        this.lists = lists;
         this.values = new Values(problems);
         this.problems = problems;
     }
 
-    /** The recipe; null, with every problem added, where it is not whole. */
-    public static @Nullable Recipe read(Tree tree, Problems problems) {
+    /** The recipe; null, with every problem added, where it or a list it names is not whole. */
+    public static @Nullable Recipe read(Tree tree, Lists lists, Problems problems) {
         Fields fields = Fields.of(tree, Section.RECIPE, problems);
-        return fields == null ? null : new RecipeReader(problems).recipe(fields);
+        return fields == null ? null : new RecipeReader(lists, problems).recipe(fields);
     }
 
     private @Nullable Recipe recipe(Fields fields) {
         language(fields.need("language", "1"));
         String title = values.name("title", fields.need("title", "Desalting of loins"), "Desalting of loins");
         Set<Product> products = products(fields.need("product", "[food]"));
-        LotReader lots = new LotReader(values);
+        LotReader lots = new LotReader(values, lists);
         Tree lotTree = fields.need("lot", "{mass: 600 kg, density: 1120 kg/m3, pieces: […]}");
         Lot lot = lotTree == null ? null : lots.lot(lotTree);
         SpeciesReader speciesReader = new SpeciesReader(values);

@@ -16,25 +16,54 @@ import java.util.HexFormat;
 
 /** The text of a file and the fingerprint of its bytes. */
 public record Source(String file, String text, String sha256) {
-    /** The largest file read. */
+    /** The largest recipe read. */
     public static final int MOST_BYTES = 1 << 20;
 
+    /** What a file is to hold, for its size and for messages. */
+    private enum Use {
+        RECIPE("recipe", MOST_BYTES, "a recipe needs a few kilobytes"),
+        LIST("list", 8 << 20, "a list of 100 000 pieces needs less");
+
+        private final String label;
+        private final int mostBytes;
+        private final String enough;
+
+        Use(String label, int mostBytes, String enough) {
+            this.label = label;
+            this.mostBytes = mostBytes;
+            this.enough = enough;
+        }
+    }
+
     /**
-     * Reads a file of UTF-8 text.
+     * Reads a recipe file of UTF-8 text.
      *
      * @throws Unsound where it is missing, unreadable, a folder, larger than 1 MiB, or not text
      */
     public static Source of(Path path) {
+        return of(path, Use.RECIPE);
+    }
+
+    /**
+     * Reads a list of UTF-8 text.
+     *
+     * @throws Unsound where it is missing, unreadable, a folder, larger than 8 MiB, or not text
+     */
+    public static Source list(Path path) {
+        return of(path, Use.LIST);
+    }
+
+    private static Source of(Path path, Use use) {
         String file = path.toString();
         Place place = Place.of(file);
         if (!Files.exists(path)) {
             throw new Unsound(place, "there is no such file; check the name and the folder");
         }
         if (Files.isDirectory(path)) {
-            throw new Unsound(place, "this is a folder; name a recipe file in it");
+            throw new Unsound(place, "this is a folder; name a " + use.label + " file in it");
         }
         try (InputStream in = Files.newInputStream(path)) {
-            return of(file, in.readNBytes(MOST_BYTES + 1));
+            return of(file, in.readNBytes(use.mostBytes + 1), use);
         } catch (IOException e) {
             throw new Unsound(place, "the file cannot be read; check its permissions");
         }
@@ -46,14 +75,19 @@ public record Source(String file, String text, String sha256) {
      * @throws Unsound where they are more than 1 MiB, or not text
      */
     public static Source of(String file, byte[] bytes) {
-        if (bytes.length > MOST_BYTES) {
-            throw new Unsound(
-                    Place.of(file), "the file is too large: found more than 1 MiB; a recipe needs a few kilobytes");
-        }
-        return new Source(file, decoded(file, bytes), sha256(bytes));
+        return of(file, bytes, Use.RECIPE);
     }
 
-    private static String decoded(String file, byte[] bytes) {
+    private static Source of(String file, byte[] bytes, Use use) {
+        if (bytes.length > use.mostBytes) {
+            throw new Unsound(
+                    Place.of(file),
+                    "the file is too large: found more than " + (use.mostBytes >> 20) + " MiB; " + use.enough);
+        }
+        return new Source(file, decoded(file, bytes, use), sha256(bytes));
+    }
+
+    private static String decoded(String file, byte[] bytes, Use use) {
         CharsetDecoder decoder = StandardCharsets.UTF_8
                 .newDecoder()
                 .onMalformedInput(CodingErrorAction.REPORT)
@@ -66,7 +100,7 @@ public record Source(String file, String text, String sha256) {
             throw new Unsound(
                     placeOf(file, text, bad),
                     "this is not text: found " + (result.isError() ? "bytes that are not UTF-8" : controlAt(text, bad))
-                            + "; save the recipe as UTF-8 text");
+                            + "; save the " + use.label + " as UTF-8 text");
         }
         return text.startsWith("\uFEFF") ? text.substring(1) : text;
     }
@@ -98,7 +132,8 @@ public record Source(String file, String text, String sha256) {
         return new Place(file, line, text.codePointCount(lineStart, index) + 1);
     }
 
-    private static String sha256(byte[] bytes) {
+    /** SHA-256 of bytes in lower-case hexadecimal. */
+    public static String sha256(byte[] bytes) {
         try {
             return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(bytes));
         } catch (NoSuchAlgorithmException e) {

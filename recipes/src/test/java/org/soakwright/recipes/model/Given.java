@@ -13,6 +13,10 @@ final class Given {
         return new Quantity(new BigDecimal(value), kind.unit(unit).orElseThrow(), new Place("f", 1, 1));
     }
 
+    static Quantity fraction(double fraction) {
+        return quantity(Double.toString(fraction), "1", Kind.FRACTION);
+    }
+
     static Side side(Dimension dimension, String millimetres) {
         return new Side(dimension, quantity(millimetres, "mm", Kind.LENGTH), Faces.BOTH);
     }

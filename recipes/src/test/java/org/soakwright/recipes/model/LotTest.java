@@ -32,6 +32,16 @@ class LotTest {
     }
 
     @Test
+    void containersHoldTheirMassTogether() {
+        Quantity each = Given.quantity("25", "kg", Kind.MASS);
+        Lot lot = lot(new Amount.InContainers(HERE, 24, each), "1200", sphere("a", "3", 1));
+        assertEquals(600, lot.massKg().orElseThrow());
+        assertEquals(0.5, lot.volumeM3(), 1e-15);
+        assertThrows(Unsound.class, () -> lot(new Amount.InContainers(HERE, 24, each), null, sphere("a", "3", 1)));
+        assertThrows(Unsound.class, () -> new Amount.InContainers(HERE, 0, each));
+    }
+
+    @Test
     void withoutADensityThereIsNoMass() {
         Lot lot = lot(new Amount.ByVolume(Given.quantity("500", "L", Kind.VOLUME)), null, sphere("a", "3", 1));
         assertTrue(lot.massKg().isEmpty());
@@ -62,7 +72,6 @@ class LotTest {
         Quantity size = Given.quantity("18", "mm", Kind.LENGTH);
         assertEquals(0.018, new Side(Dimension.THICKNESS, size, Faces.ONE).depth());
         assertEquals(0.009, new Side(Dimension.THICKNESS, size, Faces.BOTH).depth());
-        assertThrows(Unsound.class, () -> new Side(Dimension.DIAMETER, size, Faces.ONE));
     }
 
     @Test

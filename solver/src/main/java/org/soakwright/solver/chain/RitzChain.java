@@ -14,17 +14,17 @@ import org.soakwright.solver.stage.Conditions;
  * second following with a lower degree shows.
  */
 final class RitzChain extends Chain {
-    /** Within 1e-8 of the driving difference, most readings far within; measured in the tests of this package. */
+    /** Within 1e-7 of the driving difference, means far within; held against the other chains by the tests of this package. */
     private static final int FINE = 13;
 
     /** Some 1e-4, for pictures. */
     private static final int ROUGH = 6;
 
-    /** How far the degree goes down to show the error. */
+    /** How far the degree goes down, twice, to show the error. */
     private static final int STEP = 2;
 
-    /** Spaces kept for later: each belongs to shortest stages within a factor of sixteen. */
-    private static final int MOST_SPACES = 6;
+    /** Spaces kept for later: each belongs to shortest stages within a factor of four. */
+    private static final int MOST_SPACES = 8;
 
     private final List<Grade> lot;
     private final List<Start> starts;

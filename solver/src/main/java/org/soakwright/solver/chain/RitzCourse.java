@@ -19,6 +19,12 @@ final class RitzCourse extends Course {
     /** Of the largest driving difference: what each inverse transform may be wrong by. */
     private static final double TRANSFORM = 4e-12;
 
+    /** Of the same: below this nobody looks at a single place. */
+    private static final double SHARP = 5e-9;
+
+    /** The most by which the error is taken to fall with a step of the degree where it hardly falls. */
+    private static final double SLOWEST = 0.9;
+
     final RitzChain chain;
     final Space space;
     final double[] seconds;
@@ -168,23 +174,39 @@ final class RitzCourse extends Course {
         if (probe instanceof Probe.Range range) {
             return error(new Probe.Highest(range.grade()), stage) + error(new Probe.Lowest(range.grade()), stage);
         }
+        RitzCourse once = lower();
+        double step = gap(once, probe, stage);
+        double before = once.gap(once.lower(), probe, stage);
+        // The error falls by about as much with every step of the degree; what is left after this one is the rest of
+        // that series.
+        double ratio = before > 0 ? Math.min(SLOWEST, step / before) : SLOWEST;
+        double partition =
+                probe instanceof Probe.Liquor ? 1 : chain.stage(stage).partition();
+        double floor = TRANSFORM * (stage + 1) + (probe instanceof Probe.Mean || probe.grade() < 0 ? 0 : SHARP);
+        return step * Math.max(1, 4 * ratio / (1 - ratio)) + partition * floor * driving(stage);
+    }
+
+    private RitzCourse lower() {
         if (lower == null) {
             lower = chain.lower().follow(seconds);
         }
-        double worst = Math.abs(value(probe, stage) - lower.value(probe, stage));
-        // One number may agree by chance: its neighbours are asked too.
-        List<Probe> others = probe.grade() < 0
-                ? List.of(new Probe.LotMean(), new Probe.Liquor())
+        return lower;
+    }
+
+    /** How far a reading and its neighbours lie from another course's: one number may agree by chance. */
+    private double gap(RitzCourse other, Probe probe, int stage) {
+        List<Probe> all = probe.grade() < 0
+                ? List.of(probe, new Probe.LotMean(), new Probe.Liquor())
                 : List.of(
+                        probe,
                         new Probe.Mean(probe.grade()),
                         new Probe.At(probe.grade(), 0),
                         new Probe.Surface(probe.grade()));
-        for (Probe other : others) {
-            worst = Math.max(worst, Math.abs(value(other, stage) - lower.value(other, stage)));
+        double worst = 0;
+        for (Probe one : all) {
+            worst = Math.max(worst, Math.abs(value(one, stage) - other.value(one, stage)));
         }
-        double partition =
-                probe instanceof Probe.Liquor ? 1 : chain.stage(stage).partition();
-        return worst + partition * TRANSFORM * (stage + 1) * driving(stage);
+        return worst;
     }
 
     /** The largest difference between pieces and surroundings, or between two surroundings, so far, as theta. */

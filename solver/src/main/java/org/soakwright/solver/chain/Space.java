@@ -20,10 +20,12 @@ import org.soakwright.solver.stage.Ritz;
 /** Everything of a {@link RitzChain} that belongs to one cutting of its pieces' sides into elements; found when first asked for. */
 final class Space {
     /** Shortest stages within this factor share a space. */
-    private static final double FACTOR = 16;
+    private static final double FACTOR = 4;
 
     /** Unknowns of all grades together that a stage is given, some ten milliseconds. */
     private static final int MOST_UNKNOWNS = 20_000;
+
+    private static final int MORE_ON_ONE_AXIS = 4;
 
     /** Passages prepared and kept: repeated equal fills and gradients ask again. */
     private static final int MOST_PASSAGES = 12;
@@ -72,13 +74,14 @@ final class Space {
             double[] corners = chain.starts().get(j) instanceof Start.Polyline line
                     ? line.points().stream().mapToDouble(Start.Point::position).toArray()
                     : new double[0];
+            int degree = degree(chain, chain.lot().get(j));
             for (int i = 0; i < chain.lot().get(j).sides().size(); i++) {
                 int step = fineness.get(at++);
                 ofGrade.add(
                         corners.length == 0
                                 ? known.computeIfAbsent(
-                                        List.of(step), key -> Mesh.of(Math.pow(FACTOR, step), chain.degree()))
-                                : Mesh.of(Math.pow(FACTOR, step), chain.degree(), corners));
+                                        List.of(step, degree), key -> Mesh.of(Math.pow(FACTOR, step), degree))
+                                : Mesh.of(Math.pow(FACTOR, step), degree, corners));
             }
             meshes.add(ofGrade);
         }
@@ -98,13 +101,18 @@ final class Space {
         return List.copyOf(steps);
     }
 
+    /** One axis costs so little that even the core of a sphere, where a polynomial is held least, can be sharp. */
+    private static int degree(RitzChain chain, Grade grade) {
+        return chain.degree() + (grade.oneAxis() ? MORE_ON_ONE_AXIS : 0);
+    }
+
     private static double unknowns(RitzChain chain, List<Integer> steps) {
         double sum = 0;
         int at = 0;
         for (Grade grade : chain.lot()) {
             double product = 1;
             for (int i = 0; i < grade.sides().size(); i++) {
-                product *= Mesh.of(Math.pow(FACTOR, steps.get(at++)), chain.degree())
+                product *= Mesh.of(Math.pow(FACTOR, steps.get(at++)), degree(chain, grade))
                         .size();
             }
             sum += product;

@@ -8,6 +8,8 @@ import org.soakwright.solver.chain.Start;
 import org.soakwright.solver.chain.Surroundings;
 import org.soakwright.solver.shape.Axis;
 import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.shape.Grain;
+import org.soakwright.solver.shape.Side;
 import org.soakwright.solver.stage.Surface;
 
 /** Seeded ingredients over the whole range that the solver promises. */
@@ -66,6 +68,43 @@ final class Draw {
         return lot;
     }
 
+    /** Pieces of two or three sides: a short cylinder, a bar or a brick, sizes within a factor of two about one length. */
+    Grade solid(double length) {
+        List<Side> sides = new ArrayList<>();
+        Axis first = below(3) == 0 ? Axis.CYLINDER : Axis.SLAB;
+        int count = first == Axis.CYLINDER || below(2) == 0 ? 2 : 3;
+        for (int i = 0; i < count; i++) {
+            sides.add(new Side(i == 0 ? first : Axis.SLAB, length * log(0.5, 2), i));
+        }
+        return new Grade(sides, 1e-3 * log(0.1, 10), below(2) == 0 ? 1 : log(0.5, 2));
+    }
+
+    /** So many grades of which the first has several sides, and about half of the others. */
+    List<Grade> solids(int count) {
+        double length = log(1e-3, 1e-2);
+        List<Grade> lot = new ArrayList<>(List.of(solid(length)));
+        while (lot.size() < count) {
+            lot.add(
+                    below(2) == 0
+                            ? solid(length * log(0.5, 2))
+                            : new Grade(axis(), length * log(0.3, 3), 1e-3 * log(0.1, 10)));
+        }
+        return lot;
+    }
+
+    /** Every other time with a diffusivity that differs by direction. */
+    Timed grained(Timed timed) {
+        Stage stage = timed.stage();
+        Grain grain = below(2) == 0 ? Grain.NONE : new Grain(List.of(1.0, log(0.4, 2.5), log(0.4, 2.5)));
+        return timed.with(new Stage(
+                stage.diffusivity(),
+                stage.partition(),
+                stage.surface(),
+                stage.surroundings(),
+                stage.clinging(),
+                grain));
+    }
+
     /** Mostly uniform, now and then a polyline. */
     Start start() {
         if (below(12) > 0) {
@@ -119,7 +158,12 @@ final class Draw {
             return timed;
         }
         double clinging = 0.2 * vessel.volume() * random.nextDouble();
-        return timed.with(
-                new Stage(stage.diffusivity(), stage.partition(), stage.surface(), stage.surroundings(), clinging));
+        return timed.with(new Stage(
+                stage.diffusivity(),
+                stage.partition(),
+                stage.surface(),
+                stage.surroundings(),
+                clinging,
+                stage.grain()));
     }
 }

@@ -2,6 +2,7 @@ package org.soakwright.solver.identities;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.soakwright.solver.chain.Course;
@@ -12,6 +13,7 @@ import org.soakwright.solver.chain.Start;
 import org.soakwright.solver.chain.Surroundings;
 import org.soakwright.solver.shape.Axis;
 import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.shape.Side;
 import org.soakwright.solver.stage.Surface;
 
 /** The error stated with a reading bounds its distance from the series summed to thirty digits. */
@@ -50,6 +52,57 @@ class StatedErrorTest {
         }
         honest.within(1, 600);
         useful.within(1e-8, 600);
+    }
+
+    /**
+     * Newman's products of the same series, for bars and bricks of slabs. A closed bath in equilibrium with the pieces comes first in
+     * every other draw: it changes nothing, but pieces that share a liquor are followed in another way.
+     */
+    @Test
+    void barsAndBricksInUnlimitedLiquorLieWithinTheirStatedError() {
+        Draw draw = new Draw(1002);
+        Tally products = new Tally("bars and bricks by products: true error over stated error");
+        Tally polynomials = new Tally("bars and bricks by polynomials: true error over stated error");
+        Tally useful = new Tally("bars and bricks: stated error of a content of 100");
+        for (int i = 0; i < 120; i++) {
+            List<Side> sides = new ArrayList<>();
+            double diffusivity = draw.log(1e-11, 1e-8);
+            double length = draw.log(1e-3, 1e-2);
+            for (int s = i / 2 % 2; s < 3; s++) {
+                sides.add(new Side(Axis.SLAB, length * draw.log(0.5, 2)));
+            }
+            Stage stage = new Stage(diffusivity, 0.7, new Surface.Open(), new Surroundings.Plenty(0), 0);
+            Stage still =
+                    new Stage(diffusivity, 0.7, new Surface.Open(), new Surroundings.Vessel(1e-3, 100 / 0.7, 0, 0), 0);
+            double unit = length * length / diffusivity;
+            double t = unit * draw.log(5e-3, 1);
+            double u = unit * draw.log(5e-3, 1);
+            List<Timed> steps = new ArrayList<>(List.of(new Timed(stage, t), new Timed(stage, u)));
+            if (i % 2 == 1) {
+                steps.add(0, new Timed(still, t));
+            }
+            Course course = Timed.follow(List.of(new Grade(sides, 1e-3, 1)), new Start.Uniform(100), steps);
+            for (boolean core : new boolean[] {false, true}) {
+                BigDecimal exact = new BigDecimal(100);
+                for (Side side : sides) {
+                    BigDecimal reach = new BigDecimal(side.length());
+                    BigDecimal fourier = new BigDecimal(diffusivity)
+                            .multiply(new BigDecimal(t).add(new BigDecimal(u)))
+                            .divide(reach.multiply(reach), DIGITS);
+                    exact = exact.multiply(series(Axis.SLAB, core, fourier), DIGITS);
+                }
+                Reading reading = course.read(core ? new Probe.At(0, 0) : new Probe.Mean(0), course.size() - 1);
+                double error =
+                        new BigDecimal(reading.value()).subtract(exact).abs().doubleValue();
+                (i % 2 == 0 ? products : polynomials).note(error / reading.error());
+                if (i % 2 == 0) {
+                    useful.note(reading.error());
+                }
+            }
+        }
+        products.within(1, 120);
+        useful.within(1e-8, 120);
+        polynomials.within(1, 120);
     }
 
     /**

@@ -15,7 +15,8 @@ record Timed(Stage stage, double seconds) {
     }
 
     Timed with(Surroundings around) {
-        return with(new Stage(stage.diffusivity(), stage.partition(), stage.surface(), around, stage.clinging()));
+        return with(new Stage(
+                stage.diffusivity(), stage.partition(), stage.surface(), around, stage.clinging(), stage.grain()));
     }
 
     Timed lasting(double other) {
