@@ -300,8 +300,10 @@ final class Tables {
         for (Species species : recipe.species()) {
             headers.add(species.name() + " in liquor [g/L]");
             recipe.lot().grades().forEach(grade -> {
-                for (Reading reading : List.of(Reading.MEAN, Reading.CORE, Reading.SURFACE)) {
-                    headers.add(species.name() + " " + reading.word() + ", " + grade.name() + unit(species));
+                String stated = PieceWords.differ(grade, species) ? " as stated" : "";
+                String outside = PieceWords.hasSeveralSides(grade) ? "middle of the face" : Reading.SURFACE.word();
+                for (String read : List.of(Reading.MEAN.word(), Reading.CORE.word() + stated, outside + stated)) {
+                    headers.add(species.name() + " " + read + ", " + grade.name() + unit(species));
                 }
             });
         }
