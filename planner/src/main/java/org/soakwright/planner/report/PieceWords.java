@@ -91,24 +91,38 @@ public final class PieceWords {
             case SLAB -> grade.shortest().faces() == Faces.ONE ? "the sealed face" : "the middle of the thickness";
             case CYLINDER -> "around the axis";
             case SPHERE -> "the centre";
-            case SHORT_CYLINDER, BRICK ->
-                "the core: "
-                        + grade.sides().stream().map(side -> core(grade, side)).collect(Collectors.joining(", "));
+            case SHORT_CYLINDER, BRICK -> "the core: " + place(grade);
         };
     }
 
-    private static String core(Grade grade, Side side) {
-        if (side.dimension() == Dimension.DIAMETER) {
-            return "on the axis";
+    private static String place(Grade grade) {
+        List<String> places = new ArrayList<>();
+        if (grade.shape() == Shape.SHORT_CYLINDER) {
+            places.add("on the axis");
         }
-        if (side.faces() == Faces.ONE) {
-            return grade.shape() == Shape.SHORT_CYLINDER
-                    ? "at the sealed flat face"
-                    : "at the sealed face of the " + side.dimension().word();
+        List<String> halves = grade.sides().stream()
+                .filter(side -> side.dimension().hasFaces() && side.faces() == Faces.BOTH)
+                .map(side -> half(grade, side))
+                .toList();
+        if (!halves.isEmpty()) {
+            places.add(Wording.list(halves) + " in");
         }
-        // Where sizes differ, half of the one stated would be wrong for most.
-        String half = grade.spread() == null ? " (" + half(side.size()) + ")" : "";
-        return "half the " + side.dimension().word() + half + " in";
+        List<String> sealed =
+                sealed(grade).stream().map(side -> side.dimension().word()).toList();
+        if (sealed.size() == 1) {
+            places.add(
+                    grade.shape() == Shape.BRICK
+                            ? "at the sealed face of the " + sealed.get(0)
+                            : "at the sealed flat face");
+        } else if (!sealed.isEmpty()) {
+            places.add("where the sealed faces of " + Wording.list(sealed) + " meet");
+        }
+        return String.join(", ", places);
+    }
+
+    /** Where sizes differ, half of the one stated would be wrong for most. */
+    private static String half(Grade grade, Side side) {
+        return "half the " + side.dimension().word() + (grade.spread() == null ? " (" + half(side.size()) + ")" : "");
     }
 
     private static String half(Quantity size) {
@@ -118,9 +132,12 @@ public final class PieceWords {
         return half.toPlainString() + " " + size.unit();
     }
 
-    /** Where faces meet, so that solute has the shortest ways of all. */
+    /** Where wetted faces meet, so that solute has the shortest ways of all. */
     public static String corner(Grade grade) {
-        return grade.shape() == Shape.SHORT_CYLINDER ? "the edge of a flat face" : "a corner";
+        if (grade.shape() == Shape.BRICK) {
+            return sealed(grade).isEmpty() ? "a corner" : "a corner between wetted faces";
+        }
+        return sealed(grade).isEmpty() ? "the edge of a flat face" : "the edge of the open flat face";
     }
 
     /** Whether the pieces of a grade differ in what they hold of a species. */

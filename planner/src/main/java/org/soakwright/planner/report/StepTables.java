@@ -269,18 +269,20 @@ final class StepTables {
             for (StepEnd.Piece piece : end.pieces()) {
                 StepEnd.Content content = piece.species().get(s);
                 if (!content.distribution().isEmpty()) {
-                    apart.add(between(content) + (end.pieces().size() > 1 ? " in " + piece.name() : ""));
+                    apart.add(between(content) + " " + content.species()
+                            + (end.pieces().size() > 1 ? " in " + piece.name() : ""));
                 }
             }
             if (!apart.isEmpty() && apart.size() <= MOST_GRADES) {
-                means.add(end.means().get(s).species() + " " + Wording.list(apart));
+                means.add(Wording.list(apart));
             }
         }
         String averages = "Means are averages over each grade.";
         return List.of(
                 means.isEmpty()
                         ? averages
-                        : averages + " At the end 90 % of the pieces, by mass, hold " + String.join("; ", means) + ".");
+                        : averages + " At the end 90 % of the pieces, by mass, have means of "
+                                + String.join("; ", means) + ".");
     }
 
     /** All but the twentieth of the pieces that read least and the twentieth that read most. */

@@ -117,20 +117,21 @@ final class Assumptions {
     }
 
     private static String pace(Diffusivities diffusivity) {
+        List<String> values = new ArrayList<>();
         if (diffusivity instanceof Diffusivities.ByGrain byGrain) {
-            return Wording.list(byGrain.values().entrySet().stream()
-                    .map(one -> pace(one.getValue()) + " " + direction(one.getKey()))
-                    .toList());
+            byGrain.values().forEach((grain, value) -> values.add(pace(value) + " " + direction(grain)));
+        } else {
+            values.add(pace(diffusivity.all().get(0)));
         }
-        return pace(diffusivity.all().get(0));
+        return Wording.list(values) + (diffusivity.dependsOnTemperature() ? "" : " at every temperature");
     }
 
     private static String pace(Diffusivity diffusivity) {
-        return diffusivity.dependsOnTemperature()
-                ? Wording.quantity(diffusivity.value()) + " at "
-                        + Wording.quantity(Objects.requireNonNull(diffusivity.at())) + ", changing with temperature by "
-                        + diffusivity.activationEnergy() + " (Arrhenius)"
-                : Wording.quantity(diffusivity.value()) + " at every temperature";
+        return Wording.quantity(diffusivity.value())
+                + (diffusivity.dependsOnTemperature()
+                        ? " at " + Wording.quantity(Objects.requireNonNull(diffusivity.at()))
+                                + ", changing with temperature by " + diffusivity.activationEnergy() + " (Arrhenius)"
+                        : "");
     }
 
     private static String direction(Grain grain) {

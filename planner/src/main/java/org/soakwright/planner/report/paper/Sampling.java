@@ -94,7 +94,7 @@ final class Sampling {
             Quantity share = target.share();
             return share == null
                     ? "Homogenise whole " + all + "."
-                    : "Assay " + all + ", each by itself: " + share + " of them, by mass, are to keep the limit.";
+                    : "Assay " + all + ", each alone: " + share + " of them, by mass, are to keep the limit.";
         }
         Grade grade = recipe.lot().grade(state.grade().orElseThrow()).orElseThrow();
         return prepared(target.reading(), grade, target.share() != null) + counted(target, grade);
@@ -102,7 +102,7 @@ final class Sampling {
 
     private String prepared(Reading reading, Grade grade, boolean each) {
         return switch (reading) {
-            case MEAN -> (each ? "Homogenise every piece by itself" : "Homogenise whole pieces") + apart();
+            case MEAN -> (each ? "Homogenise each piece alone" : "Homogenise whole pieces") + apart();
             case CORE -> "Cut a plug from " + PieceWords.core(grade) + apart();
             case SURFACE -> "Shave a thin layer off the wetted surface" + apart();
             case HIGHEST -> layers(grade) + ", assay each; the highest counts" + apart();
@@ -115,7 +115,7 @@ final class Sampling {
     private String counted(Target.OfPieces target, Grade grade) {
         Quantity share = target.share();
         if (share != null) {
-            return " Every piece counts by itself: " + share + " of them, by mass, are to keep the limit.";
+            return " Of the pieces " + share + ", by mass, are to keep the limit, each read alone.";
         }
         Species species = recipe.species(target.species().name()).orElseThrow();
         return target.reading() != Reading.MEAN && PieceWords.differ(grade, species)

@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import org.apache.commons.math3.special.Erf;
 import org.soakwright.planner.batch.Distribution;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.recipes.model.Grade;
@@ -23,6 +24,9 @@ record Spreading(
         OptionalDouble atMost,
         OptionalDouble share,
         List<Pieces> pieces) {
+
+    /** The normal numbers of nothing and of all are infinite. */
+    private static final double INNER = 1 - 1e-12;
 
     /**
      * The pieces of one grade, or of the lot.
@@ -51,15 +55,20 @@ record Spreading(
             return below[i - 1] + part * (below[i] - below[i - 1]);
         }
 
-        /** What a share reads at most. */
+        /** What a share reads at most: straight by normal numbers, by which readings are nearly so. */
         double atMost(double share) {
             int i = 1;
             while (i < values.length - 1 && below[i] < share) {
                 i++;
             }
-            double step = below[i] - below[i - 1];
-            double part = step > 0 ? Math.max(0, Math.min(1, (share - below[i - 1]) / step)) : 1;
+            double before = normalNumber(below[i - 1]);
+            double step = normalNumber(below[i]) - before;
+            double part = step > 0 ? Math.max(0, Math.min(1, (normalNumber(share) - before) / step)) : 1;
             return values[i - 1] + part * (values[i] - values[i - 1]);
+        }
+
+        private static double normalNumber(double share) {
+            return Math.sqrt(2) * Erf.erfInv(Math.max(-INNER, Math.min(INNER, 2 * share - 1)));
         }
 
         String verdict() {
