@@ -55,7 +55,7 @@ public class PlanBench {
             minimise: time
             """;
 
-    @Param({"three waters", "loin-desalting", "cord-brining", "bead-washing"})
+    @Param({"three waters", "loin-desalting", "cord-brining", "bead-washing", "wheel-brining", "brick-desalination"})
     public String recipe = "";
 
     private final List<Recipe> read = new ArrayList<>();

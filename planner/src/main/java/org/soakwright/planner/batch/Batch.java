@@ -127,7 +127,13 @@ public final class Batch {
                         + (slot.part() > 0 && slot.part() < 1 ? " per fill" : "") + ", which needs more than "
                         + Chain.MOST_MODES + " modes"
                         + (chains.get(species).lot().size() > 1
-                                ? " over " + chains.get(species).lot().size() + " grades and classes of pieces"
+                                ? " over " + chains.get(species).lot().size()
+                                        + (recipe.lot().grades().size()
+                                                        == chains.get(species)
+                                                                .lot()
+                                                                .size()
+                                                ? " grades"
+                                                : " classes of pieces")
                                 : "")
                         + "; write at least " + Durations.practical(Math.ceil(shortest)));
         unsound.initCause(cause);

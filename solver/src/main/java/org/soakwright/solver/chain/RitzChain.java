@@ -20,9 +20,6 @@ final class RitzChain extends Chain {
     /** Some 1e-4, for pictures. */
     private static final int ROUGH = 6;
 
-    /** How far the degree goes down, twice, to show the error. */
-    private static final int STEP = 2;
-
     /** Spaces kept for later: each belongs to shortest stages within a factor of four. */
     private static final int MOST_SPACES = 8;
 
@@ -33,15 +30,14 @@ final class RitzChain extends Chain {
     private final int degree;
     private final double[] mixed;
     private final Conditions[] conditions;
-    private final Map<List<Integer>, Space> spaces = new LinkedHashMap<>(8, 0.75f, true) {
+    private final Map<Fineness, Space> spaces = new LinkedHashMap<>(8, 0.75f, true) {
         private static final long serialVersionUID = 1;
 
         @Override
-        protected boolean removeEldestEntry(Map.Entry<List<Integer>, Space> eldest) {
+        protected boolean removeEldestEntry(Map.Entry<Fineness, Space> eldest) {
             return size() > MOST_SPACES;
         }
     };
-    private @Nullable RitzChain lower;
     private @Nullable RitzChain sketch;
 
     RitzChain(List<Grade> lot, List<Start> starts, List<Stage> stages, Set<Integer> passing) {
@@ -103,16 +99,11 @@ final class RitzChain extends Chain {
     @Override
     public RitzCourse follow(double... seconds) {
         requireDurations(seconds, stages.size());
-        List<Integer> fineness = Space.fineness(this, seconds);
-        return new RitzCourse(this, spaces.computeIfAbsent(fineness, key -> new Space(this, key)), seconds.clone());
+        return follow(Fineness.of(this, seconds), seconds);
     }
 
-    /** The same with a lower degree: what it differs by is more than the error of this one. */
-    RitzChain lower() {
-        if (lower == null) {
-            lower = new RitzChain(lot, starts, stages, passing, degree - STEP);
-        }
-        return lower;
+    RitzCourse follow(Fineness fineness, double... seconds) {
+        return new RitzCourse(this, spaces.computeIfAbsent(fineness, key -> new Space(this, key)), seconds.clone());
     }
 
     @Override

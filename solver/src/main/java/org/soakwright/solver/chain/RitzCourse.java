@@ -182,13 +182,15 @@ final class RitzCourse extends Course {
         double ratio = before > 0 ? Math.min(SLOWEST, step / before) : SLOWEST;
         double partition =
                 probe instanceof Probe.Liquor ? 1 : chain.stage(stage).partition();
-        double floor = TRANSFORM * (stage + 1) + (probe instanceof Probe.Mean || probe.grade() < 0 ? 0 : SHARP);
+        double floor = TRANSFORM * (stage + 1)
+                + space.fineness().blur()
+                + (probe instanceof Probe.Mean || probe.grade() < 0 ? 0 : SHARP);
         return step * Math.max(1, 4 * ratio / (1 - ratio)) + partition * floor * driving(stage);
     }
 
     private RitzCourse lower() {
         if (lower == null) {
-            lower = chain.lower().follow(seconds);
+            lower = chain.follow(space.fineness().lower(), seconds);
         }
         return lower;
     }

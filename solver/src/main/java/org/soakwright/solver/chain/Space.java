@@ -19,30 +19,22 @@ import org.soakwright.solver.stage.Ritz;
 
 /** Everything of a {@link RitzChain} that belongs to one cutting of its pieces' sides into elements; found when first asked for. */
 final class Space {
-    /** Shortest stages within this factor share a space. */
-    private static final double FACTOR = 4;
+    /** Unknowns of the passages prepared and kept, which equal fills and gradients ask for again: some forty megabytes. */
+    private static final int MOST_KEPT = 300_000;
 
-    /** Unknowns of all grades together that a stage is given, some ten milliseconds. */
-    private static final int MOST_UNKNOWNS = 20_000;
-
-    private static final int MORE_ON_ONE_AXIS = 4;
-
-    /** Passages prepared and kept: repeated equal fills and gradients ask again. */
-    private static final int MOST_PASSAGES = 12;
+    /** Passages kept whatever their size. */
+    private static final int FEWEST_KEPT = 3;
 
     private final RitzChain chain;
+    private final Fineness fineness;
     private final List<List<Mesh>> meshes = new ArrayList<>();
+    private final List<List<Boolean>> sealedSides = new ArrayList<>();
     private final Map<Wanted, Ritz> sides = new HashMap<>();
     private final Map<Conditions, List<Product>> products = new HashMap<>();
     private final Map<Crossing, List<double[][]>> carries = new HashMap<>();
-    private final Map<Passing, Bathing> passages = new LinkedHashMap<>(16, 0.75f, true) {
-        private static final long serialVersionUID = 1;
+    /** Those used last stay longest. */
+    private final Map<Passing, Bathing> passages = new LinkedHashMap<>(16, 0.75f, true);
 
-        @Override
-        protected boolean removeEldestEntry(Map.Entry<Passing, Bathing> eldest) {
-            return size() > MOST_PASSAGES;
-        }
-    };
     private final Passed passed = new Passed();
     /** What was looked up before, by stage and then by grade: the maps' keys are long. */
     private final List<@Nullable List<Product>> byStage;
@@ -61,8 +53,9 @@ final class Space {
         RitzCourse course;
     }
 
-    Space(RitzChain chain, List<Integer> fineness) {
+    Space(RitzChain chain, Fineness fineness) {
         this.chain = chain;
+        this.fineness = fineness;
         byStage = new ArrayList<>(Collections.nCopies(chain.size(), null));
         for (int k = 0; k < chain.size(); k++) {
             carried.add(new ArrayList<>(Collections.nCopies(chain.lot().size(), null)));
@@ -71,69 +64,26 @@ final class Space {
         int at = 0;
         for (int j = 0; j < chain.lot().size(); j++) {
             List<Mesh> ofGrade = new ArrayList<>();
+            List<Boolean> sealed = new ArrayList<>();
             double[] corners = chain.starts().get(j) instanceof Start.Polyline line
                     ? line.points().stream().mapToDouble(Start.Point::position).toArray()
                     : new double[0];
-            int degree = degree(chain, chain.lot().get(j));
+            int degree = fineness.degree(chain.lot().get(j));
             for (int i = 0; i < chain.lot().get(j).sides().size(); i++) {
-                int step = fineness.get(at++);
+                int step = fineness.steps().get(at++);
+                sealed.add(step == Fineness.SEALED);
                 ofGrade.add(
                         corners.length == 0
-                                ? known.computeIfAbsent(
-                                        List.of(step, degree), key -> Mesh.of(Math.pow(FACTOR, step), degree))
-                                : Mesh.of(Math.pow(FACTOR, step), degree, corners));
+                                ? known.computeIfAbsent(List.of(step, degree), key -> Fineness.mesh(step, degree))
+                                : Fineness.mesh(step, degree, corners));
             }
             meshes.add(ofGrade);
+            sealedSides.add(sealed);
         }
     }
 
-    /**
-     * Of each side of each grade, the shortest stage's Fourier number in powers of the factor, rounded down. Where that asks for too many
-     * unknowns the finest sides are taken coarser: a short stage's own end is then less sharp, which its error says, and what
-     * comes after longer ones hardly suffers.
-     */
-    static List<Integer> fineness(RitzChain chain, double[] seconds) {
-        List<Integer> steps = new ArrayList<>(asked(chain, seconds));
-        while (unknowns(chain, steps) > MOST_UNKNOWNS && Collections.min(steps) < 0) {
-            int finest = Collections.min(steps);
-            steps.replaceAll(step -> step == finest ? finest + 1 : step);
-        }
-        return List.copyOf(steps);
-    }
-
-    /** One axis costs so little that even the core of a sphere, where a polynomial is held least, can be sharp. */
-    private static int degree(RitzChain chain, Grade grade) {
-        return chain.degree() + (grade.oneAxis() ? MORE_ON_ONE_AXIS : 0);
-    }
-
-    private static double unknowns(RitzChain chain, List<Integer> steps) {
-        double sum = 0;
-        int at = 0;
-        for (Grade grade : chain.lot()) {
-            double product = 1;
-            for (int i = 0; i < grade.sides().size(); i++) {
-                product *= Mesh.of(Math.pow(FACTOR, steps.get(at++)), degree(chain, grade))
-                        .size();
-            }
-            sum += product;
-        }
-        return sum;
-    }
-
-    private static List<Integer> asked(RitzChain chain, double[] seconds) {
-        List<Integer> steps = new ArrayList<>();
-        for (Grade grade : chain.lot()) {
-            for (int i = 0; i < grade.sides().size(); i++) {
-                double least = Double.POSITIVE_INFINITY;
-                for (int k = 0; k < seconds.length; k++) {
-                    if (!chain.passing(k)) {
-                        least = Math.min(least, chain.conditions(k).pace(grade, i) * seconds[k]);
-                    }
-                }
-                steps.add((int) Math.floor(Math.min(0, Math.log(least) / Math.log(FACTOR))));
-            }
-        }
-        return steps;
+    Fineness fineness() {
+        return fineness;
     }
 
     Passed passed() {
@@ -164,7 +114,8 @@ final class Space {
         Grade pieces = chain.lot().get(grade);
         for (int i = 0; i < pieces.sides().size(); i++) {
             Side side = pieces.sides().get(i);
-            Wanted wanted = new Wanted(side.axis(), meshes.get(grade).get(i), conditions.biot(pieces, i));
+            boolean sealed = sealedSides.get(grade).get(i);
+            Wanted wanted = new Wanted(side.axis(), meshes.get(grade).get(i), sealed ? 0 : conditions.biot(pieces, i));
             found.add(sides.computeIfAbsent(wanted, key -> new Ritz(key.axis, key.mesh, key.biot)));
         }
         return found;
@@ -224,9 +175,17 @@ final class Space {
     }
 
     Bathing bathing(int stage, double seconds) {
-        Conditions conditions = chain.conditions(stage);
-        return passages.computeIfAbsent(
-                new Passing(conditions, seconds),
-                key -> new Bathing(products(conditions), (Bath.Vessel) conditions.bath(), seconds));
+        Passing wanted = new Passing(chain.conditions(stage), seconds);
+        Bathing known = passages.get(wanted);
+        if (known == null) {
+            List<Product> lot = products(stage);
+            int unknowns = lot.stream().mapToInt(Product::size).sum();
+            while (passages.size() >= Math.max(FEWEST_KEPT, MOST_KEPT / unknowns)) {
+                passages.remove(passages.keySet().iterator().next());
+            }
+            known = new Bathing(lot, (Bath.Vessel) wanted.conditions.bath(), seconds);
+            passages.put(wanted, known);
+        }
+        return known;
     }
 }

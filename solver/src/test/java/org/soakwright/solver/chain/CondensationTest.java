@@ -98,11 +98,11 @@ class CondensationTest {
         Stage dip = new Stage(1e-9, 1, new Surface.Open(), new Surroundings.Vessel(0.02, 0, 0, 0), 0);
         List<Start> starts = List.of(new Start.Uniform(1));
         RitzChain chain = new RitzChain(List.of(brick), starts, List.of(dip), Set.of());
-        RitzCourse course = chain.follow(2);
-        assertTrue(course.modes(0) <= 20_000, () -> "unknowns " + course.modes(0));
+        RitzCourse course = chain.follow(0.02);
+        assertTrue(course.modes(0) <= Fineness.MOST_UNKNOWNS, () -> "unknowns " + course.modes(0));
         // One after the other: each axis alone is exact, and so early the three layers hardly meet.
         Reading mean = course.read(new Probe.Mean(0), 0);
-        double layers = 2 * Math.sqrt(1e-9 * 2 / Math.PI);
+        double layers = 2 * Math.sqrt(1e-9 * 0.02 / Math.PI);
         double lost = 1 - (1 - layers / 0.03) * (1 - layers / 0.05) * (1 - layers / 0.1);
         assertTrue(mean.error() > 1e-9, () -> "stated " + mean.error());
         assertTrue(

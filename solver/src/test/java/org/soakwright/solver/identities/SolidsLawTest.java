@@ -62,11 +62,11 @@ class SolidsLawTest {
             List<Grade> lot = draw.solids(1 + i % 2);
             Start start = new Start.Uniform(draw.between(0, Draw.MOST));
             List<Timed> steps = new ArrayList<>();
-            for (Kind kind : List.of(Kind.CLOSED, Kind.AIR, Kind.CLOSED)) {
+            for (Kind kind : List.of(Kind.CLOSED, Kind.REST, Kind.CLOSED)) {
                 Timed step = draw.grained(draw.stage(lot, kind, 1));
                 double length = lot.get(0).length();
                 double unit = length * length / step.stage().diffusivity();
-                steps.add(step.lasting(unit * (kind == Kind.AIR ? draw.log(1e-5, 1e-3) : draw.log(0.03, 1))));
+                steps.add(step.lasting(unit * (kind == Kind.REST ? draw.log(1e-5, 1e-3) : draw.log(0.03, 1))));
             }
             List<Start> starts = Collections.nCopies(lot.size(), start);
             List<Stage> stages = steps.stream().map(Timed::stage).toList();
@@ -249,7 +249,9 @@ class SolidsLawTest {
             Reading a = one.read(probe, k);
             Reading b = other.read(probe, m);
             double difference = Math.abs(a.value() - b.value());
-            worst = Math.max(worst, difference / theta);
+            // Where so much cannot be promised the stated error says so, and is what counts.
+            boolean promised = a.error() + b.error() < 1e-6 * theta;
+            worst = Math.max(worst, promised ? difference / theta : 0);
             dishonest = Math.max(dishonest, difference / (a.error() + b.error() + 0x1p-52 * theta));
         }
         tally.note(worst);
