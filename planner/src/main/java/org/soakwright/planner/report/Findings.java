@@ -12,7 +12,6 @@ import org.soakwright.planner.batch.Plan;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.planner.batch.Totals;
-import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Recipe;
 
 /**
@@ -30,6 +29,7 @@ public record Findings(String title, List<String> about, List<String> answer, bo
     public static final String LIQUOR = "liquor";
     public static final String EXPECTED = "expected";
     public static final String CONTENTS = "contents";
+    public static final String PERCENTILES = "percentiles";
     public static final String TARGETS = "targets";
     public static final String TOTALS = "totals";
     public static final String PER_HOUR = "per-hour";
@@ -50,7 +50,7 @@ public record Findings(String title, List<String> about, List<String> answer, bo
         List<Section> sections = new ArrayList<>();
         body(run, List.of(), start, sections);
         sections.add(cautions(run));
-        return new Findings(title(run), List.of(lot(run)), Answer.followed(run), run.meetsTargets(), sections);
+        return new Findings(title(run), about(run), Answer.followed(run), run.meetsTargets(), sections);
     }
 
     /** Of a plan; where no choice meets the targets, of its nearest miss, marked as such. */
@@ -65,7 +65,7 @@ public record Findings(String title, List<String> about, List<String> answer, bo
             sections.add(perHour(plan));
         }
         sections.add(cautions(run));
-        return new Findings(title(run), List.of(lot(run)), Answer.planned(plan), plan.met(), sections);
+        return new Findings(title(run), about(run), Answer.planned(plan), plan.met(), sections);
     }
 
     public Optional<Section> section(String id) {
@@ -76,19 +76,19 @@ public record Findings(String title, List<String> about, List<String> answer, bo
         return run.batch().recipe().title();
     }
 
-    private static String lot(Run run) {
+    private static List<String> about(Run run) {
         Recipe recipe = run.batch().recipe();
-        String grades = recipe.lot().grades().stream().map(Findings::grade).collect(Collectors.joining("; "));
+        List<String> about = new ArrayList<>(List.of(lot(recipe)));
+        PieceWords.differences(recipe).ifPresent(about::add);
+        return about;
+    }
+
+    private static String lot(Recipe recipe) {
+        String grades = recipe.lot().grades().stream().map(PieceWords::grade).collect(Collectors.joining("; "));
         String mass = recipe.lot().massKg().isPresent()
                 ? Figures.made(recipe.lot().massKg().getAsDouble()) + " kg"
                 : Figures.made(recipe.lot().volumeM3() * 1000) + " L of pieces";
         return mass + ": " + grades;
-    }
-
-    private static String grade(Grade grade) {
-        String share = grade.share() < 1 ? Figures.made(grade.share() * 100) + " % " : "";
-        return share + grade.name() + ", " + grade.shape().word() + " of "
-                + grade.shortest().size();
     }
 
     private static void body(Run run, List<String> binds, Optional<LocalDateTime> start, List<Section> sections) {
@@ -98,7 +98,7 @@ public record Findings(String title, List<String> about, List<String> answer, bo
         if (!liquor.isEmpty()) {
             sections.add(Section.of(LIQUOR, "Liquor to make up", liquor, tables.clinging()));
         }
-        sections.add(Section.of(EXPECTED, "Expected at the end of each step", tables.expected(), List.of()));
+        sections.add(Section.of(EXPECTED, "Expected at the end of each step", tables.expected(), tables.differences()));
         Table targets = targets(run, binds);
         if (!targets.isEmpty()) {
             sections.add(Section.of(TARGETS, "Targets", targets, List.of()));
@@ -109,6 +109,18 @@ public record Findings(String title, List<String> about, List<String> answer, bo
     /** Every reading of every grade at the end of each step: more than a sheet has room for. */
     public static Section contents(Run run) {
         return Section.of(CONTENTS, "In the pieces at the end of each step", new StepTables(run).contents(), List.of());
+    }
+
+    /** How many pieces read how much at the end of each step; empty where all pieces of a grade are alike. */
+    public static Optional<Section> percentiles(Run run) {
+        Table table = new StepTables(run).percentiles();
+        return table.isEmpty()
+                ? Optional.empty()
+                : Optional.of(Section.of(
+                        PERCENTILES,
+                        "How the pieces differ at the end of each step",
+                        table,
+                        List.of("Each column says what so much of the pieces of a grade, by mass, reads at most.")));
     }
 
     private static Table targets(Run run, List<String> binds) {

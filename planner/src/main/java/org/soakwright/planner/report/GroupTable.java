@@ -21,7 +21,10 @@ public final class GroupTable {
                 "groups",
                 "What decides each step",
                 table(recipe, groups),
-                List.of("Fo = D t/L², Bi = k L/(K D), capacity = liquor/(K x pieces); L from wetted surface to core."));
+                List.of("Fo = D t/L², Bi = k L/(K D), capacity = liquor/(K x pieces); L from wetted surface to core"
+                        + (recipe.lot().grades().stream().anyMatch(PieceWords::hasSeveralSides)
+                                ? ", the shortest way."
+                                : ".")));
     }
 
     private static Table table(Recipe recipe, List<Groups.Group> groups) {

@@ -103,8 +103,26 @@ public final class ResultJson {
                     for (Reading reading : Reading.values()) {
                         json.number(reading.word(), content.value(reading));
                     }
+                    distribution(json, content);
                     json.number("error", content.error());
                     json.string("unit", content.unit().symbol());
+                });
+            }
+        });
+    }
+
+    /** What so many per cent of the pieces, by mass, read at most; only where they differ. */
+    private static void distribution(JsonText json, StepEnd.Content content) throws IOException {
+        if (content.distribution().isEmpty()) {
+            return;
+        }
+        json.object("distribution", () -> {
+            for (Reading reading : Reading.values()) {
+                List<Double> values = content.distribution().getOrDefault(reading, List.of());
+                json.object(reading.word(), () -> {
+                    for (int i = 0; i < values.size(); i++) {
+                        json.number(Figures.made(100 * StepEnd.SHARES.get(i)), values.get(i));
+                    }
                 });
             }
         });
@@ -119,6 +137,9 @@ public final class ResultJson {
             json.stringOrNull("grade", state.grade());
             if (pieces.after() != null) {
                 json.string("after", pieces.after().name());
+            }
+            if (pieces.share() != null) {
+                json.number("share", pieces.share().si());
             }
             ofStart = pieces.limits().basis() == Basis.OF_START;
         } else if (target instanceof Target.OfLiquor liquor) {

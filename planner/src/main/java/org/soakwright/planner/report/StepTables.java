@@ -2,12 +2,14 @@ package org.soakwright.planner.report;
 
 import java.time.LocalDateTime;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
@@ -20,6 +22,7 @@ import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Renewal;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Target;
 
 /** What to do in each step, what to make up for it, and what to expect at its end. */
 final class StepTables {
@@ -252,6 +255,77 @@ final class StepTables {
             }
         }
         return table;
+    }
+
+    /** What the means are where pieces differ, and how far they lie apart at the end. */
+    List<String> differences() {
+        if (!PieceWords.differ(recipe)) {
+            return List.of();
+        }
+        StepEnd end = ends.get(ends.size() - 1);
+        List<String> means = new ArrayList<>();
+        for (int s = 0; s < recipe.species().size(); s++) {
+            List<String> apart = new ArrayList<>();
+            for (StepEnd.Piece piece : end.pieces()) {
+                StepEnd.Content content = piece.species().get(s);
+                if (!content.distribution().isEmpty()) {
+                    apart.add(between(content) + " " + content.species()
+                            + (end.pieces().size() > 1 ? " in " + piece.name() : ""));
+                }
+            }
+            if (!apart.isEmpty() && apart.size() <= MOST_GRADES) {
+                means.add(Wording.list(apart));
+            }
+        }
+        String averages = "Means are averages over each grade.";
+        return List.of(
+                means.isEmpty()
+                        ? averages
+                        : averages + " At the end 90 % of the pieces, by mass, have means of "
+                                + String.join("; ", means) + ".");
+    }
+
+    /** All but the twentieth of the pieces that read least and the twentieth that read most. */
+    private static String between(StepEnd.Content content) {
+        List<Double> values = content.distribution().getOrDefault(Reading.MEAN, List.of());
+        double low = values.get(StepEnd.SHARES.indexOf(0.05));
+        double high = values.get(StepEnd.SHARES.indexOf(0.95));
+        return Figures.measured(low) + " to " + Figures.measured(high) + " " + content.unit();
+    }
+
+    /** What shares of the pieces read at most, for the mean and whatever a target looks at; no row where all are alike. */
+    Table percentiles() {
+        Table table =
+                numbered(true).group("Step").group("Species").group("Grade").text("Reading");
+        StepEnd.SHARES.forEach(share -> table.number(PieceWords.percent(share)));
+        table.text("Unit");
+        Set<Reading> looked = EnumSet.of(Reading.MEAN);
+        recipe.targets().forEach(target -> {
+            if (target instanceof Target.OfPieces pieces) {
+                looked.add(pieces.reading());
+            }
+        });
+        for (int i = 0; i < ends.size(); i++) {
+            for (int s = 0; s < recipe.species().size(); s++) {
+                for (StepEnd.Piece piece : ends.get(i).pieces()) {
+                    percentiles(table, i, piece.name(), piece.species().get(s), looked);
+                }
+            }
+        }
+        return table;
+    }
+
+    private void percentiles(Table table, int step, String grade, StepEnd.Content content, Set<Reading> looked) {
+        for (Reading reading : looked) {
+            List<Double> values = content.distribution().getOrDefault(reading, List.of());
+            if (!values.isEmpty()) {
+                List<String> row = new ArrayList<>(
+                        List.of(number(step), ends.get(step).step().name(), content.species(), grade, reading.word()));
+                values.forEach(value -> row.add(Figures.measured(value)));
+                row.add(content.unit().symbol());
+                table.row(row);
+            }
+        }
     }
 
     private static String number(int step) {

@@ -123,6 +123,14 @@ public final class Wording {
         return Optional.empty();
     }
 
+    /** {@code a, b and c}. */
+    public static String list(List<String> parts) {
+        int last = parts.size() - 1;
+        return last < 1
+                ? String.join("", parts)
+                : String.join(", ", parts.subList(0, last)) + " and " + parts.get(last);
+    }
+
     /** As written, degrees as people read them: {@code 4 °C}. */
     public static String temperature(Step step) {
         Quantity temperature = step.temperature();

@@ -51,6 +51,7 @@ class ScreensTest {
         "plan,   too-tight.yaml,    1, plan-missed-with-remedies.txt",
         "follow, desalting.yaml,    0, follow-missed.txt",
         "follow, washing.yaml,      0, follow-washing.txt",
+        "follow, rounds.yaml,       0, follow-rounds.txt",
         "check,  washing.yaml,      0, check.txt",
         "check,  unplanned.yaml,    0, check-free.txt",
     })
@@ -67,6 +68,7 @@ class ScreensTest {
         "unplanned.yaml, desalting.yaml,    compare-two-plans.txt",
         "desalting.yaml, washing.yaml,      compare-unlike.txt",
         "odd-names.yaml, desalting.yaml,    compare-odd-names.txt",
+        "rounds.yaml,    blocks.yaml,       compare-rounds.txt",
     })
     void aComparisonReadsAsItIsMeantTo(String a, String b, String screen) throws IOException {
         Desk.Printed printed = desk.give("compare", desk.recipe(a), desk.recipe(b));

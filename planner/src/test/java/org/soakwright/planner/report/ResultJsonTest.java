@@ -13,6 +13,7 @@ import org.soakwright.planner.batch.Batch;
 import org.soakwright.planner.batch.Plan;
 import org.soakwright.planner.batch.Planner;
 import org.soakwright.planner.batch.Progress;
+import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepTimes;
 import org.soakwright.recipes.Outcome;
 import org.soakwright.recipes.Recipes;
@@ -50,6 +51,15 @@ class ResultJsonTest {
               - {total: time, at-most: 20 h}
             prices: {time: 40 EUR/h, liquor: 3 EUR/m3}
             """;
+
+    /** The same with pieces that differ, of which most must reach the limit. */
+    private static Run differing() {
+        String text = RECIPE.replace("    - {name: thin", "    - {name: thin")
+                .replace("species:\n  salt", "  spread: 6 %\nspecies:\n  salt")
+                .replace("at-most: LIMIT}", "at-most: 70 g/kg, share: 95 %}");
+        Recipe recipe = ((Outcome.Accepted) Recipes.read("recipe.yaml", text)).recipe();
+        return new Batch(recipe).follow(StepTimes.definite(recipe));
+    }
 
     private static Recipe recipe(String limit) {
         return ((Outcome.Accepted) Recipes.read("recipe.yaml", RECIPE.replace("LIMIT", limit))).recipe();
@@ -100,6 +110,31 @@ class ResultJsonTest {
                 List.of("mean", "core", "surface", "highest", "lowest", "range", "error", "unit"),
                 Json.names(step, "pieces", 1, "species", "salt"));
         assertEquals(List.of(), Json.names(followed(), "steps", 1, "liquor"));
+    }
+
+    @Test
+    void piecesThatDifferTellWhatSharesOfThemRead() throws IOException {
+        Run run = differing();
+        Object salt = Json.at(Json.object(ResultJson.of(STAMP, run)), "steps", 1, "pieces", 1, "species", "salt");
+        assertEquals(
+                List.of("mean", "core", "surface", "highest", "lowest", "range", "distribution", "error", "unit"),
+                Json.names(salt));
+        assertEquals(
+                List.of("mean", "core", "surface", "highest", "lowest", "range"), Json.names(salt, "distribution"));
+        assertEquals(
+                List.of("1", "5", "10", "25", "50", "75", "90", "95", "99"), Json.names(salt, "distribution", "mean"));
+        double before = 0;
+        for (String share : Json.names(salt, "distribution", "mean")) {
+            double value = Json.number(salt, "distribution", "mean", share);
+            assertTrue(value > before, share + " % read at most " + value);
+            before = value;
+        }
+        Map<String, @Nullable Object> result = Json.object(ResultJson.of(STAMP, run));
+        assertEquals(
+                List.of("species", "reading", "grade", "share", "at-most", "value", "unit", "met"),
+                Json.names(result, "targets", 0));
+        assertEquals(0.95, Json.number(result, "targets", 0, "share"));
+        assertEquals(Json.number(salt, "distribution", "mean", "95"), Json.number(result, "targets", 0, "value"), 1e-9);
     }
 
     /** 100 kg at 100 g/kg and 200 L at 1 g/L: 10.2 kg of salt, wherever they are. */

@@ -6,6 +6,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.soakwright.planner.report.Figures;
+import org.soakwright.planner.report.PieceWords;
 import org.soakwright.recipes.model.Reading;
 
 /**
@@ -134,7 +135,9 @@ public record Side(
             reading = java.util.Arrays.stream(Reading.values())
                     .filter(one -> one.word().equals(word))
                     .findFirst();
+            OptionalDouble share = target.number("share");
             name = target.at("species").text() + " " + word.toLowerCase(Locale.ROOT)
+                    + (share.isPresent() ? " in " + PieceWords.percent(share.getAsDouble()) : "")
                     + target.text("after").map(step -> " after " + step).orElse("");
         }
         return new Target(

@@ -6,18 +6,22 @@ import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.report.Figures;
+import org.soakwright.planner.report.PieceWords;
 import org.soakwright.planner.report.Wording;
+import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Diffusivity;
 import org.soakwright.recipes.model.Faces;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.Grain;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
-import org.soakwright.recipes.model.Shape;
 import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Spread;
 import org.soakwright.recipes.model.Start;
 import org.soakwright.recipes.model.Step;
 
@@ -45,35 +49,58 @@ final class Assumptions {
                 .map(Assumptions::shape)
                 .distinct()
                 .collect(Collectors.joining("; "));
-        points.add("Pieces are " + shapes
-                + ". All pieces of a grade have the size stated; they neither shrink nor swell, and liquor or air reaches"
+        points.add("Pieces are " + shapes + ". " + sizes() + " neither shrink nor swell, and liquor or air reaches"
                 + " the whole of every open face.");
+        if (PieceWords.differ(recipe)) {
+            points.add(
+                    "What differs from piece to piece is lognormal: the value stated is the median by mass. Readings of a"
+                            + " grade are averages over its pieces by mass; a target with a share holds for so much of them, by mass."
+                            + " Maps, profiles and cuts show a piece as stated.");
+        }
         points.add(
                 "Inside a piece solutes move by diffusion (Fick) alone, each by itself, at a diffusivity that does not depend on"
                         + " content. Nothing reacts, and contents count against the piece as loaded.");
         points.add("A piece has the temperature of its step from the step's beginning.");
     }
 
+    private String sizes() {
+        return PieceWords.sizes(recipe)
+                .map(spread -> "In a grade " + spread + ", all sides of a piece alike; pieces")
+                .orElse("All pieces of a grade have the size stated; they");
+    }
+
     private static String shape(Grade grade) {
-        if (grade.shape() == Shape.SLAB) {
-            return "slabs open on " + (grade.shortest().faces() == Faces.ONE ? "one face" : "both faces")
-                    + ", their edges neglected";
-        }
-        return grade.shape() == Shape.CYLINDER ? "long cylinders, their ends neglected" : "spheres";
+        return switch (grade.shape()) {
+            case SLAB ->
+                "slabs open on " + (grade.shortest().faces() == Faces.ONE ? "one face" : "both faces")
+                        + ", their edges neglected";
+            case CYLINDER -> "long cylinders, their ends neglected";
+            case SPHERE -> "spheres";
+            case SHORT_CYLINDER ->
+                "short cylinders open on their round side and "
+                        + (sealed(grade).isEmpty() ? "both flat faces" : "one flat face");
+            case BRICK -> "bricks open on every face" + butSealed(sealed(grade));
+        };
+    }
+
+    private static List<String> sealed(Grade grade) {
+        return grade.sides().stream()
+                .filter(side -> side.faces() == Faces.ONE)
+                .map(side -> side.dimension().word())
+                .toList();
+    }
+
+    private static String butSealed(List<String> sealed) {
+        return sealed.isEmpty() ? "" : " but one of the " + String.join(" and one of the ", sealed);
     }
 
     private void species(Species species) {
-        Diffusivity diffusivity = species.diffusivity().all().get(0);
         String name = species.name();
         String start = species.start() instanceof Start.Uniform uniform
-                ? uniform.content() + " everywhere in the piece at the start"
+                ? uniform.content() + " everywhere in the piece at the start" + varying(species.startVaries())
                 : "the stated profile in the piece at the start";
-        String pace = diffusivity.dependsOnTemperature()
-                ? Wording.quantity(diffusivity.value()) + " at "
-                        + Wording.quantity(Objects.requireNonNull(diffusivity.at())) + ", changing with temperature by "
-                        + diffusivity.activationEnergy() + " (Arrhenius)"
-                : Wording.quantity(diffusivity.value()) + " at every temperature";
-        points.add(name + ": " + start + "; diffusivity " + pace + ".");
+        points.add(name + ": " + start + "; diffusivity " + pace(species.diffusivity())
+                + varying(species.diffusivityVaries()) + ".");
         if (species.exchangesWith(Medium.LIQUOR)) {
             points.add(name + ": at equilibrium a piece holds "
                     + Figures.written(species.partition().value())
@@ -83,6 +110,36 @@ final class Assumptions {
         if (!species.exchangesWith(Medium.LIQUOR) || !species.exchangesWith(Medium.AIR)) {
             points.add(name + " passes into " + (species.exchangesWith(Medium.LIQUOR) ? "liquor" : "air") + " only.");
         }
+    }
+
+    private static String varying(@Nullable Spread spread) {
+        return spread == null ? "" : ", varying by " + spread.cv() + " from piece to piece";
+    }
+
+    private static String pace(Diffusivities diffusivity) {
+        List<String> values = new ArrayList<>();
+        if (diffusivity instanceof Diffusivities.ByGrain byGrain) {
+            byGrain.values().forEach((grain, value) -> values.add(pace(value) + " " + direction(grain)));
+        } else {
+            values.add(pace(diffusivity.all().get(0)));
+        }
+        return Wording.list(values) + (diffusivity.dependsOnTemperature() ? "" : " at every temperature");
+    }
+
+    private static String pace(Diffusivity diffusivity) {
+        return Wording.quantity(diffusivity.value())
+                + (diffusivity.dependsOnTemperature()
+                        ? " at " + Wording.quantity(Objects.requireNonNull(diffusivity.at()))
+                                + ", changing with temperature by " + diffusivity.activationEnergy() + " (Arrhenius)"
+                        : "");
+    }
+
+    private static String direction(Grain grain) {
+        return switch (grain) {
+            case ALONG -> "along the axis";
+            case ACROSS -> "across it";
+            case THICKNESS, WIDTH, LENGTH -> "along the " + grain.word();
+        };
     }
 
     private String overridden(String species) {

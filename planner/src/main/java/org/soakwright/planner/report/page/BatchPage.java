@@ -31,6 +31,7 @@ final class BatchPage {
     private final Run run;
     private final Recipe recipe;
     private final Findings findings;
+    private final Optional<Section> percentiles;
     private final Shell shell;
     private final Html html;
 
@@ -58,6 +59,7 @@ final class BatchPage {
         run = subject.run();
         recipe = run.batch().recipe();
         findings = subject.findings();
+        percentiles = Findings.percentiles(run);
         shell = new Shell(subject.kind(), findings.title(), findings.about());
         html = shell.html();
     }
@@ -79,6 +81,7 @@ final class BatchPage {
             findings.section(id).ifPresent(this::section);
         }
         section(Findings.contents(run));
+        percentiles.ifPresent(this::section);
         for (String id : List.of(Findings.TOTALS, Findings.PER_HOUR)) {
             findings.section(id).ifPresent(this::section);
         }
@@ -107,6 +110,7 @@ final class BatchPage {
         add(anchors, Findings.LIQUOR, "Liquor");
         add(anchors, Findings.EXPECTED, "Expected");
         anchors.add(new Shell.Anchor(Findings.CONTENTS, "In the pieces"));
+        percentiles.ifPresent(section -> anchors.add(new Shell.Anchor(section.id(), "How pieces differ")));
         add(anchors, Findings.TOTALS, "In all");
         add(anchors, Findings.PER_HOUR, "One hour more");
         anchors.add(new Shell.Anchor(ASSUMPTIONS, "Assumptions"));

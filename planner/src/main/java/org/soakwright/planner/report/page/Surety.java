@@ -8,6 +8,7 @@ import java.util.stream.Collectors;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
 import org.soakwright.planner.report.Figures;
+import org.soakwright.planner.report.PieceWords;
 
 /** How far the numbers of a batch are to be trusted. */
 final class Surety {
@@ -28,7 +29,10 @@ final class Surety {
                         .map(error -> bound(error.getValue()) + " " + error.getKey())
                         .collect(Collectors.joining(" and "))
                 + ". How well they hold on the floor depends on the values the recipe states, above all diffusivity,"
-                + " partition, film and piece size: each is taken as exact here and the same for every piece. Keep a margin"
+                + " partition, film and piece size: each is taken as exact here"
+                + (PieceWords.differ(run.batch().recipe())
+                        ? ", and so is how far pieces are said to differ. Keep a margin"
+                        : " and the same for every piece. Keep a margin")
                 + " until an assay has confirmed them.");
         return sentences;
     }

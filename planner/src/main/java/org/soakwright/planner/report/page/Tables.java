@@ -19,6 +19,7 @@ import org.soakwright.planner.batch.Totals;
 import org.soakwright.planner.batch.Trace;
 import org.soakwright.planner.report.Csv;
 import org.soakwright.planner.report.Findings;
+import org.soakwright.planner.report.PieceWords;
 import org.soakwright.planner.report.Wording;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
@@ -55,6 +56,7 @@ final class Tables {
         tables.steps(start);
         tables.liquor();
         tables.contents();
+        tables.percentiles();
         tables.targets();
         tables.totals();
         if (plan != null) {
@@ -170,6 +172,35 @@ final class Tables {
         add(Findings.CONTENTS, csv);
     }
 
+    /** What shares of the pieces of a grade, by mass, read at most; no file where all are alike. */
+    private void percentiles() {
+        List<String> headers = new ArrayList<>(List.of("step number", "step", "species", "grade", "reading"));
+        StepEnd.SHARES.forEach(share -> headers.add(PieceWords.percent(share)));
+        headers.add("unit");
+        Csv csv = new Csv(headers);
+        boolean any = false;
+        for (int i = 0; i < ends.size(); i++) {
+            for (StepEnd.Piece piece : ends.get(i).pieces()) {
+                for (StepEnd.Content content : piece.species()) {
+                    for (Map.Entry<Reading, List<Double>> one :
+                            content.distribution().entrySet()) {
+                        csv.number(i + 1)
+                                .text(ends.get(i).step().name())
+                                .text(content.species())
+                                .text(piece.name())
+                                .text(one.getKey().word());
+                        one.getValue().forEach(csv::number);
+                        csv.text(content.unit().symbol()).end();
+                        any = true;
+                    }
+                }
+            }
+        }
+        if (any) {
+            add(Findings.PERCENTILES, csv);
+        }
+    }
+
     private void targets() {
         if (recipe.targets().isEmpty()) {
             return;
@@ -269,8 +300,10 @@ final class Tables {
         for (Species species : recipe.species()) {
             headers.add(species.name() + " in liquor [g/L]");
             recipe.lot().grades().forEach(grade -> {
-                for (Reading reading : List.of(Reading.MEAN, Reading.CORE, Reading.SURFACE)) {
-                    headers.add(species.name() + " " + reading.word() + ", " + grade.name() + unit(species));
+                String stated = PieceWords.differ(grade, species) ? " as stated" : "";
+                String outside = PieceWords.hasSeveralSides(grade) ? "middle of the face" : Reading.SURFACE.word();
+                for (String read : List.of(Reading.MEAN.word(), Reading.CORE.word() + stated, outside + stated)) {
+                    headers.add(species.name() + " " + read + ", " + grade.name() + unit(species));
                 }
             });
         }

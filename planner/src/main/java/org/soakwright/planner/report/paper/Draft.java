@@ -14,10 +14,9 @@ import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.planner.report.Figures;
+import org.soakwright.planner.report.PieceWords;
 import org.soakwright.planner.report.Stamp;
 import org.soakwright.planner.report.Wording;
-import org.soakwright.recipes.model.Faces;
-import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Lot;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
@@ -85,14 +84,12 @@ final class Draft {
         Lot lot = recipe.lot();
         String volume = MakeUp.litres(lot.volumeM3()) + " of pieces";
         String amount = lot.massKg().isPresent() ? Figures.made(lot.massKg().getAsDouble()) + " kg, " + volume : volume;
-        return List.of(amount + ": " + lot.grades().stream().map(Draft::grade).collect(Collectors.joining("; ")) + ".");
-    }
-
-    private static String grade(Grade grade) {
-        String share = grade.share() < 1 ? Figures.made(grade.share() * 100) + " % " : "";
-        String sealed = grade.shortest().faces() == Faces.ONE ? " with one face sealed" : "";
-        return share + grade.name() + ", " + grade.shape().word() + " of "
-                + grade.shortest().size() + sealed;
+        String grades = lot.grades().stream().map(PieceWords::grade).collect(Collectors.joining("; "));
+        List<String> lines = new ArrayList<>(List.of(amount + ": " + grades + "."));
+        PieceWords.differences(recipe)
+                .ifPresent(differences -> lines.add(
+                        differences + " What is expected is the average over a grade, unless a share is named."));
+        return lines;
     }
 
     private List<String> timing() {

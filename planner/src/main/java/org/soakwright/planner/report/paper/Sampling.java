@@ -9,12 +9,15 @@ import java.util.Set;
 import org.soakwright.planner.batch.EachGrade;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.TargetState;
-import org.soakwright.recipes.model.Faces;
+import org.soakwright.planner.report.PieceWords;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.GradeScope;
+import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Reference;
 import org.soakwright.recipes.model.Shape;
+import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Target;
 
 /** How to take what the targets speak of. */
@@ -87,12 +90,20 @@ final class Sampling {
 
     private String how(Target.OfPieces target, TargetState state) {
         if (target.grade() instanceof GradeScope.WholeLot) {
-            return "Homogenise whole pieces of all grades, taken in the shares in which they are loaded.";
+            String all = "pieces of all grades, taken in the shares in which they are loaded";
+            Quantity share = target.share();
+            return share == null
+                    ? "Homogenise whole " + all + "."
+                    : "Assay " + all + ", each alone: " + share + " of them, by mass, are to keep the limit.";
         }
         Grade grade = recipe.lot().grade(state.grade().orElseThrow()).orElseThrow();
-        return switch (target.reading()) {
-            case MEAN -> "Homogenise whole pieces" + apart();
-            case CORE -> "Cut a plug from " + core(grade) + apart();
+        return prepared(target.reading(), grade, target.share() != null) + counted(target, grade);
+    }
+
+    private String prepared(Reading reading, Grade grade, boolean each) {
+        return switch (reading) {
+            case MEAN -> (each ? "Homogenise each piece alone" : "Homogenise whole pieces") + apart();
+            case CORE -> "Cut a plug from " + PieceWords.core(grade) + apart();
             case SURFACE -> "Shave a thin layer off the wetted surface" + apart();
             case HIGHEST -> layers(grade) + ", assay each; the highest counts" + apart();
             case LOWEST -> layers(grade) + ", assay each; the lowest counts" + apart();
@@ -100,19 +111,27 @@ final class Sampling {
         };
     }
 
+    /** What is made of the readings of several pieces that differ. */
+    private String counted(Target.OfPieces target, Grade grade) {
+        Quantity share = target.share();
+        if (share != null) {
+            return " Of the pieces " + share + ", by mass, are to keep the limit, each read alone.";
+        }
+        Species species = recipe.species(target.species().name()).orElseThrow();
+        return target.reading() != Reading.MEAN && PieceWords.differ(grade, species)
+                ? " Pieces differ: the average of several counts."
+                : "";
+    }
+
     private String apart() {
         return recipe.lot().grades().size() == 1 ? "." : ", each grade by itself.";
     }
 
-    private static String core(Grade grade) {
-        return switch (grade.shape()) {
-            case SLAB -> grade.shortest().faces() == Faces.ONE ? "the sealed face" : "the middle of the thickness";
-            case CYLINDER -> "around the axis";
-            case SPHERE, SHORT_CYLINDER, BRICK -> "the centre";
-        };
-    }
-
+    /** Of several sides, what is least or most may lie where faces meet. */
     private static String layers(Grade grade) {
+        if (PieceWords.hasSeveralSides(grade)) {
+            return "Cut what lies between the core and " + PieceWords.corner(grade) + " into small parts";
+        }
         String through = grade.shape() == Shape.SLAB ? "through the whole thickness" : "from the surface to the core";
         return "Cut a plug " + through + " into thin layers";
     }

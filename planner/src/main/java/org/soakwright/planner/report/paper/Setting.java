@@ -28,8 +28,8 @@ final class Setting {
     private static final int NO_LIMIT = Integer.MAX_VALUE;
 
     private static final double[] TARGETS = {90, 60, 80, 100, 84, 54, 80};
-    private static final double[] MOMENTS = {42, 42, 94, 193, 90, 54};
-    private static final double[] MOMENTS_WITHOUT_WALL = {42, 42, 287, 90, 54};
+    private static final double[] MOMENTS = {42, 50, 94, 185, 90, 54};
+    private static final double[] MOMENTS_WITHOUT_WALL = {42, 50, 279, 90, 54};
 
     final Face regular;
     final Face semibold;

@@ -3,10 +3,10 @@ package org.soakwright.planner.report.picture;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
-import org.soakwright.planner.batch.EachGrade;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.recipes.model.Basis;
 import org.soakwright.recipes.model.Limits;
+import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Target;
 
@@ -22,7 +22,7 @@ record Bound(double level, String text) {
         List<Bound> bounds = new ArrayList<>();
         String name = history.recipe().species().get(species).name();
         String gradeName = history.grades().get(grade).name();
-        for (TargetState state : EachGrade.of(history.run())) {
+        for (TargetState state : history.targets()) {
             if (state.target() instanceof Target.OfPieces pieces
                     && pieces.reading() != Reading.RANGE
                     && pieces.species().name().equals(name)
@@ -45,7 +45,9 @@ record Bound(double level, String text) {
             TargetState state) {
         if (limit.isPresent()) {
             double value = limit.getAsDouble();
-            String text = pieces.reading().word() + " " + sign + " " + Words.written(value) + " " + state.unit();
+            Quantity share = pieces.share();
+            String text = pieces.reading().word() + " " + sign + " " + Words.written(value) + " " + state.unit()
+                    + (share == null ? "" : " in " + share);
             bounds.add(new Bound(value * factor, text));
         }
     }

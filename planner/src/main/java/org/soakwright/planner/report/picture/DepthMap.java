@@ -1,16 +1,14 @@
 package org.soakwright.planner.report.picture;
 
 import java.awt.Graphics2D;
-import java.awt.geom.Path2D;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
-import java.awt.geom.RoundRectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 import org.soakwright.planner.batch.Durations;
+import org.soakwright.planner.report.PieceWords;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Reading;
-import org.soakwright.recipes.model.Shape;
 
 /** One species in one grade: the clock across, the depth into the piece down, the content as a shade; core, mean and surface below. */
 final class DepthMap {
@@ -30,6 +28,8 @@ final class DepthMap {
     private final Ribbon ribbon;
     private final int species;
     private final Grade grade;
+    private final boolean several;
+    private final boolean differs;
     private final double[][] profiles;
     private final List<Bound> bounds;
     private final Scale contents;
@@ -37,7 +37,12 @@ final class DepthMap {
     private final List<double[]> courses = new ArrayList<>();
     private final double[][] shares;
 
-    DepthMap(History history, Clock clock, int species, int gradeIndex) {
+    /**
+     * A map.
+     *
+     * @param contents what the shades stand for
+     */
+    DepthMap(History history, Clock clock, int species, int gradeIndex, Scale contents) {
         this.history = history;
         this.clock = clock;
         ribbon = new Ribbon(clock, history.ends(), Look.WIDTH - LEFT - RIGHT);
@@ -45,13 +50,9 @@ final class DepthMap {
         grade = history.grades().get(gradeIndex);
         profiles = history.profiles(species, gradeIndex);
         bounds = Bound.of(history, species, gradeIndex);
-        double most = 0;
-        double least = Double.POSITIVE_INFINITY;
-        for (double[] profile : profiles) {
-            most = Math.max(most, History.highest(profile));
-            least = Math.min(least, History.lowest(profile));
-        }
-        contents = Scale.holding(least, most, 5);
+        this.contents = contents;
+        several = PieceWords.hasSeveralSides(grade);
+        differs = PieceWords.differ(grade, history.recipe().species().get(species));
         depths = Scale.full(1000 * grade.depth(), 6).reversed();
         for (Reading reading : COURSES) {
             courses.add(history.readings(species, gradeIndex, reading));
@@ -85,16 +86,16 @@ final class DepthMap {
         Look look = sheet.look();
         sheet.head(
                 title(),
-                "Shade: the content. Above: the steps. Below: core, mean and surface."
+                "Shade: the content" + where() + ". Above: the steps. Below: core, mean and " + outside() + "."
                         + (bounds.isEmpty() ? "" : " Lines: contents that targets name."));
         int width = Look.WIDTH - LEFT - RIGHT;
         Panel map = new Panel(new Rectangle2D.Double(LEFT, MAP_TOP, width, MAP_HEIGHT), clock, depths);
         map.image(Shades.image(shares, look.contents()));
         map.on(sheet);
-        map.nameRows(sheet, "depth from the " + (surfaceIsFace() ? "wetted face" : "surface") + ", mm");
+        map.nameRows(sheet, "depth from the " + from() + ", mm");
         ribbon.over(sheet, map, Sheet.TOP + 4);
         contours(sheet, map);
-        shadeScale(sheet, map);
+        ShadeBar.on(sheet, map.area().getMaxX() + 22, MAP_TOP, MAP_HEIGHT, contents, history.unit(species));
         Panel course = new Panel(new Rectangle2D.Double(LEFT, COURSE_TOP, width, COURSE_HEIGHT), clock, contents);
         ribbon.through(sheet, course);
         Labels labels = new Labels(course.area().getMaxX(), RIGHT);
@@ -110,17 +111,43 @@ final class DepthMap {
             double[] values = courses.get(i);
             course.line(history.clocks(), values, look.series(i), Look.line(i));
             double last = values[values.length - 1];
-            labels.add(COURSES.get(i).word() + " " + Words.number(last), course.y(last), look.series(i));
+            labels.add(word(i) + " " + Words.number(last), course.y(last), look.series(i));
         }
         course.on(sheet);
         course.nameRows(sheet, "content, " + history.unit(species));
         course.nameColumns(sheet, clock.name());
         labels.on(sheet, COURSE_TOP, COURSE_TOP + COURSE_HEIGHT);
+        double room = width - Typeface.width(clock.name(), Look.STRONG) - 24;
+        sheet.foot(foot(), LEFT, COURSE_TOP + COURSE_HEIGHT + 35, room);
         ribbon.key(sheet, course);
     }
 
-    private boolean surfaceIsFace() {
-        return grade.shape() == Shape.SLAB;
+    /** The end of the shortest way out, as the course of it is called. */
+    private String outside() {
+        return several ? "face" : "surface";
+    }
+
+    private String word(int course) {
+        return COURSES.get(course) == Reading.SURFACE
+                ? outside()
+                : COURSES.get(course).word();
+    }
+
+    private String from() {
+        return switch (grade.shape()) {
+            case SLAB -> "wetted face";
+            case BRICK -> "face, " + PieceWords.way(grade);
+            default -> PieceWords.face(grade);
+        };
+    }
+
+    /** What is followed where pieces are not of one size in one direction. */
+    private String where() {
+        return (several ? " " + PieceWords.way(grade) : "") + (differs ? ", a piece as stated" : "");
+    }
+
+    private String foot() {
+        return differs ? "Mean: over all pieces of the grade." : several ? "Mean: of the whole piece." : "";
     }
 
     /** Shares of the shade scale by column of the image and by row, the surface first. */
@@ -150,74 +177,21 @@ final class DepthMap {
     }
 
     private void contours(Sheet sheet, Panel map) {
-        Look look = sheet.look();
-        List<List<Point2D>> drawn = new ArrayList<>();
-        List<List<Point2D>> longest = new ArrayList<>();
+        Isolines isolines = new Isolines(sheet, map.area());
         for (Bound bound : bounds) {
-            List<Point2D> most = List.of();
-            for (List<Point2D> line : Contour.of(profiles, bound.level())) {
-                List<Point2D> placed =
-                        line.stream().map(point -> placed(map, point)).toList();
-                Path2D path = path(placed);
-                sheet.draw(path, look.ground(), Look.dashed(4));
-                sheet.draw(path, look.limit(), Look.dashed(1.8f));
-                drawn.add(placed);
-                most = span(placed) > span(most) ? placed : most;
-            }
-            longest.add(most);
+            isolines.add(
+                    Contour.of(profiles, bound.level()).stream()
+                            .map(line -> line.stream()
+                                    .map(point -> placed(map, point))
+                                    .toList())
+                            .toList(),
+                    bound.text());
         }
-        for (int i = 0; i < bounds.size(); i++) {
-            List<Point2D> own = longest.get(i);
-            chip(
-                    sheet,
-                    map,
-                    own,
-                    drawn.stream().filter(line -> line != own).toList(),
-                    bounds.get(i).text());
-        }
+        isolines.name();
     }
 
     private Point2D placed(Panel map, Point2D point) {
         return new Point2D.Double(map.x(clockAt(point.getX())), map.y(depthAt(point.getY())));
-    }
-
-    private static Path2D path(List<Point2D> points) {
-        Path2D path = new Path2D.Double();
-        path.moveTo(points.get(0).getX(), points.get(0).getY());
-        points.stream().skip(1).forEach(point -> path.lineTo(point.getX(), point.getY()));
-        return path;
-    }
-
-    private static double span(List<Point2D> line) {
-        return line.isEmpty() ? 0 : line.get(0).distance(line.get(line.size() - 1)) + line.size() / 1000.0;
-    }
-
-    /** Names a line upon itself, where the name covers no other. */
-    private static void chip(Sheet sheet, Panel map, List<Point2D> line, List<List<Point2D>> others, String text) {
-        double width = Typeface.width(text, Look.SMALL) + 10;
-        for (int i = 0; i < 40 && !line.isEmpty(); i++) {
-            // From the middle outwards.
-            double share = 0.5 + (i % 2 == 0 ? 0.0125 : -0.0125) * i;
-            Point2D at = line.get((int) Math.rint(share * (line.size() - 1)));
-            for (double aside : new double[] {0, 1, -1}) {
-                double left = at.getX() - width / 2 + aside * (width / 2 + 8);
-                RoundRectangle2D ground = new RoundRectangle2D.Double(left, at.getY() - 8.5, width, 17, 6, 6);
-                Rectangle2D kept = new Rectangle2D.Double(left - 3, at.getY() - 11, width + 6, 22);
-                if (map.area().contains(ground.getBounds2D())
-                        && others.stream().flatMap(List::stream).noneMatch(kept::contains)
-                        && sheet.isFree(text, left + 5, at.getY() + 4, Sheet.Anchor.LEFT, Look.SMALL)) {
-                    sheet.fill(ground, sheet.look().ground());
-                    sheet.text(
-                            text,
-                            left + 5,
-                            at.getY() + 4,
-                            Sheet.Anchor.LEFT,
-                            Look.SMALL,
-                            sheet.look().ink());
-                    return;
-                }
-            }
-        }
     }
 
     private double clockAt(double column) {
@@ -230,41 +204,15 @@ final class DepthMap {
         return 1000 * grade.depth() * (1 - row / (history.depths().length - 1));
     }
 
-    private void shadeScale(Sheet sheet, Panel map) {
-        Look look = sheet.look();
-        double[][] ramp = new double[1][128];
-        for (int j = 0; j < ramp[0].length; j++) {
-            ramp[0][j] = 1 - (j + 0.5) / ramp[0].length;
-        }
-        Rectangle2D bar = new Rectangle2D.Double(map.area().getMaxX() + 22, MAP_TOP, 14, MAP_HEIGHT);
-        Panel scale = new Panel(bar, clock, contents);
-        scale.image(Shades.image(ramp, look.contents()));
-        scale.on(sheet);
-        sheet.text(
-                "content, " + history.unit(species),
-                bar.getX(),
-                MAP_TOP - 13,
-                Sheet.Anchor.LEFT,
-                Look.STRONG,
-                look.ink());
-        for (Scale.Tick tick : contents.ticks()) {
-            sheet.text(
-                    tick.label(),
-                    bar.getMaxX() + 7,
-                    scale.y(tick.value()) + 4,
-                    Sheet.Anchor.LEFT,
-                    Look.TEXT,
-                    look.muted());
-        }
-    }
-
     private String caption() {
         String unit = " " + history.unit(species);
         double[] core = courses.get(0);
         double[] surface = courses.get(2);
         int last = core.length - 1;
-        String text = "In " + grade.name() + " the core goes from " + Words.number(core[0]) + " to "
-                + Words.number(core[last]) + unit + " and the surface to " + Words.number(surface[last]) + unit;
+        String text = (differs ? "In a piece of " + grade.name() + " as stated" : "In " + grade.name())
+                + (several ? ", from the core " + PieceWords.way(grade) + "," : "") + " the core goes from "
+                + Words.number(core[0]) + " to " + Words.number(core[last]) + unit + " and the " + outside() + " to "
+                + Words.number(surface[last]) + unit;
         for (Bound bound : bounds) {
             int after = crossing(core, bound.level());
             if (after > 0) {
@@ -314,14 +262,16 @@ final class DepthMap {
         StringBuilder text = new StringBuilder("Map of "
                 + title().substring(0, 1).toLowerCase(java.util.Locale.ROOT)
                 + title().substring(1) + ": across the running clock from 0:00 to " + Durations.clock(history.end())
-                + ", down the depth from the surface to the core at " + Words.number(1000 * grade.depth())
+                + ", down the depth from the "
+                + (several ? PieceWords.face(grade) + " " + PieceWords.way(grade) : "surface")
+                + " to the core at " + Words.number(1000 * grade.depth())
                 + " mm. At the end of each step:");
         for (int i = 0; i < history.ends().size(); i++) {
             int at = history.momentAt(history.ends().get(i).to());
             text.append(i == 0 ? " " : "; ").append(history.ends().get(i).step().name());
             for (int k = 0; k < COURSES.size(); k++) {
                 text.append(k == 0 ? " " : ", ")
-                        .append(COURSES.get(k).word())
+                        .append(word(k))
                         .append(' ')
                         .append(Words.number(courses.get(k)[at]))
                         .append(unit);

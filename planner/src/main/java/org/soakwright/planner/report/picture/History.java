@@ -4,8 +4,10 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.OptionalDouble;
+import org.soakwright.planner.batch.EachGrade;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
+import org.soakwright.planner.batch.TargetState;
 import org.soakwright.planner.batch.Trace;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Reading;
@@ -20,6 +22,7 @@ final class History {
     private final List<StepEnd> ends;
     private final double[] clocks;
     private final double[] depths;
+    private final List<TargetState> targets;
 
     History(Trace trace) {
         this.trace = trace;
@@ -29,6 +32,7 @@ final class History {
         for (int i = 0; i < recipe.steps().size(); i++) {
             ends.add(trace.run().end(i));
         }
+        targets = EachGrade.of(trace.run());
         clocks = new double[trace.moments().size() + 1];
         for (int i = 1; i < clocks.length; i++) {
             clocks[i] = trace.moments().get(i - 1).clock();
@@ -60,6 +64,11 @@ final class History {
 
     List<Grade> grades() {
         return recipe.lot().grades();
+    }
+
+    /** Every target for each grade that it looks at. */
+    List<TargetState> targets() {
+        return targets;
     }
 
     /** From 0 on. */

@@ -1,8 +1,10 @@
 package org.soakwright.planner.report.picture;
 
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Spread;
 import org.soakwright.recipes.model.Start;
 import org.soakwright.recipes.text.Unit;
 
@@ -10,11 +12,13 @@ import org.soakwright.recipes.text.Unit;
 final class Loaded {
     private final Recipe recipe;
     private final Start start;
+    private final @Nullable Spread varies;
     private final Unit unit;
 
     Loaded(Recipe recipe, int species) {
         this.recipe = recipe;
         start = recipe.species().get(species).start();
+        varies = recipe.species().get(species).startVaries();
         unit = start.unit();
     }
 
@@ -27,10 +31,11 @@ final class Loaded {
         return values;
     }
 
-    /** Over the volume of a piece of this grade. */
+    /** Over the volume of the pieces of this grade; where the start varies, that is above the median that is stated. */
     double mean(Grade grade) {
         if (start instanceof Start.Uniform uniform) {
-            return express(uniform.content());
+            double sigma = varies == null ? 0 : varies.sigma();
+            return Math.exp(0.5 * sigma * sigma) * express(uniform.content());
         }
         int s = switch (grade.shape()) {
             case SLAB -> 0;

@@ -25,9 +25,6 @@ import org.jfree.data.xy.DefaultXYDataset;
 final class Panel {
     private static final double TICK_GAP = 8;
 
-    /** px that nobody sees. */
-    private static final double LEAST_BEND = 0.1;
-
     private final Rectangle2D area;
     private final Scale x;
     private final Scale y;
@@ -124,14 +121,15 @@ final class Panel {
         int count = line.xs().length;
         double[] across = new double[count];
         double[] up = new double[count];
-        boolean[] kept = new boolean[count];
+        double[] xs = new double[count];
+        double[] ys = new double[count];
         for (int i = 0; i < count; i++) {
             across[i] = x.at(line.xs()[i]);
             up[i] = y.at(line.ys()[i]);
+            xs[i] = across[i] * area.getWidth();
+            ys[i] = up[i] * area.getHeight();
         }
-        kept[0] = true;
-        kept[count - 1] = true;
-        keep(across, up, kept, 0, count - 1);
+        boolean[] kept = Bends.kept(xs, ys);
         double[][] points = new double[2][count];
         int n = 0;
         for (int i = 0; i < count; i++) {
@@ -141,29 +139,6 @@ final class Panel {
             }
         }
         return new double[][] {Arrays.copyOf(points[0], n), Arrays.copyOf(points[1], n)};
-    }
-
-    /** Keeps the points without which the line would be visibly another one (Douglas and Peucker, 1973). */
-    private void keep(double[] across, double[] up, boolean[] kept, int from, int to) {
-        double dx = (across[to] - across[from]) * area.getWidth();
-        double dy = (up[to] - up[from]) * area.getHeight();
-        double length = Math.hypot(dx, dy);
-        double most = LEAST_BEND;
-        int farthest = -1;
-        for (int i = from + 1; i < to; i++) {
-            double px = (across[i] - across[from]) * area.getWidth();
-            double py = (up[i] - up[from]) * area.getHeight();
-            double off = length > 0 ? Math.abs(px * dy - py * dx) / length : Math.hypot(px, py);
-            if (off > most) {
-                most = off;
-                farthest = i;
-            }
-        }
-        if (farthest > 0) {
-            kept[farthest] = true;
-            keep(across, up, kept, from, farthest);
-            keep(across, up, kept, farthest, to);
-        }
     }
 
     /** An axis of shares: it puts the grid where the scale has its marks and draws nothing itself. */

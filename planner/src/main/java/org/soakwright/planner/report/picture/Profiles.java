@@ -5,6 +5,7 @@ import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 import org.soakwright.planner.batch.StepEnd;
+import org.soakwright.planner.report.PieceWords;
 import org.soakwright.recipes.model.Faces;
 import org.soakwright.recipes.model.Grade;
 
@@ -59,7 +60,11 @@ final class Profiles {
 
     private void draw(Graphics2D g, Theme theme) {
         Sheet sheet = new Sheet(g, theme, Look.WIDTH, height);
-        sheet.head(title(), "Content from the core, left, to the surface, right. The dotted line is the start.");
+        sheet.head(
+                title(),
+                "Content from the core, left, " + (several() ? "the shortest way " : "") + "to the surface, right."
+                        + (PieceWords.differ(history.recipe()) ? " Pieces as stated." : "")
+                        + " The dotted line is the start.");
         double slot = (Look.WIDTH - GAP * (columns - 1.0)) / columns;
         for (int i = 0; i < fields.size(); i++) {
             double x = i % columns * (slot + GAP);
@@ -96,8 +101,13 @@ final class Profiles {
         return switch (grade.shape()) {
             case SLAB -> grade.shortest().faces() == Faces.ONE ? "sealed face" : "middle";
             case CYLINDER -> "axis";
-            case SPHERE, SHORT_CYLINDER, BRICK -> "centre";
+            case SPHERE -> "centre";
+            case SHORT_CYLINDER, BRICK -> "core " + PieceWords.way(grade);
         };
+    }
+
+    private boolean several() {
+        return history.grades().stream().anyMatch(PieceWords::hasSeveralSides);
     }
 
     private String caption() {
@@ -120,8 +130,9 @@ final class Profiles {
         double core = last[0];
         double surface = last[last.length - 1];
         String species = history.recipe().species().get(steepest.species()).name();
+        String way = PieceWords.hasSeveralSides(steepest.grade()) ? " " + PieceWords.way(steepest.grade()) : "";
         return "At the end " + steepest.grade().name() + " still "
-                + (core >= surface ? "falls" : "rises") + " from " + Words.number(core) + unit + " " + species
+                + (core >= surface ? "falls" : "rises") + way + " from " + Words.number(core) + unit + " " + species
                 + " at the core to " + Words.number(surface) + unit + " at the surface"
                 + (fields.size() > 1 ? ", the steepest profile that is left." : ".");
     }
@@ -135,6 +146,7 @@ final class Profiles {
                             history.recipe().species().get(field.species()).name()))
                     .append(" in ")
                     .append(field.grade().name())
+                    .append(PieceWords.hasSeveralSides(field.grade()) ? ", " + PieceWords.way(field.grade()) : "")
                     .append(", core and surface: ");
             for (int k = 0; k < field.profiles().size(); k++) {
                 double[] profile = field.profiles().get(k);

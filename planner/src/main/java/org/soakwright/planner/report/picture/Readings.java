@@ -52,7 +52,11 @@ final class Readings {
 
     private void draw(Graphics2D g, Theme theme) {
         Sheet sheet = new Sheet(g, theme, Look.WIDTH, height);
-        sheet.head(title(), "Dashed: the limit. Dot: where it is read. Ring: it decides. Cross: it is missed.");
+        boolean sparse = watched.stream().flatMap(one -> one.courses().stream()).anyMatch(course -> !course.known());
+        sheet.head(
+                title(),
+                "Dashed: the limit. Dot: where it is read. Ring: it decides. Cross: it is missed."
+                        + (sparse ? " Small dots: followed at the ends of steps only." : ""));
         int width = Look.WIDTH - LEFT - RIGHT;
         double top = Sheet.TOP + Ribbon.HEIGHT + ROW_GAP;
         for (int i = 0; i < watched.size(); i++) {
@@ -85,7 +89,11 @@ final class Readings {
         }
         for (Watched.Course course : one.courses()) {
             for (Watched.Piece piece : one.shown(course)) {
-                panel.line(piece.clocks(), piece.values(), look.series(course.series()), Look.line(course.series()));
+                panel.line(
+                        piece.clocks(),
+                        piece.values(),
+                        look.series(course.series()),
+                        course.known() ? Look.line(course.series()) : Look.dashed(1.2f, 1, 4));
             }
         }
         panel.on(sheet);
@@ -94,7 +102,10 @@ final class Readings {
                 one.name() + ", " + one.unit() + (one.spansOrders() ? " (each line is ten times the next)" : ""));
         for (Watched.Course course : one.courses()) {
             Color color = look.series(course.series());
-            mark(sheet, panel.x(course.readAt()), panel.y(course.value()), course, color);
+            if (!course.known()) {
+                one.shown(course).forEach(piece -> dots(sheet, panel, piece, color));
+            }
+            mark(sheet, panel.x(course.readAt()), panel.y(course.value()), course.met(), course.decides(), color);
             Watched.Piece last = course.pieces().get(course.pieces().size() - 1);
             double late = history.end() * (1 - 1e-9);
             if (last.clocks()[last.clocks().length - 1] < late) {
@@ -109,6 +120,14 @@ final class Readings {
                     color);
         }
         labels.on(sheet, panel.area().getY(), panel.area().getMaxY());
+    }
+
+    private static void dots(Sheet sheet, Panel panel, Watched.Piece piece, Color color) {
+        for (int i = 0; i < piece.clocks().length; i++) {
+            double x = panel.x(piece.clocks()[i]);
+            double y = panel.y(piece.values()[i]);
+            sheet.fill(new Ellipse2D.Double(x - 2.5, y - 2.5, 5, 5), color);
+        }
     }
 
     private static void valueBeside(Sheet sheet, Panel panel, Watched.Course course) {
@@ -133,9 +152,10 @@ final class Readings {
         }
     }
 
-    private static void mark(Sheet sheet, double x, double y, Watched.Course course, Color color) {
+    /** A dot where a target is read, ringed where it decides; a cross where it is missed. */
+    static void mark(Sheet sheet, double x, double y, boolean met, boolean decides, Color color) {
         Look look = sheet.look();
-        if (!course.met()) {
+        if (!met) {
             sheet.draw(new Line2D.Double(x - 5, y - 5, x + 5, y + 5), look.ground(), Look.dashed(5));
             sheet.draw(new Line2D.Double(x - 5, y + 5, x + 5, y - 5), look.ground(), Look.dashed(5));
             sheet.draw(new Line2D.Double(x - 5, y - 5, x + 5, y + 5), look.limit(), Look.dashed(Look.LINE));
@@ -143,7 +163,7 @@ final class Readings {
             return;
         }
         sheet.fill(new Ellipse2D.Double(x - 3.5, y - 3.5, 7, 7), color);
-        if (course.decides()) {
+        if (decides) {
             sheet.draw(new Ellipse2D.Double(x - 7, y - 7, 14, 14), look.limit(), Look.dashed(2));
         }
     }

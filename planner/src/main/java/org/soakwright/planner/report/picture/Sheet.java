@@ -3,6 +3,7 @@ package org.soakwright.planner.report.picture;
 import java.awt.Color;
 import java.awt.Font;
 import java.awt.Graphics2D;
+import java.awt.Image;
 import java.awt.RenderingHints;
 import java.awt.Shape;
 import java.awt.Stroke;
@@ -104,6 +105,11 @@ final class Sheet {
     void fill(Shape shape, Color color) {
         g.setColor(color);
         g.fill(shape);
+    }
+
+    /** Fills an area of whole px, however flat. */
+    void image(Image image, Rectangle2D area) {
+        g.drawImage(image, (int) area.getX(), (int) area.getY(), (int) area.getWidth(), (int) area.getHeight(), null);
     }
 
     void draw(Shape shape, Color color, Stroke stroke) {

@@ -5,7 +5,6 @@ import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import org.soakwright.planner.batch.EachGrade;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.recipes.model.Basis;
 import org.soakwright.recipes.model.Grade;
@@ -34,12 +33,14 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
      * What is read in one grade or liquor.
      *
      * @param name as in sheets
+     * @param known whether it is known in between, not only at the ends of steps
      * @param step at whose end it is read
      */
     record Course(
             String name,
             String label,
             int series,
+            boolean known,
             List<Piece> pieces,
             double readAt,
             String step,
@@ -54,7 +55,7 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
     /** Every target but the totals, in the order written. */
     static List<Watched> of(History history, List<String> binds) {
         Map<Target, List<TargetState>> byTarget = new LinkedHashMap<>();
-        for (TargetState state : EachGrade.of(history.run())) {
+        for (TargetState state : history.targets()) {
             if (!(state.target() instanceof Target.OfTotal)) {
                 byTarget.computeIfAbsent(state.target(), target -> new ArrayList<>())
                         .add(state);
@@ -87,23 +88,33 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
                 ? step(history, ((Target.OfPieces) state.target()).after())
                 : step(history, ((Target.OfLiquor) state.target()).step());
         int grade = grade(history, state.grade().orElse(""));
+        double readAt = history.ends().get(step).to();
         return new Course(
                 state.name(),
                 state.grade().orElse("liquor"),
                 Math.max(0, grade),
+                !ofPieces || !isAtEndsOnly(history, (Target.OfPieces) state.target(), grade),
                 ofPieces
-                        ? ofPieces(history, (Target.OfPieces) state.target(), grade)
+                        ? ofPieces(history, (Target.OfPieces) state.target(), grade, state, readAt)
                         : ofLiquor(history, (Target.OfLiquor) state.target()),
-                history.ends().get(step).to(),
+                readAt,
                 history.ends().get(step).step().name(),
                 state.value(),
                 state.met(),
                 decides);
     }
 
-    private static List<Piece> ofPieces(History history, Target.OfPieces target, int grade) {
+    private static boolean isAtEndsOnly(History history, Target.OfPieces target, int grade) {
+        return EndReadings.areAll(history, species(history, target.species().name()), grade, target);
+    }
+
+    private static List<Piece> ofPieces(
+            History history, Target.OfPieces target, int grade, TargetState state, double readAt) {
         int species = species(history, target.species().name());
         double factor = Bound.perTargetUnit(history, species, grade, target);
+        if (isAtEndsOnly(history, target, grade)) {
+            return List.of(new EndReadings(history, species, grade, target, state).piece(readAt, factor));
+        }
         double[] values = grade < 0 ? history.lotMeans(species) : history.readings(species, grade, target.reading());
         for (int i = 0; i < values.length; i++) {
             values[i] /= factor;

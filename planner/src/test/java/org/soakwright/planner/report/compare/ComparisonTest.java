@@ -42,6 +42,17 @@ class ComparisonTest {
             prices: {time: 40 CUR/h}
             """;
 
+    /** Pieces that differ, of which a share must keep the limit. */
+    private static Side differing(String share) {
+        String text = RECIPE.replace("START", "100 g/kg")
+                .replace("TIME", "5 h")
+                .replace("CUR", "EUR")
+                .replace("species:\n  salt", "  spread: 6 %\nspecies:\n  salt")
+                .replace("at-most: 60 g/kg", "at-most: 60 g/kg, share: " + share);
+        Recipe recipe = ((Outcome.Accepted) Recipes.read("recipe.yaml", text)).recipe();
+        return side(new Batch(recipe).follow(StepTimes.definite(recipe)));
+    }
+
     private static Run run(String start, String time, String currency) {
         String text = RECIPE.replace("START", start).replace("TIME", time).replace("CUR", currency);
         Recipe recipe = ((Outcome.Accepted) Recipes.read("recipe.yaml", text)).recipe();
@@ -94,6 +105,22 @@ class ComparisonTest {
         assertEquals(
                 List.of("Against A, B takes the same time, needs the same amount of liquor and costs the same."),
                 ComparisonFindings.of(comparison).answer().subList(0, 1));
+    }
+
+    @Test
+    void targetsOnOtherSharesAreNotOneTarget() {
+        Side most = differing("95 %");
+        assertEquals("salt core in 95 %", most.targets().get(0).name());
+        assertEquals(1, Comparison.of(most, differing("95 %")).targets().size());
+        Comparison apart = Comparison.of(most, differing("90 %"));
+        assertEquals(
+                List.of("salt core in 95 %", "salt core in 90 %"),
+                apart.targets().stream().map(Comparison.TargetRow::target).toList());
+        assertEquals(
+                2,
+                Comparison.of(most, side(run("100 g/kg", "5 h", "EUR")))
+                        .targets()
+                        .size());
     }
 
     @Test

@@ -25,9 +25,7 @@ class ReportTest {
     @Test
     void thePageOfTheLoinsIsSoundAndLight() throws IOException {
         Map<String, byte[]> files = Reports.planned(Reports.example("loin-desalting.yaml"));
-        String page = Reports.text(files, "index.html");
-        PageCheck.assertSound(page, files.keySet());
-        assertTrue(files.getOrDefault("index.html", new byte[0]).length < HEAVIEST, "too heavy");
+        String page = soundAndLight(files);
         assertEquals(6, page.split("<figure ", -1).length - 1, "two maps, profiles, readings, liquor, balance");
     }
 
@@ -36,6 +34,62 @@ class ReportTest {
     void thePageOfARecipeFollowedIsSound(String recipe) throws IOException {
         Map<String, byte[]> files = Reports.followed(Reports.recipe(recipe));
         PageCheck.assertSound(Reports.text(files, "index.html"), files.keySet());
+    }
+
+    private static String soundAndLight(Map<String, byte[]> files) {
+        String page = Reports.text(files, "index.html");
+        PageCheck.assertSound(page, files.keySet());
+        assertTrue(files.getOrDefault("index.html", new byte[0]).length < HEAVIEST, "too heavy");
+        return page;
+    }
+
+    @Test
+    void thePageOfPiecesThatDifferSaysHow() throws IOException {
+        Recipe recipe = Reports.recipe("rounds.yaml");
+        Map<String, byte[]> files = Reports.followed(recipe);
+        String page = soundAndLight(files);
+        for (String said : List.of(
+                "<p class=\"about\">Pieces differ: sizes spread by 6 %; salt at the start varies by 20 %.</p>",
+                "<figure id=\"picture-section-round-salt\">",
+                "<figure id=\"picture-spread\">",
+                ">How the pieces differ at the end of each step</h2>",
+                "In a grade sizes spread by 6 %, all sides of a piece alike; pieces neither shrink nor swell",
+                "short cylinders open on their round side and one flat face",
+                "2 g/kg everywhere in the piece at the start, varying by 20 % from piece to piece",
+                "diffusivity 3.2e-10 m²/s along the axis, 3e-10 m²/s across it and 3e-10 m²/s along the thickness at every",
+                "and so is how far pieces are said to differ")) {
+            assertTrue(page.contains(said), said);
+        }
+        assertFalse(page.contains("the same for every piece"));
+        Run run = Reports.follow(recipe);
+        List<List<String>> rows = CsvText.read(Reports.text(files, "tables/percentiles.csv"));
+        assertEquals(
+                List.of("step number", "step", "species", "grade", "reading", "1 %", "5 %"),
+                rows.get(0).subList(0, 7));
+        // Two steps of two grades with six readings each.
+        assertEquals(1 + 2 * 2 * 6, rows.size());
+        double fifth = run.end(0)
+                .pieces()
+                .get(0)
+                .species()
+                .get(0)
+                .distribution()
+                .getOrDefault(Reading.MEAN, List.of())
+                .get(1);
+        assertEquals(List.of("1", "brine", "salt", "slab", "mean"), rows.get(1).subList(0, 5));
+        assertEquals(fifth, Double.parseDouble(rows.get(1).get(6)));
+    }
+
+    @Test
+    void wherePiecesAreAlikeNothingIsSaidOfDifferences() throws IOException {
+        Map<String, byte[]> files = Reports.followed(Reports.recipe("blocks.yaml"));
+        String page = soundAndLight(files);
+        assertFalse(page.contains("Pieces differ") || page.contains("picture-spread"));
+        assertFalse(files.containsKey("tables/percentiles.csv"));
+        assertTrue(page.contains("bricks open on every face but one of the thickness and one of the length"));
+        assertTrue(page.contains("L from wetted surface to core, the shortest way."));
+        assertTrue(Reports.text(files, "tables/course.csv").startsWith("clock [s],step,chloride in liquor [g/L],"));
+        assertTrue(Reports.text(files, "tables/course.csv").contains("\"chloride middle of the face, block [g/L]\""));
     }
 
     @Test

@@ -97,6 +97,36 @@ final class Batches {
             minimise: time
             """;
 
+    static final String ROUNDS = """
+            language: 1
+            title: Brining of blocks and rounds
+            product: [food]
+            lot:
+              mass: 300 kg
+              density: 1080 kg/m3
+              pieces:
+                - {name: block, shape: brick, thickness: 40 mm, width: 60 mm, length: 90 mm, faces: {thickness: one}, share: 40 %}
+                - {name: round, shape: short-cylinder, diameter: 90 mm, length: 110 mm, share: 60 %}
+              spread: 6 %
+            species:
+              salt: {start: 2 g/kg, diffusivity: 3e-10 m2/s, partition: 0.45}
+            steps:
+              - soak: brine
+                liquor: {volume: unlimited, salt: 220 g/L}
+                temperature: 4 Cel
+                film: {coefficient: 2e-6 m/s}
+                time: 30 h
+              - rest: cold room
+                temperature: 4 Cel
+                time: 20 d
+            targets:
+              - {species: salt, reading: mean, at-least: 10 g/kg, share: 90 %}
+              - {species: salt, reading: core, at-least: 3 g/kg, grade: block}
+              - {species: salt, reading: lowest, at-least: 3 g/kg, grade: round}
+              - {species: salt, reading: mean, at-least: 10 g/kg, grade: lot, share: 80 %}
+            minimise: time
+            """;
+
     private Batches() {}
 
     static Recipe recipe(String text) {

@@ -151,6 +151,30 @@ class SheetTest {
     }
 
     @Test
+    void piecesOfSeveralSidesAreSampledWhereTheyDiffer() {
+        Sheet rounds = Batches.sheet(Batches.followed(Batches.ROUNDS), Optional.empty());
+        assertEquals(
+                List.of(
+                        "300 kg, 277.8 L of pieces: 40 % block, bricks of 40 x 60 x 90 mm, thickness sealed on one face; 60 % round,"
+                                + " short cylinders 90 mm across, 110 mm long.",
+                        "Pieces differ: sizes spread by 6 %. What is expected is the average over a grade, unless a share is"
+                                + " named."),
+                rounds.lot());
+        String how = all(rounds.sampling());
+        for (String said : List.of(
+                "salt mean, block and round. Homogenise each piece alone, each grade by itself. Of the pieces 90 %, by mass,"
+                        + " are to keep the limit, each read alone.",
+                "salt core, block. Cut a plug from the core: half the width and half the length in, at the sealed face of the"
+                        + " thickness, each grade by itself. Pieces differ: the average of several counts.",
+                "salt lowest, round. Cut what lies between the core and the edge of a flat face into small parts, assay each;"
+                        + " the lowest counts, each grade by itself.",
+                "salt mean, lot. Assay pieces of all grades, taken in the shares in which they are loaded, each alone: 80 % of"
+                        + " them, by mass, are to keep the limit.")) {
+            assertTrue(how.contains(said), how);
+        }
+    }
+
+    @Test
     void aMissedPlanIsNoneAndIsNotReleased() {
         Sheet missed = Batches.sheet(
                 Batches.followed(Batches.DESALTING.replace("at-most: 55 g/kg", "at-most: 5 g/kg")), Optional.empty());

@@ -13,17 +13,25 @@ import java.util.Objects;
 import org.soakwright.planner.batch.Batch;
 import org.soakwright.planner.batch.Planner;
 import org.soakwright.planner.batch.Run;
+import org.soakwright.planner.batch.StepTimes;
 import org.soakwright.planner.batch.Trace;
 import org.soakwright.recipes.Outcome;
 import org.soakwright.recipes.Recipes;
 import org.soakwright.recipes.model.Recipe;
 
-/** The batches whose pictures are looked at: every example as planned, and one with much in it as written. */
+/** The batches whose pictures are looked at: every example, and two with much in them as written. */
 final class Batches {
+    private static final double HOUR = 3600;
+
     static final List<String> EXAMPLES = List.of("loin-desalting", "bead-washing", "cord-brining");
 
+    /** Times near those planned of examples that take long to plan, s. */
+    private static final Map<String, double[]> FOLLOWED = Map.of(
+            "wheel-brining", new double[] {21 * HOUR, 1764 * HOUR},
+            "brick-desalination", new double[] {96 * HOUR, 216 * HOUR, 504 * HOUR});
+
     /** Times of the crowded recipe, s. */
-    private static final double[] CROWDED = {6 * 3600, 240, 2 * 3600, 1800, 300, 14 * 3600, 20 * 3600};
+    private static final double[] CROWDED = {6 * HOUR, 240, 2 * HOUR, 1800, 300, 14 * HOUR, 20 * HOUR};
 
     private static final Map<String, List<Picture>> DRAWN = new LinkedHashMap<>();
 
@@ -33,7 +41,9 @@ final class Batches {
     static synchronized Map<String, List<Picture>> all() {
         if (DRAWN.isEmpty()) {
             EXAMPLES.forEach(name -> DRAWN.put(name, Pictures.of(Planner.plan(example(name), (what, share) -> {}))));
+            FOLLOWED.keySet().stream().sorted().forEach(name -> DRAWN.put(name, Pictures.of(followed(name))));
             DRAWN.put("crowded", Pictures.of(crowded()));
+            DRAWN.put("corners", Pictures.of(corners()));
         }
         return DRAWN;
     }
@@ -50,10 +60,24 @@ final class Batches {
         }
     }
 
+    /** An example at the times it is followed with here. */
+    static Run followed(String name) {
+        return new Batch(example(name)).follow(Objects.requireNonNull(FOLLOWED.get(name), name));
+    }
+
     static Run crowded() {
-        try (InputStream stream = Objects.requireNonNull(Batches.class.getResourceAsStream("crowded.yaml"))) {
-            return new Batch(read("crowded", new String(stream.readAllBytes(), StandardCharsets.UTF_8)))
-                    .follow(CROWDED);
+        return new Batch(resource("crowded")).follow(CROWDED);
+    }
+
+    /** Pieces of several sides that differ. */
+    static Run corners() {
+        Recipe recipe = resource("corners");
+        return new Batch(recipe).follow(StepTimes.definite(recipe));
+    }
+
+    private static Recipe resource(String name) {
+        try (InputStream stream = Objects.requireNonNull(Batches.class.getResourceAsStream(name + ".yaml"))) {
+            return read(name, new String(stream.readAllBytes(), StandardCharsets.UTF_8));
         } catch (IOException failure) {
             throw new UncheckedIOException(failure);
         }

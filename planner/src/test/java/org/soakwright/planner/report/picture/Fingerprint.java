@@ -18,7 +18,7 @@ final class Fingerprint {
         MessageDigest digest = MessageDigest.getInstance("SHA-256");
         double[] seconds = {9.75 * 3600, 13.25 * 3600, 16.25 * 3600, 12 * 3600};
         List<Picture> loins = Pictures.of(new Batch(Batches.example("loin-desalting")).follow(seconds));
-        for (List<Picture> pictures : List.of(loins, Pictures.of(Batches.crowded()))) {
+        for (List<Picture> pictures : List.of(loins, Pictures.of(Batches.crowded()), Pictures.of(Batches.corners()))) {
             for (Picture picture : pictures) {
                 for (Theme theme : Theme.values()) {
                     digest.update(picture.svg(theme).getBytes(StandardCharsets.UTF_8));

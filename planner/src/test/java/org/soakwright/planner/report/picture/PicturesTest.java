@@ -22,6 +22,11 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.soakwright.planner.batch.EachGrade;
+import org.soakwright.planner.batch.Run;
+import org.soakwright.planner.batch.StepEnd;
+import org.soakwright.planner.batch.TargetState;
+import org.soakwright.recipes.model.Reading;
 
 /** Every picture of every example and of a crowded recipe, in every theme; they are left in target/pictures to be looked at. */
 class PicturesTest {
@@ -76,7 +81,8 @@ class PicturesTest {
             String svg = picture.svg(theme);
             Files.writeString(
                     FOLDER.resolve(name + "-" + theme.name().toLowerCase(java.util.Locale.ROOT) + ".svg"), svg);
-            assertTrue(svg.length() < (picture.id().startsWith("map-") ? 120_000 : 40_000), name + ": " + svg.length());
+            boolean shaded = picture.id().startsWith("map-") || picture.id().startsWith("section-");
+            assertTrue(svg.length() < (shaded ? 120_000 : 40_000), name + ": " + svg.length());
             assertFalse(svg.contains("url("), "what is referred to is elsewhere");
             assertFalse(svg.contains(" id="));
             Set<String> addresses = new HashSet<>();
@@ -145,6 +151,29 @@ class PicturesTest {
                         "balance"),
                 ids("bead-washing"));
         assertEquals(10, new HashSet<>(ids("crowded")).size());
+    }
+
+    @Test
+    void piecesOfSeveralSidesAreCutAndThoseThatDifferAreSpread() {
+        assertEquals(
+                List.of(
+                        "map-tall-salt",
+                        "section-tall-salt",
+                        "map-low-salt",
+                        "section-low-salt",
+                        "profiles",
+                        "readings",
+                        "spread",
+                        "liquor",
+                        "balance"),
+                ids("wheel-brining"));
+        assertEquals(
+                List.of("map-brick-sulfate", "section-brick-sulfate", "profiles", "readings", "liquor", "balance"),
+                ids("brick-desalination").subList(4, 10));
+        assertEquals(
+                3,
+                ids("corners").stream().filter(id -> id.startsWith("section-")).count(),
+                "a slab is not cut");
     }
 
     @Test
@@ -247,6 +276,112 @@ class PicturesTest {
         // 600 kg of loins with 190 g/kg.
         assertEquals(3, drawn.texts().stream().filter("114.0 kg"::equals).count());
         assertTrue(drawn.texts().contains("salt, kg"));
+    }
+
+    @Test
+    void aMapOfSeveralSidesSaysWhichWayItTakes() throws Exception {
+        assertTrue(texts("wheel-brining", "map-tall-salt")
+                .containsAll(List.of(
+                        "Shade: the content along the length, a piece as stated. Above: the steps. Below: core, mean and"
+                                + " face. Lines: contents that targets name.",
+                        "depth from the flat face, mm",
+                        "47.5",
+                        "mean ≥ 15 g/kg in 95 %",
+                        "Mean: over all pieces of the grade.")));
+        assertTrue(picture("wheel-brining", "map-tall-salt")
+                .caption()
+                .startsWith(
+                        "In a piece of tall as stated, from the core along the length, the core goes from 1.000 to "));
+        assertTrue(texts("brick-desalination", "map-brick-sulfate")
+                .containsAll(List.of("depth from the face, along the width, mm", "51", "Mean: of the whole piece.")));
+        assertTrue(texts("brick-desalination", "profiles").contains("mm from the core along the width"));
+        assertTrue(texts("corners", "map-plate-chloride").contains("depth from the wetted face, mm"));
+    }
+
+    /** 250 mm across and 95 mm long; 102 mm wide and 65 mm thick, lying on its sealed face. */
+    @Test
+    void aCutHasTheProportionsOfThePiece() throws Exception {
+        double wheel = 250.0 / 95;
+        double brick = 102.0 / 65;
+        for (org.w3c.dom.Element image : cuts("wheel-brining", "section-tall-salt", 2)) {
+            assertEquals(wheel, size(image, "width") / size(image, "height"), wheel / size(image, "height"));
+        }
+        for (org.w3c.dom.Element image : cuts("brick-desalination", "section-brick-sulfate", 3)) {
+            assertEquals(brick, size(image, "width") / size(image, "height"), brick / size(image, "height"));
+        }
+        assertTrue(texts("wheel-brining", "section-tall-salt")
+                .containsAll(List.of("1  brine, 21:00", "across: diameter, mm; down: length, mm", "250", "95")));
+        assertTrue(texts("brick-desalination", "section-brick-sulfate")
+                .containsAll(List.of("sealed face", "across: width, mm; down: thickness, mm", "102", "65")));
+        assertFalse(texts("wheel-brining", "section-tall-salt").contains("sealed face"));
+    }
+
+    /** The images but the last, which is the scale. */
+    private static List<org.w3c.dom.Element> cuts(String batch, String id, int steps) throws Exception {
+        List<org.w3c.dom.Element> images = new Drawn(picture(batch, id).svg(Theme.LIGHT)).elements("image");
+        assertEquals(steps + 1, images.size());
+        return images.subList(0, steps);
+    }
+
+    private static double size(org.w3c.dom.Element image, String side) {
+        return Double.parseDouble(image.getAttribute(side));
+    }
+
+    @Test
+    void aMapAndACutHaveOneScale() throws Exception {
+        for (String grade : List.of("tall", "low")) {
+            List<String> map = texts("wheel-brining", "map-" + grade + "-salt");
+            List<String> cut = texts("wheel-brining", "section-" + grade + "-salt");
+            assertTrue(map.containsAll(List.of("0", "20", "40", "60", "80", "100")));
+            assertTrue(cut.containsAll(List.of("0", "20", "40", "60", "80", "100")));
+        }
+    }
+
+    @Test
+    void aCutTellsWhatItsCoreAndItsCornersHold() throws Exception {
+        Run run = Batches.followed("brick-desalination");
+        StepEnd.Content content = run.end(2).pieces().get(0).species().get(2);
+        String core = Words.number(content.value(Reading.CORE));
+        assertTrue(texts("brick-desalination", "section-brick-sulfate").stream()
+                .anyMatch(text -> text.startsWith("core " + core + ", corners 0.0")));
+        String caption = picture("brick-desalination", "section-brick-sulfate").caption();
+        assertTrue(
+                caption.startsWith("Cut through the core along width and thickness: when third bath ends, brick holds "
+                        + core + " g/L at the core and "),
+                caption);
+    }
+
+    @Test
+    void aFlatCutIsStillShaded() throws Exception {
+        for (org.w3c.dom.Element image : cuts("corners", "section-disc-chloride", 3)) {
+            // 240 mm by 6 mm.
+            assertEquals(680, size(image, "width"));
+            assertEquals(17, size(image, "height"));
+        }
+    }
+
+    @Test
+    void theSpreadSaysWhatTheShareReadsAndHowManyKeepTheLimit() throws Exception {
+        List<String> texts = texts("wheel-brining", "spread");
+        TargetState tall = EachGrade.of(Batches.followed("wheel-brining")).get(0);
+        assertTrue(texts.containsAll(List.of(
+                "salt mean: pieces that read so much or more, % by mass",
+                "95 %",
+                "at least 15 g/kg",
+                "95 % read " + Words.number(tall.value()) + " or more",
+                "salt range: pieces that read so much or less, % by mass")));
+        assertTrue(texts("corners", "spread").stream().anyMatch(text -> text.endsWith(", missed")));
+        assertEquals(
+                "Of tall, 95 % of the pieces, by mass, have a salt mean of " + Words.number(tall.value())
+                        + " g/kg or more, and 97.5 % keep the limit, at least 15 g/kg.",
+                picture("wheel-brining", "spread").caption());
+    }
+
+    @Test
+    void whatTheTraceDoesNotFollowIsShownAtTheEndsOfSteps() throws Exception {
+        assertTrue(texts("wheel-brining", "readings").stream()
+                .anyMatch(text -> text.endsWith("Small dots: followed at the ends of steps only.")));
+        assertFalse(texts("loin-desalting", "readings").stream().anyMatch(text -> text.contains("Small dots")));
     }
 
     private static double right(org.w3c.dom.Element bar) {
