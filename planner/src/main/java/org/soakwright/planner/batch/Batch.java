@@ -125,7 +125,7 @@ public final class Batch {
                         + recipe.species().get(species).name()
                         + " by this version: found " + Durations.practical(seconds[cause.stage()])
                         + (slot.part() > 0 && slot.part() < 1 ? " per fill" : "") + ", which needs more than "
-                        + Chain.MOST_MODES + " modes"
+                        + cause.most() + " modes"
                         + (chains.get(species).lot().size() > 1
                                 ? " over " + chains.get(species).lot().size()
                                         + (recipe.lot().grades().size()

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
+import org.soakwright.solver.chain.Chain;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Probe;
 import org.soakwright.solver.chain.StageTooShort;
@@ -17,6 +18,9 @@ public final class Trace {
     private static final int PER_STEP = 28;
     private static final int PER_TRANSFER = 6;
     private static final int FEWEST = 4;
+
+    /** Looks where modes are counted in thousands, which a sketch of the chain shows. */
+    private static final int OF_SKETCHES = 14;
 
     /** What the first look of a stage may need: looks as squares need as many times the end's modes as there are looks. */
     private static final int MOST_MODES = 300;
@@ -83,7 +87,10 @@ public final class Trace {
             boolean transfer = slot.part() == 0;
             double whole = slot.seconds(seconds);
             int count = transfer ? PER_TRANSFER : Math.max(PER_TRANSFER, (int) Math.ceil(PER_STEP * slot.part()));
-            count = Math.max(FEWEST, Math.min(count, MOST_MODES / modes(run, k)));
+            int modes = modes(run, k);
+            count = modes > Chain.MOST_MODES
+                    ? Math.min(count, OF_SKETCHES)
+                    : Math.max(FEWEST, Math.min(count, MOST_MODES / modes));
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);
             for (int i = 1; i <= count; i++) {
                 // Squares: the profile moves with the root of time.

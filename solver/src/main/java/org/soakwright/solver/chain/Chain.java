@@ -16,6 +16,9 @@ public abstract sealed class Chain permits WaveChain, LaunchChain, RitzChain {
     /** The most modes kept for one stage where all pieces have one axis. */
     public static final int MOST_MODES = 1000;
 
+    /** More grades than this are followed in polynomials: the coupled waves of so many take room and time by their square. */
+    private static final int MANY = 12;
+
     /**
      * Prepares a chain.
      *
@@ -47,7 +50,7 @@ public abstract sealed class Chain permits WaveChain, LaunchChain, RitzChain {
             }
         }
         List<Grade> grades = List.copyOf(lot);
-        if (grades.stream().allMatch(Grade::oneAxis)) {
+        if (grades.stream().allMatch(Grade::oneAxis) && grades.size() <= MANY) {
             return WaveChain.of(grades, List.copyOf(starts), List.copyOf(stages), new WaveChain.Shelf());
         }
         boolean shared = stages.stream().anyMatch(stage -> stage.surroundings() instanceof Surroundings.Vessel);

@@ -24,13 +24,16 @@ record Fineness(List<Integer> steps, int degree, double blur) {
     private static final int MORE_ON_ONE_AXIS = 4;
 
     /** The degree goes no lower to save unknowns. */
-    private static final int LEAST_DEGREE = 7;
+    private static final int LEAST_DEGREE = 9;
 
     /** Instead of a step: through this side so little can pass in all stages together that it is taken for sealed. */
     static final int SEALED = 1;
 
     /** Share of its content that may pass through a side taken for sealed. */
     private static final double NOTHING = 5e-7;
+
+    /** Of the driving difference: what may be given away before a stage is refused. */
+    private static final double MOST_BLUR = 1e-5;
 
     /** How far the degree goes down at a time. */
     private static final int STEP = 2;
@@ -69,7 +72,31 @@ record Fineness(List<Integer> steps, int degree, double blur) {
         for (int i = 0; i < steps.size(); i++) {
             blur += steps.get(i) == SEALED ? NOTHING : cost(asked.get(i), steps.get(i));
         }
+        if (blur > MOST_BLUR && chain.degree() >= LEAST_DEGREE) {
+            throw tooShort(chain, seconds, unknowns(chain, asked, LEAST_DEGREE));
+        }
         return new Fineness(steps, degree, blur);
+    }
+
+    /** Names the stage that asks for the finest elements, and how long it would have to be. */
+    private static StageTooShort tooShort(RitzChain chain, double[] seconds, double unknowns) {
+        int shortest = 0;
+        for (int k = 0; k < seconds.length; k++) {
+            double one = chain.conditions(k).pace(chain.lot().get(0), 0) * seconds[k];
+            double best = chain.conditions(shortest).pace(chain.lot().get(0), 0) * seconds[shortest];
+            if (!chain.passing(k) && (one < best || chain.passing(shortest))) {
+                shortest = k;
+            }
+        }
+        double[] longer = seconds.clone();
+        longer[shortest] *= 1.5;
+        double enough = longer[shortest];
+        try {
+            of(chain, longer);
+        } catch (StageTooShort still) {
+            enough = still.shortest();
+        }
+        return new StageTooShort(shortest, seconds[shortest], unknowns, MOST_UNKNOWNS, enough);
     }
 
     private static double next(List<Integer> asked, List<Integer> steps, int side) {
