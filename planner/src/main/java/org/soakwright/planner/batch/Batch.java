@@ -103,6 +103,7 @@ public final class Batch {
         List<Course> courses = new ArrayList<>(chains.size());
         for (int s = 0; s < chains.size(); s++) {
             try {
+                chains.get(s).require(seconds);
                 courses.add(chains.get(s).follow(seconds));
             } catch (StageTooShort tooShort) {
                 throw tooShort(tooShort, s, seconds);

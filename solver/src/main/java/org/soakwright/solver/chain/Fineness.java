@@ -17,14 +17,16 @@ record Fineness(List<Integer> steps, int degree, double blur) {
     /** Shortest stages within this factor are cut alike. */
     static final double FACTOR = 4;
 
-    /** Unknowns of all grades together that a stage is given, some twenty milliseconds. */
+    /** Unknowns of all grades together that a stage is given, some twenty milliseconds; and more for every further grade. */
     static final int MOST_UNKNOWNS = 60_000;
+
+    private static final int MOST_MORE = 2_500;
 
     /** One axis costs so little that even the core of a sphere, where a polynomial is held least, can be sharp. */
     private static final int MORE_ON_ONE_AXIS = 4;
 
     /** The degree goes no lower to save unknowns. */
-    private static final int LEAST_DEGREE = 9;
+    private static final int LEAST_DEGREE = 7;
 
     /** Instead of a step: through this side so little can pass in all stages together that it is taken for sealed. */
     static final int SEALED = 1;
@@ -32,8 +34,13 @@ record Fineness(List<Integer> steps, int degree, double blur) {
     /** Share of its content that may pass through a side taken for sealed. */
     private static final double NOTHING = 5e-7;
 
+    /** With a lower degree a reading may be off by more than 1e-5 of the driving difference. */
+    private static final int SHARP_DEGREE = 9;
+
     /** Of the driving difference: what may be given away before a stage is refused. */
     private static final double MOST_BLUR = 1e-5;
+
+    private static final double MOST_BLUR_OF_MANY = 2e-4;
 
     /** How far the degree goes down at a time. */
     private static final int STEP = 2;
@@ -50,7 +57,7 @@ record Fineness(List<Integer> steps, int degree, double blur) {
         List<Integer> asked = asked(chain, seconds);
         List<Integer> steps = new ArrayList<>(asked);
         int degree = chain.degree();
-        while (unknowns(chain, steps, degree) > MOST_UNKNOWNS) {
+        while (unknowns(chain, steps, degree) > most(chain)) {
             double cheapest = Double.POSITIVE_INFINITY;
             for (int i = 0; i < steps.size(); i++) {
                 cheapest = Math.min(cheapest, next(asked, steps, i));
@@ -72,14 +79,20 @@ record Fineness(List<Integer> steps, int degree, double blur) {
         for (int i = 0; i < steps.size(); i++) {
             blur += steps.get(i) == SEALED ? NOTHING : cost(asked.get(i), steps.get(i));
         }
-        if (blur > MOST_BLUR && chain.degree() >= LEAST_DEGREE) {
-            throw tooShort(chain, seconds, unknowns(chain, asked, LEAST_DEGREE));
-        }
         return new Fineness(steps, degree, blur);
     }
 
-    /** Names the stage that asks for the finest elements, and how long it would have to be. */
-    private static StageTooShort tooShort(RitzChain chain, double[] seconds, double unknowns) {
+    /**
+     * Refuses durations that ask for more than is kept, so that readings would be blurred.
+     *
+     * @throws StageTooShort naming the stage that asks for the finest elements, and how long it would have to be
+     */
+    static void require(RitzChain chain, double[] seconds) {
+        Fineness found = of(chain, seconds);
+        if (found.blur <= (many(chain) ? MOST_BLUR_OF_MANY : MOST_BLUR)
+                && found.degree >= Math.min(sharp(chain), chain.degree())) {
+            return;
+        }
         int shortest = 0;
         for (int k = 0; k < seconds.length; k++) {
             double one = chain.conditions(k).pace(chain.lot().get(0), 0) * seconds[k];
@@ -92,11 +105,12 @@ record Fineness(List<Integer> steps, int degree, double blur) {
         longer[shortest] *= 1.5;
         double enough = longer[shortest];
         try {
-            of(chain, longer);
+            require(chain, longer);
         } catch (StageTooShort still) {
-            enough = still.shortest();
+            enough = still.stage() == shortest ? still.shortest() : enough;
         }
-        return new StageTooShort(shortest, seconds[shortest], unknowns, MOST_UNKNOWNS, enough);
+        double unknowns = unknowns(chain, asked(chain, seconds), sharp(chain));
+        throw new StageTooShort(shortest, seconds[shortest], unknowns, most(chain), enough);
     }
 
     private static double next(List<Integer> asked, List<Integer> steps, int side) {
@@ -137,6 +151,19 @@ record Fineness(List<Integer> steps, int degree, double blur) {
     /** A side's elements. */
     static Mesh mesh(int step, int degree, double... corners) {
         return step == SEALED ? new Mesh(new double[] {0, 1}, 2) : Mesh.of(Math.pow(FACTOR, step), degree, corners);
+    }
+
+    /** Many grades are mostly classes of one, of which averages and shares are asked, not single places. */
+    private static int sharp(RitzChain chain) {
+        return many(chain) ? LEAST_DEGREE : SHARP_DEGREE;
+    }
+
+    private static boolean many(RitzChain chain) {
+        return chain.lot().size() > Chain.MANY;
+    }
+
+    private static int most(RitzChain chain) {
+        return MOST_UNKNOWNS + MOST_MORE * (chain.lot().size() - 1);
     }
 
     private static double unknowns(RitzChain chain, List<Integer> steps, int degree) {
