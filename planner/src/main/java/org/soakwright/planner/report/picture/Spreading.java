@@ -171,7 +171,7 @@ record Spreading(
     String read(Pieces of, String unit) {
         if (isBand()) {
             // The target reads the lower end.
-            return Words.number(of.read()) + " to " + Words.number(of.atMost(inside())) + unit;
+            return Words.number(of.atMost(1 - inside())) + " to " + Words.number(of.atMost(inside())) + unit;
         }
         return Words.number(of.read()) + unit + (isFromAbove() ? " or more" : " or less");
     }
