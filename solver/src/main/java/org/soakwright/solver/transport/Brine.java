@@ -89,6 +89,6 @@ record Brine() implements Solution {
     private List<Caution> check(double fraction, double temperature) {
         TEMPERATURE.refuse(temperature);
         FRACTION.refuse(fraction);
-        return beyondSaturation(fraction, temperature);
+        return Dissolved.beyondSaturation(this, fraction, temperature);
     }
 }

@@ -1,5 +1,8 @@
 package org.soakwright.solver.transport;
 
+import java.util.ArrayList;
+import java.util.List;
+
 /**
  * The mass fraction at which a solution holds a given content: w = content / density(w), repeated until a step is below
  * a unit in the last place or two. The density rises by less than half of itself while w goes from 0 to 1, so each step
@@ -26,5 +29,13 @@ final class Dissolved {
             fraction = next;
         }
         throw new NotSettled("mass fraction of " + Figure.shown(content, "kg/m3"), MOST_EVALUATIONS, fraction, "1");
+    }
+
+    /** The caution that there is more solute than stays dissolved, if so. */
+    static List<Caution> beyondSaturation(Solution solution, double fraction, double temperature) {
+        List<Caution> cautions = new ArrayList<>();
+        double most = solution.saturation(temperature).value();
+        new Range("mass fraction", 0, most, "1", "what stays dissolved").note(fraction, cautions);
+        return cautions;
     }
 }

@@ -1,7 +1,5 @@
 package org.soakwright.solver.transport;
 
-import java.util.ArrayList;
-import java.util.List;
 import org.soakwright.solver.Require;
 
 /**
@@ -70,13 +68,5 @@ public sealed interface Solution permits Brine, Sugar {
     /** What a film meets. */
     default Fluid fluid(double fraction, double temperature) {
         return Fluid.of(density(fraction, temperature), viscosity(fraction, temperature), temperature);
-    }
-
-    /** The caution that there is more solute than stays dissolved, if so. */
-    default List<Caution> beyondSaturation(double fraction, double temperature) {
-        List<Caution> cautions = new ArrayList<>();
-        new Range("mass fraction", 0, saturation(temperature).value(), "1", "what stays dissolved")
-                .note(fraction, cautions);
-        return cautions;
     }
 }

@@ -130,6 +130,6 @@ record Sugar() implements Solution {
     private List<Caution> check(double fraction, double temperature) {
         TEMPERATURE.refuse(temperature);
         FRACTION.refuse(fraction);
-        return beyondSaturation(fraction, temperature);
+        return Dissolved.beyondSaturation(this, fraction, temperature);
     }
 }
