@@ -48,7 +48,7 @@ record Sugar() implements Solution {
         {18.3184, 12.3081}
     };
 
-    private static final Laliberte LALIBERTE = new Laliberte(
+    static final Laliberte LALIBERTE = new Laliberte(
             new double[] {532.919899042424, 13692.5881480438, 12.6127261369233, 0.0266415899284128, 649.049186827162},
             new double[] {
                 16.2391830818804,

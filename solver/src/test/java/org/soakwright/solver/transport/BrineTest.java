@@ -62,6 +62,18 @@ class BrineTest {
         }
     }
 
+    /**
+     * Sea water of 35 g/kg thins with warmth as brine of the same strength does, being 2.2 % thicker at 20 C: 1.906, 1.397,
+     * 1.220, 1.077 and 0.861 mPa s at 0, 10, 15, 20 and 30 C (ITTC, from memory).
+     */
+    @ParameterizedTest
+    @CsvSource({"0, 1.906", "10, 1.397", "15, 1.220", "30, 0.861"})
+    void brineThinsWithWarmthAsTheSeaDoes(double celsius, double sea) {
+        double thinner = BRINE.viscosity(0.035, ICE_POINT + celsius).value()
+                / BRINE.viscosity(0.035, ROOM).value();
+        assertRelative(sea / 1.077, thinner, 3e-3, "at " + celsius);
+    }
+
     /** Pitzer's equation with his parameters of 25 C (0.0765, 0.2664, 0.00127), computed apart. */
     @ParameterizedTest
     @CsvSource({"0.01, 0.99426", "0.05, 0.97021", "0.10, 0.93515", "0.15, 0.89234", "0.20, 0.83936", "0.264, 0.75268"})
