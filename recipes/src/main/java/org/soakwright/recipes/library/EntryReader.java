@@ -55,10 +55,10 @@ final class EntryReader {
         Tree year = card.get("year");
         return new Publication(
                 source.place(),
-                card.text("author"),
+                card.optional("author"),
                 year == null ? null : Shelf.whole("year", year),
                 card.text("title"),
-                card.text("in"),
+                card.optional("in"),
                 card.word("read", Read.class));
     }
 

@@ -7,9 +7,9 @@ import org.soakwright.recipes.text.Unsound;
 /**
  * Where figures were published.
  *
- * @param author as far as it was shown where it was read
+ * @param author empty where it was not shown where it was read
  * @param year null where it was not shown there
- * @param in the journal, report or book, with volume and pages where they were shown
+ * @param in the journal, report or book, with volume and pages where they were shown; empty where not
  */
 public record Publication(
         Place place, String author, @Nullable Integer year, String title, String in, Read read) {
@@ -24,9 +24,9 @@ public record Publication(
         }
     }
 
-    /** {@code Guinee and Fox 1983, Journal of Dairy Research 50}. */
+    /** {@code Guinee and Fox 1983, Journal of Dairy Research 50}; the title where the author is unknown. */
     @Override
     public String toString() {
-        return author + (year == null ? "" : " " + year) + ", " + in;
+        return (author.isEmpty() ? title : author) + (year == null ? "" : " " + year) + (in.isEmpty() ? "" : ", " + in);
     }
 }

@@ -76,6 +76,10 @@ class LibraryTest {
                 "Guinee and Fox 1983, Journal of Dairy Research 50",
                 romano.origin().publication().toString());
         assertEquals(
+                "Salt diffusion in brick structures - Part I - measurements with NaCl 2003,"
+                        + " Journal of Materials Science 38(9), 2055-2061",
+                entry("salt-in-brick-new-red").origin().publication().toString());
+        assertEquals(
                 "0.499e-5 cm2/s give or take 0.004e-5 cm2/s",
                 entry("salt-in-brick-new-red").figure().toString());
         assertEquals(
