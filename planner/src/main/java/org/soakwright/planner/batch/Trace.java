@@ -127,7 +127,10 @@ public final class Trace {
         int stage = upTo.length - 1;
         List<Sight> sights = new ArrayList<>();
         for (int s = 0; s < recipe.species().size(); s++) {
-            Course course = batch.chain(s).sketch().follow(upTo);
+            Chain sketch = batch.chain(s).sketch();
+            // So early a look that even a sketch would be blurred is left out.
+            sketch.require(upTo);
+            Course course = sketch.follow(upTo);
             List<Population> populations = batch.classes(s).populations();
             // Contents are proportional to kg/m3, and there are many: one exact conversion serves them all.
             double unit =
