@@ -10,7 +10,7 @@ import org.soakwright.recipes.model.Target;
 
 /**
  * Where the best choice can be proven best. In unlimited liquor without the solute, from a uniform start, with one Biot number
- * throughout, every mean is a sum of positive exponentials of sums over the steps; the logarithm of such a sum is convex in the
+ * of each side throughout, every mean is a sum of positive exponentials of sums over the steps; the logarithm of such a sum is convex in the
  * durations, so its tangents bound it everywhere.
  */
 final class Convexity {
@@ -25,7 +25,9 @@ final class Convexity {
             if (target instanceof Target.OfPieces pieces) {
                 Species species = recipe.species(pieces.species().name()).orElseThrow();
                 boolean mean = pieces.reading() == org.soakwright.recipes.model.Reading.MEAN
-                        && pieces.limits().atLeast() == null;
+                        && pieces.limits().atLeast() == null
+                        // A share's percentile belongs to other pieces as durations change: no sum of exponentials.
+                        && pieces.share() == null;
                 if (!mean
                         || !(species.start() instanceof Start.Uniform)
                         || !species.exchangesWith(Medium.LIQUOR)
@@ -58,7 +60,13 @@ final class Convexity {
                         : Double.POSITIVE_INFINITY)
                 .distinct()
                 .toArray();
-        return ratios.length == 1;
+        boolean anyFilm = Double.isFinite(ratios[0]) || ratios.length > 1;
+        boolean oneGrain = recipe.steps().stream()
+                        .map(step -> Translation.grain(species, step))
+                        .distinct()
+                        .count()
+                == 1;
+        return ratios.length == 1 && (oneGrain || !anyFilm);
     }
 
     /**

@@ -1,9 +1,11 @@
 package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Target;
@@ -43,13 +45,13 @@ public record Distribution(
     /** One for each target on pieces, and grade it looks at, where pieces differ; in the order of the targets. */
     public static List<Distribution> of(Run run) {
         List<Distribution> all = new ArrayList<>();
-        List<String> seen = new ArrayList<>();
+        Set<List<Integer>> seen = new HashSet<>();
         for (Requirement requirement : run.batch().requirements()) {
             if (requirement instanceof Requirement.OfContent content) {
-                of(run, content).filter(one -> !seen.contains(one.target())).ifPresent(one -> {
-                    seen.add(one.target());
-                    all.add(one);
-                });
+                // A band is two requirements of one target.
+                if (seen.add(List.of(content.target(), content.gauge().grade()))) {
+                    of(run, content).ifPresent(all::add);
+                }
             }
         }
         return List.copyOf(all);

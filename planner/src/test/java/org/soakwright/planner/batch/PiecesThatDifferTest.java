@@ -1,6 +1,7 @@
 package org.soakwright.planner.batch;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
@@ -240,5 +241,40 @@ class PiecesThatDifferTest {
             double expected = told(small, Reading.HIGHEST).get(s);
             assertEquals(expected, told(fast, Reading.HIGHEST).get(s), 1e-7 * expected);
         }
+    }
+
+    /** The average of pieces that differ is a sum of exponentials and bounded by its tangents; which piece a share ends at changes. */
+    @Test
+    void aPlanForAShareIsNotClaimedToBeProvenBest() {
+        String clean = recipe(slab("all", 24, 1), "15 %", "190 g/kg", "8e-10 m2/s", "volume: unlimited");
+        assertTrue(Convexity.holds(Recipes.of(clean.replace(", share: 95 %", ""))));
+        assertFalse(Convexity.holds(Recipes.of(clean)));
+    }
+
+    /** Film over diffusivity is one Biot number of each side only while the sides' diffusivities keep their proportion. */
+    @Test
+    void aGrainThatChangesWithTheStepLeavesNoProofBehindAFilm() {
+        String rod = "    - {name: rod, shape: short-cylinder, diameter: 20 mm, length: 60 mm}";
+        String recipe = recipe(rod, "", "190 g/kg", "{across: 2e-10 m2/s, along: 3e-10 m2/s}", "volume: unlimited")
+                .replace(", share: 95 %", "")
+                .replace("film: negligible", "film: {coefficient: 1e-6 m/s}");
+        String second = """
+                  - soak: second
+                    liquor: {volume: unlimited, salt: 0 g/L}
+                    film: {coefficient: 1e-6 m/s}
+                    time: 2 h
+                """;
+        String own = "    diffusivity: {salt: {across: 2e-10 m2/s, along: 4e-10 m2/s}}\n";
+        assertTrue(Convexity.holds(Recipes.of(recipe.replace("targets:", second + "targets:"))));
+        assertFalse(Convexity.holds(Recipes.of(recipe.replace("targets:", second + own + "targets:"))));
+    }
+
+    @Test
+    void twoTargetsOfOneNameAreBothShown() {
+        Run run = followed(recipe(slab("all", 24, 1), "15 %", "190 g/kg", "8e-10 m2/s", "ratio: 2 L/kg")
+                + "  - {species: salt, reading: mean, at-least: 1 g/kg, share: 95 %}\n");
+        List<Distribution> all = Distribution.of(run);
+        assertEquals(2, all.size());
+        assertTrue(all.get(0).atMost().isPresent() && all.get(1).atLeast().isPresent());
     }
 }
