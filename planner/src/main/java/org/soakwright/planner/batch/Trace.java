@@ -8,6 +8,7 @@ import org.soakwright.recipes.model.Recipe;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Probe;
 import org.soakwright.solver.chain.StageTooShort;
+import org.soakwright.solver.shape.Grade;
 
 /**
  * A run looked at in between: profiles and readings of every species in every grade over the running clock, denser where a stage has
@@ -83,7 +84,7 @@ public final class Trace {
             boolean transfer = slot.part() == 0;
             double whole = slot.seconds(seconds);
             int count = transfer ? PER_TRANSFER : Math.max(PER_TRANSFER, (int) Math.ceil(PER_STEP * slot.part()));
-            count = Math.max(FEWEST, Math.min(count, MOST_MODES / modes(run, k)));
+            count = Math.max(FEWEST, (int) Math.min(count, MOST_MODES / modes(run, k)));
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);
             for (int i = 1; i <= count; i++) {
                 // Squares: the profile moves with the root of time.
@@ -97,10 +98,14 @@ public final class Trace {
         return new Trace(run, depths, moments);
     }
 
-    private static int modes(Run run, int stage) {
-        int most = 1;
+    /** Of each of the pieces that the lot stands on; of several sides the shortest stage is resolved in any case. */
+    private static double modes(Run run, int stage) {
+        double most = 1;
         for (int s = 0; s < run.batch().recipe().species().size(); s++) {
-            most = Math.max(most, run.course(s).modes(stage));
+            List<Grade> pieces = run.batch().chain(s).lot();
+            if (pieces.stream().allMatch(Grade::oneAxis)) {
+                most = Math.max(most, (double) run.course(s).modes(stage) / pieces.size());
+            }
         }
         return most;
     }
