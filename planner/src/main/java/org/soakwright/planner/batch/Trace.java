@@ -19,12 +19,16 @@ public final class Trace {
     private static final int PER_TRANSFER = 6;
     private static final int FEWEST = 4;
 
+    /** Of a stage: pieces of several sides are resolved for its end; looked at earlier they would seem to hold more than as loaded. */
+    private static final double EARLIEST = 1 / 16.0;
+
     /** What the first look of a stage may need: looks as squares need as many times the end's modes as there are looks. */
     private static final int MOST_MODES = 300;
 
     private final Run run;
     private final double[] depths;
     private final List<Moment> moments;
+    private final List<double[]> read;
 
     /**
      * One look.
@@ -44,10 +48,14 @@ public final class Trace {
      */
     public record Sight(double liquor, double[][] profiles, double[] means) {}
 
-    private Trace(Run run, double[] depths, List<Moment> moments) {
+    /** One look with what every requirement on pieces would read there, kg/m3; NaN for others. */
+    private record Look(Moment moment, double[] read) {}
+
+    private Trace(Run run, double[] depths, List<Look> looks) {
         this.run = run;
         this.depths = depths;
-        this.moments = List.copyOf(moments);
+        moments = looks.stream().map(Look::moment).toList();
+        read = looks.stream().map(Look::read).toList();
     }
 
     public Run run() {
@@ -65,6 +73,27 @@ public final class Trace {
     }
 
     /**
+     * What a target on pieces would read at each moment, in its own unit.
+     *
+     * @param state of the run, as {@link EachGrade} tells it
+     */
+    public double[] course(TargetState state) {
+        List<Requirement> requirements = run.batch().requirements();
+        for (int r = requirements.size() - 1; r >= 0; r--) {
+            if (requirements.get(r) instanceof Requirement.OfContent content
+                    && run.batch().recipe().targets().get(content.target()).equals(state.target())
+                    && TargetState.of(run, content).grade().equals(state.grade())) {
+                double si = run.value(content);
+                // Values are proportional to kg/m3: what the target shows over what it read.
+                double unit = si == 0 ? 1 : state.value() / si;
+                int index = r;
+                return read.stream().mapToDouble(look -> unit * look[index]).toArray();
+            }
+        }
+        throw new IllegalArgumentException("no target on pieces of this run: " + state.name());
+    }
+
+    /**
      * Follows the run again at many moments.
      *
      * @param layers how many depths, at least 2
@@ -76,7 +105,7 @@ public final class Trace {
         }
         Batch batch = run.batch();
         double[] seconds = run.seconds();
-        List<Moment> moments = new ArrayList<>();
+        List<Look> looks = new ArrayList<>();
         double clock = 0;
         double[] done = new double[0];
         for (int k = 0; k < batch.slots().size(); k++) {
@@ -86,16 +115,21 @@ public final class Trace {
             int count = transfer ? PER_TRANSFER : Math.max(PER_TRANSFER, (int) Math.ceil(PER_STEP * slot.part()));
             count = Math.max(FEWEST, (int) Math.min(count, MOST_MODES / modes(run, k)));
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);
-            for (int i = 1; i <= count; i++) {
+            for (int i = first(run, count); i <= count; i++) {
                 // Squares: the profile moves with the root of time.
                 upTo[k] = whole * i * i / ((double) count * count);
                 look(batch, slot.step(), transfer, clock + upTo[k], upTo, depths)
-                        .ifPresent(moments::add);
+                        .ifPresent(looks::add);
             }
             done = upTo;
             clock += whole;
         }
-        return new Trace(run, depths, moments);
+        return new Trace(run, depths, looks);
+    }
+
+    private static int first(Run run, int count) {
+        boolean several = run.batch().chain(0).lot().stream().anyMatch(grade -> !grade.oneAxis());
+        return several ? (int) Math.ceil(count * Math.sqrt(EARLIEST)) : 1;
     }
 
     /** Of each of the pieces that the lot stands on; of several sides the shortest stage is resolved in any case. */
@@ -111,7 +145,7 @@ public final class Trace {
     }
 
     /** Empty so early in a stage that the profile would need more modes than are kept: the next look will do. */
-    private static Optional<Moment> look(
+    private static Optional<Look> look(
             Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
         try {
             return Optional.of(see(batch, step, transfer, clock, upTo, depths));
@@ -120,12 +154,14 @@ public final class Trace {
         }
     }
 
-    private static Moment see(Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
+    private static Look see(Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
         Recipe recipe = batch.recipe();
         int stage = upTo.length - 1;
         List<Sight> sights = new ArrayList<>();
+        List<Course> courses = new ArrayList<>();
         for (int s = 0; s < recipe.species().size(); s++) {
             Course course = batch.chain(s).sketch().follow(upTo);
+            courses.add(course);
             List<Population> populations = batch.classes(s).populations();
             // Contents are proportional to kg/m3, and there are many: one exact conversion serves them all.
             double unit =
@@ -143,6 +179,12 @@ public final class Trace {
             boolean wet = batch.stage(s, stage).wets();
             sights.add(new Sight(wet ? course.value(new Probe.Liquor(), stage) : Double.NaN, profiles, means));
         }
-        return new Moment(step, transfer, clock, List.copyOf(sights));
+        double[] read = batch.requirements().stream()
+                .mapToDouble(requirement -> requirement instanceof Requirement.OfContent content
+                                && !(content.gauge() instanceof Gauge.OfLiquor)
+                        ? content.gauge().value(courses.get(content.species()), stage)
+                        : Double.NaN)
+                .toArray();
+        return new Look(new Moment(step, transfer, clock, List.copyOf(sights)), read);
     }
 }
