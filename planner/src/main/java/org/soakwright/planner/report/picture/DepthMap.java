@@ -15,7 +15,10 @@ final class DepthMap {
     private static final int COLUMNS = 276;
     private static final int ROWS = 56;
     private static final int LEFT = 52;
+    /** Room for labels, unless a limit takes more words. */
     private static final int RIGHT = 148;
+
+    private static final int MOST_RIGHT = 220;
     private static final int MAP_TOP = 104;
     private static final int MAP_HEIGHT = 212;
     private static final int COURSE_TOP = MAP_TOP + MAP_HEIGHT + 40;
@@ -25,6 +28,7 @@ final class DepthMap {
 
     private final History history;
     private final Clock clock;
+    private final int right;
     private final Ribbon ribbon;
     private final int species;
     private final Grade grade;
@@ -45,11 +49,12 @@ final class DepthMap {
     DepthMap(History history, Clock clock, int species, int gradeIndex, Scale contents) {
         this.history = history;
         this.clock = clock;
-        ribbon = new Ribbon(clock, history.ends(), Look.WIDTH - LEFT - RIGHT);
         this.species = species;
         grade = history.grades().get(gradeIndex);
         profiles = history.profiles(species, gradeIndex);
         bounds = Bound.of(history, species, gradeIndex);
+        right = right(bounds);
+        ribbon = new Ribbon(clock, history.ends(), Look.WIDTH - LEFT - right);
         this.contents = contents;
         several = PieceWords.hasSeveralSides(grade);
         differs = PieceWords.differ(grade, history.recipe().species().get(species));
@@ -58,6 +63,14 @@ final class DepthMap {
             courses.add(history.readings(species, gradeIndex, reading));
         }
         shares = resampled();
+    }
+
+    private static int right(List<Bound> bounds) {
+        double longest = bounds.stream()
+                .mapToDouble(bound -> Typeface.width(bound.text(), Look.TEXT))
+                .max()
+                .orElse(0);
+        return (int) Math.min(MOST_RIGHT, Math.max(RIGHT, Math.ceil(longest + Labels.ROOM)));
     }
 
     Picture picture() {
@@ -88,7 +101,7 @@ final class DepthMap {
                 title(),
                 "Shade: the content" + where() + ". Above: the steps. Below: core, mean and " + outside() + "."
                         + (bounds.isEmpty() ? "" : " Lines: contents that targets name."));
-        int width = Look.WIDTH - LEFT - RIGHT;
+        int width = Look.WIDTH - LEFT - right;
         Panel map = new Panel(new Rectangle2D.Double(LEFT, MAP_TOP, width, MAP_HEIGHT), clock, depths);
         map.image(Shades.image(shares, look.contents()));
         map.on(sheet);
@@ -98,7 +111,7 @@ final class DepthMap {
         ShadeBar.on(sheet, map.area().getMaxX() + 22, MAP_TOP, MAP_HEIGHT, contents, history.unit(species));
         Panel course = new Panel(new Rectangle2D.Double(LEFT, COURSE_TOP, width, COURSE_HEIGHT), clock, contents);
         ribbon.through(sheet, course);
-        Labels labels = new Labels(course.area().getMaxX(), RIGHT);
+        Labels labels = new Labels(course.area().getMaxX(), right);
         for (Bound bound : bounds) {
             course.line(
                     new double[] {0, history.end()},

@@ -10,6 +10,8 @@ import java.util.List;
 final class Labels {
     static final double SPACING = 16;
     private static final double LEAD = 16;
+    /** What a label takes beside its words. */
+    static final double ROOM = LEAD + 2;
 
     private final double x;
     private final double width;
@@ -73,11 +75,11 @@ final class Labels {
             lead.lineTo(x + LEAD - 1, label.y);
             sheet.draw(lead, label.color, Look.dashed(1.2f));
             String rest = label.rest.isEmpty() ? "" : " " + label.rest;
-            double room = width - LEAD - 2 - Typeface.width(rest, Look.TEXT);
+            double room = width - ROOM - Typeface.width(rest, Look.TEXT);
             String fitted = Typeface.fitted(label.name, Look.TEXT, room) + rest;
             sheet.text(
                     fitted,
-                    x + LEAD + 2,
+                    x + ROOM,
                     label.y + 4,
                     Sheet.Anchor.LEFT,
                     Look.TEXT,

@@ -43,11 +43,11 @@ record Reach(double low, double high) {
         return value >= low && value <= high;
     }
 
-    /** Where a limit lies, in words, that is not shown: {@code , far right}. */
+    /** Where a limit lies, in words, that is not shown: {@code ; 12 far right}. */
     String beyond(OptionalDouble limit) {
         if (limit.isEmpty() || holds(limit.getAsDouble())) {
             return "";
         }
-        return limit.getAsDouble() > high ? ", far right" : ", far left";
+        return "; " + Words.written(limit.getAsDouble()) + (limit.getAsDouble() > high ? " far right" : " far left");
     }
 }

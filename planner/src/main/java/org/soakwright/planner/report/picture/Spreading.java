@@ -170,7 +170,8 @@ record Spreading(
     /** {@code 15.13 or more}: what the share of the pieces reads that the target names; with a unit where one is given. */
     String read(Pieces of, String unit) {
         if (isBand()) {
-            return Words.number(of.atMost(1 - inside())) + " to " + Words.number(of.atMost(inside())) + unit;
+            // The target reads the lower end.
+            return Words.number(of.read()) + " to " + Words.number(of.atMost(inside())) + unit;
         }
         return Words.number(of.read()) + unit + (isFromAbove() ? " or more" : " or less");
     }

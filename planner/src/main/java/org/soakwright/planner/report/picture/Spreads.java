@@ -11,7 +11,7 @@ import java.util.OptionalDouble;
 /** How many of the pieces that differ read how much of what targets limit, and how many keep the limit. */
 final class Spreads {
     private static final int LEFT = 52;
-    private static final int RIGHT = 236;
+    private static final int RIGHT = 260;
     private static final int FIELD_HEIGHT = 132;
     private static final int HEAD = 30;
     private static final int FOOT = 44;
@@ -127,7 +127,9 @@ final class Spreads {
                     new Line2D.Double(x, y - 4, x + SAMPLE, y - 4),
                     look.series(pieces.series()),
                     Look.line(pieces.series()));
-            words(sheet, pieces.grade() + pieces.verdict(), x + SAMPLE + 8, y, room, look.ink());
+            double named = room - Typeface.width(pieces.verdict(), Look.TEXT);
+            String name = Typeface.fitted(pieces.grade(), Look.TEXT, named);
+            words(sheet, name + pieces.verdict(), x + SAMPLE + 8, y, room, look.ink());
             y += LINE;
             String read = one.share().isPresent()
                     ? one.many() + " read " + one.read(pieces, "")

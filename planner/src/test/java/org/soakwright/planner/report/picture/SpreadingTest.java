@@ -82,7 +82,7 @@ class SpreadingTest {
         assertEquals("", Reach.of(near).beyond(near.atMost()));
         Spreading far = resting("at-most: 900 g/kg");
         assertFalse(Reach.of(far).holds(900));
-        assertEquals(", far right", Reach.of(far).beyond(far.atMost()));
+        assertEquals("; 900 far right", Reach.of(far).beyond(far.atMost()));
     }
 
     @Test
@@ -97,6 +97,6 @@ class SpreadingTest {
                 OptionalDouble.empty(),
                 List.of(alike)));
         assertTrue(reach.high() - reach.low() > 0.5, reach.toString());
-        assertEquals(", far left", reach.beyond(OptionalDouble.of(10)));
+        assertEquals("; 10 far left", reach.beyond(OptionalDouble.of(10)));
     }
 }
