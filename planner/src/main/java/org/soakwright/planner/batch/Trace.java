@@ -19,8 +19,11 @@ public final class Trace {
     private static final int PER_TRANSFER = 6;
     private static final int FEWEST = 4;
 
-    /** Of a stage: pieces of several sides are resolved for its end; looked at earlier they would seem to hold more than as loaded. */
-    private static final double EARLIEST = 1 / 16.0;
+    /**
+     * Of a stage in liquor: pieces of several sides are resolved for its end; looked at earlier they would seem to hold more than as
+     * loaded.
+     */
+    private static final double EARLIEST = 1 / 25.0;
 
     /** What the first look of a stage may need: looks as squares need as many times the end's modes as there are looks. */
     private static final int MOST_MODES = 300;
@@ -115,7 +118,7 @@ public final class Trace {
             int count = transfer ? PER_TRANSFER : Math.max(PER_TRANSFER, (int) Math.ceil(PER_STEP * slot.part()));
             count = Math.max(FEWEST, (int) Math.min(count, MOST_MODES / modes(run, k)));
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);
-            for (int i = first(run, count); i <= count; i++) {
+            for (int i = first(batch, k, count); i <= count; i++) {
                 // Squares: the profile moves with the root of time.
                 upTo[k] = whole * i * i / ((double) count * count);
                 look(batch, slot.step(), transfer, clock + upTo[k], upTo, depths)
@@ -127,9 +130,14 @@ public final class Trace {
         return new Trace(run, depths, looks);
     }
 
-    private static int first(Run run, int count) {
-        boolean several = run.batch().chain(0).lot().stream().anyMatch(grade -> !grade.oneAxis());
-        return several ? (int) Math.ceil(count * Math.sqrt(EARLIEST)) : 1;
+    private static int first(Batch batch, int stage, int count) {
+        for (int s = 0; s < batch.recipe().species().size(); s++) {
+            boolean several = batch.chain(s).lot().stream().anyMatch(grade -> !grade.oneAxis());
+            if (several && batch.stage(s, stage).wets()) {
+                return (int) Math.ceil(count * Math.sqrt(EARLIEST));
+            }
+        }
+        return 1;
     }
 
     /** Of each of the pieces that the lot stands on; of several sides the shortest stage is resolved in any case. */
