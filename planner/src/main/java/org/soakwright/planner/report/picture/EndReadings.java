@@ -90,7 +90,15 @@ final class EndReadings {
         if (share == null) {
             return OptionalDouble.of(content.value(target.reading()));
         }
-        double below = below(share.si());
+        boolean band = state.atLeast().isPresent() && state.atMost().isPresent();
+        if (!band) {
+            return told(content, state.atLeast().isEmpty() ? share.si() : 1 - share.si());
+        }
+        // A band reads the side that is nearer to failing, which is known of its own step only.
+        return OptionalDouble.empty();
+    }
+
+    private OptionalDouble told(StepEnd.Content content, double below) {
         List<Double> values = content.distribution().getOrDefault(target.reading(), List.of());
         for (int i = 0; i < values.size(); i++) {
             if (Math.abs(StepEnd.SHARES.get(i) - below) < SAME) {
@@ -98,13 +106,5 @@ final class EndReadings {
             }
         }
         return OptionalDouble.empty();
-    }
-
-    /** The share of the pieces that read so much or less: the value of a band is that of its lower side. */
-    private double below(double share) {
-        if (state.atLeast().isEmpty()) {
-            return share;
-        }
-        return state.atMost().isEmpty() ? 1 - share : (1 - share) / 2;
     }
 }
