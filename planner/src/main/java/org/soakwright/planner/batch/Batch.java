@@ -103,6 +103,7 @@ public final class Batch {
         List<Course> courses = new ArrayList<>(chains.size());
         for (int s = 0; s < chains.size(); s++) {
             try {
+                chains.get(s).require(seconds);
                 courses.add(chains.get(s).follow(seconds));
             } catch (StageTooShort tooShort) {
                 throw tooShort(tooShort, s, seconds);
@@ -125,7 +126,7 @@ public final class Batch {
                         + recipe.species().get(species).name()
                         + " by this version: found " + Durations.practical(seconds[cause.stage()])
                         + (slot.part() > 0 && slot.part() < 1 ? " per fill" : "") + ", which needs more than "
-                        + Chain.MOST_MODES + " modes"
+                        + cause.most() + " modes"
                         + (chains.get(species).lot().size() > 1
                                 ? " over " + chains.get(species).lot().size()
                                         + (recipe.lot().grades().size()

@@ -65,7 +65,8 @@ public record Checkpoint(int step, double seconds, String species, double expect
         }
         List<Batch> others = new ArrayList<>();
         for (double factor : FACTORS) {
-            others.add(new Batch(withDiffusivity(recipe, watched.get(), factor)));
+            // What an advice for a deviation of a fifth needs is good enough in a sketch.
+            others.add(Batch.sketch(withDiffusivity(recipe, watched.get(), factor), -1));
         }
         for (int i = 0; i < recipe.steps().size(); i++) {
             Step step = recipe.steps().get(i);
@@ -99,7 +100,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
         double factor = 1 + share * (explained.factor() - 1);
         Recipe recipe = run.batch().recipe();
         Species watched = recipe.species(species).orElseThrow();
-        Run other = new Batch(withDiffusivity(recipe, watched, factor)).follow(run.seconds());
+        Run other = Batch.sketch(withDiffusivity(recipe, watched, factor), -1).follow(run.seconds());
         return other.batch().requirements().stream()
                 .filter(requirement -> !other.meets(requirement))
                 .max(Comparator.comparingDouble(other::miss))

@@ -104,7 +104,7 @@ sealed interface Gauge {
         public double[] gradient(Course course, int stage) {
             double[] values = Gauge.values(pieces, reading, course, stage);
             Scatter scatter = new Scatter(pieces, values);
-            double[] answers = scatter.answers(scatter.percentile(share), values.length);
+            double[] answers = scatter.answers(scatter.percentile(share));
             List<Part> sum = new ArrayList<>();
             for (int i = 0; i < answers.length; i++) {
                 if (answers[i] != 0) {

@@ -24,7 +24,7 @@ sealed interface Requirement {
      * limit is within it, rounding or not.
      */
     record OfTotal(int target, Goal goal, double limit) implements Requirement {
-        static final double ROUNDING = 1e-10;
+        static final double SUMMED = 1e-10;
 
         @Override
         public boolean upper() {
@@ -33,7 +33,7 @@ sealed interface Requirement {
 
         @Override
         public double miss(double value) {
-            return value / limit - 1 - ROUNDING;
+            return value / limit - 1 - SUMMED;
         }
 
         @Override
@@ -44,12 +44,16 @@ sealed interface Requirement {
 
     double KNEE = 0.01;
 
+    /** Of the largest content met: what rounding may make of a value that is just the limit. */
+    double ROUNDING = 1e-11;
+
     /** Whether a value is within the limit. */
     default boolean allows(double value) {
         if (this instanceof OfTotal) {
             return miss(value) <= 0;
         }
-        return upper() ? value <= limit() : value >= limit();
+        double slack = this instanceof OfContent content ? ROUNDING * content.scale() : 0;
+        return upper() ? value <= limit() + slack : value >= limit() - slack;
     }
 
     default double miss(double value) {

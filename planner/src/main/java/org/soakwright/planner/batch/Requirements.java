@@ -13,6 +13,7 @@ import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
+import org.soakwright.solver.chain.Stage;
 
 /** Targets taken apart into requirements on single numbers. */
 final class Requirements {
@@ -119,9 +120,19 @@ final class Requirements {
             boolean upper,
             @Nullable Liquor liquor) {
         double start = StartContent.of(recipe, recipe.species().get(species), gauge.grade());
-        double scale = Math.max(start, Double.MIN_NORMAL);
+        double scale = Math.max(Math.max(start, most(species)), Double.MIN_NORMAL);
         double si = si(basis, limit, start, liquor);
         all.add(new Requirement.OfContent(index, species, stage, gauge, si, upper, scale));
+    }
+
+    /** The largest content that any surroundings pull towards, kg/m3 of piece. */
+    private double most(int species) {
+        double most = 0;
+        for (int k = 0; k < batch.slots().size(); k++) {
+            Stage stage = batch.stage(species, k);
+            most = Math.max(most, stage.partition() * stage.offset());
+        }
+        return most;
     }
 
     private double si(Basis basis, Quantity limit, double start, @Nullable Liquor liquor) {

@@ -5,10 +5,10 @@ import java.util.List;
 import java.util.Optional;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
+import org.soakwright.solver.chain.Chain;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Probe;
 import org.soakwright.solver.chain.StageTooShort;
-import org.soakwright.solver.shape.Grade;
 
 /**
  * A run looked at in between: profiles and readings of every species in every grade over the running clock, denser where a stage has
@@ -24,6 +24,9 @@ public final class Trace {
      * loaded.
      */
     private static final double EARLIEST = 1 / 25.0;
+
+    /** Looks where modes are counted in thousands, which a sketch of the chain shows. */
+    private static final int OF_SKETCHES = 14;
 
     /** What the first look of a stage may need: looks as squares need as many times the end's modes as there are looks. */
     private static final int MOST_MODES = 300;
@@ -82,10 +85,12 @@ public final class Trace {
      */
     public double[] course(TargetState state) {
         List<Requirement> requirements = run.batch().requirements();
-        for (int r = requirements.size() - 1; r >= 0; r--) {
+        for (int r = 0; r < requirements.size(); r++) {
+            // Of a band the side is meant that the state tells of.
             if (requirements.get(r) instanceof Requirement.OfContent content
                     && run.batch().recipe().targets().get(content.target()).equals(state.target())
-                    && TargetState.of(run, content).grade().equals(state.grade())) {
+                    && TargetState.of(run, content).grade().equals(state.grade())
+                    && TargetState.of(run, content).value() == state.value()) {
                 double si = run.value(content);
                 // Values are proportional to kg/m3: what the target shows over what it read.
                 double unit = si == 0 ? 1 : state.value() / si;
@@ -116,9 +121,16 @@ public final class Trace {
             boolean transfer = slot.part() == 0;
             double whole = slot.seconds(seconds);
             int count = transfer ? PER_TRANSFER : Math.max(PER_TRANSFER, (int) Math.ceil(PER_STEP * slot.part()));
-            count = Math.max(FEWEST, (int) Math.min(count, MOST_MODES / modes(run, k)));
+            int modes = modes(run, k);
+            boolean sketched = modes > Chain.MOST_MODES || hasSeveralSides(batch);
+            if (sketched) {
+                count = modes > Chain.MOST_MODES ? Math.min(count, OF_SKETCHES) : count;
+            } else {
+                count = Math.max(FEWEST, Math.min(count, MOST_MODES / modes));
+            }
+            int first = sketched && wets(batch, k) ? (int) Math.ceil(count * Math.sqrt(EARLIEST)) : 1;
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);
-            for (int i = first(batch, k, count); i <= count; i++) {
+            for (int i = first; i <= count; i++) {
                 // Squares: the profile moves with the root of time.
                 upTo[k] = whole * i * i / ((double) count * count);
                 look(batch, slot.step(), transfer, clock + upTo[k], upTo, depths)
@@ -130,24 +142,24 @@ public final class Trace {
         return new Trace(run, depths, looks);
     }
 
-    private static int first(Batch batch, int stage, int count) {
-        for (int s = 0; s < batch.recipe().species().size(); s++) {
-            boolean several = batch.chain(s).lot().stream().anyMatch(grade -> !grade.oneAxis());
-            if (several && batch.stage(s, stage).wets()) {
-                return (int) Math.ceil(count * Math.sqrt(EARLIEST));
-            }
-        }
-        return 1;
+    private static boolean hasSeveralSides(Batch batch) {
+        return batch.recipe().lot().grades().stream()
+                .anyMatch(grade -> grade.sides().size() > 1);
     }
 
-    /** Of each of the pieces that the lot stands on; of several sides the shortest stage is resolved in any case. */
-    private static double modes(Run run, int stage) {
-        double most = 1;
-        for (int s = 0; s < run.batch().recipe().species().size(); s++) {
-            List<Grade> pieces = run.batch().chain(s).lot();
-            if (pieces.stream().allMatch(Grade::oneAxis)) {
-                most = Math.max(most, (double) run.course(s).modes(stage) / pieces.size());
+    private static boolean wets(Batch batch, int stage) {
+        for (int s = 0; s < batch.recipe().species().size(); s++) {
+            if (batch.stage(s, stage).wets()) {
+                return true;
             }
+        }
+        return false;
+    }
+
+    private static int modes(Run run, int stage) {
+        int most = 1;
+        for (int s = 0; s < run.batch().recipe().species().size(); s++) {
+            most = Math.max(most, run.course(s).modes(stage));
         }
         return most;
     }

@@ -70,6 +70,15 @@ record Variation(double sigma, double[] nodes, double[] weights, boolean factorw
         return factorwise ? Math.exp(sigma * number) : number;
     }
 
+    /** The same at evenly spaced numbers from minus to plus a reach; by number. */
+    double[][] table(double reach, int steps) {
+        double[][] table = new double[steps + 1][];
+        for (int i = 0; i <= steps; i++) {
+            table[i] = between(reach * (2.0 * i / steps - 1));
+        }
+        return table;
+    }
+
     /** What each class contributes to a reading at a standard normal number (Lagrange's polynomials); straight beyond the outermost. */
     double[] between(double number) {
         double low = nodes[0];

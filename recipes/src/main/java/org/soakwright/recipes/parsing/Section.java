@@ -118,7 +118,7 @@ enum Section {
 
     /** Keys of a right name in the wrong place, and where they belong. */
     private static final Map<String, String> HOMES = Map.ofEntries(
-            entry("fills", "a rinse"),
+            entry("fills", "the rinse itself, beside its liquor"),
             entry("flow", "the liquor of a rinse"),
             entry("liquor", "a soak or a rinse"),
             entry("film", "a soak, a rinse or a dry step"),

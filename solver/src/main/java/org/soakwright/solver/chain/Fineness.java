@@ -17,8 +17,10 @@ record Fineness(List<Integer> steps, int degree, double blur) {
     /** Shortest stages within this factor are cut alike. */
     static final double FACTOR = 4;
 
-    /** Unknowns of all grades together that a stage is given, some twenty milliseconds. */
+    /** Unknowns of all grades together that a stage is given, some twenty milliseconds; and more for every further grade. */
     static final int MOST_UNKNOWNS = 60_000;
+
+    private static final int MOST_MORE = 2_500;
 
     /** One axis costs so little that even the core of a sphere, where a polynomial is held least, can be sharp. */
     private static final int MORE_ON_ONE_AXIS = 4;
@@ -31,6 +33,14 @@ record Fineness(List<Integer> steps, int degree, double blur) {
 
     /** Share of its content that may pass through a side taken for sealed. */
     private static final double NOTHING = 5e-7;
+
+    /** With a lower degree a reading may be off by more than 1e-5 of the driving difference. */
+    private static final int SHARP_DEGREE = 9;
+
+    /** Of the driving difference: what may be given away before a stage is refused. */
+    private static final double MOST_BLUR = 1e-5;
+
+    private static final double MOST_BLUR_OF_MANY = 2e-4;
 
     /** How far the degree goes down at a time. */
     private static final int STEP = 2;
@@ -47,7 +57,7 @@ record Fineness(List<Integer> steps, int degree, double blur) {
         List<Integer> asked = asked(chain, seconds);
         List<Integer> steps = new ArrayList<>(asked);
         int degree = chain.degree();
-        while (unknowns(chain, steps, degree) > MOST_UNKNOWNS) {
+        while (unknowns(chain, steps, degree) > most(chain)) {
             double cheapest = Double.POSITIVE_INFINITY;
             for (int i = 0; i < steps.size(); i++) {
                 cheapest = Math.min(cheapest, next(asked, steps, i));
@@ -70,6 +80,37 @@ record Fineness(List<Integer> steps, int degree, double blur) {
             blur += steps.get(i) == SEALED ? NOTHING : cost(asked.get(i), steps.get(i));
         }
         return new Fineness(steps, degree, blur);
+    }
+
+    /**
+     * Refuses durations that ask for more than is kept, so that readings would be blurred.
+     *
+     * @throws StageTooShort naming the stage that asks for the finest elements, and how long it would have to be
+     */
+    static void require(RitzChain chain, double[] seconds) {
+        Fineness found = of(chain, seconds);
+        if (found.blur <= (many(chain) ? MOST_BLUR_OF_MANY : MOST_BLUR)
+                && found.degree >= Math.min(sharp(chain), chain.degree())) {
+            return;
+        }
+        int shortest = 0;
+        for (int k = 0; k < seconds.length; k++) {
+            double one = chain.conditions(k).pace(chain.lot().get(0), 0) * seconds[k];
+            double best = chain.conditions(shortest).pace(chain.lot().get(0), 0) * seconds[shortest];
+            if (!chain.passing(k) && (one < best || chain.passing(shortest))) {
+                shortest = k;
+            }
+        }
+        double[] longer = seconds.clone();
+        longer[shortest] *= 1.5;
+        double enough = longer[shortest];
+        try {
+            require(chain, longer);
+        } catch (StageTooShort still) {
+            enough = still.stage() == shortest ? still.shortest() : enough;
+        }
+        double unknowns = unknowns(chain, asked(chain, seconds), sharp(chain));
+        throw new StageTooShort(shortest, seconds[shortest], unknowns, most(chain), enough);
     }
 
     private static double next(List<Integer> asked, List<Integer> steps, int side) {
@@ -110,6 +151,19 @@ record Fineness(List<Integer> steps, int degree, double blur) {
     /** A side's elements. */
     static Mesh mesh(int step, int degree, double... corners) {
         return step == SEALED ? new Mesh(new double[] {0, 1}, 2) : Mesh.of(Math.pow(FACTOR, step), degree, corners);
+    }
+
+    /** Many grades are mostly classes of one, of which averages and shares are asked, not single places. */
+    private static int sharp(RitzChain chain) {
+        return many(chain) ? LEAST_DEGREE : SHARP_DEGREE;
+    }
+
+    private static boolean many(RitzChain chain) {
+        return chain.lot().size() > Chain.MANY;
+    }
+
+    private static int most(RitzChain chain) {
+        return MOST_UNKNOWNS + MOST_MORE * (chain.lot().size() - 1);
     }
 
     private static double unknowns(RitzChain chain, List<Integer> steps, int degree) {

@@ -53,7 +53,7 @@ final class Link {
             double estimate = modes.estimate(limit);
             if (estimate > Chain.MOST_MODES) {
                 double excess = estimate / Chain.MOST_MODES;
-                throw new StageTooShort(index, seconds, estimate, seconds * excess * excess);
+                throw new StageTooShort(index, seconds, estimate, Chain.MOST_MODES, seconds * excess * excess);
             }
         }
         return Math.max(1, modes.upTo(limit));

@@ -107,6 +107,11 @@ final class RitzChain extends Chain {
     }
 
     @Override
+    public void require(double... seconds) {
+        Fineness.require(this, seconds);
+    }
+
+    @Override
     public Chain sketch() {
         if (sketch == null) {
             sketch = new RitzChain(lot, starts, stages, passing, ROUGH);

@@ -60,7 +60,7 @@ public record Stage(
     }
 
     /** Content of the surroundings from which the pieces are counted, kg/m3: of the feed, of the liquor, of the equilibrium in air. */
-    double offset() {
+    public double offset() {
         if (surroundings instanceof Surroundings.Vessel vessel) {
             return vessel.flow() > 0 ? vessel.feed() : vessel.content();
         }

@@ -5,13 +5,20 @@ public final class StageTooShort extends IllegalArgumentException {
     private static final long serialVersionUID = 1;
 
     private final int stage;
+    private final int most;
     private final double shortest;
 
-    StageTooShort(int stage, double seconds, double modes, double shortest) {
-        super("stage " + stage + " of " + seconds + " s needs " + Math.round(modes) + " modes, more than "
-                + Chain.MOST_MODES + "; from " + shortest + " s on it can be computed");
+    StageTooShort(int stage, double seconds, double modes, int most, double shortest) {
+        super("stage " + stage + " of " + seconds + " s needs " + Math.round(modes) + " modes, more than " + most
+                + "; from " + shortest + " s on it can be computed");
         this.stage = stage;
+        this.most = most;
         this.shortest = shortest;
+    }
+
+    /** How many modes would have been kept. */
+    public int most() {
+        return most;
     }
 
     /** Which stage, from 0. */

@@ -1,6 +1,7 @@
 package org.soakwright.solver.stage;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.soakwright.solver.shape.Grade;
 
@@ -124,24 +125,23 @@ public final class Product {
         return state;
     }
 
-    /** The side whose index runs fastest: rows times what lies side by side. */
+    /** The side whose index runs fastest: column by column, so that what is added to lies side by side. */
     private static double[] last(double[][] matrix, double[] state, int before) {
         int rows = matrix.length;
         int columns = matrix[0].length;
+        double[][] turned = transposed(matrix);
         double[] next = new double[before * rows];
+        double[] sum = new double[rows];
         for (int b = 0; b < before; b++) {
-            int from = b * columns;
-            for (int r = 0; r < rows; r++) {
-                double[] row = matrix[r];
-                double even = 0;
-                double odd = 0;
-                int c = 0;
-                for (; c + 1 < columns; c += 2) {
-                    even += row[c] * state[from + c];
-                    odd += row[c + 1] * state[from + c + 1];
+            Arrays.fill(sum, 0);
+            for (int c = 0; c < columns; c++) {
+                double factor = state[b * columns + c];
+                double[] column = turned[c];
+                for (int r = 0; r < rows; r++) {
+                    sum[r] += factor * column[r];
                 }
-                next[b * rows + r] = even + odd + (c < columns ? row[c] * state[from + c] : 0);
             }
+            System.arraycopy(sum, 0, next, b * rows, rows);
         }
         return next;
     }
@@ -169,14 +169,16 @@ public final class Product {
     /** Each matrix turned over. */
     public static List<double[][]> transposed(List<double[][]> matrices) {
         List<double[][]> turned = new ArrayList<>();
-        for (double[][] matrix : matrices) {
-            double[][] one = new double[matrix[0].length][matrix.length];
-            for (int r = 0; r < matrix.length; r++) {
-                for (int c = 0; c < matrix[0].length; c++) {
-                    one[c][r] = matrix[r][c];
-                }
+        matrices.forEach(matrix -> turned.add(transposed(matrix)));
+        return turned;
+    }
+
+    private static double[][] transposed(double[][] matrix) {
+        double[][] turned = new double[matrix[0].length][matrix.length];
+        for (int r = 0; r < matrix.length; r++) {
+            for (int c = 0; c < matrix[0].length; c++) {
+                turned[c][r] = matrix[r][c];
             }
-            turned.add(one);
         }
         return turned;
     }
