@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.EnumMap;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import org.soakwright.recipes.model.Medium;
@@ -17,6 +18,7 @@ public final class Run {
     private final Batch batch;
     private final double[] seconds;
     private final List<Course> courses;
+    private final Map<Integer, StepEnd> ends = new HashMap<>();
 
     Run(Batch batch, double[] seconds, List<Course> courses) {
         this.batch = batch;
@@ -46,8 +48,12 @@ public final class Run {
         return batch.cost().of(seconds);
     }
 
-    /** The end of a step, from 0. */
+    /** The end of a step, from 0; found once, since percentiles are dear. */
     public StepEnd end(int step) {
+        return ends.computeIfAbsent(step, this::ended);
+    }
+
+    private StepEnd ended(int step) {
         Recipe recipe = batch.recipe();
         int stage = batch.lastStage(step);
         double between = recipe.between() == null ? 0 : recipe.between().si();

@@ -28,6 +28,7 @@ public final class Trace {
     private final Run run;
     private final double[] depths;
     private final List<Moment> moments;
+    private final List<double[]> read;
 
     /**
      * One look.
@@ -47,10 +48,14 @@ public final class Trace {
      */
     public record Sight(double liquor, double[][] profiles, double[] means) {}
 
-    private Trace(Run run, double[] depths, List<Moment> moments) {
+    /** One look with what every requirement on pieces would read there, kg/m3; NaN for others. */
+    private record Look(Moment moment, double[] read) {}
+
+    private Trace(Run run, double[] depths, List<Look> looks) {
         this.run = run;
         this.depths = depths;
-        this.moments = List.copyOf(moments);
+        moments = looks.stream().map(Look::moment).toList();
+        read = looks.stream().map(Look::read).toList();
     }
 
     public Run run() {
@@ -68,6 +73,29 @@ public final class Trace {
     }
 
     /**
+     * What a target on pieces would read at each moment, in its own unit.
+     *
+     * @param state of the run, as {@link EachGrade} tells it
+     */
+    public double[] course(TargetState state) {
+        List<Requirement> requirements = run.batch().requirements();
+        for (int r = 0; r < requirements.size(); r++) {
+            // Of a band the side is meant that the state tells of.
+            if (requirements.get(r) instanceof Requirement.OfContent content
+                    && run.batch().recipe().targets().get(content.target()).equals(state.target())
+                    && TargetState.of(run, content).grade().equals(state.grade())
+                    && TargetState.of(run, content).value() == state.value()) {
+                double si = run.value(content);
+                // Values are proportional to kg/m3: what the target shows over what it read.
+                double unit = si == 0 ? 1 : state.value() / si;
+                int index = r;
+                return read.stream().mapToDouble(look -> unit * look[index]).toArray();
+            }
+        }
+        throw new IllegalArgumentException("no target on pieces of this run: " + state.name());
+    }
+
+    /**
      * Follows the run again at many moments.
      *
      * @param layers how many depths, at least 2
@@ -79,7 +107,7 @@ public final class Trace {
         }
         Batch batch = run.batch();
         double[] seconds = run.seconds();
-        List<Moment> moments = new ArrayList<>();
+        List<Look> looks = new ArrayList<>();
         double clock = 0;
         double[] done = new double[0];
         for (int k = 0; k < batch.slots().size(); k++) {
@@ -96,12 +124,12 @@ public final class Trace {
                 // Squares: the profile moves with the root of time.
                 upTo[k] = whole * i * i / ((double) count * count);
                 look(batch, slot.step(), transfer, clock + upTo[k], upTo, depths)
-                        .ifPresent(moments::add);
+                        .ifPresent(looks::add);
             }
             done = upTo;
             clock += whole;
         }
-        return new Trace(run, depths, moments);
+        return new Trace(run, depths, looks);
     }
 
     private static int modes(Run run, int stage) {
@@ -113,7 +141,7 @@ public final class Trace {
     }
 
     /** Empty so early in a stage that the profile would need more modes than are kept: the next look will do. */
-    private static Optional<Moment> look(
+    private static Optional<Look> look(
             Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
         try {
             return Optional.of(see(batch, step, transfer, clock, upTo, depths));
@@ -122,15 +150,17 @@ public final class Trace {
         }
     }
 
-    private static Moment see(Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
+    private static Look see(Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
         Recipe recipe = batch.recipe();
         int stage = upTo.length - 1;
         List<Sight> sights = new ArrayList<>();
+        List<Course> courses = new ArrayList<>();
         for (int s = 0; s < recipe.species().size(); s++) {
             Chain sketch = batch.chain(s).sketch();
             // So early a look that even a sketch would be blurred is left out.
             sketch.require(upTo);
             Course course = sketch.follow(upTo);
+            courses.add(course);
             List<Population> populations = batch.classes(s).populations();
             // Contents are proportional to kg/m3, and there are many: one exact conversion serves them all.
             double unit =
@@ -148,6 +178,12 @@ public final class Trace {
             boolean wet = batch.stage(s, stage).wets();
             sights.add(new Sight(wet ? course.value(new Probe.Liquor(), stage) : Double.NaN, profiles, means));
         }
-        return new Moment(step, transfer, clock, List.copyOf(sights));
+        double[] read = batch.requirements().stream()
+                .mapToDouble(requirement -> requirement instanceof Requirement.OfContent content
+                                && !(content.gauge() instanceof Gauge.OfLiquor)
+                        ? content.gauge().value(courses.get(content.species()), stage)
+                        : Double.NaN)
+                .toArray();
+        return new Look(new Moment(step, transfer, clock, List.copyOf(sights)), read);
     }
 }

@@ -13,7 +13,9 @@ import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Renewal;
+import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Target;
 
 /** A traced run as rows of numbers over the running clock, from the start of the batch on. */
 final class History {
@@ -120,6 +122,29 @@ final class History {
             };
         }
         return values;
+    }
+
+    /** What a target on pieces would read at each clock but the first, in its own unit. */
+    double[] course(TargetState state) {
+        return trace.course(state);
+    }
+
+    /** What it would have read as loaded, in the species' unit; empty where only a distribution would tell. Grade below 0 is the lot. */
+    OptionalDouble readAtStart(int species, int grade, Target.OfPieces target) {
+        Species loaded = recipe.species().get(species);
+        boolean varies = loaded.startVaries() != null;
+        if (target.share() != null && (varies || grade < 0)) {
+            return OptionalDouble.empty();
+        }
+        if (grade < 0) {
+            return OptionalDouble.of(lotMeans(species)[0]);
+        }
+        double value = readings(species, grade, target.reading())[0];
+        if (!varies || target.reading() == Reading.MEAN) {
+            return OptionalDouble.of(value);
+        }
+        Loaded start = new Loaded(recipe, species);
+        return OptionalDouble.of(value * start.mean(grades().get(grade)) / start.profile(new double[] {0})[0]);
     }
 
     /** The lot's mean by clock, in the species' unit. */

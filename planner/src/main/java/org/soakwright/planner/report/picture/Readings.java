@@ -52,11 +52,7 @@ final class Readings {
 
     private void draw(Graphics2D g, Theme theme) {
         Sheet sheet = new Sheet(g, theme, Look.WIDTH, height);
-        boolean sparse = watched.stream().flatMap(one -> one.courses().stream()).anyMatch(course -> !course.known());
-        sheet.head(
-                title(),
-                "Dashed: the limit. Dot: where it is read. Ring: it decides. Cross: it is missed."
-                        + (sparse ? " Small dots: followed at the ends of steps only." : ""));
+        sheet.head(title(), "Dashed: the limit. Dot: where it is read. Ring: it decides. Cross: it is missed.");
         int width = Look.WIDTH - LEFT - RIGHT;
         double top = Sheet.TOP + Ribbon.HEIGHT + ROW_GAP;
         for (int i = 0; i < watched.size(); i++) {
@@ -89,11 +85,7 @@ final class Readings {
         }
         for (Watched.Course course : one.courses()) {
             for (Watched.Piece piece : one.shown(course)) {
-                panel.line(
-                        piece.clocks(),
-                        piece.values(),
-                        look.series(course.series()),
-                        course.known() ? Look.line(course.series()) : Look.dashed(1.2f, 1, 4));
+                panel.line(piece.clocks(), piece.values(), look.series(course.series()), Look.line(course.series()));
             }
         }
         panel.on(sheet);
@@ -102,9 +94,6 @@ final class Readings {
                 one.name() + ", " + one.unit() + (one.spansOrders() ? " (each line is ten times the next)" : ""));
         for (Watched.Course course : one.courses()) {
             Color color = look.series(course.series());
-            if (!course.known()) {
-                one.shown(course).forEach(piece -> dots(sheet, panel, piece, color));
-            }
             mark(sheet, panel.x(course.readAt()), panel.y(course.value()), course.met(), course.decides(), color);
             Watched.Piece last = course.pieces().get(course.pieces().size() - 1);
             double late = history.end() * (1 - 1e-9);
@@ -120,14 +109,6 @@ final class Readings {
                     color);
         }
         labels.on(sheet, panel.area().getY(), panel.area().getMaxY());
-    }
-
-    private static void dots(Sheet sheet, Panel panel, Watched.Piece piece, Color color) {
-        for (int i = 0; i < piece.clocks().length; i++) {
-            double x = panel.x(piece.clocks()[i]);
-            double y = panel.y(piece.values()[i]);
-            sheet.fill(new Ellipse2D.Double(x - 2.5, y - 2.5, 5, 5), color);
-        }
     }
 
     private static void valueBeside(Sheet sheet, Panel panel, Watched.Course course) {

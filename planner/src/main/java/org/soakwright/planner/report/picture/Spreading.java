@@ -170,8 +170,12 @@ record Spreading(
     /** {@code 15.13 or more}: what the share of the pieces reads that the target names; with a unit where one is given. */
     String read(Pieces of, String unit) {
         if (isBand()) {
-            // The target reads the lower end.
-            return Words.number(of.atMost(1 - inside())) + " to " + Words.number(of.atMost(inside())) + unit;
+            double low = of.atMost(1 - inside());
+            double high = of.atMost(inside());
+            // The target reads the end that is nearer to failing.
+            boolean readsHigh = Math.abs(of.read() - high) < Math.abs(of.read() - low);
+            return Words.number(readsHigh ? low : of.read()) + " to " + Words.number(readsHigh ? of.read() : high)
+                    + unit;
         }
         return Words.number(of.read()) + unit + (isFromAbove() ? " or more" : " or less");
     }

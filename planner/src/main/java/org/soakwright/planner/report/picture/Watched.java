@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.recipes.model.Basis;
 import org.soakwright.recipes.model.Grade;
@@ -33,14 +34,12 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
      * What is read in one grade or liquor.
      *
      * @param name as in sheets
-     * @param known whether it is known in between, not only at the ends of steps
      * @param step at whose end it is read
      */
     record Course(
             String name,
             String label,
             int series,
-            boolean known,
             List<Piece> pieces,
             double readAt,
             String step,
@@ -93,9 +92,8 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
                 state.name(),
                 state.grade().orElse("liquor"),
                 Math.max(0, grade),
-                !ofPieces || !isAtEndsOnly(history, (Target.OfPieces) state.target(), grade),
                 ofPieces
-                        ? ofPieces(history, (Target.OfPieces) state.target(), grade, state, readAt)
+                        ? ofPieces(history, (Target.OfPieces) state.target(), grade, state)
                         : ofLiquor(history, (Target.OfLiquor) state.target()),
                 readAt,
                 history.ends().get(step).step().name(),
@@ -104,21 +102,16 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
                 decides);
     }
 
-    private static boolean isAtEndsOnly(History history, Target.OfPieces target, int grade) {
-        return EndReadings.areAll(history, species(history, target.species().name()), grade, target);
-    }
-
-    private static List<Piece> ofPieces(
-            History history, Target.OfPieces target, int grade, TargetState state, double readAt) {
+    private static List<Piece> ofPieces(History history, Target.OfPieces target, int grade, TargetState state) {
         int species = species(history, target.species().name());
-        double factor = Bound.perTargetUnit(history, species, grade, target);
-        if (isAtEndsOnly(history, target, grade)) {
-            return List.of(new EndReadings(history, species, grade, target, state).piece(readAt, factor));
+        OptionalDouble start = history.readAtStart(species, grade, target);
+        double[] later = history.course(state);
+        if (start.isEmpty()) {
+            return List.of(new Piece(Arrays.copyOfRange(history.clocks(), 1, later.length + 1), later));
         }
-        double[] values = grade < 0 ? history.lotMeans(species) : history.readings(species, grade, target.reading());
-        for (int i = 0; i < values.length; i++) {
-            values[i] /= factor;
-        }
+        double[] values = new double[later.length + 1];
+        values[0] = start.getAsDouble() / Bound.perTargetUnit(history, species, grade, target);
+        System.arraycopy(later, 0, values, 1, later.length);
         return List.of(new Piece(history.clocks(), values));
     }
 

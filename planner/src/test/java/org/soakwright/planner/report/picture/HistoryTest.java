@@ -3,6 +3,7 @@ package org.soakwright.planner.report.picture;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.soakwright.planner.batch.Planner;
@@ -83,9 +84,40 @@ class HistoryTest {
         assertEquals(1, crowded.fills(0).get(0).contents()[0], "the leach is made up with 1 g/L of wax");
     }
 
+    private static final List<History> OF_SEVERAL_SIDES = List.of(
+            Batches.history(Batches.followed("wheel-brining")),
+            Batches.history(Batches.followed("brick-desalination")),
+            Batches.history(Batches.corners()));
+
+    /** What pieces hold at most: no reading of pieces that only give can rise above it. */
+    @Test
+    void piecesThatOnlyGiveAreNeverSeenToHoldMoreThanAsLoaded() {
+        History bricks = OF_SEVERAL_SIDES.get(1);
+        for (int s = 0; s < 3; s++) {
+            double loaded = bricks.readings(s, 0, Reading.HIGHEST)[0];
+            for (double highest : bricks.readings(s, 0, Reading.HIGHEST)) {
+                assertTrue(highest <= 1.001 * loaded, highest + " of " + loaded);
+            }
+        }
+    }
+
+    @Test
+    void targetsOnSharesAndOnOtherWaysThanTheShortestAreFollowedToo() {
+        for (History history : OF_SEVERAL_SIDES) {
+            for (Watched watched : Watched.of(history, List.of())) {
+                watched.courses().stream()
+                        .filter(course -> !course.label().equals("liquor"))
+                        .forEach(course -> assertTrue(
+                                course.pieces().get(0).clocks().length >= history.clocks().length - 1, course.name()));
+            }
+        }
+    }
+
     @Test
     void aCourseEndsAtTheValueOfItsTarget() {
-        for (History history : List.of(LOINS, Batches.history(Batches.crowded()))) {
+        List<History> all = new ArrayList<>(OF_SEVERAL_SIDES);
+        all.addAll(List.of(LOINS, Batches.history(Batches.crowded())));
+        for (History history : all) {
             for (Watched watched : Watched.of(history, List.of())) {
                 for (Watched.Course course : watched.courses()) {
                     Watched.Piece last = course.pieces().get(course.pieces().size() - 1);

@@ -377,13 +377,6 @@ class PicturesTest {
                 picture("wheel-brining", "spread").caption());
     }
 
-    @Test
-    void whatTheTraceDoesNotFollowIsShownAtTheEndsOfSteps() throws Exception {
-        assertTrue(texts("wheel-brining", "readings").stream()
-                .anyMatch(text -> text.endsWith("Small dots: followed at the ends of steps only.")));
-        assertFalse(texts("loin-desalting", "readings").stream().anyMatch(text -> text.contains("Small dots")));
-    }
-
     private static double right(org.w3c.dom.Element bar) {
         return Double.parseDouble(bar.getAttribute("x")) + Double.parseDouble(bar.getAttribute("width"));
     }
