@@ -22,6 +22,9 @@ record Fineness(List<Integer> steps, int degree, double blur) {
 
     private static final int MOST_MORE = 2_500;
 
+    /** A sketch is given so many times fewer: it is for looking. */
+    private static final int OF_A_SKETCH = 4;
+
     /** One axis costs so little that even the core of a sphere, where a polynomial is held least, can be sharp. */
     private static final int MORE_ON_ONE_AXIS = 4;
 
@@ -163,7 +166,8 @@ record Fineness(List<Integer> steps, int degree, double blur) {
     }
 
     private static int most(RitzChain chain) {
-        return MOST_UNKNOWNS + MOST_MORE * (chain.lot().size() - 1);
+        int most = MOST_UNKNOWNS + MOST_MORE * (chain.lot().size() - 1);
+        return chain.degree() < LEAST_DEGREE ? most / OF_A_SKETCH : most;
     }
 
     private static double unknowns(RitzChain chain, List<Integer> steps, int degree) {

@@ -21,7 +21,7 @@ final class RitzChain extends Chain {
     private static final int ROUGH = 6;
 
     /** Spaces kept for later: each belongs to shortest stages within a factor of four. */
-    private static final int MOST_SPACES = 8;
+    private static final int MOST_SPACES = 4;
 
     private final List<Grade> lot;
     private final List<Start> starts;
@@ -38,6 +38,7 @@ final class RitzChain extends Chain {
             return size() > MOST_SPACES;
         }
     };
+    private final Passages passages = new Passages();
     private @Nullable RitzChain sketch;
 
     RitzChain(List<Grade> lot, List<Start> starts, List<Stage> stages, Set<Integer> passing) {
@@ -86,6 +87,10 @@ final class RitzChain extends Chain {
     /** Whether a stage's end is of no interest. */
     boolean passing(int stage) {
         return passing.contains(stage);
+    }
+
+    Passages passages() {
+        return passages;
     }
 
     double mixed(int stage) {

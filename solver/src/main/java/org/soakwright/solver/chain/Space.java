@@ -3,14 +3,12 @@ package org.soakwright.solver.chain;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.HashMap;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.solver.shape.Axis;
 import org.soakwright.solver.shape.Grade;
 import org.soakwright.solver.shape.Side;
-import org.soakwright.solver.stage.Bath;
 import org.soakwright.solver.stage.Bathing;
 import org.soakwright.solver.stage.Conditions;
 import org.soakwright.solver.stage.Mesh;
@@ -19,12 +17,6 @@ import org.soakwright.solver.stage.Ritz;
 
 /** Everything of a {@link RitzChain} that belongs to one cutting of its pieces' sides into elements; found when first asked for. */
 final class Space {
-    /** Unknowns of the passages prepared and kept, which equal fills and gradients ask for again: some forty megabytes. */
-    private static final int MOST_KEPT = 300_000;
-
-    /** Passages kept whatever their size. */
-    private static final int FEWEST_KEPT = 3;
-
     private final RitzChain chain;
     private final Fineness fineness;
     private final List<List<Mesh>> meshes = new ArrayList<>();
@@ -32,9 +24,6 @@ final class Space {
     private final Map<Wanted, Ritz> sides = new HashMap<>();
     private final Map<Conditions, List<Product>> products = new HashMap<>();
     private final Map<Crossing, List<double[][]>> carries = new HashMap<>();
-    /** Those used last stay longest. */
-    private final Map<Passing, Bathing> passages = new LinkedHashMap<>(16, 0.75f, true);
-
     private final Passed passed = new Passed();
     /** What was looked up before, by stage and then by grade: the maps' keys are long. */
     private final List<@Nullable List<Product>> byStage;
@@ -44,8 +33,6 @@ final class Space {
     private record Wanted(Axis axis, Mesh mesh, double biot) {}
 
     private record Crossing(Conditions before, Conditions after, int grade) {}
-
-    private record Passing(Conditions conditions, double seconds) {}
 
     /** The course last followed in this space: another with the same beginning starts where they part. */
     static final class Passed {
@@ -175,17 +162,6 @@ final class Space {
     }
 
     Bathing bathing(int stage, double seconds) {
-        Passing wanted = new Passing(chain.conditions(stage), seconds);
-        Bathing known = passages.get(wanted);
-        if (known == null) {
-            List<Product> lot = products(stage);
-            int unknowns = lot.stream().mapToInt(Product::size).sum();
-            while (passages.size() >= Math.max(FEWEST_KEPT, MOST_KEPT / unknowns)) {
-                passages.remove(passages.keySet().iterator().next());
-            }
-            known = new Bathing(lot, (Bath.Vessel) wanted.conditions.bath(), seconds);
-            passages.put(wanted, known);
-        }
-        return known;
+        return chain.passages().of(fineness, products(stage), chain.conditions(stage), seconds);
     }
 }
