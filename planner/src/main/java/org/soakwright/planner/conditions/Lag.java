@@ -1,0 +1,78 @@
+package org.soakwright.planner.conditions;
+
+import java.util.function.DoubleUnaryOperator;
+
+/**
+ * By how much a step is shorter, for what diffuses, than its clock says, because the piece was colder than the step at first: the
+ * time integral of 1 - D(T)/D. Negative where it was warmer. The integral runs over the root of time, where the integrand is smooth, by
+ * Gauss and Legendre's rule of four points on each of {@link #PANELS} panels.
+ */
+public final class Lag {
+    /** Nothing to add or take away. */
+    public static final Lag NONE = new Lag(seconds -> 0, 0);
+
+    private static final int PANELS = 48;
+    private static final double[] NODES = {
+        -0.8611363115940526, -0.3399810435848563, 0.3399810435848563, 0.8611363115940526
+    };
+    private static final double[] WEIGHTS = {
+        0.3478548451374538, 0.6521451548625461, 0.6521451548625461, 0.3478548451374538
+    };
+
+    private final DoubleUnaryOperator slope;
+    private final double over;
+    private final double[] sums;
+
+    /**
+     * Adds it up.
+     *
+     * @param slope 1 - D(T)/D at a time since the step began, s; below 1
+     * @param over from here on the slope is nothing, s
+     */
+    Lag(DoubleUnaryOperator slope, double over) {
+        this.slope = slope;
+        this.over = over;
+        sums = new double[over > 0 ? PANELS + 1 : 1];
+        for (int i = 1; i < sums.length; i++) {
+            sums[i] = sums[i - 1] + panel(root(i - 1), root(i));
+        }
+    }
+
+    /** What diffuses as if the step had its temperature throughout and lasted so long, s; above 0 for any step above 0. */
+    public double effective(double seconds) {
+        return seconds - of(seconds);
+    }
+
+    /** The lag of a step of so many seconds, s. */
+    public double of(double seconds) {
+        if (over == 0) {
+            return 0;
+        }
+        if (seconds >= over) {
+            return sums[PANELS];
+        }
+        double root = Math.sqrt(seconds);
+        int before = (int) (root / root(1));
+        return sums[before] + panel(root(before), root);
+    }
+
+    /** How much longer the step is for what diffuses by a second more, 1. */
+    public double rate(double seconds) {
+        return over == 0 || seconds >= over ? 1 : 1 - slope.applyAsDouble(seconds);
+    }
+
+    private double root(int panel) {
+        return Math.sqrt(over) * panel / PANELS;
+    }
+
+    private double panel(double from, double to) {
+        double middle = (from + to) / 2;
+        double half = (to - from) / 2;
+        double sum = 0;
+        for (int i = 0; i < NODES.length; i++) {
+            double root = middle + half * NODES[i];
+            sum += WEIGHTS[i] * 2 * root * slope.applyAsDouble(root * root);
+        }
+        return half * sum;
+    }
+}
