@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.soakwright.planner.conditions.Lag;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
@@ -22,6 +23,8 @@ public final class Batch {
     private final List<Chain> chains;
     private final List<Classes> classes;
     private final int[] lastStage;
+    private final int[] firstStage;
+    private final Warming warming;
     private final Cost cost;
     private final List<Requirement> requirements;
     private long evaluations;
@@ -48,14 +51,20 @@ public final class Batch {
     }
 
     private Batch(Recipe recipe, List<Chain> chains) {
-        Warming.of(recipe);
         this.recipe = recipe;
+        warming = Warming.of(recipe);
         this.chains = chains;
         classes = recipe.species().stream()
                 .map(species -> Classes.of(recipe, species))
                 .toList();
         slots = new Translation(recipe).slots();
         lastStage = new int[recipe.steps().size()];
+        firstStage = new int[recipe.steps().size()];
+        for (int k = slots.size() - 1; k >= 0; k--) {
+            if (slots.get(k).part() > 0) {
+                firstStage[slots.get(k).step()] = k;
+            }
+        }
         for (int k = 0; k < slots.size(); k++) {
             if (slots.get(k).part() > 0) {
                 lastStage[slots.get(k).step()] = k;
@@ -102,14 +111,39 @@ public final class Batch {
         }
         List<Course> courses = new ArrayList<>(chains.size());
         for (int s = 0; s < chains.size(); s++) {
+            double[] own = effective(s, seconds);
             try {
-                chains.get(s).require(seconds);
-                courses.add(chains.get(s).follow(seconds));
+                chains.get(s).require(own);
+                courses.add(chains.get(s).follow(own));
             } catch (StageTooShort tooShort) {
                 throw tooShort(tooShort, s, seconds);
             }
         }
         return new Run(this, stepSeconds.clone(), courses);
+    }
+
+    /**
+     * What the stages last for one species, whose diffusivity is that of a step's temperature though the pieces come to it colder or warmer.
+     *
+     * @param seconds of the first stages by the clock
+     */
+    double[] effective(int species, double[] seconds) {
+        double[] own = seconds.clone();
+        for (int k = 0; k < own.length; k++) {
+            own[k] = lag(species, k).effective(seconds[k]);
+        }
+        return own;
+    }
+
+    /** How the time of a stage differs for a species. */
+    Lag lag(int species, int stage) {
+        int step = slots.get(stage).step();
+        return stage == firstStage[step] ? warming.lag(species, step) : Lag.NONE;
+    }
+
+    /** What is said of pieces that come to a step from another temperature. */
+    List<String> warming() {
+        return warming.said();
     }
 
     private Unsound tooShort(StageTooShort cause, int species, double[] seconds) {

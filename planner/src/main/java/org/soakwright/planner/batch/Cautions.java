@@ -46,7 +46,7 @@ public record Cautions(List<String> shown, List<String> stops) {
         for (Caution caution : Shelf.BOOK.due(facts)) {
             shown.add(words(caution, facts, hedge));
         }
-        Warming.of(recipe).ifPresent(shown::add);
+        shown.addAll(Warming.of(recipe).said());
         List<String> stops = Shelf.BOOK.stopping(facts).stream()
                 .map(caution -> words(caution, facts, hedge))
                 .toList();

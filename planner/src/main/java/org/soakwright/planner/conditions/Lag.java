@@ -24,6 +24,26 @@ public final class Lag {
     private final double[] sums;
 
     /**
+     * Adds it up for one step.
+     *
+     * @param felt the share of the pieces' mean difference in temperature that what diffuses feels, 0 to 1
+     * @param difference what the pieces are warmer by than the step when it begins, K
+     * @param slowed 1 - D(T)/D where T is so many kelvins above the step's temperature
+     */
+    public static Lag of(Warmth warmth, double felt, double difference, DoubleUnaryOperator slowed) {
+        return new Lag(seconds -> slowed.applyAsDouble(felt * difference * warmth.left(seconds)), warmth.over());
+    }
+
+    /**
+     * What a solute that only begins to leave or enter a uniform piece feels of the piece's warming: it moves in a layer so much thinner
+     * than the warmth's that the mean over its own bell of positions is (2/pi) atan((D/a)^(1/2)) of the difference, for a surface held at the
+     * new temperature in both.
+     */
+    public static double feltAtFirst(double diffusivity, double thermalDiffusivity) {
+        return 2 / Math.PI * Math.atan(Math.sqrt(diffusivity / thermalDiffusivity));
+    }
+
+    /**
      * Adds it up.
      *
      * @param slope 1 - D(T)/D at a time since the step began, s; below 1

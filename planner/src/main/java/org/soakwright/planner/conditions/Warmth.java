@@ -1,6 +1,12 @@
 package org.soakwright.planner.conditions;
 
+import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
+import org.soakwright.solver.shape.Axis;
 import org.soakwright.solver.shape.Side;
 
 /**
@@ -10,16 +16,29 @@ import org.soakwright.solver.shape.Side;
  *
  * @param thermalDiffusivity m2/s; above 0
  */
-record Warmth(List<Side> sides, double thermalDiffusivity) {
+public record Warmth(List<Side> sides, double thermalDiffusivity) {
     private static final double ROUNDING = 1e-12;
     private static final double EARLY = 1e-4;
 
-    Warmth {
+    /** Terms needed at {@link #EARLY}: pi^2 n^2 1e-4 reaches the logarithm of {@link #ROUNDING} before n = 168. */
+    private static final int MOST_TERMS = 170;
+
+    /** The frequencies of each axis, found once. */
+    private static final class Roots {
+        static final Map<Axis, double[]> OF = Arrays.stream(Axis.values())
+                .collect(Collectors.toUnmodifiableMap(
+                        axis -> axis,
+                        axis -> IntStream.rangeClosed(1, MOST_TERMS)
+                                .mapToDouble(axis::waveZero)
+                                .toArray()));
+    }
+
+    public Warmth {
         sides = List.copyOf(sides);
     }
 
     /** The share of the difference left after so many seconds: 1 at first, then falling. */
-    double left(double seconds) {
+    public double left(double seconds) {
         double left = 1;
         for (Side side : sides) {
             left *= left(side, thermalDiffusivity * seconds / (side.length() * side.length()));
@@ -28,13 +47,28 @@ record Warmth(List<Side> sides, double thermalDiffusivity) {
     }
 
     /** When the slowest of what is left has fallen to {@link #ROUNDING}, s. */
-    double over() {
+    public double over() {
         double rate = 0;
         for (Side side : sides) {
             double root = side.axis().waveZero(1) / side.length();
             rate += root * root * thermalDiffusivity;
         }
         return -Math.log(ROUNDING) / rate;
+    }
+
+    /** When no more than a share of the difference is left, s; by bisection to a thousandth. */
+    public double within(double share) {
+        double low = 0;
+        double high = over();
+        while (high - low > 1e-3 * high) {
+            double middle = (low + high) / 2;
+            if (left(middle) > share) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        return high;
     }
 
     private static double left(Side side, double fourier) {
@@ -44,13 +78,13 @@ record Warmth(List<Side> sides, double thermalDiffusivity) {
             return 1 - (power + 1) * (depth - power * fourier / 2);
         }
         double sum = 0;
-        for (int n = 1; ; n++) {
-            double root = side.axis().waveZero(n);
+        for (double root : Objects.requireNonNull(Roots.OF.get(side.axis()))) {
             double term = 2 * (power + 1) / (root * root) * Math.exp(-root * root * fourier);
             sum += term;
             if (term < ROUNDING) {
-                return sum;
+                break;
             }
         }
+        return sum;
     }
 }
