@@ -49,6 +49,7 @@ public abstract sealed class Chain permits WaveChain, LaunchChain, RitzChain {
                 throw new IllegalArgumentException("pieces of several sides start uniform, found " + starts.get(j));
             }
         }
+        stages.forEach(stage -> stage.surfaces().require(lot.size()));
         List<Grade> grades = List.copyOf(lot);
         if (grades.stream().allMatch(Grade::oneAxis) && grades.size() <= MANY) {
             return WaveChain.of(grades, List.copyOf(starts), List.copyOf(stages), new WaveChain.Shelf());

@@ -102,7 +102,10 @@ final class Space {
         for (int i = 0; i < pieces.sides().size(); i++) {
             Side side = pieces.sides().get(i);
             boolean sealed = sealedSides.get(grade).get(i);
-            Wanted wanted = new Wanted(side.axis(), meshes.get(grade).get(i), sealed ? 0 : conditions.biot(pieces, i));
+            Wanted wanted = new Wanted(
+                    side.axis(),
+                    meshes.get(grade).get(i),
+                    sealed ? 0 : conditions.of(grade).biot(pieces, i));
             found.add(sides.computeIfAbsent(wanted, key -> new Ritz(key.axis, key.mesh, key.biot)));
         }
         return found;

@@ -1,14 +1,15 @@
 package org.soakwright.solver.chain;
 
 /**
- * The highest or lowest place in a piece of several sides. A grid, denser towards the surface, finds the neighbourhood; windows of five
+ * The highest or lowest place in a piece of several sides. A grid, so much denser towards the surface that it sees what a liquor leaves
+ * beneath an open face when it turns, finds the neighbourhood; windows of five
  * points a side, halved about their best, narrow it down until the place is known to 1e-8 of each side, where the value is flat. Cores and
  * faces, the usual places, are known at once: there the profile falls away on both or on the only side.
  */
 final class Summit {
     private static final double PLACE = 1e-8;
     private static final int MOST_WINDOWS = 80;
-    private static final int GRID = 20;
+    private static final int GRID = 24;
 
     private Summit() {}
 
@@ -23,7 +24,7 @@ final class Summit {
         for (double[] side : positions) {
             for (int i = 0; i <= GRID; i++) {
                 double fromSurface = (double) (GRID - i) / GRID;
-                side[i] = 1 - fromSurface * fromSurface;
+                side[i] = 1 - fromSurface * fromSurface * fromSurface;
             }
         }
         double[] best = new double[sides];

@@ -63,6 +63,22 @@ final class Batches {
         return batches;
     }
 
+    /** Those of several solids again, each with a film of its own and every other with a skin. */
+    static List<Batch> dressed() {
+        Random random = new Random(50313);
+        List<Batch> dressed = new ArrayList<>();
+        for (Batch batch : all()) {
+            if (batch.lot().size() > 1) {
+                List<Solid> lot = new ArrayList<>();
+                for (Solid solid : batch.lot()) {
+                    lot.add(solid.in(Recipes.coat(random, lot.size() % 2 == dressed.size() % 2)));
+                }
+                dressed.add(new Batch(lot, batch.start(), batch.phases()));
+            }
+        }
+        return dressed;
+    }
+
     static boolean bricks(Batch batch) {
         return batch.lot().stream().anyMatch(s -> s.edges().size() == 3);
     }

@@ -7,8 +7,13 @@ import java.util.List;
  *
  * @param volume m3, of all these bodies
  * @param ease diffusivity in these bodies over that of the phase
+ * @param coat what sets the surface apart
  */
-record Solid(List<Edge> edges, double volume, double ease) {
+record Solid(List<Edge> edges, double volume, double ease, Coat coat) {
+    Solid(List<Edge> edges, double volume, double ease) {
+        this(edges, volume, ease, Coat.NONE);
+    }
+
     static Solid of(int power, double length, double volume) {
         return new Solid(List.of(new Edge(power, length, 0)), volume, 1);
     }
@@ -26,7 +31,11 @@ record Solid(List<Edge> edges, double volume, double ease) {
     }
 
     Solid eased(double other) {
-        return new Solid(edges, volume, other);
+        return new Solid(edges, volume, other, coat);
+    }
+
+    Solid in(Coat other) {
+        return new Solid(edges, volume, ease, other);
     }
 
     /** The edge along which the surface is nearest to the core; the first of several. */

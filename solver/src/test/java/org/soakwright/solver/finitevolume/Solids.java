@@ -149,7 +149,7 @@ final class Solids {
         for (Edge edge : solid.edges()) {
             double biot = step.kind() == Kind.REST
                     ? 0
-                    : step.film() * edge.length() / (step.partition() * phase.diffusivity(solid, edge));
+                    : solid.coat().film(step) * edge.length() / (step.partition() * phase.diffusivity(solid, edge));
             axes.add(known.computeIfAbsent(
                     List.of(edge.power(), biot), key -> new Waves(rulers.apply(edge.power()), edge.power(), biot)));
         }

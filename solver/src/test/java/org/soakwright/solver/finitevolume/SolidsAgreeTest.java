@@ -27,7 +27,7 @@ import org.soakwright.solver.shape.Axis;
 import org.soakwright.solver.shape.Grade;
 import org.soakwright.solver.shape.Grain;
 import org.soakwright.solver.shape.Side;
-import org.soakwright.solver.stage.Surface;
+import org.soakwright.solver.stage.Surfaces;
 
 /** Chains of pieces of several axes against elements, which agree with the limit of finite volumes. */
 class SolidsAgreeTest {
@@ -66,6 +66,10 @@ class SolidsAgreeTest {
         List<Batch> batches = Batches.all();
         for (int r = 0; r < batches.size(); r++) {
             compare(batches.get(r), "batch " + r);
+        }
+        List<Batch> dressed = Batches.dressed();
+        for (int r = 0; r < dressed.size(); r++) {
+            compare(dressed.get(r), "batch " + r + " with surfaces by grade,");
         }
     }
 
@@ -207,9 +211,8 @@ class SolidsAgreeTest {
         List<Stage> stages = new ArrayList<>();
         for (Phase phase : batch.phases()) {
             Step step = phase.step();
-            Surface surface = step.kind() == Kind.REST
-                    ? new Surface.Sealed()
-                    : step.open() ? new Surface.Open() : new Surface.Film(step.film());
+            Surfaces surfaces = FiniteVolumesAgreeTest.surfaces(
+                    step, batch.lot().stream().map(Solid::coat).toList());
             Surroundings around = switch (step.kind()) {
                 case REST -> new Surroundings.Rest();
                 case AIR -> new Surroundings.Air(step.content());
@@ -218,7 +221,7 @@ class SolidsAgreeTest {
                     new Surroundings.Vessel(step.volume(), step.content(), step.flow(), step.feed());
             };
             stages.add(new Stage(
-                    step.diffusivity(), step.partition(), surface, around, step.clinging(), new Grain(phase.grain())));
+                    step.diffusivity(), step.partition(), surfaces, around, step.clinging(), new Grain(phase.grain())));
         }
         return stages;
     }
