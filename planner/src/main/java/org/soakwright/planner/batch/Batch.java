@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.soakwright.planner.conditions.Known;
 import org.soakwright.planner.conditions.Lag;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
@@ -25,6 +26,7 @@ public final class Batch {
     private final int[] lastStage;
     private final int[] firstStage;
     private final Warming warming;
+    private final Films films;
     private final Cost cost;
     private final List<Requirement> requirements;
     private long evaluations;
@@ -32,10 +34,20 @@ public final class Batch {
     /**
      * Prepares a recipe.
      *
-     * @throws Unsound where it asks for something that is not computed yet
+     * @throws Unsound where it asks for something that is not computed yet, or does not tell enough
      */
     public Batch(Recipe recipe) {
-        this(recipe, new Translation(recipe).chains(-1));
+        this(Known.of(recipe).recipe(), StepTimes.nominal(recipe));
+    }
+
+    /**
+     * The same, where the liquor of a step is moved by its own density.
+     *
+     * @param known in the bases that are computed in
+     * @param seconds of the steps, from which that density is found
+     */
+    Batch(Recipe known, double[] seconds) {
+        this(known, Films.of(known, seconds), -1, false);
     }
 
     /**
@@ -44,20 +56,29 @@ public final class Batch {
      * @param endless the grade whose pieces are taken for endless in all but their shortest side; -1 for none
      */
     static Batch sketch(Recipe recipe, int endless) {
-        return new Batch(
-                recipe,
-                new Translation(recipe)
-                        .chains(endless).stream().map(Chain::sketch).toList());
+        Recipe known = Known.of(recipe).recipe();
+        return new Batch(known, Films.of(known, StepTimes.nominal(known)), endless, true);
     }
 
-    private Batch(Recipe recipe, List<Chain> chains) {
+    private Batch(Recipe recipe, Films films, int endless, boolean sketch) {
+        this(
+                recipe,
+                films,
+                new Translation(recipe, films)
+                        .chains(endless).stream()
+                                .map(chain -> sketch ? chain.sketch() : chain)
+                                .toList());
+    }
+
+    private Batch(Recipe recipe, Films films, List<Chain> chains) {
         this.recipe = recipe;
+        this.films = films;
         warming = Warming.of(recipe);
         this.chains = chains;
         classes = recipe.species().stream()
                 .map(species -> Classes.of(recipe, species))
                 .toList();
-        slots = new Translation(recipe).slots();
+        slots = new Translation(recipe, films).slots();
         lastStage = new int[recipe.steps().size()];
         firstStage = new int[recipe.steps().size()];
         for (int k = slots.size() - 1; k >= 0; k--) {
@@ -81,7 +102,7 @@ public final class Batch {
             Step step = recipe.steps().get(i);
             steps.add(step.with(step.head().withTime(times.get(i))));
         }
-        return new Batch(recipe.withSteps(steps), chains);
+        return new Batch(recipe.withSteps(steps), films, chains);
     }
 
     public Recipe recipe() {
@@ -139,6 +160,10 @@ public final class Batch {
     Lag lag(int species, int stage) {
         int step = slots.get(stage).step();
         return stage == firstStage[step] ? warming.lag(species, step) : Lag.NONE;
+    }
+
+    Films films() {
+        return films;
     }
 
     /** What is said of pieces that come to a step from another temperature. */

@@ -2,7 +2,8 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.jspecify.annotations.Nullable;
+import java.util.Objects;
+import java.util.function.DoubleUnaryOperator;
 import org.soakwright.planner.conditions.Lag;
 import org.soakwright.planner.conditions.Warmth;
 import org.soakwright.recipes.model.Grade;
@@ -15,7 +16,7 @@ import org.soakwright.recipes.model.Step;
 /**
  * What it is worth that pieces come to a step from another temperature. Warmth spreads a hundred times quicker than solutes do, so a step's
  * diffusivity is taken to be that of its temperature, and its time is corrected by a {@link Lag}: of a uniform piece in its first step
- * for the thin layer in which its solute begins to move, later for the piece's mean temperature. The grade that makes the step longest decides.
+ * for the thin layer in which its solute begins to move, later for the whole piece. The grade that makes the step longest decides.
  */
 final class Warming {
     /** m2/s, low for moist foods, gels and plastics (1e-7 to 1.5e-7, from memory, common practice): warming is not made quicker than it is. */
@@ -62,12 +63,12 @@ final class Warming {
         double worth = 0;
         double most = 0;
         for (Species species : recipe.species()) {
-            Lag lag = slowest(species, index, difference, felt(species, index), shortest);
+            Lag lag = slowest(species, index, difference, false, shortest);
             own.add(lag);
             worth = Math.max(worth, Math.abs(lag.of(shortest)));
             most = Math.max(
                     most,
-                    Math.abs(slowest(species, index, difference, 1, shortest).of(shortest)));
+                    Math.abs(slowest(species, index, difference, true, shortest).of(shortest)));
         }
         boolean matters = worth > NEGLIGIBLE * shortest;
         if (matters) {
@@ -82,7 +83,7 @@ final class Warming {
 
     private String words(Step step, double difference, double worth, double most) {
         double warmed = recipe.lot().grades().stream()
-                .mapToDouble(grade -> warmth(grade).within(0.05))
+                .mapToDouble(grade -> warmth(recipe, grade).within(0.05))
                 .max()
                 .orElseThrow();
         Quantity there = step.temperature();
@@ -97,71 +98,53 @@ final class Warming {
                 + ".";
     }
 
-    private double felt(Species species, int step) {
-        boolean uniform = step == 0 && species.start() instanceof Start.Uniform;
-        return uniform
-                ? Lag.feltAtFirst(
-                        Translation.diffusivity(species, recipe.steps().get(0)), thermalDiffusivity())
-                : 1;
-    }
-
     /** Of the grade that makes the step longest. */
-    private Lag slowest(Species species, int index, double difference, double felt, double seconds) {
+    private Lag slowest(Species species, int index, double difference, boolean most, double seconds) {
         Step step = recipe.steps().get(index);
+        double kelvin = Objects.requireNonNull(step.temperature()).si();
         double there = Translation.diffusivity(species, step);
-        @Nullable Lag slowest = null;
+        boolean fresh = index == 0 && species.start() instanceof Start.Uniform;
+        DoubleUnaryOperator slowed = warmer -> 1 - Translation.diffusivity(species, step, kelvin + warmer) / there;
+        Lag slowest = Lag.NONE;
         for (Grade grade : recipe.lot().grades()) {
-            Lag lag = Lag.of(
-                    warmth(grade),
-                    felt,
-                    difference,
-                    warmer -> 1 - Translation.diffusivity(species, warmer(step, warmer)) / there);
-            if (slowest == null || lag.of(seconds) > slowest.of(seconds)) {
+            Warmth warmth = warmth(recipe, grade);
+            Lag lag = most
+                    ? Lag.most(warmth, difference, slowed)
+                    : fresh ? Lag.fresh(warmth, there, difference, slowed) : Lag.through(warmth, difference, slowed);
+            if (slowest == Lag.NONE || lag.of(seconds) > slowest.of(seconds)) {
                 slowest = lag;
             }
         }
-        return slowest == null ? Lag.NONE : slowest;
-    }
-
-    private static Step warmer(Step step, double kelvins) {
-        Quantity temperature = step.temperature();
-        if (temperature == null) {
-            return step;
-        }
-        Quantity changed = Quantity.ofSi(temperature.si() + kelvins, temperature.unit(), temperature.place());
-        return step.with(step.head().withTemperature(changed));
+        return slowest;
     }
 
     /** The mean temperature with which the pieces come to each step, K; the step's own where none is known. */
     private double[] arriving() {
         double[] arriving = new double[recipe.steps().size()];
         Quantity lot = recipe.lot().temperature();
-        @Nullable Double now = lot == null ? null : Double.valueOf(lot.si());
+        double now = lot == null ? Double.NaN : lot.si();
         for (int i = 0; i < arriving.length; i++) {
             Step step = recipe.steps().get(i);
             Quantity there = step.temperature();
             if (there == null) {
                 continue;
             }
-            arriving[i] = now == null ? there.si() : now;
-            now = there.si() + (arriving[i] - there.si()) * left(step);
+            arriving[i] = Double.isNaN(now) ? there.si() : now;
+            now = arriving[i] == there.si() ? there.si() : there.si() + (arriving[i] - there.si()) * left(step);
         }
         return arriving;
     }
 
     private double left(Step step) {
         return recipe.lot().grades().stream()
-                .mapToDouble(grade -> warmth(grade).left(step.time().seconds(0)))
+                .mapToDouble(grade -> warmth(recipe, grade).left(step.time().seconds(0)))
                 .max()
                 .orElseThrow();
     }
 
-    private Warmth warmth(Grade grade) {
-        return new Warmth(Translation.sides(grade), thermalDiffusivity());
-    }
-
-    private double thermalDiffusivity() {
-        return THERMAL_DIFFUSIVITY;
+    static Warmth warmth(Recipe recipe, Grade grade) {
+        Quantity stated = recipe.lot().thermalDiffusivity();
+        return new Warmth(Translation.sides(grade), stated == null ? THERMAL_DIFFUSIVITY : stated.si());
     }
 
     private static String minutes(double seconds) {

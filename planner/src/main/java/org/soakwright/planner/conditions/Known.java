@@ -101,8 +101,7 @@ public record Known(Recipe recipe, List<Conversion> conversions) {
                                 content.place(),
                                 "a content per dry mass needs the water of the pieces as loaded: found \"" + content
                                         + "\"; declare the species water with one start, or add moisture to the lot"));
-        Quantity derived =
-                Quantity.derived(content.si() * dry, content.unit(), content.place());
+        Quantity derived = Quantity.derived(content.si() * dry, content.unit(), content.place());
         conversions.add(new Conversion(
                 what,
                 content + " per dry mass",

@@ -11,6 +11,15 @@ public final class Lag {
     /** Nothing to add or take away. */
     public static final Lag NONE = new Lag(seconds -> 0, 0);
 
+    /**
+     * Of (D t)^(1/2): a diffusivity that rises from the surface by m per 2 (D t)^(1/2) of depth, m small, makes the uptake of an endless piece
+     * that of a time shorter by 2 m/(3 pi^(1/2)), to first order in m; so 4/(3 pi^(1/2)) of the root of D t.
+     */
+    private static final double LAYER = 4 / (3 * Math.sqrt(Math.PI));
+
+    /** Of a slab's first mode in both: the mean of cos over sin^2 is 4/(3 pi), that of cos alone 2/pi. */
+    private static final double THROUGH = 2.0 / 3;
+
     private static final int PANELS = 48;
     private static final double[] NODES = {
         -0.8611363115940526, -0.3399810435848563, 0.3399810435848563, 0.8611363115940526
@@ -26,21 +35,40 @@ public final class Lag {
     /**
      * Adds it up for one step.
      *
-     * @param felt the share of the pieces' mean difference in temperature that what diffuses feels, 0 to 1
+     * @param felt the share of the difference in temperature that what diffuses feels at a time since the step began, s
      * @param difference what the pieces are warmer by than the step when it begins, K
      * @param slowed 1 - D(T)/D where T is so many kelvins above the step's temperature
      */
-    public static Lag of(Warmth warmth, double felt, double difference, DoubleUnaryOperator slowed) {
-        return new Lag(seconds -> slowed.applyAsDouble(felt * difference * warmth.left(seconds)), warmth.over());
+    static Lag of(Warmth warmth, DoubleUnaryOperator felt, double difference, DoubleUnaryOperator slowed) {
+        return new Lag(seconds -> slowed.applyAsDouble(difference * felt.applyAsDouble(seconds)), warmth.over());
     }
 
     /**
-     * What a solute that only begins to leave or enter a uniform piece feels of the piece's warming: it moves in a layer so much thinner
-     * than the warmth's that the mean over its own bell of positions is (2/pi) atan((D/a)^(1/2)) of the difference, for a surface held at the
-     * new temperature in both.
+     * For a solute that only begins to leave or enter uniform pieces: it moves in a layer much thinner than the warmth's, and feels the
+     * temperature there, its gradient at the surface times {@link #LAYER} of the solute's depth (D t)^(1/2).
      */
-    public static double feltAtFirst(double diffusivity, double thermalDiffusivity) {
-        return 2 / Math.PI * Math.atan(Math.sqrt(diffusivity / thermalDiffusivity));
+    public static Lag fresh(Warmth warmth, double diffusivity, double difference, DoubleUnaryOperator slowed) {
+        return of(
+                warmth,
+                seconds -> Math.min(
+                        warmth.left(seconds), LAYER * warmth.gradient(seconds) * Math.sqrt(diffusivity * seconds)),
+                difference,
+                slowed);
+    }
+
+    /** For a profile that reaches through the pieces: it feels {@link #THROUGH} of what their mean temperature has to go. */
+    public static Lag through(Warmth warmth, double difference, DoubleUnaryOperator slowed) {
+        return of(warmth, seconds -> THROUGH * warmth.left(seconds), difference, slowed);
+    }
+
+    /** At most: as if the whole of what the mean temperature has to go were felt. */
+    public static Lag most(Warmth warmth, double difference, DoubleUnaryOperator slowed) {
+        return of(warmth, warmth::left, difference, slowed);
+    }
+
+    /** The mean over so many seconds of what the mean temperature has to go, as a share of what it had. */
+    public static double mean(Warmth warmth, double seconds) {
+        return most(warmth, 1, left -> left).of(seconds) / seconds;
     }
 
     /**

@@ -32,7 +32,8 @@ public final class Movement {
         }
         if (law instanceof Diffusivity.Law.Viscous viscous) {
             return Sources.at(
-                    viscous.at(), () -> new Scaling.StokesEinstein(value, viscous.at().si()).at(temperature));
+                    viscous.at(),
+                    () -> new Scaling.StokesEinstein(value, viscous.at().si()).at(temperature));
         }
         if (law instanceof Diffusivity.Law.Measured measured) {
             return new Scaling.Measured(measured.points().stream()

@@ -41,8 +41,7 @@ public final class Strengths {
         return steps;
     }
 
-    private static Step resolved(
-            Recipe recipe, Step.Wet step, List<Conversion> conversions, List<Problem> problems) {
+    private static Step resolved(Recipe recipe, Step.Wet step, List<Conversion> conversions, List<Problem> problems) {
         Map<String, Content> contents = new LinkedHashMap<>(step.liquor().contents());
         boolean changed = false;
         for (Map.Entry<String, Content> entry : contents.entrySet()) {
@@ -88,13 +87,14 @@ public final class Strengths {
         }
         Solution solution = solution(step, species, strength);
         double kelvin = temperature(step, strength).si();
-        double saturation =
-                Sources.at(temperature(step, strength), () -> solution.saturation(kelvin)).value();
+        double saturation = Sources.at(temperature(step, strength), () -> solution.saturation(kelvin))
+                .value();
         double fraction = basis == Basis.OF_SATURATION ? strength.si() * saturation : strength.si();
         if (fraction > saturation * (1 + ROUNDING)) {
             throw above(step, species, strength, solution, kelvin);
         }
-        return Sources.at(temperature(step, strength), () -> solution.content(fraction, kelvin)).value();
+        return Sources.at(temperature(step, strength), () -> solution.content(fraction, kelvin))
+                .value();
     }
 
     /** A content of a step's liquor in the unit of a strength: the other way round. */
@@ -129,8 +129,8 @@ public final class Strengths {
             return;
         }
         double kelvin = temperature.si();
-        double most =
-                Sources.at(temperature, () -> solution.saturationContent(kelvin)).value();
+        double most = Sources.at(temperature, () -> solution.saturationContent(kelvin))
+                .value();
         if (step.liquor().kgPerM3(content) > most * (1 + ROUNDING)) {
             throw above(step, species, written.amount(), solution, kelvin);
         }
@@ -154,8 +154,8 @@ public final class Strengths {
         double kelvin = temperature(step, strength).si();
         double saturation = solution.saturation(kelvin).value();
         double fraction = basis == Basis.OF_SATURATION ? strength.si() * saturation : strength.si();
-        String density = "density " + shown(solution.density(fraction, kelvin).value()) + " kg/m3 at "
-                + step.temperature();
+        String density =
+                "density " + shown(solution.density(fraction, kelvin).value()) + " kg/m3 at " + step.temperature();
         return basis == Basis.OF_SATURATION
                 ? shown(100 * fraction) + " % by mass, saturation being " + shown(100 * saturation) + " %; " + density
                 : density + ", " + shown(100 * fraction / saturation) + " % of saturation";
@@ -180,7 +180,8 @@ public final class Strengths {
                                 + "\"; add density to the liquor, such as 1080 kg/m3, or substance: sodium chloride to "
                                 + species.name()));
         step.liquor().contents().entrySet().stream()
-                .filter(other -> !other.getKey().equals(species.name()) && other.getValue().si() > 0)
+                .filter(other -> !other.getKey().equals(species.name())
+                        && other.getValue().si() > 0)
                 .findFirst()
                 .ifPresent(other -> {
                     throw new Unsound(
@@ -203,6 +204,7 @@ public final class Strengths {
     }
 
     private static String shown(double value) {
-        return Quantity.derived(value, Unit.ONE, org.soakwright.recipes.text.Place.of("")).written();
+        return Quantity.derived(value, Unit.ONE, org.soakwright.recipes.text.Place.of(""))
+                .written();
     }
 }

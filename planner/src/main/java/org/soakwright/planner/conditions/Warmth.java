@@ -56,6 +56,36 @@ public record Warmth(List<Side> sides, double thermalDiffusivity) {
         return -Math.log(ROUNDING) / rate;
     }
 
+    /** The gradient at the surface over the difference, averaged over the surface, 1/m: what the mean loses passes there. */
+    double gradient(double seconds) {
+        double surfacePerVolume = 0;
+        double loss = 0;
+        double whole = left(seconds);
+        for (Side side : sides) {
+            double perSecond = thermalDiffusivity / (side.length() * side.length());
+            surfacePerVolume += (side.axis().power() + 1) / side.length();
+            loss += whole / left(side, perSecond * seconds) * perSecond * loss(side, perSecond * seconds);
+        }
+        return loss / (thermalDiffusivity * surfacePerVolume);
+    }
+
+    /** Minus the derivative of {@link #left(Side, double)} by the Fourier number. */
+    private static double loss(Side side, double fourier) {
+        int power = side.axis().power();
+        if (fourier < EARLY) {
+            return (power + 1) * (1 / Math.sqrt(Math.PI * fourier) - power / 2.0);
+        }
+        double sum = 0;
+        for (double root : Objects.requireNonNull(Roots.OF.get(side.axis()))) {
+            double term = 2 * (power + 1) * Math.exp(-root * root * fourier);
+            sum += term;
+            if (term < ROUNDING) {
+                break;
+            }
+        }
+        return sum;
+    }
+
     /** When no more than a share of the difference is left, s; by bisection to a thousandth. */
     public double within(double share) {
         double low = 0;
