@@ -2,16 +2,19 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Objects;
 import java.util.function.DoubleUnaryOperator;
 import org.soakwright.planner.conditions.Lag;
 import org.soakwright.planner.conditions.Warmth;
 import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.Product;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Start;
 import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.text.Unsound;
 
 /**
  * What it is worth that pieces come to a step from another temperature. Warmth spreads a hundred times quicker than solutes do, so a step's
@@ -25,6 +28,9 @@ final class Warming {
     /** Of a step's shortest time: what warming may be worth and still be left out. */
     private static final double NEGLIGIBLE = 0.01;
 
+    /** Food that is colder holds ice, K (common practice: it begins to freeze at -1 to -2 Cel). */
+    private static final double FROZEN = 271.15;
+
     private final Recipe recipe;
     private final List<List<Lag>> lags = new ArrayList<>();
     private final List<String> said = new ArrayList<>();
@@ -37,6 +43,7 @@ final class Warming {
         for (int i = 0; i < arriving.length; i++) {
             Quantity there = recipe.steps().get(i).temperature();
             if (there != null && arriving[i] != there.si()) {
+                requireThawed(recipe.steps().get(i), arriving[i]);
                 step(i, arriving[i] - there.si());
             }
         }
@@ -54,6 +61,23 @@ final class Warming {
     /** What was included or left out; empty where no step changes the temperature of its pieces, or nothing comes of it. */
     List<String> said() {
         return List.copyOf(said);
+    }
+
+    /** Ice holds back both the warmth and the solute: nothing here knows how. */
+    private void requireThawed(Step step, double arriving) {
+        Quantity there = Objects.requireNonNull(step.temperature());
+        if (recipe.products().contains(Product.FOOD) && Math.min(arriving, there.si()) < FROZEN) {
+            Quantity lot = recipe.lot().temperature();
+            throw new Unsound(
+                    lot != null && lot.si() == arriving ? lot.place() : there.place(),
+                    "freezing and thawing are not computed: the pieces come to " + step.name() + " at "
+                            + celsius(arriving) + ", which is at " + there
+                            + "; thaw the lot first and write its temperature then");
+        }
+    }
+
+    private static String celsius(double kelvin) {
+        return String.format(Locale.ROOT, "%.1f °C", kelvin - 273.15);
     }
 
     private void step(int index, double difference) {
@@ -87,9 +111,8 @@ final class Warming {
                 .max()
                 .orElseThrow();
         Quantity there = step.temperature();
-        String degrees =
-                String.format(java.util.Locale.ROOT, "%.1f", there == null ? 0 : there.si() + difference - 273.15);
-        return "the pieces come to " + step.name() + " at " + degrees + " °C, which is at " + there
+        return "the pieces come to " + step.name() + " at " + celsius(there == null ? 0 : there.si() + difference)
+                + ", which is at " + there
                 + ": their mean is within a twentieth of that after about " + minutes(warmed) + ", worth "
                 + minutes(worth) + " of the step"
                 + (most > worth + NEGLIGIBLE * step.time().seconds(0)
