@@ -74,9 +74,7 @@ final class Classes {
         double volume = recipe.lot().volumeM3() * grade.share();
         for (int i = 0; i < population.count(); i++) {
             double larger = factor(population, i, ofSize);
-            List<Side> scaled = sides.stream()
-                    .map(side -> new Side(side.axis(), larger * side.length(), side.direction()))
-                    .toList();
+            List<Side> scaled = sides.stream().map(side -> side.scaled(larger)).toList();
             lot.add(new org.soakwright.solver.shape.Grade(
                     scaled, population.weight(i) * volume, factor(population, i, ofEase)));
             starts.add(Translation.start(recipe, species, factor(population, i, ofStart)));

@@ -50,10 +50,18 @@ public record Conditions(double diffusivity, double partition, Surfaces surfaces
         return biot(grade, 0);
     }
 
-    /** Biot number k L/(K D) of a side. */
+    /** Biot number k L/(K D) of a side; of its front, where it lies between two faces: L is then the full thickness. */
     public double biot(Grade grade, int side) {
+        return biot(grade, side, one().atFront());
+    }
+
+    /** Biot number k L/(K D) of a side's back, L the full thickness; 0 where it begins at the core. */
+    public double biotOfBack(Grade grade, int side) {
+        return grade.sides().get(side).twoFaced() ? biot(grade, side, one().atBack()) : 0;
+    }
+
+    private double biot(Grade grade, int side, Surface surface) {
         Side along = grade.sides().get(side);
-        Surface surface = one();
         if (surface instanceof Surface.Film film) {
             return film.coefficient() * along.length() / (partition * diffusivity(grade, along));
         }

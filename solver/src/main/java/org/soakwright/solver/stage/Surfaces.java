@@ -1,6 +1,7 @@
 package org.soakwright.solver.stage;
 
 import java.util.List;
+import org.soakwright.solver.shape.Grade;
 
 /** How the surfaces of a lot's grades meet what surrounds them in one stage. Sealed are all or none: a rest seals whatever it holds. */
 public sealed interface Surfaces {
@@ -10,8 +11,19 @@ public sealed interface Surfaces {
     /** Whether nothing passes anywhere. */
     boolean sealed();
 
-    /** Refuses a lot of more or fewer grades than have surfaces here. */
-    void require(int grades);
+    /** Refuses a lot of more or fewer grades than have surfaces here, and two faces where a piece has no two that could differ. */
+    default void require(List<Grade> lot) {
+        if (this instanceof ByGrade each && each.surfaces.size() != lot.size()) {
+            throw new IllegalArgumentException("a surface for each of " + lot.size()
+                    + " grades is wanted, or one for all; found " + each.surfaces.size());
+        }
+        for (int j = 0; j < lot.size(); j++) {
+            if (of(j) instanceof Surface.Faces && !lot.get(j).twoFaced()) {
+                throw new IllegalArgumentException(
+                        "grade " + j + " has no side between two faces: one surface is wanted, found " + of(j));
+            }
+        }
+    }
 
     /** One for all grades. */
     record Alike(Surface surface) implements Surfaces {
@@ -24,9 +36,6 @@ public sealed interface Surfaces {
         public boolean sealed() {
             return surface instanceof Surface.Sealed;
         }
-
-        @Override
-        public void require(int grades) {}
     }
 
     /**
@@ -55,14 +64,6 @@ public sealed interface Surfaces {
         @Override
         public boolean sealed() {
             return surfaces.get(0) instanceof Surface.Sealed;
-        }
-
-        @Override
-        public void require(int grades) {
-            if (surfaces.size() != grades) {
-                throw new IllegalArgumentException("a surface for each of " + grades
-                        + " grades is wanted, or one for all; found " + surfaces.size());
-            }
         }
     }
 }

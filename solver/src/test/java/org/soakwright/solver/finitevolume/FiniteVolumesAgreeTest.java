@@ -211,8 +211,11 @@ class FiniteVolumesAgreeTest {
                 : new Surfaces.ByGrade(each);
     }
 
-    private static Surface surface(Step step, Coat coat) {
+    static Surface surface(Step step, Coat coat) {
         if (step.kind() == Kind.REST) {
+            return new Surface.Sealed();
+        }
+        if (coat.skin() == 0) {
             return new Surface.Sealed();
         }
         if (Double.isInfinite(coat.skin())) {

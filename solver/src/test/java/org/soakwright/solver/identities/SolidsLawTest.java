@@ -206,9 +206,7 @@ class SolidsLawTest {
     }
 
     private static Grade scaled(Grade grade, double a) {
-        List<Side> sides = grade.sides().stream()
-                .map(side -> new Side(side.axis(), a * side.length(), side.direction()))
-                .toList();
+        List<Side> sides = grade.sides().stream().map(side -> side.scaled(a)).toList();
         return new Grade(sides, a * a * a * grade.volume(), grade.ease());
     }
 
