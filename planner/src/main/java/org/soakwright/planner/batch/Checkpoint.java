@@ -210,17 +210,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
         List<Step> steps = recipe.steps().stream()
                 .map(step -> Rescaled.step(step, changed.name(), factor))
                 .toList();
-        return new Recipe(
-                recipe.place(),
-                recipe.title(),
-                recipe.products(),
-                recipe.lot(),
-                species,
-                recipe.between(),
-                steps,
-                recipe.targets(),
-                recipe.minimise(),
-                recipe.prices());
+        return recipe.with(species, steps);
     }
 
     private static Species faster(Species species, double factor) {

@@ -182,15 +182,7 @@ final class Remedies {
         for (int i = 1; i <= added; i++) {
             Step step = steps.get(index);
             StepHead head = step.head();
-            steps.add(
-                    index + i,
-                    step.with(new StepHead(
-                            head.place(),
-                            unused(head.name() + " again", steps),
-                            head.time(),
-                            head.temperature(),
-                            head.overrides(),
-                            head.price())));
+            steps.add(index + i, step.with(head.withName(unused(head.name() + " again", steps))));
         }
         return recipe.withSteps(steps);
     }
@@ -291,17 +283,7 @@ final class Remedies {
         if (others.size() == recipe.targets().size()) {
             return;
         }
-        Recipe changed = new Recipe(
-                recipe.place(),
-                recipe.title(),
-                recipe.products(),
-                recipe.lot(),
-                recipe.species(),
-                recipe.between(),
-                recipe.steps(),
-                others,
-                recipe.minimise(),
-                recipe.prices());
+        Recipe changed = recipe.withTargets(others);
         offer("total", () -> changed, run -> "allow totals of " + totals(run), "");
     }
 

@@ -39,6 +39,7 @@ final class Translation {
     private final Recipe recipe;
 
     Translation(Recipe recipe) {
+        NotYet.require(recipe);
         this.recipe = recipe;
     }
 
@@ -228,13 +229,13 @@ final class Translation {
 
     /** D(T) = D exp(-E/R (1/T - 1/T0)), Arrhenius' law; a step's own diffusivity has no E and is taken as it stands. */
     private static double at(Diffusivity stated, Step step) {
-        Quantity at = stated.at();
-        Quantity energy = stated.activationEnergy();
         Quantity temperature = step.temperature();
-        if (at == null || energy == null || temperature == null) {
+        if (temperature == null || !(stated.law() instanceof Diffusivity.Law.Activated activated)) {
             return stated.value().si();
         }
-        return stated.value().si() * Math.exp(energy.si() / GAS_CONSTANT * (1 / at.si() - 1 / temperature.si()));
+        double kelvin = activated.at().si();
+        return stated.value().si()
+                * Math.exp(activated.energy().si() / GAS_CONSTANT * (1 / kelvin - 1 / temperature.si()));
     }
 
     static double partition(Species species, Step step) {

@@ -73,7 +73,7 @@ final class DiffusivityReader {
     private @Nullable Diffusivity one(String what, @Nullable Tree tree, Section section) {
         if (section == Section.VALUE || !(tree instanceof Tree.Entries)) {
             Quantity value = values.quantity(what, tree, Kind.DIFFUSIVITY);
-            return value == null ? null : problems.attempt(() -> new Diffusivity(value, null, null));
+            return value == null ? null : problems.attempt(() -> Diffusivity.of(value));
         }
         Fields fields = Fields.of(tree, section, problems);
         if (fields == null) {
@@ -83,6 +83,10 @@ final class DiffusivityReader {
         Quantity at = values.quantity("at", fields.get("at"), Kind.TEMPERATURE);
         Quantity energy = values.quantity("activation-energy", fields.get("activation-energy"), Kind.MOLAR_ENERGY);
         boolean broken = (at == null && fields.has("at")) || (energy == null && fields.has("activation-energy"));
-        return value == null || broken ? null : problems.attempt(() -> new Diffusivity(value, at, energy));
+        return value == null || broken
+                ? null
+                : problems.attempt(() -> at == null || energy == null
+                        ? Diffusivity.of(value)
+                        : new Diffusivity(value, new Diffusivity.Law.Activated(at, energy), null));
     }
 }

@@ -83,8 +83,8 @@ public final class RecipeReader {
         if (!problems.isEmpty() || title == null || lot == null) {
             return null;
         }
-        return problems.attempt(() ->
-                new Recipe(fields.place(), title, products, lot, species, between, steps, targets, goals, prices));
+        return problems.attempt(() -> new Recipe(
+                fields.place(), title, products, lot, species, between, steps, targets, goals, prices, null, null));
     }
 
     private void language(@Nullable Tree tree) {

@@ -11,12 +11,14 @@ import org.soakwright.recipes.model.Content;
 import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Partition;
+import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Spread;
 import org.soakwright.recipes.model.Start;
-import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.model.Traits;
 import org.soakwright.recipes.text.Problems;
 import org.soakwright.recipes.text.Tree;
+import org.soakwright.recipes.text.Unit;
 
 /** Reads the species and what the pieces hold of them. */
 final class SpeciesReader {
@@ -77,7 +79,7 @@ final class SpeciesReader {
         boolean inLiquor = media == null || media.contains(Medium.LIQUOR);
         Tree written = inLiquor ? fields.need("partition", "0.8") : fields.get("partition");
         Partition partition = written == null && !inLiquor
-                ? new Partition(1, fields.place())
+                ? new Partition(new Quantity(BigDecimal.ONE, Unit.ONE, fields.place()))
                 : partition("the partition of " + name, written);
         boolean broken = startVaries.broken() || diffusivityVaries.broken();
         if (!named || start == null || diffusivity == null || media == null || partition == null || broken) {
@@ -91,6 +93,7 @@ final class SpeciesReader {
                 diffusivity,
                 diffusivityVaries.spread(),
                 partition,
+                Traits.NONE,
                 media));
     }
 
@@ -165,12 +168,8 @@ final class SpeciesReader {
 
     @Nullable
     Partition partition(String what, @Nullable Tree tree) {
-        BigDecimal value = values.number(what, tree, "0.8");
-        if (value == null || tree == null) {
-            return null;
-        }
-        Place place = tree.place();
-        return problems.attempt(() -> new Partition(value.doubleValue(), place));
+        Quantity value = values.plain(what, tree, "0.8");
+        return value == null ? null : problems.attempt(() -> new Partition(value));
     }
 
     private @Nullable Set<Medium> media(@Nullable Tree tree) {

@@ -170,7 +170,7 @@ final class StepReader {
         boolean broken = (temperature == null && fields.has("temperature")) || (price == null && prices != null);
         return name == null || time == null || overrides == null || broken
                 ? null
-                : problems.attempt(() -> new StepHead(fields.place(), name, time, temperature, overrides, price));
+                : problems.attempt(() -> new StepHead(fields.place(), name, time, temperature, overrides, price, null));
     }
 
     private @Nullable Overrides overrides(Fields fields) {

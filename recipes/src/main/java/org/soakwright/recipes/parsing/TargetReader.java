@@ -91,7 +91,7 @@ final class TargetReader {
         Limits limits = limits(fields);
         return step == null || species == null || limits == null || !read
                 ? null
-                : problems.attempt(() -> new Target.OfLiquor(fields.place(), step, species, limits));
+                : problems.attempt(() -> new Target.OfLiquor(fields.place(), step, species, limits, null));
     }
 
     private @Nullable Target total(@Nullable Fields fields) {

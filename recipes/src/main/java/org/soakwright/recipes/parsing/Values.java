@@ -181,7 +181,8 @@ final class Values {
         return number == null ? null : number.value();
     }
 
-    private @Nullable Quantity plain(String what, @Nullable Tree tree, String example) {
+    @Nullable
+    Quantity plain(String what, @Nullable Tree tree, String example) {
         Tree.Leaf leaf = leaf(what, tree, example);
         String remedy = "write a plain number such as " + example;
         Measurement measured = leaf == null ? null : measurement(what, leaf, remedy);

@@ -60,17 +60,7 @@ final class Advice {
     /** What a plan takes in all is known whatever the pieces do: only limits on contents can make longer steps harmful. */
     private Run withoutTotals() {
         Recipe recipe = run.batch().recipe();
-        Recipe other = new Recipe(
-                recipe.place(),
-                recipe.title(),
-                recipe.products(),
-                recipe.lot(),
-                recipe.species(),
-                recipe.between(),
-                recipe.steps(),
-                contents,
-                recipe.minimise(),
-                recipe.prices());
+        Recipe other = recipe.withTargets(contents);
         return new Batch(other).follow(run.seconds());
     }
 
