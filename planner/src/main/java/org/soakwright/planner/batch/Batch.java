@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
@@ -24,6 +25,7 @@ public final class Batch {
     private final int[] lastStage;
     private final Cost cost;
     private final List<Requirement> requirements;
+    private final Assurance assurance;
     private long evaluations;
 
     /**
@@ -32,7 +34,8 @@ public final class Batch {
      * @throws Unsound where it asks for something that is not computed yet
      */
     public Batch(Recipe recipe) {
-        this(recipe, new Translation(recipe).chains(-1));
+        this(recipe, new Translation(recipe).chains(-1), Held.AS_ASKED, null);
+        Warming.of(recipe);
     }
 
     /**
@@ -41,14 +44,31 @@ public final class Batch {
      * @param endless the grade whose pieces are taken for endless in all but their shortest side; -1 for none
      */
     static Batch sketch(Recipe recipe, int endless) {
-        return new Batch(
+        Batch sketch = new Batch(
                 recipe,
                 new Translation(recipe)
-                        .chains(endless).stream().map(Chain::sketch).toList());
+                        .chains(endless).stream().map(Chain::sketch).toList(),
+                Held.AT_STATED_VALUES,
+                null);
+        Warming.of(recipe);
+        return sketch;
     }
 
-    private Batch(Recipe recipe, List<Chain> chains) {
-        Warming.of(recipe);
+    /** A sample of what is not known exactly: every value is known, and no confidence asked for. Warming was judged at stated values. */
+    static Batch sample(Recipe drawn, boolean sketched) {
+        List<Chain> chains = new Translation(drawn).chains(-1);
+        return new Batch(
+                drawn, sketched ? chains.stream().map(Chain::sketch).toList() : chains, Held.TO_NOTHING, null);
+    }
+
+    /** What requirements with a confidence are held to. */
+    private enum Held {
+        AS_ASKED,
+        AT_STATED_VALUES,
+        TO_NOTHING
+    }
+
+    private Batch(Recipe recipe, List<Chain> chains, Held held, @Nullable Assurance known) {
         this.recipe = recipe;
         this.chains = chains;
         classes = recipe.species().stream()
@@ -63,6 +83,36 @@ public final class Batch {
         }
         cost = new Cost(recipe);
         requirements = Requirements.of(this);
+        assurance = known != null
+                ? known
+                : held == Held.TO_NOTHING
+                        ? Assurance.none(requirements.size())
+                        : Assurance.of(recipe, requirements, held == Held.AT_STATED_VALUES || isDear());
+    }
+
+    /** Whether following once takes milliseconds. */
+    boolean isDear() {
+        return chains.stream().anyMatch(chain -> chain.sketch() != chain);
+    }
+
+    /** What requirements with a confidence are held to. */
+    Assurance assurance() {
+        return assurance;
+    }
+
+    /** The same, held otherwise. */
+    Batch held(Assurance other) {
+        return new Batch(recipe, chains, Held.TO_NOTHING, other);
+    }
+
+    /** Where a requirement stands among all. */
+    int index(Requirement requirement) {
+        for (int r = 0; r < requirements.size(); r++) {
+            if (requirements.get(r) == requirement) {
+                return r;
+            }
+        }
+        return requirements.indexOf(requirement);
     }
 
     /** The same physics with other times to choose from; what was found of it is shared. */
@@ -72,7 +122,9 @@ public final class Batch {
             Step step = recipe.steps().get(i);
             steps.add(step.with(step.head().withTime(times.get(i))));
         }
-        return new Batch(recipe.withSteps(steps), chains);
+        Batch retimed = new Batch(recipe.withSteps(steps), chains, Held.TO_NOTHING, assurance);
+        Warming.of(retimed.recipe);
+        return retimed;
     }
 
     public Recipe recipe() {

@@ -46,27 +46,100 @@ public final class Planner {
      * @throws org.soakwright.recipes.text.Unsound when a step is too short to be computed
      */
     public static Plan plan(Recipe recipe, Progress progress) {
-        Planner planner = new Planner(new Batch(recipe), progress);
-        Choice choice = planner.choose();
-        Run run = planner.landscape.run(choice.free());
-        boolean met = choice.met();
-        Explanation explanation = new Explanation(planner.batch, planner.grid, run);
-        List<String> binds = met ? explanation.binding() : explanation.missed();
+        Chosen chosen = Chosen.of(new Batch(recipe), progress);
+        Run run = chosen.run();
+        Explanation explanation = new Explanation(run.batch(), new Grid(recipe), run);
+        List<String> binds = chosen.met() ? explanation.binding() : explanation.missed();
         return new Plan(
                 run,
-                met,
-                choice.proof(),
-                met ? binds : List.of(),
+                chosen.met(),
+                chosen.proof(),
+                chosen.met() ? binds : List.of(),
                 explanation.perHour(binds),
-                met ? Optional.empty() : explanation.nearestMiss(),
-                met ? List.of() : Remedies.of(recipe, progress));
+                chosen.met() ? Optional.empty() : explanation.nearestMiss(),
+                chosen.met() ? List.of() : Remedies.of(recipe, progress));
     }
 
-    /** Only the choice, without explanations; empty where no choice meets the targets. */
+    /** Only the choice, without explanations or judgement; empty where no choice meets the targets. */
     static Optional<Run> best(Batch batch) {
         Planner planner = new Planner(batch, Progress.NONE);
         Choice choice = planner.choose();
         return choice.met() ? Optional.of(planner.landscape.run(choice.free())) : Optional.empty();
+    }
+
+    /** The same; targets with a confidence are met as judged by many samples. */
+    static Optional<Run> sure(Batch batch) {
+        if (!batch.assurance().any()) {
+            return best(batch);
+        }
+        Chosen chosen = Chosen.of(batch, Progress.NONE);
+        return chosen.met() ? Optional.of(chosen.run()) : Optional.empty();
+    }
+
+    /**
+     * A choice, judged.
+     *
+     * @param met as judged
+     */
+    record Chosen(Run run, boolean met, Plan.Proof proof) {
+        private static final int MOST_ROUNDS = 6;
+
+        /** Margins that differ by less, relatively, choose alike. */
+        private static final double SETTLED = 1e-4;
+
+        /**
+         * Targets with a confidence are planned on few samples and judged by many. Where the two disagree, the margin between them is taken
+         * to the next round: what is handed over was judged to meet the targets, or is a miss.
+         */
+        static Chosen of(Batch batch, Progress progress) {
+            Chosen best = null;
+            Batch held = batch;
+            long evaluations = 0;
+            for (int round = 0; round < MOST_ROUNDS; round++) {
+                Planner planner = new Planner(held, progress);
+                Choice choice = planner.choose();
+                evaluations += held.evaluations();
+                Run run = planner.landscape.run(choice.free()).judged(progress);
+                boolean sure = held.assurance().any();
+                boolean met = sure ? run.meetsTargets() : choice.met();
+                Chosen next = new Chosen(run, met, choice.proof().after(evaluations));
+                best = best == null || next.isBetter(best, planner) ? next : best;
+                if (!sure || settled(held, run.batch())) {
+                    return best;
+                }
+                held = run.batch();
+            }
+            return best;
+        }
+
+        private static boolean settled(Batch before, Batch after) {
+            double[] old = before.assurance().margins();
+            double[] now = after.assurance().margins();
+            for (int r = 0; r < old.length; r++) {
+                if (Math.abs(now[r] / old[r] - 1) > SETTLED) {
+                    return false;
+                }
+            }
+            return true;
+        }
+
+        private boolean isBetter(Chosen other, Planner planner) {
+            if (met != other.met) {
+                return met;
+            }
+            return met
+                    ? planner.merit.compare(
+                                    planner.grid.free(run.seconds()), planner.grid.free(other.run.seconds()))
+                            < 0
+                    : largestMiss(run) < largestMiss(other.run);
+        }
+
+        private static double largestMiss(Run run) {
+            return run.batch().requirements().stream()
+                    .mapToDouble(run::miss)
+                    .max()
+                    .orElse(0);
+        }
     }
 
     private record Choice(double[] free, boolean met, Plan.Proof proof) {}
@@ -162,8 +235,18 @@ public final class Planner {
         return OptionalDouble.of(run.totals().seconds() - slack * merit.span(0));
     }
 
+    /** Of a percentile over samples nothing is proven, whatever was gone through. */
     private Choice choice(Found found, Plan.Claim claim, int starts, int agreed, OptionalDouble bound) {
-        return new Choice(found.free(), found.met(), new Plan.Proof(claim, starts, agreed, bound, batch.evaluations()));
+        boolean sampled = batch.assurance().any();
+        return new Choice(
+                found.free(),
+                found.met(),
+                new Plan.Proof(
+                        sampled ? Plan.Claim.LOCAL : claim,
+                        starts,
+                        agreed,
+                        sampled ? OptionalDouble.empty() : bound,
+                        batch.evaluations()));
     }
 
     /** The place with most room: from the longest durations and the middle; from every start where none met the targets. */

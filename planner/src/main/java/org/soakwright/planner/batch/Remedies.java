@@ -58,7 +58,7 @@ final class Remedies {
     private boolean offer(String kind, Supplier<Recipe> change, Function<Run, String> words, String caution) {
         progress.at("looking for a remedy", share);
         try {
-            Optional<Run> run = Planner.best(new Batch(change.get()));
+            Optional<Run> run = Planner.sure(new Batch(change.get()));
             run.ifPresent(met -> found.add(new Plan.Remedy(kind, words.apply(met), met.totals(), caution)));
             return run.isPresent();
         } catch (Unsound impossible) {
