@@ -181,6 +181,16 @@ public final class Quantity {
     }
 
     /**
+     * This confidence, if it lies above 50 % and below 100 %.
+     *
+     * @throws Unsound otherwise
+     */
+    public Quantity sure() {
+        Rules.confidence(this);
+        return this;
+    }
+
+    /**
      * This weight, if it is within 10 % of what the sizes of the piece and its density make.
      *
      * @throws Unsound otherwise

@@ -48,6 +48,7 @@ public record Recipe(
         List<Problem> problems = new ArrayList<>(RecipeRules.counts(place, title, products, species, steps, minimise));
         problems.addAll(RecipeRules.agreement(declared, place, species, steps, targets, minimise));
         problems.addAll(Consistency.ofBetween(between));
+        problems.addAll(Water.problems(lot.moisture(), species));
         problems.addAll(Clinging.problems(steps, lot.massKg()));
         problems.addAll(Counting.problems(steps, targets, minimise, prices));
         Rules.require(problems);
@@ -68,6 +69,8 @@ public record Recipe(
                 shapes.keySet(),
                 shapes,
                 lot.density() != null,
+                lot.moisture() != null,
+                steps.stream().anyMatch(step -> step.head().gain() != null),
                 prices != null || steps.stream().anyMatch(step -> step.head().price() != null));
     }
 

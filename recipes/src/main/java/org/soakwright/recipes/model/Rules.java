@@ -133,6 +133,16 @@ final class Rules {
                 : ifNegative("a content", content);
     }
 
+    /** A limit can be many times the dry mass, or the water; what it is against stands elsewhere. */
+    static List<Problem> ifNoLimit(String what, @Nullable Quantity limit) {
+        if (limit == null || Basis.of(limit.unit()) != Basis.PER_MASS || limit.si() <= 1) {
+            return ifNoContent(what, limit);
+        }
+        return limit.si() > MOST_PER_DRY
+                ? found(limit, what + " per dry mass is at most 1000 kg/kg", "; write such as 1.8 kg/kg")
+                : List.of();
+    }
+
     /** A part that is neither nothing nor the whole. */
     static void within(String what, Quantity part, String example) {
         require(

@@ -74,6 +74,7 @@ public sealed interface Target {
             Limits limits,
             @Nullable Quantity confidence) implements Target {
         public OfLiquor {
+            Rules.require(limits.beyondTheWhole());
             Rules.confidence(confidence);
             if (limits.basis() == Basis.OF_START) {
                 throw new Unsound(place, "a liquor target is a content such as 30 g/L; remove `of: start`");

@@ -10,6 +10,11 @@ final class TargetRules {
 
     /** Only the mass as loaded has a share of the start or a content by volume; the water has neither. */
     static void check(Place place, Limits limits, Counted counted) {
+        boolean beyond =
+                counted.equals(new Counted.OfPiece(Per.DRY)) || counted.equals(new Counted.InPhase(Phase.MOISTURE));
+        if (!beyond) {
+            Rules.require(limits.beyondTheWhole());
+        }
         if (counted.equals(Counted.AS_LOADED)) {
             return;
         }
