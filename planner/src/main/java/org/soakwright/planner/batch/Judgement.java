@@ -125,7 +125,7 @@ record Judgement(Outlook outlook, double[] held) {
                             .findFirst()
                             .map(Throwable::getMessage),
                     dear,
-                    0,
+                    run.batch().assurance().any() ? run.batch().assurance().samples() : 0,
                     chances,
                     prospects,
                     IntStream.range(0, uncertainty.size())
@@ -188,7 +188,7 @@ record Judgement(Outlook outlook, double[] held) {
             return new Outlook.Prospect(
                     target,
                     state.grade(),
-                    state.name(),
+                    TargetState.name(run.batch().recipe(), requirement, ""),
                     chance(sides.stream().mapToInt(r -> r).toArray()),
                     holds
                             ? OptionalDouble.of(run.batch()

@@ -114,13 +114,20 @@ public record TargetState(
 
     /** {@code salt mean, thick}; {@code salt core after rest, thick}; {@code salt in first water}; {@code total time}. */
     static String name(Recipe recipe, Requirement requirement) {
+        return name(
+                recipe,
+                requirement,
+                recipe.confidence(recipe.targets().get(requirement.target()))
+                        .map(confidence -> " with " + confidence + " confidence")
+                        .orElse(""));
+    }
+
+    /** The same; how surely it is to be met is said with its words. */
+    static String name(Recipe recipe, Requirement requirement, String sure) {
         if (requirement instanceof Requirement.OfTotal total) {
             return "total " + total.goal().name().toLowerCase(java.util.Locale.ROOT);
         }
         Target target = recipe.targets().get(requirement.target());
-        String sure = recipe.confidence(target)
-                .map(confidence -> " with " + confidence + " confidence")
-                .orElse("");
         if (target instanceof Target.OfLiquor liquor) {
             return liquor.species().name() + " in " + liquor.step().name() + sure;
         }
