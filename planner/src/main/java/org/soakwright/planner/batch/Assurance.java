@@ -77,14 +77,14 @@ final class Assurance {
         return ones;
     }
 
-    /** The same held to other margins; of another number of requirements, to none. */
+    /** The same held to other margins, by requirement. */
     Assurance with(double[] others) {
-        return new Assurance(levels, others.length == levels.length ? others : ones(levels.length), ensemble);
+        return new Assurance(levels, others.clone(), ensemble);
     }
 
     /** The same, reading at stated values. */
     Assurance atStatedValues(double[] others) {
-        return new Assurance(levels, others.length == levels.length ? others : ones(levels.length), null);
+        return new Assurance(levels, others.clone(), null);
     }
 
     boolean any() {

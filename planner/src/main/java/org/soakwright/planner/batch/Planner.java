@@ -29,7 +29,7 @@ public final class Planner {
     private final Landscape landscape;
     private final Progress progress;
 
-    private Planner(Batch batch, Progress progress) {
+    Planner(Batch batch, Progress progress) {
         this.progress = progress;
         this.batch = batch;
         grid = new Grid(batch.recipe());
@@ -57,7 +57,7 @@ public final class Planner {
                 chosen.met() ? binds : List.of(),
                 explanation.perHour(binds),
                 chosen.met() ? Optional.empty() : explanation.nearestMiss(),
-                chosen.met() ? List.of() : Remedies.of(recipe, progress));
+                chosen.met() ? List.of() : Remedies.of(run, progress));
     }
 
     /** Only the choice, without explanations or judgement; empty where no choice meets the targets. */
@@ -72,79 +72,17 @@ public final class Planner {
         if (!batch.assurance().any()) {
             return best(batch);
         }
-        Chosen chosen = Chosen.of(batch, Progress.NONE);
-        return chosen.met() ? Optional.of(chosen.run()) : Optional.empty();
+        Optional<Run> promising = best(batch);
+        return promising.isPresent() ? Chosen.of(batch, Progress.NONE).ifMet() : promising;
     }
 
-    /**
-     * A choice, judged.
-     *
-     * @param met as judged
-     */
-    record Chosen(Run run, boolean met, Plan.Proof proof) {
-        private static final int MOST_ROUNDS = 6;
+    record Choice(double[] free, boolean met, Plan.Proof proof) {}
 
-        /** Margins that differ by less, relatively, choose alike. */
-        private static final double SETTLED = 1e-4;
-
-        /**
-         * Targets with a confidence are planned on few samples and judged by many. Where the two disagree, the margin between them is taken
-         * to the next round: what is handed over was judged to meet the targets, or is a miss.
-         */
-        static Chosen of(Batch batch, Progress progress) {
-            Chosen best = null;
-            Batch held = batch;
-            long evaluations = 0;
-            for (int round = 0; round < MOST_ROUNDS; round++) {
-                Planner planner = new Planner(held, progress);
-                Choice choice = planner.choose();
-                evaluations += held.evaluations();
-                Run run = planner.landscape.run(choice.free()).judged(progress);
-                boolean sure = held.assurance().any();
-                boolean met = sure ? run.meetsTargets() : choice.met();
-                Chosen next = new Chosen(run, met, choice.proof().after(evaluations));
-                best = best == null || next.isBetter(best, planner) ? next : best;
-                if (!sure || settled(held, run.batch())) {
-                    return best;
-                }
-                held = run.batch();
-            }
-            return best;
-        }
-
-        private static boolean settled(Batch before, Batch after) {
-            double[] old = before.assurance().margins();
-            double[] now = after.assurance().margins();
-            for (int r = 0; r < old.length; r++) {
-                if (Math.abs(now[r] / old[r] - 1) > SETTLED) {
-                    return false;
-                }
-            }
-            return true;
-        }
-
-        private boolean isBetter(Chosen other, Planner planner) {
-            if (met != other.met) {
-                return met;
-            }
-            return met
-                    ? planner.merit.compare(
-                                    planner.grid.free(run.seconds()), planner.grid.free(other.run.seconds()))
-                            < 0
-                    : largestMiss(run) < largestMiss(other.run);
-        }
-
-        private static double largestMiss(Run run) {
-            return run.batch().requirements().stream()
-                    .mapToDouble(run::miss)
-                    .max()
-                    .orElse(0);
-        }
+    Run run(Choice choice) {
+        return landscape.run(choice.free());
     }
 
-    private record Choice(double[] free, boolean met, Plan.Proof proof) {}
-
-    private Choice choose() {
+    Choice choose() {
         progress.at("choosing durations", 0);
         if (grid.points() <= WholeGrid.MOST_POINTS) {
             Found found = WholeGrid.best(grid, landscape, merit);

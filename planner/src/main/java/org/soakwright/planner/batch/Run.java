@@ -1,6 +1,7 @@
 package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
@@ -199,29 +200,37 @@ public final class Run {
     /** The same run looked at for other targets of the recipe, of which those kept are held to what they were; not judged. */
     public Run withTargets(List<Target> targets) {
         Batch own = new Batch(batch.recipe().withTargets(targets));
-        double[] margins = own.assurance().margins();
-        for (int r = 0; r < margins.length; r++) {
-            Requirement requirement = own.requirements().get(r);
-            for (int q : batch.assurance().held()) {
-                Requirement other = batch.requirements().get(q);
-                if (other.upper() == requirement.upper()
-                        && batch.recipe().targets().get(other.target()).equals(targets.get(requirement.target()))
-                        && other.grade() == requirement.grade()) {
-                    margins[r] = batch.assurance().margins()[q];
-                }
-            }
-        }
+        double[] margins = margins(own, batch.assurance().margins());
         return own.held(own.assurance().with(margins)).follow(seconds);
     }
 
-    /** A batch held to what this run's targets would be, reading at stated values: for looking at deviations. */
+    /** A batch of a changed recipe held to what this run's targets would be, reading at stated values times what sureness was worth here. */
     Batch holding(Batch other) {
-        double[] margins = batch.assurance().margins();
+        double[] own = batch.assurance().margins();
         for (int r : batch.assurance().held()) {
             double stated = stated(batch.requirements().get(r));
-            margins[r] = stated > 0 ? Math.max(0, value(batch.requirements().get(r))) / stated : 1;
+            own[r] = stated > 0 ? Math.max(0, value(batch.requirements().get(r))) / stated : 1;
         }
-        return other.held(other.assurance().atStatedValues(margins));
+        return other.held(other.assurance().atStatedValues(margins(other, own)));
+    }
+
+    /** Margins of the requirements that both have, 1 for others. */
+    private double[] margins(Batch other, double[] own) {
+        double[] margins = new double[other.requirements().size()];
+        Arrays.fill(margins, 1);
+        for (int r = 0; r < margins.length; r++) {
+            Requirement wanted = other.requirements().get(r);
+            Target target = other.recipe().targets().get(wanted.target());
+            for (int q : batch.assurance().held()) {
+                Requirement known = batch.requirements().get(q);
+                if (known.upper() == wanted.upper()
+                        && known.grade() == wanted.grade()
+                        && batch.recipe().targets().get(known.target()).equals(target)) {
+                    margins[r] = own[q];
+                }
+            }
+        }
+        return margins;
     }
 
     /** Of the ensemble that targets with a confidence are planned on. */
