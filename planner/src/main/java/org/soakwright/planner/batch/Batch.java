@@ -2,11 +2,13 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.conditions.Known;
 import org.soakwright.planner.conditions.Lag;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Target;
 import org.soakwright.recipes.model.Time;
 import org.soakwright.recipes.text.Unsound;
 import org.soakwright.solver.chain.Chain;
@@ -19,16 +21,17 @@ import org.soakwright.solver.chain.StageTooShort;
  * threads at once.
  */
 public final class Batch {
+    private final Recipe written;
+    private final Physics physics;
     private final Recipe recipe;
     private final List<Translation.Slot> slots;
     private final List<Chain> chains;
     private final List<Classes> classes;
     private final int[] lastStage;
     private final int[] firstStage;
-    private final Warming warming;
-    private final Films films;
     private final Cost cost;
     private final List<Requirement> requirements;
+    private final Assurance assurance;
     private long evaluations;
 
     /**
@@ -37,17 +40,7 @@ public final class Batch {
      * @throws Unsound where it asks for something that is not computed yet, or does not tell enough
      */
     public Batch(Recipe recipe) {
-        this(Known.of(recipe).recipe(), StepTimes.nominal(recipe));
-    }
-
-    /**
-     * The same, where the liquor of a step is moved by its own density.
-     *
-     * @param known in the bases that are computed in
-     * @param seconds of the steps, from which that density is found
-     */
-    Batch(Recipe known, double[] seconds) {
-        this(known, Films.of(known, seconds), -1, false);
+        this(recipe, Physics.of(recipe, StepTimes.nominal(recipe), -1, false), Held.AS_ASKED, null);
     }
 
     /**
@@ -56,29 +49,75 @@ public final class Batch {
      * @param endless the grade whose pieces are taken for endless in all but their shortest side; -1 for none
      */
     static Batch sketch(Recipe recipe, int endless) {
-        Recipe known = Known.of(recipe).recipe();
-        return new Batch(known, Films.of(known, StepTimes.nominal(known)), endless, true);
+        Physics physics = Physics.of(recipe, StepTimes.nominal(recipe), endless, true);
+        return new Batch(recipe, physics, Held.AT_STATED_VALUES, null);
     }
 
-    private Batch(Recipe recipe, Films films, int endless, boolean sketch) {
-        this(
-                recipe,
-                films,
-                new Translation(recipe, films)
-                        .chains(endless).stream()
-                                .map(chain -> sketch ? chain.sketch() : chain)
-                                .toList());
+    /**
+     * A sample of what is not known exactly: every value is known, and no confidence asked for. What moves still liquor and what warming is
+     * worth were found at stated values.
+     */
+    Batch sample(Recipe drawn, boolean sketched) {
+        Recipe known = Known.of(drawn).recipe();
+        Physics sampled = Physics.of(known, physics.films().again(known), physics.warming(), -1, sketched);
+        return new Batch(drawn, sampled, Held.TO_NOTHING, null);
     }
 
-    private Batch(Recipe recipe, Films films, List<Chain> chains) {
-        this.recipe = recipe;
-        this.films = films;
-        warming = Warming.of(recipe);
-        this.chains = chains;
+    /** The same with the density that moves a still liquor found from steps of these durations. */
+    Batch resettled(double[] seconds) {
+        return new Batch(written, Physics.of(written, seconds, -1, false), Held.TO_NOTHING, assurance);
+    }
+
+    /** The same with modes of its own, which another thread may ask for. */
+    Batch again() {
+        Physics own = Physics.of(recipe, physics.films(), physics.warming(), -1, false);
+        return new Batch(written, own, Held.TO_NOTHING, assurance);
+    }
+
+    /** The same physics looked at for other targets. */
+    Batch withTargets(List<Target> targets) {
+        Physics own = Physics.of(recipe.withTargets(targets), physics.films(), physics.warming(), -1, false);
+        return new Batch(written.withTargets(targets), own, Held.AS_ASKED, null);
+    }
+
+    /**
+     * What the solver is given.
+     *
+     * @param recipe in the bases that are computed in
+     */
+    private record Physics(Recipe recipe, Films films, Warming warming, List<Chain> chains) {
+        static Physics of(Recipe written, double[] seconds, int endless, boolean sketched) {
+            Recipe known = Known.of(written).recipe();
+            return of(known, Films.of(known, seconds), Warming.of(known), endless, sketched);
+        }
+
+        static Physics of(Recipe known, Films films, Warming warming, int endless, boolean sketched) {
+            List<Chain> chains = new Translation(known, films).chains(endless);
+            List<Chain> used = sketched ? chains.stream().map(Chain::sketch).toList() : chains;
+            return new Physics(known, films, warming, used);
+        }
+
+        Physics with(Recipe other) {
+            return new Physics(other, films, warming, chains);
+        }
+    }
+
+    /** What requirements with a confidence are held to. */
+    private enum Held {
+        AS_ASKED,
+        AT_STATED_VALUES,
+        TO_NOTHING
+    }
+
+    private Batch(Recipe written, Physics physics, Held held, @Nullable Assurance known) {
+        this.written = written;
+        this.physics = physics;
+        recipe = physics.recipe();
+        chains = physics.chains();
         classes = recipe.species().stream()
                 .map(species -> Classes.of(recipe, species))
                 .toList();
-        slots = new Translation(recipe, films).slots();
+        slots = new Translation(recipe, physics.films()).slots();
         lastStage = new int[recipe.steps().size()];
         firstStage = new int[recipe.steps().size()];
         for (int k = slots.size() - 1; k >= 0; k--) {
@@ -93,16 +132,56 @@ public final class Batch {
         }
         cost = new Cost(recipe);
         requirements = Requirements.of(this);
+        assurance = known != null
+                ? known
+                : held == Held.TO_NOTHING
+                        ? Assurance.none(requirements.size())
+                        : Assurance.of(this, held == Held.AT_STATED_VALUES || isDear());
+    }
+
+    /** Whether following once takes milliseconds. */
+    boolean isDear() {
+        return chains.stream().anyMatch(chain -> chain.sketch() != chain);
+    }
+
+    /** What requirements with a confidence are held to. */
+    Assurance assurance() {
+        return assurance;
+    }
+
+    /** The same, held otherwise. */
+    Batch held(Assurance other) {
+        return new Batch(written, physics, Held.TO_NOTHING, other);
+    }
+
+    /** Where a requirement stands among all. */
+    int index(Requirement requirement) {
+        for (int r = 0; r < requirements.size(); r++) {
+            if (requirements.get(r) == requirement) {
+                return r;
+            }
+        }
+        return requirements.indexOf(requirement);
     }
 
     /** The same physics with other times to choose from; what was found of it is shared. */
     Batch retimed(List<Time> times) {
-        List<Step> steps = new ArrayList<>();
+        Physics same = physics.with(recipe.withSteps(timed(recipe.steps(), times)));
+        return new Batch(written.withSteps(timed(written.steps(), times)), same, Held.TO_NOTHING, assurance);
+    }
+
+    private static List<Step> timed(List<Step> steps, List<Time> times) {
+        List<Step> timed = new ArrayList<>();
         for (int i = 0; i < times.size(); i++) {
-            Step step = recipe.steps().get(i);
-            steps.add(step.with(step.head().withTime(times.get(i))));
+            Step step = steps.get(i);
+            timed.add(step.with(step.head().withTime(times.get(i))));
         }
-        return new Batch(recipe.withSteps(steps), films, chains);
+        return timed;
+    }
+
+    /** As it was written; {@link #recipe} has the same in the bases that are computed in. */
+    Recipe written() {
+        return written;
     }
 
     public Recipe recipe() {
@@ -159,16 +238,16 @@ public final class Batch {
     /** How the time of a stage differs for a species. */
     Lag lag(int species, int stage) {
         int step = slots.get(stage).step();
-        return stage == firstStage[step] ? warming.lag(species, step) : Lag.NONE;
+        return stage == firstStage[step] ? physics.warming().lag(species, step) : Lag.NONE;
     }
 
     Films films() {
-        return films;
+        return physics.films();
     }
 
     /** What is said of pieces that come to a step from another temperature. */
     List<String> warming() {
-        return warming.said();
+        return physics.warming().said();
     }
 
     private Unsound tooShort(StageTooShort cause, int species, double[] seconds) {

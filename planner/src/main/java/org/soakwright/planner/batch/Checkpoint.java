@@ -66,7 +66,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
         List<Batch> others = new ArrayList<>();
         for (double factor : FACTORS) {
             // What an advice for a deviation of a fifth needs is good enough in a sketch.
-            others.add(Batch.sketch(withDiffusivity(recipe, watched.get(), factor), -1));
+            others.add(run.holding(Batch.sketch(withDiffusivity(recipe, watched.get(), factor), -1)));
         }
         for (int i = 0; i < recipe.steps().size(); i++) {
             Step step = recipe.steps().get(i);
@@ -100,7 +100,8 @@ public record Checkpoint(int step, double seconds, String species, double expect
         double factor = 1 + share * (explained.factor() - 1);
         Recipe recipe = run.batch().recipe();
         Species watched = recipe.species(species).orElseThrow();
-        Run other = Batch.sketch(withDiffusivity(recipe, watched, factor), -1).follow(run.seconds());
+        Run other = run.holding(Batch.sketch(withDiffusivity(recipe, watched, factor), -1))
+                .follow(run.seconds());
         return other.batch().requirements().stream()
                 .filter(requirement -> !other.meets(requirement))
                 .max(Comparator.comparingDouble(other::miss))

@@ -22,6 +22,10 @@ final class Convexity {
             return false;
         }
         for (Target target : recipe.targets()) {
+            if (recipe.confidence(target).isPresent()) {
+                // A percentile over samples is no sum of exponentials.
+                return false;
+            }
             if (target instanceof Target.OfPieces pieces) {
                 Species species = recipe.species(pieces.species().name()).orElseThrow();
                 boolean mean = pieces.reading() == org.soakwright.recipes.model.Reading.MEAN

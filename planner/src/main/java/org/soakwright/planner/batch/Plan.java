@@ -47,7 +47,11 @@ public record Plan(
      * @param bound no choice takes fewer seconds; empty where that is not proven or time is not what is minimised
      * @param evaluations times the recipe was followed
      */
-    public record Proof(Claim claim, int starts, int agreed, OptionalDouble bound, long evaluations) {}
+    public record Proof(Claim claim, int starts, int agreed, OptionalDouble bound, long evaluations) {
+        Proof after(long allEvaluations) {
+            return new Proof(claim, starts, agreed, bound, allEvaluations);
+        }
+    }
 
     /** Change of a reading, in the target's unit, when a step lasts one hour more and all else is as planned. */
     public record PerHour(String step, String reading, double change, String unit) {}

@@ -29,17 +29,20 @@ final class Remedies {
     private static final int MOST_FILLS_ADDED = 3;
 
     private final Recipe recipe;
+    private final Run miss;
     private final Progress progress;
     private final List<Plan.Remedy> found = new ArrayList<>();
     private double share;
 
-    private Remedies(Recipe recipe, Progress progress) {
-        this.recipe = recipe;
+    private Remedies(Run miss, Progress progress) {
+        this.miss = miss;
+        recipe = miss.batch().recipe();
         this.progress = progress;
     }
 
-    static List<Plan.Remedy> of(Recipe recipe, Progress progress) {
-        Remedies remedies = new Remedies(recipe, progress);
+    /** Of the nearest miss. */
+    static List<Plan.Remedy> of(Run miss, Progress progress) {
+        Remedies remedies = new Remedies(miss, progress);
         List<Runnable> kinds = List.of(
                 remedies::longer,
                 remedies::finer,
@@ -58,7 +61,7 @@ final class Remedies {
     private boolean offer(String kind, Supplier<Recipe> change, Function<Run, String> words, String caution) {
         progress.at("looking for a remedy", share);
         try {
-            Optional<Run> run = Planner.best(new Batch(change.get()));
+            Optional<Run> run = Planner.sure(miss.holding(new Batch(change.get())));
             run.ifPresent(met -> found.add(new Plan.Remedy(kind, words.apply(met), met.totals(), caution)));
             return run.isPresent();
         } catch (Unsound impossible) {

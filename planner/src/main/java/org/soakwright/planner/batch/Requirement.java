@@ -42,6 +42,11 @@ sealed interface Requirement {
         }
     }
 
+    /** The grade read, from 0; -1 where it is the lot, a liquor or a total. */
+    default int grade() {
+        return this instanceof OfContent content ? content.gauge().grade() : -1;
+    }
+
     double KNEE = 0.01;
 
     /** Of the largest content met: what rounding may make of a value that is just the limit. */

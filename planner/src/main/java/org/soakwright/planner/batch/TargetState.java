@@ -35,12 +35,16 @@ public record TargetState(
         boolean met) {
 
     static TargetState of(Run run, Requirement requirement) {
+        return of(run, requirement, run.value(requirement));
+    }
+
+    /** As it would stand if it read so much, in SI, comparable with the limit at stated values. */
+    static TargetState of(Run run, Requirement requirement, double si) {
         Recipe recipe = run.batch().recipe();
         Target target = recipe.targets().get(requirement.target());
         boolean met = run.batch().requirements().stream()
                 .filter(one -> one.target() == requirement.target())
                 .allMatch(run::meets);
-        double si = run.value(requirement);
         String name = name(recipe, requirement);
         if (target instanceof Target.OfTotal total) {
             Quantity limit = total.atMost();
@@ -110,18 +114,28 @@ public record TargetState(
 
     /** {@code salt mean, thick}; {@code salt core after rest, thick}; {@code salt in first water}; {@code total time}. */
     static String name(Recipe recipe, Requirement requirement) {
+        return name(
+                recipe,
+                requirement,
+                recipe.confidence(recipe.targets().get(requirement.target()))
+                        .map(confidence -> " with " + confidence + " confidence")
+                        .orElse(""));
+    }
+
+    /** The same; how surely it is to be met is said with its words. */
+    static String name(Recipe recipe, Requirement requirement, String sure) {
         if (requirement instanceof Requirement.OfTotal total) {
             return "total " + total.goal().name().toLowerCase(java.util.Locale.ROOT);
         }
         Target target = recipe.targets().get(requirement.target());
         if (target instanceof Target.OfLiquor liquor) {
-            return liquor.species().name() + " in " + liquor.step().name();
+            return liquor.species().name() + " in " + liquor.step().name() + sure;
         }
         Target.OfPieces pieces = (Target.OfPieces) target;
         String after = pieces.after() == null ? "" : " after " + pieces.after().name();
         Quantity share = pieces.share();
         String of = share == null ? "" : " in " + share;
-        return pieces.species().name() + " " + pieces.reading().word() + of + after + ", "
+        return pieces.species().name() + " " + pieces.reading().word() + of + after + sure + ", "
                 + gradeName(
                         recipe, ((Requirement.OfContent) requirement).gauge().grade());
     }

@@ -29,6 +29,7 @@ public final class Trace {
     private final double[] depths;
     private final List<Moment> moments;
     private final List<double[]> read;
+    private final List<double[]> durations;
 
     /**
      * One look.
@@ -49,13 +50,14 @@ public final class Trace {
     public record Sight(double liquor, double[][] profiles, double[] means) {}
 
     /** One look with what every requirement on pieces would read there, kg/m3; NaN for others. */
-    private record Look(Moment moment, double[] read) {}
+    private record Look(Moment moment, double[] read, double[] upTo) {}
 
     private Trace(Run run, double[] depths, List<Look> looks) {
         this.run = run;
         this.depths = depths;
         moments = looks.stream().map(Look::moment).toList();
         read = looks.stream().map(Look::read).toList();
+        durations = looks.stream().map(Look::upTo).toList();
     }
 
     public Run run() {
@@ -70,6 +72,11 @@ public final class Trace {
     /** In the order of the clock; a stage's beginning is shown as the profile it began with. */
     public List<Moment> moments() {
         return moments;
+    }
+
+    /** At each moment, how long the stages so far have lasted, s. */
+    List<double[]> durations() {
+        return durations;
     }
 
     /**
@@ -185,6 +192,6 @@ public final class Trace {
                         ? content.gauge().value(courses.get(content.species()), stage)
                         : Double.NaN)
                 .toArray();
-        return new Look(new Moment(step, transfer, clock, List.copyOf(sights)), read);
+        return new Look(new Moment(step, transfer, clock, List.copyOf(sights)), read, upTo.clone());
     }
 }
