@@ -2,6 +2,8 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.soakwright.planner.conditions.Known;
+import org.soakwright.planner.conditions.Lag;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
@@ -22,6 +24,9 @@ public final class Batch {
     private final List<Chain> chains;
     private final List<Classes> classes;
     private final int[] lastStage;
+    private final int[] firstStage;
+    private final Warming warming;
+    private final Films films;
     private final Cost cost;
     private final List<Requirement> requirements;
     private long evaluations;
@@ -29,10 +34,20 @@ public final class Batch {
     /**
      * Prepares a recipe.
      *
-     * @throws Unsound where it asks for something that is not computed yet
+     * @throws Unsound where it asks for something that is not computed yet, or does not tell enough
      */
     public Batch(Recipe recipe) {
-        this(recipe, new Translation(recipe).chains(-1));
+        this(Known.of(recipe).recipe(), StepTimes.nominal(recipe));
+    }
+
+    /**
+     * The same, where the liquor of a step is moved by its own density.
+     *
+     * @param known in the bases that are computed in
+     * @param seconds of the steps, from which that density is found
+     */
+    Batch(Recipe known, double[] seconds) {
+        this(known, Films.of(known, seconds), -1, false);
     }
 
     /**
@@ -41,21 +56,36 @@ public final class Batch {
      * @param endless the grade whose pieces are taken for endless in all but their shortest side; -1 for none
      */
     static Batch sketch(Recipe recipe, int endless) {
-        return new Batch(
-                recipe,
-                new Translation(recipe)
-                        .chains(endless).stream().map(Chain::sketch).toList());
+        Recipe known = Known.of(recipe).recipe();
+        return new Batch(known, Films.of(known, StepTimes.nominal(known)), endless, true);
     }
 
-    private Batch(Recipe recipe, List<Chain> chains) {
-        Warming.of(recipe);
+    private Batch(Recipe recipe, Films films, int endless, boolean sketch) {
+        this(
+                recipe,
+                films,
+                new Translation(recipe, films)
+                        .chains(endless).stream()
+                                .map(chain -> sketch ? chain.sketch() : chain)
+                                .toList());
+    }
+
+    private Batch(Recipe recipe, Films films, List<Chain> chains) {
         this.recipe = recipe;
+        this.films = films;
+        warming = Warming.of(recipe);
         this.chains = chains;
         classes = recipe.species().stream()
                 .map(species -> Classes.of(recipe, species))
                 .toList();
-        slots = new Translation(recipe).slots();
+        slots = new Translation(recipe, films).slots();
         lastStage = new int[recipe.steps().size()];
+        firstStage = new int[recipe.steps().size()];
+        for (int k = slots.size() - 1; k >= 0; k--) {
+            if (slots.get(k).part() > 0) {
+                firstStage[slots.get(k).step()] = k;
+            }
+        }
         for (int k = 0; k < slots.size(); k++) {
             if (slots.get(k).part() > 0) {
                 lastStage[slots.get(k).step()] = k;
@@ -72,7 +102,7 @@ public final class Batch {
             Step step = recipe.steps().get(i);
             steps.add(step.with(step.head().withTime(times.get(i))));
         }
-        return new Batch(recipe.withSteps(steps), chains);
+        return new Batch(recipe.withSteps(steps), films, chains);
     }
 
     public Recipe recipe() {
@@ -102,14 +132,43 @@ public final class Batch {
         }
         List<Course> courses = new ArrayList<>(chains.size());
         for (int s = 0; s < chains.size(); s++) {
+            double[] own = effective(s, seconds);
             try {
-                chains.get(s).require(seconds);
-                courses.add(chains.get(s).follow(seconds));
+                chains.get(s).require(own);
+                courses.add(chains.get(s).follow(own));
             } catch (StageTooShort tooShort) {
                 throw tooShort(tooShort, s, seconds);
             }
         }
         return new Run(this, stepSeconds.clone(), courses);
+    }
+
+    /**
+     * What the stages last for one species, whose diffusivity is that of a step's temperature though the pieces come to it colder or warmer.
+     *
+     * @param seconds of the first stages by the clock
+     */
+    double[] effective(int species, double[] seconds) {
+        double[] own = seconds.clone();
+        for (int k = 0; k < own.length; k++) {
+            own[k] = lag(species, k).effective(seconds[k]);
+        }
+        return own;
+    }
+
+    /** How the time of a stage differs for a species. */
+    Lag lag(int species, int stage) {
+        int step = slots.get(stage).step();
+        return stage == firstStage[step] ? warming.lag(species, step) : Lag.NONE;
+    }
+
+    Films films() {
+        return films;
+    }
+
+    /** What is said of pieces that come to a step from another temperature. */
+    List<String> warming() {
+        return warming.said();
     }
 
     private Unsound tooShort(StageTooShort cause, int species, double[] seconds) {

@@ -179,7 +179,8 @@ public final class Run {
         double[] byStage = content.gauge().gradient(courses.get(content.species()), content.stage());
         for (int k = 0; k < byStage.length; k++) {
             Translation.Slot slot = batch.slots().get(k);
-            gradient[slot.step()] += slope * slot.part() * byStage[k];
+            double rate = batch.lag(content.species(), k).rate(slot.seconds(seconds));
+            gradient[slot.step()] += slope * slot.part() * rate * byStage[k];
         }
         return gradient;
     }

@@ -34,7 +34,7 @@ final class CheckCommand extends RecipeCommand {
         new Batch(recipe).follow(StepTimes.shortest(recipe));
         List<Groups.Group> groups = Groups.of(recipe);
         List<AsInfinite> shapes = AsInfinite.of(recipe);
-        List<String> cautions = Cautions.of(recipe);
+        List<String> cautions = Cautions.of(recipe).shown();
         return new Finding(
                 Exit.DONE,
                 () -> CheckSheet.of(recipe, groups, shapes, cautions, session.style()),

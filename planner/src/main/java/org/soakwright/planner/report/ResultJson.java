@@ -64,7 +64,9 @@ public final class ResultJson {
         });
         totals(json, "totals", run.totals());
         reasons(json);
-        json.strings("cautions", Cautions.of(run));
+        Cautions cautions = Cautions.of(run);
+        json.strings("cautions", cautions.shown());
+        json.strings("stops", cautions.stops());
     }
 
     private static void step(JsonText json, StepEnd end) throws IOException {
