@@ -32,7 +32,11 @@ final class FilmReader {
             return new Film.Negligible();
         }
         if (tree != null && !(tree instanceof Tree.Broken)) {
-            problems.add(tree.place(), "film: found " + tree.label() + "; write negligible, or such as " + WAYS);
+            boolean still = tree instanceof Tree.Leaf leaf && leaf.text().equals("still");
+            problems.add(
+                    tree.place(),
+                    "film: found " + tree.label() + "; write "
+                            + (still ? "{still: true}" : "negligible, or such as " + WAYS));
         }
         return null;
     }
