@@ -84,11 +84,11 @@ public final class Bands {
             }
             for (int r = 0; r < read[i].length; r++) {
                 Requirement own = sample.requirements().get(r);
-                read[i][r] = own instanceof Requirement.OfContent content
-                                && !(content.gauge() instanceof Gauge.OfLiquor)
-                        ? Ensemble.comparable(run.batch().requirements().get(r), own)
-                                * content.gauge().value(courses.get(content.species()), upTo.length - 1)
-                        : Double.NaN;
+                read[i][r] =
+                        own instanceof Requirement.OfContent content && !(content.gauge() instanceof Gauge.OfLiquor)
+                                ? Ensemble.comparable(run.batch().requirements().get(r), own)
+                                        * content.gauge().value(courses.get(content.species()), upTo.length - 1)
+                                : Double.NaN;
             }
         }
         return read;

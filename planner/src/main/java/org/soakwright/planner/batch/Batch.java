@@ -57,8 +57,7 @@ public final class Batch {
     /** A sample of what is not known exactly: every value is known, and no confidence asked for. Warming was judged at stated values. */
     static Batch sample(Recipe drawn, boolean sketched) {
         List<Chain> chains = new Translation(drawn).chains(-1);
-        return new Batch(
-                drawn, sketched ? chains.stream().map(Chain::sketch).toList() : chains, Held.TO_NOTHING, null);
+        return new Batch(drawn, sketched ? chains.stream().map(Chain::sketch).toList() : chains, Held.TO_NOTHING, null);
     }
 
     /** What requirements with a confidence are held to. */

@@ -22,7 +22,7 @@ final class Ensemble {
     private final Recipe recipe;
     private @Nullable List<Batch> members;
     private int refused;
-    private @Nullable Unsound refusal;
+    private String refusal = "";
 
     Ensemble(Recipe recipe) {
         this.recipe = recipe;
@@ -47,7 +47,8 @@ final class Ensemble {
             refusal = Arrays.stream(refusals)
                     .filter(Objects::nonNull)
                     .findFirst()
-                    .orElse(null);
+                    .map(Throwable::getMessage)
+                    .orElse("");
         }
         return members;
     }
@@ -84,8 +85,7 @@ final class Ensemble {
         int wanted = runs.size() + refused;
         double rank = level * wanted - (stated.upper() ? 0 : refused);
         if (!(rank > 0 && rank < runs.size())) {
-            throw Assurance.tooOftenRefused(
-                    recipe, stated, refused, wanted, refusal == null ? "" : refusal.getMessage());
+            throw Assurance.tooOftenRefused(recipe, stated, refused, wanted, refusal);
         }
         double[] values = new double[runs.size()];
         double[] factors = new double[runs.size()];

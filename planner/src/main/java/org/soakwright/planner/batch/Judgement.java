@@ -74,8 +74,8 @@ record Judgement(Outlook outlook, double[] held) {
 
         private void sample(int i, double[] seconds) {
             try {
-                Run own = Batch.sample(uncertainty.drawn(draws.normals(i)), dear)
-                        .follow(seconds);
+                Run own =
+                        Batch.sample(uncertainty.drawn(draws.normals(i)), dear).follow(seconds);
                 for (int r = 0; r < values.length; r++) {
                     Requirement requirement = own.batch().requirements().get(r);
                     double value = own.stated(requirement);
@@ -91,7 +91,8 @@ record Judgement(Outlook outlook, double[] held) {
             int[] followed = IntStream.range(0, refusals.length)
                     .filter(i -> refusals[i] == null)
                     .toArray();
-            @Nullable Shares shares = Shares.possible(draws.dimensions(), followed.length) ? new Shares(draws, followed) : null;
+            @Nullable
+            Shares shares = Shares.possible(draws.dimensions(), followed.length) ? new Shares(draws, followed) : null;
             double[] held = new double[requirements.size()];
             double[] errors = new double[requirements.size()];
             Arrays.fill(held, Double.NaN);
@@ -102,7 +103,8 @@ record Judgement(Outlook outlook, double[] held) {
             }
             Map<List<Object>, List<Integer>> byGrade = new LinkedHashMap<>();
             for (int r = 0; r < requirements.size(); r++) {
-                Optional<String> grade = TargetState.of(run, requirements.get(r)).grade();
+                Optional<String> grade =
+                        TargetState.of(run, requirements.get(r)).grade();
                 byGrade.computeIfAbsent(List.of(requirements.get(r).target(), grade), key -> new ArrayList<>())
                         .add(r);
             }
@@ -120,10 +122,7 @@ record Judgement(Outlook outlook, double[] held) {
             Outlook outlook = new Outlook(
                     chance(IntStream.range(0, requirements.size()).toArray()),
                     refusals.length - followed.length,
-                    Arrays.stream(refusals)
-                            .filter(Objects::nonNull)
-                            .findFirst()
-                            .map(Throwable::getMessage),
+                    Arrays.stream(refusals).filter(Objects::nonNull).findFirst().map(Throwable::getMessage),
                     dear,
                     run.batch().assurance().any() ? run.batch().assurance().samples() : 0,
                     chances,
@@ -183,7 +182,8 @@ record Judgement(Outlook outlook, double[] held) {
             double[] own = Arrays.stream(followed).mapToDouble(i -> read[i]).toArray();
             Target target = run.batch().recipe().targets().get(requirement.target());
             TargetState state = TargetState.of(run, requirement);
-            double unit = TargetState.of(run, requirement, 1).value() - TargetState.of(run, requirement, 0).value();
+            double unit = TargetState.of(run, requirement, 1).value()
+                    - TargetState.of(run, requirement, 0).value();
             boolean holds = run.batch().assurance().holds(nearest);
             return new Outlook.Prospect(
                     target,
@@ -197,13 +197,15 @@ record Judgement(Outlook outlook, double[] held) {
                                     .orElseThrow()
                                     .si())
                             : OptionalDouble.empty(),
-                    own.length == 0 ? List.of() : Outlook.LEVELS.stream()
-                            .map(level -> TargetState.of(
-                                            run,
-                                            requirement,
-                                            Percentile.of(own, 1, level).value())
-                                    .value())
-                            .toList(),
+                    own.length == 0
+                            ? List.of()
+                            : Outlook.LEVELS.stream()
+                                    .map(level -> TargetState.of(
+                                                    run,
+                                                    requirement,
+                                                    Percentile.of(own, 1, level).value())
+                                            .value())
+                                    .toList(),
                     holds && Double.isFinite(errors[nearest])
                             ? OptionalDouble.of(Math.abs(unit) * errors[nearest])
                             : OptionalDouble.empty(),

@@ -65,7 +65,8 @@ public record Outlook(
     /** Of a target in its grade; empty where the state is of another recipe. */
     public Optional<Prospect> of(TargetState state) {
         return prospects.stream()
-                .filter(one -> one.target().equals(state.target()) && one.grade().equals(state.grade()))
+                .filter(one ->
+                        one.target().equals(state.target()) && one.grade().equals(state.grade()))
                 .findFirst();
     }
 

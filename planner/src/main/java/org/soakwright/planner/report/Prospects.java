@@ -26,8 +26,10 @@ final class Prospects {
 
     /** One sentence for the answer; empty where everything is taken as exact or the recipe states no target. */
     static Optional<String> sentence(Run run) {
-        return outlook(run).map(outlook -> (outlook.prospects().size() == 1 ? "Its target is" : "All targets together are")
-                + " met with a chance of " + words(outlook.all()) + ", as far as the recipe says how well its values are known.");
+        return outlook(run)
+                .map(outlook -> (outlook.prospects().size() == 1 ? "Its target is" : "All targets together are")
+                        + " met with a chance of " + words(outlook.all())
+                        + ", as far as the recipe says how well its values are known.");
     }
 
     private static Optional<Outlook> outlook(Run run) {
@@ -58,8 +60,13 @@ final class Prospects {
             table.number(percent(level) + " read");
         }
         for (Outlook.Prospect one : outlook.prospects()) {
-            List<String> cells = new ArrayList<>(List.of(name(one), one.grade().orElse(""), percent(one.chance()),
-                    one.confidence().isPresent() ? Figures.made(100 * one.confidence().getAsDouble()) + " %" : ""));
+            List<String> cells = new ArrayList<>(List.of(
+                    name(one),
+                    one.grade().orElse(""),
+                    percent(one.chance()),
+                    one.confidence().isPresent()
+                            ? Figures.made(100 * one.confidence().getAsDouble()) + " %"
+                            : ""));
             for (int i = 0; i < Outlook.LEVELS.size(); i++) {
                 cells.add(
                         one.percentiles().isEmpty()
@@ -73,9 +80,7 @@ final class Prospects {
 
     private static String name(Outlook.Prospect one) {
         String grade = one.grade().orElse("");
-        return grade.isEmpty()
-                ? one.name()
-                : one.name().substring(0, one.name().length() - grade.length() - 2);
+        return grade.isEmpty() ? one.name() : one.name().substring(0, one.name().length() - grade.length() - 2);
     }
 
     private static List<String> notes(Outlook outlook, boolean planned) {
@@ -85,11 +90,12 @@ final class Prospects {
                 + (values == 1 ? "the one value" : "the " + values + " values") + " with a give-or-take"
                 + (outlook.sketched() ? ", in a sketch good to about 1e-4" : "")
                 + "; the chance of all together is " + words(outlook.all()) + ".");
-        boolean asked = outlook.prospects().stream()
-                .anyMatch(one -> one.confidence().isPresent());
+        boolean asked =
+                outlook.prospects().stream().anyMatch(one -> one.confidence().isPresent());
         if (asked) {
-            notes.add("Of the samples, by part, what they read at most. The value of a target with a confidence is what so much of them reads at most,"
-                    + " or at least.");
+            notes.add(
+                    "Of the samples, by part, what they read at most. The value of a target with a confidence is what so much of them reads at most,"
+                            + " or at least.");
             if (planned) {
                 notes.add("Times were chosen "
                         + (outlook.planned() > 1
@@ -99,8 +105,9 @@ final class Prospects {
             }
         }
         if (outlook.refused() > 0) {
-            notes.add(count(outlook.refused()) + " of the samples could not be followed and count as failing; the first: "
-                    + outlook.refusal().orElse("") + ".");
+            notes.add(
+                    count(outlook.refused()) + " of the samples could not be followed and count as failing; the first: "
+                            + outlook.refusal().orElse("") + ".");
         }
         return notes;
     }

@@ -21,8 +21,7 @@ class InDoubtTest {
 
     /** Held surface, unlimited water, one grade: the mean falls as the diffusivity rises, whatever else. */
     private static Recipe held(String diffusivity, String... targets) {
-        return Recipes.of(
-                """
+        return Recipes.of("""
                 language: 1
                 title: Held
                 product: [other]
@@ -36,10 +35,7 @@ class InDoubtTest {
                 steps:
                   - {soak: first, liquor: {volume: unlimited, salt: 0 g/L}, film: negligible, time: 4 h}
                 targets:\
-                """
-                        .replace("DIFFUSIVITY", diffusivity),
-                String.join("\n", targets),
-                "minimise: time");
+                """.replace("DIFFUSIVITY", diffusivity), String.join("\n", targets), "minimise: time");
     }
 
     private static double sigma(double variation) {
@@ -82,7 +78,9 @@ class InDoubtTest {
         Run run = new Batch(recipe).follow(4 * HOUR).judged(Progress.NONE);
         Outlook outlook = run.outlook().orElseThrow();
         assertEquals(exact, outlook.all().value(), 2e-3);
-        assertTrue(outlook.all().low() <= exact && exact <= outlook.all().high(), outlook.all().toString());
+        assertTrue(
+                outlook.all().low() <= exact && exact <= outlook.all().high(),
+                outlook.all().toString());
         assertTrue(outlook.all().high() - outlook.all().low() < 5e-3);
         assertEquals(outlook.all(), outlook.chances().get(0));
         assertTrue(run.meetsTargets());
@@ -102,7 +100,9 @@ class InDoubtTest {
                 "  - {species: salt, reading: mean, at-least: " + (low + 0.1) + " g/kg, confidence: 90 %}");
         Run run = new Batch(recipe).follow(4 * HOUR).judged(Progress.NONE);
         List<TargetState> states = run.targets();
-        assertEquals(List.of(true, false, true, false), states.stream().map(TargetState::met).toList());
+        assertEquals(
+                List.of(true, false, true, false),
+                states.stream().map(TargetState::met).toList());
         assertEquals(high, states.get(0).value(), 0.05);
         assertEquals(low, states.get(2).value(), 0.05);
         assertEquals("salt mean with 90 % confidence, sheet", states.get(0).name());
@@ -149,8 +149,7 @@ class InDoubtTest {
     }
 
     private static Recipe several(String... targets) {
-        return Recipes.of(
-                """
+        return Recipes.of("""
                 language: 1
                 title: Several
                 product: [other]
@@ -171,9 +170,7 @@ class InDoubtTest {
                   - {soak: second, liquor: {ratio: 2 L/kg, salt: 0 g/L},
                      film: {coefficient: 2e-6 m/s}, time: {from: 1 h, to: 24 h, grain: 5 min, planned: 6 h}}
                 targets:\
-                """,
-                String.join("\n", targets),
-                "minimise: time");
+                """, String.join("\n", targets), "minimise: time");
     }
 
     @Test
@@ -183,9 +180,8 @@ class InDoubtTest {
         for (int threads : new int[] {1, 3}) {
             ForkJoinPool pool = new ForkJoinPool(threads);
             try {
-                runs.add(pool.submit(() -> new Batch(recipe)
-                                .follow(4 * HOUR, 6 * HOUR)
-                                .judged(Progress.NONE))
+                runs.add(pool.submit(() ->
+                                new Batch(recipe).follow(4 * HOUR, 6 * HOUR).judged(Progress.NONE))
                         .get());
             } finally {
                 pool.shutdown();
@@ -213,8 +209,7 @@ class InDoubtTest {
             double sum = shares.stream().mapToDouble(share -> share).sum();
             assertTrue(sum > 0.9 && sum < 1 + 4e-3, "sum of shares " + sum);
         }
-        assertEquals(
-                plain.stream().mapToDouble(share -> share).max().orElseThrow(), plain.get(diffusivity));
+        assertEquals(plain.stream().mapToDouble(share -> share).max().orElseThrow(), plain.get(diffusivity));
     }
 
     /** Two independent readings of one uncertainty pass together as often as the harder one does. */
@@ -245,9 +240,7 @@ class InDoubtTest {
                 steps:
                   - {soak: first, liquor: {volume: unlimited, sugar: 0 g/L}, film: negligible, time: 4 h}
                 targets:\
-                """,
-                "  - {species: sugar, reading: mean, at-most: " + limit + " %" + more + "}",
-                "minimise: time");
+                """, "  - {species: sugar, reading: mean, at-most: " + limit + " %" + more + "}", "minimise: time");
     }
 
     @Test
@@ -256,7 +249,9 @@ class InDoubtTest {
         Outlook outlook = outlook(refusing(99, ""));
         assertEquals(above, outlook.refused() / 10_240.0, 2e-3);
         assertEquals(1 - outlook.refused() / 10_240.0, outlook.all().value(), 1e-12);
-        assertTrue(outlook.refusal().orElseThrow().contains("100 %"), outlook.refusal().toString());
+        assertTrue(
+                outlook.refusal().orElseThrow().contains("100 %"),
+                outlook.refusal().toString());
         Unsound refused = assertThrows(Unsound.class, () -> outlook(refusing(99, ", confidence: 99 %")));
         assertTrue(refused.getMessage().contains("cannot be reached, because " + outlook.refused() + " of 10240"));
     }
@@ -279,10 +274,7 @@ class InDoubtTest {
         for (int i = 0; i < seconds.length; i++) {
             double[] shorter = seconds.clone();
             shorter[i] -= 300;
-            assertFalse(new Batch(sure)
-                    .follow(shorter)
-                    .judged(Progress.NONE)
-                    .meetsTargets());
+            assertFalse(new Batch(sure).follow(shorter).judged(Progress.NONE).meetsTargets());
         }
     }
 

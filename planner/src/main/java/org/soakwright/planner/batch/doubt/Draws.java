@@ -17,6 +17,7 @@ public final class Draws {
     private static final int BITS = 52;
     /** Digits beyond these no two points of a round share the digits before: all are turned at once. */
     private static final int NESTED = 20;
+
     private static final double SCALE = 0x1p52;
     private static final NormalDistribution NORMAL = new NormalDistribution(null, 0, 1);
 

@@ -12,7 +12,6 @@ import org.soakwright.planner.batch.PullWindow;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
 import org.soakwright.planner.report.Figures;
-import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Target;
 
 /**

@@ -49,6 +49,7 @@ class ChanceTest {
         }
         // Binomial of 60 at 0.95: 51 or fewer happen once in two hundred.
         assertTrue(held >= 52, "held " + held + " of " + tries);
-        assertTrue(width < 0.7 * 2 * 1.96 * Math.sqrt(0.21 / 2560), "much narrower than of independent samples: " + width);
+        assertTrue(
+                width < 0.7 * 2 * 1.96 * Math.sqrt(0.21 / 2560), "much narrower than of independent samples: " + width);
     }
 }
