@@ -21,7 +21,7 @@ final class Ensemble {
     private final Batch stated;
     private @Nullable List<Batch> members;
     private int refused;
-    private @Nullable Unsound refusal;
+    private String refusal = "";
 
     Ensemble(Batch stated) {
         this.stated = stated;
@@ -43,8 +43,11 @@ final class Ensemble {
             });
             members = Arrays.stream(drawn).filter(Objects::nonNull).toList();
             refused = draws.size() - members.size();
-            refusal =
-                    Arrays.stream(refusals).filter(Objects::nonNull).findFirst().orElse(null);
+            refusal = Arrays.stream(refusals)
+                    .filter(Objects::nonNull)
+                    .findFirst()
+                    .map(Throwable::getMessage)
+                    .orElse("");
         }
         return members;
     }
@@ -81,12 +84,7 @@ final class Ensemble {
         int wanted = runs.size() + refused;
         double rank = level * wanted - (stated.upper() ? 0 : refused);
         if (!(rank > 0 && rank < runs.size())) {
-            throw Assurance.tooOftenRefused(
-                    this.stated.recipe(),
-                    stated,
-                    refused,
-                    wanted,
-                    refusal == null ? "" : String.valueOf(refusal.getMessage()));
+            throw Assurance.tooOftenRefused(this.stated.recipe(), stated, refused, wanted, refusal);
         }
         double[] values = new double[runs.size()];
         double[] factors = new double[runs.size()];
