@@ -97,8 +97,10 @@ class SolidsAgreeTest {
         worst.forEach((what, difference) -> line.append(String.format(Locale.ROOT, " %s %.1e", what, difference)));
         System.out.println("elements against the solver, " + shapes + ": " + all.size() + " readings, worst" + line);
         assertEquals(8, worst.size());
-        // A few bricks ask for more unknowns than they are given; what they are off by they state, which is another test's.
-        List<Difference> promised = all.stream().filter(d -> d.stated < AGREEMENT).toList();
+        // A few bricks ask for more unknowns than they are given; what they are off by they state, which is another
+        // test's.
+        List<Difference> promised =
+                all.stream().filter(d -> d.stated < AGREEMENT).toList();
         assertTrue(promised.size() > 0.98 * all.size(), promised.size() + " of " + all.size() + " promise as much");
         List<Difference> apart =
                 promised.stream().filter(d -> !(d.off < AGREEMENT)).toList();
