@@ -28,6 +28,9 @@ public record Mesh(double[] ends, int degree) {
     /** So thin a layer that nothing is refined further: Fo 1e-12. */
     private static final double THINNEST = 1e-6;
 
+    /** A corner so close to the middle between two faces takes its place as an end. */
+    private static final double NARROW = 0.1;
+
     public Mesh {
         ends = ends.clone();
         if (ends.length < 2 || ends[0] != 0 || ends[ends.length - 1] != 1 || degree < 2) {
@@ -70,8 +73,8 @@ public record Mesh(double[] ends, int degree) {
             from.add(corner);
         }
         TreeSet<Double> ends = new TreeSet<>(from);
-        ends.add(0.5);
         double depth = Math.max(THINNEST, LAYERS * Math.sqrt(fourier));
+        addBetween(ends, 0.5, Math.min(NARROW, depth));
         for (double end : from) {
             for (double away = depth; away < 0.5 * (1 - REST); away /= GROWTH) {
                 addBetween(ends, end - away, depth);
