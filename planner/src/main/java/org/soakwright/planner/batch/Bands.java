@@ -76,19 +76,18 @@ public final class Bands {
             List<Course> courses = new ArrayList<>();
             try {
                 for (int s = 0; s < sample.recipe().species().size(); s++) {
-                    courses.add(sample.chain(s).follow(upTo));
+                    courses.add(sample.chain(s).follow(sample.effective(s, upTo)));
                 }
             } catch (StageTooShort early) {
                 Arrays.fill(read[i], Double.NaN);
                 continue;
             }
+            State state = new State(sample, courses, upTo, run.totals().seconds(), upTo.length - 1, false);
             for (int r = 0; r < read[i].length; r++) {
                 Requirement own = sample.requirements().get(r);
-                read[i][r] =
-                        own instanceof Requirement.OfContent content && !(content.gauge() instanceof Gauge.OfLiquor)
-                                ? Ensemble.comparable(run.batch().requirements().get(r), own)
-                                        * content.gauge().value(courses.get(content.species()), upTo.length - 1)
-                                : Double.NaN;
+                read[i][r] = own.ofPieces()
+                        ? Ensemble.comparable(run.batch().requirements().get(r), own) * Batch.read(own, state)
+                        : Double.NaN;
             }
         }
         return read;
@@ -119,12 +118,12 @@ public final class Bands {
         List<Requirement> requirements = run.batch().requirements();
         for (int r = 0; r < requirements.size(); r++) {
             TargetState own = TargetState.of(run, requirements.get(r));
-            if (requirements.get(r) instanceof Requirement.OfContent content
-                    && !(content.gauge() instanceof Gauge.OfLiquor)
+            Requirement requirement = requirements.get(r);
+            if (requirement.ofPieces()
                     && own.target().equals(state.target())
                     && own.grade().equals(state.grade())
                     && own.value() == state.value()) {
-                return new Band(inUnit(content, low.get(r)), inUnit(content, high.get(r)));
+                return new Band(inUnit(requirement, low.get(r)), inUnit(requirement, high.get(r)));
             }
         }
         throw new IllegalArgumentException("no target on pieces of this run: " + state.name());

@@ -245,6 +245,25 @@ public final class Batch {
         return physics.films();
     }
 
+    /** Derivatives by the durations of stages, as derivatives by those of the steps that the stages belong to. */
+    double[] byStep(int species, double[] byStage, double[] stageSeconds) {
+        double[] byStep = new double[recipe.steps().size()];
+        for (int k = 0; k < byStage.length; k++) {
+            Translation.Slot slot = slots.get(k);
+            byStep[slot.step()] += slot.part() * lag(species, k).rate(stageSeconds[k]) * byStage[k];
+        }
+        return byStep;
+    }
+
+    /** What a requirement reads off a state of this batch at stated values, in SI; totals are none. */
+    static double read(Requirement requirement, State state) {
+        if (requirement instanceof Requirement.OfState ofState) {
+            return ofState.measure().read(state).value();
+        }
+        Requirement.OfContent content = (Requirement.OfContent) requirement;
+        return content.gauge().value(state.courses().get(content.species()), state.stage());
+    }
+
     /** What is said of pieces that come to a step from another temperature. */
     List<String> warming() {
         return physics.warming().said();

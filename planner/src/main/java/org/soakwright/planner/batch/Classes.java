@@ -70,14 +70,14 @@ final class Classes {
         int ofStart = put(variations, start, true);
         Population population = new Population(lot.size(), grade.share(), variations);
         populations.add(population);
-        List<Side> sides = Translation.sides(grade);
+        List<Side> sides = Translation.sides(grade, species);
         double volume = recipe.lot().volumeM3() * grade.share();
         for (int i = 0; i < population.count(); i++) {
             double larger = factor(population, i, ofSize);
             List<Side> scaled = sides.stream().map(side -> side.scaled(larger)).toList();
             lot.add(new org.soakwright.solver.shape.Grade(
                     scaled, population.weight(i) * volume, factor(population, i, ofEase)));
-            starts.add(Translation.start(recipe, species, factor(population, i, ofStart)));
+            starts.add(Translation.start(recipe, species, grade, factor(population, i, ofStart)));
         }
     }
 

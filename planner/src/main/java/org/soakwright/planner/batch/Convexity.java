@@ -1,5 +1,6 @@
 package org.soakwright.planner.batch;
 
+import org.soakwright.recipes.model.Counted;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Recipe;
@@ -30,6 +31,7 @@ final class Convexity {
                 Species species = recipe.species(pieces.species().name()).orElseThrow();
                 boolean mean = pieces.reading() == org.soakwright.recipes.model.Reading.MEAN
                         && pieces.limits().atLeast() == null
+                        && pieces.counted().equals(Counted.AS_LOADED)
                         // A share's percentile belongs to other pieces as durations change: no sum of exponentials.
                         && pieces.share() == null;
                 if (!mean

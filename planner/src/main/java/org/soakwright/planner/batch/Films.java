@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.conditions.Currents;
+import org.soakwright.recipes.model.Faces;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Medium;
@@ -94,16 +95,27 @@ final class Films {
     /** The surface of a grade's pieces for a species in a step that it exchanges in. */
     Surface surface(int step, Species species, int grade) {
         double film = coefficient(step, species, grade);
+        Surface bare = Double.isInfinite(film) ? new Surface.Open() : new Surface.Film(film);
         Grade pieces = recipe.lot().grades().get(grade);
         Optional<Skin> skin = species.traits().skin(pieces.name());
         if (skin.isEmpty()) {
-            return Double.isInfinite(film) ? new Surface.Open() : new Surface.Film(film);
+            return bare;
         }
         double permeance = skin.get().permeance().si();
         // In air both count contents of the piece.
         boolean air = recipe.steps().get(step) instanceof Step.Dry;
-        double partition = air ? species.partition().value() : 1;
-        return Surface.inSeries(film, permeance / partition);
+        Surface covered =
+                Surface.inSeries(film, permeance / (air ? species.partition().value() : 1));
+        return twoFaced(species, pieces) ? new Surface.Faces(covered, bare) : covered;
+    }
+
+    /** Whether a skin covers one of the two wetted faces of a grade's pieces, so that they are not alike. */
+    static boolean twoFaced(Species species, Grade grade) {
+        return grade.sides().get(0).faces() == Faces.BOTH
+                && species.traits()
+                        .skin(grade.name())
+                        .filter(skin -> skin.face() == Faces.ONE)
+                        .isPresent();
     }
 
     /** m/s; infinite where there is no film. */

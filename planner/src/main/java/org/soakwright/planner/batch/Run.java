@@ -258,8 +258,7 @@ public final class Run {
         if (requirement instanceof Requirement.OfTotal total) {
             return batch.cost().of(total.goal(), seconds);
         }
-        Requirement.OfContent content = (Requirement.OfContent) requirement;
-        return content.gauge().value(courses.get(content.species()), content.stage());
+        return Batch.read(requirement, state(requirement, false));
     }
 
     double miss(Requirement requirement) {
@@ -288,13 +287,27 @@ public final class Run {
             }
             return gradient;
         }
-        Requirement.OfContent content = (Requirement.OfContent) requirement;
-        double[] byStage = content.gauge().gradient(courses.get(content.species()), content.stage());
-        for (int k = 0; k < byStage.length; k++) {
-            Translation.Slot slot = batch.slots().get(k);
-            double rate = batch.lag(content.species(), k).rate(slot.seconds(seconds));
-            gradient[slot.step()] += slot.part() * rate * byStage[k];
+        if (requirement instanceof Requirement.OfState ofState) {
+            return ofState.measure().read(state(requirement, true)).slopes();
         }
-        return gradient;
+        Requirement.OfContent content = (Requirement.OfContent) requirement;
+        return batch.byStep(
+                content.species(),
+                content.gauge().gradient(courses.get(content.species()), content.stage()),
+                stageSeconds());
+    }
+
+    private State state(Requirement requirement, boolean sloping) {
+        return state(requirement.stage(), sloping);
+    }
+
+    /** This run at the end of a stage. */
+    State state(int stage, boolean sloping) {
+        double[] all = stageSeconds();
+        return new State(batch, courses, all, java.util.Arrays.stream(all).sum(), stage, sloping);
+    }
+
+    private double[] stageSeconds() {
+        return batch.slots().stream().mapToDouble(slot -> slot.seconds(seconds)).toArray();
     }
 }

@@ -88,11 +88,15 @@ public final class Trace {
         List<Requirement> requirements = run.batch().requirements();
         for (int r = 0; r < requirements.size(); r++) {
             // Of a band the side is meant that the state tells of.
-            if (requirements.get(r) instanceof Requirement.OfContent content
-                    && run.batch().recipe().targets().get(content.target()).equals(state.target())
-                    && TargetState.of(run, content).grade().equals(state.grade())
-                    && TargetState.of(run, content).value() == state.value()) {
-                double si = run.value(content);
+            if (requirements.get(r).ofPieces()
+                    && run.batch()
+                            .recipe()
+                            .targets()
+                            .get(requirements.get(r).target())
+                            .equals(state.target())
+                    && TargetState.of(run, requirements.get(r)).grade().equals(state.grade())
+                    && TargetState.of(run, requirements.get(r)).value() == state.value()) {
+                double si = run.value(requirements.get(r));
                 // Values are proportional to kg/m3: what the target shows over what it read.
                 double unit = si == 0 ? 1 : state.value() / si;
                 int index = r;
@@ -116,6 +120,7 @@ public final class Trace {
         double[] seconds = run.seconds();
         List<Look> looks = new ArrayList<>();
         double clock = 0;
+        double all = run.totals().seconds();
         double[] done = new double[0];
         for (int k = 0; k < batch.slots().size(); k++) {
             Translation.Slot slot = batch.slots().get(k);
@@ -130,7 +135,7 @@ public final class Trace {
             for (int i = 1; i <= count; i++) {
                 // Squares: the profile moves with the root of time.
                 upTo[k] = whole * i * i / ((double) count * count);
-                look(batch, slot.step(), transfer, clock + upTo[k], upTo, depths)
+                look(batch, slot.step(), transfer, clock + upTo[k], all, upTo, depths)
                         .ifPresent(looks::add);
             }
             done = upTo;
@@ -149,15 +154,16 @@ public final class Trace {
 
     /** Empty so early in a stage that the profile would need more modes than are kept: the next look will do. */
     private static Optional<Look> look(
-            Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
+            Batch batch, int step, boolean transfer, double clock, double whole, double[] upTo, double[] depths) {
         try {
-            return Optional.of(see(batch, step, transfer, clock, upTo, depths));
+            return Optional.of(see(batch, step, transfer, clock, whole, upTo, depths));
         } catch (StageTooShort early) {
             return Optional.empty();
         }
     }
 
-    private static Look see(Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
+    private static Look see(
+            Batch batch, int step, boolean transfer, double clock, double whole, double[] upTo, double[] depths) {
         Recipe recipe = batch.recipe();
         int stage = upTo.length - 1;
         List<Sight> sights = new ArrayList<>();
@@ -186,11 +192,9 @@ public final class Trace {
             boolean wet = batch.stage(s, stage).wets();
             sights.add(new Sight(wet ? course.value(new Probe.Liquor(), stage) : Double.NaN, profiles, means));
         }
+        State state = new State(batch, courses, upTo, whole, stage, false);
         double[] read = batch.requirements().stream()
-                .mapToDouble(requirement -> requirement instanceof Requirement.OfContent content
-                                && !(content.gauge() instanceof Gauge.OfLiquor)
-                        ? content.gauge().value(courses.get(content.species()), stage)
-                        : Double.NaN)
+                .mapToDouble(requirement -> requirement.ofPieces() ? Batch.read(requirement, state) : Double.NaN)
                 .toArray();
         return new Look(new Moment(step, transfer, clock, List.copyOf(sights)), read, upTo.clone());
     }

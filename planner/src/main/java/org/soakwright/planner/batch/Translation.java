@@ -1,7 +1,6 @@
 package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
-import java.util.Collections;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
@@ -38,7 +37,6 @@ final class Translation {
     private final Films films;
 
     Translation(Recipe recipe, Films films) {
-        NotYet.require(recipe);
         this.recipe = recipe;
         this.films = films;
     }
@@ -72,14 +70,29 @@ final class Translation {
         return recipe.between() == null ? 0 : recipe.between().si();
     }
 
-    /** Each grade's pieces as the recipe states them, before any spread. */
+    /** Each grade's pieces as the recipe states them, before any spread and without skins. */
     List<org.soakwright.solver.shape.Grade> lot() {
-        double volume = recipe.lot().volumeM3();
         return recipe.lot().grades().stream()
-                .map(grade -> new org.soakwright.solver.shape.Grade(sides(grade), grade.share() * volume, 1))
+                .map(grade -> pieces(grade, sides(grade)))
                 .toList();
     }
 
+    private org.soakwright.solver.shape.Grade pieces(Grade grade, List<Side> sides) {
+        return new org.soakwright.solver.shape.Grade(
+                sides, grade.share() * recipe.lot().volumeM3(), 1);
+    }
+
+    /** As one species finds them: where a skin covers one of two faces, the first side lies between both. */
+    static List<Side> sides(Grade grade, Species species) {
+        List<Side> sides = new ArrayList<>(sides(grade));
+        if (Films.twoFaced(species, grade)) {
+            Side half = sides.get(0);
+            sides.set(0, Side.betweenFaces(2 * half.length(), half.direction()));
+        }
+        return sides;
+    }
+
+    /** From the core of each to its surface. */
     static List<Side> sides(Grade grade) {
         List<Side> sides = new ArrayList<>();
         for (org.soakwright.recipes.model.Side side : grade.sides()) {
@@ -127,26 +140,39 @@ final class Translation {
                 passing);
     }
 
-    /** As loaded, a uniform content times a factor. */
-    static Start start(Recipe recipe, Species species, double factor) {
+    /** As loaded, a uniform content times a factor. A profile from the middle goes both ways where the faces differ. */
+    static Start start(Recipe recipe, Species species, Grade grade, double factor) {
         if (species.start() instanceof org.soakwright.recipes.model.Start.Uniform uniform) {
             return new Start.Uniform(factor * recipe.lot().kgPerM3(uniform.content()));
         }
-        return new Start.Polyline(((org.soakwright.recipes.model.Start.Profile) species.start())
+        List<Start.Point> points = ((org.soakwright.recipes.model.Start.Profile) species.start())
                 .points().stream()
                         .map(point ->
                                 new Start.Point(point.position(), recipe.lot().kgPerM3(point.content())))
-                        .toList());
+                        .toList();
+        if (!Films.twoFaced(species, grade)) {
+            return new Start.Polyline(points);
+        }
+        List<Start.Point> through = new ArrayList<>();
+        for (int i = points.size() - 1; i > 0; i--) {
+            through.add(new Start.Point(
+                    (1 - points.get(i).position()) / 2, points.get(i).content()));
+        }
+        points.forEach(point -> through.add(new Start.Point((1 + point.position()) / 2, point.content())));
+        return new Start.Polyline(through);
     }
 
     /** The first steps of a species alone, its grades as the recipe states them. */
     Chain plain(Species species, int lastStep) {
-        List<Population> grades = new ArrayList<>();
+        List<Population> populations = new ArrayList<>();
+        List<org.soakwright.solver.shape.Grade> lot = new ArrayList<>();
+        List<Start> starts = new ArrayList<>();
         for (Grade grade : recipe.lot().grades()) {
-            grades.add(new Population(grades.size(), grade.share(), List.of()));
+            populations.add(new Population(populations.size(), grade.share(), List.of()));
+            lot.add(pieces(grade, sides(grade, species)));
+            starts.add(start(recipe, species, grade, 1));
         }
-        List<Start> starts = Collections.nCopies(grades.size(), start(recipe, species, 1));
-        return Chain.of(lot(), starts, stages(species, grades, lastStep), Set.of())
+        return Chain.of(lot, starts, stages(species, populations, lastStep), Set.of())
                 .sketch();
     }
 
