@@ -37,7 +37,9 @@ final class Assurance {
      *
      * @param dear whether following is so dear that no ensemble is
      */
-    static Assurance of(Recipe recipe, List<Requirement> requirements, boolean dear) {
+    static Assurance of(Batch batch, boolean dear) {
+        Recipe recipe = batch.written();
+        List<Requirement> requirements = batch.requirements();
         Assurance none = none(requirements.size());
         if (recipe.uncertain().isEmpty()) {
             return none;
@@ -47,7 +49,7 @@ final class Assurance {
             levels[r] = level(recipe, requirements.get(r));
         }
         boolean any = Arrays.stream(levels).anyMatch(level -> !Double.isNaN(level));
-        return new Assurance(levels, none.margins, any && !dear ? new Ensemble(recipe) : null);
+        return new Assurance(levels, none.margins, any && !dear ? new Ensemble(batch) : null);
     }
 
     /** Of a band each side may be missed by half of the rest. */
@@ -80,6 +82,11 @@ final class Assurance {
     /** The same held to other margins, by requirement. */
     Assurance with(double[] others) {
         return new Assurance(levels, others.clone(), ensemble);
+    }
+
+    /** The same with an ensemble of its own, which another thread may follow. */
+    Assurance again(Batch stated) {
+        return new Assurance(levels, margins, ensemble == null ? null : new Ensemble(stated));
     }
 
     /** The same, reading at stated values. */

@@ -42,7 +42,7 @@ public final class Bands {
     /** Empty where every value is known. Samples that cannot be followed are left out; {@link Outlook#refused} counts them. */
     public static Optional<Bands> of(Trace trace) {
         Run run = trace.run();
-        Uncertainty uncertainty = Uncertainty.of(run.batch().recipe());
+        Uncertainty uncertainty = Uncertainty.of(run.batch().written());
         if (uncertainty.isEmpty()) {
             return Optional.empty();
         }
@@ -53,7 +53,7 @@ public final class Bands {
         double[][][] read = new double[draws.size()][][];
         IntStream.range(0, draws.size()).parallel().forEach(i -> {
             try {
-                read[i] = read(run, Batch.sample(uncertainty.drawn(draws.normals(i)), dear), looks);
+                read[i] = read(run, run.batch().sample(uncertainty.drawn(draws.normals(i)), dear), looks);
             } catch (Unsound impossible) {
                 read[i] = new double[0][];
             }

@@ -145,7 +145,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
             upTo[k] = batch.slots().get(k).seconds(stepSeconds);
         }
         upTo[stage] = seconds - fill * each;
-        return batch.chain(s).follow(upTo).value(new Probe.Liquor(), stage);
+        return batch.chain(s).follow(batch.effective(s, upTo)).value(new Probe.Liquor(), stage);
     }
 
     private static Deviation deviation(Run run, Batch other, int step, double seconds, double reading, double factor) {

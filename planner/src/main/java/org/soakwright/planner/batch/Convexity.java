@@ -57,6 +57,11 @@ final class Convexity {
     }
 
     private static boolean oneBiot(Recipe recipe, Species species) {
+        boolean skins =
+                species.traits().skin() != null || !species.traits().skins().isEmpty();
+        if (skins || recipe.steps().stream().anyMatch(step -> ((Step.Wet) step).film() instanceof Film.Computed)) {
+            return false;
+        }
         double[] ratios = recipe.steps().stream()
                 .mapToDouble(step -> ((Step.Wet) step).film() instanceof Film.Coefficient film
                         ? film.value().si()

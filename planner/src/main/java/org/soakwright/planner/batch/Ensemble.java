@@ -8,7 +8,6 @@ import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.batch.doubt.Draws;
 import org.soakwright.planner.batch.doubt.SmoothPercentile;
-import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.text.Unsound;
 
 /**
@@ -19,25 +18,25 @@ final class Ensemble {
     /** Enough for a percentile good to about 1 % of its distance from the median; what remains is put right by a margin. */
     static final int SAMPLES = 256;
 
-    private final Recipe recipe;
+    private final Batch stated;
     private @Nullable List<Batch> members;
     private int refused;
     private String refusal = "";
 
-    Ensemble(Recipe recipe) {
-        this.recipe = recipe;
+    Ensemble(Batch stated) {
+        this.stated = stated;
     }
 
     /** Those that are recipes. */
     private List<Batch> members() {
         if (members == null) {
-            Uncertainty uncertainty = Uncertainty.of(recipe);
+            Uncertainty uncertainty = Uncertainty.of(stated.written());
             Draws draws = new Draws(uncertainty.size(), 1, SAMPLES);
             Batch[] drawn = new Batch[draws.size()];
             Unsound[] refusals = new Unsound[draws.size()];
             IntStream.range(0, drawn.length).parallel().forEach(i -> {
                 try {
-                    drawn[i] = Batch.sample(uncertainty.drawn(draws.normals(i)), false);
+                    drawn[i] = stated.sample(uncertainty.drawn(draws.normals(i)), false);
                 } catch (Unsound impossible) {
                     refusals[i] = impossible;
                 }
@@ -85,7 +84,7 @@ final class Ensemble {
         int wanted = runs.size() + refused;
         double rank = level * wanted - (stated.upper() ? 0 : refused);
         if (!(rank > 0 && rank < runs.size())) {
-            throw Assurance.tooOftenRefused(recipe, stated, refused, wanted, refusal);
+            throw Assurance.tooOftenRefused(this.stated.recipe(), stated, refused, wanted, refusal);
         }
         double[] values = new double[runs.size()];
         double[] factors = new double[runs.size()];

@@ -133,7 +133,7 @@ sealed interface Gauge {
     static Probe probe(Reading reading, int index) {
         return switch (reading) {
             case MEAN -> new Probe.Mean(index);
-            case CORE -> new Probe.At(index, 0);
+            case CORE -> new Probe.Core(index);
             case SURFACE -> new Probe.Surface(index);
             case HIGHEST -> new Probe.Highest(index);
             case LOWEST -> new Probe.Lowest(index);

@@ -105,13 +105,13 @@ record Judgement(Outlook outlook, double[] held) {
         private Run follow(Recipe drawn, double[] seconds) {
             if (dear) {
                 try {
-                    return Batch.sample(drawn, true).follow(seconds);
+                    return run.batch().sample(drawn, true).follow(seconds);
                 } catch (Unsound blurred) {
                     // Too short for a sketch is not yet too short.
-                    return Batch.sample(drawn, false).follow(seconds);
+                    return run.batch().sample(drawn, false).follow(seconds);
                 }
             }
-            return Batch.sample(drawn, false).follow(seconds);
+            return run.batch().sample(drawn, false).follow(seconds);
         }
 
         Judgement judged() {

@@ -24,6 +24,11 @@ public record Plan(
         Optional<NearestMiss> nearestMiss,
         List<Remedy> remedies) {
 
+    /** Cautions that forbid to use the plan until somebody answers for it; empty for a plan that may be used. */
+    public List<String> stops() {
+        return Cautions.of(run).stops();
+    }
+
     /** How far a claim of optimality reaches. */
     public enum Claim {
         /** No choice on the grid is better: shown by bounds that hold for the whole range. */

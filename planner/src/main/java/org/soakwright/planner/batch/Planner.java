@@ -23,6 +23,9 @@ public final class Planner {
 
     private static final int MOST_NUDGES = 400;
 
+    /** Choices made again for films that belong to other durations. */
+    private static final int MOST_ROUNDS = 5;
+
     private final Batch batch;
     private final Grid grid;
     private final Merit merit;
@@ -46,7 +49,7 @@ public final class Planner {
      * @throws org.soakwright.recipes.text.Unsound when a step is too short to be computed
      */
     public static Plan plan(Recipe recipe, Progress progress) {
-        Chosen chosen = Chosen.of(new Batch(recipe), progress);
+        Chosen chosen = settled(new Batch(recipe), progress);
         Run run = chosen.run();
         Explanation explanation = new Explanation(run.batch(), new Grid(recipe), run);
         List<String> binds = chosen.met() ? explanation.binding() : explanation.missed();
@@ -58,6 +61,24 @@ public final class Planner {
                 explanation.perHour(binds),
                 chosen.met() ? Optional.empty() : explanation.nearestMiss(),
                 chosen.met() ? List.of() : Remedies.of(run, progress));
+    }
+
+    /**
+     * Where the liquor is moved by its own density, its film belongs to steps of certain durations: chosen again until the durations are
+     * those the film belongs to, or the next would be within a grain.
+     */
+    private static Chosen settled(Batch batch, Progress progress) {
+        Chosen chosen = Chosen.of(batch, progress);
+        for (int round = 0; round < MOST_ROUNDS && batch.films().anyDriven(); round++) {
+            double[] seconds = chosen.run().seconds();
+            Chosen next = Chosen.of(batch.resettled(seconds), progress);
+            boolean rests = Arrays.equals(next.run().seconds(), seconds);
+            chosen = next;
+            if (rests) {
+                break;
+            }
+        }
+        return chosen;
     }
 
     /** Only the choice, without explanations or judgement; empty where no choice meets the targets. */

@@ -183,7 +183,7 @@ public final class Run {
      * @throws org.soakwright.recipes.text.Unsound where so many samples cannot be followed that a confidence cannot be reached
      */
     public Run judged(Progress progress) {
-        Uncertainty uncertainty = Uncertainty.of(batch.recipe());
+        Uncertainty uncertainty = Uncertainty.of(batch.written());
         if (uncertainty.isEmpty()) {
             return this;
         }
@@ -198,14 +198,14 @@ public final class Run {
 
     /** The same, judged the same, with a batch of its own, which another thread may follow. */
     public Run again() {
-        Batch own = new Batch(batch.recipe());
+        Batch own = batch.again();
         Run run = own.follow(seconds);
         return new Run(own.held(own.assurance().with(batch.assurance().margins())), seconds, run.courses, judgement);
     }
 
     /** The same run looked at for other targets of the recipe, of which those kept are held to what they were; not judged. */
     public Run withTargets(List<Target> targets) {
-        Batch own = new Batch(batch.recipe().withTargets(targets));
+        Batch own = batch.withTargets(targets);
         double[] margins = margins(own, batch.assurance().margins());
         return own.held(own.assurance().with(margins)).follow(seconds);
     }
@@ -313,7 +313,8 @@ public final class Run {
         double[] byStage = content.gauge().gradient(courses.get(content.species()), content.stage());
         for (int k = 0; k < byStage.length; k++) {
             Translation.Slot slot = batch.slots().get(k);
-            gradient[slot.step()] += slot.part() * byStage[k];
+            double rate = batch.lag(content.species(), k).rate(slot.seconds(seconds));
+            gradient[slot.step()] += slot.part() * rate * byStage[k];
         }
         return gradient;
     }

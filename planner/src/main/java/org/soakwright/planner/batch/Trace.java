@@ -165,8 +165,9 @@ public final class Trace {
         for (int s = 0; s < recipe.species().size(); s++) {
             Chain sketch = batch.chain(s).sketch();
             // So early a look that even a sketch would be blurred is left out.
-            sketch.require(upTo);
-            Course course = sketch.follow(upTo);
+            double[] own = batch.effective(s, upTo);
+            sketch.require(own);
+            Course course = sketch.follow(own);
             courses.add(course);
             List<Population> populations = batch.classes(s).populations();
             // Contents are proportional to kg/m3, and there are many: one exact conversion serves them all.

@@ -204,7 +204,7 @@ public record Findings(String title, List<String> about, List<String> answer, bo
     }
 
     private static Section cautions(Run run) {
-        return Section.of(CAUTIONS, "Cautions", Cautions.of(run));
+        return Section.of(CAUTIONS, "Cautions", Cautions.of(run).shown());
     }
 
     private static String capital(String text) {

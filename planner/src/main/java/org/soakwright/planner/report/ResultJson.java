@@ -68,7 +68,9 @@ public final class ResultJson {
         });
         totals(json, "totals", run.totals());
         reasons(json);
-        json.strings("cautions", Cautions.of(run));
+        Cautions cautions = Cautions.of(run);
+        json.strings("cautions", cautions.shown());
+        json.strings("stops", cautions.stops());
     }
 
     /** Only where something is not known exactly. */

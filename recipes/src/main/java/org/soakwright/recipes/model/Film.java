@@ -1,5 +1,6 @@
 package org.soakwright.recipes.model;
 
+import java.util.List;
 import java.util.function.UnaryOperator;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
@@ -93,8 +94,8 @@ public sealed interface Film {
      */
     record Packed(Place place, Quantity speed, Quantity voids) implements Computed {
         public Packed {
-            Rules.positive("a speed", speed);
-            Rules.within("the void of a bed", voids, "40 %");
+            Rules.requireAll(List.of(
+                    Rules.ifNotPositive("a speed", speed), Rules.ifNotWithin("the void of a bed", voids, "40 %")));
         }
 
         @Override

@@ -181,6 +181,16 @@ public final class Quantity {
     }
 
     /**
+     * This activation energy, if it lies from 0 to 500 kJ/mol.
+     *
+     * @throws Unsound otherwise
+     */
+    public Quantity activating() {
+        Rules.require(Rules.ifNoActivationEnergy(this));
+        return this;
+    }
+
+    /**
      * This confidence, if it lies above 50 % and below 100 %.
      *
      * @throws Unsound otherwise

@@ -144,11 +144,10 @@ final class Rules {
     }
 
     /** A part that is neither nothing nor the whole. */
-    static void within(String what, Quantity part, String example) {
-        require(
-                part.si() > 0 && part.si() < 1
-                        ? List.of()
-                        : found(part, what + " lies above 0 % and below 100 %", "; write such as " + example));
+    static List<Problem> ifNotWithin(String what, Quantity part, String example) {
+        return part.si() > 0 && part.si() < 1
+                ? List.of()
+                : found(part, what + " lies above 0 % and below 100 %", "; write such as " + example);
     }
 
     /** What is less sure than a coin's toss is no confidence. */

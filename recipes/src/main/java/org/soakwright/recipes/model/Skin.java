@@ -6,7 +6,7 @@ import org.soakwright.recipes.text.Place;
 /**
  * A layer on the piece that a species passes slowly.
  *
- * @param permeance m/s, above zero: the flux over the difference in content across it, counted as in the piece
+ * @param permeance m/s, above zero: the flux over the difference across it, counted as contents of the liquor
  * @param face which faces of the first side it covers; the whole surface is both
  */
 public record Skin(Place place, Quantity permeance, Faces face) {

@@ -60,6 +60,12 @@ public record Species(
         return new Species(place, name, start, startVaries, other, diffusivityVaries, partition, traits, exchangesWith);
     }
 
+    /** The same species with another start. */
+    public Species with(Start other) {
+        return new Species(
+                place, name, other, startVaries, diffusivity, diffusivityVaries, partition, traits, exchangesWith);
+    }
+
     /** With its quantities changed; what varies from piece to piece stays. */
     public Species each(UnaryOperator<Quantity> change) {
         return new Species(

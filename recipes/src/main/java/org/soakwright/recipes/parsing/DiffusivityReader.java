@@ -55,6 +55,10 @@ final class DiffusivityReader {
                 .anyMatch(entry -> Section.STEP_GRAIN.keys().contains(entry.key()));
     }
 
+    private static boolean names(Tree.Entries entries) {
+        return Values.has(entries, "from") && !Values.has(entries, "to");
+    }
+
     private static @Nullable Diffusivities alike(@Nullable Diffusivity value) {
         return value == null ? null : new Diffusivities.Alike(value);
     }
@@ -77,6 +81,12 @@ final class DiffusivityReader {
     }
 
     private @Nullable Diffusivity one(String what, @Nullable Tree tree, Section section) {
+        if (section == Section.KNOWN && tree instanceof Tree.Entries entries && names(entries)) {
+            problems.add(
+                    entries.place(),
+                    "a step states its own diffusivity as a value: found from; write such as 8e-10 m2/s");
+            return null;
+        }
         if (section == Section.KNOWN || !(tree instanceof Tree.Entries entries)) {
             Quantity value = known.quantity(what, tree, Kind.DIFFUSIVITY);
             return value == null ? null : problems.attempt(() -> Diffusivity.of(value));

@@ -10,8 +10,7 @@ import org.soakwright.recipes.text.Tree;
 
 /** Reads the film between the pieces and what is around them. */
 final class FilmReader {
-    private static final String WAYS = "{coefficient: 2e-6 m/s}, {still: true}, {speed: 0.05 m/s}, {stirred: {power: 40"
-            + " W/m3}} or {packed: {speed: 2 mm/s, void: 40 %}}";
+    private static final String WAYS = "{coefficient: 2e-6 m/s} or {speed: 0.05 m/s}";
 
     private final Known known;
     private final Values values;
@@ -33,7 +32,11 @@ final class FilmReader {
             return new Film.Negligible();
         }
         if (tree != null && !(tree instanceof Tree.Broken)) {
-            problems.add(tree.place(), "film: found " + tree.label() + "; write negligible, or such as " + WAYS);
+            boolean still = tree instanceof Tree.Leaf leaf && leaf.text().equals("still");
+            problems.add(
+                    tree.place(),
+                    "film: found " + tree.label() + "; write "
+                            + (still ? "{still: true}" : "negligible, or such as " + WAYS));
         }
         return null;
     }

@@ -42,9 +42,7 @@ final class LawReader {
         if (fields.has("points")) {
             return stated(points());
         }
-        Quantity value = fields.has("value") || !fields.has("from")
-                ? known.beside(values.quantity(what, fields.need("value", EXAMPLE), Kind.DIFFUSIVITY), fields)
-                : null;
+        Quantity value = fields.has("value") || !fields.has("from") ? value() : null;
         Warmth warmth = warmth();
         if (fields.has("from")) {
             return published(value, warmth);
@@ -52,9 +50,16 @@ final class LawReader {
         return value == null || warmth.broken() || !complete(warmth) ? null : made(value, warmth, null);
     }
 
+    private @Nullable Quantity value() {
+        Quantity value = known.beside(values.quantity(what, fields.need("value", EXAMPLE), Kind.DIFFUSIVITY), fields);
+        return values.checked(value, found -> found.positive("a diffusivity"));
+    }
+
     private Warmth warmth() {
         Quantity at = known.temperature("at", fields.get("at"));
-        Quantity energy = known.quantity("activation-energy", fields.get("activation-energy"), Kind.MOLAR_ENERGY);
+        Quantity energy = values.checked(
+                known.quantity("activation-energy", fields.get("activation-energy"), Kind.MOLAR_ENERGY),
+                Quantity::activating);
         boolean viscous = scaling();
         boolean broken = (at == null && fields.has("at"))
                 || (energy == null && fields.has("activation-energy"))
@@ -183,8 +188,8 @@ final class LawReader {
     private @Nullable Diffusivity published(@Nullable Quantity value, Warmth stated) {
         Tree tree = fields.get("from");
         String name = values.name("from", tree, "salt-in-feta");
-        Place place = fields.place("from");
-        Entry entry = name == null ? null : new Published(problems).entry(name, Property.DIFFUSIVITY, at(tree, place));
+        Place place = tree == null ? fields.place() : tree.place();
+        Entry entry = name == null ? null : new Published(problems).entry(name, Property.DIFFUSIVITY, place);
         boolean broken = stated.broken() || (value == null && fields.has("value"));
         if (name == null || entry == null || broken) {
             return null;
@@ -206,10 +211,6 @@ final class LawReader {
         }
         Warmth warmth = warmth(entry, stated, place);
         return warmth.broken() || !complete(warmth) ? null : made(taken, warmth, name);
-    }
-
-    private static Place at(@Nullable Tree tree, Place otherwise) {
-        return tree == null ? otherwise : tree.place();
     }
 
     /** The one value of an entry, with the give-or-take that the recipe states. */
@@ -258,7 +259,9 @@ final class LawReader {
         if (!found.isOne()) {
             problems.add(
                     place,
-                    "the library gives " + key + " of " + entry.name() + " as a range: found " + found + "; add " + key
+                    "the library gives the " + (key.equals("at") ? "temperature" : "activation energy") + " of "
+                            + entry.name()
+                            + " as a range: found " + found + "; add " + key
                             + ", such as " + found.from());
             return null;
         }

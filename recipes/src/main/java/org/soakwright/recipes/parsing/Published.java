@@ -1,9 +1,11 @@
 package org.soakwright.recipes.parsing;
 
+import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.library.Entry;
 import org.soakwright.recipes.library.Library;
 import org.soakwright.recipes.library.Property;
+import org.soakwright.recipes.text.Nearest;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Problems;
 import org.soakwright.recipes.text.Shown;
@@ -27,8 +29,7 @@ final class Published {
         if (entry == null) {
             problems.add(
                     place,
-                    "the library has no entry of this name: found " + Shown.quoted(name) + "; "
-                            + Shelf.LIBRARY.hint(name));
+                    "the library has no entry of this name: found " + Shown.quoted(name) + "; " + hint(name, property));
             return null;
         }
         if (entry.property() != property) {
@@ -39,6 +40,17 @@ final class Published {
             return null;
         }
         return entry;
+    }
+
+    /** The nearest name of those that would do. */
+    private static String hint(String name, Property property) {
+        List<String> names = Shelf.LIBRARY.entries().stream()
+                .filter(entry -> entry.property() == property)
+                .map(Entry::name)
+                .toList();
+        return Nearest.of(name, names)
+                .map(nearest -> "did you mean \"" + nearest + "\"?")
+                .orElse("it has no " + property.word() + " at all, write the value");
     }
 
     private static String spoken(Property property) {

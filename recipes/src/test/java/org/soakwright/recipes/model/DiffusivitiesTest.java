@@ -69,7 +69,7 @@ class DiffusivitiesTest {
         Map<String, Diffusivities> warming = Map.of("salt", byGrain(WARMING, SLOW));
         Unsound unsound = assertThrows(Unsound.class, () -> new Overrides(warming, Map.of()));
         assertEquals(
-                "f:1:1: a step's own diffusivity holds at its temperature; remove at and activation-energy",
+                "f:1:1: a step's own diffusivity holds at its temperature; write value, and give-or-take where it is known, alone",
                 unsound.problems().get(0).toString());
     }
 

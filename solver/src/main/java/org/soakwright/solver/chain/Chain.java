@@ -50,11 +50,13 @@ public abstract sealed class Chain permits WaveChain, LaunchChain, RitzChain {
             }
         }
         List<Grade> grades = List.copyOf(lot);
-        if (grades.stream().allMatch(Grade::oneAxis) && grades.size() <= MANY) {
+        stages.forEach(stage -> stage.surfaces().require(grades));
+        boolean twoFaced = grades.stream().anyMatch(Grade::twoFaced);
+        if (grades.stream().allMatch(Grade::oneAxis) && grades.size() <= MANY && !twoFaced) {
             return WaveChain.of(grades, List.copyOf(starts), List.copyOf(stages), new WaveChain.Shelf());
         }
         boolean shared = stages.stream().anyMatch(stage -> stage.surroundings() instanceof Surroundings.Vessel);
-        return shared
+        return shared || twoFaced
                 ? new RitzChain(grades, List.copyOf(starts), List.copyOf(stages), Set.copyOf(passing))
                 : new LaunchChain(grades, List.copyOf(starts), List.copyOf(stages));
     }

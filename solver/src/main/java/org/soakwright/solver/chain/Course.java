@@ -23,9 +23,9 @@ public abstract sealed class Course permits WaveCourse, LaunchCourse, ProductCou
     public abstract double value(Probe probe, int stage);
 
     /**
-     * Contents of one grade's pieces at the end of a stage, on the shortest way from the core to the surface.
+     * Contents of one grade's pieces at the end of a stage, on the shortest way from the core to the surface, or from back to front.
      *
-     * @param positions 0, the core or sealed face, to 1, the wetted surface
+     * @param positions 0, the core, sealed face or back, to 1, the wetted surface
      * @return kg/m3 of piece, by position
      */
     public abstract double[] profile(int grade, int stage, double... positions);
@@ -35,16 +35,16 @@ public abstract sealed class Course permits WaveCourse, LaunchCourse, ProductCou
      *
      * @param first the side across, from 0
      * @param second the side down, from 0, another one
-     * @param across positions along the first, 0, the core, to 1, the surface
+     * @param across positions along the first, 0, the core or back, to 1, the surface
      * @param down positions along the second
      * @return kg/m3 of piece, by position down, then across
      */
     public abstract double[][] section(int grade, int stage, int first, int second, double[] across, double[] down);
 
-    /** Where the content is highest: by side, from 0, the core, to 1, the surface. */
+    /** Where the content is highest: by side, from 0, the core or back, to 1, the surface. */
     public abstract double[] place(Probe.Highest probe, int stage);
 
-    /** Where the content is lowest: by side, from 0, the core, to 1, the surface. */
+    /** Where the content is lowest: by side, from 0, the core or back, to 1, the surface. */
     public abstract double[] place(Probe.Lowest probe, int stage);
 
     /** Derivatives of a reading by durations and by the contents of all liquors. */

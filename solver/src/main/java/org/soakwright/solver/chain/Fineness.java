@@ -3,6 +3,7 @@ package org.soakwright.solver.chain;
 import java.util.ArrayList;
 import java.util.List;
 import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.shape.Side;
 import org.soakwright.solver.stage.Mesh;
 
 /**
@@ -152,8 +153,12 @@ record Fineness(List<Integer> steps, int degree, double blur) {
     }
 
     /** A side's elements. */
-    static Mesh mesh(int step, int degree, double... corners) {
-        return step == SEALED ? new Mesh(new double[] {0, 1}, 2) : Mesh.of(Math.pow(FACTOR, step), degree, corners);
+    static Mesh mesh(Side side, int step, int degree, double... corners) {
+        return step == SEALED ? new Mesh(new double[] {0, 1}, 2) : cut(side, Math.pow(FACTOR, step), degree, corners);
+    }
+
+    private static Mesh cut(Side side, double fourier, int degree, double... corners) {
+        return side.twoFaced() ? Mesh.betweenFaces(fourier, degree, corners) : Mesh.of(fourier, degree, corners);
     }
 
     /** Many grades are mostly classes of one, of which averages and shares are asked, not single places. */
@@ -176,7 +181,8 @@ record Fineness(List<Integer> steps, int degree, double blur) {
         for (Grade grade : chain.lot()) {
             double product = 1;
             for (int i = 0; i < grade.sides().size(); i++) {
-                product *= Mesh.of(Math.pow(FACTOR, steps.get(at++)), degree(grade, degree))
+                double fourier = Math.pow(FACTOR, steps.get(at++));
+                product *= cut(grade.sides().get(i), fourier, degree(grade, degree))
                         .size();
             }
             sum += product;
@@ -204,7 +210,9 @@ record Fineness(List<Integer> steps, int degree, double blur) {
                 if (passing > FLEETING * least || least == Double.POSITIVE_INFINITY) {
                     least = Math.min(least, passing);
                 }
-                double passed = (grade.sides().get(i).axis().power() + 1) * 2 * Math.sqrt(together / Math.PI);
+                Side side = grade.sides().get(i);
+                double ends = side.twoFaced() ? 2 : side.axis().power() + 1;
+                double passed = ends * 2 * Math.sqrt(together / Math.PI);
                 asked.add(
                         passed < NOTHING && !grade.oneAxis()
                                 ? SEALED

@@ -24,11 +24,13 @@ final class LaunchChain extends Chain {
         this.stages = stages;
         for (int j = 0; j < lot.size(); j++) {
             Grade grade = lot.get(j);
+            int at = j;
+            List<Stage> own = stages.stream().map(stage -> stage.of(at)).toList();
             ways.add(
                     starts.get(j) instanceof Start.Uniform uniform && !grade.oneAxis()
-                            ? new Way.Products(new Launches(grade, uniform.content(), stages))
-                            : new Way.Waves(WaveChain.of(
-                                    List.of(grade), List.of(starts.get(j)), stages, new WaveChain.Shelf())));
+                            ? new Way.Products(new Launches(grade, uniform.content(), own))
+                            : new Way.Waves(
+                                    WaveChain.of(List.of(grade), List.of(starts.get(j)), own, new WaveChain.Shelf())));
         }
     }
 

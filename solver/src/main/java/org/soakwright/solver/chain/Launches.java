@@ -43,7 +43,7 @@ final class Launches {
 
     private static Stage alone(Stage stage) {
         Surroundings around = rests(stage) ? stage.surroundings() : new Surroundings.Plenty(0);
-        return new Stage(stage.diffusivity(), stage.partition(), stage.surface(), around, 0, stage.grain());
+        return new Stage(stage.diffusivity(), stage.partition(), stage.surfaces(), around, 0, stage.grain());
     }
 
     Stage stage(int index) {

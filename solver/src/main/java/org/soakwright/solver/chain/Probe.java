@@ -14,6 +14,9 @@ public sealed interface Probe {
         if (this instanceof At at) {
             return new At(other, at.position);
         }
+        if (this instanceof Core) {
+            return new Core(other);
+        }
         if (this instanceof Surface) {
             return new Surface(other);
         }
@@ -35,10 +38,14 @@ public sealed interface Probe {
     /** Mean over the lot, by volume. */
     record LotMean() implements Probe {}
 
+    /** Where every end that exchanges is farthest: the core, a sealed face, the middle between two faces. */
+    record Core(int grade) implements Probe {}
+
     /**
-     * At one place of one grade's pieces, on the shortest way from the core to the surface.
+     * At one place of one grade's pieces, on the shortest way from the core to the surface; where that lies between two faces, from back to
+     * front.
      *
-     * @param position 0, the core or sealed face, to 1, the wetted surface
+     * @param position 0, the core, sealed face or back, to 1, the wetted surface
      */
     record At(int grade, double position) implements Probe {
         public At {

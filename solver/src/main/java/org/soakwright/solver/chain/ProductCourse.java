@@ -113,6 +113,9 @@ final class ProductCourse extends Course {
         if (probe instanceof Probe.Mean || probe instanceof Probe.LotMean) {
             return Term.mean(launches.grade);
         }
+        if (probe instanceof Probe.Core) {
+            return Term.core(launches.grade);
+        }
         if (probe instanceof Probe.At at) {
             return Term.at(launches.grade, at.position());
         }
@@ -191,8 +194,7 @@ final class ProductCourse extends Course {
 
     @Override
     public double[][] section(int grade, int stage, int first, int second, double[] across, double[] down) {
-        return Cut.of(
-                positions -> grid(stage, positions), launches.grade.sides().size(), first, second, across, down);
+        return Cut.of(positions -> grid(stage, positions), launches.grade.sides(), first, second, across, down);
     }
 
     @Override
@@ -209,10 +211,7 @@ final class ProductCourse extends Course {
     private double[] place(Probe probe, int stage, double sign) {
         return places.computeIfAbsent(
                 List.of(probe, stage),
-                key -> Summit.place(
-                        positions -> grid(stage, positions),
-                        launches.grade.sides().size(),
-                        sign));
+                key -> Summit.place(positions -> grid(stage, positions), launches.grade.sides(), sign));
     }
 
     private double[] grid(int stage, double[][] positions) {

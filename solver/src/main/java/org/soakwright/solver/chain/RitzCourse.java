@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.shape.Side;
 import org.soakwright.solver.stage.Bath;
 import org.soakwright.solver.stage.Bathing;
 import org.soakwright.solver.stage.Product;
@@ -202,7 +203,7 @@ final class RitzCourse extends Course {
                 : List.of(
                         probe,
                         new Probe.Mean(probe.grade()),
-                        new Probe.At(probe.grade(), 0),
+                        new Probe.Core(probe.grade()),
                         new Probe.Surface(probe.grade()));
         double worst = 0;
         for (Probe one : all) {
@@ -283,6 +284,9 @@ final class RitzCourse extends Course {
         if (probe instanceof Probe.Mean || probe instanceof Probe.LotMean) {
             return product.uniform();
         }
+        if (probe instanceof Probe.Core) {
+            return sum(product, Term.core(pieces));
+        }
         if (probe instanceof Probe.At at) {
             return sum(product, Term.at(pieces, at.position()));
         }
@@ -314,14 +318,14 @@ final class RitzCourse extends Course {
     @Override
     public double[] profile(int grade, int stage, double... positions) {
         Grade pieces = chain.lot().get(grade);
-        double[][] places = new double[pieces.sides().size()][1];
+        double[][] places = Cut.throughCore(pieces.sides());
         places[pieces.shortest()] = positions;
         return grid(grade, stage, places);
     }
 
     @Override
     public double[][] section(int grade, int stage, int first, int second, double[] across, double[] down) {
-        int sides = chain.lot().get(grade).sides().size();
+        List<Side> sides = chain.lot().get(grade).sides();
         return Cut.of(positions -> grid(grade, stage, positions), sides, first, second, across, down);
     }
 
@@ -358,7 +362,7 @@ final class RitzCourse extends Course {
                 List.of(probe, stage),
                 key -> Summit.place(
                         positions -> grid(probe.grade(), stage, positions),
-                        chain.lot().get(probe.grade()).sides().size(),
+                        chain.lot().get(probe.grade()).sides(),
                         sign));
     }
 

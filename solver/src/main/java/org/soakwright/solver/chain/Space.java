@@ -30,7 +30,7 @@ final class Space {
 
     private final List<List<@Nullable List<double[][]>>> carried = new ArrayList<>();
 
-    private record Wanted(Axis axis, Mesh mesh, double biot) {}
+    private record Wanted(Axis axis, Mesh mesh, double back, double biot) {}
 
     private record Crossing(Conditions before, Conditions after, int grade) {}
 
@@ -58,11 +58,13 @@ final class Space {
             int degree = fineness.degree(chain.lot().get(j));
             for (int i = 0; i < chain.lot().get(j).sides().size(); i++) {
                 int step = fineness.steps().get(at++);
+                Side side = chain.lot().get(j).sides().get(i);
                 sealed.add(step == Fineness.SEALED);
                 ofGrade.add(
                         corners.length == 0
-                                ? known.computeIfAbsent(List.of(step, degree), key -> Fineness.mesh(step, degree))
-                                : Fineness.mesh(step, degree, corners));
+                                ? known.computeIfAbsent(
+                                        List.of(side.reach(), step, degree), key -> Fineness.mesh(side, step, degree))
+                                : Fineness.mesh(side, step, degree, corners));
             }
             meshes.add(ofGrade);
             sealedSides.add(sealed);
@@ -102,8 +104,13 @@ final class Space {
         for (int i = 0; i < pieces.sides().size(); i++) {
             Side side = pieces.sides().get(i);
             boolean sealed = sealedSides.get(grade).get(i);
-            Wanted wanted = new Wanted(side.axis(), meshes.get(grade).get(i), sealed ? 0 : conditions.biot(pieces, i));
-            found.add(sides.computeIfAbsent(wanted, key -> new Ritz(key.axis, key.mesh, key.biot)));
+            Conditions own = conditions.of(grade);
+            Wanted wanted = new Wanted(
+                    side.axis(),
+                    meshes.get(grade).get(i),
+                    sealed ? 0 : own.biotOfBack(pieces, i),
+                    sealed ? 0 : own.biot(pieces, i));
+            found.add(sides.computeIfAbsent(wanted, key -> new Ritz(key.axis, key.mesh, key.back, key.biot)));
         }
         return found;
     }

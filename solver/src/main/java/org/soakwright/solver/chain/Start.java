@@ -27,7 +27,7 @@ public sealed interface Start {
     /**
      * Straight lines between points.
      *
-     * @param points from position 0, the core or sealed face, to position 1, the wetted surface, in rising order
+     * @param points from position 0, the core, sealed face or back, to position 1, the wetted surface, in rising order
      */
     record Polyline(List<Point> points) implements Start {
         @Override

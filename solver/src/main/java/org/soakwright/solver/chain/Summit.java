@@ -1,14 +1,18 @@
 package org.soakwright.solver.chain;
 
+import java.util.List;
+import org.soakwright.solver.shape.Side;
+
 /**
- * The highest or lowest place in a piece of several sides. A grid, denser towards the surface, finds the neighbourhood; windows of five
+ * The highest or lowest place in a piece of several sides. A grid, so much denser towards the surface that it sees what a liquor leaves
+ * beneath an open face when it turns, finds the neighbourhood; windows of five
  * points a side, halved about their best, narrow it down until the place is known to 1e-8 of each side, where the value is flat. Cores and
  * faces, the usual places, are known at once: there the profile falls away on both or on the only side.
  */
 final class Summit {
     private static final double PLACE = 1e-8;
     private static final int MOST_WINDOWS = 80;
-    private static final int GRID = 20;
+    private static final int GRID = 24;
 
     private Summit() {}
 
@@ -18,13 +22,11 @@ final class Summit {
     }
 
     /** By side. */
-    static double[] place(Body body, int sides, double sign) {
-        double[][] positions = new double[sides][GRID + 1];
-        for (double[] side : positions) {
-            for (int i = 0; i <= GRID; i++) {
-                double fromSurface = (double) (GRID - i) / GRID;
-                side[i] = 1 - fromSurface * fromSurface;
-            }
+    static double[] place(Body body, List<Side> shape, double sign) {
+        int sides = shape.size();
+        double[][] positions = new double[sides][];
+        for (int s = 0; s < sides; s++) {
+            positions[s] = shape.get(s).twoFaced() ? betweenFaces() : fromCore();
         }
         double[] best = new double[sides];
         double[] span = new double[sides];
@@ -33,9 +35,10 @@ final class Summit {
             double[] side = positions[s];
             best[s] = side[at[s]];
             span[s] = Math.max(
-                    at[s] > 0 ? side[at[s]] - side[at[s] - 1] : 0, at[s] < GRID ? side[at[s] + 1] - side[at[s]] : 0);
+                    at[s] > 0 ? side[at[s]] - side[at[s] - 1] : 0,
+                    at[s] < side.length - 1 ? side[at[s] + 1] - side[at[s]] : 0);
         }
-        if (settled(body, best, sign)) {
+        if (settled(body, shape, best, sign)) {
             return best;
         }
         for (int i = 0; i < MOST_WINDOWS && widest(span) > PLACE; i++) {
@@ -62,10 +65,12 @@ final class Summit {
      * Whether a place of cores and faces only is best close by: at a core, where the profile is even, by its curvature; at a face by its
      * slope. Both are looked at twice, at distances where neither rounding nor the next term decides.
      */
-    private static boolean settled(Body body, double[] place, double sign) {
+    private static boolean settled(Body body, List<Side> shape, double[] place, double sign) {
         double[][] near = new double[place.length][];
         for (int s = 0; s < place.length; s++) {
-            if (place[s] == 0) {
+            if (place[s] == 0 && shape.get(s).twoFaced()) {
+                near[s] = new double[] {0, 1e-4, 1e-3};
+            } else if (place[s] == 0) {
                 near[s] = new double[] {0, 0.01, 0.04};
             } else if (place[s] == 1) {
                 near[s] = new double[] {1, 1 - 1e-4, 1 - 1e-3};
@@ -80,12 +85,32 @@ final class Summit {
             stride /= 3;
             double first = tip - sign * values[stride];
             double second = tip - sign * values[2 * stride];
-            double expected = place[s] == 0 ? 16 : 10;
+            double expected = place[s] == 0 && !shape.get(s).twoFaced() ? 16 : 10;
             if (!(first > 0 && second > 0 && Math.abs(second / first / expected - 1) < 0.2)) {
                 return false;
             }
         }
         return true;
+    }
+
+    private static double[] fromCore() {
+        double[] side = new double[GRID + 1];
+        for (int i = 0; i <= GRID; i++) {
+            double fromSurface = (double) (GRID - i) / GRID;
+            side[i] = 1 - fromSurface * fromSurface * fromSurface;
+        }
+        return side;
+    }
+
+    /** Each half as from the core. */
+    private static double[] betweenFaces() {
+        double[] half = fromCore();
+        double[] side = new double[2 * GRID + 1];
+        for (int i = 0; i <= GRID; i++) {
+            side[GRID + i] = 0.5 + 0.5 * half[i];
+            side[GRID - i] = 0.5 - 0.5 * half[i];
+        }
+        return side;
     }
 
     private static double widest(double[] spans) {

@@ -218,6 +218,9 @@ final class WaveCourse extends Course {
             if (probe instanceof Probe.At at) {
                 grade = at.grade();
                 x = at.position();
+            } else if (probe instanceof Probe.Core core) {
+                grade = core.grade();
+                x = 0;
             } else if (probe instanceof Probe.Surface surface) {
                 grade = surface.grade();
                 x = 1;

@@ -39,6 +39,11 @@ public record Grade(List<Side> sides, double volume, double ease) {
         return sides.size() == 1;
     }
 
+    /** Whether some side lies between two faces that need not be alike. */
+    public boolean twoFaced() {
+        return sides.stream().anyMatch(Side::twoFaced);
+    }
+
     /** The first side's axis: the only one of a grade of one axis. */
     public Axis axis() {
         return sides.get(0).axis();
@@ -53,7 +58,7 @@ public record Grade(List<Side> sides, double volume, double ease) {
     public int shortest() {
         int best = 0;
         for (int i = 1; i < sides.size(); i++) {
-            if (sides.get(i).length() < sides.get(best).length()) {
+            if (sides.get(i).depth() < sides.get(best).depth()) {
                 best = i;
             }
         }
@@ -61,16 +66,16 @@ public record Grade(List<Side> sides, double volume, double ease) {
     }
 
     /**
-     * What part of the wetted surface a side's faces are: each has the area (s + 1) volume / length.
+     * What part of the wetted surface a side's faces are: each side's have the area (s + 1) volume / depth.
      *
      * @param side from 0
      */
     public double wetted(int side) {
         double whole = 0;
         for (Side one : sides) {
-            whole += (one.axis().power() + 1) / one.length();
+            whole += (one.axis().power() + 1) / one.depth();
         }
         Side one = sides.get(side);
-        return (one.axis().power() + 1) / one.length() / whole;
+        return (one.axis().power() + 1) / one.depth() / whole;
     }
 }

@@ -11,15 +11,27 @@ import org.soakwright.solver.shape.Side;
  * @param diffusivity in the piece, m2/s; above 0
  * @param partition content of the piece over content of the liquor at equilibrium, (kg/m3)/(kg/m3); above 0
  */
-public record Conditions(double diffusivity, double partition, Surface surface, Bath bath, Grain grain) {
+public record Conditions(double diffusivity, double partition, Surfaces surfaces, Bath bath, Grain grain) {
     public Conditions {
         Require.positive("diffusivity", diffusivity, "m2/s");
         Require.positive("partition", partition, "1");
     }
 
-    /** The same in every direction. */
+    /** One surface for all grades. */
+    public Conditions(double diffusivity, double partition, Surface surface, Bath bath, Grain grain) {
+        this(diffusivity, partition, new Surfaces.Alike(surface), bath, grain);
+    }
+
+    /** The same in every direction, too. */
     public Conditions(double diffusivity, double partition, Surface surface, Bath bath) {
         this(diffusivity, partition, surface, bath, Grain.NONE);
+    }
+
+    /** As one of the grades meets them, from 0. */
+    public Conditions of(int grade) {
+        return surfaces instanceof Surfaces.Alike
+                ? this
+                : new Conditions(diffusivity, partition, surfaces.of(grade), bath, grain);
     }
 
     /** D/L^2 along the first side, 1/s: what turns a squared frequency into a rate. */
@@ -38,13 +50,29 @@ public record Conditions(double diffusivity, double partition, Surface surface, 
         return biot(grade, 0);
     }
 
-    /** Biot number k L/(K D) of a side. */
+    /** Biot number k L/(K D) of a side; of its front, where it lies between two faces: L is then the full thickness. */
     public double biot(Grade grade, int side) {
+        return biot(grade, side, one().atFront());
+    }
+
+    /** Biot number k L/(K D) of a side's back, L the full thickness; 0 where it begins at the core. */
+    public double biotOfBack(Grade grade, int side) {
+        return grade.sides().get(side).twoFaced() ? biot(grade, side, one().atBack()) : 0;
+    }
+
+    private double biot(Grade grade, int side, Surface surface) {
         Side along = grade.sides().get(side);
         if (surface instanceof Surface.Film film) {
             return film.coefficient() * along.length() / (partition * diffusivity(grade, along));
         }
         return surface instanceof Surface.Sealed ? 0 : Double.POSITIVE_INFINITY;
+    }
+
+    private Surface one() {
+        if (surfaces instanceof Surfaces.Alike alike) {
+            return alike.surface();
+        }
+        throw new IllegalStateException("surfaces differ by grade: ask the conditions of one");
     }
 
     private double diffusivity(Grade grade, Side side) {
@@ -53,6 +81,6 @@ public record Conditions(double diffusivity, double partition, Surface surface, 
 
     /** Whether pieces and liquor change each other, so that their modes are coupled. */
     boolean coupled() {
-        return bath instanceof Bath.Vessel && !(surface instanceof Surface.Sealed);
+        return bath instanceof Bath.Vessel && !surfaces.sealed();
     }
 }

@@ -9,7 +9,7 @@ import java.util.TreeSet;
  * the layer of depth sqrt(D t) that its shortest stage leaves at the surface. So the outermost element is a few such layers deep, and
  * the others grow towards the core; the error then falls exponentially with the degree.
  *
- * @param ends of the elements, from 0, the core, to 1, the surface; at least two, rising
+ * @param ends of the elements, from 0, the core or back, to 1, the surface; at least two, rising
  * @param degree of the polynomials, at least 2
  */
 public record Mesh(double[] ends, int degree) {
@@ -27,6 +27,9 @@ public record Mesh(double[] ends, int degree) {
 
     /** So thin a layer that nothing is refined further: Fo 1e-12. */
     private static final double THINNEST = 1e-6;
+
+    /** A corner so close to the middle between two faces takes its place as an end. */
+    private static final double NARROW = 0.1;
 
     public Mesh {
         ends = ends.clone();
@@ -53,6 +56,29 @@ public record Mesh(double[] ends, int degree) {
             for (double away = depth; from > 0 && away < 1 - REST; away /= GROWTH) {
                 addBetween(ends, from - away, depth);
                 addBetween(ends, from + away, depth);
+            }
+        }
+        return new Mesh(ends.stream().mapToDouble(end -> end).toArray(), degree);
+    }
+
+    /**
+     * The same between two faces: layers grow from both, each half is cut as one from the core would be.
+     *
+     * @param fourier D t / L^2 of the shortest stage, L from face to face, 1; above 0
+     * @param corners positions where the start profile has a corner
+     */
+    public static Mesh betweenFaces(double fourier, int degree, double... corners) {
+        TreeSet<Double> from = new TreeSet<>(List.of(0.0, 1.0));
+        for (double corner : corners) {
+            from.add(corner);
+        }
+        TreeSet<Double> ends = new TreeSet<>(from);
+        double depth = Math.max(THINNEST, LAYERS * Math.sqrt(fourier));
+        addBetween(ends, 0.5, Math.min(NARROW, depth));
+        for (double end : from) {
+            for (double away = depth; away < 0.5 * (1 - REST); away /= GROWTH) {
+                addBetween(ends, end - away, depth);
+                addBetween(ends, end + away, depth);
             }
         }
         return new Mesh(ends.stream().mapToDouble(end -> end).toArray(), degree);

@@ -39,7 +39,7 @@ public final class Modes {
         roots = new PlainRoots[grades];
         double quickest = 0;
         for (int j = 0; j < grades; j++) {
-            roots[j] = new PlainRoots(lot.get(j), conditions);
+            roots[j] = new PlainRoots(lot.get(j), conditions.of(j));
             roots[j].upTo(0);
             quickest = Math.max(quickest, roots[j].rate(0));
         }

@@ -33,11 +33,21 @@ public final class Ritz {
     private final double[][] basis;
 
     /**
-     * Finds the modes.
+     * Finds the modes of a side from the core.
      *
      * @param biot 0 when sealed, infinite when the surface is in equilibrium with its surroundings at once
      */
     public Ritz(Axis axis, Mesh mesh, double biot) {
+        this(axis, mesh, 0, biot);
+    }
+
+    /**
+     * Finds the modes of a side that may exchange at both ends.
+     *
+     * @param back Biot number at position 0; 0 at a core
+     * @param biot the same at position 1
+     */
+    public Ritz(Axis axis, Mesh mesh, double back, double biot) {
         this.axis = axis;
         this.mesh = mesh;
         int all = mesh.size();
@@ -46,19 +56,27 @@ public final class Ritz {
         assemble(mass, stiffness);
         boolean held = Double.isInfinite(biot);
         double pull = held ? 0 : (axis.power() + 1) * biot;
-        // The unknown at the surface comes last: held, it is simply left out.
-        int n = held ? all - 1 : all;
+        boolean backHeld = Double.isInfinite(back);
+        double backPull = backHeld ? 0 : back;
+        // The unknown at the surface comes last, that at the back first: held, they are simply left out.
+        int first = backHeld ? 1 : 0;
+        int n = (held ? all - 1 : all) - first;
         double[][] shifted = new double[n][n];
+        double[][] free = new double[n][n];
         for (int i = 0; i < n; i++) {
             for (int j = 0; j < n; j++) {
-                shifted[i][j] = stiffness[i][j] + SHIFT * mass[i][j];
+                free[i][j] = mass[first + i][first + j];
+                shifted[i][j] = stiffness[first + i][first + j] + SHIFT * free[i][j];
             }
         }
         if (!held) {
-            shifted[all - 1][all - 1] += pull;
+            shifted[n - 1][n - 1] += pull;
+        }
+        if (!backHeld) {
+            shifted[0][0] += backPull;
         }
         double[][] root = Triangular.cholesky(mass);
-        double[][] part = Triangular.leading(root, n);
+        double[][] part = backHeld ? Triangular.cholesky(free) : Triangular.leading(root, n);
         double[][] inverse = Triangular.congruent(Triangular.cholesky(shifted), part);
         EigenDecomposition eigen = new EigenDecomposition(new Array2DRowRealMatrix(inverse, false));
         size = n;
@@ -69,9 +87,14 @@ public final class Ritz {
         Integer[] order = order(eigen.getRealEigenvalues());
         for (int m = 0; m < n; m++) {
             double[] vector = eigen.getEigenvector(order[m]).toArray();
-            basis[m] = Arrays.copyOf(vector, all);
-            shape[m] = Arrays.copyOf(Triangular.solveTransposed(part, vector), all);
-            rate[m] = biot == 0 && m == 0 ? 0 : steepness(shape[m]) + pull * shape[m][all - 1] * shape[m][all - 1];
+            shape[m] = new double[all];
+            System.arraycopy(Triangular.solveTransposed(part, vector), 0, shape[m], first, n);
+            basis[m] = backHeld ? Triangular.timesTransposed(root, shape[m]) : Arrays.copyOf(vector, all);
+            rate[m] = biot == 0 && back == 0 && m == 0
+                    ? 0
+                    : steepness(shape[m])
+                            + pull * shape[m][all - 1] * shape[m][all - 1]
+                            + backPull * shape[m][0] * shape[m][0];
             uniform[m] = mean(shape[m], mass);
         }
     }
@@ -102,7 +125,7 @@ public final class Ritz {
         return uniform[mode];
     }
 
-    /** All modes at a position from 0, the core, to 1, the surface. */
+    /** All modes at a position from 0, the core or back, to 1, the surface. */
     public double[] at(double position) {
         int e = 0;
         while (e < mesh.elements() - 1 && position > mesh.ends()[e + 1]) {

@@ -59,6 +59,17 @@ final class Triangular {
         return product;
     }
 
+    /** L' x for lower triangular L. */
+    static double[] timesTransposed(double[][] l, double[] x) {
+        double[] product = new double[x.length];
+        for (int i = 0; i < x.length; i++) {
+            for (int k = i; k < x.length; k++) {
+                product[i] += l[k][i] * x[k];
+            }
+        }
+        return product;
+    }
+
     /** x with L' x = b for lower triangular L. */
     static double[] solveTransposed(double[][] l, double[] b) {
         double[] x = b.clone();

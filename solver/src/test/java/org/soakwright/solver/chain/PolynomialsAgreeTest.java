@@ -3,6 +3,7 @@ package org.soakwright.solver.chain;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
@@ -10,8 +11,10 @@ import java.util.SplittableRandom;
 import org.junit.jupiter.api.Test;
 import org.soakwright.solver.shape.Axis;
 import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.shape.Grain;
 import org.soakwright.solver.shape.Side;
 import org.soakwright.solver.stage.Surface;
+import org.soakwright.solver.stage.Surfaces;
 
 /**
  * Polynomial modes with the liquor on a contour, against the two other ways to the same numbers: standing waves of pieces and liquor
@@ -22,6 +25,7 @@ class PolynomialsAgreeTest {
     private static final double MOST = 100;
 
     private final SplittableRandom random = new SplittableRandom(20261201);
+    private final SplittableRandom spice = new SplittableRandom(2701);
     private double worstMean;
     private double worstPlace;
     private double worstSlope;
@@ -38,7 +42,7 @@ class PolynomialsAgreeTest {
                 lot.add(new Grade(axis, length * log(0.4, 2.5), 1e-3 * log(0.1, 10)));
             }
             List<Double> seconds = new ArrayList<>();
-            List<Stage> stages = stages(length, true, 1e-3, seconds);
+            List<Stage> stages = stages(length, lot.size(), true, 1e-3, seconds);
             List<Start> starts = new ArrayList<>();
             lot.forEach(grade -> starts.add(start()));
             Course waves = Chain.of(lot, starts, stages, Set.of()).follow(times(seconds));
@@ -59,10 +63,13 @@ class PolynomialsAgreeTest {
             if (brick && i % 4 == 0) {
                 sides.add(new Side(Axis.SLAB, length * log(0.5, 2)));
             }
-            List<Grade> lot = List.of(new Grade(sides, 1e-3, log(0.5, 2)));
+            List<Grade> lot = new ArrayList<>(List.of(new Grade(sides, 1e-3, log(0.5, 2))));
+            if (i % 3 == 0) {
+                lot.add(new Grade(Axis.SPHERE, 0.8 * length, 2e-3));
+            }
             List<Double> seconds = new ArrayList<>();
-            List<Stage> stages = stages(length, false, 2e-2, seconds);
-            List<Start> starts = List.of(new Start.Uniform(MOST * random.nextDouble()));
+            List<Stage> stages = stages(length, lot.size(), false, 2e-2, seconds);
+            List<Start> starts = Collections.nCopies(lot.size(), new Start.Uniform(MOST * random.nextDouble()));
             Course products = Chain.of(lot, starts, stages, Set.of()).follow(times(seconds));
             assertTrue(products instanceof LaunchCourse, "these are products");
             Course polynomials = new RitzChain(lot, starts, stages, Set.of()).follow(times(seconds));
@@ -119,7 +126,7 @@ class PolynomialsAgreeTest {
         assertTrue(worstMean < mean && worstPlace < place && worstSlope < 10 * mean && worstBound < 1, line);
     }
 
-    private List<Stage> stages(double length, boolean shared, double shortest, List<Double> seconds) {
+    private List<Stage> stages(double length, int grades, boolean shared, double shortest, List<Double> seconds) {
         List<Stage> stages = new ArrayList<>();
         int count = 1 + random.nextInt(4);
         for (int k = 0; k < count; k++) {
@@ -141,9 +148,25 @@ class PolynomialsAgreeTest {
                 around = new Surroundings.Vessel(volume, content, flow, MOST / 4 * random.nextDouble());
                 clinging = 0.1 * volume * random.nextDouble();
             }
-            stages.add(new Stage(diffusivity, partition, surface, around, clinging));
+            stages.add(new Stage(diffusivity, partition, surfaces(surface, grades), around, clinging, Grain.NONE));
         }
         return stages;
+    }
+
+    /** Every other time one for each grade. */
+    private Surfaces surfaces(Surface first, int grades) {
+        if (first instanceof Surface.Sealed || spice.nextBoolean()) {
+            return new Surfaces.Alike(first);
+        }
+        List<Surface> each = new ArrayList<>(List.of(first));
+        while (each.size() < grades) {
+            boolean film = first instanceof Surface.Film && spice.nextInt(3) > 0;
+            each.add(
+                    film
+                            ? new Surface.Film(((Surface.Film) first).coefficient() * (0.1 + spice.nextDouble()))
+                            : new Surface.Open());
+        }
+        return new Surfaces.ByGrade(each);
     }
 
     private Start start() {

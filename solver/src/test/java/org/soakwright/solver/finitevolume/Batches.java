@@ -63,6 +63,57 @@ final class Batches {
         return batches;
     }
 
+    /** Those of several solids again, each with a film of its own and every other with a skin. */
+    static List<Batch> dressed() {
+        Random random = new Random(50313);
+        List<Batch> dressed = new ArrayList<>();
+        for (Batch batch : all()) {
+            if (batch.lot().size() > 1) {
+                List<Solid> lot = new ArrayList<>();
+                for (Solid solid : batch.lot()) {
+                    lot.add(solid.in(Recipes.coat(random, lot.size() % 2 == dressed.size() % 2)));
+                }
+                dressed.add(new Batch(lot, batch.start(), batch.phases()));
+            }
+        }
+        return dressed;
+    }
+
+    /**
+     * Again with a flat edge from face to face, the faces not alike: skins, other films, sealed backs. All but most bricks, which take
+     * long, and bars a second time as slabs.
+     */
+    static List<Batch> twoFaced() {
+        Random random = new Random(50314);
+        List<Batch> batches = new ArrayList<>();
+        for (Batch batch : all()) {
+            if (!bricks(batch) || batches.size() % 4 == 0) {
+                batches.add(twoFaced(batch, random));
+            }
+            if (Shape.of(batch.lot().get(0)) == Shape.BAR) {
+                List<Solid> slabs = batch.lot().stream()
+                        .map(solid -> Solid.of(
+                                        solid.edges().get(0).power(),
+                                        solid.edges().get(0).length(),
+                                        solid.volume())
+                                .eased(solid.ease()))
+                        .toList();
+                batches.add(twoFaced(new Batch(slabs, batch.start(), batch.phases()), random));
+            }
+        }
+        return batches;
+    }
+
+    private static Batch twoFaced(Batch batch, Random random) {
+        List<Solid> lot = new ArrayList<>();
+        for (Solid solid : batch.lot()) {
+            Coat back = random.nextInt(4) == 0 ? new Coat(1, 0) : Recipes.coat(random, random.nextInt(3) > 0);
+            Coat front = random.nextInt(4) == 0 ? Recipes.coat(random, true) : Coat.NONE;
+            lot.add(solid.twoFaced(front, back));
+        }
+        return new Batch(lot, batch.start(), batch.phases());
+    }
+
     static boolean bricks(Batch batch) {
         return batch.lot().stream().anyMatch(s -> s.edges().size() == 3);
     }

@@ -9,9 +9,9 @@ import java.util.List;
  * @param rulers where the nodes are, by axis
  * @param mean over the volume
  * @param wetted mean over the wetted surface
- * @param shortest the axis along which the surface is nearest
+ * @param solid what holds it
  */
-record Field(Tensor nodes, List<Ruler> rulers, double mean, double wetted, int shortest) {
+record Field(Tensor nodes, List<Ruler> rulers, double mean, double wetted, Solid solid) {
     /** A times this and b times the other, whose mesh may be finer by a whole factor. */
     Field combine(double a, Field other, double b) {
         double[] sum = new double[nodes.value.length];
@@ -24,18 +24,22 @@ record Field(Tensor nodes, List<Ruler> rulers, double mean, double wetted, int s
             sum[i] = a * nodes.value[i] + b * other.nodes.at(fine);
         }
         Tensor sums = new Tensor(nodes.size, sum);
-        return new Field(sums, rulers, a * mean + b * other.mean, a * wetted + b * other.wetted, shortest);
+        return new Field(sums, rulers, a * mean + b * other.mean, a * wetted + b * other.wetted, solid);
     }
 
     double core() {
-        return nodes.value[0];
+        return at(cores());
     }
 
-    /** On the shortest way from the core, 0, to the surface, 1. */
+    /** On the shortest way from the core or the back, 0, to the surface, 1. */
     double on(double position) {
-        double[] place = new double[rulers.size()];
-        place[shortest] = position;
+        double[] place = cores();
+        place[solid.shortest()] = position;
         return at(place);
+    }
+
+    private double[] cores() {
+        return solid.edges().stream().mapToDouble(Edge::core).toArray();
     }
 
     /** Anywhere: each axis from the core, 0, to the surface, 1. */

@@ -123,7 +123,8 @@ final class FiniteVolumes {
             double pace = step.diffusivity() / (body.length() * body.length());
             int cells = mesh.conductance.length;
             // Without resistance the node at the surface is part of the bath.
-            int free = step.open() ? cells : cells + 1;
+            boolean open = body.coat().open(step);
+            int free = open ? cells : cells + 1;
             double[] mass = new double[free];
             double[] link = new double[free - 1];
             for (int i = 0; i < free; i++) {
@@ -133,12 +134,12 @@ final class FiniteVolumes {
                 }
             }
             double tie = 0;
-            if (step.open()) {
+            if (open) {
                 tie = capacity * pace * mesh.conductance[cells - 1];
                 bathMass += step.kind().limited() ? capacity * mesh.share[cells] : 0;
                 bathContent += capacity * mesh.share[cells] * nodes[cells];
             } else if (step.kind() != Kind.REST) {
-                tie = body.volume() * (body.power() + 1) * step.film() / body.length();
+                tie = body.volume() * (body.power() + 1) * body.coat().film(step) / body.length();
             }
             blocks.add(new Arrow.Block(mass, link, tie));
             unknown.add(java.util.Arrays.copyOf(nodes, free));
@@ -148,7 +149,7 @@ final class FiniteVolumes {
         for (int j = 0; j < content.size(); j++) {
             double[] nodes = content.get(j);
             System.arraycopy(unknown.get(j), 0, nodes, 0, unknown.get(j).length);
-            if (step.open()) {
+            if (recipe.lot().get(j).coat().open(step)) {
                 nodes[nodes.length - 1] = after;
             }
         }

@@ -21,7 +21,9 @@ import org.soakwright.solver.finitevolume.Recipes.FilmClass;
 import org.soakwright.solver.finitevolume.Step.Kind;
 import org.soakwright.solver.shape.Axis;
 import org.soakwright.solver.shape.Grade;
+import org.soakwright.solver.shape.Grain;
 import org.soakwright.solver.stage.Surface;
+import org.soakwright.solver.stage.Surfaces;
 
 /** The chain of modes against finite volumes, on every combination of shape, surroundings, film and rest. */
 class FiniteVolumesAgreeTest {
@@ -37,18 +39,36 @@ class FiniteVolumesAgreeTest {
 
     @Test
     void everyReadingAgreesAtTheEndOfEveryStep() {
+        agree("finite volumes against modes: ", Recipes.all());
+    }
+
+    @Test
+    void everyReadingAgreesWhereFilmsAndSkinsDifferByBody() {
+        List<Recipe> recipes = Recipes.dressed();
+        long mixed = recipes.stream()
+                .flatMap(recipe -> recipe.steps().stream()
+                        .filter(step -> recipe.lot().stream()
+                                        .map(body -> body.coat().open(step))
+                                        .distinct()
+                                        .count()
+                                == 2))
+                .count();
+        assertTrue(mixed > 20, "open bodies beside others in " + mixed + " steps only");
+        agree("finite volumes against modes, surfaces by grade: ", recipes);
+    }
+
+    private void agree(String what, List<Recipe> recipes) {
         Map<String, Double> worst = new TreeMap<>();
         int readings = 0;
-        for (Recipe recipe : Recipes.all()) {
+        for (Recipe recipe : recipes) {
             readings += compare(recipe, worst);
         }
         StringBuilder line = new StringBuilder();
-        worst.forEach((what, difference) -> line.append(String.format(Locale.ROOT, " %s %.1e", what, difference)));
-        System.out.println("finite volumes against modes: " + readings + " readings, highest or lowest inside in "
-                + inside + ", worst" + line);
+        worst.forEach((name, difference) -> line.append(String.format(Locale.ROOT, " %s %.1e", name, difference)));
+        System.out.println(what + readings + " readings, highest or lowest inside in " + inside + ", worst" + line);
         assertTrue(inside > 50, "extrema inside in " + inside + " readings only");
         assertEquals(6, worst.size());
-        worst.forEach((what, difference) -> assertTrue(difference < AGREEMENT, what + " differ by " + difference));
+        worst.forEach((name, difference) -> assertTrue(difference < AGREEMENT, name + " differ by " + difference));
     }
 
     @Test
@@ -183,6 +203,27 @@ class FiniteVolumesAgreeTest {
         return sum;
     }
 
+    /** One for all where they are alike. */
+    static Surfaces surfaces(Step step, List<Coat> coats) {
+        List<Surface> each = coats.stream().map(coat -> surface(step, coat)).toList();
+        return coats.stream().allMatch(Coat.NONE::equals)
+                ? new Surfaces.Alike(each.get(0))
+                : new Surfaces.ByGrade(each);
+    }
+
+    static Surface surface(Step step, Coat coat) {
+        if (step.kind() == Kind.REST) {
+            return new Surface.Sealed();
+        }
+        if (coat.skin() == 0) {
+            return new Surface.Sealed();
+        }
+        if (Double.isInfinite(coat.skin())) {
+            return step.open() ? new Surface.Open() : new Surface.Film(coat.speed() * step.film());
+        }
+        return Surface.inSeries(coat.speed() * step.film(), coat.skin());
+    }
+
     /** The same recipe in the solver's own terms. */
     private static Course follow(Recipe recipe) {
         List<Grade> lot = new ArrayList<>();
@@ -195,9 +236,8 @@ class FiniteVolumesAgreeTest {
         }
         List<Stage> stages = new ArrayList<>();
         for (Step step : recipe.steps()) {
-            Surface surface = step.kind() == Kind.REST
-                    ? new Surface.Sealed()
-                    : step.open() ? new Surface.Open() : new Surface.Film(step.film());
+            Surfaces surfaces =
+                    surfaces(step, recipe.lot().stream().map(Body::coat).toList());
             Surroundings around = switch (step.kind()) {
                 case REST -> new Surroundings.Rest();
                 case AIR -> new Surroundings.Air(step.content());
@@ -205,7 +245,7 @@ class FiniteVolumesAgreeTest {
                 case CLOSED, FLOWING ->
                     new Surroundings.Vessel(step.volume(), step.content(), step.flow(), step.feed());
             };
-            stages.add(new Stage(step.diffusivity(), step.partition(), surface, around, step.clinging()));
+            stages.add(new Stage(step.diffusivity(), step.partition(), surfaces, around, step.clinging(), Grain.NONE));
         }
         boolean level =
                 points.stream().mapToDouble(Start.Point::content).distinct().count() == 1;

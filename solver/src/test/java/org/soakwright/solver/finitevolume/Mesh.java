@@ -33,6 +33,31 @@ final class Mesh {
         }
     }
 
+    /** Between two faces: each half as from the core. */
+    static Mesh twoFaced(int cells) {
+        return new Mesh(cells);
+    }
+
+    private Mesh(int cells) {
+        node = new double[cells + 1];
+        share = new double[cells + 1];
+        conductance = new double[cells];
+        double before = 0;
+        for (int i = 0; i <= cells; i++) {
+            node[i] = across((double) i / cells);
+            double face = i == cells ? 1 : across((i + 0.5) / cells);
+            share[i] = face - before;
+            before = face;
+            if (i < cells) {
+                conductance[i] = 1 / (across((i + 1.0) / cells) - node[i]);
+            }
+        }
+    }
+
+    private static double across(double xi) {
+        return 0.5 + 0.5 * Math.signum(xi - 0.5) * place(Math.abs(2 * xi - 1));
+    }
+
     static double place(double xi) {
         return xi == 1 ? 1 : Math.tanh(GRADING * xi) / Math.tanh(GRADING);
     }

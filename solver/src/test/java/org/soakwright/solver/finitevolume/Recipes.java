@@ -56,6 +56,28 @@ final class Recipes {
         return recipes;
     }
 
+    /** Those of several bodies again, now each with a film of its own and every other with a skin: some open beside others that are not. */
+    static List<Recipe> dressed() {
+        Recipes dealer = new Recipes(20261);
+        List<Recipe> dressed = new ArrayList<>();
+        for (Recipe recipe : all()) {
+            if (recipe.lot().size() > 1) {
+                List<Body> lot = new ArrayList<>();
+                for (Body body : recipe.lot()) {
+                    lot.add(body.in(coat(dealer.random, lot.size() % 2 == dressed.size() % 2)));
+                }
+                dressed.add(new Recipe(lot, recipe.start(), recipe.steps()));
+            }
+        }
+        return dressed;
+    }
+
+    static Coat coat(Random random, boolean skin) {
+        double speed = 0.3 * Math.pow(10, random.nextDouble());
+        double permeance = REFERENCE_DIFFUSIVITY / REFERENCE_LENGTH * 0.3 * Math.pow(100, random.nextDouble());
+        return new Coat(speed, skin ? permeance : Double.POSITIVE_INFINITY);
+    }
+
     /** Every kind of surroundings with every class of film, shuffled. */
     private List<List<Object>> deck() {
         List<List<Object>> cards = new ArrayList<>();

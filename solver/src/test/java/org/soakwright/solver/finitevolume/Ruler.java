@@ -12,6 +12,9 @@ final class Ruler {
     /** Elements become smaller towards the surface, so that a stage's first moments are resolved. */
     private static final double[] ENDS = {0, 0.4, 0.7, 0.86, 0.94, 0.98, 1};
 
+    /** The same from both faces. */
+    private static final double[] BETWEEN_FACES = {0, 0.01, 0.03, 0.07, 0.15, 0.3, 0.5, 0.7, 0.85, 0.93, 0.97, 0.99, 1};
+
     private static final int BETWEEN_CELLS = 7;
 
     final double[] node;
@@ -31,8 +34,8 @@ final class Ruler {
     }
 
     /** Finite volumes: the cells and faces of a mesh. */
-    static Ruler cells(int power, int cells) {
-        Mesh mesh = new Mesh(power, cells);
+    static Ruler cells(int power, boolean twoFaced, int cells) {
+        Mesh mesh = twoFaced ? Mesh.twoFaced(cells) : new Mesh(power, cells);
         double[][] mass = new double[cells + 1][cells + 1];
         double[][] root = new double[cells][cells + 1];
         for (int i = 0; i <= cells; i++) {
@@ -46,10 +49,11 @@ final class Ruler {
     }
 
     /** Finite elements of a high degree: polynomials through Chebyshev's points, every integral exact. */
-    static Ruler elements(int power, int degree) {
+    static Ruler elements(int power, boolean twoFaced, int degree) {
+        double[] ends = twoFaced ? BETWEEN_FACES : ENDS;
         GaussIntegrator rule = new GaussIntegratorFactory().legendreHighPrecision(degree + 2);
         int points = rule.getNumberOfPoints();
-        int elements = ENDS.length - 1;
+        int elements = ends.length - 1;
         int nodes = elements * degree + 1;
         double[] local = new double[degree + 1];
         for (int i = 0; i <= degree; i++) {
@@ -59,11 +63,11 @@ final class Ruler {
         double[][] mass = new double[nodes][nodes];
         double[][] root = new double[elements * points][nodes];
         for (int e = 0; e < elements; e++) {
-            double half = 0.5 * (ENDS[e + 1] - ENDS[e]);
-            double middle = 0.5 * (ENDS[e + 1] + ENDS[e]);
+            double half = 0.5 * (ends[e + 1] - ends[e]);
+            double middle = 0.5 * (ends[e + 1] + ends[e]);
             int first = e * degree;
             for (int i = 0; i <= degree; i++) {
-                node[first + i] = i == degree ? ENDS[e + 1] : i == 0 ? ENDS[e] : middle + half * local[i];
+                node[first + i] = i == degree ? ends[e + 1] : i == 0 ? ends[e] : middle + half * local[i];
             }
             for (int q = 0; q < points; q++) {
                 double x = middle + half * rule.getPoint(q);

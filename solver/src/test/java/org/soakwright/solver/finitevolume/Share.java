@@ -31,7 +31,7 @@ final class Share {
         rate = Tensor.outer(rates, Double::sum);
         uniform = Tensor.outer(axes.stream().map(a -> a.uniform).toList(), (a, b) -> a * b);
         held = contents.times(axes.stream().map(a -> a.part).toList());
-        open = axes.get(0).open;
+        open = axes.stream().anyMatch(a -> a.open);
         bathCapacity = open ? capacity * (1 - uniform.dot(uniform)) : 0;
         bathContent = open ? capacity * (mean(axes, contents) - uniform.dot(held)) : 0;
     }

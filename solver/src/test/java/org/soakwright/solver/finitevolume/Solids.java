@@ -5,7 +5,8 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.function.IntFunction;
+import java.util.function.BiFunction;
+import java.util.function.Function;
 import org.soakwright.solver.finitevolume.Step.Kind;
 
 /**
@@ -14,7 +15,7 @@ import org.soakwright.solver.finitevolume.Step.Kind;
  */
 final class Solids {
     private final Batch batch;
-    private final IntFunction<Ruler> rulers;
+    private final Function<Edge, Ruler> rulers;
     private final Map<List<Object>, Waves> known = new HashMap<>();
     private final List<Tensor> content = new ArrayList<>();
 
@@ -22,13 +23,13 @@ final class Solids {
     private double clinging;
     private double drive;
 
-    private Solids(Batch batch, IntFunction<Ruler> rulers) {
+    private Solids(Batch batch, Function<Edge, Ruler> rulers) {
         this.batch = batch;
         this.rulers = rulers;
         for (Solid solid : batch.lot()) {
             content.add(Tensor.level(
                     solid.edges().stream()
-                            .mapToInt(edge -> rulers.apply(edge.power()).node.length)
+                            .mapToInt(edge -> rulers.apply(edge).node.length)
                             .toArray(),
                     batch.start()));
         }
@@ -36,7 +37,7 @@ final class Solids {
 
     /** The ends of all phases, on finite volumes of one mesh. */
     static List<State> follow(Batch batch, int cells) {
-        return new Solids(batch, cached(power -> Ruler.cells(power, cells))).ends();
+        return new Solids(batch, cached((power, twoFaced) -> Ruler.cells(power, twoFaced, cells))).ends();
     }
 
     /** The ends of all phases from meshes of one, two and four times so many cells, without the errors in h^2 and h^4. */
@@ -54,12 +55,13 @@ final class Solids {
 
     /** The ends of all phases, on elements of a degree. */
     static List<State> onElements(Batch batch, int degree) {
-        return new Solids(batch, cached(power -> Ruler.elements(power, degree))).ends();
+        return new Solids(batch, cached((power, twoFaced) -> Ruler.elements(power, twoFaced, degree))).ends();
     }
 
-    private static IntFunction<Ruler> cached(IntFunction<Ruler> rulers) {
-        Map<Integer, Ruler> made = new HashMap<>();
-        return power -> made.computeIfAbsent(power, rulers::apply);
+    private static Function<Edge, Ruler> cached(BiFunction<Integer, Boolean, Ruler> rulers) {
+        Map<List<Object>, Ruler> made = new HashMap<>();
+        return edge -> made.computeIfAbsent(
+                List.of(edge.power(), edge.twoFaced()), key -> rulers.apply(edge.power(), edge.twoFaced()));
     }
 
     private List<State> ends() {
@@ -147,11 +149,13 @@ final class Solids {
         Step step = phase.step();
         List<Waves> axes = new ArrayList<>();
         for (Edge edge : solid.edges()) {
-            double biot = step.kind() == Kind.REST
-                    ? 0
-                    : step.film() * edge.length() / (step.partition() * phase.diffusivity(solid, edge));
+            double unit = edge.length() / (step.partition() * phase.diffusivity(solid, edge));
+            boolean rests = step.kind() == Kind.REST;
+            double biot = rests ? 0 : solid.coat().film(step) * unit;
+            double back = rests || !edge.twoFaced() ? 0 : solid.back().film(step) * unit;
             axes.add(known.computeIfAbsent(
-                    List.of(edge.power(), biot), key -> new Waves(rulers.apply(edge.power()), edge.power(), biot)));
+                    List.of(edge.power(), edge.twoFaced(), back, biot),
+                    key -> new Waves(rulers.apply(edge), edge.power(), back, biot)));
         }
         return axes;
     }
@@ -166,17 +170,19 @@ final class Solids {
                 double[] weight = axes.get(k).share;
                 if (k == i) {
                     weight = new double[weight.length];
-                    weight[weight.length - 1] = 1;
+                    boolean both = solid.edges().get(i).twoFaced();
+                    weight[weight.length - 1] = both ? 0.5 : 1;
+                    weight[0] = both ? 0.5 : 0;
                 }
                 weights.add(weight);
             }
             double faces =
-                    (solid.edges().get(i).power() + 1) / solid.edges().get(i).length();
+                    (solid.edges().get(i).power() + 1) / solid.edges().get(i).depth();
             area += faces;
             onSurface += faces * Tensor.outer(weights, (a, b) -> a * b).dot(nodes);
         }
         Tensor kept = new Tensor(nodes.size, nodes.value.clone());
         List<Ruler> rulers = axes.stream().map(a -> a.ruler).toList();
-        return new Field(kept, rulers, Share.mean(axes, nodes), onSurface / area, solid.shortest());
+        return new Field(kept, rulers, Share.mean(axes, nodes), onSurface / area, solid);
     }
 }

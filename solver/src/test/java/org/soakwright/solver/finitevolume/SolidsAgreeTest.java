@@ -28,6 +28,7 @@ import org.soakwright.solver.shape.Grade;
 import org.soakwright.solver.shape.Grain;
 import org.soakwright.solver.shape.Side;
 import org.soakwright.solver.stage.Surface;
+import org.soakwright.solver.stage.Surfaces;
 
 /** Chains of pieces of several axes against elements, which agree with the limit of finite volumes. */
 class SolidsAgreeTest {
@@ -67,6 +68,14 @@ class SolidsAgreeTest {
         for (int r = 0; r < batches.size(); r++) {
             compare(batches.get(r), "batch " + r);
         }
+        List<Batch> dressed = Batches.dressed();
+        for (int r = 0; r < dressed.size(); r++) {
+            compare(dressed.get(r), "batch " + r + " with surfaces by grade,");
+        }
+        List<Batch> twoFaced = Batches.twoFaced();
+        for (int r = 0; r < twoFaced.size(); r++) {
+            compare(twoFaced.get(r), "batch " + r + " with two faces,");
+        }
     }
 
     @Test
@@ -88,7 +97,13 @@ class SolidsAgreeTest {
         worst.forEach((what, difference) -> line.append(String.format(Locale.ROOT, " %s %.1e", what, difference)));
         System.out.println("elements against the solver, " + shapes + ": " + all.size() + " readings, worst" + line);
         assertEquals(8, worst.size());
-        List<Difference> apart = all.stream().filter(d -> !(d.off < AGREEMENT)).toList();
+        // A few bricks ask for more unknowns than they are given; what they are off by they state, which is another
+        // test's.
+        List<Difference> promised =
+                all.stream().filter(d -> d.stated < AGREEMENT).toList();
+        assertTrue(promised.size() > 0.98 * all.size(), promised.size() + " of " + all.size() + " promise as much");
+        List<Difference> apart =
+                promised.stream().filter(d -> !(d.off < AGREEMENT)).toList();
         assertTrue(apart.isEmpty(), () -> told(apart));
     }
 
@@ -168,7 +183,7 @@ class SolidsAgreeTest {
                 Field field = end.fields().get(j);
                 String where = phase + " grade " + j;
                 note(brick, "means", where, field.mean(), course.read(new Probe.Mean(j), k), inPieces);
-                note(brick, "cores", where, field.core(), course.read(new Probe.At(j, 0), k), inPieces);
+                note(brick, "cores", where, field.core(), course.read(new Probe.Core(j), k), inPieces);
                 note(brick, "depths", where, field.on(0.6), course.read(new Probe.At(j, 0.6), k), inPieces);
                 note(brick, "surfaces", where, field.wetted(), course.read(new Probe.Surface(j), k), inPieces);
                 note(brick, "highest", where, field.highest(), course.read(new Probe.Highest(j), k), inPieces);
@@ -196,20 +211,36 @@ class SolidsAgreeTest {
         List<Grade> lot = new ArrayList<>();
         for (Solid solid : batch.lot()) {
             List<Side> sides = solid.edges().stream()
-                    .map(edge -> new Side(AXES.get(edge.power()), edge.length(), edge.direction()))
+                    .map(edge -> edge.twoFaced()
+                            ? Side.betweenFaces(edge.length(), edge.direction())
+                            : new Side(AXES.get(edge.power()), edge.length(), edge.direction()))
                     .toList();
             lot.add(new Grade(sides, solid.volume(), solid.ease()));
         }
         return lot;
     }
 
+    private static Surfaces surfaces(Step step, List<Solid> lot) {
+        if (step.kind() == Kind.REST || lot.stream().noneMatch(Solid::isTwoFaced)) {
+            return FiniteVolumesAgreeTest.surfaces(
+                    step, lot.stream().map(Solid::coat).toList());
+        }
+        List<Surface> each = new ArrayList<>();
+        for (Solid solid : lot) {
+            Surface front = FiniteVolumesAgreeTest.surface(step, solid.coat());
+            each.add(
+                    solid.isTwoFaced()
+                            ? new Surface.Faces(FiniteVolumesAgreeTest.surface(step, solid.back()), front)
+                            : front);
+        }
+        return new Surfaces.ByGrade(each);
+    }
+
     static List<Stage> stages(Batch batch) {
         List<Stage> stages = new ArrayList<>();
         for (Phase phase : batch.phases()) {
             Step step = phase.step();
-            Surface surface = step.kind() == Kind.REST
-                    ? new Surface.Sealed()
-                    : step.open() ? new Surface.Open() : new Surface.Film(step.film());
+            Surfaces surfaces = surfaces(step, batch.lot());
             Surroundings around = switch (step.kind()) {
                 case REST -> new Surroundings.Rest();
                 case AIR -> new Surroundings.Air(step.content());
@@ -218,7 +249,7 @@ class SolidsAgreeTest {
                     new Surroundings.Vessel(step.volume(), step.content(), step.flow(), step.feed());
             };
             stages.add(new Stage(
-                    step.diffusivity(), step.partition(), surface, around, step.clinging(), new Grain(phase.grain())));
+                    step.diffusivity(), step.partition(), surfaces, around, step.clinging(), new Grain(phase.grain())));
         }
         return stages;
     }

@@ -18,26 +18,33 @@ final class Waves {
     final double[] uniform;
     /** Mean of what is at the nodes. */
     final double[] share;
-    /** Whether the surface is part of the bath. */
+    /** Whether some end is part of the bath. */
     final boolean open;
 
     /**
      * Finds the waves.
      *
+     * @param back the same as the next at the first node; 0 at a core
      * @param biot 0 where the surface is sealed, infinite where there is no film
      */
-    Waves(Ruler ruler, int power, double biot) {
+    Waves(Ruler ruler, int power, double back, double biot) {
         this.ruler = ruler;
-        open = Double.isInfinite(biot);
+        boolean openBack = Double.isInfinite(back);
+        boolean openFront = Double.isInfinite(biot);
+        open = openBack || openFront;
         int nodes = ruler.node.length;
-        int free = open ? nodes - 1 : nodes;
-        double[][] lower = lower(ruler.mass, free);
-        double[][] root = new double[ruler.root.length + 1][free];
+        int first = openBack ? 1 : 0;
+        int free = (openFront ? nodes - 1 : nodes) - first;
+        double[][] lower = lower(ruler.mass, first, free);
+        double[][] root = new double[ruler.root.length + 2][free];
         for (int i = 0; i < ruler.root.length; i++) {
-            System.arraycopy(ruler.root[i], 0, root[i], 0, free);
+            System.arraycopy(ruler.root[i], first, root[i], 0, free);
         }
-        if (!open) {
-            root[ruler.root.length][nodes - 1] = Math.sqrt(biot * (power + 1));
+        if (!openFront) {
+            root[ruler.root.length][free - 1] = Math.sqrt(biot * (power + 1));
+        }
+        if (!openBack) {
+            root[ruler.root.length + 1][0] = Math.sqrt(back);
         }
         for (double[] row : root) {
             forward(lower, row);
@@ -51,7 +58,7 @@ final class Waves {
             rate[n] = singular[n] * singular[n];
             backward(lower, vector[n]);
             for (int i = 0; i < free; i++) {
-                wave[i][n] = vector[n][i];
+                wave[first + i][n] = vector[n][i];
             }
         }
         part = new Array2DRowRealMatrix(wave, false)
@@ -70,11 +77,11 @@ final class Waves {
         }
     }
 
-    /** Cholesky's factor of the leading block. */
-    private static double[][] lower(double[][] mass, int size) {
+    /** Cholesky's factor of a block on the diagonal. */
+    private static double[][] lower(double[][] mass, int first, int size) {
         double[][] lower = new double[size][];
         for (int i = 0; i < size; i++) {
-            lower[i] = java.util.Arrays.copyOf(mass[i], i + 1);
+            lower[i] = java.util.Arrays.copyOfRange(mass[first + i], first, first + i + 1);
             for (int k = 0; k <= i; k++) {
                 for (int m = 0; m < k; m++) {
                     lower[i][k] -= lower[i][m] * lower[k][m];

@@ -99,7 +99,7 @@ final class Draw {
         return timed.with(new Stage(
                 stage.diffusivity(),
                 stage.partition(),
-                stage.surface(),
+                stage.surfaces(),
                 stage.surroundings(),
                 stage.clinging(),
                 grain));
@@ -161,7 +161,7 @@ final class Draw {
         return timed.with(new Stage(
                 stage.diffusivity(),
                 stage.partition(),
-                stage.surface(),
+                stage.surfaces(),
                 stage.surroundings(),
                 clinging,
                 stage.grain()));

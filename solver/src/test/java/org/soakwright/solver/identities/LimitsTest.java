@@ -127,7 +127,7 @@ class LimitsTest {
 
     /** Bi of a grade, no more than 1. */
     private static double cappedBiot(Timed step, Grade grade) {
-        return step.stage().surface() instanceof Surface.Film film
+        return step.stage().surfaces().of(0) instanceof Surface.Film film
                 ? Math.min(
                         1,
                         film.coefficient()

@@ -120,9 +120,9 @@ class LotTest {
     /** Sizes times a, volumes times a^3, times times a^2: Bi, V/S and Qt/V are kept. */
     private static Timed scaled(Timed step, double a) {
         Stage stage = step.stage();
-        Surface surface = stage.surface() instanceof Surface.Film film
+        Surface surface = stage.surfaces().of(0) instanceof Surface.Film film
                 ? new Surface.Film(film.coefficient() / a)
-                : stage.surface();
+                : stage.surfaces().of(0);
         Surroundings around = stage.surroundings() instanceof Surroundings.Vessel v
                 ? new Surroundings.Vessel(a * a * a * v.volume(), v.content(), a * v.flow(), v.feed())
                 : stage.surroundings();

@@ -215,7 +215,7 @@ class SolidsShapeTest {
                     return step.with(new Stage(
                             stage.diffusivity(),
                             stage.partition(),
-                            stage.surface(),
+                            stage.surfaces().of(0),
                             stage.surroundings(),
                             stage.clinging(),
                             new Grain(Arrays.asList(factors))));

@@ -72,7 +72,9 @@ class SpectrumTest {
                 continue;
             }
             Modes plain = new Modes(
-                    lot, new Conditions(DIFFUSIVITY, coupled.partition(), coupled.surface(), new Bath.Unlimited()));
+                    lot,
+                    new Conditions(
+                            DIFFUSIVITY, coupled.partition(), coupled.surfaces().of(0), new Bath.Unlimited()));
             Modes modes = new Modes(lot, coupled);
             double limit = PACE * draw.log(0.1, 10);
             while (limit < LIMIT) {

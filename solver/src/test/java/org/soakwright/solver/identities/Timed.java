@@ -16,7 +16,7 @@ record Timed(Stage stage, double seconds) {
 
     Timed with(Surroundings around) {
         return with(new Stage(
-                stage.diffusivity(), stage.partition(), stage.surface(), around, stage.clinging(), stage.grain()));
+                stage.diffusivity(), stage.partition(), stage.surfaces(), around, stage.clinging(), stage.grain()));
     }
 
     Timed lasting(double other) {

@@ -62,7 +62,8 @@ class FiniteShapesTest {
             return Chain.of(lot, new Start.Uniform(start), List.of(stage)).follow(seconds);
         }
         Surroundings bath = new Surroundings.Vessel(1, start / stage.partition(), 0, 0);
-        Stage still = new Stage(stage.diffusivity(), stage.partition(), stage.surface(), bath, 0);
+        Stage still = new Stage(
+                stage.diffusivity(), stage.partition(), stage.surfaces().of(0), bath, 0);
         return Chain.of(lot, new Start.Uniform(start), List.of(still, stage)).follow(seconds, seconds);
     }
 
