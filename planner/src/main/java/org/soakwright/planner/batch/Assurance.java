@@ -84,6 +84,11 @@ final class Assurance {
         return new Assurance(levels, others.clone(), ensemble);
     }
 
+    /** The same with an ensemble of its own, which another thread may follow. */
+    Assurance again(Batch stated) {
+        return new Assurance(levels, margins, ensemble == null ? null : new Ensemble(stated));
+    }
+
     /** The same, reading at stated values. */
     Assurance atStatedValues(double[] others) {
         return new Assurance(levels, others.clone(), null);

@@ -71,7 +71,8 @@ public final class Batch {
     /** The same with modes of its own, which another thread may ask for. */
     Batch again() {
         Physics own = Physics.of(recipe, physics.films(), physics.warming(), -1, false);
-        return new Batch(written, own, Held.TO_NOTHING, assurance);
+        Batch again = new Batch(written, own, Held.TO_NOTHING, assurance);
+        return again.held(assurance.again(again));
     }
 
     /** The same physics looked at for other targets. */

@@ -8,7 +8,7 @@ import java.util.Optional;
  * @param met whether every target is met, as judged
  */
 record Chosen(Run run, boolean met, Plan.Proof proof) {
-    private static final int MOST_ROUNDS = 6;
+    private static final int MOST_ROUNDS = 5;
 
     /** Rounds that find nothing within the targets before it is left at that. */
     private static final int MOST_MISSES = 2;

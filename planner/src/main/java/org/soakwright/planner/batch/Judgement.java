@@ -25,15 +25,20 @@ import org.soakwright.recipes.text.Unsound;
  * @param held what each requirement with a confidence is held to, in SI, comparable with the stated limit; NaN for others
  */
 record Judgement(Outlook outlook, double[] held) {
-    /** 20 rounds of 512: some ten thousand. */
     private static final int ROUNDS = 20;
 
-    private static final int PER_ROUND = 512;
+    /** 20 rounds of 512: some ten thousand. Fewer where all of them would take longer than the budget, down to 640. */
+    private static final int MOST_PER_ROUND = 512;
+
+    private static final int FEWEST_PER_ROUND = 32;
+
+    /** Processor time for all samples, microseconds, by {@link Run#effort}. */
+    private static final double BUDGET = 8e6;
 
     /** Where following is dear: in a sketch, in fewer rounds of fewer. */
     private static final int DEAR_ROUNDS = 8;
 
-    private static final int DEAR_PER_ROUND = 64;
+    private static final int DEAR_PER_ROUND = 32;
 
     /** Readings below this part of the largest have no logarithm worth explaining. */
     private static final double ABOVE_ZERO = 1e-9;
@@ -59,7 +64,9 @@ record Judgement(Outlook outlook, double[] held) {
             this.run = run;
             this.uncertainty = uncertainty;
             dear = run.batch().isDear();
-            draws = new Draws(uncertainty.size(), dear ? DEAR_ROUNDS : ROUNDS, dear ? DEAR_PER_ROUND : PER_ROUND);
+            draws = dear
+                    ? new Draws(uncertainty.size(), DEAR_ROUNDS, DEAR_PER_ROUND)
+                    : new Draws(uncertainty.size(), ROUNDS, perRound(run.effort()));
             requirements = run.batch().requirements();
             values = new double[requirements.size()][draws.size()];
             passes = new boolean[requirements.size()][draws.size()];
@@ -72,11 +79,18 @@ record Judgement(Outlook outlook, double[] held) {
             }
         }
 
+        private static int perRound(double effort) {
+            int perRound = MOST_PER_ROUND;
+            while (perRound > FEWEST_PER_ROUND && ROUNDS * perRound * effort > BUDGET) {
+                perRound /= 2;
+            }
+            return perRound;
+        }
+
         private void sample(int i, double[] seconds) {
             try {
-                Run own = run.batch()
-                        .sample(uncertainty.drawn(draws.normals(i)), dear)
-                        .follow(seconds);
+                Recipe drawn = uncertainty.drawn(draws.normals(i));
+                Run own = follow(drawn, seconds);
                 for (int r = 0; r < values.length; r++) {
                     Requirement requirement = own.batch().requirements().get(r);
                     double value = own.stated(requirement);
@@ -86,6 +100,18 @@ record Judgement(Outlook outlook, double[] held) {
             } catch (Unsound impossible) {
                 refusals[i] = impossible;
             }
+        }
+
+        private Run follow(Recipe drawn, double[] seconds) {
+            if (dear) {
+                try {
+                    return run.batch().sample(drawn, true).follow(seconds);
+                } catch (Unsound blurred) {
+                    // Too short for a sketch is not yet too short.
+                    return run.batch().sample(drawn, false).follow(seconds);
+                }
+            }
+            return run.batch().sample(drawn, false).follow(seconds);
         }
 
         Judgement judged() {

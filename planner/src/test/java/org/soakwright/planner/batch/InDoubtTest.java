@@ -330,4 +330,43 @@ class InDoubtTest {
         assertEquals("salt mean with 99 % confidence, large", miss.target().name());
         assertTrue(plan.run().outlook().orElseThrow().all().value() < 0.99);
     }
+
+    /** At the end the band is what the outlook tells, found on fewer samples; all along it holds the reading at stated values. */
+    @Test
+    void bandsEndAtThePercentiles() {
+        Recipe recipe = several("  - {species: salt, reading: mean, at-most: 30 g/kg}");
+        Run run = new Batch(recipe).follow(4 * HOUR, 6 * HOUR).judged(Progress.NONE);
+        Trace trace = Trace.of(run, 2);
+        Bands bands = Bands.of(trace).orElseThrow();
+        for (TargetState state : EachGrade.of(run)) {
+            Bands.Band band = bands.of(state);
+            double[] course = trace.course(state);
+            int end = course.length - 1;
+            List<Double> percentiles = run.outlook().orElseThrow().of(state).orElseThrow().percentiles();
+            assertEquals(percentiles.get(0), band.low()[end], 0.02 * percentiles.get(0));
+            assertEquals(percentiles.get(2), band.high()[end], 0.02 * percentiles.get(2));
+            for (int i = 0; i <= end; i++) {
+                assertTrue(band.low()[i] < course[i] && course[i] < band.high()[i]);
+            }
+        }
+    }
+
+    /** The same batch followed again by another thread is judged the same, and so are other durations. */
+    @Test
+    void aRunAgainIsHeldToTheSame() {
+        Run run = new Batch(several("  - {species: salt, reading: mean, at-most: 30 g/kg, confidence: 90 %}"))
+                .follow(4 * HOUR, 6 * HOUR)
+                .judged(Progress.NONE);
+        Run again = run.again();
+        assertEquals(run.targets(), again.targets());
+        assertEquals(run.outlook(), again.outlook());
+        assertEquals(
+                run.batch().follow(5 * HOUR, 6 * HOUR).targets(),
+                again.batch().follow(5 * HOUR, 6 * HOUR).targets());
+        // Followed anew, the margin makes the ensemble read what was judged.
+        assertEquals(
+                run.targets().get(0).value(),
+                run.batch().follow(4 * HOUR, 6 * HOUR).targets().get(0).value(),
+                1e-9);
+    }
 }
