@@ -342,7 +342,8 @@ class InDoubtTest {
             Bands.Band band = bands.of(state);
             double[] course = trace.course(state);
             int end = course.length - 1;
-            List<Double> percentiles = run.outlook().orElseThrow().of(state).orElseThrow().percentiles();
+            List<Double> percentiles =
+                    run.outlook().orElseThrow().of(state).orElseThrow().percentiles();
             assertEquals(percentiles.get(0), band.low()[end], 0.02 * percentiles.get(0));
             assertEquals(percentiles.get(2), band.high()[end], 0.02 * percentiles.get(2));
             for (int i = 0; i <= end; i++) {
