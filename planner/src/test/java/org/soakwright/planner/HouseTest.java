@@ -22,6 +22,8 @@ class HouseTest {
             .definedBy("org.soakwright.planner.report..")
             .layer("batch")
             .definedBy("org.soakwright.planner.batch..")
+            .layer("conditions")
+            .definedBy("org.soakwright.planner.conditions..")
             .layer("recipes")
             .definedBy("org.soakwright.recipes..")
             .layer("solver")
@@ -32,10 +34,12 @@ class HouseTest {
             .mayOnlyBeAccessedByLayers("cli")
             .whereLayer("batch")
             .mayOnlyBeAccessedByLayers("report", "cli")
-            .whereLayer("recipes")
+            .whereLayer("conditions")
             .mayOnlyBeAccessedByLayers("batch", "report", "cli")
+            .whereLayer("recipes")
+            .mayOnlyBeAccessedByLayers("conditions", "batch", "report", "cli")
             .whereLayer("solver")
-            .mayOnlyBeAccessedByLayers("batch");
+            .mayOnlyBeAccessedByLayers("conditions", "batch");
 
     @ArchTest
     static final ArchRule recipesAndSolverDoNotKnowEachOther = noClasses()

@@ -29,11 +29,7 @@ class GuideTest {
             species:
             SPECIES
             steps:
-              - soak: first water
-                liquor: {ratio: 3 L/kg, salt: 0 g/L}
-                temperature: 4 Cel
-                film: negligible
-                time: 9 h
+            STEPS
             targets:
             TARGETS
             """;
@@ -52,10 +48,13 @@ class GuideTest {
 
     private static String whole(Block block) {
         String wheel = "- {shape: short-cylinder, diameter: 250 mm, length: 95 mm}";
-        String salt = "salt: {start: 190 g/kg, diffusivity: 8e-10 m2/s, partition: 0.8}";
+        String salt = "salt: {start: 190 g/kg, diffusivity: 8e-10 m2/s, partition: 0.8, substance: sodium chloride}";
+        String step = "- soak: first water\n  liquor: {ratio: 3 L/kg, others: 0}\n  temperature: 4 Cel\n"
+                + "  film: negligible\n  time: 9 h";
         String target = "- {species: salt, reading: mean, at-most: 24 g/kg}";
         return FRAME.replace("PIECES", part(block, "pieces", wheel))
                 .replace("SPECIES", part(block, "species", salt))
+                .replace("STEPS", part(block, "steps", step))
                 .replace("TARGETS", part(block, "targets", target));
     }
 
@@ -80,6 +79,6 @@ class GuideTest {
                     () -> Recipes.read(recipe).toString());
             read++;
         }
-        assertEquals(5, read, "one recipe and four parts");
+        assertEquals(8, read, "two recipes and six parts");
     }
 }

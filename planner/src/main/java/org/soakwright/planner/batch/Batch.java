@@ -2,9 +2,13 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
+import org.soakwright.planner.conditions.Known;
+import org.soakwright.planner.conditions.Lag;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
+import org.soakwright.recipes.model.Target;
 import org.soakwright.recipes.model.Time;
 import org.soakwright.recipes.text.Unsound;
 import org.soakwright.solver.chain.Chain;
@@ -17,22 +21,26 @@ import org.soakwright.solver.chain.StageTooShort;
  * threads at once.
  */
 public final class Batch {
+    private final Recipe written;
+    private final Physics physics;
     private final Recipe recipe;
     private final List<Translation.Slot> slots;
     private final List<Chain> chains;
     private final List<Classes> classes;
     private final int[] lastStage;
+    private final int[] firstStage;
     private final Cost cost;
     private final List<Requirement> requirements;
+    private final Assurance assurance;
     private long evaluations;
 
     /**
      * Prepares a recipe.
      *
-     * @throws Unsound where it asks for something that is not computed yet
+     * @throws Unsound where it asks for something that is not computed yet, or does not tell enough
      */
     public Batch(Recipe recipe) {
-        this(recipe, new Translation(recipe).chains(-1));
+        this(recipe, Physics.of(recipe, StepTimes.nominal(recipe), -1, false), Held.AS_ASKED, null);
     }
 
     /**
@@ -41,21 +49,83 @@ public final class Batch {
      * @param endless the grade whose pieces are taken for endless in all but their shortest side; -1 for none
      */
     static Batch sketch(Recipe recipe, int endless) {
-        return new Batch(
-                recipe,
-                new Translation(recipe)
-                        .chains(endless).stream().map(Chain::sketch).toList());
+        Physics physics = Physics.of(recipe, StepTimes.nominal(recipe), endless, true);
+        return new Batch(recipe, physics, Held.AT_STATED_VALUES, null);
     }
 
-    private Batch(Recipe recipe, List<Chain> chains) {
-        Warming.of(recipe);
-        this.recipe = recipe;
-        this.chains = chains;
+    /**
+     * A sample of what is not known exactly: every value is known, and no confidence asked for. What moves still liquor and what warming is
+     * worth were found at stated values.
+     */
+    Batch sample(Recipe drawn, boolean sketched) {
+        Recipe known = Known.of(drawn).recipe();
+        Physics sampled = Physics.of(known, physics.films().again(known), physics.warming(), -1, sketched);
+        return new Batch(drawn, sampled, Held.TO_NOTHING, null);
+    }
+
+    /** The same with the density that moves a still liquor found from steps of these durations. */
+    Batch resettled(double[] seconds) {
+        return new Batch(written, Physics.of(written, seconds, -1, false), Held.TO_NOTHING, assurance);
+    }
+
+    /** The same with modes of its own, which another thread may ask for. */
+    Batch again() {
+        Physics own = Physics.of(recipe, physics.films(), physics.warming(), -1, false);
+        Batch again = new Batch(written, own, Held.TO_NOTHING, assurance);
+        return again.held(assurance.again(again));
+    }
+
+    /** The same physics looked at for other targets. */
+    Batch withTargets(List<Target> targets) {
+        Physics own = Physics.of(recipe.withTargets(targets), physics.films(), physics.warming(), -1, false);
+        return new Batch(written.withTargets(targets), own, Held.AS_ASKED, null);
+    }
+
+    /**
+     * What the solver is given.
+     *
+     * @param recipe in the bases that are computed in
+     */
+    private record Physics(Recipe recipe, Films films, Warming warming, List<Chain> chains) {
+        static Physics of(Recipe written, double[] seconds, int endless, boolean sketched) {
+            Recipe known = Known.of(written).recipe();
+            return of(known, Films.of(known, seconds), Warming.of(known), endless, sketched);
+        }
+
+        static Physics of(Recipe known, Films films, Warming warming, int endless, boolean sketched) {
+            List<Chain> chains = new Translation(known, films).chains(endless);
+            List<Chain> used = sketched ? chains.stream().map(Chain::sketch).toList() : chains;
+            return new Physics(known, films, warming, used);
+        }
+
+        Physics with(Recipe other) {
+            return new Physics(other, films, warming, chains);
+        }
+    }
+
+    /** What requirements with a confidence are held to. */
+    private enum Held {
+        AS_ASKED,
+        AT_STATED_VALUES,
+        TO_NOTHING
+    }
+
+    private Batch(Recipe written, Physics physics, Held held, @Nullable Assurance known) {
+        this.written = written;
+        this.physics = physics;
+        recipe = physics.recipe();
+        chains = physics.chains();
         classes = recipe.species().stream()
                 .map(species -> Classes.of(recipe, species))
                 .toList();
-        slots = new Translation(recipe).slots();
+        slots = new Translation(recipe, physics.films()).slots();
         lastStage = new int[recipe.steps().size()];
+        firstStage = new int[recipe.steps().size()];
+        for (int k = slots.size() - 1; k >= 0; k--) {
+            if (slots.get(k).part() > 0) {
+                firstStage[slots.get(k).step()] = k;
+            }
+        }
         for (int k = 0; k < slots.size(); k++) {
             if (slots.get(k).part() > 0) {
                 lastStage[slots.get(k).step()] = k;
@@ -63,16 +133,56 @@ public final class Batch {
         }
         cost = new Cost(recipe);
         requirements = Requirements.of(this);
+        assurance = known != null
+                ? known
+                : held == Held.TO_NOTHING
+                        ? Assurance.none(requirements.size())
+                        : Assurance.of(this, held == Held.AT_STATED_VALUES || isDear());
+    }
+
+    /** Whether following once takes milliseconds. */
+    boolean isDear() {
+        return chains.stream().anyMatch(chain -> chain.sketch() != chain);
+    }
+
+    /** What requirements with a confidence are held to. */
+    Assurance assurance() {
+        return assurance;
+    }
+
+    /** The same, held otherwise. */
+    Batch held(Assurance other) {
+        return new Batch(written, physics, Held.TO_NOTHING, other);
+    }
+
+    /** Where a requirement stands among all. */
+    int index(Requirement requirement) {
+        for (int r = 0; r < requirements.size(); r++) {
+            if (requirements.get(r) == requirement) {
+                return r;
+            }
+        }
+        return requirements.indexOf(requirement);
     }
 
     /** The same physics with other times to choose from; what was found of it is shared. */
     Batch retimed(List<Time> times) {
-        List<Step> steps = new ArrayList<>();
+        Physics same = physics.with(recipe.withSteps(timed(recipe.steps(), times)));
+        return new Batch(written.withSteps(timed(written.steps(), times)), same, Held.TO_NOTHING, assurance);
+    }
+
+    private static List<Step> timed(List<Step> steps, List<Time> times) {
+        List<Step> timed = new ArrayList<>();
         for (int i = 0; i < times.size(); i++) {
-            Step step = recipe.steps().get(i);
-            steps.add(step.with(step.head().withTime(times.get(i))));
+            Step step = steps.get(i);
+            timed.add(step.with(step.head().withTime(times.get(i))));
         }
-        return new Batch(recipe.withSteps(steps), chains);
+        return timed;
+    }
+
+    /** As it was written; {@link #recipe} has the same in the bases that are computed in. */
+    Recipe written() {
+        return written;
     }
 
     public Recipe recipe() {
@@ -102,14 +212,62 @@ public final class Batch {
         }
         List<Course> courses = new ArrayList<>(chains.size());
         for (int s = 0; s < chains.size(); s++) {
+            double[] own = effective(s, seconds);
             try {
-                chains.get(s).require(seconds);
-                courses.add(chains.get(s).follow(seconds));
+                chains.get(s).require(own);
+                courses.add(chains.get(s).follow(own));
             } catch (StageTooShort tooShort) {
                 throw tooShort(tooShort, s, seconds);
             }
         }
         return new Run(this, stepSeconds.clone(), courses);
+    }
+
+    /**
+     * What the stages last for one species, whose diffusivity is that of a step's temperature though the pieces come to it colder or warmer.
+     *
+     * @param seconds of the first stages by the clock
+     */
+    double[] effective(int species, double[] seconds) {
+        double[] own = seconds.clone();
+        for (int k = 0; k < own.length; k++) {
+            own[k] = lag(species, k).effective(seconds[k]);
+        }
+        return own;
+    }
+
+    /** How the time of a stage differs for a species. */
+    Lag lag(int species, int stage) {
+        int step = slots.get(stage).step();
+        return stage == firstStage[step] ? physics.warming().lag(species, step) : Lag.NONE;
+    }
+
+    Films films() {
+        return physics.films();
+    }
+
+    /** Derivatives by the durations of stages, as derivatives by those of the steps that the stages belong to. */
+    double[] byStep(int species, double[] byStage, double[] stageSeconds) {
+        double[] byStep = new double[recipe.steps().size()];
+        for (int k = 0; k < byStage.length; k++) {
+            Translation.Slot slot = slots.get(k);
+            byStep[slot.step()] += slot.part() * lag(species, k).rate(stageSeconds[k]) * byStage[k];
+        }
+        return byStep;
+    }
+
+    /** What a requirement reads off a state of this batch at stated values, in SI; totals are none. */
+    static double read(Requirement requirement, State state) {
+        if (requirement instanceof Requirement.OfState ofState) {
+            return ofState.measure().read(state).value();
+        }
+        Requirement.OfContent content = (Requirement.OfContent) requirement;
+        return content.gauge().value(state.courses().get(content.species()), state.stage());
+    }
+
+    /** What is said of pieces that come to a step from another temperature. */
+    List<String> warming() {
+        return physics.warming().said();
     }
 
     private Unsound tooShort(StageTooShort cause, int species, double[] seconds) {

@@ -66,7 +66,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
         List<Batch> others = new ArrayList<>();
         for (double factor : FACTORS) {
             // What an advice for a deviation of a fifth needs is good enough in a sketch.
-            others.add(Batch.sketch(withDiffusivity(recipe, watched.get(), factor), -1));
+            others.add(run.holding(Batch.sketch(withDiffusivity(recipe, watched.get(), factor), -1)));
         }
         for (int i = 0; i < recipe.steps().size(); i++) {
             Step step = recipe.steps().get(i);
@@ -100,7 +100,8 @@ public record Checkpoint(int step, double seconds, String species, double expect
         double factor = 1 + share * (explained.factor() - 1);
         Recipe recipe = run.batch().recipe();
         Species watched = recipe.species(species).orElseThrow();
-        Run other = Batch.sketch(withDiffusivity(recipe, watched, factor), -1).follow(run.seconds());
+        Run other = run.holding(Batch.sketch(withDiffusivity(recipe, watched, factor), -1))
+                .follow(run.seconds());
         return other.batch().requirements().stream()
                 .filter(requirement -> !other.meets(requirement))
                 .max(Comparator.comparingDouble(other::miss))
@@ -144,7 +145,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
             upTo[k] = batch.slots().get(k).seconds(stepSeconds);
         }
         upTo[stage] = seconds - fill * each;
-        return batch.chain(s).follow(upTo).value(new Probe.Liquor(), stage);
+        return batch.chain(s).follow(batch.effective(s, upTo)).value(new Probe.Liquor(), stage);
     }
 
     private static Deviation deviation(Run run, Batch other, int step, double seconds, double reading, double factor) {
@@ -210,17 +211,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
         List<Step> steps = recipe.steps().stream()
                 .map(step -> Rescaled.step(step, changed.name(), factor))
                 .toList();
-        return new Recipe(
-                recipe.place(),
-                recipe.title(),
-                recipe.products(),
-                recipe.lot(),
-                species,
-                recipe.between(),
-                steps,
-                recipe.targets(),
-                recipe.minimise(),
-                recipe.prices());
+        return recipe.with(species, steps);
     }
 
     private static Species faster(Species species, double factor) {

@@ -59,7 +59,7 @@ final class Classes {
         double size = sigma(grade.spread());
         double ease = sigma(species.diffusivityVaries());
         double start = sigma(species.startVaries());
-        if (ease > 0 && !anyFilm(recipe)) {
+        if (ease > 0 && !anyFilm(recipe, species)) {
             // Without a film only D/L^2 counts, so that pieces in which the solute is slow are as good as larger ones.
             size = Math.hypot(size, ease / 2);
             ease = 0;
@@ -70,14 +70,14 @@ final class Classes {
         int ofStart = put(variations, start, true);
         Population population = new Population(lot.size(), grade.share(), variations);
         populations.add(population);
-        List<Side> sides = Translation.sides(grade);
+        List<Side> sides = Translation.sides(grade, species);
         double volume = recipe.lot().volumeM3() * grade.share();
         for (int i = 0; i < population.count(); i++) {
             double larger = factor(population, i, ofSize);
             List<Side> scaled = sides.stream().map(side -> side.scaled(larger)).toList();
             lot.add(new org.soakwright.solver.shape.Grade(
                     scaled, population.weight(i) * volume, factor(population, i, ofEase)));
-            starts.add(Translation.start(recipe, species, factor(population, i, ofStart)));
+            starts.add(Translation.start(recipe, species, grade, factor(population, i, ofStart)));
         }
     }
 
@@ -97,10 +97,12 @@ final class Classes {
         return variation < 0 ? 1 : population.variations().get(variation).factor(population.node(index, variation));
     }
 
-    private static boolean anyFilm(Recipe recipe) {
-        return recipe.steps().stream()
-                .anyMatch(step -> (step instanceof Step.Wet wet && wet.film() instanceof Film.Coefficient)
-                        || (step instanceof Step.Dry dry && dry.film() instanceof Film.Coefficient));
+    private static boolean anyFilm(Recipe recipe, Species species) {
+        return species.traits().skin() != null
+                || !species.traits().skins().isEmpty()
+                || recipe.steps().stream()
+                        .anyMatch(step -> (step instanceof Step.Wet wet && !(wet.film() instanceof Film.Negligible))
+                                || (step instanceof Step.Dry dry && !(dry.film() instanceof Film.Negligible)));
     }
 
     /** What the pieces hold on average of a start content that varies, over its median. */

@@ -1,5 +1,6 @@
 package org.soakwright.planner.batch;
 
+import org.soakwright.recipes.model.Counted;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Recipe;
@@ -22,10 +23,15 @@ final class Convexity {
             return false;
         }
         for (Target target : recipe.targets()) {
+            if (recipe.confidence(target).isPresent()) {
+                // A percentile over samples is no sum of exponentials.
+                return false;
+            }
             if (target instanceof Target.OfPieces pieces) {
                 Species species = recipe.species(pieces.species().name()).orElseThrow();
                 boolean mean = pieces.reading() == org.soakwright.recipes.model.Reading.MEAN
                         && pieces.limits().atLeast() == null
+                        && pieces.counted().equals(Counted.AS_LOADED)
                         // A share's percentile belongs to other pieces as durations change: no sum of exponentials.
                         && pieces.share() == null;
                 if (!mean
@@ -53,6 +59,11 @@ final class Convexity {
     }
 
     private static boolean oneBiot(Recipe recipe, Species species) {
+        boolean skins =
+                species.traits().skin() != null || !species.traits().skins().isEmpty();
+        if (skins || recipe.steps().stream().anyMatch(step -> ((Step.Wet) step).film() instanceof Film.Computed)) {
+            return false;
+        }
         double[] ratios = recipe.steps().stream()
                 .mapToDouble(step -> ((Step.Wet) step).film() instanceof Film.Coefficient film
                         ? film.value().si()

@@ -131,6 +131,15 @@ final class Grid {
         return values;
     }
 
+    /** Durations of the free steps, from those of all. */
+    double[] free(double[] seconds) {
+        double[] values = new double[size()];
+        for (int a = 0; a < values.length; a++) {
+            values[a] = seconds[step(a)];
+        }
+        return values;
+    }
+
     /** Durations of all steps, from those of the free ones. */
     double[] seconds(double[] freeSeconds) {
         double[] seconds = fixed.clone();

@@ -3,7 +3,7 @@ package org.soakwright.planner.batch;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
-import org.soakwright.recipes.model.Film;
+import org.soakwright.planner.conditions.Known;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Renewal;
@@ -41,23 +41,29 @@ public final class Groups {
 
     /** Every group, in the order of steps, then species, then grades. */
     public static List<Group> of(Recipe recipe) {
+        Recipe known = Known.of(recipe).recipe();
+        Films films = Films.of(known, StepTimes.nominal(known));
+        return of(known, films);
+    }
+
+    private static List<Group> of(Recipe recipe, Films films) {
         double[] shortest = StepTimes.shortest(recipe);
         double[] longest = StepTimes.longest(recipe);
-        List<Grade> lot = new Translation(recipe).lot();
+        List<Grade> lot = new Translation(recipe, films).lot();
         List<Group> groups = new ArrayList<>();
         for (int i = 0; i < recipe.steps().size(); i++) {
             Step step = recipe.steps().get(i);
             for (Species species : recipe.species()) {
-                // Neither the pace nor the Biot number asks about the bath.
-                Conditions conditions = new Conditions(
-                        Translation.diffusivity(species, step),
-                        step instanceof Step.Dry ? 1 : Translation.partition(species, step),
-                        surface(species, step),
-                        new Bath.Unlimited(),
-                        Translation.grain(species, step));
                 OptionalDouble ratio = capacityRatio(recipe, species, step);
                 for (int j = 0; j < lot.size(); j++) {
                     Grade grade = lot.get(j);
+                    // Neither the pace nor the Biot number asks about the bath.
+                    Conditions conditions = new Conditions(
+                            Translation.diffusivity(species, step),
+                            step instanceof Step.Dry ? 1 : Translation.partition(species, step),
+                            exchanges(species, step) ? films.surface(i, species, j) : new Surface.Sealed(),
+                            new Bath.Unlimited(),
+                            Translation.grain(species, step));
                     int side = grade.shortest();
                     double biot = conditions.biot(grade, side);
                     double low = conditions.pace(grade, side) * shortest[i];
@@ -85,20 +91,9 @@ public final class Groups {
         return ways;
     }
 
-    private static Surface surface(Species species, Step step) {
-        if (step instanceof Step.Wet wet && species.exchangesWith(Medium.LIQUOR)) {
-            return behind(wet.film());
-        }
-        if (step instanceof Step.Dry dry && species.exchangesWith(Medium.AIR)) {
-            return behind(dry.film());
-        }
-        return new Surface.Sealed();
-    }
-
-    private static Surface behind(Film film) {
-        return film instanceof Film.Coefficient coefficient
-                ? new Surface.Film(coefficient.value().si())
-                : new Surface.Open();
+    private static boolean exchanges(Species species, Step step) {
+        return (step instanceof Step.Wet && species.exchangesWith(Medium.LIQUOR))
+                || (step instanceof Step.Dry && species.exchangesWith(Medium.AIR));
     }
 
     private static OptionalDouble capacityRatio(Recipe recipe, Species species, Step step) {

@@ -24,6 +24,11 @@ public record Plan(
         Optional<NearestMiss> nearestMiss,
         List<Remedy> remedies) {
 
+    /** Cautions that forbid to use the plan until somebody answers for it; empty for a plan that may be used. */
+    public List<String> stops() {
+        return Cautions.of(run).stops();
+    }
+
     /** How far a claim of optimality reaches. */
     public enum Claim {
         /** No choice on the grid is better: shown by bounds that hold for the whole range. */
@@ -42,7 +47,11 @@ public record Plan(
      * @param bound no choice takes fewer seconds; empty where that is not proven or time is not what is minimised
      * @param evaluations times the recipe was followed
      */
-    public record Proof(Claim claim, int starts, int agreed, OptionalDouble bound, long evaluations) {}
+    public record Proof(Claim claim, int starts, int agreed, OptionalDouble bound, long evaluations) {
+        Proof after(long allEvaluations) {
+            return new Proof(claim, starts, agreed, bound, allEvaluations);
+        }
+    }
 
     /** Change of a reading, in the target's unit, when a step lasts one hour more and all else is as planned. */
     public record PerHour(String step, String reading, double change, String unit) {}

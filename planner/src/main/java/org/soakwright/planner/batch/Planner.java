@@ -23,13 +23,16 @@ public final class Planner {
 
     private static final int MOST_NUDGES = 400;
 
+    /** Choices made again for films that belong to other durations. */
+    private static final int MOST_ROUNDS = 5;
+
     private final Batch batch;
     private final Grid grid;
     private final Merit merit;
     private final Landscape landscape;
     private final Progress progress;
 
-    private Planner(Batch batch, Progress progress) {
+    Planner(Batch batch, Progress progress) {
         this.progress = progress;
         this.batch = batch;
         grid = new Grid(batch.recipe());
@@ -46,32 +49,61 @@ public final class Planner {
      * @throws org.soakwright.recipes.text.Unsound when a step is too short to be computed
      */
     public static Plan plan(Recipe recipe, Progress progress) {
-        Planner planner = new Planner(new Batch(recipe), progress);
-        Choice choice = planner.choose();
-        Run run = planner.landscape.run(choice.free());
-        boolean met = choice.met();
-        Explanation explanation = new Explanation(planner.batch, planner.grid, run);
-        List<String> binds = met ? explanation.binding() : explanation.missed();
+        Chosen chosen = settled(new Batch(recipe), progress);
+        Run run = chosen.run();
+        Explanation explanation = new Explanation(run.batch(), new Grid(recipe), run);
+        List<String> binds = chosen.met() ? explanation.binding() : explanation.missed();
         return new Plan(
                 run,
-                met,
-                choice.proof(),
-                met ? binds : List.of(),
+                chosen.met(),
+                chosen.proof(),
+                chosen.met() ? binds : List.of(),
                 explanation.perHour(binds),
-                met ? Optional.empty() : explanation.nearestMiss(),
-                met ? List.of() : Remedies.of(recipe, progress));
+                chosen.met() ? Optional.empty() : explanation.nearestMiss(),
+                chosen.met() ? List.of() : Remedies.of(run, progress));
     }
 
-    /** Only the choice, without explanations; empty where no choice meets the targets. */
+    /**
+     * Where the liquor is moved by its own density, its film belongs to steps of certain durations: chosen again until the durations are
+     * those the film belongs to, or the next would be within a grain.
+     */
+    private static Chosen settled(Batch batch, Progress progress) {
+        Chosen chosen = Chosen.of(batch, progress);
+        for (int round = 0; round < MOST_ROUNDS && batch.films().anyDriven(); round++) {
+            double[] seconds = chosen.run().seconds();
+            Chosen next = Chosen.of(batch.resettled(seconds), progress);
+            boolean rests = Arrays.equals(next.run().seconds(), seconds);
+            chosen = next;
+            if (rests) {
+                break;
+            }
+        }
+        return chosen;
+    }
+
+    /** Only the choice, without explanations or judgement; empty where no choice meets the targets. */
     static Optional<Run> best(Batch batch) {
         Planner planner = new Planner(batch, Progress.NONE);
         Choice choice = planner.choose();
         return choice.met() ? Optional.of(planner.landscape.run(choice.free())) : Optional.empty();
     }
 
-    private record Choice(double[] free, boolean met, Plan.Proof proof) {}
+    /** The same; targets with a confidence are met as judged by many samples. */
+    static Optional<Run> sure(Batch batch) {
+        if (!batch.assurance().any()) {
+            return best(batch);
+        }
+        Optional<Run> promising = best(batch);
+        return promising.isPresent() ? Chosen.of(batch, Progress.NONE).ifMet() : promising;
+    }
 
-    private Choice choose() {
+    record Choice(double[] free, boolean met, Plan.Proof proof) {}
+
+    Run run(Choice choice) {
+        return landscape.run(choice.free());
+    }
+
+    Choice choose() {
         progress.at("choosing durations", 0);
         if (grid.points() <= WholeGrid.MOST_POINTS) {
             Found found = WholeGrid.best(grid, landscape, merit);
@@ -162,8 +194,18 @@ public final class Planner {
         return OptionalDouble.of(run.totals().seconds() - slack * merit.span(0));
     }
 
+    /** Of a percentile over samples nothing is proven, whatever was gone through. */
     private Choice choice(Found found, Plan.Claim claim, int starts, int agreed, OptionalDouble bound) {
-        return new Choice(found.free(), found.met(), new Plan.Proof(claim, starts, agreed, bound, batch.evaluations()));
+        boolean sampled = batch.assurance().any();
+        return new Choice(
+                found.free(),
+                found.met(),
+                new Plan.Proof(
+                        sampled ? Plan.Claim.LOCAL : claim,
+                        starts,
+                        agreed,
+                        sampled ? OptionalDouble.empty() : bound,
+                        batch.evaluations()));
     }
 
     /** The place with most room: from the longest durations and the middle; from every start where none met the targets. */

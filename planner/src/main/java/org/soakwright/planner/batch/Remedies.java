@@ -29,17 +29,20 @@ final class Remedies {
     private static final int MOST_FILLS_ADDED = 3;
 
     private final Recipe recipe;
+    private final Run miss;
     private final Progress progress;
     private final List<Plan.Remedy> found = new ArrayList<>();
     private double share;
 
-    private Remedies(Recipe recipe, Progress progress) {
-        this.recipe = recipe;
+    private Remedies(Run miss, Progress progress) {
+        this.miss = miss;
+        recipe = miss.batch().recipe();
         this.progress = progress;
     }
 
-    static List<Plan.Remedy> of(Recipe recipe, Progress progress) {
-        Remedies remedies = new Remedies(recipe, progress);
+    /** Of the nearest miss. */
+    static List<Plan.Remedy> of(Run miss, Progress progress) {
+        Remedies remedies = new Remedies(miss, progress);
         List<Runnable> kinds = List.of(
                 remedies::longer,
                 remedies::finer,
@@ -58,7 +61,7 @@ final class Remedies {
     private boolean offer(String kind, Supplier<Recipe> change, Function<Run, String> words, String caution) {
         progress.at("looking for a remedy", share);
         try {
-            Optional<Run> run = Planner.best(new Batch(change.get()));
+            Optional<Run> run = Planner.sure(miss.holding(new Batch(change.get())));
             run.ifPresent(met -> found.add(new Plan.Remedy(kind, words.apply(met), met.totals(), caution)));
             return run.isPresent();
         } catch (Unsound impossible) {
@@ -182,15 +185,7 @@ final class Remedies {
         for (int i = 1; i <= added; i++) {
             Step step = steps.get(index);
             StepHead head = step.head();
-            steps.add(
-                    index + i,
-                    step.with(new StepHead(
-                            head.place(),
-                            unused(head.name() + " again", steps),
-                            head.time(),
-                            head.temperature(),
-                            head.overrides(),
-                            head.price())));
+            steps.add(index + i, step.with(head.withName(unused(head.name() + " again", steps))));
         }
         return recipe.withSteps(steps);
     }
@@ -291,17 +286,7 @@ final class Remedies {
         if (others.size() == recipe.targets().size()) {
             return;
         }
-        Recipe changed = new Recipe(
-                recipe.place(),
-                recipe.title(),
-                recipe.products(),
-                recipe.lot(),
-                recipe.species(),
-                recipe.between(),
-                recipe.steps(),
-                others,
-                recipe.minimise(),
-                recipe.prices());
+        Recipe changed = recipe.withTargets(others);
         offer("total", () -> changed, run -> "allow totals of " + totals(run), "");
     }
 

@@ -19,6 +19,9 @@ sealed interface Requirement {
     record OfContent(int target, int species, int stage, Gauge gauge, double limit, boolean upper, double scale)
             implements Requirement {}
 
+    /** What is worked out of several readings, or of the mass, at the end of a stage; limit and scale alike. */
+    record OfState(int target, int stage, Measure measure, double limit, boolean upper) implements Requirement {}
+
     /**
      * What a total adds up to: linear in the durations, and so is its miss. A total is a sum of what was written, so equal to the
      * limit is within it, rounding or not.
@@ -42,6 +45,25 @@ sealed interface Requirement {
         }
     }
 
+    /** The grade read, from 0; -1 where it is the lot, a liquor or a total. */
+    default int grade() {
+        if (this instanceof OfState state) {
+            return state.measure().grade();
+        }
+        return this instanceof OfContent content ? content.gauge().grade() : -1;
+    }
+
+    /** The stage at whose end it is read; -1 for a total. */
+    default int stage() {
+        return -1;
+    }
+
+    /** Whether it is read off the pieces, and not off a liquor or a clock. */
+    default boolean ofPieces() {
+        return this instanceof OfState
+                || (this instanceof OfContent content && !(content.gauge() instanceof Gauge.OfLiquor));
+    }
+
     double KNEE = 0.01;
 
     /** Of the largest content met: what rounding may make of a value that is just the limit. */
@@ -52,7 +74,7 @@ sealed interface Requirement {
         if (this instanceof OfTotal) {
             return miss(value) <= 0;
         }
-        double slack = this instanceof OfContent content ? ROUNDING * content.scale() : 0;
+        double slack = this instanceof OfContent content ? ROUNDING * content.scale() : ROUNDING * limit();
         return upper() ? value <= limit() + slack : value >= limit() - slack;
     }
 

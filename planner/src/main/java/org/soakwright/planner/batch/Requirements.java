@@ -3,16 +3,22 @@ package org.soakwright.planner.batch;
 import java.util.ArrayList;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
+import org.soakwright.planner.conditions.Strengths;
 import org.soakwright.recipes.model.Basis;
 import org.soakwright.recipes.model.Content;
+import org.soakwright.recipes.model.Counted;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.GradeScope;
 import org.soakwright.recipes.model.Limits;
-import org.soakwright.recipes.model.Liquor;
+import org.soakwright.recipes.model.Phase;
 import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Reference;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
+import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Unsound;
 import org.soakwright.solver.chain.Stage;
 
 /** Targets taken apart into requirements on single numbers. */
@@ -37,18 +43,17 @@ final class Requirements {
     private void add(int index, Target target) {
         if (target instanceof Target.OfTotal total) {
             all.add(new Requirement.OfTotal(index, total.total(), total.atMost().si()));
+        } else if (target instanceof Target.OfMass mass) {
+            ofMass(index, mass);
         } else if (target instanceof Target.OfLiquor liquor) {
             int species = batch.species(liquor.species().name());
             int step = batch.step(liquor.step().name());
-            Liquor held = ((Step.Wet) recipe.steps().get(step)).liquor();
+            Step.Wet held = (Step.Wet) recipe.steps().get(step);
             sides(index, species, batch.lastStage(step), new Gauge.OfLiquor(), liquor.limits(), held);
         } else {
             Target.OfPieces pieces = (Target.OfPieces) target;
             int species = batch.species(pieces.species().name());
-            int stage = batch.lastStage(
-                    pieces.after() == null
-                            ? recipe.steps().size() - 1
-                            : batch.step(pieces.after().name()));
+            int stage = stage(pieces.after());
             List<Population> populations = batch.classes(species).populations();
             if (pieces.grade() instanceof GradeScope.WholeLot) {
                 pieces(index, species, stage, pieces, -1, populations);
@@ -73,37 +78,42 @@ final class Requirements {
             int index, int species, int stage, Target.OfPieces target, int grade, List<Population> populations) {
         Quantity share = target.share();
         Limits limits = target.limits();
+        boolean loaded = target.counted().equals(Counted.AS_LOADED);
         if (share == null) {
             Gauge gauge =
                     grade < 0 ? new Gauge.OfLot() : new Gauge.Average(grade, populations.get(0), target.reading());
-            sides(index, species, stage, gauge, limits, null);
+            if (loaded) {
+                sides(index, species, stage, gauge, limits, null);
+            } else {
+                counted(index, species, stage, target, gauge, gauge);
+            }
             return;
         }
         boolean band = limits.atMost() != null && limits.atLeast() != null;
         double inside = band ? (1 + share.si()) / 2 : share.si();
-        upper(index, species, stage, new Gauge.Percentile(grade, populations, target.reading(), inside), limits, null);
-        lower(
-                index,
-                species,
-                stage,
-                new Gauge.Percentile(grade, populations, target.reading(), 1 - inside),
-                limits,
-                null);
+        Gauge low = new Gauge.Percentile(grade, populations, target.reading(), 1 - inside);
+        Gauge high = new Gauge.Percentile(grade, populations, target.reading(), inside);
+        if (loaded) {
+            upper(index, species, stage, high, limits, null);
+            lower(index, species, stage, low, limits, null);
+        } else {
+            counted(index, species, stage, target, high, low);
+        }
     }
 
-    private void sides(int index, int species, int stage, Gauge gauge, Limits limits, @Nullable Liquor liquor) {
+    private void sides(int index, int species, int stage, Gauge gauge, Limits limits, Step.@Nullable Wet liquor) {
         upper(index, species, stage, gauge, limits, liquor);
         lower(index, species, stage, gauge, limits, liquor);
     }
 
-    private void upper(int index, int species, int stage, Gauge gauge, Limits limits, @Nullable Liquor liquor) {
+    private void upper(int index, int species, int stage, Gauge gauge, Limits limits, Step.@Nullable Wet liquor) {
         Quantity atMost = limits.atMost();
         if (atMost != null) {
             side(index, species, stage, gauge, limits.basis(), atMost, true, liquor);
         }
     }
 
-    private void lower(int index, int species, int stage, Gauge gauge, Limits limits, @Nullable Liquor liquor) {
+    private void lower(int index, int species, int stage, Gauge gauge, Limits limits, Step.@Nullable Wet liquor) {
         Quantity atLeast = limits.atLeast();
         if (atLeast != null) {
             side(index, species, stage, gauge, limits.basis(), atLeast, false, liquor);
@@ -118,10 +128,10 @@ final class Requirements {
             Basis basis,
             Quantity limit,
             boolean upper,
-            @Nullable Liquor liquor) {
+            Step.@Nullable Wet liquor) {
         double start = StartContent.of(recipe, recipe.species().get(species), gauge.grade());
         double scale = Math.max(Math.max(start, most(species)), Double.MIN_NORMAL);
-        double si = si(basis, limit, start, liquor);
+        double si = si(species, basis, limit, start, liquor);
         all.add(new Requirement.OfContent(index, species, stage, gauge, si, upper, scale));
     }
 
@@ -135,11 +145,93 @@ final class Requirements {
         return most;
     }
 
-    private double si(Basis basis, Quantity limit, double start, @Nullable Liquor liquor) {
+    private double si(int species, Basis basis, Quantity limit, double start, Step.@Nullable Wet liquor) {
         if (basis == Basis.OF_START) {
             return limit.si() * start;
         }
-        Content content = new Content(limit);
-        return liquor == null ? recipe.lot().kgPerM3(content) : liquor.kgPerM3(content);
+        return liquor == null
+                ? recipe.lot().kgPerM3(new Content(limit))
+                : Strengths.kgPerM3(liquor, recipe.species().get(species), limit);
+    }
+
+    private void ofMass(int index, Target.OfMass target) {
+        int stage = stage(target.after());
+        double loaded = recipe.lot().massKg().orElseThrow();
+        Measure mass = new Measure.MassOfLot(weighing(target.place()), loaded);
+        double unit = target.ofStart() ? loaded : 1;
+        limit(index, stage, mass, target.atMost(), true, unit);
+        limit(index, stage, mass, target.atLeast(), false, unit);
+    }
+
+    private void limit(int index, int stage, Measure measure, @Nullable Quantity limit, boolean upper, double unit) {
+        if (limit != null) {
+            all.add(new Requirement.OfState(index, stage, measure, unit * limit.si(), upper));
+        }
+    }
+
+    /** The same readings counted against the mass at present, the dry mass or the water, in kg per kg. */
+    private void counted(int index, int species, int stage, Target.OfPieces target, Gauge atMost, Gauge atLeast) {
+        Weighing weighing = weighing(target.place());
+        Limits limits = target.limits();
+        limit(index, stage, measure(weighing, species, target, atMost), limits.atMost(), true, 1);
+        limit(index, stage, measure(weighing, species, target, atLeast), limits.atLeast(), false, 1);
+    }
+
+    private Measure measure(Weighing weighing, int species, Target.OfPieces target, Gauge gauge) {
+        Reading reading = target.reading();
+        if (target.counted() instanceof Counted.OfPiece piece) {
+            return new Measure.PerMass(weighing, species, gauge, piece.per());
+        }
+        Phase phase = ((Counted.InPhase) target.counted()).phase();
+        boolean extreme = reading == Reading.HIGHEST || reading == Reading.LOWEST || reading == Reading.RANGE;
+        if (weighing.waterSpecies().isPresent() && target.share() != null) {
+            throw new Unsound(
+                    target.place(),
+                    "a share of pieces by their water phase is not computed where the water is a species; remove share, or"
+                            + " state moisture instead of the species");
+        }
+        if (!extreme) {
+            return new Measure.InPhase(weighing, species, gauge, reading, phase);
+        }
+        if (reading == Reading.RANGE) {
+            return new Measure.Between(
+                    extreme(weighing, species, target, gauge, true, phase),
+                    extreme(weighing, species, target, gauge, false, phase));
+        }
+        return extreme(weighing, species, target, gauge, reading == Reading.HIGHEST, phase);
+    }
+
+    /** Where the moisture is the same everywhere, the phase is extreme where the solute is. */
+    private Measure extreme(
+            Weighing weighing, int species, Target.OfPieces target, Gauge gauge, boolean highest, Phase phase) {
+        Reading reading = highest ? Reading.HIGHEST : Reading.LOWEST;
+        int grade = gauge.grade();
+        if (weighing.waterSpecies().isEmpty()) {
+            Gauge own = gauge instanceof Gauge.Average average
+                    ? new Gauge.Average(grade, average.pieces(), reading)
+                    : gauge;
+            return new Measure.InPhase(weighing, species, own, reading, phase);
+        }
+        if (recipe.lot().grades().get(grade).sides().size() > 1) {
+            throw new Unsound(
+                    target.place(),
+                    "the " + reading.word()
+                            + " of a phase is not computed in pieces of several sides where the water is a"
+                            + " species; read the mean, core or surface, or state moisture instead of the species");
+        }
+        Population pieces = batch.classes(species).populations().get(grade);
+        return new Measure.ExtremeOfPhase(weighing, species, pieces, grade, highest, phase);
+    }
+
+    private Weighing weighing(Place place) {
+        return Weighing.of(recipe)
+                .orElseThrow(() -> new Unsound(
+                        place,
+                        "this target needs to know how the mass changes; add gain to a step, moisture to the lot, or the"
+                                + " species water, and a density"));
+    }
+
+    private int stage(@Nullable Reference after) {
+        return batch.lastStage(after == null ? recipe.steps().size() - 1 : batch.step(after.name()));
     }
 }

@@ -4,7 +4,6 @@ import java.math.BigDecimal;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import org.soakwright.recipes.model.Diffusivities;
-import org.soakwright.recipes.model.Diffusivity;
 import org.soakwright.recipes.model.Overrides;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Step;
@@ -19,7 +18,7 @@ final class Rescaled {
     }
 
     static Diffusivities times(Diffusivities diffusivities, double factor) {
-        return diffusivities.each(one -> new Diffusivity(times(one.value(), factor), one.at(), one.activationEnergy()));
+        return diffusivities.map(one -> one.times(factor));
     }
 
     /** A step's own diffusivity of a species multiplied, where it has one. */
@@ -32,12 +31,7 @@ final class Rescaled {
         Map<String, Diffusivities> diffusivity =
                 new LinkedHashMap<>(head.overrides().diffusivity());
         diffusivity.put(species, times(own, factor));
-        return step.with(new StepHead(
-                head.place(),
-                head.name(),
-                head.time(),
-                head.temperature(),
-                new Overrides(diffusivity, head.overrides().partition()),
-                head.price()));
+        return step.with(
+                head.withOverrides(new Overrides(diffusivity, head.overrides().partition())));
     }
 }

@@ -40,6 +40,17 @@ public final class StepTimes {
         return seconds;
     }
 
+    /** The fixed or planned duration of every step, or where there is none the middle of its range, by logarithm. */
+    static double[] nominal(Recipe recipe) {
+        return recipe.steps().stream()
+                .mapToDouble(step -> step.time()
+                        .definite()
+                        .map(Quantity::si)
+                        .orElse(Math.sqrt(step.time().seconds(0)
+                                * step.time().seconds(step.time().choices() - 1))))
+                .toArray();
+    }
+
     /** The shortest choice of every step: the hardest durations to compute. */
     public static double[] shortest(Recipe recipe) {
         return recipe.steps().stream()

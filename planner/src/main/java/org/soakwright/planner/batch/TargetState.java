@@ -1,15 +1,19 @@
 package org.soakwright.planner.batch;
 
+import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.jspecify.annotations.Nullable;
+import org.soakwright.planner.conditions.Strengths;
 import org.soakwright.recipes.model.Basis;
-import org.soakwright.recipes.model.Content;
+import org.soakwright.recipes.model.Counted;
 import org.soakwright.recipes.model.Goal;
 import org.soakwright.recipes.model.Limits;
-import org.soakwright.recipes.model.Liquor;
+import org.soakwright.recipes.model.Per;
+import org.soakwright.recipes.model.Phase;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
 import org.soakwright.recipes.text.Unit;
@@ -35,12 +39,16 @@ public record TargetState(
         boolean met) {
 
     static TargetState of(Run run, Requirement requirement) {
+        return of(run, requirement, run.value(requirement));
+    }
+
+    /** As it would stand if it read so much, in SI, comparable with the limit at stated values. */
+    static TargetState of(Run run, Requirement requirement, double si) {
         Recipe recipe = run.batch().recipe();
         Target target = recipe.targets().get(requirement.target());
         boolean met = run.batch().requirements().stream()
                 .filter(one -> one.target() == requirement.target())
                 .allMatch(run::meets);
-        double si = run.value(requirement);
         String name = name(recipe, requirement);
         if (target instanceof Target.OfTotal total) {
             Quantity limit = total.atMost();
@@ -55,34 +63,45 @@ public record TargetState(
                     met);
         }
         if (target instanceof Target.OfLiquor ofLiquor) {
-            int step = run.batch().step(ofLiquor.step().name());
-            Liquor liquor = ((Step.Wet) recipe.steps().get(step)).liquor();
-            return limited(target, name, null, ofLiquor.limits(), expressed(ofLiquor.limits(), si, liquor), met);
+            Step.Wet step = (Step.Wet)
+                    recipe.steps().get(run.batch().step(ofLiquor.step().name()));
+            Species species = recipe.species(ofLiquor.species().name()).orElseThrow();
+            Limits limits = ofLiquor.limits();
+            Quantity like = limits.atMost() != null ? limits.atMost() : Objects.requireNonNull(limits.atLeast());
+            return limited(target, name, null, limits, Strengths.express(step, species, si, like), met);
+        }
+        if (target instanceof Target.OfMass mass) {
+            return ofMass(recipe, mass, name, si, met);
         }
         Target.OfPieces pieces = (Target.OfPieces) target;
         Limits limits = pieces.limits();
-        int grade = ((Requirement.OfContent) requirement).gauge().grade();
+        int grade = requirement.grade();
         double value;
         if (limits.basis() == Basis.OF_START) {
             double start = StartContent.of(
                     recipe, recipe.species(pieces.species().name()).orElseThrow(), grade);
             value = limits.unit().fromSi(si / start);
+        } else if (requirement instanceof Requirement.OfState) {
+            value = limits.unit().fromSi(si);
         } else {
             value = recipe.lot().express(si, limits.unit());
         }
         return limited(target, name, gradeName(recipe, grade), limits, value, met);
     }
 
-    private static double expressed(Limits limits, double kgPerM3, Liquor liquor) {
-        if (limits.basis() == Basis.PER_VOLUME) {
-            return limits.unit().fromSi(kgPerM3);
-        }
-        // One kilogram of solute per kilogram of this liquor, in kg/m3: its density.
-        Content whole = new Content(new Quantity(
-                java.math.BigDecimal.ONE,
-                org.soakwright.recipes.text.Kind.PER_MASS.unit("kg/kg").orElseThrow(),
-                limits.place()));
-        return limits.unit().fromSi(kgPerM3 / liquor.kgPerM3(whole));
+    private static TargetState ofMass(Recipe recipe, Target.OfMass target, String name, double kg, boolean met) {
+        Quantity either = target.atMost() != null ? target.atMost() : Objects.requireNonNull(target.atLeast());
+        Unit unit = either.unit();
+        double loaded = recipe.lot().massKg().orElseThrow();
+        return new TargetState(
+                target,
+                name,
+                Optional.empty(),
+                side(target.atMost(), unit),
+                side(target.atLeast(), unit),
+                unit.fromSi(target.ofStart() ? kg / loaded : kg),
+                target.ofStart() ? unit.symbol() + " of start" : unit.symbol(),
+                met);
     }
 
     private static TargetState limited(
@@ -110,20 +129,43 @@ public record TargetState(
 
     /** {@code salt mean, thick}; {@code salt core after rest, thick}; {@code salt in first water}; {@code total time}. */
     static String name(Recipe recipe, Requirement requirement) {
+        return name(
+                recipe,
+                requirement,
+                recipe.confidence(recipe.targets().get(requirement.target()))
+                        .map(confidence -> " with " + confidence + " confidence")
+                        .orElse(""));
+    }
+
+    /** The same; how surely it is to be met is said with its words. */
+    static String name(Recipe recipe, Requirement requirement, String sure) {
         if (requirement instanceof Requirement.OfTotal total) {
             return "total " + total.goal().name().toLowerCase(java.util.Locale.ROOT);
         }
         Target target = recipe.targets().get(requirement.target());
         if (target instanceof Target.OfLiquor liquor) {
-            return liquor.species().name() + " in " + liquor.step().name();
+            return liquor.species().name() + " in " + liquor.step().name() + sure;
+        }
+        if (target instanceof Target.OfMass mass) {
+            return "mass of the lot"
+                    + (mass.after() == null ? "" : " after " + mass.after().name()) + sure;
         }
         Target.OfPieces pieces = (Target.OfPieces) target;
         String after = pieces.after() == null ? "" : " after " + pieces.after().name();
         Quantity share = pieces.share();
         String of = share == null ? "" : " in " + share;
-        return pieces.species().name() + " " + pieces.reading().word() + of + after + ", "
-                + gradeName(
-                        recipe, ((Requirement.OfContent) requirement).gauge().grade());
+        return pieces.species().name() + " " + pieces.reading().word() + counted(pieces.counted()) + of + after + sure
+                + ", "
+                + gradeName(recipe, requirement.grade());
+    }
+
+    /** Nothing for what is counted as loaded. */
+    private static String counted(Counted counted) {
+        if (counted instanceof Counted.InPhase in) {
+            return in.phase() == Phase.WATER ? " in the water phase" : " per moisture";
+        }
+        Per per = ((Counted.OfPiece) counted).per();
+        return per == Per.LOADED ? "" : " per " + per.word() + " mass";
     }
 
     private static String gradeName(Recipe recipe, int grade) {

@@ -29,6 +29,7 @@ public final class Trace {
     private final double[] depths;
     private final List<Moment> moments;
     private final List<double[]> read;
+    private final List<double[]> durations;
 
     /**
      * One look.
@@ -49,13 +50,14 @@ public final class Trace {
     public record Sight(double liquor, double[][] profiles, double[] means) {}
 
     /** One look with what every requirement on pieces would read there, kg/m3; NaN for others. */
-    private record Look(Moment moment, double[] read) {}
+    private record Look(Moment moment, double[] read, double[] upTo) {}
 
     private Trace(Run run, double[] depths, List<Look> looks) {
         this.run = run;
         this.depths = depths;
         moments = looks.stream().map(Look::moment).toList();
         read = looks.stream().map(Look::read).toList();
+        durations = looks.stream().map(Look::upTo).toList();
     }
 
     public Run run() {
@@ -72,6 +74,11 @@ public final class Trace {
         return moments;
     }
 
+    /** At each moment, how long the stages so far have lasted, s. */
+    List<double[]> durations() {
+        return durations;
+    }
+
     /**
      * What a target on pieces would read at each moment, in its own unit.
      *
@@ -81,11 +88,15 @@ public final class Trace {
         List<Requirement> requirements = run.batch().requirements();
         for (int r = 0; r < requirements.size(); r++) {
             // Of a band the side is meant that the state tells of.
-            if (requirements.get(r) instanceof Requirement.OfContent content
-                    && run.batch().recipe().targets().get(content.target()).equals(state.target())
-                    && TargetState.of(run, content).grade().equals(state.grade())
-                    && TargetState.of(run, content).value() == state.value()) {
-                double si = run.value(content);
+            if (requirements.get(r).ofPieces()
+                    && run.batch()
+                            .recipe()
+                            .targets()
+                            .get(requirements.get(r).target())
+                            .equals(state.target())
+                    && TargetState.of(run, requirements.get(r)).grade().equals(state.grade())
+                    && TargetState.of(run, requirements.get(r)).value() == state.value()) {
+                double si = run.value(requirements.get(r));
                 // Values are proportional to kg/m3: what the target shows over what it read.
                 double unit = si == 0 ? 1 : state.value() / si;
                 int index = r;
@@ -109,6 +120,7 @@ public final class Trace {
         double[] seconds = run.seconds();
         List<Look> looks = new ArrayList<>();
         double clock = 0;
+        double all = run.totals().seconds();
         double[] done = new double[0];
         for (int k = 0; k < batch.slots().size(); k++) {
             Translation.Slot slot = batch.slots().get(k);
@@ -123,7 +135,7 @@ public final class Trace {
             for (int i = 1; i <= count; i++) {
                 // Squares: the profile moves with the root of time.
                 upTo[k] = whole * i * i / ((double) count * count);
-                look(batch, slot.step(), transfer, clock + upTo[k], upTo, depths)
+                look(batch, slot.step(), transfer, clock + upTo[k], all, upTo, depths)
                         .ifPresent(looks::add);
             }
             done = upTo;
@@ -142,15 +154,16 @@ public final class Trace {
 
     /** Empty so early in a stage that the profile would need more modes than are kept: the next look will do. */
     private static Optional<Look> look(
-            Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
+            Batch batch, int step, boolean transfer, double clock, double whole, double[] upTo, double[] depths) {
         try {
-            return Optional.of(see(batch, step, transfer, clock, upTo, depths));
+            return Optional.of(see(batch, step, transfer, clock, whole, upTo, depths));
         } catch (StageTooShort early) {
             return Optional.empty();
         }
     }
 
-    private static Look see(Batch batch, int step, boolean transfer, double clock, double[] upTo, double[] depths) {
+    private static Look see(
+            Batch batch, int step, boolean transfer, double clock, double whole, double[] upTo, double[] depths) {
         Recipe recipe = batch.recipe();
         int stage = upTo.length - 1;
         List<Sight> sights = new ArrayList<>();
@@ -158,8 +171,9 @@ public final class Trace {
         for (int s = 0; s < recipe.species().size(); s++) {
             Chain sketch = batch.chain(s).sketch();
             // So early a look that even a sketch would be blurred is left out.
-            sketch.require(upTo);
-            Course course = sketch.follow(upTo);
+            double[] own = batch.effective(s, upTo);
+            sketch.require(own);
+            Course course = sketch.follow(own);
             courses.add(course);
             List<Population> populations = batch.classes(s).populations();
             // Contents are proportional to kg/m3, and there are many: one exact conversion serves them all.
@@ -178,12 +192,10 @@ public final class Trace {
             boolean wet = batch.stage(s, stage).wets();
             sights.add(new Sight(wet ? course.value(new Probe.Liquor(), stage) : Double.NaN, profiles, means));
         }
+        State state = new State(batch, courses, upTo, whole, stage, false);
         double[] read = batch.requirements().stream()
-                .mapToDouble(requirement -> requirement instanceof Requirement.OfContent content
-                                && !(content.gauge() instanceof Gauge.OfLiquor)
-                        ? content.gauge().value(courses.get(content.species()), stage)
-                        : Double.NaN)
+                .mapToDouble(requirement -> requirement.ofPieces() ? Batch.read(requirement, state) : Double.NaN)
                 .toArray();
-        return new Look(new Moment(step, transfer, clock, List.copyOf(sights)), read);
+        return new Look(new Moment(step, transfer, clock, List.copyOf(sights)), read, upTo.clone());
     }
 }

@@ -4,10 +4,10 @@ import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
+import org.soakwright.planner.conditions.Movement;
 import org.soakwright.recipes.model.Content;
 import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Diffusivity;
-import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Grain;
 import org.soakwright.recipes.model.Medium;
@@ -30,16 +30,15 @@ import org.soakwright.solver.stage.Surface;
  * of rest at the conditions of the step before.
  */
 final class Translation {
-    /** Gas constant, J/(mol K); exact since the SI of 2019. */
-    private static final double GAS_CONSTANT = 8.31446261815324;
-
     /** In the order in which the solver counts them. */
     private static final List<Grain> DIRECTIONS = List.of(Grain.values());
 
     private final Recipe recipe;
+    private final Films films;
 
-    Translation(Recipe recipe) {
+    Translation(Recipe recipe, Films films) {
         this.recipe = recipe;
+        this.films = films;
     }
 
     /** Which step each stage belongs to and what part of its time it takes; a stage between steps has a fixed time. */
@@ -71,14 +70,29 @@ final class Translation {
         return recipe.between() == null ? 0 : recipe.between().si();
     }
 
-    /** Each grade's pieces as the recipe states them, before any spread. */
+    /** Each grade's pieces as the recipe states them, before any spread and without skins. */
     List<org.soakwright.solver.shape.Grade> lot() {
-        double volume = recipe.lot().volumeM3();
         return recipe.lot().grades().stream()
-                .map(grade -> new org.soakwright.solver.shape.Grade(sides(grade), grade.share() * volume, 1))
+                .map(grade -> pieces(grade, sides(grade)))
                 .toList();
     }
 
+    private org.soakwright.solver.shape.Grade pieces(Grade grade, List<Side> sides) {
+        return new org.soakwright.solver.shape.Grade(
+                sides, grade.share() * recipe.lot().volumeM3(), 1);
+    }
+
+    /** As one species finds them: where a skin covers one of two faces, the first side lies between both. */
+    static List<Side> sides(Grade grade, Species species) {
+        List<Side> sides = new ArrayList<>(sides(grade));
+        if (Films.twoFaced(species, grade)) {
+            Side half = sides.get(0);
+            sides.set(0, Side.betweenFaces(2 * half.length(), half.direction()));
+        }
+        return sides;
+    }
+
+    /** From the core of each to its surface. */
     static List<Side> sides(Grade grade) {
         List<Side> sides = new ArrayList<>();
         for (org.soakwright.recipes.model.Side side : grade.sides()) {
@@ -119,33 +133,59 @@ final class Translation {
                 passing.add(k);
             }
         }
-        return Chain.of(classes.lot(), classes.starts(), stages(species), passing);
+        return Chain.of(
+                classes.lot(),
+                classes.starts(),
+                stages(species, classes.populations(), recipe.steps().size() - 1),
+                passing);
     }
 
-    /** As loaded, a uniform content times a factor. */
-    static Start start(Recipe recipe, Species species, double factor) {
+    /** As loaded, a uniform content times a factor. A profile from the middle goes both ways where the faces differ. */
+    static Start start(Recipe recipe, Species species, Grade grade, double factor) {
         if (species.start() instanceof org.soakwright.recipes.model.Start.Uniform uniform) {
             return new Start.Uniform(factor * recipe.lot().kgPerM3(uniform.content()));
         }
-        return new Start.Polyline(((org.soakwright.recipes.model.Start.Profile) species.start())
+        List<Start.Point> points = ((org.soakwright.recipes.model.Start.Profile) species.start())
                 .points().stream()
                         .map(point ->
                                 new Start.Point(point.position(), recipe.lot().kgPerM3(point.content())))
-                        .toList());
+                        .toList();
+        if (!Films.twoFaced(species, grade)) {
+            return new Start.Polyline(points);
+        }
+        List<Start.Point> through = new ArrayList<>();
+        for (int i = points.size() - 1; i > 0; i--) {
+            through.add(new Start.Point(
+                    (1 - points.get(i).position()) / 2, points.get(i).content()));
+        }
+        points.forEach(point -> through.add(new Start.Point((1 + point.position()) / 2, point.content())));
+        return new Start.Polyline(through);
     }
 
-    private List<Stage> stages(Species species) {
+    /** The first steps of a species alone, its grades as the recipe states them. */
+    Chain plain(Species species, int lastStep) {
+        List<Population> populations = new ArrayList<>();
+        List<org.soakwright.solver.shape.Grade> lot = new ArrayList<>();
+        List<Start> starts = new ArrayList<>();
+        for (Grade grade : recipe.lot().grades()) {
+            populations.add(new Population(populations.size(), grade.share(), List.of()));
+            lot.add(pieces(grade, sides(grade, species)));
+            starts.add(start(recipe, species, grade, 1));
+        }
+        return Chain.of(lot, starts, stages(species, populations, lastStep), Set.of())
+                .sketch();
+    }
+
+    private List<Stage> stages(Species species, List<Population> populations, int lastStep) {
         List<Stage> stages = new ArrayList<>();
-        Step before = null;
-        for (Step step : recipe.steps()) {
-            if (before != null && transfer() > 0) {
-                stages.add(rest(species, before));
+        for (int i = 0; i <= lastStep; i++) {
+            if (i > 0 && transfer() > 0) {
+                stages.add(rest(species, recipe.steps().get(i - 1)));
             }
-            Stage stage = stage(species, step);
-            for (int f = 0; f < fills(step); f++) {
+            Stage stage = stage(species, i, populations);
+            for (int f = 0; f < fills(recipe.steps().get(i)); f++) {
                 stages.add(stage);
             }
-            before = step;
         }
         return stages;
     }
@@ -160,7 +200,8 @@ final class Translation {
                 grain(species, at));
     }
 
-    private Stage stage(Species species, Step step) {
+    private Stage stage(Species species, int index, List<Population> populations) {
+        Step step = recipe.steps().get(index);
         double diffusivity = diffusivity(species, step);
         if (step instanceof Step.Wet wet && species.exchangesWith(Medium.LIQUOR)) {
             Quantity dragOut = wet.dragOut();
@@ -169,7 +210,7 @@ final class Translation {
             return new Stage(
                     diffusivity,
                     partition(species, step),
-                    surface(wet.film()),
+                    films.surfaces(index, species, populations),
                     liquor(species, wet),
                     clinging,
                     grain(species, step));
@@ -178,7 +219,12 @@ final class Translation {
             Content equilibrium = dry.air().equilibrium().get(species.name());
             double content = equilibrium == null ? 0 : recipe.lot().kgPerM3(equilibrium);
             return new Stage(
-                    diffusivity, 1, surface(dry.film()), new Surroundings.Air(content), 0, grain(species, step));
+                    diffusivity,
+                    1,
+                    films.surfaces(index, species, populations),
+                    new Surroundings.Air(content),
+                    0,
+                    grain(species, step));
         }
         return rest(species, step);
     }
@@ -195,15 +241,17 @@ final class Translation {
         return new Surroundings.Vessel(volume, content, flow, content);
     }
 
-    private static Surface surface(Film film) {
-        return film instanceof Film.Coefficient coefficient
-                ? new Surface.Film(coefficient.value().si())
-                : new Surface.Open();
-    }
-
     /** In the first direction stated; the others are {@link #grain} times it. */
     static double diffusivity(Species species, Step step) {
-        return at(stated(species, step).all().get(0), step);
+        return Movement.at(stated(species, step).all().get(0), step.temperature());
+    }
+
+    /** The same at another temperature than the step's, K. */
+    static double diffusivity(Species species, Step step, double kelvin) {
+        Diffusivity stated = stated(species, step).all().get(0);
+        return stated.dependsOnTemperature()
+                ? Movement.at(stated, kelvin).value()
+                : stated.value().si();
     }
 
     /** How the other directions compare. */
@@ -211,30 +259,19 @@ final class Translation {
         if (!(stated(species, step) instanceof Diffusivities.ByGrain byGrain)) {
             return org.soakwright.solver.shape.Grain.NONE;
         }
-        double first = at(byGrain.all().get(0), step);
+        double first = Movement.at(byGrain.all().get(0), step.temperature());
         List<Double> factors = new ArrayList<>();
         for (Grain grain : DIRECTIONS) {
             Diffusivity own = byGrain.values().get(grain);
-            factors.add(own == null ? 1.0 : at(own, step) / first);
+            factors.add(own == null ? 1.0 : Movement.at(own, step.temperature()) / first);
         }
         return new org.soakwright.solver.shape.Grain(factors);
     }
 
     /** A step's own diffusivity goes before the species'. */
-    private static Diffusivities stated(Species species, Step step) {
+    static Diffusivities stated(Species species, Step step) {
         Diffusivities own = step.head().overrides().diffusivity().get(species.name());
         return own == null ? species.diffusivity() : own;
-    }
-
-    /** D(T) = D exp(-E/R (1/T - 1/T0)), Arrhenius' law; a step's own diffusivity has no E and is taken as it stands. */
-    private static double at(Diffusivity stated, Step step) {
-        Quantity at = stated.at();
-        Quantity energy = stated.activationEnergy();
-        Quantity temperature = step.temperature();
-        if (at == null || energy == null || temperature == null) {
-            return stated.value().si();
-        }
-        return stated.value().si() * Math.exp(energy.si() / GAS_CONSTANT * (1 / at.si() - 1 / temperature.si()));
     }
 
     static double partition(Species species, Step step) {

@@ -1,61 +1,173 @@
 package org.soakwright.planner.batch;
 
-import java.util.Optional;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Objects;
+import java.util.function.DoubleUnaryOperator;
+import org.soakwright.planner.conditions.Lag;
+import org.soakwright.planner.conditions.Warmth;
 import org.soakwright.recipes.model.Grade;
+import org.soakwright.recipes.model.Product;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.model.Start;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.text.Unsound;
 
 /**
- * What it is worth that the lot starts at another temperature than its first step. Warming is not computed: every step is taken to be at
- * its own temperature throughout. Where that could matter the recipe is refused, else it is stated with the number.
+ * What it is worth that pieces come to a step from another temperature. Warmth spreads a hundred times quicker than solutes do, so a step's
+ * diffusivity is taken to be that of its temperature, and its time is corrected by a {@link Lag}: of a uniform piece in its first step
+ * for the thin layer in which its solute begins to move, later for the whole piece. The grade that makes the step longest decides.
  */
-public final class Warming {
+final class Warming {
     /** m2/s, low for moist foods, gels and plastics (1e-7 to 1.5e-7, from memory, common practice): warming is not made quicker than it is. */
     private static final double THERMAL_DIFFUSIVITY = 1e-7;
 
-    /** Fourier number at which the middle of a slab between two faces has made 95 % of the change: ln(4/(0.05 pi)) 4/pi^2. */
-    private static final double WARMED = 1.31;
-
-    /** Of the first step's shortest time: what warming may be worth and still be left out. */
+    /** Of a step's shortest time: what warming may be worth and still be left out. */
     private static final double NEGLIGIBLE = 0.01;
 
-    private Warming() {}
+    /** Food that is colder holds ice, K (common practice: it begins to freeze at -1 to -2 Cel). */
+    private static final double FROZEN = 271.15;
 
-    /**
-     * The statement; empty where the lot states no temperature of its own.
-     *
-     * @throws Unsound where leaving warming out would be wrong, at the lot's temperature
-     */
-    public static Optional<String> of(Recipe recipe) {
-        Quantity lot = recipe.lot().temperature();
-        Step first = recipe.steps().get(0);
-        Quantity step = first.temperature();
-        if (lot == null || step == null || lot.si() == step.si()) {
-            return Optional.empty();
+    private final Recipe recipe;
+    private final List<List<Lag>> lags = new ArrayList<>();
+    private final List<String> said = new ArrayList<>();
+
+    private Warming(Recipe recipe) {
+        this.recipe = recipe;
+        double[] arriving = arriving();
+        List<Lag> none = java.util.Collections.nCopies(recipe.steps().size(), Lag.NONE);
+        recipe.species().forEach(species -> lags.add(new ArrayList<>(none)));
+        for (int i = 0; i < arriving.length; i++) {
+            Quantity there = recipe.steps().get(i).temperature();
+            if (there != null && arriving[i] != there.si()) {
+                requireThawed(recipe.steps().get(i), arriving[i]);
+                step(i, arriving[i] - there.si());
+            }
         }
-        double deepest =
-                recipe.lot().grades().stream().mapToDouble(Grade::depth).max().orElseThrow();
-        double warming = WARMED * deepest * deepest / THERMAL_DIFFUSIVITY;
-        double worth = 0;
-        for (Species species : recipe.species()) {
-            double there = Translation.diffusivity(species, first);
-            double here =
-                    Translation.diffusivity(species, first.with(first.head().withTemperature(lot)));
-            worth = Math.max(worth, warming * Math.abs(here / there - 1));
-        }
-        String said = "the lot starts at " + lot + ", " + first.name() + " is at " + step
-                + ": warming through takes about " + minutes(warming) + " and is worth at most "
-                + minutes(worth) + " of that step";
-        if (worth > NEGLIGIBLE * first.time().seconds(0)) {
+    }
+
+    static Warming of(Recipe recipe) {
+        return new Warming(recipe);
+    }
+
+    /** Of one species in one step. */
+    Lag lag(int species, int step) {
+        return lags.get(species).get(step);
+    }
+
+    /** What was included or left out; empty where no step changes the temperature of its pieces, or nothing comes of it. */
+    List<String> said() {
+        return List.copyOf(said);
+    }
+
+    /** Ice holds back both the warmth and the solute: nothing here knows how. */
+    private void requireThawed(Step step, double arriving) {
+        Quantity there = Objects.requireNonNull(step.temperature());
+        if (recipe.products().contains(Product.FOOD) && Math.min(arriving, there.si()) < FROZEN) {
+            Quantity lot = recipe.lot().temperature();
             throw new Unsound(
-                    lot.place(),
-                    "temperature of the lot: warming is not computed yet by this version, and here it matters: " + said
-                            + "; bring the lot to the step's temperature first, or remove it and allow for it");
+                    lot != null && lot.si() == arriving ? lot.place() : there.place(),
+                    "freezing and thawing are not computed: the pieces come to " + step.name() + " at "
+                            + celsius(arriving) + ", which is at " + there
+                            + "; thaw the lot first and write its temperature then");
         }
-        return Optional.of("Left out: " + said + ".");
+    }
+
+    private static String celsius(double kelvin) {
+        return String.format(Locale.ROOT, "%.1f °C", kelvin - 273.15);
+    }
+
+    private void step(int index, double difference) {
+        Step step = recipe.steps().get(index);
+        double shortest = step.time().seconds(0);
+        List<Lag> own = new ArrayList<>();
+        double worth = 0;
+        double most = 0;
+        for (Species species : recipe.species()) {
+            Lag lag = slowest(species, index, difference, false, shortest);
+            own.add(lag);
+            worth = Math.max(worth, Math.abs(lag.of(shortest)));
+            most = Math.max(
+                    most,
+                    Math.abs(slowest(species, index, difference, true, shortest).of(shortest)));
+        }
+        boolean matters = worth > NEGLIGIBLE * shortest;
+        if (matters) {
+            for (int s = 0; s < own.size(); s++) {
+                lags.get(s).set(index, own.get(s));
+            }
+        }
+        if (matters || (index == 0 && recipe.lot().temperature() != null)) {
+            said.add((matters ? "Included: " : "Left out: ") + words(step, difference, worth, most));
+        }
+    }
+
+    private String words(Step step, double difference, double worth, double most) {
+        double warmed = recipe.lot().grades().stream()
+                .mapToDouble(grade -> warmth(recipe, grade).within(0.05))
+                .max()
+                .orElseThrow();
+        Quantity there = step.temperature();
+        return "the pieces come to " + step.name() + " at " + celsius(there == null ? 0 : there.si() + difference)
+                + ", which is at " + there
+                + ": their mean is within a twentieth of that after about " + minutes(warmed) + ", worth "
+                + minutes(worth) + " of the step"
+                + (most > worth + NEGLIGIBLE * step.time().seconds(0)
+                        ? ", and at most " + minutes(most) + " if the whole piece decided"
+                        : "")
+                + ".";
+    }
+
+    /** Of the grade that makes the step longest. */
+    private Lag slowest(Species species, int index, double difference, boolean most, double seconds) {
+        Step step = recipe.steps().get(index);
+        double kelvin = Objects.requireNonNull(step.temperature()).si();
+        double there = Translation.diffusivity(species, step);
+        boolean fresh = index == 0 && species.start() instanceof Start.Uniform;
+        DoubleUnaryOperator slowed = warmer -> 1 - Translation.diffusivity(species, step, kelvin + warmer) / there;
+        Lag slowest = Lag.NONE;
+        for (Grade grade : recipe.lot().grades()) {
+            Warmth warmth = warmth(recipe, grade);
+            Lag lag = most
+                    ? Lag.most(warmth, difference, slowed)
+                    : fresh ? Lag.fresh(warmth, there, difference, slowed) : Lag.through(warmth, difference, slowed);
+            if (slowest == Lag.NONE || lag.of(seconds) > slowest.of(seconds)) {
+                slowest = lag;
+            }
+        }
+        return slowest;
+    }
+
+    /** The mean temperature with which the pieces come to each step, K; the step's own where none is known. */
+    private double[] arriving() {
+        double[] arriving = new double[recipe.steps().size()];
+        Quantity lot = recipe.lot().temperature();
+        double now = lot == null ? Double.NaN : lot.si();
+        for (int i = 0; i < arriving.length; i++) {
+            Step step = recipe.steps().get(i);
+            Quantity there = step.temperature();
+            if (there == null) {
+                continue;
+            }
+            arriving[i] = Double.isNaN(now) ? there.si() : now;
+            now = arriving[i] == there.si() ? there.si() : there.si() + (arriving[i] - there.si()) * left(step);
+        }
+        return arriving;
+    }
+
+    private double left(Step step) {
+        return recipe.lot().grades().stream()
+                .mapToDouble(grade -> warmth(recipe, grade).left(step.time().seconds(0)))
+                .max()
+                .orElseThrow();
+    }
+
+    static Warmth warmth(Recipe recipe, Grade grade) {
+        Quantity stated = recipe.lot().thermalDiffusivity();
+        return new Warmth(Translation.sides(grade), stated == null ? THERMAL_DIFFUSIVITY : stated.si());
     }
 
     private static String minutes(double seconds) {

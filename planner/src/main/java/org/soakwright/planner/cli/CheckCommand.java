@@ -6,6 +6,7 @@ import org.soakwright.planner.batch.Batch;
 import org.soakwright.planner.batch.Cautions;
 import org.soakwright.planner.batch.Groups;
 import org.soakwright.planner.batch.StepTimes;
+import org.soakwright.planner.conditions.Known;
 import org.soakwright.planner.report.CheckJson;
 import org.soakwright.planner.report.CheckSheet;
 import org.soakwright.planner.report.Stamp;
@@ -29,12 +30,13 @@ final class CheckCommand extends RecipeCommand {
     }
 
     @Override
-    Finding find(Recipe recipe, Stamp stamp, Session session) {
+    Finding find(Recipe written, Stamp stamp, Session session) {
+        Recipe recipe = Known.of(written).recipe();
         // What is too short to be computed shows now rather than when it is followed.
         new Batch(recipe).follow(StepTimes.shortest(recipe));
         List<Groups.Group> groups = Groups.of(recipe);
         List<AsInfinite> shapes = AsInfinite.of(recipe);
-        List<String> cautions = Cautions.of(recipe);
+        List<String> cautions = Cautions.of(recipe).shown();
         return new Finding(
                 Exit.DONE,
                 () -> CheckSheet.of(recipe, groups, shapes, cautions, session.style()),

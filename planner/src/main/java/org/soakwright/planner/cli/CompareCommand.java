@@ -106,7 +106,7 @@ final class CompareCommand implements Callable<Integer> {
         boolean definite =
                 recipe.steps().stream().allMatch(step -> step.time().definite().isPresent());
         if (definite) {
-            Run run = new Batch(recipe).follow(StepTimes.definite(recipe));
+            Run run = new Batch(recipe).follow(StepTimes.definite(recipe)).judged(session.line());
             return new Computed(Side.read(name, "followed as written", ResultJson.of(stamp, run)), Optional.of(run));
         }
         Plan plan = Planner.plan(recipe, session.line());

@@ -34,7 +34,7 @@ final class FollowCommand extends RecipeCommand {
     @Override
     Finding find(Recipe recipe, Stamp stamp, Session session) throws Refusal {
         Optional<LocalDateTime> moment = start.moment();
-        Run run = new Batch(recipe).follow(StepTimes.definite(recipe));
+        Run run = new Batch(recipe).follow(StepTimes.definite(recipe)).judged(session.line());
         return new Finding(
                 Exit.DONE,
                 () -> BatchSheet.of(run, moment, session.style()),

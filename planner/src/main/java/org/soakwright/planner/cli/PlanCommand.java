@@ -27,6 +27,7 @@ final class PlanCommand extends RecipeCommand {
                         "plan loin-desalting.yaml --start 2026-03-02T06:00 --report loin-plan",
                         "Chooses the free times of a recipe so that every target is met in the least time or cost.",
                         "Exit status: 0 every target is met, 1 no choice meets them and the nearest miss is shown,",
+                        "or a caution stops the plan until somebody answers for it,",
                         "2 bad input or usage, 3 internal error")
                 .addOption(start.option());
     }
@@ -36,7 +37,7 @@ final class PlanCommand extends RecipeCommand {
         Optional<LocalDateTime> moment = start.moment();
         Plan plan = Planner.plan(recipe, session.line());
         return new Finding(
-                plan.met() ? Exit.DONE : Exit.NO_PLAN,
+                plan.met() && plan.stops().isEmpty() ? Exit.DONE : Exit.NO_PLAN,
                 () -> BatchSheet.of(plan, moment, session.style()),
                 () -> ResultJson.of(stamp, plan),
                 () -> Report.of(plan, stamp, moment));

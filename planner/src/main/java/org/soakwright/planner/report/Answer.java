@@ -36,6 +36,11 @@ final class Answer {
     static List<String> planned(Plan plan) {
         Recipe recipe = plan.run().batch().recipe();
         List<String> sentences = new ArrayList<>();
+        List<String> stops = plan.stops();
+        if (!stops.isEmpty()) {
+            sentences.add("This is not a plan to use. " + String.join(" ", stops)
+                    + " Whoever answers for it in spite of that writes allowed-by with their name into the recipe.");
+        }
         if (plan.met()) {
             sentences.add(
                     (recipe.targets().isEmpty() ? "Without a target, the batch takes " : "Every target is met in ")

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import java.util.stream.IntStream;
 import org.soakwright.planner.batch.Cautions;
 import org.soakwright.planner.batch.EachGrade;
 import org.soakwright.planner.batch.Plan;
@@ -31,6 +32,8 @@ public record Findings(String title, List<String> about, List<String> answer, bo
     public static final String CONTENTS = "contents";
     public static final String PERCENTILES = "percentiles";
     public static final String TARGETS = "targets";
+    public static final String CHANCES = "chances";
+    public static final String MEASURE = "measure";
     public static final String TOTALS = "totals";
     public static final String PER_HOUR = "per-hour";
     public static final String CAUTIONS = "cautions";
@@ -50,7 +53,8 @@ public record Findings(String title, List<String> about, List<String> answer, bo
         List<Section> sections = new ArrayList<>();
         body(run, List.of(), start, sections);
         sections.add(cautions(run));
-        return new Findings(title(run), about(run), Answer.followed(run), run.meetsTargets(), sections);
+        sections.addAll(at(sections, TOTALS), Prospects.sections(run, false));
+        return new Findings(title(run), about(run), sure(Answer.followed(run), run), run.meetsTargets(), sections);
     }
 
     /** Of a plan; where no choice meets the targets, of its nearest miss, marked as such. */
@@ -65,7 +69,21 @@ public record Findings(String title, List<String> about, List<String> answer, bo
             sections.add(perHour(plan));
         }
         sections.add(cautions(run));
-        return new Findings(title(run), about(run), Answer.planned(plan), plan.met(), sections);
+        sections.addAll(at(sections, TOTALS), Prospects.sections(run, true));
+        return new Findings(title(run), about(run), sure(Answer.planned(plan), run), plan.met(), sections);
+    }
+
+    private static int at(List<Section> sections, String id) {
+        return IntStream.range(0, sections.size())
+                .filter(i -> sections.get(i).id().equals(id))
+                .findFirst()
+                .orElse(sections.size());
+    }
+
+    private static List<String> sure(List<String> answer, Run run) {
+        List<String> all = new ArrayList<>(answer);
+        Prospects.sentence(run).ifPresent(all::add);
+        return all;
     }
 
     public Optional<Section> section(String id) {
@@ -186,7 +204,7 @@ public record Findings(String title, List<String> about, List<String> answer, bo
     }
 
     private static Section cautions(Run run) {
-        return Section.of(CAUTIONS, "Cautions", Cautions.of(run));
+        return Section.of(CAUTIONS, "Cautions", Cautions.of(run).shown());
     }
 
     private static String capital(String text) {

@@ -6,11 +6,14 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.batch.Cautions;
+import org.soakwright.planner.batch.Outlook;
 import org.soakwright.planner.batch.Plan;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.planner.batch.Totals;
+import org.soakwright.planner.batch.doubt.Chance;
+import org.soakwright.planner.batch.doubt.Shares;
 import org.soakwright.recipes.model.Basis;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
@@ -51,6 +54,7 @@ public final class ResultJson {
         json.string("title", recipe.title());
         json.string("inputs-sha256", stamp.sha256());
         json.truth("met", plan == null ? run.meetsTargets() : plan.met());
+        uncertainty(json);
         json.array("steps", () -> {
             for (int i = 0; i < recipe.steps().size(); i++) {
                 StepEnd end = run.end(i);
@@ -64,7 +68,71 @@ public final class ResultJson {
         });
         totals(json, "totals", run.totals());
         reasons(json);
-        json.strings("cautions", Cautions.of(run));
+        Cautions cautions = Cautions.of(run);
+        json.strings("cautions", cautions.shown());
+        json.strings("stops", cautions.stops());
+    }
+
+    /** Only where something is not known exactly. */
+    private void uncertainty(JsonText json) throws IOException {
+        Outlook outlook = run.outlook().orElse(null);
+        if (outlook == null) {
+            return;
+        }
+        json.object("chance", () -> {
+            chance(json, outlook.all());
+            json.whole("refused", outlook.refused());
+        });
+        json.array("uncertain", () -> {
+            for (int i = 0; i < outlook.values().size(); i++) {
+                int value = i;
+                json.element(() -> {
+                    json.string("name", outlook.values().get(value));
+                    json.array("shares", () -> shares(json, outlook, value));
+                });
+            }
+        });
+    }
+
+    private static void chance(JsonText json, Chance chance) throws IOException {
+        json.number("value", chance.value());
+        json.number("low", chance.low());
+        json.number("high", chance.high());
+        json.whole("samples", chance.samples());
+    }
+
+    private static void shares(JsonText json, Outlook outlook, int value) throws IOException {
+        for (Outlook.Prospect one : outlook.prospects()) {
+            if (!one.shares().isEmpty()) {
+                json.element(() -> {
+                    json.string("target", one.name());
+                    json.number("share", one.shares().get(value));
+                    json.number("remaining", Shares.remaining(one.shares().get(value)));
+                });
+            }
+        }
+    }
+
+    /** What is to be expected of a target; only where something is not known exactly. */
+    private void prospect(JsonText json, TargetState state) throws IOException {
+        Outlook outlook = run.outlook().orElse(null);
+        if (outlook == null) {
+            return;
+        }
+        Chance chance = outlook.chance(state, recipe.targets()).orElseThrow();
+        json.object("chance", () -> chance(json, chance));
+        Outlook.Prospect one = outlook.of(state).orElseThrow();
+        json.numberIfAny("confidence", one.confidence());
+        json.numberIfAny("value-error", one.error());
+        if (!one.percentiles().isEmpty()) {
+            json.object("percentiles", () -> {
+                for (int i = 0; i < Outlook.LEVELS.size(); i++) {
+                    json.number(
+                            Figures.made(100 * Outlook.LEVELS.get(i)),
+                            one.percentiles().get(i));
+                }
+            });
+        }
     }
 
     private static void step(JsonText json, StepEnd end) throws IOException {
@@ -128,7 +196,7 @@ public final class ResultJson {
         });
     }
 
-    private static void target(JsonText json, TargetState state) throws IOException {
+    private void target(JsonText json, TargetState state) throws IOException {
         Target target = state.target();
         boolean ofStart = false;
         if (target instanceof Target.OfPieces pieces) {
@@ -157,6 +225,7 @@ public final class ResultJson {
         json.number("value", state.value());
         json.string("unit", plainUnit(state.unit()));
         json.truth("met", state.met());
+        prospect(json, state);
     }
 
     private static String plainUnit(String unit) {

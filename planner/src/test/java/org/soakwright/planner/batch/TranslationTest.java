@@ -122,26 +122,6 @@ class TranslationTest {
         assertTrue(end.liquor().isEmpty());
     }
 
-    /** 13 mm: 1.31 x 0.013^2/1e-7 = 2214 s; 22 kJ/mol over one kelvin at 4 Cel changes D by 3.4 %, so 75 s of 6 h. */
-    @Test
-    void aLotAlmostAtTheStepsTemperatureIsSaidToBe() {
-        Recipe recipe = Recipes.of(
-                Recipes.LOINS.replace("  density:", "  temperature: 3 Cel\n  density:") + "steps:",
-                Recipes.water("one", "ratio: 2 L/kg", "6 h"));
-        String said = Warming.of(recipe).orElseThrow();
-        assertTrue(said.contains("takes about 37 min and is worth at most 2 min"), said);
-        assertTrue(Cautions.of(recipe).contains(said));
-    }
-
-    @Test
-    void aLotFarFromTheStepsTemperatureIsRefusedAtItsPlace() {
-        Recipe recipe = Recipes.of(
-                Recipes.LOINS.replace("  density:", "  temperature: -18 Cel\n  density:") + "steps:",
-                Recipes.water("one", "ratio: 2 L/kg", "6 h"));
-        Unsound refused = assertThrows(Unsound.class, () -> new Batch(recipe));
-        assertTrue(refused.problems().get(0).toString().startsWith("test.yaml:6:16: temperature of the lot: "));
-    }
-
     @Test
     void aStepTooShortToComputeIsRefusedAtItsTime() {
         Recipe recipe = Recipes.of(

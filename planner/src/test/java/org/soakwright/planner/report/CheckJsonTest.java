@@ -44,7 +44,11 @@ class CheckJsonTest {
     private static Map<String, @Nullable Object> checked() throws IOException {
         Recipe recipe = ((Outcome.Accepted) Recipes.read("recipe.yaml", RECIPE)).recipe();
         return Json.object(CheckJson.of(
-                new Stamp("0.1.0", "00ff"), recipe, Groups.of(recipe), AsInfinite.of(recipe), Cautions.of(recipe)));
+                new Stamp("0.1.0", "00ff"),
+                recipe,
+                Groups.of(recipe),
+                AsInfinite.of(recipe),
+                Cautions.of(recipe).shown()));
     }
 
     @Test

@@ -1,6 +1,7 @@
 package org.soakwright.planner.report;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertNull;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -241,5 +242,26 @@ class ResultJsonTest {
         assertEquals(1.0, Json.number(result, "nearest-miss", "limit"));
         assertEquals(Json.number(result, "nearest-miss", "value") - 1, Json.number(result, "nearest-miss", "by"), 1e-9);
         assertTrue(Json.number(result, "nearest-miss", "by") > 0);
+    }
+
+    /** What is not known exactly: chances, percentiles and shares, with the names of the language; nothing of it where all is known. */
+    @Test
+    void whatIsNotKnownExactlyIsTold() throws IOException {
+        String text = RECIPE.replace("diffusivity: 1e-9 m2/s", "diffusivity: {value: 1e-9 m2/s, give-or-take: 20 %}")
+                .replace("at-most: LIMIT}", "at-most: 60 g/kg, confidence: 90 %}");
+        Recipe recipe = ((Outcome.Accepted) Recipes.read("recipe.yaml", text)).recipe();
+        Run run = new Batch(recipe).follow(StepTimes.definite(recipe)).judged(Progress.NONE);
+        Map<String, @Nullable Object> result = Json.object(ResultJson.of(STAMP, run));
+        assertEquals(List.of("value", "low", "high", "samples", "refused"), Json.names(result, "chance"));
+        assertEquals("diffusivity of salt", Json.at(result, "uncertain", 0, "name"));
+        assertEquals(List.of("target", "share", "remaining"), Json.names(result, "uncertain", 0, "shares", 0));
+        assertEquals(0.9, Json.number(result, "targets", 0, "confidence"));
+        assertEquals(List.of("5", "50", "95"), Json.names(result, "targets", 0, "percentiles"));
+        double value = Json.number(result, "targets", 0, "value");
+        assertTrue(Json.number(result, "targets", 0, "percentiles", "50") < value);
+        assertTrue(value < Json.number(result, "targets", 0, "percentiles", "95"));
+        assertEquals(List.of("value", "low", "high", "samples"), Json.names(result, "targets", 1, "chance"));
+        assertTrue(Json.number(result, "targets", 0, "chance", "value") >= Json.number(result, "chance", "value"));
+        assertFalse(followed().containsKey("chance") || followed().containsKey("uncertain"));
     }
 }

@@ -3,6 +3,7 @@ package org.soakwright.recipes.library;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.stream.Collectors;
@@ -59,6 +60,11 @@ public final class RecipeFacts implements Facts {
         this.recipe = recipe;
         this.seconds = seconds.clone();
         this.ends = ends;
+    }
+
+    @Override
+    public Optional<String> allowedBy() {
+        return Optional.ofNullable(recipe.allowedBy());
     }
 
     @Override

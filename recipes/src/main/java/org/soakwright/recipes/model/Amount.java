@@ -1,11 +1,15 @@
 package org.soakwright.recipes.model;
 
+import java.util.function.UnaryOperator;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unsound;
 
 /** How much product the lot holds. */
 public sealed interface Amount {
     Place place();
+
+    /** With its quantities changed; counts stay. */
+    Amount each(UnaryOperator<Quantity> change);
 
     /** By mass, as loaded. */
     sealed interface Weighed extends Amount {
@@ -27,6 +31,11 @@ public sealed interface Amount {
         public Place place() {
             return mass.place();
         }
+
+        @Override
+        public Amount each(UnaryOperator<Quantity> change) {
+            return new ByMass(change.apply(mass));
+        }
     }
 
     /** By containers, one or more, that each hold the same mass. */
@@ -43,6 +52,11 @@ public sealed interface Amount {
         public double kg() {
             return count * each.si();
         }
+
+        @Override
+        public Amount each(UnaryOperator<Quantity> change) {
+            return new InContainers(place, count, change.apply(each));
+        }
     }
 
     /** By the volume of the pieces themselves, without the gaps between them. */
@@ -55,6 +69,11 @@ public sealed interface Amount {
         public Place place() {
             return volume.place();
         }
+
+        @Override
+        public Amount each(UnaryOperator<Quantity> change) {
+            return new ByVolume(change.apply(volume));
+        }
     }
 
     /** By the number of pieces, one or more. */
@@ -64,6 +83,11 @@ public sealed interface Amount {
                 throw new Unsound(
                         place, "a lot holds one piece or more: found " + count + "; write a count such as 500");
             }
+        }
+
+        @Override
+        public Amount each(UnaryOperator<Quantity> change) {
+            return this;
         }
     }
 }

@@ -29,12 +29,29 @@ public final class Consistency {
         if (species.start().basis() == Basis.PER_MASS) {
             problems.addAll(needsLotDensity(startPlace(species.start()), "a content by mass"));
         }
+        if (species.start() instanceof Start.Uniform uniform) {
+            problems.addAll(new Water(declared).of(uniform.content()));
+        }
+        problems.addAll(shapes.ofSkin(species.traits().skin()));
+        species.traits().skins().forEach((grade, skin) -> {
+            problems.addAll(knownGrade(new Reference(grade, skin.place())));
+            problems.addAll(shapes.ofSkin(grade, skin));
+        });
         return problems;
     }
 
-    /** Every species that exchanges with liquor is named, and no other; a ratio needs the lot's mass. */
-    public List<Problem> of(Liquor liquor) {
-        List<Problem> problems = new ArrayList<>();
+    /** The water is stated once. */
+    public static List<Problem> ofWater(@Nullable Moisture moisture, List<Species> species) {
+        return Water.problems(moisture, species);
+    }
+
+    /**
+     * Every species that exchanges with liquor is named, and no other; a ratio needs the lot's mass.
+     *
+     * @param statesTemperature whether its step does
+     */
+    public List<Problem> of(Liquor liquor, boolean statesTemperature) {
+        List<Problem> problems = new ArrayList<>(new Solutions(declared).ofLiquor(liquor, statesTemperature));
         liquor.contents().forEach((name, content) -> {
             problems.addAll(knownSpecies(new Reference(name, content.place())));
             problems.addAll(exchanges(name, content.place(), Medium.LIQUOR));
@@ -51,6 +68,15 @@ public final class Consistency {
             problems.addAll(needsLotDensity(ratio.place(), "a ratio per mass of lot"));
         }
         return problems;
+    }
+
+    /**
+     * A film that is worked out has what it is worked out from.
+     *
+     * @param kind of its step
+     */
+    public List<Problem> of(@Nullable Film film, String kind, Place step, boolean statesTemperature) {
+        return new Solutions(declared).ofFilm(film, kind, step, statesTemperature);
     }
 
     /** Between steps time passes, or nothing is said. */
@@ -77,6 +103,7 @@ public final class Consistency {
             if (content.basis() == Basis.PER_MASS) {
                 problems.addAll(needsLotDensity(content.place(), "a content by mass"));
             }
+            problems.addAll(new Water(declared).of(content));
         });
         problems.addAll(unnamed(
                 air.equilibrium().keySet(),
@@ -134,14 +161,17 @@ public final class Consistency {
                 step.temperature() != null,
                 overrides.diffusivity().keySet()));
         if (step instanceof Step.Wet wet) {
-            problems.addAll(of(wet.liquor()));
+            problems.addAll(of(wet.liquor(), step.temperature() != null));
+            problems.addAll(of(wet.film(), step.kind(), step.place(), step.temperature() != null));
             problems.addAll(ofDragOut(wet.dragOut()));
         } else {
             problems.addAll(OutOfLiquor.problems(step));
         }
         if (step instanceof Step.Dry dry) {
             problems.addAll(of(dry.air()));
+            problems.addAll(of(dry.film(), step.kind(), step.place(), step.temperature() != null));
         }
+        problems.addAll(new Water(declared).ofGain(step));
         return problems;
     }
 
@@ -162,6 +192,7 @@ public final class Consistency {
             if (pieces.limits().basis() == Basis.OF_START) {
                 problems.addAll(startsAboveZero(pieces));
             }
+            problems.addAll(new Water(declared).ofTarget(pieces));
         } else if (target instanceof Target.OfLiquor liquor) {
             problems.addAll(knownSpecies(liquor.species()));
             problems.addAll(exchanges(liquor.species().name(), liquor.species().place(), Medium.LIQUOR));
@@ -171,6 +202,12 @@ public final class Consistency {
                 problems.add(new Problem(
                         liquor.step().place(),
                         "a liquor target needs a soak or a rinse: found \"" + liquor.step() + "\", a " + kind));
+            }
+        } else if (target instanceof Target.OfMass mass) {
+            problems.addAll(needsLotDensity(mass.place(), "a total of mass"));
+            problems.addAll(new Water(declared).needsMass(mass.place(), "a total of mass"));
+            if (mass.after() != null) {
+                problems.addAll(knownStep(mass.after()));
             }
         } else if (target instanceof Target.OfTotal total && total.total() == Goal.COST) {
             problems.addAll(needsPrices(total.place(), "a total of cost"));

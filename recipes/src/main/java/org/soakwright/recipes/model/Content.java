@@ -1,12 +1,33 @@
 package org.soakwright.recipes.model;
 
+import java.util.function.UnaryOperator;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unit;
+import org.soakwright.recipes.text.Unsound;
 
-/** How much of a species is in a piece or a liquor: kg/kg or kg/m3 in SI, zero or more. */
-public record Content(Quantity amount) {
+/**
+ * How much of a species is in a piece or a liquor, zero or more: kg/kg, kg/m3, mol/m3 or a part of saturation in SI.
+ *
+ * @param per of a content of pieces by mass, what it is counted against
+ */
+public record Content(Quantity amount, Per per) {
     public Content {
-        Rules.require(Rules.ifNoContent("a content", amount));
+        if (per == Per.PRESENT) {
+            throw new Unsound(
+                    amount.place(),
+                    "a content is stated per loaded or per dry: found per present; as loaded both are one, write per:"
+                            + " loaded");
+        }
+        if (per == Per.DRY && Basis.of(amount.unit()) != Basis.PER_MASS) {
+            throw new Unsound(
+                    amount.place(), "`per: dry` counts by mass: found \"" + amount + "\"; write such as 1.8 kg/kg");
+        }
+        Rules.require(per == Per.DRY ? Rules.ifNoDryContent(amount) : Rules.ifNoContent("a content", amount));
+    }
+
+    /** Per kg as loaded, or by volume. */
+    public Content(Quantity amount) {
+        this(amount, Per.LOADED);
     }
 
     public Basis basis() {
@@ -23,6 +44,10 @@ public record Content(Quantity amount) {
 
     public Place place() {
         return amount.place();
+    }
+
+    public Content each(UnaryOperator<Quantity> change) {
+        return new Content(change.apply(amount), per);
     }
 
     @Override

@@ -18,6 +18,8 @@ import java.util.Set;
  * @param grades every grade written
  * @param shapes of the grades whose shape could be read
  * @param lotHasDensity whether the lot states a density
+ * @param lotHasMoisture whether the lot states a moisture
+ * @param statesGain whether some step states a gain
  * @param priced whether anything has a price in the recipe
  */
 public record Declared(
@@ -28,6 +30,8 @@ public record Declared(
         Set<String> grades,
         Map<String, Shape> shapes,
         boolean lotHasDensity,
+        boolean lotHasMoisture,
+        boolean statesGain,
         boolean priced) {
     public Declared {
         products = Collections.unmodifiableSet(new LinkedHashSet<>(products));

@@ -25,7 +25,12 @@ public sealed interface Diffusivities {
     List<Diffusivity> all();
 
     /** The same directions with each diffusivity changed. */
-    Diffusivities each(UnaryOperator<Diffusivity> change);
+    Diffusivities map(UnaryOperator<Diffusivity> change);
+
+    /** With the quantities of each changed. */
+    default Diffusivities each(UnaryOperator<Quantity> change) {
+        return map(one -> one.each(change));
+    }
 
     /** Whether any of them depends on the temperature of a step. */
     default boolean dependsOnTemperature() {
@@ -50,7 +55,7 @@ public sealed interface Diffusivities {
         }
 
         @Override
-        public Diffusivities each(UnaryOperator<Diffusivity> change) {
+        public Diffusivities map(UnaryOperator<Diffusivity> change) {
             return new Alike(change.apply(value));
         }
     }
@@ -81,7 +86,7 @@ public sealed interface Diffusivities {
         }
 
         @Override
-        public Diffusivities each(UnaryOperator<Diffusivity> change) {
+        public Diffusivities map(UnaryOperator<Diffusivity> change) {
             Map<Grain, Diffusivity> changed = new EnumMap<>(values);
             changed.replaceAll((grain, value) -> change.apply(value));
             return new ByGrain(place, changed);

@@ -3,6 +3,7 @@ package org.soakwright.recipes.model;
 import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.function.UnaryOperator;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unsound;
@@ -39,6 +40,12 @@ public record Grade(
             throw new Unsound(place, "a share lies above 0 % and up to 100 %: found " + Rules.percent(share));
         }
         Rules.positive("the weight", weight);
+    }
+
+    /** With its sizes and its weight changed. */
+    public Grade each(UnaryOperator<Quantity> change) {
+        List<Side> changed = sides.stream().map(side -> side.each(change)).toList();
+        return new Grade(place, name, shape, changed, share, Quantity.each(weight, change), spread, fit);
     }
 
     /** The side whose solute has the shortest way out; the first of several. */

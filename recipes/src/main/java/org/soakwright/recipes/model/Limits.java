@@ -2,6 +2,7 @@ package org.soakwright.recipes.model;
 
 import java.util.List;
 import java.util.Objects;
+import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Problem;
@@ -36,7 +37,15 @@ public record Limits(
 
     /** What a piece holds can grow beyond its start, but not beyond the whole. */
     private static List<Problem> problems(String what, Basis basis, @Nullable Quantity limit) {
-        return basis == Basis.OF_START ? Rules.ifNegative(what, limit) : Rules.ifNoContent(what, limit);
+        return basis == Basis.OF_START ? Rules.ifNegative(what, limit) : Rules.ifNoLimit(what, limit);
+    }
+
+    /** No more than the whole where that is what the limits count against. */
+    List<Problem> beyondTheWhole() {
+        return Stream.of(Rules.ifNoContent("`at-most`", atMost), Rules.ifNoContent("`at-least`", atLeast))
+                .flatMap(List::stream)
+                .filter(problem -> basis != Basis.OF_START)
+                .toList();
     }
 
     /** The unit in which the target is shown. */

@@ -4,6 +4,7 @@ import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.function.UnaryOperator;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unsound;
@@ -13,7 +14,7 @@ import org.soakwright.recipes.text.Unsound;
  *
  * @param contents what the fresh liquor holds of each species named, in the order written
  * @param othersZero whether species not named are absent; else each that exchanges with liquor is named
- * @param density of the liquor, required where a content is by mass
+ * @param density of the liquor; where it is null, a content by mass needs a species whose liquor is known
  */
 public record Liquor(
         Place place,
@@ -24,17 +25,23 @@ public record Liquor(
     public Liquor {
         contents = Collections.unmodifiableMap(new LinkedHashMap<>(contents));
         Rules.positive("the liquor's density", density);
-        if (density == null) {
-            contents.values().stream()
-                    .filter(content -> content.basis() == Basis.PER_MASS && content.si() > 0)
-                    .findFirst()
-                    .ifPresent(content -> {
-                        throw new Unsound(
-                                content.place(),
-                                "a content by mass needs the liquor's density: found \"" + content
-                                        + "\"; add density, such as 1080 kg/m3, or write the content as g/L");
-                    });
-        }
+        contents.values().forEach(content -> {
+            if (content.per() != Per.LOADED) {
+                throw new Unsound(content.place(), "a liquor has no dry mass; remove per");
+            }
+        });
+    }
+
+    /** With its quantities changed. */
+    public Liquor each(UnaryOperator<Quantity> change) {
+        Map<String, Content> changed = new LinkedHashMap<>(contents);
+        changed.replaceAll((species, content) -> content.each(change));
+        return new Liquor(place, volume.each(change), changed, othersZero, Quantity.each(density, change));
+    }
+
+    /** The same liquor with other contents. */
+    public Liquor with(Map<String, Content> others) {
+        return new Liquor(place, volume, others, othersZero, density);
     }
 
     /** What the fresh liquor holds of a species, kg/m3. */
@@ -43,13 +50,24 @@ public record Liquor(
         return content == null ? 0 : kgPerM3(content);
     }
 
-    /** A content of this liquor as kg/m3. */
+    /** Whether a content is known from what the liquor states: by volume, by mass with a density, or none at all. */
+    public boolean tells(Content content) {
+        return content.si() == 0
+                || content.basis() == Basis.PER_VOLUME
+                || (content.basis() == Basis.PER_MASS && density != null);
+    }
+
+    /**
+     * A content of this liquor as kg/m3.
+     *
+     * @throws IllegalStateException where the properties of its solution are needed, as {@link #tells} says
+     */
     public double kgPerM3(Content content) {
-        if (content.basis() != Basis.PER_MASS || content.si() == 0) {
+        if (content.basis() == Basis.PER_VOLUME || content.si() == 0) {
             return content.si();
         }
-        if (density == null) {
-            throw new IllegalStateException("the liquor has no density");
+        if (content.basis() != Basis.PER_MASS || density == null) {
+            throw new IllegalStateException("the liquor does not tell what " + content + " is");
         }
         return content.si() * density.si();
     }

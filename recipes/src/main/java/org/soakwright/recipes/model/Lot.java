@@ -3,6 +3,7 @@ package org.soakwright.recipes.model;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.UnaryOperator;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unit;
@@ -12,6 +13,8 @@ import org.soakwright.recipes.text.Unit;
  *
  * @param density of the piece as loaded; required with a mass, and wherever the recipe counts per mass
  * @param temperature of the product when it starts; null is not stated
+ * @param moisture what part of the pieces is water, where no species is the water; null is not stated
+ * @param thermalDiffusivity m2/s, above zero; null is not stated
  * @param grades one or more, of different names, whose shares sum to 1
  */
 public record Lot(
@@ -19,11 +22,36 @@ public record Lot(
         Amount amount,
         @Nullable Quantity density,
         @Nullable Quantity temperature,
+        @Nullable Moisture moisture,
+        @Nullable Quantity thermalDiffusivity,
         List<Grade> grades) {
     public Lot {
         grades = List.copyOf(grades);
         Rules.temperature(temperature);
+        Rules.positive("a thermal diffusivity", thermalDiffusivity);
         LotRules.check(place, amount, density, grades);
+    }
+
+    /** A lot of which only the amount and the pieces are known. */
+    public Lot(
+            Place place,
+            Amount amount,
+            @Nullable Quantity density,
+            @Nullable Quantity temperature,
+            List<Grade> grades) {
+        this(place, amount, density, temperature, null, null, grades);
+    }
+
+    /** With its quantities changed. */
+    public Lot each(UnaryOperator<Quantity> change) {
+        return new Lot(
+                place,
+                amount.each(change),
+                Quantity.each(density, change),
+                Quantity.each(temperature, change),
+                moisture == null ? null : moisture.each(change),
+                Quantity.each(thermalDiffusivity, change),
+                grades.stream().map(grade -> grade.each(change)).toList());
     }
 
     /** The volume of all pieces, m3. */

@@ -51,10 +51,13 @@ final class LotRules {
         }
     }
 
-    /** Of a list the reader compares the pieces themselves, before a fit comes between. */
+    /** What was put in the place of what is written contradicts nobody. Of a list the reader compares the pieces themselves, before a fit comes between. */
     private static List<Problem> contradictions(Grade grade, Quantity density) {
         OptionalDouble average = grade.averageM3();
-        return grade.weight() == null || average.isEmpty() || grade.fit() != null
+        boolean written = grade.weight() != null
+                && grade.weight().isWritten()
+                && grade.sides().stream().allMatch(side -> side.size().isWritten());
+        return grade.weight() == null || !written || average.isEmpty() || grade.fit() != null
                 ? List.of()
                 : Rules.ifNotWeighing(grade.weight(), average.getAsDouble() * density.si());
     }

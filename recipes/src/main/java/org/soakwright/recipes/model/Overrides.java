@@ -3,6 +3,7 @@ package org.soakwright.recipes.model;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.function.UnaryOperator;
 import org.soakwright.recipes.text.Unsound;
 
 /**
@@ -19,10 +20,20 @@ public record Overrides(Map<String, Diffusivities> diffusivity, Map<String, Part
             if (stated.dependsOnTemperature()) {
                 throw new Unsound(
                         stated.place(),
-                        "a step's own diffusivity holds at its temperature; remove at and activation-energy");
+                        "a step's own diffusivity holds at its temperature; write value, and give-or-take where it is"
+                                + " known, alone");
             }
         });
         diffusivity = Collections.unmodifiableMap(new LinkedHashMap<>(diffusivity));
         partition = Collections.unmodifiableMap(new LinkedHashMap<>(partition));
+    }
+
+    /** With their quantities changed. */
+    public Overrides each(UnaryOperator<Quantity> change) {
+        Map<String, Diffusivities> changed = new LinkedHashMap<>(diffusivity);
+        changed.replaceAll((species, one) -> one.each(change));
+        Map<String, Partition> others = new LinkedHashMap<>(partition);
+        others.replaceAll((species, one) -> one.each(change));
+        return new Overrides(changed, others);
     }
 }

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
@@ -20,6 +21,8 @@ import org.soakwright.recipes.text.Problem;
  * @param species one or more, of different names
  * @param between drain and transfer between steps; null is none
  * @param steps one or more, of different names, in the order they happen
+ * @param allowedBy who answers for the plan in spite of a caution that stops it; null is nobody
+ * @param confidence of every target on pieces, liquor or mass that states none; null is none
  * @param minimise what is to be least, first first; one or more
  */
 public record Recipe(
@@ -32,8 +35,11 @@ public record Recipe(
         List<Step> steps,
         List<Target> targets,
         List<Goal> minimise,
-        @Nullable Prices prices) {
+        @Nullable Prices prices,
+        @Nullable String allowedBy,
+        @Nullable Quantity confidence) {
     public Recipe {
+        Rules.confidence(confidence);
         species = List.copyOf(species);
         steps = List.copyOf(steps);
         targets = List.copyOf(targets);
@@ -42,6 +48,7 @@ public record Recipe(
         List<Problem> problems = new ArrayList<>(RecipeRules.counts(place, title, products, species, steps, minimise));
         problems.addAll(RecipeRules.agreement(declared, place, species, steps, targets, minimise));
         problems.addAll(Consistency.ofBetween(between));
+        problems.addAll(Water.problems(lot.moisture(), species));
         problems.addAll(Clinging.problems(steps, lot.massKg()));
         problems.addAll(Counting.problems(steps, targets, minimise, prices));
         Rules.require(problems);
@@ -62,6 +69,8 @@ public record Recipe(
                 shapes.keySet(),
                 shapes,
                 lot.density() != null,
+                lot.moisture() != null,
+                steps.stream().anyMatch(step -> step.head().gain() != null),
                 prices != null || steps.stream().anyMatch(step -> step.head().price() != null));
     }
 
@@ -80,6 +89,78 @@ public record Recipe(
 
     /** The same recipe with other steps. */
     public Recipe withSteps(List<Step> others) {
-        return new Recipe(place, title, products, lot, species, between, others, targets, minimise, prices);
+        return new Recipe(
+                place,
+                title,
+                products,
+                lot,
+                species,
+                between,
+                others,
+                targets,
+                minimise,
+                prices,
+                allowedBy,
+                confidence);
+    }
+
+    /** The same recipe with other species and steps. */
+    public Recipe with(List<Species> otherSpecies, List<Step> others) {
+        return new Recipe(
+                place,
+                title,
+                products,
+                lot,
+                otherSpecies,
+                between,
+                others,
+                targets,
+                minimise,
+                prices,
+                allowedBy,
+                confidence);
+    }
+
+    /** The same recipe with other targets. */
+    public Recipe withTargets(List<Target> others) {
+        return new Recipe(
+                place, title, products, lot, species, between, steps, others, minimise, prices, allowedBy, confidence);
+    }
+
+    /** The species that is the water of the pieces: the one whose substance it is, else the one named so. */
+    public Optional<Species> water() {
+        return species.stream()
+                .filter(one -> one.traits().substance() == Substance.WATER)
+                .findFirst()
+                .or(() -> species.stream().filter(Species::isWater).findFirst());
+    }
+
+    /** How surely a target is to be met; empty where nobody says, and for totals of what is planned. */
+    public Optional<Quantity> confidence(Target target) {
+        return target instanceof Target.OfTotal
+                ? Optional.empty()
+                : Optional.ofNullable(target.confidence() == null ? confidence : target.confidence());
+    }
+
+    /** With every measured quantity changed; times, counts, shares, prices and limits stay. */
+    public Recipe each(UnaryOperator<Quantity> change) {
+        return new Recipe(
+                place,
+                title,
+                products,
+                lot.each(change),
+                species.stream().map(one -> one.each(change)).toList(),
+                between,
+                steps.stream().map(step -> step.each(change)).toList(),
+                targets,
+                minimise,
+                prices,
+                allowedBy,
+                confidence);
+    }
+
+    /** Every quantity with a give-or-take, in the order of the file, each with a name of its own. */
+    public List<Uncertain> uncertain() {
+        return new Doubts(this).all();
     }
 }

@@ -1,5 +1,6 @@
 package org.soakwright.recipes.model;
 
+import java.util.function.UnaryOperator;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unsound;
 
@@ -8,10 +9,20 @@ public sealed interface Renewal {
     /** The most fills one rinse may take. */
     int MOST_FILLS = 1000;
 
+    /** With its quantities changed; fills stay. */
+    default Renewal each(UnaryOperator<Quantity> change) {
+        return this;
+    }
+
     /** Fresh liquor runs in, m3/s, above zero, and the vessel overflows. */
     record Flow(Quantity rate) implements Renewal {
         public Flow {
             Rules.positive("the flow", rate);
+        }
+
+        @Override
+        public Renewal each(UnaryOperator<Quantity> change) {
+            return new Flow(change.apply(rate));
         }
     }
 

@@ -4,6 +4,7 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.text.Kind;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Problem;
 import org.soakwright.recipes.text.Unsound;
@@ -21,6 +22,15 @@ final class Rules {
 
     /** The heaviest element weighs 22 600 kg/m3. */
     private static final double MOST_KG_PER_M3 = 25e3;
+
+    /** Gels that swell hold some hundred times their own mass. */
+    private static final double MOST_PER_DRY = 1000;
+
+    /** Water itself has 55 mol/L. */
+    private static final double MOST_MOL_PER_M3 = 100e3;
+
+    private static final double MOST_GAIN = 100;
+    private static final double MOST_KELVINS = 100;
 
     /** What edges, crusts and a density in round numbers may make of a weight. */
     private static final double WEIGHT_TOLERANCE = 0.1;
@@ -99,10 +109,83 @@ final class Rules {
                     what + " by mass is no more than the whole, 1000 g/kg (100 %)",
                     "; write such as 190 g/kg");
         }
+        if (content != null && Basis.of(content.unit()) == Basis.OF_SATURATION && content.si() > 1) {
+            return found(
+                    content,
+                    what + " is no more than what dissolves, 100 % of saturation",
+                    "; write such as 75 % of saturation");
+        }
+        if (content != null && Basis.of(content.unit()) == Basis.PER_AMOUNT) {
+            return content.si() > MOST_MOL_PER_M3
+                    ? found(content, what + " by amount is at most 100 mol/L", "; write such as 2 mol/L")
+                    : ifNegative(what, content);
+        }
         if (content != null && content.si() > MOST_KG_PER_M3) {
             return found(content, what + " by volume is at most 25000 kg/m3 (25000 g/L)", "; write such as 30 g/L");
         }
         return ifNegative(what, content);
+    }
+
+    /** Per dry mass there may be many times as much. */
+    static List<Problem> ifNoDryContent(Quantity content) {
+        return content.si() > MOST_PER_DRY
+                ? found(content, "a content per dry mass is at most 1000 kg/kg", "; write such as 1.8 kg/kg")
+                : ifNegative("a content", content);
+    }
+
+    /** A limit can be many times the dry mass, or the water; what it is against stands elsewhere. */
+    static List<Problem> ifNoLimit(String what, @Nullable Quantity limit) {
+        if (limit == null || Basis.of(limit.unit()) != Basis.PER_MASS || limit.si() <= 1) {
+            return ifNoContent(what, limit);
+        }
+        return limit.si() > MOST_PER_DRY
+                ? found(limit, what + " per dry mass is at most 1000 kg/kg", "; write such as 1.8 kg/kg")
+                : List.of();
+    }
+
+    /** A part that is neither nothing nor the whole. */
+    static List<Problem> ifNotWithin(String what, Quantity part, String example) {
+        return part.si() > 0 && part.si() < 1
+                ? List.of()
+                : found(part, what + " lies above 0 % and below 100 %", "; write such as " + example);
+    }
+
+    /** What is less sure than a coin's toss is no confidence. */
+    static void confidence(@Nullable Quantity confidence) {
+        require(
+                confidence == null || (confidence.si() > 0.5 && confidence.si() < 1)
+                        ? List.of()
+                        : found(confidence, "a confidence lies above 50 % and below 100 %", "; write such as 90 %"));
+    }
+
+    /** A lot may lose all but nothing, and soak up a good deal. */
+    static void gain(@Nullable Quantity gain) {
+        require(
+                gain == null || (gain.si() > -1 && gain.si() <= MOST_GAIN)
+                        ? List.of()
+                        : found(gain, "a gain lies above -100 % and up to 10000 %", "; write such as 12 % or -8 %"));
+    }
+
+    /** A give-or-take is a share, or kelvins of a temperature; nothing has none. */
+    static List<Problem> ifNoGiveOrTake(Quantity quantity) {
+        Quantity known = quantity.giveOrTake();
+        if (known == null) {
+            return List.of();
+        }
+        if (quantity.isTemperature()) {
+            return Kind.TEMPERATURE_DIFFERENCE.has(known.unit()) && known.si() > 0 && known.si() <= MOST_KELVINS
+                    ? List.of()
+                    : found(
+                            known,
+                            "give-or-take of a temperature lies above 0 K and up to 100 K",
+                            "; write such as 2 K");
+        }
+        if (quantity.si() == 0) {
+            return found(known, "a value of nothing has no give-or-take", "; remove it");
+        }
+        return Kind.FRACTION.has(known.unit()) && known.si() > 0 && known.si() <= 1
+                ? List.of()
+                : found(known, "give-or-take lies above 0 % and up to 100 %", "; write such as 20 %");
     }
 
     /** A weight is near what sizes and density make. */

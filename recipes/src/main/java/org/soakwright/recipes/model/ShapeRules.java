@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Problem;
 
 /** What the shapes of the pieces ask of a species. */
@@ -41,6 +42,26 @@ final class ShapeRules {
             problems.addAll(unused(species, byGrain));
         }
         return problems;
+    }
+
+    /** One face can be covered alone where the first side has two that can be told apart. */
+    List<Problem> ofSkin(@Nullable Skin skin) {
+        return skin == null
+                ? List.of()
+                : declared.shapes().keySet().stream()
+                        .flatMap(grade -> ofSkin(grade, skin).stream())
+                        .limit(1)
+                        .toList();
+    }
+
+    List<Problem> ofSkin(String grade, Skin skin) {
+        Shape shape = declared.shapes().get(grade);
+        return skin.face() == Faces.BOTH || shape == null || shape.dimensions().get(0) == Dimension.THICKNESS
+                ? List.of()
+                : List.of(new Problem(
+                        skin.place(),
+                        "only a slab and a brick have one face that can be covered alone: found face: one, and " + grade
+                                + " is a " + shape.word() + "; write face: both"));
     }
 
     private static List<Problem> missing(String species, Diffusivities.ByGrain stated, String grade, Shape shape) {

@@ -1,5 +1,6 @@
 package org.soakwright.recipes.model;
 
+import java.util.function.UnaryOperator;
 import org.soakwright.recipes.text.Unsound;
 
 /**
@@ -14,6 +15,10 @@ public record Side(Dimension dimension, Quantity size, Faces faces) {
         if (faces == Faces.ONE && !dimension.hasFaces()) {
             throw new Unsound(size.place(), "a " + dimension.word() + " has no faces to seal");
         }
+    }
+
+    public Side each(UnaryOperator<Quantity> change) {
+        return new Side(dimension, change.apply(size), faces);
     }
 
     /** Metres from the wetted face to where the solute has farthest to go: half the size, or all of it with one face. */

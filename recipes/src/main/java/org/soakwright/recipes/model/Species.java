@@ -3,6 +3,7 @@ package org.soakwright.recipes.model;
 import java.util.Collections;
 import java.util.EnumSet;
 import java.util.Set;
+import java.util.function.UnaryOperator;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unsound;
@@ -14,6 +15,7 @@ import org.soakwright.recipes.text.Unsound;
  * @param diffusivityVaries how the diffusivity differs from piece to piece, in all directions and steps alike; null is not
  *     at all
  * @param partition (kg/m3 of piece) / (kg/m3 of liquor) at equilibrium, above zero
+ * @param traits what it is, how it moves in the liquor, what skin holds it back
  * @param exchangesWith one medium or both; towards any other the piece is sealed for this species
  */
 public record Species(
@@ -24,6 +26,7 @@ public record Species(
         Diffusivities diffusivity,
         @Nullable Spread diffusivityVaries,
         Partition partition,
+        Traits traits,
         Set<Medium> exchangesWith) {
     public Species {
         Rules.named("a species", name, place);
@@ -47,8 +50,33 @@ public record Species(
         return exchangesWith.contains(medium);
     }
 
+    /** Whether it is the water of the piece: by its substance, or by its name where no substance is stated. */
+    public boolean isWater() {
+        return traits.substance() == null ? name.equals("water") : traits.substance() == Substance.WATER;
+    }
+
     /** The same species with another diffusivity. */
     public Species withDiffusivity(Diffusivities other) {
-        return new Species(place, name, start, startVaries, other, diffusivityVaries, partition, exchangesWith);
+        return new Species(place, name, start, startVaries, other, diffusivityVaries, partition, traits, exchangesWith);
+    }
+
+    /** The same species with another start. */
+    public Species with(Start other) {
+        return new Species(
+                place, name, other, startVaries, diffusivity, diffusivityVaries, partition, traits, exchangesWith);
+    }
+
+    /** With its quantities changed; what varies from piece to piece stays. */
+    public Species each(UnaryOperator<Quantity> change) {
+        return new Species(
+                place,
+                name,
+                start.each(change),
+                startVaries,
+                diffusivity.each(change),
+                diffusivityVaries,
+                partition.each(change),
+                traits.each(change),
+                exchangesWith);
     }
 }

@@ -2,6 +2,7 @@ package org.soakwright.recipes.model;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.UnaryOperator;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Problem;
 import org.soakwright.recipes.text.Shown;
@@ -17,6 +18,9 @@ public sealed interface Start {
 
     /** Whether there is none anywhere, so that nothing can be a share of it. */
     boolean isZero();
+
+    /** With its contents changed. */
+    Start each(UnaryOperator<Quantity> change);
 
     /** The same everywhere. */
     record Uniform(Content content) implements Start {
@@ -34,6 +38,11 @@ public sealed interface Start {
         public boolean isZero() {
             return content.si() == 0;
         }
+
+        @Override
+        public Start each(UnaryOperator<Quantity> change) {
+            return new Uniform(content.each(change));
+        }
     }
 
     /** A content at a position: 0 is the centre or the sealed face, 1 the wetted surface. */
@@ -44,6 +53,16 @@ public sealed interface Start {
         public Profile {
             points = List.copyOf(points);
             Rules.require(problems(place, points));
+        }
+
+        @Override
+        public Start each(UnaryOperator<Quantity> change) {
+            return new Profile(
+                    place,
+                    points.stream()
+                            .map(point ->
+                                    new Point(point.position(), point.content().each(change), point.place()))
+                            .toList());
         }
 
         private static List<Problem> problems(Place place, List<Point> points) {

@@ -1,5 +1,6 @@
 package org.soakwright.recipes.model;
 
+import java.util.function.UnaryOperator;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.text.Place;
 
@@ -12,6 +13,9 @@ public sealed interface Step permits Step.Wet, Step.Rest, Step.Dry {
 
     /** The same step with another head. */
     Step with(StepHead head);
+
+    /** With its quantities changed; its times stay. */
+    Step each(UnaryOperator<Quantity> change);
 
     default Place place() {
         return head().place();
@@ -41,6 +45,9 @@ public sealed interface Step permits Step.Wet, Step.Rest, Step.Dry {
 
         /** The same step with another liquor. */
         Wet with(Liquor liquor);
+
+        /** The same step with another film. */
+        Wet with(Film film);
     }
 
     /** In one liquor for the whole time. */
@@ -66,6 +73,16 @@ public sealed interface Step permits Step.Wet, Step.Rest, Step.Dry {
         @Override
         public Soak with(Liquor other) {
             return new Soak(head, other, film, dragOut);
+        }
+
+        @Override
+        public Soak with(Film other) {
+            return new Soak(head, liquor, other, dragOut);
+        }
+
+        @Override
+        public Soak each(UnaryOperator<Quantity> change) {
+            return new Soak(head.each(change), liquor.each(change), film.each(change), Quantity.each(dragOut, change));
         }
     }
 
@@ -96,8 +113,23 @@ public sealed interface Step permits Step.Wet, Step.Rest, Step.Dry {
             return new Rinse(head, other, renewal, film, dragOut);
         }
 
+        @Override
+        public Rinse with(Film other) {
+            return new Rinse(head, liquor, renewal, other, dragOut);
+        }
+
         public Rinse with(Renewal other) {
             return new Rinse(head, liquor, other, film, dragOut);
+        }
+
+        @Override
+        public Rinse each(UnaryOperator<Quantity> change) {
+            return new Rinse(
+                    head.each(change),
+                    liquor.each(change),
+                    renewal.each(change),
+                    film.each(change),
+                    Quantity.each(dragOut, change));
         }
     }
 
@@ -112,6 +144,11 @@ public sealed interface Step permits Step.Wet, Step.Rest, Step.Dry {
         public Rest with(StepHead other) {
             return new Rest(other);
         }
+
+        @Override
+        public Rest each(UnaryOperator<Quantity> change) {
+            return new Rest(head.each(change));
+        }
     }
 
     /** In air: only species that exchange with air move, towards the equilibrium content. */
@@ -124,6 +161,11 @@ public sealed interface Step permits Step.Wet, Step.Rest, Step.Dry {
         @Override
         public Dry with(StepHead other) {
             return new Dry(other, air, film);
+        }
+
+        @Override
+        public Dry each(UnaryOperator<Quantity> change) {
+            return new Dry(head.each(change), air.each(change), film.each(change));
         }
     }
 }

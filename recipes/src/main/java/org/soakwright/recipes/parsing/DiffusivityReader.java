@@ -13,12 +13,12 @@ import org.soakwright.recipes.text.Tree;
 
 /** Reads a diffusivity: one value, or one for each direction of the grain. */
 final class DiffusivityReader {
-    private static final String EXAMPLE = "8e-10 m2/s";
-
+    private final Known known;
     private final Values values;
     private final Problems problems;
 
     DiffusivityReader(Values values) {
+        this.known = new Known(values);
         this.values = values;
         this.problems = values.problems();
     }
@@ -36,8 +36,14 @@ final class DiffusivityReader {
     Diffusivities ofStep(String species, Tree tree) {
         String what = what(species);
         return tree instanceof Tree.Entries entries && byGrain(entries)
-                ? byGrain(what, Fields.of(tree, Section.STEP_GRAIN, problems), Section.VALUE)
-                : alike(one(what, tree, Section.VALUE));
+                ? byGrain(what, Fields.of(tree, Section.STEP_GRAIN, problems), Section.KNOWN)
+                : alike(one(what, tree, Section.KNOWN));
+    }
+
+    /** In the liquor around the pieces. */
+    @Nullable
+    Diffusivity inLiquor(String species, Tree tree) {
+        return one(what(species) + " in the liquor", tree, Section.IN_LIQUOR);
     }
 
     private static String what(String species) {
@@ -47,6 +53,10 @@ final class DiffusivityReader {
     private static boolean byGrain(Tree.Entries entries) {
         return entries.entries().stream()
                 .anyMatch(entry -> Section.STEP_GRAIN.keys().contains(entry.key()));
+    }
+
+    private static boolean names(Tree.Entries entries) {
+        return Values.has(entries, "from") && !Values.has(entries, "to");
     }
 
     private static @Nullable Diffusivities alike(@Nullable Diffusivity value) {
@@ -71,18 +81,21 @@ final class DiffusivityReader {
     }
 
     private @Nullable Diffusivity one(String what, @Nullable Tree tree, Section section) {
-        if (section == Section.VALUE || !(tree instanceof Tree.Entries)) {
-            Quantity value = values.quantity(what, tree, Kind.DIFFUSIVITY);
-            return value == null ? null : problems.attempt(() -> new Diffusivity(value, null, null));
-        }
-        Fields fields = Fields.of(tree, section, problems);
-        if (fields == null) {
+        if (section == Section.KNOWN && tree instanceof Tree.Entries entries && names(entries)) {
+            problems.add(
+                    entries.place(),
+                    "a step states its own diffusivity as a value: found from; write such as 8e-10 m2/s");
             return null;
         }
-        Quantity value = values.quantity(what, fields.need("value", EXAMPLE), Kind.DIFFUSIVITY);
-        Quantity at = values.quantity("at", fields.get("at"), Kind.TEMPERATURE);
-        Quantity energy = values.quantity("activation-energy", fields.get("activation-energy"), Kind.MOLAR_ENERGY);
-        boolean broken = (at == null && fields.has("at")) || (energy == null && fields.has("activation-energy"));
-        return value == null || broken ? null : problems.attempt(() -> new Diffusivity(value, at, energy));
+        if (section == Section.KNOWN || !(tree instanceof Tree.Entries entries)) {
+            Quantity value = known.quantity(what, tree, Kind.DIFFUSIVITY);
+            return value == null ? null : problems.attempt(() -> Diffusivity.of(value));
+        }
+        if (Values.has(entries, "to") || Values.has(entries, "any-of")) {
+            values.quantity(what, tree, Kind.DIFFUSIVITY);
+            return null;
+        }
+        Fields fields = Fields.of(tree, section, problems);
+        return fields == null ? null : new LawReader(values, fields, what).diffusivity();
     }
 }

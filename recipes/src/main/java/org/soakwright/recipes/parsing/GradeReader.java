@@ -89,7 +89,8 @@ final class GradeReader {
         SizeReader sizes = new SizeReader(values, fields, shape);
         boolean ownSizes = sizes.noneOfOtherShapes();
         Quantity weight = values.checked(
-                values.quantity("weight", fields.get("weight"), Kind.MASS), found -> found.positive("the weight"));
+                new Known(values).quantity("weight", fields.get("weight"), Kind.MASS),
+                found -> found.positive("the weight"));
         Spread own = values.spread("spread", fields.get("spread"));
         boolean broken = (weight == null && fields.has("weight")) || (own == null && fields.has("spread"));
         if (measured != null) {

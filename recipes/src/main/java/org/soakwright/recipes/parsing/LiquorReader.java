@@ -8,7 +8,6 @@ import org.soakwright.recipes.model.Air;
 import org.soakwright.recipes.model.Consistency;
 import org.soakwright.recipes.model.Content;
 import org.soakwright.recipes.model.Declared;
-import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Liquor;
 import org.soakwright.recipes.model.LiquorVolume;
 import org.soakwright.recipes.model.Quantity;
@@ -18,14 +17,16 @@ import org.soakwright.recipes.text.Measurement;
 import org.soakwright.recipes.text.Problems;
 import org.soakwright.recipes.text.Tree;
 
-/** Reads what surrounds the pieces: liquor, air and the film between. */
+/** Reads what surrounds the pieces: liquor and air. */
 final class LiquorReader {
+    private final Known known;
     private final Values values;
     private final Problems problems;
     private final Declared declared;
     private final Consistency consistency;
 
     LiquorReader(Values values, Declared declared) {
+        this.known = new Known(values);
         this.values = values;
         this.problems = values.problems();
         this.declared = declared;
@@ -39,19 +40,19 @@ final class LiquorReader {
     }
 
     @Nullable
-    Liquor liquor(@Nullable Fields fields) {
+    Liquor liquor(@Nullable Fields fields, boolean statesTemperature) {
         if (fields == null) {
             return null;
         }
         LiquorVolume volume = volume(fields);
-        Quantity density = values.quantity("density", fields.get("density"), Kind.DENSITY);
+        Quantity density = known.quantity("density", fields.get("density"), Kind.DENSITY);
         boolean othersZero = othersZero(fields.get("others"));
         Map<String, Content> contents = new LinkedHashMap<>();
         boolean allRead = true;
         for (Tree.Entry entry : fields.all()) {
             if (declared.speciesNames().contains(entry.key())
                     && !Section.RINSE_LIQUOR.keys().contains(entry.key())) {
-                Content content = values.content(entry.key(), entry.value());
+                Content content = known.ofLiquor(entry.key(), entry.value());
                 if (content == null) {
                     allRead = false;
                 } else {
@@ -65,7 +66,7 @@ final class LiquorReader {
                 ? null
                 : problems.attempt(() -> new Liquor(fields.place(), assumed, contents, othersZero, density));
         if (liquor != null) {
-            problems.addAll(consistency.of(liquor));
+            problems.addAll(consistency.of(liquor, statesTemperature));
         }
         return volume == null ? null : liquor;
     }
@@ -82,7 +83,7 @@ final class LiquorReader {
             return new LiquorVolume.Unlimited(leaf.place());
         }
         boolean ratio = key.equals("ratio");
-        Quantity value = values.quantity(key, tree, ratio ? Kind.LIQUOR_RATIO : Kind.VOLUME);
+        Quantity value = known.quantity(key, tree, ratio ? Kind.LIQUOR_RATIO : Kind.VOLUME);
         return value == null
                 ? null
                 : problems.attempt(() -> ratio ? new LiquorVolume.Ratio(value) : new LiquorVolume.Volume(value));
@@ -122,7 +123,7 @@ final class LiquorReader {
             return fills(fills);
         }
         if (flow != null) {
-            Quantity rate = values.quantity("flow", flow, Kind.FLOW);
+            Quantity rate = known.quantity("flow", flow, Kind.FLOW);
             return rate == null ? null : problems.attempt(() -> new Renewal.Flow(rate));
         }
         return liquor == null ? null : new Renewal.Plenty();
@@ -146,7 +147,7 @@ final class LiquorReader {
         Map<String, Content> read = new LinkedHashMap<>();
         for (Tree.Entry entry : contents.all()) {
             if (declared.speciesNames().contains(entry.key())) {
-                Content content = values.content(entry.key(), entry.value());
+                Content content = known.ofPiece(entry.key(), entry.value(), Section.EQUILIBRIUM);
                 if (content == null) {
                     return null;
                 }
@@ -156,27 +157,5 @@ final class LiquorReader {
         Air air = new Air(fields.place(), read);
         problems.addAll(consistency.of(air));
         return air;
-    }
-
-    @Nullable
-    Film film(@Nullable Tree tree) {
-        if (tree instanceof Tree.Entries) {
-            Fields fields = Fields.of(tree, Section.FILM, problems);
-            boolean later = fields != null
-                    && fields.all().stream()
-                            .anyMatch(entry -> Section.FILM.later().contains(entry.key()));
-            Tree coefficient =
-                    fields == null ? null : later ? fields.get("coefficient") : fields.need("coefficient", "2e-6 m/s");
-            Quantity value = values.quantity("coefficient", coefficient, Kind.SPEED);
-            return value == null ? null : problems.attempt(() -> new Film.Coefficient(value));
-        }
-        if (tree instanceof Tree.Leaf leaf && leaf.text().equals("negligible")) {
-            return new Film.Negligible();
-        }
-        if (tree != null && !(tree instanceof Tree.Broken)) {
-            problems.add(
-                    tree.place(), "film: found " + tree.label() + "; write negligible, or {coefficient: 2e-6 m/s}");
-        }
-        return null;
     }
 }

@@ -10,6 +10,7 @@ import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Amount;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Lot;
+import org.soakwright.recipes.model.Moisture;
 import org.soakwright.recipes.model.Names;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reference;
@@ -24,11 +25,14 @@ final class LotReader {
     private static final String PIECES = "[{name: thin, shape: slab, thickness: 18 mm, share: 100 %}]";
 
     private final Lists lists;
+    private final Known known;
     private final Values values;
     private final Problems problems;
     private final Map<String, Shape> shapes = new LinkedHashMap<>();
     private final List<Reference> names = new ArrayList<>();
     private boolean hasDensity = true;
+    private boolean hasMoisture;
+    private @Nullable Moisture moisture;
 
     /**
      * What every grade needs of its lot.
@@ -44,6 +48,7 @@ final class LotReader {
 
     LotReader(Values values, Lists lists) {
         this.lists = lists;
+        this.known = new Known(values);
         this.values = values;
         this.problems = values.problems();
     }
@@ -65,6 +70,17 @@ final class LotReader {
         return hasDensity;
     }
 
+    /** Whether the lot states a moisture, once it is read. */
+    boolean hasMoisture() {
+        return hasMoisture;
+    }
+
+    /** The moisture, once the lot is read; null where there is none or it is broken. */
+    @Nullable
+    Moisture moisture() {
+        return moisture;
+    }
+
     @Nullable
     Lot lot(Tree tree) {
         Fields fields = Fields.of(tree, Section.LOT, problems);
@@ -75,9 +91,13 @@ final class LotReader {
         // A mass without one is reported once, at the lot.
         hasDensity = fields.has("density") || fields.has("mass") || fields.has("containers");
         Quantity density = values.checked(
-                values.quantity("density", fields.get("density"), Kind.DENSITY),
-                found -> found.positive("the density"));
-        Quantity temperature = values.temperature(fields.get("temperature"));
+                known.quantity("density", fields.get("density"), Kind.DENSITY), found -> found.positive("the density"));
+        Quantity temperature = known.temperature("temperature", fields.get("temperature"));
+        Quantity thermal = known.quantity("thermal-diffusivity", fields.get("thermal-diffusivity"), Kind.DIFFUSIVITY);
+        Tree moistureTree = fields.get("moisture");
+        hasMoisture = moistureTree != null;
+        moisture = moistureTree == null ? null : moisture(moistureTree);
+        Moisture read = moisture;
         Spread spread = values.spread("spread", fields.get("spread"));
         Tree pieces = fields.need("pieces", PIECES);
         boolean only = pieces instanceof Tree.Items items && items.items().size() == 1;
@@ -85,10 +105,22 @@ final class LotReader {
         problems.addAll(Names.duplicates("grades", names));
         boolean broken = (density == null && fields.has("density"))
                 || (temperature == null && fields.has("temperature"))
+                || (thermal == null && fields.has("thermal-diffusivity"))
+                || (read == null && hasMoisture)
                 || (spread == null && fields.has("spread"));
         return amount == null || grades == null || broken
                 ? null
-                : problems.attempt(() -> new Lot(fields.place(), amount, density, temperature, grades));
+                : problems.attempt(() -> new Lot(fields.place(), amount, density, temperature, read, thermal, grades));
+    }
+
+    private @Nullable Moisture moisture(Tree tree) {
+        Fields fields = Fields.of(tree, Section.MOISTURE, problems);
+        if (fields == null) {
+            return null;
+        }
+        Quantity start = known.quantity("the moisture at the start", fields.need("start", "56 %"), Kind.FRACTION);
+        Quantity end = known.quantity("the moisture at the end", fields.need("end", "78 %"), Kind.FRACTION);
+        return start == null || end == null ? null : problems.attempt(() -> new Moisture(fields.place(), start, end));
     }
 
     private @Nullable Amount amount(Fields fields) {
@@ -105,7 +137,7 @@ final class LotReader {
             return containers(tree);
         }
         boolean mass = key.equals("mass");
-        Quantity quantity = values.quantity(key, tree, mass ? Kind.MASS : Kind.VOLUME);
+        Quantity quantity = known.quantity(key, tree, mass ? Kind.MASS : Kind.VOLUME);
         if (quantity == null) {
             return null;
         }
@@ -118,7 +150,7 @@ final class LotReader {
             return null;
         }
         Long count = values.count("count", fields.need("count", "24"), "24");
-        Quantity each = values.quantity("each", fields.need("each", "25 kg"), Kind.MASS);
+        Quantity each = known.quantity("each", fields.need("each", "25 kg"), Kind.MASS);
         return count == null || each == null
                 ? null
                 : problems.attempt(() -> new Amount.InContainers(fields.place(), count, each));

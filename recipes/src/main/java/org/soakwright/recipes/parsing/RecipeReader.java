@@ -59,7 +59,7 @@ public final class RecipeReader {
         List<Species> species = speciesTree == null ? List.of() : speciesReader.species(speciesTree);
         Tree stepsTree = fields.need("steps", "[{soak: first water, …}]");
         Map<String, String> stepKinds = StepReader.declared(stepsTree, problems);
-        boolean priced = fields.has("prices") || StepReader.anyPriced(stepsTree);
+        boolean priced = fields.has("prices") || StepReader.anyHas(stepsTree, "prices");
         Declared declared = new Declared(
                 products,
                 speciesReader.names(),
@@ -68,9 +68,12 @@ public final class RecipeReader {
                 lots.gradeNames(),
                 lots.shapes(),
                 lots.hasDensity(),
+                lots.hasMoisture(),
+                StepReader.anyHas(stepsTree, "gain"),
                 priced);
         Consistency consistency = new Consistency(declared);
         species.forEach(one -> problems.addAll(consistency.of(one)));
+        problems.addAll(Consistency.ofWater(lots.moisture(), species));
         Quantity between = values.quantity("between", fields.get("between"), Kind.DURATION);
         problems.addAll(Consistency.ofBetween(between));
         List<Step> steps = stepsTree == null ? List.of() : new StepReader(values, declared).steps(stepsTree);
@@ -79,12 +82,26 @@ public final class RecipeReader {
         List<Goal> goals = goals(fields.get("minimise"), consistency);
         Tree pricesTree = fields.get("prices");
         Prices prices = pricesTree == null ? null : new PriceReader(values).ofRecipe(pricesTree);
+        Tree allowedTree = fields.get("allowed-by");
+        String allowedBy = values.name("allowed-by", allowedTree, "E. Vik, quality");
+        Quantity confidence = values.confidence(fields.get("confidence"));
         problems.addAll(Counting.problems(steps, targets, goals, prices));
         if (!problems.isEmpty() || title == null || lot == null) {
             return null;
         }
-        return problems.attempt(() ->
-                new Recipe(fields.place(), title, products, lot, species, between, steps, targets, goals, prices));
+        return problems.attempt(() -> new Recipe(
+                fields.place(),
+                title,
+                products,
+                lot,
+                species,
+                between,
+                steps,
+                targets,
+                goals,
+                prices,
+                allowedBy,
+                confidence));
     }
 
     private void language(@Nullable Tree tree) {

@@ -22,12 +22,25 @@ enum Section {
                     "steps",
                     "targets",
                     "minimise",
-                    "prices"),
-            List.of("measured", "confidence")),
+                    "prices",
+                    "confidence",
+                    "allowed-by"),
+            List.of("measured")),
     LOT(
             "a lot",
-            List.of("mass", "volume", "count", "containers", "density", "temperature", "pieces", "spread"),
-            List.of("moisture")),
+            List.of(
+                    "mass",
+                    "volume",
+                    "count",
+                    "containers",
+                    "density",
+                    "temperature",
+                    "thermal-diffusivity",
+                    "moisture",
+                    "pieces",
+                    "spread"),
+            List.of()),
+    MOISTURE("a moisture", List.of("start", "end"), List.of()),
     CONTAINERS("containers", List.of("count", "each"), List.of()),
     GRADE(
             "a grade",
@@ -44,37 +57,57 @@ enum Section {
                     "spread",
                     "faces",
                     "share"),
-            List.of("moisture")),
+            List.of()),
     MEASURED("a measured list", List.of("file", "grades"), List.of()),
     FACES("faces", List.of("thickness", "width", "length"), List.of()),
     ONE_SPECIES(
             "a species",
-            List.of("start", "diffusivity", "partition", "exchanges-with"),
-            List.of("skin", "moisture", "gain", "per", "measured")),
-    START("a start", List.of("value", "varies"), List.of("give-or-take")),
-    PROFILE("a start", List.of("profile"), Later.OF_VALUES),
+            List.of(
+                    "start",
+                    "diffusivity",
+                    "partition",
+                    "exchanges-with",
+                    "substance",
+                    "molar-mass",
+                    "in-liquor",
+                    "skin"),
+            List.of("measured")),
+    START("a start", List.of("value", "per", "varies", "give-or-take"), List.of()),
+    PROFILE("a start", List.of("profile"), List.of("varies")),
     DIFFUSIVITY(
             "a diffusivity",
-            List.of("value", "at", "activation-energy", "varies"),
-            List.of("give-or-take", "from", "measured")),
+            List.of("value", "at", "activation-energy", "scaling", "points", "from", "give-or-take", "varies"),
+            List.of("measured")),
     GRAIN(
             "a diffusivity by direction",
             List.of("along", "across", "thickness", "width", "length", "varies"),
-            List.of("give-or-take")),
-    DIRECTION(
-            "the diffusivity in a direction",
-            List.of("value", "at", "activation-energy"),
-            List.of("give-or-take", "from", "measured")),
+            List.of()),
+    DIRECTION("the diffusivity in a direction", Forms.OF_DIFFUSIVITIES, List.of("measured")),
+    IN_LIQUOR("the diffusivity in the liquor", Forms.OF_DIFFUSIVITIES, List.of("measured")),
     STEP_GRAIN(
             "a diffusivity by direction in a step",
             List.of("along", "across", "thickness", "width", "length"),
-            List.of("give-or-take")),
-    VALUE("a value", List.of("value"), Later.OF_VALUES),
-    TIME_BETWEEN("a free time", List.of("from", "to", "grain", "planned"), Later.OF_VALUES),
-    TIME_ANY_OF("a free time", List.of("any-of", "planned"), Later.OF_VALUES),
+            List.of()),
+    PARTITION("a partition", List.of("value", "from", "give-or-take"), List.of("measured")),
+    SKIN("a skin", List.of("permeance", "face"), List.of()),
+    BY_GRADE("the skin of each grade", List.of(), List.of()),
+    VALUE("a value", List.of("value"), List.of("varies")),
+    KNOWN("a value", List.of("value", "give-or-take"), List.of("varies")),
+    TIME_BETWEEN("a free time", List.of("from", "to", "grain", "planned"), List.of("varies")),
+    TIME_ANY_OF("a free time", List.of("any-of", "planned"), List.of("varies")),
     SOAK(
             "a soak",
-            List.of("soak", "liquor", "temperature", "film", "drag-out", "time", "diffusivity", "partition", "prices"),
+            List.of(
+                    "soak",
+                    "liquor",
+                    "temperature",
+                    "film",
+                    "drag-out",
+                    "time",
+                    "gain",
+                    "diffusivity",
+                    "partition",
+                    "prices"),
             Later.OF_STEPS),
     RINSE(
             "a rinse",
@@ -86,32 +119,41 @@ enum Section {
                     "film",
                     "drag-out",
                     "time",
+                    "gain",
                     "diffusivity",
                     "partition",
                     "prices"),
             Later.OF_STEPS),
-    REST("a rest", List.of("rest", "temperature", "time", "diffusivity"), Later.OF_STEPS),
-    DRY("a dry step", List.of("dry", "air", "film", "temperature", "time", "diffusivity"), Later.OF_STEPS),
-    SOAK_LIQUOR(
-            "the liquor of a soak",
-            List.of("volume", "ratio", "density", "others"),
-            List.of("gain", "moisture", "measured")),
-    RINSE_LIQUOR(
-            "the liquor of a rinse",
-            List.of("volume", "ratio", "flow", "density", "others"),
-            List.of("gain", "moisture", "measured")),
-    AIR("air", List.of("equilibrium"), List.of("temperature", "humidity", "speed", "moisture")),
-    FILM("a film", List.of("coefficient"), List.of("still", "speed", "stirred", "packed", "skin")),
+    REST("a rest", List.of("rest", "temperature", "time", "gain", "diffusivity"), Later.OF_STEPS),
+    DRY("a dry step", List.of("dry", "air", "film", "temperature", "time", "gain", "diffusivity"), Later.OF_STEPS),
+    SOAK_LIQUOR("the liquor of a soak", List.of("volume", "ratio", "density", "others"), List.of("measured")),
+    RINSE_LIQUOR("the liquor of a rinse", List.of("volume", "ratio", "flow", "density", "others"), List.of("measured")),
+    AIR("air", List.of("equilibrium"), List.of("temperature", "humidity", "speed")),
+    EQUILIBRIUM("an equilibrium", List.of("value", "per", "give-or-take"), List.of()),
+    FILM("a film", List.of("coefficient", "still", "speed", "stirred", "packed", "length"), List.of()),
+    STIRRED("a stirred liquor", List.of("power"), List.of()),
+    PACKED("a packed bed", List.of("speed", "void"), List.of()),
     BY_SPECIES("this list of species", List.of(), List.of()),
     PIECE_TARGET(
             "a target",
-            List.of("species", "reading", "at-most", "at-least", "of", "grade", "after", "share"),
-            List.of("confidence", "phase", "gain", "per", "moisture", "measured")),
+            List.of(
+                    "species",
+                    "reading",
+                    "at-most",
+                    "at-least",
+                    "of",
+                    "per",
+                    "phase",
+                    "grade",
+                    "after",
+                    "share",
+                    "confidence"),
+            List.of("measured")),
     LIQUOR_TARGET(
-            "a liquor target",
-            List.of("liquor", "species", "reading", "at-most", "at-least"),
-            List.of("confidence", "phase")),
-    TOTAL_TARGET("a target on a total", List.of("total", "at-most"), List.of("confidence")),
+            "a liquor target", List.of("liquor", "species", "reading", "at-most", "at-least", "confidence"), List.of()),
+    MASS_TARGET(
+            "a target on the mass", List.of("total", "at-most", "at-least", "of", "after", "confidence"), List.of()),
+    TOTAL_TARGET("a target on a total", List.of("total", "at-most"), List.of()),
     PRICES("prices", List.of("time", "liquor"), List.of()),
     STEP_PRICES("the prices of a step", List.of("liquor", "supply", "disposal"), List.of()),
     LIQUOR_PRICE("a liquor price", List.of("supply", "disposal"), List.of());
@@ -131,6 +173,29 @@ enum Section {
             entry("spread", "the lot or a grade"),
             entry("weight", "a grade"),
             entry("measured", "a grade"),
+            entry("give-or-take", "a value that is measured"),
+            entry("skin", "a species"),
+            entry("substance", "a species"),
+            entry("molar-mass", "a species"),
+            entry("in-liquor", "a species"),
+            entry("moisture", "the lot"),
+            entry("thermal-diffusivity", "the lot"),
+            entry("gain", "a step"),
+            entry("per", "a start, an equilibrium or a target on pieces"),
+            entry("phase", "a target on pieces"),
+            entry("confidence", "the recipe, or a target on pieces, a liquor or the mass"),
+            entry("allowed-by", "the recipe"),
+            entry("scaling", "a diffusivity of a species"),
+            entry("points", "a diffusivity of a species"),
+            entry("at", "a diffusivity of a species"),
+            entry("activation-energy", "a diffusivity of a species"),
+            entry("still", "a film"),
+            entry("speed", "a film"),
+            entry("stirred", "a film"),
+            entry("packed", "a film"),
+            entry("power", "a film that is stirred"),
+            entry("void", "a film that is packed"),
+            entry("coefficient", "a film"),
             entry("varies", "a start of one content or a species' diffusivity as a whole"),
             entry("soak", "a step of its own"),
             entry("rinse", "a step of its own"),
@@ -172,10 +237,15 @@ enum Section {
     }
 
     private static final class Later {
-        static final List<String> OF_VALUES = List.of("give-or-take", "varies");
-        static final List<String> OF_STEPS = List.of(
-                "stays", "changeover", "attended", "hold-at-most", "skin", "humidity", "speed", "gain", "measured");
+        static final List<String> OF_STEPS = List.of("stays", "changeover", "attended", "hold-at-most", "measured");
 
         private Later() {}
+    }
+
+    private static final class Forms {
+        static final List<String> OF_DIFFUSIVITIES =
+                List.of("value", "at", "activation-energy", "scaling", "points", "from", "give-or-take");
+
+        private Forms() {}
     }
 }

@@ -78,7 +78,7 @@ final class SizeReader {
         for (Dimension dimension : shape.dimensions()) {
             String key = dimension.word();
             Quantity size = values.checked(
-                    values.quantity(key, fields.need(key, "12 mm"), Kind.LENGTH),
+                    new Known(values).quantity(key, fields.need(key, "12 mm"), Kind.LENGTH),
                     found -> found.positive("the " + key));
             if (size != null) {
                 sizes.add(size);
@@ -115,6 +115,14 @@ final class SizeReader {
     List<Quantity> fromWeight(@Nullable Quantity weight, @Nullable Spread spread, @Nullable Quantity density) {
         Proportions proportions = proportions();
         if (proportions == null || weight == null || density == null) {
+            return null;
+        }
+        Quantity doubt = weight.giveOrTake() == null ? density.giveOrTake() : weight.giveOrTake();
+        if (doubt != null) {
+            problems.add(
+                    doubt.place(),
+                    "sizes from a weight and a density are as sure as those: found give-or-take \"" + doubt
+                            + "\"; remove it, or write the sizes with theirs");
             return null;
         }
         double average = weight.si() / density.si();

@@ -7,26 +7,33 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
+import org.soakwright.recipes.library.Entry;
+import org.soakwright.recipes.library.Property;
 import org.soakwright.recipes.model.Content;
 import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Partition;
+import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Spread;
 import org.soakwright.recipes.model.Start;
-import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.model.Traits;
 import org.soakwright.recipes.text.Problems;
 import org.soakwright.recipes.text.Tree;
+import org.soakwright.recipes.text.Unit;
 
 /** Reads the species and what the pieces hold of them. */
 final class SpeciesReader {
     private static final String POINT = "[0, 190 g/kg]";
+    private static final String PARTITION = "0.8";
 
+    private final Known known;
     private final Values values;
     private final Problems problems;
     private final Set<String> names = new LinkedHashSet<>();
 
     SpeciesReader(Values values) {
+        this.known = new Known(values);
         this.values = values;
         this.problems = values.problems();
     }
@@ -77,10 +84,17 @@ final class SpeciesReader {
         boolean inLiquor = media == null || media.contains(Medium.LIQUOR);
         Tree written = inLiquor ? fields.need("partition", "0.8") : fields.get("partition");
         Partition partition = written == null && !inLiquor
-                ? new Partition(1, fields.place())
+                ? new Partition(new Quantity(BigDecimal.ONE, Unit.ONE, fields.place()))
                 : partition("the partition of " + name, written);
+        Traits traits = new TraitsReader(values).traits(name, fields);
         boolean broken = startVaries.broken() || diffusivityVaries.broken();
-        if (!named || start == null || diffusivity == null || media == null || partition == null || broken) {
+        if (!named
+                || start == null
+                || diffusivity == null
+                || media == null
+                || partition == null
+                || traits == null
+                || broken) {
             return null;
         }
         return problems.attempt(() -> new Species(
@@ -91,6 +105,7 @@ final class SpeciesReader {
                 diffusivity,
                 diffusivityVaries.spread(),
                 partition,
+                traits,
                 media));
     }
 
@@ -117,16 +132,8 @@ final class SpeciesReader {
             Tree profile = fields == null ? null : fields.get("profile");
             return profile == null ? null : profile(what, profile);
         }
-        Content content = values.content(what, tree instanceof Tree.Entries wrapped ? unwrapped(wrapped) : tree);
+        Content content = known.ofPiece(what, tree, Section.START);
         return content == null ? null : new Start.Uniform(content);
-    }
-
-    private @Nullable Tree unwrapped(Tree.Entries start) {
-        if (Values.isFree(start)) {
-            return start;
-        }
-        Fields fields = Fields.of(start, Section.START, problems);
-        return fields == null ? null : fields.need("value", "190 g/kg");
     }
 
     private @Nullable Start profile(String what, Tree tree) {
@@ -157,7 +164,7 @@ final class SpeciesReader {
             return null;
         }
         BigDecimal position = values.number(what + ": a position", items.items().get(0), "0.5");
-        Content content = values.content(what, items.items().get(1));
+        Content content = known.ofPiece(what, items.items().get(1));
         return position == null || content == null
                 ? null
                 : new Start.Point(position.doubleValue(), content, tree.place());
@@ -165,12 +172,35 @@ final class SpeciesReader {
 
     @Nullable
     Partition partition(String what, @Nullable Tree tree) {
-        BigDecimal value = values.number(what, tree, "0.8");
-        if (value == null || tree == null) {
+        Quantity value =
+                tree instanceof Tree.Entries entries && Values.has(entries, "from") && !Values.has(entries, "to")
+                        ? published(what, entries)
+                        : known.number(what, tree, PARTITION);
+        return value == null ? null : problems.attempt(() -> new Partition(value));
+    }
+
+    private @Nullable Quantity published(String what, Tree.Entries entries) {
+        Fields fields = Fields.of(entries, Section.PARTITION, problems);
+        Tree from = fields == null ? null : fields.get("from");
+        String name = values.name("from", from, "salt-in-curd");
+        if (fields == null || from == null || name == null) {
             return null;
         }
-        Place place = tree.place();
-        return problems.attempt(() -> new Partition(value.doubleValue(), place));
+        Entry entry = new Published(problems).entry(name, Property.PARTITION, from.place());
+        if (fields.has("value")) {
+            Quantity value = known.beside(values.plain(what, fields.get("value"), PARTITION), fields);
+            return entry == null ? null : value;
+        }
+        Quantity single = entry == null ? null : entry.figure().single().orElse(null);
+        if (entry != null && single == null) {
+            problems.add(
+                    from.place(),
+                    "the library gives a range for " + name + ": found " + entry.figure() + "; add value, such as "
+                            + PARTITION);
+        }
+        return single == null
+                ? null
+                : known.beside(new Quantity(single.value(), single.unit(), from.place(), single.written()), fields);
     }
 
     private @Nullable Set<Medium> media(@Nullable Tree tree) {

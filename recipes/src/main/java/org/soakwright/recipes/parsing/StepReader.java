@@ -35,6 +35,7 @@ final class StepReader {
     private static final String LIQUOR = "{ratio: 2 L/kg, others: 0}";
     private static final String FILM = "negligible, or {coefficient: 2e-6 m/s}";
 
+    private final Known known;
     private final Values values;
     private final Problems problems;
     private final Declared declared;
@@ -42,6 +43,7 @@ final class StepReader {
     private final LiquorReader around;
 
     StepReader(Values values, Declared declared) {
+        this.known = new Known(values);
         this.values = values;
         this.problems = values.problems();
         this.declared = declared;
@@ -75,13 +77,13 @@ final class StepReader {
         return steps;
     }
 
-    /** Whether any step written has prices of its own. */
-    static boolean anyPriced(@Nullable Tree tree) {
+    /** Whether any step written has the key. */
+    static boolean anyHas(@Nullable Tree tree, String key) {
         return tree instanceof Tree.Items items
                 && items.items().stream()
                         .anyMatch(item -> item instanceof Tree.Entries entries
                                 && entries.entries().stream()
-                                        .anyMatch(entry -> entry.key().equals("prices")));
+                                        .anyMatch(entry -> entry.key().equals(key)));
     }
 
     private static Tree.@Nullable Entry kind(Tree tree) {
@@ -127,10 +129,10 @@ final class StepReader {
         }
         StepHead head = head(fields, kind);
         Step step = switch (section) {
-            case SOAK -> soak(fields, head);
-            case RINSE -> rinse(fields, head);
+            case SOAK -> soak(fields, head, kind.key());
+            case RINSE -> rinse(fields, head, kind.key());
             case REST -> head == null ? null : new Step.Rest(head);
-            default -> dry(fields, head);
+            default -> dry(fields, head, kind.key());
         };
         if (step != null) {
             problems.addAll(consistency.of(step));
@@ -157,7 +159,8 @@ final class StepReader {
     private @Nullable StepHead head(Fields fields, Tree.Entry kind) {
         String name = values.name(kind.key(), kind.value(), "first water");
         Time time = new TimeReader(values).time(fields.need("time", TIME));
-        Quantity temperature = values.temperature(fields.get("temperature"));
+        Quantity temperature = known.temperature("temperature", fields.get("temperature"));
+        Quantity gain = known.quantity("gain", fields.get("gain"), Kind.FRACTION);
         Overrides overrides = overrides(fields);
         Tree prices = fields.known("prices");
         LiquorPrice price = prices == null ? null : new PriceReader(values).ofStep(prices);
@@ -167,10 +170,12 @@ final class StepReader {
                     fields.has("temperature"),
                     overrides.diffusivity().keySet()));
         }
-        boolean broken = (temperature == null && fields.has("temperature")) || (price == null && prices != null);
+        boolean broken = (temperature == null && fields.has("temperature"))
+                || (gain == null && fields.has("gain"))
+                || (price == null && prices != null);
         return name == null || time == null || overrides == null || broken
                 ? null
-                : problems.attempt(() -> new StepHead(fields.place(), name, time, temperature, overrides, price));
+                : problems.attempt(() -> new StepHead(fields.place(), name, time, temperature, overrides, price, gain));
     }
 
     private @Nullable Overrides overrides(Fields fields) {
@@ -205,20 +210,21 @@ final class StepReader {
                         .toList();
     }
 
-    private @Nullable Step soak(Fields fields, @Nullable StepHead head) {
-        Liquor liquor = around.liquor(around.fields(fields.need("liquor", LIQUOR), Section.SOAK_LIQUOR));
-        Film film = around.film(fields.need("film", FILM));
+    private @Nullable Step soak(Fields fields, @Nullable StepHead head, String kind) {
+        Liquor liquor = around.liquor(
+                around.fields(fields.need("liquor", LIQUOR), Section.SOAK_LIQUOR), fields.has("temperature"));
+        Film film = film(fields, kind);
         Quantity dragOut = dragOut(fields);
         return head == null || liquor == null || film == null || (dragOut == null && fields.has("drag-out"))
                 ? null
                 : problems.attempt(() -> new Step.Soak(head, liquor, film, dragOut));
     }
 
-    private @Nullable Step rinse(Fields fields, @Nullable StepHead head) {
+    private @Nullable Step rinse(Fields fields, @Nullable StepHead head, String kind) {
         Fields liquorFields = around.fields(fields.need("liquor", LIQUOR), Section.RINSE_LIQUOR);
-        Liquor liquor = around.liquor(liquorFields);
+        Liquor liquor = around.liquor(liquorFields, fields.has("temperature"));
         Renewal renewal = around.renewal(fields, liquorFields);
-        Film film = around.film(fields.need("film", FILM));
+        Film film = film(fields, kind);
         Quantity dragOut = dragOut(fields);
         return head == null
                         || liquor == null
@@ -229,15 +235,21 @@ final class StepReader {
                 : problems.attempt(() -> new Step.Rinse(head, liquor, renewal, film, dragOut));
     }
 
-    private @Nullable Step dry(Fields fields, @Nullable StepHead head) {
+    private @Nullable Step dry(Fields fields, @Nullable StepHead head, String kind) {
         Air air = around.air(fields.need("air", "{equilibrium: {water: 60 g/kg}}"));
-        Film film = around.film(fields.need("film", FILM));
+        Film film = film(fields, kind);
         return head == null || air == null || film == null ? null : new Step.Dry(head, air, film);
+    }
+
+    private @Nullable Film film(Fields fields, String kind) {
+        Film film = new FilmReader(values).film(fields.need("film", FILM));
+        problems.addAll(consistency.of(film, kind, fields.place(), fields.has("temperature")));
+        return film;
     }
 
     private @Nullable Quantity dragOut(Fields fields) {
         Quantity dragOut = values.checked(
-                values.quantity("drag-out", fields.get("drag-out"), Kind.LIQUOR_RATIO),
+                known.quantity("drag-out", fields.get("drag-out"), Kind.LIQUOR_RATIO),
                 found -> found.notNegative("drag-out"));
         problems.addAll(consistency.ofDragOut(dragOut));
         return dragOut;

@@ -6,10 +6,13 @@ import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Basis;
 import org.soakwright.recipes.model.Consistency;
+import org.soakwright.recipes.model.Counted;
 import org.soakwright.recipes.model.Declared;
 import org.soakwright.recipes.model.Goal;
 import org.soakwright.recipes.model.GradeScope;
 import org.soakwright.recipes.model.Limits;
+import org.soakwright.recipes.model.Per;
+import org.soakwright.recipes.model.Phase;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Reference;
@@ -51,6 +54,9 @@ final class TargetReader {
     }
 
     private @Nullable Target target(Tree tree) {
+        if (isOfMass(tree)) {
+            return ofMass(Fields.of(tree, Section.MASS_TARGET, problems));
+        }
         if (has(tree, "total")) {
             return total(Fields.of(tree, Section.TOTAL_TARGET, problems));
         }
@@ -74,11 +80,15 @@ final class TargetReader {
         GradeScope grade = grade(fields.get("grade"));
         Reference after = reference("after", fields.get("after"), consistency::knownStep);
         Quantity share = values.quantity("share", fields.get("share"), Kind.FRACTION);
-        boolean broken = (after == null && fields.has("after")) || (share == null && fields.has("share"));
-        return species == null || reading == null || limits == null || grade == null || broken
+        Counted counted = counted(fields);
+        Quantity confidence = values.confidence(fields.get("confidence"));
+        boolean broken = (after == null && fields.has("after"))
+                || (share == null && fields.has("share"))
+                || (confidence == null && fields.has("confidence"));
+        return species == null || reading == null || limits == null || grade == null || counted == null || broken
                 ? null
-                : problems.attempt(
-                        () -> new Target.OfPieces(fields.place(), species, reading, limits, grade, after, share));
+                : problems.attempt(() -> new Target.OfPieces(
+                        fields.place(), species, reading, limits, grade, after, share, counted, confidence));
     }
 
     private @Nullable Target ofLiquor(@Nullable Fields fields) {
@@ -89,9 +99,63 @@ final class TargetReader {
         Reference species = reference("species", fields.need("species", "salt"), consistency::knownSpecies);
         boolean read = only("reading", fields.need("reading", "end"), "end");
         Limits limits = limits(fields);
-        return step == null || species == null || limits == null || !read
+        Quantity confidence = values.confidence(fields.get("confidence"));
+        boolean broken = !read || (confidence == null && fields.has("confidence"));
+        return step == null || species == null || limits == null || broken
                 ? null
-                : problems.attempt(() -> new Target.OfLiquor(fields.place(), step, species, limits));
+                : problems.attempt(() -> new Target.OfLiquor(fields.place(), step, species, limits, confidence));
+    }
+
+    /** Against what the limits count. */
+    private @Nullable Counted counted(Fields fields) {
+        if (fields.has("per") && fields.has("phase")) {
+            problems.add(
+                    fields.place("phase"),
+                    "a limit counts against the piece or its water: found per and phase; keep one");
+            return null;
+        }
+        if (fields.has("phase")) {
+            Phase phase = values.word("phase", fields.get("phase"), Phase.class);
+            return phase == null ? null : new Counted.InPhase(phase);
+        }
+        Per per = fields.has("per") ? values.word("per", fields.get("per"), Per.class) : Per.LOADED;
+        return per == null ? null : new Counted.OfPiece(per);
+    }
+
+    private static boolean isOfMass(Tree tree) {
+        Tree total = tree instanceof Tree.Entries entries ? value(entries, "total") : null;
+        Tree bare = total instanceof Tree.Entries wrapped ? value(wrapped, "value") : total;
+        return bare instanceof Tree.Leaf leaf && leaf.text().equals("mass");
+    }
+
+    private static @Nullable Tree value(Tree.Entries entries, String key) {
+        return entries.entries().stream()
+                .filter(entry -> entry.key().equals(key))
+                .map(Tree.Entry::value)
+                .findFirst()
+                .orElse(null);
+    }
+
+    private @Nullable Target ofMass(@Nullable Fields fields) {
+        if (fields == null) {
+            return null;
+        }
+        boolean ofStart = fields.has("of");
+        boolean startRead = !ofStart || only("of", fields.get("of"), "start");
+        Kind kind = ofStart ? Kind.FRACTION : Kind.MASS;
+        Quantity atMost = values.quantity("at-most", fields.get("at-most"), kind);
+        Quantity atLeast = values.quantity("at-least", fields.get("at-least"), kind);
+        Reference after = reference("after", fields.get("after"), consistency::knownStep);
+        Quantity confidence = values.confidence(fields.get("confidence"));
+        boolean broken = !startRead
+                || (atMost == null && fields.has("at-most"))
+                || (atLeast == null && fields.has("at-least"))
+                || (after == null && fields.has("after"))
+                || (confidence == null && fields.has("confidence"));
+        return broken
+                ? null
+                : problems.attempt(
+                        () -> new Target.OfMass(fields.place(), ofStart, atMost, atLeast, after, confidence));
     }
 
     private @Nullable Target total(@Nullable Fields fields) {

@@ -8,7 +8,6 @@ import java.util.Set;
 import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
-import org.soakwright.recipes.model.Content;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Spread;
 import org.soakwright.recipes.model.Word;
@@ -45,7 +44,7 @@ final class Values {
                                 + " such as " + example);
                 return null;
             }
-            Fields fields = Fields.of(tree, Section.VALUE, problems);
+            Fields fields = Fields.of(exact(what, entries), Section.VALUE, problems);
             Tree value = fields == null ? null : fields.need("value", example);
             if (value instanceof Tree.Leaf leaf) {
                 return leaf;
@@ -58,6 +57,26 @@ final class Values {
         return null;
     }
 
+    /** Without a give-or-take, which does not belong to every value. */
+    private Tree exact(String what, Tree.Entries entries) {
+        List<Tree.Entry> others = new ArrayList<>();
+        for (Tree.Entry entry : entries.entries()) {
+            if (entry.key().equals(Known.GIVE_OR_TAKE)) {
+                problems.add(
+                        entry.place(),
+                        "give-or-take is for what is measured, such as a diffusivity or a ratio: found it at " + what
+                                + "; remove it");
+            } else {
+                others.add(entry);
+            }
+        }
+        return new Tree.Entries(entries.place(), others);
+    }
+
+    static boolean has(Tree.Entries entries, String key) {
+        return entries.entries().stream().anyMatch(entry -> entry.key().equals(key));
+    }
+
     /** Whether the keys leave the value to the planner. */
     static boolean isFree(Tree.Entries entries) {
         return entries.entries().stream().anyMatch(entry -> FREE.contains(entry.key()));
@@ -68,16 +87,16 @@ final class Values {
         return quantity(what, tree, List.of(kind));
     }
 
-    /** A temperature that matter can have. */
-    @Nullable
-    Quantity temperature(@Nullable Tree tree) {
-        return checked(quantity("temperature", tree, Kind.TEMPERATURE), Quantity::possible);
-    }
-
     /** The quantity, if there is one and it passes the check. */
     @Nullable
     Quantity checked(@Nullable Quantity quantity, UnaryOperator<Quantity> check) {
         return quantity == null ? null : problems.attempt(() -> check.apply(quantity));
+    }
+
+    /** How surely something is to be. */
+    @Nullable
+    Quantity confidence(@Nullable Tree tree) {
+        return checked(quantity("confidence", tree, Kind.FRACTION), Quantity::sure);
     }
 
     /** How much something differs from piece to piece, under the name of its key. */
@@ -93,12 +112,7 @@ final class Values {
     }
 
     @Nullable
-    Content content(String what, @Nullable Tree tree) {
-        Quantity amount = contentQuantity(what, tree);
-        return amount == null ? null : problems.attempt(() -> new Content(amount));
-    }
-
-    private @Nullable Quantity quantity(String what, @Nullable Tree tree, List<Kind> kinds) {
+    Quantity quantity(String what, @Nullable Tree tree, List<Kind> kinds) {
         Tree.Leaf leaf = leaf(what, tree, kinds.get(0).example());
         if (leaf == null) {
             return null;
@@ -181,7 +195,8 @@ final class Values {
         return number == null ? null : number.value();
     }
 
-    private @Nullable Quantity plain(String what, @Nullable Tree tree, String example) {
+    @Nullable
+    Quantity plain(String what, @Nullable Tree tree, String example) {
         Tree.Leaf leaf = leaf(what, tree, example);
         String remedy = "write a plain number such as " + example;
         Measurement measured = leaf == null ? null : measurement(what, leaf, remedy);

@@ -3,7 +3,9 @@ package org.soakwright.recipes.text;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -24,7 +26,14 @@ public enum Kind {
     TEMPERATURE("a temperature", "4 Cel", "Cel, K", Atoms.TEMPERATURE),
     PER_MASS("a content by mass", "190 g/kg", "g/kg, mg/kg, %", Atoms.CONTENT_BY_MASS),
     PER_VOLUME("a content by volume", "30 g/L", "g/L, mg/L, kg/m3", Atoms.quotients(Atoms.MASS, Atoms.VOLUME)),
-    FRACTION("a share", "5 %", "%, [ppth]", Atoms.FRACTION);
+    FRACTION("a share", "5 %", "%, [ppth]", Atoms.FRACTION),
+    PERMEANCE("a permeance", "2e-8 m/s", "m/s, mm/s, cm/h", Atoms.quotients(Atoms.LENGTH, Atoms.TIME)),
+    VELOCITY("a speed", "0.05 m/s", "m/s, cm/s, mm/s, m/h", Atoms.quotients(Atoms.LENGTH, Atoms.TIME)),
+    POWER_PER_VOLUME("a power per volume", "40 W/m3", "W/m3, kW/m3, W/L", Atoms.quotients(Atoms.POWER, Atoms.VOLUME)),
+    PER_AMOUNT("an amount per volume", "2 mol/L", "mol/L, mmol/L, mol/m3", Atoms.quotients(Atoms.AMOUNT, Atoms.VOLUME)),
+    MOLAR_MASS("a molar mass", "58.44 g/mol", "g/mol, kg/mol", Atoms.quotients(Atoms.MASS, List.of(Atoms.MOLE))),
+    TEMPERATURE_DIFFERENCE("a difference in temperature", "2 K", "K", List.of(Unit.of("K", "1"))),
+    SATURATION("a share of saturation", "75 % of saturation", "% of saturation", Atoms.SATURATION);
 
     private final String label;
     private final String example;
@@ -33,11 +42,15 @@ public enum Kind {
     @SuppressWarnings("ImmutableEnumChecker") // only ever a List.of or a List.copyOf
     private final List<Unit> units;
 
+    @SuppressWarnings("ImmutableEnumChecker") // filled once, in the constructor
+    private final Map<String, Unit> bySymbol = new HashMap<>();
+
     Kind(String label, String example, String usual, List<Unit> units) {
         this.label = label;
         this.example = example;
         this.usual = usual;
         this.units = units;
+        units.forEach(unit -> bySymbol.put(unit.symbol(), unit));
     }
 
     /** With its article, for messages. */
@@ -62,7 +75,12 @@ public enum Kind {
     /** The unit of this kind with the symbol, if there is one; {@code °C} is read as {@code Cel}. */
     public Optional<Unit> unit(String symbol) {
         String ucum = symbol.equals("°C") ? "Cel" : symbol;
-        return units.stream().filter(unit -> unit.symbol().equals(ucum)).findFirst();
+        return Optional.ofNullable(bySymbol.get(ucum));
+    }
+
+    /** Whether the unit is one of this kind. */
+    public boolean has(Unit unit) {
+        return bySymbol.containsKey(unit.symbol());
     }
 
     /** Base units and their exact sizes: metres, kilograms, seconds, kelvins, moles. */
@@ -86,6 +104,13 @@ public enum Kind {
                 Unit.of("hL", "1e-1"),
                 Unit.of("m3", "1"),
                 Unit.of("cm3", "1e-6"));
+        static final List<Unit> POWER = List.of(Unit.of("W", "1"), Unit.of("kW", "1e3"), Unit.of("mW", "1e-3"));
+        static final Unit MOLE = Unit.of("mol", "1");
+        static final List<Unit> AMOUNT = List.of(MOLE, Unit.of("mmol", "1e-3"));
+
+        /** In UCUM this is %{of saturation}; people write no braces. */
+        static final List<Unit> SATURATION = List.of(Unit.of("% of saturation", "1e-2"));
+
         static final List<Unit> MOLAR_ENERGY = List.of(Unit.of("kJ/mol", "1e3"), Unit.of("J/mol", "1"));
         static final List<Unit> TEMPERATURE =
                 List.of(new Unit("Cel", BigDecimal.ONE, BigDecimal.ONE, new BigDecimal("273.15")), Unit.of("K", "1"));

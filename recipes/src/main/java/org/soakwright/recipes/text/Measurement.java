@@ -2,6 +2,7 @@ package org.soakwright.recipes.text;
 
 import java.math.BigDecimal;
 import java.util.Collection;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.regex.Matcher;
@@ -66,14 +67,20 @@ public record Measurement(String written, BigDecimal number, String unit) {
     }
 
     private static String expected(Collection<Kind> wanted) {
-        return ", where " + wanted.stream().map(Kind::label).collect(Collectors.joining(" or ")) + " is needed";
+        return ", where " + alternatives(wanted.stream().map(Kind::label).toList()) + " is needed";
     }
 
     /** What to write instead: {@code write such as 6 h (s, min, h, d, wk)}. */
     public static String remedy(Collection<Kind> wanted) {
-        String examples = wanted.stream().map(Kind::example).collect(Collectors.joining(" or "));
-        String labels = wanted.stream().map(Kind::label).collect(Collectors.joining(" or "));
+        String examples = alternatives(wanted.stream().map(Kind::example).toList());
+        String labels = alternatives(wanted.stream().map(Kind::label).toList());
         String units = wanted.stream().map(Kind::usual).collect(Collectors.joining(", "));
         return "write " + labels + " such as " + examples + " (units such as " + units + ")";
+    }
+
+    /** {@code a, b or c}. */
+    private static String alternatives(List<String> words) {
+        int last = words.size() - 1;
+        return last == 0 ? words.get(0) : String.join(", ", words.subList(0, last)) + " or " + words.get(last);
     }
 }

@@ -20,11 +20,12 @@ class DiffusivitiesTest {
     private static final Diffusivity FAST = diffusivity("3e-10");
     private static final Diffusivity WARMING = new Diffusivity(
             Given.quantity("3e-10", "m2/s", Kind.DIFFUSIVITY),
-            Given.quantity("5", "Cel", Kind.TEMPERATURE),
-            Given.quantity("22", "kJ/mol", Kind.MOLAR_ENERGY));
+            new Diffusivity.Law.Activated(
+                    Given.quantity("5", "Cel", Kind.TEMPERATURE), Given.quantity("22", "kJ/mol", Kind.MOLAR_ENERGY)),
+            null);
 
     private static Diffusivity diffusivity(String value) {
-        return new Diffusivity(Given.quantity(value, "m2/s", Kind.DIFFUSIVITY), null, null);
+        return Diffusivity.of(Given.quantity(value, "m2/s", Kind.DIFFUSIVITY));
     }
 
     private static Diffusivities byGrain(Diffusivity along, Diffusivity across) {
@@ -51,10 +52,10 @@ class DiffusivitiesTest {
 
     @Test
     void eachDirectionIsChangedInItsPlace() {
-        Diffusivities changed = byGrain(FAST, SLOW).each(one -> one.equals(FAST) ? SLOW : FAST);
+        Diffusivities changed = byGrain(FAST, SLOW).map(one -> one.equals(FAST) ? SLOW : FAST);
         assertSame(SLOW, changed.of(Grain.ALONG));
         assertSame(FAST, changed.of(Grain.ACROSS));
-        assertSame(FAST, new Diffusivities.Alike(SLOW).each(one -> FAST).of(null));
+        assertSame(FAST, new Diffusivities.Alike(SLOW).map(one -> FAST).of(null));
     }
 
     @Test
@@ -68,7 +69,7 @@ class DiffusivitiesTest {
         Map<String, Diffusivities> warming = Map.of("salt", byGrain(WARMING, SLOW));
         Unsound unsound = assertThrows(Unsound.class, () -> new Overrides(warming, Map.of()));
         assertEquals(
-                "f:1:1: a step's own diffusivity holds at its temperature; remove at and activation-energy",
+                "f:1:1: a step's own diffusivity holds at its temperature; write value, and give-or-take where it is known, alone",
                 unsound.problems().get(0).toString());
     }
 
@@ -105,7 +106,8 @@ class DiffusivitiesTest {
                 spread,
                 new Diffusivities.Alike(SLOW),
                 null,
-                new Partition(0.8, HERE),
+                new Partition(Given.fraction(0.8)),
+                Traits.NONE,
                 Set.of(Medium.LIQUOR));
     }
 }

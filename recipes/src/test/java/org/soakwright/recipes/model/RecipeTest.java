@@ -77,20 +77,8 @@ class RecipeTest {
         Quantity density = Given.quantity("1020", "kg/m3", Kind.DENSITY);
         assertEquals(30.6, new Liquor(HERE, volume, salt, false, density).kgPerM3("salt"), 1e-12);
         assertEquals(0, new Liquor(HERE, volume, Map.of(), true, null).kgPerM3("salt"));
-        assertTrue(refusal(() -> new Liquor(HERE, volume, salt, false, null))
-                .startsWith("a content by mass needs the liquor's density"));
-    }
-
-    @Test
-    void anActivationEnergyAndItsTemperatureComeTogether() {
-        Quantity value = Given.quantity("8e-10", "m2/s", Kind.DIFFUSIVITY);
-        Quantity energy = Given.quantity("22", "kJ/mol", Kind.MOLAR_ENERGY);
-        Quantity at = Given.quantity("5", "Cel", Kind.TEMPERATURE);
-        assertTrue(new Diffusivity(value, at, energy).dependsOnTemperature());
-        assertThrows(Unsound.class, () -> new Diffusivity(value, null, energy));
-        assertThrows(Unsound.class, () -> new Diffusivity(value, at, null));
-        Quantity none = Given.quantity("-300", "Cel", Kind.TEMPERATURE);
-        assertThrows(Unsound.class, () -> new Diffusivity(value, none, energy));
+        Liquor unknown = new Liquor(HERE, volume, salt, false, null);
+        assertThrows(IllegalStateException.class, () -> unknown.kgPerM3("salt"), "nobody says what 3 % weigh");
     }
 
     @Test

@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Objects;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.batch.Durations;
@@ -128,9 +127,9 @@ final class Assumptions {
 
     private static String pace(Diffusivity diffusivity) {
         return Wording.quantity(diffusivity.value())
-                + (diffusivity.dependsOnTemperature()
-                        ? " at " + Wording.quantity(Objects.requireNonNull(diffusivity.at()))
-                                + ", changing with temperature by " + diffusivity.activationEnergy() + " (Arrhenius)"
+                + (diffusivity.law() instanceof Diffusivity.Law.Activated activated
+                        ? " at " + Wording.quantity(activated.at()) + ", changing with temperature by "
+                                + activated.energy() + " (Arrhenius)"
                         : "");
     }
 

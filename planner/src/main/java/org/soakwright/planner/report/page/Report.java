@@ -8,7 +8,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
-import org.soakwright.planner.batch.Batch;
 import org.soakwright.planner.batch.Groups;
 import org.soakwright.planner.batch.Plan;
 import org.soakwright.planner.batch.Run;
@@ -74,7 +73,7 @@ public final class Report {
 
     /** The same with a batch of its own, which another thread may follow. */
     private static Run again(Run run) {
-        return new Batch(run.batch().recipe()).follow(run.seconds());
+        return run.again();
     }
 
     private static Plan again(Plan plan) {

@@ -29,7 +29,8 @@ final class Surety {
                         .map(error -> bound(error.getValue()) + " " + error.getKey())
                         .collect(Collectors.joining(" and "))
                 + ". How well they hold on the floor depends on the values the recipe states, above all diffusivity,"
-                + " partition, film and piece size: each is taken as exact here"
+                + " partition, film and piece size: each "
+                + (run.outlook().isPresent() ? "without a give-or-take is taken as exact" : "is taken as exact here")
                 + (PieceWords.differ(run.batch().recipe())
                         ? ", and so is how far pieces are said to differ. Keep a margin"
                         : " and the same for every piece. Keep a margin")

@@ -6,14 +6,12 @@ import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import org.soakwright.planner.batch.Batch;
 import org.soakwright.planner.batch.Checkpoint;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.batch.PullWindow;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
 import org.soakwright.planner.report.Figures;
-import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Target;
 
 /**
@@ -59,19 +57,7 @@ final class Advice {
 
     /** What a plan takes in all is known whatever the pieces do: only limits on contents can make longer steps harmful. */
     private Run withoutTotals() {
-        Recipe recipe = run.batch().recipe();
-        Recipe other = new Recipe(
-                recipe.place(),
-                recipe.title(),
-                recipe.products(),
-                recipe.lot(),
-                recipe.species(),
-                recipe.between(),
-                recipe.steps(),
-                contents,
-                recipe.minimise(),
-                recipe.prices());
-        return new Batch(other).follow(run.seconds());
+        return run.withTargets(contents);
     }
 
     /** Readings from one to another, in g/L. */

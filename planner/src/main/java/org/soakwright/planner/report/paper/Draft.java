@@ -75,7 +75,7 @@ final class Draft {
                 parts,
                 targets(),
                 misses.isEmpty() ? Sampling.of(run, clock) : List.of(),
-                Cautions.of(run),
+                Cautions.of(run).shown(),
                 misses.isEmpty() ? List.of("Prepared", "Checked", "Released") : List.of("Prepared", "Checked"),
                 stamp);
     }

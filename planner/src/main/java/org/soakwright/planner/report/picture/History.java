@@ -3,7 +3,9 @@ package org.soakwright.planner.report.picture;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
+import org.soakwright.planner.batch.Bands;
 import org.soakwright.planner.batch.EachGrade;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
@@ -25,6 +27,7 @@ final class History {
     private final double[] clocks;
     private final double[] depths;
     private final List<TargetState> targets;
+    private final Optional<Bands> bands;
 
     History(Trace trace) {
         this.trace = trace;
@@ -35,6 +38,8 @@ final class History {
             ends.add(trace.run().end(i));
         }
         targets = EachGrade.of(trace.run());
+        // Only where the run was judged: nothing is said of doubt otherwise.
+        bands = trace.run().outlook().isPresent() ? Bands.of(trace) : Optional.empty();
         clocks = new double[trace.moments().size() + 1];
         for (int i = 1; i < clocks.length; i++) {
             clocks[i] = trace.moments().get(i - 1).clock();
@@ -127,6 +132,11 @@ final class History {
     /** What a target on pieces would read at each clock but the first, in its own unit. */
     double[] course(TargetState state) {
         return trace.course(state);
+    }
+
+    /** Between what a target on pieces may read, values not known exactly, at each clock but the first; empty where they are known. */
+    Optional<Bands.Band> band(TargetState state) {
+        return bands.map(all -> all.of(state));
     }
 
     /** What it would have read as loaded, in the species' unit; empty where only a distribution would tell. Grade below 0 is the lot. */

@@ -52,7 +52,13 @@ final class Readings {
 
     private void draw(Graphics2D g, Theme theme) {
         Sheet sheet = new Sheet(g, theme, Look.WIDTH, height);
-        sheet.head(title(), "Dashed: the limit. Dot: where it is read. Ring: it decides. Cross: it is missed.");
+        boolean doubted = watched.stream()
+                .flatMap(one -> one.courses().stream())
+                .anyMatch(course -> !course.edges().isEmpty());
+        sheet.head(
+                title(),
+                "Dashed: the limit. Dot: where it is read. Ring: it decides. Cross: it is missed."
+                        + (doubted ? " Dotted: 5 and 95 % of what may be." : ""));
         int width = Look.WIDTH - LEFT - RIGHT;
         double top = Sheet.TOP + Ribbon.HEIGHT + ROW_GAP;
         for (int i = 0; i < watched.size(); i++) {
@@ -84,7 +90,10 @@ final class Readings {
             labels.add(limit.text(), panel.y(limit.value()), look.limit());
         }
         for (Watched.Course course : one.courses()) {
-            for (Watched.Piece piece : one.shown(course)) {
+            for (Watched.Piece edge : one.shown(course.edges())) {
+                panel.line(edge.clocks(), edge.values(), look.series(course.series()), Look.dashed(0.9f, 1.5f, 3));
+            }
+            for (Watched.Piece piece : one.shown(course.pieces())) {
                 panel.line(piece.clocks(), piece.values(), look.series(course.series()), Look.line(course.series()));
             }
         }

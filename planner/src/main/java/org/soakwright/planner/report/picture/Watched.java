@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.stream.IntStream;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.recipes.model.Basis;
 import org.soakwright.recipes.model.Grade;
@@ -35,17 +36,25 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
      *
      * @param name as in sheets
      * @param step at whose end it is read
+     * @param edges between which most samples lie of what is not known exactly; none where everything is
      */
     record Course(
             String name,
             String label,
             int series,
             List<Piece> pieces,
+            List<Piece> edges,
             double readAt,
             String step,
             double value,
             boolean met,
             boolean decides) {
+        List<Piece> drawn() {
+            List<Piece> all = new ArrayList<>(pieces);
+            edges.stream().filter(edge -> edge.values().length > 0).forEach(all::add);
+            return all;
+        }
+
         String verdict() {
             return met ? decides ? ", decides" : "" : ", missed";
         }
@@ -95,6 +104,11 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
                 ofPieces
                         ? ofPieces(history, (Target.OfPieces) state.target(), grade, state)
                         : ofLiquor(history, (Target.OfLiquor) state.target()),
+                ofPieces
+                        ? history.band(state)
+                                .map(band -> List.of(edge(history, band.low()), edge(history, band.high())))
+                                .orElse(List.of())
+                        : List.of(),
                 readAt,
                 history.ends().get(step).step().name(),
                 state.value(),
@@ -113,6 +127,16 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
         values[0] = start.getAsDouble() / Bound.perTargetUnit(history, species, grade, target);
         System.arraycopy(later, 0, values, 1, later.length);
         return List.of(new Piece(history.clocks(), values));
+    }
+
+    /** Without the moments too early in a stage to tell. */
+    private static Piece edge(History history, double[] values) {
+        int[] told = IntStream.range(0, values.length)
+                .filter(i -> !Double.isNaN(values[i]))
+                .toArray();
+        return new Piece(
+                Arrays.stream(told).mapToDouble(i -> history.clocks()[i + 1]).toArray(),
+                Arrays.stream(told).mapToDouble(i -> values[i]).toArray());
     }
 
     private static List<Piece> ofLiquor(History history, Target.OfLiquor target) {
@@ -143,7 +167,7 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
     Scale scale() {
         double least = Double.POSITIVE_INFINITY;
         for (Course course : courses) {
-            for (Piece piece : course.pieces()) {
+            for (Piece piece : course.drawn()) {
                 least = Math.min(least, History.lowest(piece.values()));
             }
         }
@@ -157,14 +181,14 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
         return Scale.holding(least, most(), 5);
     }
 
-    /** The parts of a course that its axis can show: by orders of magnitude there is no zero. */
-    List<Piece> shown(Course course) {
+    /** The parts of lines that the axis can show: by orders of magnitude there is no zero. */
+    List<Piece> shown(List<Piece> whole) {
         if (!spansOrders()) {
-            return course.pieces();
+            return whole;
         }
         double foot = scale().ticks().get(0).value();
         List<Piece> parts = new ArrayList<>();
-        for (Piece piece : course.pieces()) {
+        for (Piece piece : whole) {
             int from = 0;
             for (int i = 0; i <= piece.values().length; i++) {
                 if (i == piece.values().length || piece.values()[i] < foot) {
@@ -183,7 +207,7 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
     private double most() {
         double most = 0;
         for (Course course : courses) {
-            for (Piece piece : course.pieces()) {
+            for (Piece piece : course.drawn()) {
                 most = Math.max(most, History.highest(piece.values()));
             }
         }

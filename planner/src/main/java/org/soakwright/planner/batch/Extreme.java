@@ -1,0 +1,107 @@
+package org.soakwright.planner.batch;
+
+import java.util.List;
+import org.soakwright.recipes.model.Phase;
+import org.soakwright.solver.chain.Course;
+import org.soakwright.solver.chain.Part;
+import org.soakwright.solver.chain.Probe;
+
+/**
+ * Where the water is a species of its own: the highest or lowest of a phase anywhere in pieces of one side. Neither solute nor water need
+ * be extreme there, so the way through the piece is looked at in {@link #LOOKS} places and the best refined by golden section to
+ * {@link #NEAR}; the place held, the derivative is that of the two contents there.
+ */
+final class Extreme {
+    private static final int LOOKS = 129;
+    private static final double NEAR = 1e-7;
+    private static final double GOLDEN = (Math.sqrt(5) - 1) / 2;
+
+    private final State state;
+    private final Weighing weighing;
+    private final int species;
+    private final int water;
+    private final int index;
+    private final Phase phase;
+
+    /**
+     * Of one class of pieces.
+     *
+     * @param index of the class in the lot
+     */
+    Extreme(State state, Weighing weighing, int species, int index, Phase phase) {
+        this.state = state;
+        this.weighing = weighing;
+        this.species = species;
+        this.index = index;
+        this.phase = phase;
+        water = weighing.waterSpecies().orElseThrow();
+    }
+
+    /** What is read at the extreme. */
+    Dual read(boolean highest) {
+        double[] positions = new double[LOOKS];
+        for (int i = 0; i < LOOKS; i++) {
+            positions[i] = (double) i / (LOOKS - 1);
+        }
+        double[] solute = profile(species, positions);
+        double[] moist = profile(water, positions);
+        int best = 0;
+        double sign = highest ? 1 : -1;
+        for (int i = 1; i < LOOKS; i++) {
+            if (sign * ratio(solute[i], moist[i]) > sign * ratio(solute[best], moist[best])) {
+                best = i;
+            }
+        }
+        double low = positions[Math.max(0, best - 1)];
+        double high = positions[Math.min(LOOKS - 1, best + 1)];
+        double place = refined(low, high, sign);
+        if (sign * at(place) < sign * ratio(solute[best], moist[best])) {
+            place = positions[best];
+        }
+        return Measure.InPhase.of(content(species, place), content(water, place), phase);
+    }
+
+    private double refined(double from, double to, double sign) {
+        double low = from;
+        double high = to;
+        while (high - low > NEAR) {
+            double left = high - GOLDEN * (high - low);
+            double right = low + GOLDEN * (high - low);
+            if (sign * at(left) > sign * at(right)) {
+                high = right;
+            } else {
+                low = left;
+            }
+        }
+        // An extreme at an end of the piece is there, not a hair beside it.
+        return low == 0 ? 0 : high == 1 ? 1 : (low + high) / 2;
+    }
+
+    private double at(double place) {
+        return ratio(profile(species, place)[0], profile(water, place)[0]);
+    }
+
+    private double ratio(double solute, double moist) {
+        return solute / (phase == Phase.WATER ? solute + moist : moist);
+    }
+
+    private double[] profile(int of, double... positions) {
+        return state.courses().get(of).profile(index, state.stage(), positions);
+    }
+
+    private Dual content(int of, double place) {
+        Course course = state.courses().get(of);
+        Probe probe = new Probe.At(index, place);
+        double value = course.value(probe, state.stage());
+        Dual read = state.sloping()
+                ? new Dual(
+                        value,
+                        state.batch()
+                                .byStep(
+                                        of,
+                                        course.gradient(List.of(new Part(1, probe)), state.stage()),
+                                        state.seconds()))
+                : state.number(value);
+        return weighing.perLoaded(read);
+    }
+}
