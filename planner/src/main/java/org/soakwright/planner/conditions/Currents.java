@@ -8,6 +8,7 @@ import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Shape;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.text.Unsound;
@@ -56,10 +57,11 @@ public final class Currents {
      */
     public Estimate film(Species species, Grade grade, Buoyancy buoyancy) {
         Medium medium = new Medium(fluid(), diffusivity(species));
-        Body body = body(grade);
-        if (film instanceof Film.Still) {
-            return org.soakwright.solver.transport.Film.still(body, medium, buoyancy);
+        if (film instanceof Film.Packed packed) {
+            Bed bed = new Bed(packed.speed().si(), packed.voids().si());
+            return org.soakwright.solver.transport.Film.packed(piece(grade), medium, bed);
         }
+        Body body = body(grade);
         if (film instanceof Film.Past past) {
             Estimate flowing = org.soakwright.solver.transport.Film.past(
                     body, medium, past.speed().si());
@@ -68,19 +70,10 @@ public final class Currents {
                             flowing, org.soakwright.solver.transport.Film.still(body, medium, buoyancy))
                     : flowing;
         }
-        if (film instanceof Film.Stirred stirred) {
-            return org.soakwright.solver.transport.Film.stirred(
-                    body, medium, stirred.power().si());
-        }
-        Film.Packed packed = (Film.Packed) film;
-        if (!(body instanceof Body.Bounded bounded)) {
-            throw new Unsound(
-                    packed.place(),
-                    "a bed is of pieces that end: found " + grade.shape().word()
-                            + "; write a brick, short-cylinder or sphere, or another film");
-        }
-        Bed bed = new Bed(packed.speed().si(), packed.voids().si());
-        return org.soakwright.solver.transport.Film.packed(bounded, medium, bed);
+        return film instanceof Film.Stirred stirred
+                ? org.soakwright.solver.transport.Film.stirred(
+                        body, medium, stirred.power().si())
+                : org.soakwright.solver.transport.Film.still(body, medium, buoyancy);
     }
 
     /**
@@ -171,6 +164,17 @@ public final class Currents {
             case SHORT_CYLINDER -> new Body.ShortCylinder(sizes[0], sizes[1]);
             case BRICK -> new Body.Brick(sizes[0], sizes[1], sizes[2]);
         };
+    }
+
+    /** A piece of a bed. */
+    private Body.Bounded piece(Grade grade) {
+        if (grade.shape() != Shape.SLAB && body(grade) instanceof Body.Bounded bounded) {
+            return bounded;
+        }
+        throw new Unsound(
+                film.place(),
+                "a bed is of pieces that end: found " + grade.shape().word()
+                        + "; write a brick, short-cylinder or sphere, or another film");
     }
 
     private double length(Grade grade) {

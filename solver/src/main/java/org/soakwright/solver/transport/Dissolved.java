@@ -4,13 +4,14 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * The mass fraction at which a solution holds a given content: w = content / density(w), repeated until a step is below
- * a unit in the last place or two. The density rises by less than half of itself while w goes from 0 to 1, so each step
- * is at most a third of the one before.
+ * The mass fraction at which a solution holds a given content: w = content / density(w), repeated until a step is within a
+ * hundred units in the last place: closer, the rounding of the density may go round in circles. The density rises by
+ * less than half of itself while w goes from 0 to 1, so each step is at most a third of the one before, and one more is
+ * good to a few units.
  */
 final class Dissolved {
     private static final int MOST_EVALUATIONS = 100;
-    private static final double ROUNDING = 4e-16;
+    private static final double ROUNDING = 1e-14;
 
     private Dissolved() {}
 
@@ -24,7 +25,8 @@ final class Dissolved {
             Quantity density = solution.density(fraction, temperature);
             double next = Math.min(most, content / density.value());
             if (Math.abs(next - fraction) <= ROUNDING * next) {
-                return new Quantity(next, density.within(), density.cautions());
+                double last = content / solution.density(next, temperature).value();
+                return new Quantity(Math.min(most, last), density.within(), density.cautions());
             }
             fraction = next;
         }
