@@ -32,8 +32,8 @@ public record Cautions(List<String> shown, List<String> stops) {
     /** For a recipe not followed yet: where times are free, counted is the longest that there can be. */
     public static Cautions of(Recipe recipe) {
         boolean free = recipe.steps().stream().anyMatch(step -> step.time().isFree());
-        Facts facts = new RecipeFacts(Known.of(recipe).recipe(), StepTimes.longest(recipe), RecipeFacts.Ends.unknown());
         Recipe known = Known.of(recipe).recipe();
+        Facts facts = new RecipeFacts(known, StepTimes.longest(known), RecipeFacts.Ends.unknown());
         Films films = Films.of(known, StepTimes.nominal(known));
         return of(
                 facts,
@@ -45,12 +45,15 @@ public record Cautions(List<String> shown, List<String> stops) {
     public static Cautions of(Run run) {
         Recipe recipe = run.batch().recipe();
         RecipeFacts facts = new RecipeFacts(recipe, run.seconds(), new RunEnds(run));
-        return of(facts, "", found(recipe, run.batch().films(), run.batch().warming()));
+        List<String> found = new ArrayList<>(Vapour.of(run));
+        found.addAll(found(recipe, run.batch().films(), run.batch().warming()));
+        return of(facts, "", found);
     }
 
     /** What was found of this very recipe: what lies outside its sources, and what warming is worth. */
     private static List<String> found(Recipe known, Films films, List<String> warming) {
         List<String> found = new ArrayList<>(Reservations.of(known, films));
+        Published.of(known).forEach(one -> one.overruled().ifPresent(found::add));
         found.addAll(warming);
         return found;
     }

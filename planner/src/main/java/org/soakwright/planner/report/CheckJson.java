@@ -5,6 +5,7 @@ import org.soakwright.planner.batch.AsInfinite;
 import org.soakwright.planner.batch.Checked;
 import org.soakwright.planner.batch.FilmFound;
 import org.soakwright.planner.batch.Groups;
+import org.soakwright.planner.batch.Published;
 import org.soakwright.planner.conditions.Conversion;
 import org.soakwright.recipes.library.Entry;
 import org.soakwright.recipes.model.Fit;
@@ -75,7 +76,7 @@ public final class CheckJson {
                 }
             });
             json.array("library", () -> {
-                for (Checked.Published published : checked.published()) {
+                for (Published published : checked.published()) {
                     json.element(() -> {
                         json.string("what", published.what());
                         json.string("used", published.used().value().toString());

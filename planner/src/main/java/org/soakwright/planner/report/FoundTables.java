@@ -7,6 +7,7 @@ import java.util.Set;
 import org.soakwright.planner.batch.Checked;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.batch.FilmFound;
+import org.soakwright.planner.batch.Published;
 import org.soakwright.planner.conditions.Conversion;
 import org.soakwright.recipes.library.Entry;
 
@@ -103,7 +104,7 @@ final class FoundTables {
         return List.copyOf(notes);
     }
 
-    private static List<String> published(Checked.Published published) {
+    private static List<String> published(Published published) {
         List<String> lines = new ArrayList<>();
         lines.add(published.what() + ": " + published.used().value() + ", from " + entry(published.entry()));
         published.others().forEach(other -> lines.add("beside it the library has " + entry(other)));
