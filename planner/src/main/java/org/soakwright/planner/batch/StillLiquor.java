@@ -23,7 +23,7 @@ import org.soakwright.solver.transport.Buoyancy;
 
 /**
  * What moves a liquor that nothing stirs: what the pieces give off makes it denser or lighter beside them, the stronger the film the less. The
- * difference is its mean over the step, weighted by itself, since a large one carries more. Found by going half way from each difference to
+ * difference is its mean size over the step, weighted by itself, since a large one carries more. Found by going half way from each difference to
  * the one that its film leaves; films go with about the fourth root of the difference, so that this comes to rest. Done when every
  * grade's moves by less than {@link #SMALL} of itself or of what it was at first; after {@link #MOST_ROUNDS} the recipe is refused.
  */
@@ -31,8 +31,14 @@ final class StillLiquor {
     private static final double SMALL = 1e-4;
     private static final int MOST_ROUNDS = 60;
 
-    /** Looks at the surface in each stage, at squares of time: contents there go with its root. */
-    private static final int LOOKS = 6;
+    /** Looks at the surface in each stage, each in the middle of its part of the time. */
+    private static final int LOOKS = 12;
+
+    /**
+     * Of time, in whose root the looks are even: once the film is behind, the difference falls with the root of time, and its square counts
+     * as much from a thousandth of the step to a hundredth as from there to a tenth. Good to 1 % of the difference, a quarter of that of the film.
+     */
+    private static final int POWER = 4;
 
     private final Recipe recipe;
     private final Films films;
@@ -117,7 +123,8 @@ final class StillLiquor {
     /** What the liquor holds, and what it holds more beside a grade's pieces, kg/m3. */
     private double[] mean(Chain chain, int grade, double partition) {
         double liquor = 0;
-        double weight = 0;
+        double net = 0;
+        double sizes = 0;
         double squares = 0;
         double time = 0;
         double[] done = new double[0];
@@ -125,22 +132,23 @@ final class StillLiquor {
             double whole = slots.get(k).seconds(seconds);
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);
             boolean own = slots.get(k).step() == step && slots.get(k).part() > 0;
-            for (int i = 1; own && i <= LOOKS; i++) {
-                upTo[k] = whole * i * i / ((double) LOOKS * LOOKS);
-                double lasting = whole * (2 * i - 1) / ((double) LOOKS * LOOKS);
+            for (int i = 0; own && i < LOOKS; i++) {
+                upTo[k] = whole * Math.pow((i + 0.5) / LOOKS, POWER);
+                double lasting = whole * (Math.pow((i + 1.0) / LOOKS, POWER) - Math.pow((double) i / LOOKS, POWER));
                 Optional<Look> look = look(chain, grade, partition, upTo);
                 if (look.isPresent()) {
                     double difference = look.get().more();
                     liquor += lasting * look.get().away();
-                    weight += lasting * difference;
-                    squares += lasting * difference * Math.abs(difference);
+                    net += lasting * difference;
+                    sizes += lasting * Math.abs(difference);
+                    squares += lasting * difference * difference;
                     time += lasting;
                 }
             }
             upTo[k] = whole;
             done = upTo;
         }
-        return new double[] {time == 0 ? 0 : liquor / time, weight == 0 ? 0 : squares / Math.abs(weight)};
+        return new double[] {time == 0 ? 0 : liquor / time, sizes == 0 ? 0 : Math.signum(net) * squares / sizes};
     }
 
     /** Contents of the liquor: away from the pieces, and more beside them, kg/m3. */
