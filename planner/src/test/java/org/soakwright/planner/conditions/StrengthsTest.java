@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertSame;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.math.BigDecimal;
+import java.util.Objects;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -22,11 +23,15 @@ class StrengthsTest {
     private static final String SUGAR = "diffusivity: 8e-10 m2/s, substance: sucrose";
 
     private static Content known(String species, String strength, String temperature) {
-        Recipe recipe = Known.of(Read.soak(species, "salt: " + strength, temperature))
-                .recipe();
-        Content content = ((Step.Wet) recipe.steps().get(0)).liquor().contents().get("salt");
-        assertTrue(content != null && content.unit().symbol().equals("g/L"), String.valueOf(content));
+        Recipe recipe =
+                Known.of(Read.soak(species, "salt: " + strength, temperature)).recipe();
+        Content content = salt((Step.Wet) recipe.steps().get(0));
+        assertEquals("g/L", content.unit().symbol());
         return content;
+    }
+
+    private static Content salt(Step.Wet step) {
+        return Objects.requireNonNull(step.liquor().contents().get("salt"));
     }
 
     private static double gramsPerLitre(String species, String strength, String temperature) {
@@ -82,8 +87,7 @@ class StrengthsTest {
     void whatTheLiquorTellsItselfStays() {
         Recipe recipe = Read.soak(SALT, "salt: 10 %, density: 1100 kg/m3", "8 Cel");
         assertSame(recipe, Known.of(recipe).recipe());
-        assertEquals(
-                110, ((Step.Wet) recipe.steps().get(0)).liquor().kgPerM3("salt"), 1e-12);
+        assertEquals(110, ((Step.Wet) recipe.steps().get(0)).liquor().kgPerM3("salt"), 1e-12);
         assertTrue(Known.of(recipe).conversions().isEmpty());
     }
 
@@ -106,7 +110,8 @@ class StrengthsTest {
     @ParameterizedTest
     @CsvSource({"26.2 %, 8 Cel", "315 g/L, 20 Cel", "5.3 mol/L, 20 Cel", "100 % of saturation, 8 Cel", "0 %, 8 Cel"})
     void whatStaysDissolvedIsHeld(String strength, String temperature) {
-        Recipe recipe = Known.of(Read.soak(SALT, "salt: " + strength, temperature)).recipe();
+        Recipe recipe =
+                Known.of(Read.soak(SALT, "salt: " + strength, temperature)).recipe();
         double si = ((Step.Wet) recipe.steps().get(0)).liquor().kgPerM3("salt");
         assertTrue(si < 320 && (si > 300 || strength.startsWith("0")), "found " + si);
     }
@@ -122,8 +127,10 @@ class StrengthsTest {
     void whatStrengthsNeedIsSaid() {
         assertTrue(Read.refusal(SALT, "salt: 19 %", "").contains("temperature"));
         assertTrue(Read.refusal("diffusivity: 1e-9 m2/s", "salt: 19 %", "8 Cel").contains("density"));
-        assertTrue(Read.refusal("diffusivity: 1e-9 m2/s", "salt: 2 mol/L", "8 Cel").contains("molar-mass"));
-        assertTrue(Read.refusal("diffusivity: 1e-9 m2/s", "salt: 75 % of saturation", "8 Cel").contains("substance"));
+        assertTrue(
+                Read.refusal("diffusivity: 1e-9 m2/s", "salt: 2 mol/L", "8 Cel").contains("molar-mass"));
+        assertTrue(Read.refusal("diffusivity: 1e-9 m2/s", "salt: 75 % of saturation", "8 Cel")
+                .contains("substance"));
         assertTrue(Read.refusal(SALT, "salt: 120 % of saturation", "8 Cel").startsWith("test.yaml:9:35: "));
         assertTrue(Read.refusal(SALT, "salt: 75 % of saturation", "120 Cel").contains("no property is known there"));
     }
@@ -135,9 +142,12 @@ class StrengthsTest {
         Recipe recipe = Read.soak(SALT, "salt: " + strength, "8 Cel");
         Step.Wet step = (Step.Wet) recipe.steps().get(0);
         Species salt = recipe.species().get(0);
-        Quantity written = step.liquor().contents().get("salt").amount();
+        Quantity written = salt(step).amount();
         double si = Strengths.kgPerM3(step, salt, written);
-        assertEquals(written.value().doubleValue(), Strengths.express(step, salt, si, written), 1e-12 * written.value().doubleValue());
+        assertEquals(
+                written.value().doubleValue(),
+                Strengths.express(step, salt, si, written),
+                1e-12 * written.value().doubleValue());
     }
 
     /** Every strength that a tank may reach has an expression, down to none. */
@@ -146,7 +156,7 @@ class StrengthsTest {
         Recipe recipe = Read.soak(SALT, "salt: 19 %", "8 Cel");
         Step.Wet step = (Step.Wet) recipe.steps().get(0);
         Species salt = recipe.species().get(0);
-        Unit percent = step.liquor().contents().get("salt").unit();
+        Unit percent = salt(step).unit();
         Quantity like = new Quantity(BigDecimal.ONE, percent, Place.of("test.yaml"), "1");
         double before = -1;
         for (int i = 0; i <= 3000; i++) {
