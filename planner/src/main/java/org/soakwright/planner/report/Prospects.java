@@ -59,7 +59,7 @@ final class Prospects {
 
     /** Under a heading for each target, since its name and limit are long and its grades are few. */
     private static Table chances(Run run, Outlook outlook) {
-        Table table = new Table().text("Read in").number("Chance");
+        Table table = new Table().text("Of").number("Chance");
         for (double level : Outlook.LEVELS) {
             table.number(percent(level) + " read");
         }
@@ -96,7 +96,11 @@ final class Prospects {
     }
 
     private static String where(Outlook.Prospect one) {
-        return one.grade().orElse(one.target() instanceof Target.OfLiquor ? "liquor" : "lot");
+        return one.grade()
+                .orElse(
+                        one.target() instanceof Target.OfLiquor
+                                ? "liquor"
+                                : one.target() instanceof Target.OfTotal ? "batch" : "lot");
     }
 
     private static List<String> notes(Outlook outlook, boolean planned) {
