@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.List;
 import org.soakwright.recipes.model.Phase;
+import org.soakwright.recipes.text.Place;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Part;
 import org.soakwright.solver.chain.Probe;
@@ -22,18 +23,21 @@ final class Extreme {
     private final int water;
     private final int index;
     private final Phase phase;
+    private final Place place;
 
     /**
      * Of one class of pieces.
      *
-     * @param index of the class in the lot
+     * @param index of the class in the lot, for the water the same
+     * @param place of the target
      */
-    Extreme(State state, Weighing weighing, int species, int index, Phase phase) {
+    Extreme(State state, Weighing weighing, int species, int index, Phase phase, Place place) {
         this.state = state;
         this.weighing = weighing;
         this.species = species;
         this.index = index;
         this.phase = phase;
+        this.place = place;
         water = weighing.waterSpecies().orElseThrow();
     }
 
@@ -54,11 +58,11 @@ final class Extreme {
         }
         double low = positions[Math.max(0, best - 1)];
         double high = positions[Math.min(LOOKS - 1, best + 1)];
-        double place = refined(low, high, sign);
-        if (sign * at(place) < sign * ratio(solute[best], moist[best])) {
-            place = positions[best];
+        double there = refined(low, high, sign);
+        if (sign * at(there) < sign * ratio(solute[best], moist[best])) {
+            there = positions[best];
         }
-        return Measure.InPhase.of(content(species, place), content(water, place), phase);
+        return Measure.InPhase.of(content(species, there), content(water, there), phase, place);
     }
 
     private double refined(double from, double to, double sign) {
@@ -77,8 +81,8 @@ final class Extreme {
         return low == 0 ? 0 : high == 1 ? 1 : (low + high) / 2;
     }
 
-    private double at(double place) {
-        return ratio(profile(species, place)[0], profile(water, place)[0]);
+    private double at(double position) {
+        return ratio(profile(species, position)[0], profile(water, position)[0]);
     }
 
     private double ratio(double solute, double moist) {
@@ -89,9 +93,9 @@ final class Extreme {
         return state.courses().get(of).profile(index, state.stage(), positions);
     }
 
-    private Dual content(int of, double place) {
+    private Dual content(int of, double position) {
         Course course = state.courses().get(of);
-        Probe probe = new Probe.At(index, place);
+        Probe probe = new Probe.At(index, position);
         double value = course.value(probe, state.stage());
         Dual read = state.sloping()
                 ? new Dual(
