@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.List;
 import org.soakwright.recipes.model.Phase;
+import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Part;
@@ -24,14 +25,19 @@ final class Extreme {
     private final int index;
     private final Phase phase;
     private final Place place;
+    /** Whether the places of both count alike: from the core, or from face to face. */
+    private final boolean alike;
+
+    private final boolean waterThrough;
 
     /**
      * Of one class of pieces.
      *
+     * @param grade of the class
      * @param index of the class in the lot, for the water the same
      * @param place of the target
      */
-    Extreme(State state, Weighing weighing, int species, int index, Phase phase, Place place) {
+    Extreme(State state, Weighing weighing, int species, int grade, int index, Phase phase, Place place) {
         this.state = state;
         this.weighing = weighing;
         this.species = species;
@@ -39,6 +45,20 @@ final class Extreme {
         this.phase = phase;
         this.place = place;
         water = weighing.waterSpecies().orElseThrow();
+        alike = isThrough(state, species, grade) == isThrough(state, water, grade);
+        waterThrough = isThrough(state, water, grade);
+    }
+
+    private static boolean isThrough(State state, int species, int grade) {
+        Recipe recipe = state.batch().recipe();
+        return Films.twoFaced(
+                recipe.species().get(species), recipe.lot().grades().get(grade));
+    }
+
+    /** Where one has a face behind a skin and the other has none, places run from face to face: halfway is the other's core. */
+    private double own(int of, double position) {
+        boolean through = of == water ? waterThrough : !waterThrough;
+        return alike || through ? position : Math.abs(2 * position - 1);
     }
 
     /** What is read at the extreme. */
@@ -90,12 +110,16 @@ final class Extreme {
     }
 
     private double[] profile(int of, double... positions) {
-        return state.courses().get(of).profile(index, state.stage(), positions);
+        double[] own = new double[positions.length];
+        for (int i = 0; i < own.length; i++) {
+            own[i] = own(of, positions[i]);
+        }
+        return state.courses().get(of).profile(index, state.stage(), own);
     }
 
     private Dual content(int of, double position) {
         Course course = state.courses().get(of);
-        Probe probe = new Probe.At(index, position);
+        Probe probe = new Probe.At(index, own(of, position));
         double value = course.value(probe, state.stage());
         Dual read = state.sloping()
                 ? new Dual(

@@ -111,7 +111,7 @@ sealed interface Measure {
         public Dual read(State state) {
             Dual sum = state.number(0);
             for (int i = 0; i < pieces.count(); i++) {
-                Extreme extreme = new Extreme(state, weighing, species, pieces.first() + i, phase, place);
+                Extreme extreme = new Extreme(state, weighing, species, grade, pieces.first() + i, phase, place);
                 sum = sum.plus(extreme.read(highest).times(pieces.weight(i)));
             }
             return sum;

@@ -220,6 +220,44 @@ class MeasureTest {
         }
     }
 
+    /** With a skin on one face the salt's places run from face to face, those of the bare water from the core: x and |2x - 1| are one place. */
+    @Test
+    void aSkinOnOneFaceDoesNotMixUpPlaces() {
+        for (boolean saltCovered : List.of(true, false)) {
+            String skin = ", skin: {permeance: 1e-8 m/s, face: one}";
+            Recipe recipe = recipe(
+                    head(
+                            "mass: 100 kg",
+                            "salt: {start: 60 g/kg, diffusivity: 8e-10 m2/s, partition: 0.8"
+                                    + (saltCovered ? skin : "") + "}",
+                            "water: {start: 70 %, diffusivity: 3e-10 m2/s, partition: 0.75, exchanges-with: both"
+                                    + (saltCovered ? "" : skin) + "}"),
+                    "steps:",
+                    "  - {soak: one, liquor: {ratio: 3 L/kg, salt: 0 g/L, water: 800 g/L}, film: negligible, time: 30 min}",
+                    "targets:",
+                    "  - {species: salt, reading: highest, at-most: 20 %, phase: moisture}",
+                    "  - {species: salt, reading: lowest, at-most: 20 %, phase: moisture}");
+            Batch batch = new Batch(recipe);
+            Run run = batch.follow(1800);
+            double[] through = new double[20_001];
+            double[] folded = new double[through.length];
+            for (int i = 0; i < through.length; i++) {
+                through[i] = i / 20_000.0;
+                folded[i] = Math.abs(2 * through[i] - 1);
+            }
+            double[] salt = run.course(0).profile(0, 0, saltCovered ? through : folded);
+            double[] water = run.course(1).profile(0, 0, saltCovered ? folded : through);
+            double high = 0;
+            double low = 1;
+            for (int i = 0; i < through.length; i++) {
+                high = Math.max(high, salt[i] / water[i]);
+                low = Math.min(low, salt[i] / water[i]);
+            }
+            assertEquals(100 * high, run.targets().get(0).value(), 1e-5);
+            assertEquals(100 * low, run.targets().get(1).value(), 1e-5);
+        }
+    }
+
     /** Every measure's derivative by every step's time, against central differences of half a second. */
     @Test
     void whatIsReadFollowsTheTimesAsItSays() {
