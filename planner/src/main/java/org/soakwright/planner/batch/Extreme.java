@@ -2,6 +2,8 @@ package org.soakwright.planner.batch;
 
 import java.util.List;
 import org.soakwright.recipes.model.Phase;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.text.Place;
 import org.soakwright.solver.chain.Course;
 import org.soakwright.solver.chain.Part;
 import org.soakwright.solver.chain.Probe;
@@ -22,19 +24,41 @@ final class Extreme {
     private final int water;
     private final int index;
     private final Phase phase;
+    private final Place place;
+    /** Whether the places of both count alike: from the core, or from face to face. */
+    private final boolean alike;
+
+    private final boolean waterThrough;
 
     /**
      * Of one class of pieces.
      *
-     * @param index of the class in the lot
+     * @param grade of the class
+     * @param index of the class in the lot, for the water the same
+     * @param place of the target
      */
-    Extreme(State state, Weighing weighing, int species, int index, Phase phase) {
+    Extreme(State state, Weighing weighing, int species, int grade, int index, Phase phase, Place place) {
         this.state = state;
         this.weighing = weighing;
         this.species = species;
         this.index = index;
         this.phase = phase;
+        this.place = place;
         water = weighing.waterSpecies().orElseThrow();
+        alike = isThrough(state, species, grade) == isThrough(state, water, grade);
+        waterThrough = isThrough(state, water, grade);
+    }
+
+    private static boolean isThrough(State state, int species, int grade) {
+        Recipe recipe = state.batch().recipe();
+        return Films.twoFaced(
+                recipe.species().get(species), recipe.lot().grades().get(grade));
+    }
+
+    /** Where one has a face behind a skin and the other has none, places run from face to face: halfway is the other's core. */
+    private double own(int of, double position) {
+        boolean through = of == water ? waterThrough : !waterThrough;
+        return alike || through ? position : Math.abs(2 * position - 1);
     }
 
     /** What is read at the extreme. */
@@ -54,11 +78,11 @@ final class Extreme {
         }
         double low = positions[Math.max(0, best - 1)];
         double high = positions[Math.min(LOOKS - 1, best + 1)];
-        double place = refined(low, high, sign);
-        if (sign * at(place) < sign * ratio(solute[best], moist[best])) {
-            place = positions[best];
+        double there = refined(low, high, sign);
+        if (sign * at(there) < sign * ratio(solute[best], moist[best])) {
+            there = positions[best];
         }
-        return Measure.InPhase.of(content(species, place), content(water, place), phase);
+        return Measure.InPhase.of(content(species, there), content(water, there), phase, place);
     }
 
     private double refined(double from, double to, double sign) {
@@ -77,8 +101,8 @@ final class Extreme {
         return low == 0 ? 0 : high == 1 ? 1 : (low + high) / 2;
     }
 
-    private double at(double place) {
-        return ratio(profile(species, place)[0], profile(water, place)[0]);
+    private double at(double position) {
+        return ratio(profile(species, position)[0], profile(water, position)[0]);
     }
 
     private double ratio(double solute, double moist) {
@@ -86,12 +110,16 @@ final class Extreme {
     }
 
     private double[] profile(int of, double... positions) {
-        return state.courses().get(of).profile(index, state.stage(), positions);
+        double[] own = new double[positions.length];
+        for (int i = 0; i < own.length; i++) {
+            own[i] = own(of, positions[i]);
+        }
+        return state.courses().get(of).profile(index, state.stage(), own);
     }
 
-    private Dual content(int of, double place) {
+    private Dual content(int of, double position) {
         Course course = state.courses().get(of);
-        Probe probe = new Probe.At(index, place);
+        Probe probe = new Probe.At(index, own(of, position));
         double value = course.value(probe, state.stage());
         Dual read = state.sloping()
                 ? new Dual(

@@ -108,6 +108,15 @@ final class Films {
         return twoFaced(species, pieces) ? new Surface.Faces(covered, bare) : covered;
     }
 
+    /** The part of a difference across film and skin that lies in the film, 1; all of it where there is no skin. */
+    double inFilm(int step, Species species, int grade) {
+        double film = coefficient(step, species, grade);
+        return species.traits()
+                .skin(recipe.lot().grades().get(grade).name())
+                .map(skin -> skin.permeance().si() / (skin.permeance().si() + film))
+                .orElse(1.0);
+    }
+
     /** Whether a skin covers one of the two wetted faces of a grade's pieces, so that they are not alike. */
     static boolean twoFaced(Species species, Grade grade) {
         return species.hasUnlikeFaces(grade);

@@ -15,6 +15,7 @@ import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Reference;
+import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
 import org.soakwright.recipes.text.Place;
@@ -180,7 +181,7 @@ final class Requirements {
     private Measure measure(Weighing weighing, int species, Target.OfPieces target, Gauge gauge) {
         Reading reading = target.reading();
         if (target.counted() instanceof Counted.OfPiece piece) {
-            return new Measure.PerMass(weighing, species, gauge, piece.per());
+            return new Measure.PerMass(target.place(), weighing, species, gauge, piece.per());
         }
         Phase phase = ((Counted.InPhase) target.counted()).phase();
         boolean extreme = reading == Reading.HIGHEST || reading == Reading.LOWEST || reading == Reading.RANGE;
@@ -191,7 +192,7 @@ final class Requirements {
                             + " state moisture instead of the species");
         }
         if (!extreme) {
-            return new Measure.InPhase(weighing, species, gauge, reading, phase);
+            return new Measure.InPhase(target.place(), weighing, species, gauge, reading, phase);
         }
         if (reading == Reading.RANGE) {
             return new Measure.Between(
@@ -210,7 +211,7 @@ final class Requirements {
             Gauge own = gauge instanceof Gauge.Average average
                     ? new Gauge.Average(grade, average.pieces(), reading)
                     : gauge;
-            return new Measure.InPhase(weighing, species, own, reading, phase);
+            return new Measure.InPhase(target.place(), weighing, species, own, reading, phase);
         }
         if (recipe.lot().grades().get(grade).sides().size() > 1) {
             throw new Unsound(
@@ -219,8 +220,21 @@ final class Requirements {
                             + " of a phase is not computed in pieces of several sides where the water is a"
                             + " species; read the mean, core or surface, or state moisture instead of the species");
         }
+        if (differs(species) || differs(weighing.waterSpecies().orElseThrow())) {
+            throw new Unsound(
+                    target.place(),
+                    "the " + reading.word()
+                            + " of a phase is not computed where start or diffusivity differ from piece to piece; remove"
+                            + " varies from the species and the water, or read the mean, core or surface");
+        }
         Population pieces = batch.classes(species).populations().get(grade);
-        return new Measure.ExtremeOfPhase(weighing, species, pieces, grade, highest, phase);
+        return new Measure.ExtremeOfPhase(target.place(), weighing, species, pieces, grade, highest, phase);
+    }
+
+    /** Whether a species tells pieces apart by more than their size, so that its classes are not those of another. */
+    private boolean differs(int species) {
+        Species one = recipe.species().get(species);
+        return one.diffusivityVaries() != null || one.startVaries() != null;
     }
 
     private Weighing weighing(Place place) {

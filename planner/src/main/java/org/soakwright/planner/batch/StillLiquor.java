@@ -108,7 +108,7 @@ final class StillLiquor {
             Chain chain = new Translation(recipe, films).plain(species, step);
             double partition = Translation.partition(species, recipe.steps().get(step));
             for (int j = 0; j < grades; j++) {
-                double[] mean = mean(chain, j, partition);
+                double[] mean = mean(chain, species, j, partition);
                 away.get(j).put(species, mean[0]);
                 more.get(j).put(species, mean[1]);
             }
@@ -121,13 +121,18 @@ final class StillLiquor {
     }
 
     /** What the liquor holds, and what it holds more beside a grade's pieces, kg/m3. */
-    private double[] mean(Chain chain, int grade, double partition) {
+    private double[] mean(Chain chain, Species species, int grade, double partition) {
         double liquor = 0;
         double net = 0;
         double sizes = 0;
         double squares = 0;
         double time = 0;
         double[] done = new double[0];
+        Beside beside = new Beside(
+                grade,
+                partition,
+                films.inFilm(step, species, grade),
+                Films.twoFaced(species, recipe.lot().grades().get(grade)));
         for (int k = 0; k < chain.size(); k++) {
             double whole = slots.get(k).seconds(seconds);
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);
@@ -135,7 +140,7 @@ final class StillLiquor {
             for (int i = 0; own && i < LOOKS; i++) {
                 upTo[k] = whole * Math.pow((i + 0.5) / LOOKS, POWER);
                 double lasting = whole * (Math.pow((i + 1.0) / LOOKS, POWER) - Math.pow((double) i / LOOKS, POWER));
-                Optional<Look> look = look(chain, grade, partition, upTo);
+                Optional<Look> look = look(chain, beside, upTo);
                 if (look.isPresent()) {
                     double difference = look.get().more();
                     liquor += lasting * look.get().away();
@@ -155,14 +160,31 @@ final class StillLiquor {
     private record Look(double away, double more) {}
 
     /** Empty so early in a stage that it would need more modes than are kept: such a look says little of the whole step. */
-    private static Optional<Look> look(Chain chain, int grade, double partition, double[] upTo) {
+    private static Optional<Look> look(Chain chain, Beside beside, double[] upTo) {
         try {
             Course course = chain.follow(upTo);
             int stage = upTo.length - 1;
             double away = course.value(new Probe.Liquor(), stage);
-            return Optional.of(new Look(away, course.value(new Probe.Surface(grade), stage) / partition - away));
+            return Optional.of(new Look(away, beside.more(course, stage, away)));
         } catch (StageTooShort early) {
             return Optional.empty();
+        }
+    }
+
+    /**
+     * The liquor beside a grade's pieces.
+     *
+     * @param inFilm the part of what lies between surface and liquor that the film has, where a skin covers it
+     * @param oneCovered whether the skin covers the back alone
+     */
+    private record Beside(int grade, double partition, double inFilm, boolean oneCovered) {
+        double more(Course course, int stage, double away) {
+            if (!oneCovered) {
+                return inFilm * (course.value(new Probe.Surface(grade), stage) / partition - away);
+            }
+            double back = course.value(new Probe.At(grade, 0), stage) / partition - away;
+            double front = course.value(new Probe.At(grade, 1), stage) / partition - away;
+            return (inFilm * back + front) / 2;
         }
     }
 

@@ -44,6 +44,7 @@ public record Known(Recipe recipe, List<Conversion> conversions) {
         for (Step step : Strengths.resolved(written, conversions, problems)) {
             steps.add(step instanceof Step.Dry dry ? loaded(written, dry, conversions) : step);
         }
+        Whole.of(written, species, problems);
         if (!problems.isEmpty()) {
             throw new Unsound(problems);
         }

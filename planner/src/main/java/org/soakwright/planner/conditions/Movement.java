@@ -18,11 +18,15 @@ public final class Movement {
     public static double at(Diffusivity stated, org.soakwright.recipes.model.@Nullable Quantity temperature) {
         return temperature == null || !stated.dependsOnTemperature()
                 ? stated.value().si()
-                : at(stated, temperature.si()).value();
+                : Sources.at(temperature, () -> raw(stated, temperature.si())).value();
     }
 
     /** The diffusivity at a temperature in K, with whatever there is to caution. */
     public static Quantity at(Diffusivity stated, double temperature) {
+        return Sources.at(stated.value(), () -> raw(stated, temperature));
+    }
+
+    private static Quantity raw(Diffusivity stated, double temperature) {
         double value = stated.value().si();
         Diffusivity.Law law = stated.law();
         if (law instanceof Diffusivity.Law.Activated activated) {
@@ -31,9 +35,9 @@ public final class Movement {
                     .at(temperature);
         }
         if (law instanceof Diffusivity.Law.Viscous viscous) {
-            return Sources.at(
-                    viscous.at(),
-                    () -> new Scaling.StokesEinstein(value, viscous.at().si()).at(temperature));
+            Scaling scaling =
+                    Sources.at(viscous.at(), () -> new Scaling.StokesEinstein(value, viscous.at().si()));
+            return scaling.at(temperature);
         }
         if (law instanceof Diffusivity.Law.Measured measured) {
             return new Scaling.Measured(measured.points().stream()

@@ -70,11 +70,15 @@ public sealed interface Scaling {
 
     /**
      * Through measured points, the logarithm straight in 1/T from each to the next; beyond the ends along the outermost
-     * pair, with a caution.
+     * pair, with a caution; refused where that leads beyond what anything moves like.
      *
      * @param points at least two, at different temperatures, in any order
      */
     record Measured(List<Point> points) implements Scaling {
+        /** Gases move with 1e-5 to 1e-3 m2/s, nothing at all in 1e-30. */
+        private static final Range POSSIBLE =
+                new Range("diffusivity", 1e-30, 1e-2, "m2/s", "what measured points lead to");
+
         public Measured {
             points = points.stream()
                     .sorted(Comparator.comparingDouble(Point::temperature))
@@ -107,7 +111,9 @@ public sealed interface Scaling {
             Point warm = points.get(next);
             double share = (1 / cold.temperature - 1 / temperature) / (1 / cold.temperature - 1 / warm.temperature);
             double logarithm = (1 - share) * Math.log(cold.diffusivity) + share * Math.log(warm.diffusivity);
-            return new Quantity(Math.exp(logarithm), 0, cautions);
+            double value = Math.exp(logarithm);
+            POSSIBLE.refuse(value);
+            return new Quantity(value, 0, cautions);
         }
     }
 
