@@ -9,6 +9,7 @@ import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.text.Unsound;
 
 /** What the pieces of a run hold at its end, for the cautions to be tested on. */
 final class RunEnds implements RecipeFacts.Ends {
@@ -44,9 +45,14 @@ final class RunEnds implements RecipeFacts.Ends {
         }
         State state = run.state(batch.lastStage(recipe.steps().size() - 1), false);
         List<Double> phases = new ArrayList<>();
-        for (int j = 0; j < recipe.lot().grades().size(); j++) {
-            phase(weighing, index, j, reading)
-                    .ifPresent(measure -> phases.add(measure.read(state).value()));
+        try {
+            for (int j = 0; j < recipe.lot().grades().size(); j++) {
+                phase(weighing, index, j, reading)
+                        .ifPresent(measure -> phases.add(measure.read(state).value()));
+            }
+        } catch (Unsound dry) {
+            // Without water there is no phase to caution about; a target on it says so itself.
+            return List.of();
         }
         return phases;
     }
@@ -57,12 +63,19 @@ final class RunEnds implements RecipeFacts.Ends {
         boolean extreme = reading == Reading.HIGHEST || reading == Reading.LOWEST;
         if (!extreme || weighing.waterSpecies().isEmpty()) {
             Gauge gauge = new Gauge.Average(grade, pieces, reading);
-            return Optional.of(new Measure.InPhase(weighing, species, gauge, reading, Phase.WATER));
+            return Optional.of(new Measure.InPhase(
+                    run.batch().recipe().lot().place(), weighing, species, gauge, reading, Phase.WATER));
         }
         boolean oneSide = run.batch().recipe().lot().grades().get(grade).sides().size() == 1;
         return oneSide
                 ? Optional.of(new Measure.ExtremeOfPhase(
-                        weighing, species, pieces, grade, reading == Reading.HIGHEST, Phase.WATER))
+                        run.batch().recipe().lot().place(),
+                        weighing,
+                        species,
+                        pieces,
+                        grade,
+                        reading == Reading.HIGHEST,
+                        Phase.WATER))
                 : Optional.empty();
     }
 }
