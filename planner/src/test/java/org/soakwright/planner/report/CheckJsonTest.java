@@ -47,7 +47,17 @@ class CheckJsonTest {
     @Test
     void theGroupsHaveTheNamesOfTheLanguage() throws IOException {
         assertEquals(
-                List.of("soakwright", "title", "inputs-sha256", "groups", "shapes", "fits", "cautions"),
+                List.of(
+                        "soakwright",
+                        "title",
+                        "inputs-sha256",
+                        "groups",
+                        "shapes",
+                        "fits",
+                        "conversions",
+                        "films",
+                        "library",
+                        "cautions"),
                 Json.names(checked()));
         assertEquals(
                 List.of("step", "species", "piece", "Fo", "Bi", "capacity-ratio", "regime"),

@@ -91,7 +91,8 @@ class ResultJsonTest {
                 "per-hour",
                 "nearest-miss",
                 "remedies",
-                "cautions");
+                "cautions",
+                        "stops");
         assertEquals(names, Json.names(followed()));
         assertEquals(names, Json.names(planned("60 g/kg")));
     }
