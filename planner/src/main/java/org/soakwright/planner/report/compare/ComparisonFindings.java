@@ -167,18 +167,22 @@ public final class ComparisonFindings {
         return by == 0 ? "0" : (by > 0 ? "+" : "-") + Durations.practical(Math.abs(by));
     }
 
+    /** Under a heading for each reading, since names are long and the same reading may have other limits. */
     private static Table targets(Comparison comparison) {
         Table table = new Table()
-                .text("Target")
                 .text("Limit")
                 .number("A")
                 .verdict("A verdict")
                 .number("B")
                 .verdict("B verdict")
                 .number(DIFFERENCE);
+        String heading = "";
         for (Comparison.TargetRow row : comparison.targets()) {
+            if (!row.target().equals(heading)) {
+                heading = row.target();
+                table.heading(heading);
+            }
             table.row(List.of(
-                    row.target(),
                     row.limit(),
                     value(row.a()),
                     verdict(row.a()),
