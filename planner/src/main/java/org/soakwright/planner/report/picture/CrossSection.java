@@ -238,7 +238,7 @@ final class CrossSection {
         sheet.draw(area, look.muted(), Look.dashed(1));
         if (cut.isUnlikeBelow()) {
             sheet.fill(new Rectangle2D.Double(area.getX() - 1, area.getMaxY(), area.getWidth() + 2, 4), look.ink());
-            sheet.text(edges(), area.getX(), area.getMaxY() + 16, Sheet.Anchor.LEFT, Look.SMALL, look.ink());
+            sheet.text(cut.edges(), area.getX(), area.getMaxY() + 16, Sheet.Anchor.LEFT, Look.SMALL, look.ink());
         }
         if (cut.isUnlikeLeft()) {
             sheet.fill(new Rectangle2D.Double(area.getX() - 4, area.getY() - 1, 4, area.getHeight() + 5), look.ink());
