@@ -25,6 +25,9 @@ final class Prospects {
     /** Less of the variance is not worth measuring. */
     private static final double TELLING = 0.01;
 
+    /** Of rows below their heading. */
+    private static final String INDENT = "  ";
+
     private Prospects() {}
 
     /** One sentence for the answer; empty where everything is taken as exact or the recipe states no target. */
@@ -71,7 +74,7 @@ final class Prospects {
                 table.heading(own);
                 heading = own;
             }
-            List<String> cells = new ArrayList<>(List.of(where(one), percent(one.chance())));
+            List<String> cells = new ArrayList<>(List.of(INDENT + where(one), percent(one.chance())));
             for (int i = 0; i < Outlook.LEVELS.size(); i++) {
                 cells.add(
                         one.percentiles().isEmpty()
@@ -142,7 +145,7 @@ final class Prospects {
                     table.heading(name(recipe, one) + ", " + where(one));
                     largest(one)
                             .forEach(value -> table.row(List.of(
-                                    outlook.values().get(value),
+                                    INDENT + outlook.values().get(value),
                                     percent(one.shares().get(value)),
                                     percent(Shares.remaining(one.shares().get(value))))));
                 });

@@ -81,6 +81,11 @@ public final class Table {
         return List.copyOf(rows);
     }
 
+    /** Whether a sheet is wide enough for all of it. */
+    public boolean fitsASheet() {
+        return TableText.fits(this);
+    }
+
     public boolean isEmpty() {
         return rows.isEmpty();
     }

@@ -12,15 +12,12 @@ final class TableText {
 
     private final Table table;
     private final List<Table.Column> columns;
-    /** Under headings rows stand a little to the right. */
-    private final String indent;
     /** One for each row; a heading has a single cell. */
     private final List<String[]> cells = new ArrayList<>();
 
     private TableText(Table table) {
         this.table = table;
         columns = table.columns();
-        indent = table.rows().stream().anyMatch(Table.Row::isHeading) ? INDENT + INDENT : INDENT;
     }
 
     static List<String> lines(Table table, Style style) {
@@ -59,7 +56,7 @@ final class TableText {
     }
 
     private String line(String[] row, int[] widths, Style style) {
-        StringBuilder line = new StringBuilder(indent);
+        StringBuilder line = new StringBuilder(INDENT);
         StringBuilder pending = new StringBuilder();
         for (int j = 0; j < row.length; j++) {
             String text = Prose.clipped(row[j], widths[j]);
@@ -79,7 +76,18 @@ final class TableText {
         return Table.isGood(text) ? style.good(text) : style.bad(text);
     }
 
-    private int[] widths() {
+    /** Whether nothing of a table has to be cut. */
+    static boolean fits(Table table) {
+        TableText text = new TableText(table);
+        text.fill();
+        return Arrays.stream(text.wanted()).sum() <= text.room();
+    }
+
+    private int room() {
+        return Prose.WIDTH - INDENT.length() - GAP.length() * (columns.size() - 1);
+    }
+
+    private int[] wanted() {
         int[] widths = new int[columns.size()];
         for (int j = 0; j < widths.length; j++) {
             widths[j] = Prose.length(columns.get(j).header());
@@ -89,7 +97,12 @@ final class TableText {
                 }
             }
         }
-        int room = Prose.WIDTH - indent.length() - GAP.length() * (widths.length - 1);
+        return widths;
+    }
+
+    private int[] widths() {
+        int[] widths = wanted();
+        int room = room();
         while (Arrays.stream(widths).sum() > room) {
             int widest = widestText(widths);
             if (widest < 0) {

@@ -167,26 +167,38 @@ public final class ComparisonFindings {
         return by == 0 ? "0" : (by > 0 ? "+" : "-") + Durations.practical(Math.abs(by));
     }
 
+    /** In a table of one line each or, where that would be too wide, under a heading for each reading. */
     private static Table targets(Comparison comparison) {
-        Table table = new Table()
-                .text("Target")
-                .text("Limit")
-                .number("A")
+        Table flat = results(new Table().text("Target").text("Limit"));
+        comparison.targets().forEach(row -> flat.row(results(row, row.target(), row.limit())));
+        if (flat.fitsASheet()) {
+            return flat;
+        }
+        Table table = results(new Table().text("Limit"));
+        String heading = "";
+        for (Comparison.TargetRow row : comparison.targets()) {
+            if (!row.target().equals(heading)) {
+                heading = row.target();
+                table.heading(heading);
+            }
+            table.row(results(row, "  " + row.limit()));
+        }
+        return table;
+    }
+
+    private static Table results(Table table) {
+        return table.number("A")
                 .verdict("A verdict")
                 .number("B")
                 .verdict("B verdict")
                 .number(DIFFERENCE);
-        for (Comparison.TargetRow row : comparison.targets()) {
-            table.row(List.of(
-                    row.target(),
-                    row.limit(),
-                    value(row.a()),
-                    verdict(row.a()),
-                    value(row.b()),
-                    verdict(row.b()),
-                    signed(row.value(), "")));
-        }
-        return table;
+    }
+
+    private static List<String> results(Comparison.TargetRow row, String... head) {
+        List<String> cells = new ArrayList<>(List.of(head));
+        cells.addAll(
+                List.of(value(row.a()), verdict(row.a()), value(row.b()), verdict(row.b()), signed(row.value(), "")));
+        return cells;
     }
 
     private static String value(Optional<Side.Target> target) {

@@ -17,8 +17,10 @@ import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Grain;
 import org.soakwright.recipes.model.Medium;
+import org.soakwright.recipes.model.Moisture;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Skin;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Spread;
 import org.soakwright.recipes.model.Start;
@@ -58,8 +60,25 @@ final class Assumptions {
         }
         points.add(
                 "Inside a piece solutes move by diffusion (Fick) alone, each by itself, at a diffusivity that does not depend on"
-                        + " content. Nothing reacts, and contents count against the piece as loaded.");
+                        + " content. Nothing reacts, and contents count against the piece as loaded where nothing else is said.");
+        weight();
         points.add("A piece has the temperature of its step from the step's beginning.");
+    }
+
+    /** Where what the pieces weigh, and the water in them, come from. */
+    private void weight() {
+        Moisture moisture = recipe.lot().moisture();
+        boolean gains = recipe.steps().stream().anyMatch(step -> step.head().gain() != null);
+        if (gains) {
+            points.add("The lot gains or loses in each step what the recipe says, every piece its share.");
+        }
+        if (moisture != null) {
+            points.add("Water is " + moisture.start() + " of the pieces at the start and " + moisture.end()
+                    + " at the end, everywhere in them, changing evenly over the time between"
+                    + (gains ? "." : "; what is neither water nor a solute stays, and the mass follows."));
+        } else if (!gains && recipe.water().isPresent()) {
+            points.add("The mass of the pieces changes by what all species change; all else stays.");
+        }
     }
 
     private String sizes() {
@@ -106,9 +125,28 @@ final class Assumptions {
                     + " times the content of the liquor, both per volume, at every content"
                     + overridden(name) + ".");
         }
+        recipe.lot().grades().stream()
+                .flatMap(grade -> species.traits().skin(grade.name()).stream()
+                        .map(skin -> skin(skin, grade)
+                                + (recipe.lot().grades().size() > 1
+                                                && !species.traits().skins().isEmpty()
+                                        ? " of " + grade.name()
+                                        : "")))
+                .distinct()
+                .forEach(skin -> points.add(name + ": " + skin + "."));
         if (!species.exchangesWith(Medium.LIQUOR) || !species.exchangesWith(Medium.AIR)) {
             points.add(name + " passes into " + (species.exchangesWith(Medium.LIQUOR) ? "liquor" : "air") + " only.");
         }
+    }
+
+    private static String skin(Skin skin, Grade grade) {
+        boolean one = skin.face() == Faces.ONE && grade.sides().get(0).faces() == Faces.BOTH;
+        return "a skin that passes " + Wording.quantity(skin.permeance())
+                + ", counted as contents of the liquor, covers "
+                + (one
+                        ? "one face" + (PieceWords.hasSeveralSides(grade) ? " of the thickness" : "")
+                                + ", the other is bare;" + " surface readings are the mean of both"
+                        : "every open face");
     }
 
     private static String varying(@Nullable Spread spread) {
@@ -126,11 +164,24 @@ final class Assumptions {
     }
 
     private static String pace(Diffusivity diffusivity) {
-        return Wording.quantity(diffusivity.value())
-                + (diffusivity.law() instanceof Diffusivity.Law.Activated activated
-                        ? " at " + Wording.quantity(activated.at()) + ", changing with temperature by "
-                                + activated.energy() + " (Arrhenius)"
-                        : "");
+        Diffusivity.Law law = diffusivity.law();
+        String value = Wording.quantity(diffusivity.value());
+        if (law instanceof Diffusivity.Law.Activated activated) {
+            return value + " at " + Wording.quantity(activated.at()) + ", changing with temperature by "
+                    + activated.energy() + " (Arrhenius)";
+        }
+        if (law instanceof Diffusivity.Law.Viscous viscous) {
+            return value + " at " + Wording.quantity(viscous.at())
+                    + ", changing with the absolute temperature over the viscosity of water";
+        }
+        if (law instanceof Diffusivity.Law.Measured measured) {
+            return Wording.list(measured.points().stream()
+                            .map(point ->
+                                    Wording.quantity(point.value()) + " at " + Wording.quantity(point.temperature()))
+                            .toList())
+                    + ", in between by the logarithm against the inverse absolute temperature";
+        }
+        return value;
     }
 
     private static String direction(Grain grain) {
@@ -184,7 +235,26 @@ final class Assumptions {
                     + Wording.quantity(coefficient.value())
                     + (step instanceof Step.Dry ? ", referred to the content of the piece" : ", the same all the time");
         }
+        if (film instanceof Film.Computed computed) {
+            return "the film between piece and liquor is worked out from how the liquor moves, " + moves(computed);
+        }
         return "no film: the surface is at equilibrium at once";
+    }
+
+    private static String moves(Film.Computed film) {
+        if (film instanceof Film.Still) {
+            return "by nothing but its own density";
+        }
+        if (film instanceof Film.Past past) {
+            return "past the pieces at " + Wording.quantity(past.speed())
+                    + (past.alsoStill() ? " and by its density" : "");
+        }
+        if (film instanceof Film.Stirred stirred) {
+            return "stirred with " + Wording.quantity(stirred.power());
+        }
+        Film.Packed packed = (Film.Packed) film;
+        return "through a bed of pieces at " + Wording.quantity(packed.speed()) + " over the whole section, "
+                + Wording.quantity(packed.voids()) + " of it liquor";
     }
 
     private void between() {

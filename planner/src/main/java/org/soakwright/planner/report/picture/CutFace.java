@@ -2,6 +2,7 @@ package org.soakwright.planner.report.picture;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.Stream;
 import org.soakwright.planner.batch.Section;
 import org.soakwright.planner.report.Way;
 import org.soakwright.recipes.model.Faces;
@@ -69,6 +70,33 @@ final class CutFace {
 
     boolean isUnlikeLeft() {
         return left() != From.CORE;
+    }
+
+    /** What kinds of thick edges there are. */
+    List<String> unlike() {
+        return Stream.of(below(), left())
+                .filter(from -> from != From.CORE)
+                .map(CutFace::word)
+                .distinct()
+                .toList();
+    }
+
+    private static String word(From from) {
+        return from == From.SKIN ? "with a skin" : "sealed";
+    }
+
+    /** {@code sealed face}, {@code with a skin below, sealed left}. */
+    String edges() {
+        if (!isUnlikeLeft()) {
+            return below() == From.SKIN ? "face with skin" : "sealed face";
+        }
+        return below() == left()
+                ? word(below()) + ": below and left"
+                : word(below()) + " below, " + word(left()) + " left";
+    }
+
+    boolean hasSkin() {
+        return below() == From.SKIN || left() == From.SKIN;
     }
 
     /** Where the core lies, as a share of the width from the left. */

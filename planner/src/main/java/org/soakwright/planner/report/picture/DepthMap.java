@@ -122,7 +122,7 @@ final class DepthMap {
         sheet.head(
                 title(),
                 "Shade: the content" + where() + ". Above: the steps. Below: "
-                        + Words.list(courses.stream().map(Course::name).toList()) + "."
+                        + (way.fromSkin() ? "middle, mean and both faces." : "core, mean and " + outside() + ".")
                         + (bounds.isEmpty() ? "" : " Lines: contents that targets name."));
         int width = Look.WIDTH - LEFT - right;
         Panel map = new Panel(new Rectangle2D.Double(LEFT, MAP_TOP, width, MAP_HEIGHT), clock, depths);
