@@ -35,8 +35,9 @@ public final class Movement {
                     .at(temperature);
         }
         if (law instanceof Diffusivity.Law.Viscous viscous) {
-            Scaling scaling =
-                    Sources.at(viscous.at(), () -> new Scaling.StokesEinstein(value, viscous.at().si()));
+            Scaling scaling = Sources.at(
+                    viscous.at(),
+                    () -> new Scaling.StokesEinstein(value, viscous.at().si()));
             return scaling.at(temperature);
         }
         if (law instanceof Diffusivity.Law.Measured measured) {

@@ -17,7 +17,8 @@ class MeasureTest {
                 "language: 1",
                 "title: Measures",
                 "product: [other]",
-                "lot: {density: 1000 kg/m3, " + lot + ", pieces: [{name: slice, shape: slab, thickness: 4 mm, share: 100 %}]}",
+                "lot: {density: 1000 kg/m3, " + lot
+                        + ", pieces: [{name: slice, shape: slab, thickness: 4 mm, share: 100 %}]}",
                 "species:"));
         for (String one : species) {
             lines.add("  " + one);
@@ -39,7 +40,8 @@ class MeasureTest {
         List<TargetState> states = targets(recipe);
         assertEquals(values.length, states.size());
         for (int i = 0; i < values.length; i++) {
-            assertEquals(values[i], states.get(i).value(), tolerance, states.get(i).name());
+            assertEquals(
+                    values[i], states.get(i).value(), tolerance, states.get(i).name());
         }
     }
 
@@ -65,8 +67,7 @@ class MeasureTest {
                 "  - {species: " + name + ", reading: mean, at-most: 5.1 %, per: present}",
                 "  - {species: " + name + ", reading: mean, at-most: 6 %, per: dry}",
                 "  - {species: " + name + ", reading: mean, at-most: 6 %}");
-        assertValues(
-                recipe, 1e-6, 1000, 100 * 1000.0 / 4750, 5, 100 * 0.05 / 0.95, 100 * 50.0 / 4750);
+        assertValues(recipe, 1e-6, 1000, 100 * 1000.0 / 4750, 5, 100 * 0.05 / 0.95, 100 * 50.0 / 4750);
     }
 
     /** 30 g per kg loaded, 12 % heavier: 30/1.12 = 26.7857 g per kg present. A loss of 8.5 % of the mass as loaded then: 30/1.035 = 28.9855. */
@@ -110,8 +111,7 @@ class MeasureTest {
                 "  - {species: salt, reading: mean, at-most: 20 %, phase: water}",
                 "  - {species: salt, reading: highest, at-most: 20 %, phase: moisture}");
         // 20/2, 20/0.44, 0.02/(0.02 + 1.56), 0.02/1.56
-        assertValues(
-                recipe, 1e-9, 100 * 0.44 / 0.33, 200, 10, 20 / 0.44, 100 * 0.02 / 1.58, 100 * 0.02 / 1.56);
+        assertValues(recipe, 1e-9, 100 * 0.44 / 0.33, 200, 10, 20 / 0.44, 100 * 0.02 / 1.58, 100 * 0.02 / 1.56);
     }
 
     /** The same, all salt washed out: dry 0.42 of 0.44 kg stays, 22 % of 1.909091 kg. A salt that enters to 100 g/kg: 0.52/0.22 = 2.363636. */
@@ -123,7 +123,8 @@ class MeasureTest {
                             "mass: 100 kg, moisture: {start: 56 %, end: 78 %}",
                             "salt: {start: 20 g/kg, diffusivity: 1e-9 m2/s, partition: 1}"),
                     "steps:",
-                    "  - {soak: one, liquor: {volume: unlimited, salt: " + liquor + " g/L}, film: negligible, time: 40 h}",
+                    "  - {soak: one, liquor: {volume: unlimited, salt: " + liquor
+                            + " g/L}, film: negligible, time: 40 h}",
                     "targets:",
                     "  - {total: mass, at-least: 1 kg}");
             assertValues(recipe, 1e-8, 100 * (0.42 + (liquor.equals("0") ? 0 : 0.1)) / 0.22);
@@ -174,7 +175,8 @@ class MeasureTest {
     private static Recipe cured(String... targets) {
         String[] rest = new String[5 + targets.length];
         rest[0] = "steps:";
-        rest[1] = "  - {soak: brine, liquor: {ratio: 2 L/kg, salt: 150 g/L, water: 900 g/L}, film: {coefficient: 2e-6 m/s}, time: 20 min}";
+        rest[1] =
+                "  - {soak: brine, liquor: {ratio: 2 L/kg, salt: 150 g/L, water: 900 g/L}, film: {coefficient: 2e-6 m/s}, time: 20 min}";
         rest[2] = "  - {rest: even out, time: 5 min}";
         rest[3] = "  - {dry: room, air: {equilibrium: {water: 200 g/kg}}, film: {coefficient: 3e-7 m/s}, time: 40 min}";
         rest[4] = "targets:";
@@ -228,8 +230,8 @@ class MeasureTest {
             Recipe recipe = recipe(
                     head(
                             "mass: 100 kg",
-                            "salt: {start: 60 g/kg, diffusivity: 8e-10 m2/s, partition: 0.8"
-                                    + (saltCovered ? skin : "") + "}",
+                            "salt: {start: 60 g/kg, diffusivity: 8e-10 m2/s, partition: 0.8" + (saltCovered ? skin : "")
+                                    + "}",
                             "water: {start: 70 %, diffusivity: 3e-10 m2/s, partition: 0.75, exchanges-with: both"
                                     + (saltCovered ? "" : skin) + "}"),
                     "steps:",
@@ -306,12 +308,16 @@ class MeasureTest {
                 double[] earlier = seconds.clone();
                 later[i] += 0.5;
                 earlier[i] -= 0.5;
-                differences[i] = batch.follow(later).stated(requirement) - batch.follow(earlier).stated(requirement);
+                differences[i] = batch.follow(later).stated(requirement)
+                        - batch.follow(earlier).stated(requirement);
                 most = Math.max(most, Math.abs(differences[i]));
             }
             for (int i = 0; i < seconds.length; i++) {
                 assertEquals(
-                        differences[i], slopes[i], 2e-5 * most + 1e-12, TargetState.name(recipe, requirement) + " by " + i);
+                        differences[i],
+                        slopes[i],
+                        2e-5 * most + 1e-12,
+                        TargetState.name(recipe, requirement) + " by " + i);
             }
         }
     }

@@ -87,7 +87,8 @@ class SkinsTest {
     @Test
     void aSkinThatLetsAllThroughIsNone() {
         double bare = mean(recipe(SLAB, "", "{coefficient: 2e-6 m/s}"));
-        assertEquals(bare, mean(recipe(SLAB, ", skin: {permeance: 1 m/s, face: both}", "{coefficient: 2e-6 m/s}")), 2e-4);
+        assertEquals(
+                bare, mean(recipe(SLAB, ", skin: {permeance: 1 m/s, face: both}", "{coefficient: 2e-6 m/s}")), 2e-4);
     }
 
     @Test
@@ -119,12 +120,13 @@ class SkinsTest {
 
     @Test
     void everyGradeHasItsOwnSkin() {
-        String two = "{name: a, shape: slab, thickness: 8 mm, share: 50 %}, {name: b, shape: slab, thickness: 8 mm, share: 50 %}";
-        Recipe recipe =
-                recipe(two, ", skin: {b: {permeance: 5e-7 m/s, face: both}}", "{coefficient: 2e-6 m/s}");
+        String two =
+                "{name: a, shape: slab, thickness: 8 mm, share: 50 %}, {name: b, shape: slab, thickness: 8 mm, share: 50 %}";
+        Recipe recipe = recipe(two, ", skin: {b: {permeance: 5e-7 m/s, face: both}}", "{coefficient: 2e-6 m/s}");
         assertEquals(2e-6, film(surface(recipe, 0, 0)), 0);
         assertEquals(4e-7, film(surface(recipe, 0, 1)), 1e-20);
-        List<StepEnd.Piece> pieces = new Batch(recipe).follow(6 * HOUR, 6 * HOUR).end(0).pieces();
+        List<StepEnd.Piece> pieces =
+                new Batch(recipe).follow(6 * HOUR, 6 * HOUR).end(0).pieces();
         double bare = mean(recipe(SLAB, "", "{coefficient: 2e-6 m/s}"));
         assertEquals(bare, pieces.get(0).species().get(0).value(Reading.MEAN), 1e-9);
         assertEquals(SERIES, pieces.get(1).species().get(0).value(Reading.MEAN), 1e-8);
@@ -132,7 +134,8 @@ class SkinsTest {
 
     @Test
     void aSkinIsRefusedWhereItMeansNothing() {
-        String[] ball = lines("{shape: sphere, diameter: 8 mm}", ", skin: {permeance: 5e-7 m/s, face: one}", "negligible");
+        String[] ball =
+                lines("{shape: sphere, diameter: 8 mm}", ", skin: {permeance: 5e-7 m/s, face: one}", "negligible");
         assertTrue(Refused.said(ball).contains("face: both"), Refused.said(ball));
         String[] faceless = lines(SLAB, ", skin: {permeance: 5e-7 m/s}", "negligible");
         assertTrue(Refused.said(faceless).startsWith("test.yaml:6:"), Refused.said(faceless));

@@ -172,14 +172,43 @@ class StillLiquorTest {
     /** Balls, by Churchill 1983: 2 + 0.589 Ra^(1/4) / [1 + (0.469/Sc)^(9/16)]^(4/9). */
     @Test
     void aBallsFilmIsWhatItLeaves() {
-        Recipe recipe = bath("shape: sphere, diameter: 20 mm", "60 g/kg", "ratio: 3 L/kg, salt: 0 g/L", "{still: true}");
+        Recipe recipe =
+                bath("shape: sphere, diameter: 20 mm", "60 g/kg", "ratio: 3 L/kg, salt: 0 g/L", "{still: true}");
         double coefficient = film(recipe).coefficient();
         double left = denser(left(2, 0.01, x -> 60, 0, 3, coefficient), 1);
         assertEquals(left, films(recipe).difference(0, 0).orElseThrow(), 0.015 * left);
         double rayleigh = 9.80665 * left / 998.2 * Math.pow(0.02, 3) / (WATER * SALT);
-        double sherwood = 2
-                + 0.589 * Math.pow(rayleigh, 0.25) / Math.pow(1 + Math.pow(0.469 * SALT / WATER, 9.0 / 16), 4.0 / 9);
+        double sherwood =
+                2 + 0.589 * Math.pow(rayleigh, 0.25) / Math.pow(1 + Math.pow(0.469 * SALT / WATER, 9.0 / 16), 4.0 / 9);
         assertEquals(sherwood * SALT / 0.02, coefficient, 0.005 * coefficient);
+    }
+
+    /** Behind a skin of 1e-6 m/s the liquor meets only what comes through: of the difference to the surface what the film has of both. */
+    @Test
+    void aSkinLeavesLessToMoveTheLiquor() {
+        String[] lines = lines(SLAB, "60 g/kg", "ratio: 3 L/kg, salt: 0 g/L", STILL);
+        double bare = films(Recipes.of(lines)).difference(0, 0).orElseThrow();
+        lines[5] = lines[5].replace("substance:", "skin: {permeance: 1e-6 m/s, face: both}, substance:");
+        Recipe recipe = Recipes.of(lines);
+        double coefficient = film(recipe).coefficient();
+        double both = 1 / (1 / coefficient + 1 / 1e-6);
+        Left across = left(0, 0.004, x -> 60, 0, 3, both);
+        double outside = denser(new Left(across.away(), across.more() * both / coefficient, 0), 1);
+        assertEquals(outside, films(recipe).difference(0, 0).orElseThrow(), 0.03 * outside);
+        assertTrue(outside < bare);
+        assertEquals(standing(0.12, outside, WATER, 998.2), coefficient, 0.01 * coefficient);
+    }
+
+    /** A tight skin on one of two faces: the other is as bare as ever, and the liquor at both is moved by half as much on average. */
+    @Test
+    void aSkinOnOneFaceHidesThatFace() {
+        String[] lines = lines(SLAB, "60 g/kg", "volume: unlimited, salt: 0 g/L", "{still: true, length: 120 mm}");
+        String[] covered = lines.clone();
+        covered[5] = lines[5].replace("substance:", "skin: {permeance: 1e-15 m/s, face: one}, substance:");
+        Recipe recipe = Recipes.of(covered);
+        double coefficient = film(recipe).coefficient();
+        double half = denser(left(0, 0.008, x -> 60, 0, 1e12, coefficient), 1) / 2;
+        assertEquals(half, films(recipe).difference(0, 0).orElseThrow(), 0.02 * half);
     }
 
     /** 60 g/kg are in equilibrium with 75 g/L. */
@@ -208,7 +237,8 @@ class StillLiquorTest {
     /** 10 um: were the first difference of 75 g/L, 52 kg/m3, to last, Ra would be 4e-4 and Sh 2.08. */
     @Test
     void aTinyBallIsLeftByDiffusionAlone() {
-        Recipe recipe = bath("shape: sphere, diameter: 0.01 mm", "60 g/kg", "ratio: 3 L/kg, salt: 0 g/L", "{still: true}");
+        Recipe recipe =
+                bath("shape: sphere, diameter: 0.01 mm", "60 g/kg", "ratio: 3 L/kg, salt: 0 g/L", "{still: true}");
         double sherwood = film(recipe).groups().sherwood();
         assertTrue(sherwood >= 2 && sherwood < 2.05, "Sh " + sherwood);
     }
@@ -224,7 +254,8 @@ class StillLiquorTest {
         double rayleigh = 9.80665 * difference / 998.2 * Math.pow(0.02, 3) / (WATER * SALT);
         double sherwood = 0.36
                 + 0.518 * Math.pow(rayleigh, 0.25) / Math.pow(1 + Math.pow(0.559 * SALT / WATER, 9.0 / 16), 4.0 / 9);
-        double cubes = Math.cbrt(Math.pow(sherwood * SALT / 0.02, 3) + Math.pow(film(flow).coefficient(), 3));
+        double cubes = Math.cbrt(
+                Math.pow(sherwood * SALT / 0.02, 3) + Math.pow(film(flow).coefficient(), 3));
         assertEquals(cubes, film(both).coefficient(), 1e-3 * cubes);
         assertTrue(difference < films(still).difference(0, 0).orElseThrow());
         double left = denser(left(1, 0.01, x -> 60, 0, 3, cubes), 1);
@@ -262,8 +293,9 @@ class StillLiquorTest {
     @Test
     void everyGradeAndStepHasItsOwn() {
         String[] lines = lines(SLAB, "60 g/kg", "ratio: 3 L/kg, salt: 0 g/L", STILL);
-        lines[3] = "lot: {mass: 100 kg, density: 1000 kg/m3, pieces: [{name: a, shape: slab, thickness: 8 mm, share: 50 %},"
-                + " {name: b, shape: slab, thickness: 24 mm, share: 50 %}]}";
+        lines[3] =
+                "lot: {mass: 100 kg, density: 1000 kg/m3, pieces: [{name: a, shape: slab, thickness: 8 mm, share: 50 %},"
+                        + " {name: b, shape: slab, thickness: 24 mm, share: 50 %}]}";
         String[] two = java.util.Arrays.copyOf(lines, lines.length + 1);
         two[lines.length] = lines[7].replace("bath", "again");
         Films films = films(Recipes.of(two));
@@ -278,6 +310,7 @@ class StillLiquorTest {
         String[] lines = lines(SLAB, "60 g/kg", "ratio: 3 L/kg, salt: 0 g/L", STILL);
         lines[5] = lines[5].replace("substance: sodium chloride", "in-liquor: 1.3e-9 m2/s");
         String said = Refused.said(lines);
-        assertTrue(said.startsWith("test.yaml:8:") && said.contains("nothing here is known to move still liquor"), said);
+        assertTrue(
+                said.startsWith("test.yaml:8:") && said.contains("nothing here is known to move still liquor"), said);
     }
 }

@@ -26,7 +26,8 @@ class MovementTest {
         Recipe recipe = Read.soak("diffusivity: " + diffusivity, "salt: 0 g/L", temperature);
         Step step = recipe.steps().get(0);
         Quantity there = step.temperature();
-        return there != null && !Movement.at(stated(recipe), there.si()).cautions().isEmpty();
+        return there != null
+                && !Movement.at(stated(recipe), there.si()).cautions().isEmpty();
     }
 
     /**
@@ -44,7 +45,8 @@ class MovementTest {
         "21.76, 40, 70, 2.077"
     })
     void anActivationEnergyIsThatOfItsRatio(String energy, String from, String to, double ratio) {
-        double found = at("{value: 1e-10 m2/s, at: " + from + " Cel, activation-energy: " + energy + " kJ/mol}", to + " Cel");
+        double found =
+                at("{value: 1e-10 m2/s, at: " + from + " Cel, activation-energy: " + energy + " kJ/mol}", to + " Cel");
         assertEquals(ratio, found / 1e-10, 2.5e-3 * ratio);
     }
 
@@ -60,8 +62,15 @@ class MovementTest {
     /** Stokes and Einstein from 1.61e-9 m2/s at 25 Cel, sodium chloride in water, viscosity after IAPWS SR6-08: computed apart. */
     @ParameterizedTest
     @CsvSource({
-        "0, 7.3265e-10", "4, 8.4984e-10", "10, 1.042e-9", "12.5, 1.128e-9", "18, 1.3293e-9", "25, 1.61e-9",
-        "40, 2.3057e-9", "60, 3.4356e-9", "80, 4.7938e-9"
+        "0, 7.3265e-10",
+        "4, 8.4984e-10",
+        "10, 1.042e-9",
+        "12.5, 1.128e-9",
+        "18, 1.3293e-9",
+        "25, 1.61e-9",
+        "40, 2.3057e-9",
+        "60, 3.4356e-9",
+        "80, 4.7938e-9"
     })
     void withTheViscosityOfWater(String celsius, double diffusivity) {
         assertEquals(

@@ -22,8 +22,8 @@ class StrengthsTest {
     private static final String SUGAR = "diffusivity: 8e-10 m2/s, substance: sucrose";
 
     private static Content known(String species, String strength, String temperature) {
-        Recipe recipe = Known.of(Read.soak(species, "salt: " + strength, temperature))
-                .recipe();
+        Recipe recipe =
+                Known.of(Read.soak(species, "salt: " + strength, temperature)).recipe();
         Content content = ((Step.Wet) recipe.steps().get(0)).liquor().contents().get("salt");
         assertTrue(content != null && content.unit().symbol().equals("g/L"), String.valueOf(content));
         return content;
@@ -82,8 +82,7 @@ class StrengthsTest {
     void whatTheLiquorTellsItselfStays() {
         Recipe recipe = Read.soak(SALT, "salt: 10 %, density: 1100 kg/m3", "8 Cel");
         assertSame(recipe, Known.of(recipe).recipe());
-        assertEquals(
-                110, ((Step.Wet) recipe.steps().get(0)).liquor().kgPerM3("salt"), 1e-12);
+        assertEquals(110, ((Step.Wet) recipe.steps().get(0)).liquor().kgPerM3("salt"), 1e-12);
         assertTrue(Known.of(recipe).conversions().isEmpty());
     }
 
@@ -106,7 +105,8 @@ class StrengthsTest {
     @ParameterizedTest
     @CsvSource({"26.2 %, 8 Cel", "315 g/L, 20 Cel", "5.3 mol/L, 20 Cel", "100 % of saturation, 8 Cel", "0 %, 8 Cel"})
     void whatStaysDissolvedIsHeld(String strength, String temperature) {
-        Recipe recipe = Known.of(Read.soak(SALT, "salt: " + strength, temperature)).recipe();
+        Recipe recipe =
+                Known.of(Read.soak(SALT, "salt: " + strength, temperature)).recipe();
         double si = ((Step.Wet) recipe.steps().get(0)).liquor().kgPerM3("salt");
         assertTrue(si < 320 && (si > 300 || strength.startsWith("0")), "found " + si);
     }
@@ -122,8 +122,10 @@ class StrengthsTest {
     void whatStrengthsNeedIsSaid() {
         assertTrue(Read.refusal(SALT, "salt: 19 %", "").contains("temperature"));
         assertTrue(Read.refusal("diffusivity: 1e-9 m2/s", "salt: 19 %", "8 Cel").contains("density"));
-        assertTrue(Read.refusal("diffusivity: 1e-9 m2/s", "salt: 2 mol/L", "8 Cel").contains("molar-mass"));
-        assertTrue(Read.refusal("diffusivity: 1e-9 m2/s", "salt: 75 % of saturation", "8 Cel").contains("substance"));
+        assertTrue(
+                Read.refusal("diffusivity: 1e-9 m2/s", "salt: 2 mol/L", "8 Cel").contains("molar-mass"));
+        assertTrue(Read.refusal("diffusivity: 1e-9 m2/s", "salt: 75 % of saturation", "8 Cel")
+                .contains("substance"));
         assertTrue(Read.refusal(SALT, "salt: 120 % of saturation", "8 Cel").startsWith("test.yaml:9:35: "));
         assertTrue(Read.refusal(SALT, "salt: 75 % of saturation", "120 Cel").contains("no property is known there"));
     }
@@ -137,7 +139,10 @@ class StrengthsTest {
         Species salt = recipe.species().get(0);
         Quantity written = step.liquor().contents().get("salt").amount();
         double si = Strengths.kgPerM3(step, salt, written);
-        assertEquals(written.value().doubleValue(), Strengths.express(step, salt, si, written), 1e-12 * written.value().doubleValue());
+        assertEquals(
+                written.value().doubleValue(),
+                Strengths.express(step, salt, si, written),
+                1e-12 * written.value().doubleValue());
     }
 
     /** Every strength that a tank may reach has an expression, down to none. */
