@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.soakwright.planner.conditions.Known;
 import org.soakwright.recipes.library.Caution;
 import org.soakwright.recipes.library.CautionBook;
 import org.soakwright.recipes.library.Facts;
@@ -31,22 +32,38 @@ public record Cautions(List<String> shown, List<String> stops) {
     /** For a recipe not followed yet: where times are free, counted is the longest that there can be. */
     public static Cautions of(Recipe recipe) {
         boolean free = recipe.steps().stream().anyMatch(step -> step.time().isFree());
-        Facts facts = new RecipeFacts(recipe, StepTimes.longest(recipe), RecipeFacts.Ends.unknown());
-        return of(recipe, facts, free ? "up to " : "");
+        Recipe known = Known.of(recipe).recipe();
+        Facts facts = new RecipeFacts(known, StepTimes.longest(known), RecipeFacts.Ends.unknown());
+        Films films = Films.of(known, StepTimes.nominal(known));
+        return of(
+                facts,
+                free ? "up to " : "",
+                found(known, films, Warming.of(known).said()));
     }
 
     /** For a recipe followed. */
     public static Cautions of(Run run) {
         Recipe recipe = run.batch().recipe();
-        return of(recipe, new RecipeFacts(recipe, run.seconds(), new RunEnds(run)), "");
+        RecipeFacts facts = new RecipeFacts(recipe, run.seconds(), new RunEnds(run));
+        List<String> found = new ArrayList<>(Vapour.of(run));
+        found.addAll(found(recipe, run.batch().films(), run.batch().warming()));
+        return of(facts, "", found);
     }
 
-    private static Cautions of(Recipe recipe, Facts facts, String hedge) {
+    /** What was found of this very recipe: what lies outside its sources, and what warming is worth. */
+    private static List<String> found(Recipe known, Films films, List<String> warming) {
+        List<String> found = new ArrayList<>(Reservations.of(known, films));
+        Published.of(known).forEach(one -> one.overruled().ifPresent(found::add));
+        found.addAll(warming);
+        return found;
+    }
+
+    private static Cautions of(Facts facts, String hedge, List<String> found) {
         List<String> shown = new ArrayList<>();
         for (Caution caution : Shelf.BOOK.due(facts)) {
             shown.add(words(caution, facts, hedge));
         }
-        shown.addAll(Warming.of(recipe).said());
+        shown.addAll(found);
         List<String> stops = Shelf.BOOK.stopping(facts).stream()
                 .map(caution -> words(caution, facts, hedge))
                 .toList();

@@ -7,7 +7,6 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.conditions.Currents;
-import org.soakwright.recipes.model.Faces;
 import org.soakwright.recipes.model.Film;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Medium;
@@ -120,11 +119,7 @@ final class Films {
 
     /** Whether a skin covers one of the two wetted faces of a grade's pieces, so that they are not alike. */
     static boolean twoFaced(Species species, Grade grade) {
-        return grade.sides().get(0).faces() == Faces.BOTH
-                && species.traits()
-                        .skin(grade.name())
-                        .filter(skin -> skin.face() == Faces.ONE)
-                        .isPresent();
+        return species.hasUnlikeFaces(grade);
     }
 
     /** m/s; infinite where there is no film. */

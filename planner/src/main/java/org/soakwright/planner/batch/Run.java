@@ -7,6 +7,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Medium;
 import org.soakwright.recipes.model.Recipe;
@@ -101,7 +102,23 @@ public final class Run {
         }
         Step done = recipe.steps().get(step);
         return new StepEnd(
-                done, from, from + seconds[step], List.copyOf(liquor), List.copyOf(means), List.copyOf(pieces));
+                done,
+                from,
+                from + seconds[step],
+                List.copyOf(liquor),
+                List.copyOf(means),
+                List.copyOf(pieces),
+                mass(stage));
+    }
+
+    /** Of the lot, kg; empty where the recipe does not say how it changes. */
+    private OptionalDouble mass(int stage) {
+        Optional<Weighing> weighing = Weighing.of(batch.recipe());
+        OptionalDouble loaded = batch.recipe().lot().massKg();
+        return weighing.isPresent() && loaded.isPresent()
+                ? OptionalDouble.of(loaded.getAsDouble()
+                        * weighing.get().mass(state(stage, false), -1).value())
+                : OptionalDouble.empty();
     }
 
     private StepEnd.Content content(int s, int grade, int stage) {

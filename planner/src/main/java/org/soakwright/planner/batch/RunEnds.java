@@ -1,10 +1,14 @@
 package org.soakwright.planner.batch;
 
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.soakwright.recipes.library.RecipeFacts;
+import org.soakwright.recipes.model.Phase;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Species;
 
 /** What the pieces of a run hold at its end, for the cautions to be tested on. */
 final class RunEnds implements RecipeFacts.Ends {
@@ -31,6 +35,34 @@ final class RunEnds implements RecipeFacts.Ends {
 
     @Override
     public List<Double> waterPhase(String species, Reading reading) {
-        return List.of();
+        Batch batch = run.batch();
+        Recipe recipe = batch.recipe();
+        int index = recipe.species().stream().map(Species::name).toList().indexOf(species);
+        Weighing weighing = Weighing.of(recipe).filter(Weighing::tellsWater).orElse(null);
+        if (weighing == null || index < 0 || recipe.species().get(index).isWater()) {
+            return List.of();
+        }
+        State state = run.state(batch.lastStage(recipe.steps().size() - 1), false);
+        List<Double> phases = new ArrayList<>();
+        for (int j = 0; j < recipe.lot().grades().size(); j++) {
+            phase(weighing, index, j, reading)
+                    .ifPresent(measure -> phases.add(measure.read(state).value()));
+        }
+        return phases;
+    }
+
+    /** Empty for an extreme in pieces of several sides where the water is a species: it is not computed. */
+    private Optional<Measure> phase(Weighing weighing, int species, int grade, Reading reading) {
+        Population pieces = run.batch().classes(species).populations().get(grade);
+        boolean extreme = reading == Reading.HIGHEST || reading == Reading.LOWEST;
+        if (!extreme || weighing.waterSpecies().isEmpty()) {
+            Gauge gauge = new Gauge.Average(grade, pieces, reading);
+            return Optional.of(new Measure.InPhase(weighing, species, gauge, reading, Phase.WATER));
+        }
+        boolean oneSide = run.batch().recipe().lot().grades().get(grade).sides().size() == 1;
+        return oneSide
+                ? Optional.of(new Measure.ExtremeOfPhase(
+                        weighing, species, pieces, grade, reading == Reading.HIGHEST, Phase.WATER))
+                : Optional.empty();
     }
 }

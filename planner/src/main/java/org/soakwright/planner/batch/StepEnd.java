@@ -4,6 +4,7 @@ import java.util.Collections;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.text.Unit;
@@ -16,8 +17,16 @@ import org.soakwright.recipes.text.Unit;
  * @param liquor by species that exchanges with it, for a step in liquor; of the last fill
  * @param means the lot's mean by mass of each species
  * @param pieces each grade
+ * @param massKg of the lot; empty where the recipe does not say how it changes
  */
-public record StepEnd(Step step, double from, double to, List<Liquor> liquor, List<LotMean> means, List<Piece> pieces) {
+public record StepEnd(
+        Step step,
+        double from,
+        double to,
+        List<Liquor> liquor,
+        List<LotMean> means,
+        List<Piece> pieces,
+        OptionalDouble massKg) {
     /** Shares of the pieces, by mass, whose readings are told where pieces differ; 1. */
     public static final List<Double> SHARES = List.of(0.01, 0.05, 0.1, 0.25, 0.5, 0.75, 0.9, 0.95, 0.99);
 

@@ -19,7 +19,7 @@ public final class Trace {
     private static final int PER_TRANSFER = 6;
     private static final int FEWEST = 4;
 
-    /** Looks where modes are counted in thousands, which a sketch of the chain shows. */
+    /** Looks where a sketch of the chain shows what modes in their thousands would, however early a look is. */
     private static final int OF_SKETCHES = 14;
 
     /** What the first look of a stage may need: looks as squares need as many times the end's modes as there are looks. */
@@ -128,7 +128,7 @@ public final class Trace {
             double whole = slot.seconds(seconds);
             int count = transfer ? PER_TRANSFER : Math.max(PER_TRANSFER, (int) Math.ceil(PER_STEP * slot.part()));
             int modes = modes(run, k);
-            count = modes > Chain.MOST_MODES
+            count = modes > Chain.MOST_MODES || batch.isDear()
                     ? Math.min(count, OF_SKETCHES)
                     : Math.max(FEWEST, Math.min(count, MOST_MODES / modes));
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);

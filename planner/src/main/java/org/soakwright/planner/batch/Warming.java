@@ -28,6 +28,9 @@ final class Warming {
     /** Of a step's shortest time: what warming may be worth and still be left out. */
     private static final double NEGLIGIBLE = 0.01;
 
+    /** Nobody times a step to less, s. */
+    private static final double SHORT = 10;
+
     /** Food that is colder holds ice, K (common practice: it begins to freeze at -1 to -2 Cel). */
     private static final double FROZEN = 271.15;
 
@@ -99,7 +102,7 @@ final class Warming {
                     most,
                     Math.abs(slowest(species, index, difference, true, shortest).of(shortest)));
         }
-        boolean matters = worth > NEGLIGIBLE * shortest;
+        boolean matters = worth > Math.max(NEGLIGIBLE * shortest, SHORT);
         if (matters) {
             for (int s = 0; s < own.size(); s++) {
                 lags.get(s).set(index, own.get(s));
@@ -175,7 +178,9 @@ final class Warming {
         return new Warmth(Translation.sides(grade), stated == null ? THERMAL_DIFFUSIVITY : stated.si());
     }
 
+    /** To the second below a minute, to the minute above. */
     private static String minutes(double seconds) {
-        return Durations.practical(60 * Math.ceil(seconds / 60));
+        double whole = Math.abs(seconds) < 60 ? Math.ceil(Math.abs(seconds)) : 60 * Math.ceil(Math.abs(seconds) / 60);
+        return Durations.practical(whole);
     }
 }

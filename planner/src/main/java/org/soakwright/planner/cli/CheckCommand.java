@@ -1,12 +1,6 @@
 package org.soakwright.planner.cli;
 
-import java.util.List;
-import org.soakwright.planner.batch.AsInfinite;
-import org.soakwright.planner.batch.Batch;
-import org.soakwright.planner.batch.Cautions;
-import org.soakwright.planner.batch.Groups;
-import org.soakwright.planner.batch.StepTimes;
-import org.soakwright.planner.conditions.Known;
+import org.soakwright.planner.batch.Checked;
 import org.soakwright.planner.report.CheckJson;
 import org.soakwright.planner.report.CheckSheet;
 import org.soakwright.planner.report.Stamp;
@@ -30,16 +24,9 @@ final class CheckCommand extends RecipeCommand {
     }
 
     @Override
-    Finding find(Recipe written, Stamp stamp, Session session) {
-        Recipe recipe = Known.of(written).recipe();
-        // What is too short to be computed shows now rather than when it is followed.
-        new Batch(recipe).follow(StepTimes.shortest(recipe));
-        List<Groups.Group> groups = Groups.of(recipe);
-        List<AsInfinite> shapes = AsInfinite.of(recipe);
-        List<String> cautions = Cautions.of(recipe).shown();
+    Finding find(Recipe recipe, Stamp stamp, Session session) {
+        Checked checked = Checked.of(recipe);
         return new Finding(
-                Exit.DONE,
-                () -> CheckSheet.of(recipe, groups, shapes, cautions, session.style()),
-                () -> CheckJson.of(stamp, recipe, groups, shapes, cautions));
+                Exit.DONE, () -> CheckSheet.of(checked, session.style()), () -> CheckJson.of(stamp, checked));
     }
 }

@@ -48,6 +48,7 @@ public record Known(Recipe recipe, List<Conversion> conversions) {
         if (!problems.isEmpty()) {
             throw new Unsound(problems);
         }
+        conversions.addAll(Movements.of(written));
         boolean same = species.equals(written.species()) && steps.equals(written.steps());
         return new Known(same ? written : written.with(species, steps), conversions);
     }

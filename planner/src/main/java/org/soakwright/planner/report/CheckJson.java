@@ -1,9 +1,13 @@
 package org.soakwright.planner.report;
 
 import java.io.IOException;
-import java.util.List;
 import org.soakwright.planner.batch.AsInfinite;
+import org.soakwright.planner.batch.Checked;
+import org.soakwright.planner.batch.FilmFound;
 import org.soakwright.planner.batch.Groups;
+import org.soakwright.planner.batch.Published;
+import org.soakwright.planner.conditions.Conversion;
+import org.soakwright.recipes.library.Entry;
 import org.soakwright.recipes.model.Fit;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Recipe;
@@ -15,14 +19,14 @@ import org.soakwright.recipes.model.Recipe;
 public final class CheckJson {
     private CheckJson() {}
 
-    public static String of(
-            Stamp stamp, Recipe recipe, List<Groups.Group> groups, List<AsInfinite> shapes, List<String> cautions) {
+    public static String of(Stamp stamp, Checked checked) {
+        Recipe recipe = checked.recipe();
         return JsonText.object(json -> {
             json.string("soakwright", stamp.version());
             json.string("title", recipe.title());
             json.string("inputs-sha256", stamp.sha256());
             json.array("groups", () -> {
-                for (Groups.Group group : groups) {
+                for (Groups.Group group : checked.groups()) {
                     json.element(() -> {
                         json.string("step", group.step());
                         json.string("species", group.species());
@@ -39,7 +43,7 @@ public final class CheckJson {
                 }
             });
             json.array("shapes", () -> {
-                for (AsInfinite shape : shapes) {
+                for (AsInfinite shape : checked.shapes()) {
                     json.element(() -> {
                         json.string("piece", shape.grade());
                         json.string("taken-for", shape.taken().word());
@@ -56,8 +60,52 @@ public final class CheckJson {
                     }
                 }
             });
-            json.strings("cautions", cautions);
+            json.array("conversions", () -> {
+                for (Conversion conversion : checked.conversions()) {
+                    json.element(() -> {
+                        json.string("what", conversion.what());
+                        json.string("written", conversion.written());
+                        json.string("becomes", conversion.becomes());
+                        json.string("how", conversion.how());
+                    });
+                }
+            });
+            json.array("films", () -> {
+                for (FilmFound film : checked.films()) {
+                    json.element(() -> film(json, film));
+                }
+            });
+            json.array("library", () -> {
+                for (Published published : checked.published()) {
+                    json.element(() -> {
+                        json.string("what", published.what());
+                        json.string("used", published.used().value().toString());
+                        json.string("entry", published.entry().name());
+                        json.strings(
+                                "others",
+                                published.others().stream().map(Entry::name).toList());
+                    });
+                }
+            });
+            json.strings("cautions", checked.cautions());
         });
+    }
+
+    private static void film(JsonText json, FilmFound film) throws IOException {
+        json.string("step", film.step());
+        json.string("species", film.species());
+        json.string("piece", film.piece());
+        json.number("Re", film.reynolds());
+        json.number("Sc", film.schmidt());
+        json.number("Gr", film.grashof());
+        json.number("Sh", film.sherwood());
+        json.number("coefficient", film.coefficient());
+        json.string("unit", "m/s");
+        json.number("within", film.within());
+        json.numberOrNull("density-difference", film.denser());
+        json.numberOrNull("worth-seconds", film.worthSeconds());
+        json.string("correlations", film.correlations());
+        json.strings("cautions", film.cautions());
     }
 
     private static void fit(JsonText json, String piece, Fit fit) throws IOException {

@@ -3,23 +3,16 @@ package org.soakwright.planner.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Collectors;
-import org.soakwright.planner.batch.AsInfinite;
-import org.soakwright.planner.batch.Groups;
+import org.soakwright.planner.batch.Checked;
 import org.soakwright.recipes.model.Recipe;
 
 /** What decides each step of a recipe that was found sound. Plain text, lines of at most 100 characters parted by {@code \n}. */
 public final class CheckSheet {
     private CheckSheet() {}
 
-    /**
-     * The sheet.
-     *
-     * @param groups of the same recipe
-     * @param shapes of the same recipe
-     * @param cautions of the same recipe
-     */
-    public static String of(
-            Recipe recipe, List<Groups.Group> groups, List<AsInfinite> shapes, List<String> cautions, Style style) {
+    /** The sheet. */
+    public static String of(Checked checked, Style style) {
+        Recipe recipe = checked.recipe();
         List<String> lines = new ArrayList<>();
         Prose.lines(recipe.title()).forEach(line -> lines.add(style.heading(line)));
         lines.add("");
@@ -33,16 +26,20 @@ public final class CheckSheet {
                 + recipe.species().size() + " species, "
                 + count(recipe.targets().size(), "target") + "."));
         lines.add("");
-        lines.addAll(GroupTable.section(recipe, groups).lines(style));
-        List<String> pieces = PieceLines.of(recipe, shapes);
+        lines.addAll(GroupTable.section(recipe, checked.groups()).lines(style));
+        List<String> pieces = PieceLines.of(recipe, checked.shapes());
         if (!pieces.isEmpty()) {
             lines.add("");
             lines.add(style.heading("Pieces"));
             pieces.forEach(piece -> lines.addAll(Prose.point(piece)));
         }
+        for (Section section : FoundTables.of(checked)) {
+            lines.add("");
+            lines.addAll(section.lines(style));
+        }
         lines.add("");
         lines.add(style.heading("Cautions"));
-        cautions.forEach(caution -> lines.addAll(Prose.point(caution)));
+        checked.cautions().forEach(caution -> lines.addAll(Prose.point(caution)));
         return lines.stream().collect(Collectors.joining("\n", "", "\n"));
     }
 

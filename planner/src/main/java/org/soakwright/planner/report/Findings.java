@@ -116,7 +116,8 @@ public record Findings(String title, List<String> about, List<String> answer, bo
         if (!liquor.isEmpty()) {
             sections.add(Section.of(LIQUOR, "Liquor to make up", liquor, tables.clinging()));
         }
-        sections.add(Section.of(EXPECTED, "Expected at the end of each step", tables.expected(), tables.differences()));
+        sections.add(
+                Section.of(EXPECTED, "Expected at the end of each step", tables.expected(), tables.expectations()));
         Table targets = targets(run, binds);
         if (!targets.isEmpty()) {
             sections.add(Section.of(TARGETS, "Targets", targets, List.of()));
@@ -150,11 +151,14 @@ public record Findings(String title, List<String> about, List<String> answer, bo
                 .verdict("Verdict");
         for (TargetState state : EachGrade.of(run)) {
             String grade = state.grade().orElse("");
-            String name = grade.isEmpty()
-                    ? state.name()
-                    : state.name().substring(0, state.name().length() - grade.length() - 2);
+            Recipe recipe = run.batch().recipe();
             String verdict = !state.met() ? "MISSED" : binds.contains(state.name()) ? "met, decides" : "met";
-            table.row(List.of(name, grade, Wording.value(state), Wording.limit(state), verdict));
+            table.row(List.of(
+                    TargetWords.name(recipe, state),
+                    grade,
+                    Wording.value(state),
+                    TargetWords.limit(recipe, state),
+                    verdict));
         }
         return table;
     }

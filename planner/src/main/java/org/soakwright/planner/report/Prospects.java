@@ -7,10 +7,13 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import org.soakwright.planner.batch.EachGrade;
 import org.soakwright.planner.batch.Outlook;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.doubt.Chance;
 import org.soakwright.planner.batch.doubt.Shares;
+import org.soakwright.recipes.model.Recipe;
+import org.soakwright.recipes.model.Target;
 
 /** How sure a run is where values are not known exactly, and which of them to measure first. */
 final class Prospects {
@@ -40,8 +43,8 @@ final class Prospects {
     static List<Section> sections(Run run, boolean planned) {
         List<Section> sections = new ArrayList<>();
         outlook(run).ifPresent(outlook -> {
-            sections.add(Section.of(Findings.CHANCES, "How sure", chances(outlook), notes(outlook, planned)));
-            Table measure = measure(outlook);
+            sections.add(Section.of(Findings.CHANCES, "How sure", chances(run, outlook), notes(outlook, planned)));
+            Table measure = measure(run.batch().recipe(), outlook);
             if (!measure.isEmpty()) {
                 sections.add(Section.of(
                         Findings.MEASURE,
@@ -54,19 +57,21 @@ final class Prospects {
         return sections;
     }
 
-    private static Table chances(Outlook outlook) {
-        Table table = new Table().group("Target").text("Grade").number("Chance").text("Asked");
+    /** Under a heading for each target, since its name and limit are long and its grades are few. */
+    private static Table chances(Run run, Outlook outlook) {
+        Table table = new Table().text("Of").number("Chance");
         for (double level : Outlook.LEVELS) {
             table.number(percent(level) + " read");
         }
+        Recipe recipe = run.batch().recipe();
+        String heading = "";
         for (Outlook.Prospect one : outlook.prospects()) {
-            List<String> cells = new ArrayList<>(List.of(
-                    name(one),
-                    one.grade().orElse(""),
-                    percent(one.chance()),
-                    one.confidence().isPresent()
-                            ? Figures.made(100 * one.confidence().getAsDouble()) + " %"
-                            : ""));
+            String own = name(recipe, one) + limit(run, one);
+            if (!own.equals(heading)) {
+                table.heading(own);
+                heading = own;
+            }
+            List<String> cells = new ArrayList<>(List.of(where(one), percent(one.chance())));
             for (int i = 0; i < Outlook.LEVELS.size(); i++) {
                 cells.add(
                         one.percentiles().isEmpty()
@@ -78,9 +83,24 @@ final class Prospects {
         return table;
     }
 
-    private static String name(Outlook.Prospect one) {
-        String grade = one.grade().orElse("");
-        return grade.isEmpty() ? one.name() : one.name().substring(0, one.name().length() - grade.length() - 2);
+    private static String name(Recipe recipe, Outlook.Prospect one) {
+        return TargetWords.name(recipe, one.target(), one.name(), one.grade());
+    }
+
+    private static String limit(Run run, Outlook.Prospect one) {
+        return EachGrade.of(run).stream()
+                .filter(state -> state.target().equals(one.target()))
+                .findFirst()
+                .map(state -> ": " + TargetWords.limit(run.batch().recipe(), state))
+                .orElse("");
+    }
+
+    private static String where(Outlook.Prospect one) {
+        return one.grade()
+                .orElse(
+                        one.target() instanceof Target.OfLiquor
+                                ? "liquor"
+                                : one.target() instanceof Target.OfTotal ? "batch" : "lot");
     }
 
     private static List<String> notes(Outlook outlook, boolean planned) {
@@ -112,23 +132,20 @@ final class Prospects {
         return notes;
     }
 
-    private static Table measure(Outlook outlook) {
-        Table table = new Table()
-                .group("Target")
-                .text("Grade")
-                .text("Value")
-                .number("Of its variance")
-                .number("Would remain");
+    private static Table measure(Recipe recipe, Outlook outlook) {
+        Table table = new Table().text("Value").number("Of its variance").number("Would remain");
         outlook.prospects().stream()
                 .sorted(Comparator.comparingDouble(one -> one.chance().value()))
                 .limit(MOST_TARGETS)
-                .forEach(one -> largest(one)
-                        .forEach(value -> table.row(List.of(
-                                name(one),
-                                one.grade().orElse(""),
-                                outlook.values().get(value),
-                                percent(one.shares().get(value)),
-                                percent(Shares.remaining(one.shares().get(value)))))));
+                .filter(one -> !largest(one).isEmpty())
+                .forEach(one -> {
+                    table.heading(name(recipe, one) + ", " + where(one));
+                    largest(one)
+                            .forEach(value -> table.row(List.of(
+                                    outlook.values().get(value),
+                                    percent(one.shares().get(value)),
+                                    percent(Shares.remaining(one.shares().get(value))))));
+                });
         return table;
     }
 

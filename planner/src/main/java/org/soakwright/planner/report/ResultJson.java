@@ -15,6 +15,9 @@ import org.soakwright.planner.batch.Totals;
 import org.soakwright.planner.batch.doubt.Chance;
 import org.soakwright.planner.batch.doubt.Shares;
 import org.soakwright.recipes.model.Basis;
+import org.soakwright.recipes.model.Counted;
+import org.soakwright.recipes.model.Per;
+import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Target;
@@ -54,6 +57,9 @@ public final class ResultJson {
         json.string("title", recipe.title());
         json.string("inputs-sha256", stamp.sha256());
         json.truth("met", plan == null ? run.meetsTargets() : plan.met());
+        if (recipe.allowedBy() != null) {
+            json.string("allowed-by", recipe.allowedBy());
+        }
         uncertainty(json);
         json.array("steps", () -> {
             for (int i = 0; i < recipe.steps().size(); i++) {
@@ -122,7 +128,6 @@ public final class ResultJson {
         Chance chance = outlook.chance(state, recipe.targets()).orElseThrow();
         json.object("chance", () -> chance(json, chance));
         Outlook.Prospect one = outlook.of(state).orElseThrow();
-        json.numberIfAny("confidence", one.confidence());
         json.numberIfAny("value-error", one.error());
         if (!one.percentiles().isEmpty()) {
             json.object("percentiles", () -> {
@@ -135,7 +140,7 @@ public final class ResultJson {
         }
     }
 
-    private static void step(JsonText json, StepEnd end) throws IOException {
+    private void step(JsonText json, StepEnd end) throws IOException {
         json.string("name", end.step().name());
         json.string("kind", end.step().kind());
         json.number("seconds", end.to() - end.from());
@@ -156,6 +161,14 @@ public final class ResultJson {
                 });
             }
         });
+        if (end.massKg().isPresent()) {
+            double kg = end.massKg().getAsDouble();
+            json.object("mass", () -> {
+                json.number("value", kg);
+                json.number("of-start", kg / recipe.lot().massKg().orElseThrow());
+                json.string("unit", "kg");
+            });
+        }
         json.array("pieces", () -> {
             for (StepEnd.Piece piece : end.pieces()) {
                 json.element(() -> piece(json, piece));
@@ -209,6 +222,7 @@ public final class ResultJson {
             if (pieces.share() != null) {
                 json.number("share", pieces.share().si());
             }
+            counted(json, pieces.counted());
             ofStart = pieces.limits().basis() == Basis.OF_START;
         } else if (target instanceof Target.OfLiquor liquor) {
             json.string("liquor", liquor.step().name());
@@ -216,6 +230,16 @@ public final class ResultJson {
             json.string("reading", "end");
         } else if (target instanceof Target.OfTotal total) {
             json.string("total", total.total().word());
+        } else if (target instanceof Target.OfMass mass) {
+            json.string("total", "mass");
+            if (mass.after() != null) {
+                json.string("after", mass.after().name());
+            }
+            ofStart = mass.ofStart();
+        }
+        Optional<Quantity> confidence = recipe.confidence(target);
+        if (confidence.isPresent()) {
+            json.number("confidence", confidence.get().si());
         }
         json.numberIfAny("at-most", state.atMost());
         json.numberIfAny("at-least", state.atLeast());
@@ -226,6 +250,15 @@ public final class ResultJson {
         json.string("unit", plainUnit(state.unit()));
         json.truth("met", state.met());
         prospect(json, state);
+    }
+
+    /** Only what is not counted as loaded. */
+    private static void counted(JsonText json, Counted counted) throws IOException {
+        if (counted instanceof Counted.InPhase in) {
+            json.string("phase", in.phase().word());
+        } else if (counted instanceof Counted.OfPiece piece && piece.per() != Per.LOADED) {
+            json.string("per", piece.per().word());
+        }
     }
 
     private static String plainUnit(String unit) {

@@ -257,8 +257,24 @@ final class StepTables {
         return table;
     }
 
+    /** What is to be expected beside the contents. */
+    List<String> expectations() {
+        List<String> notes = new ArrayList<>(differences());
+        List<String> masses = new ArrayList<>();
+        for (StepEnd end : ends) {
+            end.massKg()
+                    .ifPresent(kg -> masses.add(
+                            Figures.measured(kg) + " kg when " + end.step().name() + " ends"));
+        }
+        if (!masses.isEmpty()) {
+            notes.add("The lot, loaded with "
+                    + Figures.made(recipe.lot().massKg().orElseThrow()) + " kg, weighs " + Wording.list(masses) + ".");
+        }
+        return notes;
+    }
+
     /** What the means are where pieces differ, and how far they lie apart at the end. */
-    List<String> differences() {
+    private List<String> differences() {
         if (!PieceWords.differ(recipe)) {
             return List.of();
         }

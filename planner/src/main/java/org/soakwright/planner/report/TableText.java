@@ -12,12 +12,15 @@ final class TableText {
 
     private final Table table;
     private final List<Table.Column> columns;
+    /** Under headings rows stand a little to the right. */
+    private final String indent;
     /** One for each row; a heading has a single cell. */
     private final List<String[]> cells = new ArrayList<>();
 
     private TableText(Table table) {
         this.table = table;
         columns = table.columns();
+        indent = table.rows().stream().anyMatch(Table.Row::isHeading) ? INDENT + INDENT : INDENT;
     }
 
     static List<String> lines(Table table, Style style) {
@@ -56,7 +59,7 @@ final class TableText {
     }
 
     private String line(String[] row, int[] widths, Style style) {
-        StringBuilder line = new StringBuilder(INDENT);
+        StringBuilder line = new StringBuilder(indent);
         StringBuilder pending = new StringBuilder();
         for (int j = 0; j < row.length; j++) {
             String text = Prose.clipped(row[j], widths[j]);
@@ -86,7 +89,7 @@ final class TableText {
                 }
             }
         }
-        int room = Prose.WIDTH - INDENT.length() - GAP.length() * (widths.length - 1);
+        int room = Prose.WIDTH - indent.length() - GAP.length() * (widths.length - 1);
         while (Arrays.stream(widths).sum() > room) {
             int widest = widestText(widths);
             if (widest < 0) {

@@ -39,4 +39,30 @@ class CautionsTest {
         assertTrue(anySays(shown, "time in between lets microbes grow (FDA Food Code 3-501.16"), shown.toString());
         assertFalse(anySays(shown, "static"), shown.toString());
     }
+
+    @Test
+    void whoeverAnswersForAPlanLiftsTheStopAndTheCautionStays() {
+        Recipe answered = Recipes.of(
+                Recipes.LOINS + "allowed-by: E. Vik\nsteps:",
+                Recipes.water("one", "ratio: 2 L/kg", "5 h").replace("temperature: 4 Cel", "temperature: 30 Cel"));
+        Cautions cautions = Cautions.of(answered);
+        assertTrue(cautions.stops().isEmpty());
+        assertTrue(
+                anySays(cautions.shown(), "longer than any rule of time allows"),
+                cautions.shown().toString());
+    }
+
+    @Test
+    void fishWhoseWaterPhaseIsTooWeakIsCautionedAtItsLowest() {
+        Recipe fish = Recipes.of(
+                Recipes.LOINS
+                                .replace("title: Loins", "title: Salmon loins")
+                                .replace("start: 190 g/kg", "start: 20 g/kg")
+                                .replace("  density:", "  moisture: {start: 70 %, end: 70 %}\n  density:")
+                        + "steps:",
+                "  - {rest: cold room, temperature: 2 Cel, time: 5 h}");
+        List<String> shown = Cautions.of(new Batch(fish).follow(5 * 3600)).shown();
+        // 20/(20 + 700) is 2.8 %.
+        assertTrue(anySays(shown, "the lowest reading is below 3.5 %"), shown.toString());
+    }
 }

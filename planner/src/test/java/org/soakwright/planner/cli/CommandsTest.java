@@ -55,6 +55,20 @@ class CommandsTest {
     }
 
     @Test
+    void aPlanThatACautionStopsIsNoPlan() throws IOException {
+        Path warm = desk.path("warm.yaml");
+        String text = Files.readString(Path.of(desk.recipe("desalting.yaml")));
+        Files.writeString(warm, text.replaceAll("temperature: [0-9]+ Cel", "temperature: 30 Cel"));
+        Desk.Printed stopped = desk.give("plan", warm.toString());
+        assertEquals(Exit.NO_PLAN, stopped.status());
+        assertTrue(stopped.out().contains("This is not a plan to use."), stopped.out());
+        Files.writeString(warm, Files.readString(warm) + "\nallowed-by: E. Vik, quality\n");
+        Desk.Printed allowed = desk.give("plan", warm.toString());
+        assertFalse(allowed.out().contains("This is not a plan to use."), allowed.out());
+        assertTrue(allowed.out().contains("longer than any rule of time allows"), allowed.out());
+    }
+
+    @Test
     void quietSaysNothingButProblems() throws IOException {
         Desk.Printed printed = desk.give("plan", desk.recipe("out-of-reach.yaml"), "--quiet");
         assertEquals(new Desk.Printed(Exit.NO_PLAN, "", ""), printed);

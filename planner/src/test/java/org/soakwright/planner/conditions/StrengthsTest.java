@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertSame;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.math.BigDecimal;
+import java.util.Objects;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -24,9 +25,13 @@ class StrengthsTest {
     private static Content known(String species, String strength, String temperature) {
         Recipe recipe =
                 Known.of(Read.soak(species, "salt: " + strength, temperature)).recipe();
-        Content content = ((Step.Wet) recipe.steps().get(0)).liquor().contents().get("salt");
-        assertTrue(content != null && content.unit().symbol().equals("g/L"), String.valueOf(content));
+        Content content = salt((Step.Wet) recipe.steps().get(0));
+        assertEquals("g/L", content.unit().symbol());
         return content;
+    }
+
+    private static Content salt(Step.Wet step) {
+        return Objects.requireNonNull(step.liquor().contents().get("salt"));
     }
 
     private static double gramsPerLitre(String species, String strength, String temperature) {
@@ -137,7 +142,7 @@ class StrengthsTest {
         Recipe recipe = Read.soak(SALT, "salt: " + strength, "8 Cel");
         Step.Wet step = (Step.Wet) recipe.steps().get(0);
         Species salt = recipe.species().get(0);
-        Quantity written = step.liquor().contents().get("salt").amount();
+        Quantity written = salt(step).amount();
         double si = Strengths.kgPerM3(step, salt, written);
         assertEquals(
                 written.value().doubleValue(),
@@ -151,7 +156,7 @@ class StrengthsTest {
         Recipe recipe = Read.soak(SALT, "salt: 19 %", "8 Cel");
         Step.Wet step = (Step.Wet) recipe.steps().get(0);
         Species salt = recipe.species().get(0);
-        Unit percent = step.liquor().contents().get("salt").unit();
+        Unit percent = salt(step).unit();
         Quantity like = new Quantity(BigDecimal.ONE, percent, Place.of("test.yaml"), "1");
         double before = -1;
         for (int i = 0; i <= 3000; i++) {

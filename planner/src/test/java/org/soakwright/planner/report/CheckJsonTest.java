@@ -8,9 +8,7 @@ import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.Test;
-import org.soakwright.planner.batch.AsInfinite;
-import org.soakwright.planner.batch.Cautions;
-import org.soakwright.planner.batch.Groups;
+import org.soakwright.planner.batch.Checked;
 import org.soakwright.recipes.Outcome;
 import org.soakwright.recipes.Recipes;
 import org.soakwright.recipes.model.Recipe;
@@ -43,12 +41,7 @@ class CheckJsonTest {
 
     private static Map<String, @Nullable Object> checked() throws IOException {
         Recipe recipe = ((Outcome.Accepted) Recipes.read("recipe.yaml", RECIPE)).recipe();
-        return Json.object(CheckJson.of(
-                new Stamp("0.1.0", "00ff"),
-                recipe,
-                Groups.of(recipe),
-                AsInfinite.of(recipe),
-                Cautions.of(recipe).shown()));
+        return Json.object(CheckJson.of(new Stamp("0.1.0", "00ff"), Checked.of(recipe)));
     }
 
     @Test

@@ -55,6 +55,14 @@ public record Species(
         return traits.substance() == null ? name.equals("water") : traits.substance() == Substance.WATER;
     }
 
+    /** Whether a skin covers one of two wetted faces of a grade's pieces, so that they are not alike for it. */
+    public boolean hasUnlikeFaces(Grade grade) {
+        return grade.sides().get(0).faces() == Faces.BOTH
+                && traits.skin(grade.name())
+                        .filter(skin -> skin.face() == Faces.ONE)
+                        .isPresent();
+    }
+
     /** The same species with another diffusivity. */
     public Species withDiffusivity(Diffusivities other) {
         return new Species(place, name, start, startVaries, other, diffusivityVaries, partition, traits, exchangesWith);

@@ -209,6 +209,15 @@ final class RitzCourse extends Course {
         for (Probe one : all) {
             worst = Math.max(worst, Math.abs(value(one, stage) - other.value(one, stage)));
         }
+        if (probe instanceof Probe.Highest || probe instanceof Probe.Lowest) {
+            // An extremum is off by no more than the whole profile is.
+            double[][] places = Summit.looks(chain.lot().get(probe.grade()).sides());
+            double[] here = grid(probe.grade(), stage, places);
+            double[] there = other.grid(probe.grade(), stage, places);
+            for (int i = 0; i < here.length; i++) {
+                worst = Math.max(worst, Math.abs(here[i] - there[i]));
+            }
+        }
         return worst;
     }
 

@@ -11,8 +11,14 @@ import org.soakwright.solver.shape.Side;
  */
 final class Summit {
     private static final double PLACE = 1e-8;
-    private static final int MOST_WINDOWS = 80;
+    private static final int MOST_WINDOWS = 200;
+    /** A window widens no further, to either side. */
+    private static final double WIDEST = 0.1;
+
     private static final int GRID = 24;
+
+    private static final double[] FROM_CORE = {0, 0.5, 0.8, 0.95, 0.99, 1};
+    private static final double[] BETWEEN_FACES = {0, 0.005, 0.025, 0.1, 0.25, 0.5, 0.75, 0.9, 0.975, 0.995, 1};
 
     private Summit() {}
 
@@ -51,11 +57,17 @@ final class Summit {
                 }
             }
             at = best(body.grid(window), window, sign);
+            // As long as one side still moves outwards none is narrowed, and that one is widened again: a ridge may run
+            // across them.
+            boolean moved = false;
+            boolean[] outwards = new boolean[sides];
             for (int s = 0; s < sides; s++) {
-                boolean edge = at[s] == 1 || at[s] == 4;
-                boolean stuck = window[s][at[s]] == best[s];
+                outwards[s] = (at[s] == 1 || at[s] == 4) && window[s][at[s]] != best[s];
+                moved |= outwards[s];
                 best[s] = window[s][at[s]];
-                span[s] *= edge && !stuck ? 1 : 0.5;
+            }
+            for (int s = 0; s < sides; s++) {
+                span[s] = outwards[s] ? Math.min(WIDEST, 2 * span[s]) : moved ? span[s] : 0.5 * span[s];
             }
         }
         return best;
@@ -91,6 +103,13 @@ final class Summit {
             }
         }
         return true;
+    }
+
+    /** A few positions a side, more of them where the profile is steep: what two profiles are compared at. */
+    static double[][] looks(List<Side> shape) {
+        return shape.stream()
+                .map(side -> side.twoFaced() ? BETWEEN_FACES.clone() : FROM_CORE.clone())
+                .toArray(double[][]::new);
     }
 
     private static double[] fromCore() {

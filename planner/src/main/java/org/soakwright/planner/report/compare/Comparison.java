@@ -30,10 +30,13 @@ public record Comparison(
         Measure litres,
         Measure cost) {
 
+    /** Where a species would stand. */
+    static final String MASS = "mass";
+
     /** A step; named by both where they are called differently. */
     public record StepRow(String step, String kind, Measure seconds) {}
 
-    /** What is in the {@code liquor} or the {@code lot} at the end of a step. */
+    /** What is in the {@code liquor} or the {@code lot} at the end of a step; the lot's mass has no species. */
     public record EndRow(String step, String species, String where, Measure content) {}
 
     /** A reading of one grade, or of the lot, at the end. */
@@ -73,6 +76,9 @@ public record Comparison(
                 liquor.filter(row -> row.content().isAny()).ifPresent(ends::add);
                 end(label, species, "lot", meansA, meansB).ifPresent(ends::add);
             }
+            Measure.of(pair.a().flatMap(Side.Step::mass), pair.b().flatMap(Side.Step::mass))
+                    .filter(Measure::isAny)
+                    .ifPresent(mass -> ends.add(new EndRow(label, MASS, "lot", mass)));
         }
         return new Comparison(
                 a,

@@ -31,13 +31,14 @@ public record Side(
         OptionalDouble cost,
         Optional<String> currency) {
 
-    /** One step: what liquor and lot hold at its end. */
+    /** One step: what liquor and lot hold at its end, and what the lot weighs where that is known. */
     public record Step(
             String name,
             String kind,
             double seconds,
             Map<String, Content> liquors,
             Map<String, Content> means,
+            Optional<Content> mass,
             List<Piece> pieces) {}
 
     /** A content and its unit. */
@@ -102,6 +103,7 @@ public record Side(
                 step.at("seconds").number(),
                 step.at("liquor").each(one -> content(one, "end")),
                 step.at("species").each(one -> content(one, "mean")),
+                step.has("mass") ? Optional.of(content(step.at("mass"), "value")) : Optional.empty(),
                 step.at("pieces").elements(Side::piece));
     }
 
@@ -127,7 +129,8 @@ public record Side(
         Optional<Reading> reading = Optional.empty();
         String name;
         if (target.has("total")) {
-            name = "total " + target.at("total").text();
+            String total = target.at("total").text();
+            name = total.equals("mass") ? "mass of the lot" + after(target) : "total " + total;
         } else if (target.has("liquor")) {
             name = target.at("species").text() + " in " + target.at("liquor").text();
         } else {
@@ -136,9 +139,9 @@ public record Side(
                     .filter(one -> one.word().equals(word))
                     .findFirst();
             OptionalDouble share = target.number("share");
-            name = target.at("species").text() + " " + word.toLowerCase(Locale.ROOT)
+            name = target.at("species").text() + " " + word.toLowerCase(Locale.ROOT) + counted(target)
                     + (share.isPresent() ? " in " + PieceWords.percent(share.getAsDouble()) : "")
-                    + target.text("after").map(step -> " after " + step).orElse("");
+                    + after(target);
         }
         return new Target(
                 name,
@@ -150,7 +153,24 @@ public record Side(
                 target.at("met").truth());
     }
 
+    private static String after(JsonTree target) {
+        return target.text("after").map(step -> " after " + step).orElse("");
+    }
+
+    private static String counted(JsonTree target) {
+        String per = target.text("per").map(mass -> " per " + mass + " mass").orElse("");
+        return target.text("phase")
+                .map(phase -> phase.equals("water") ? " in the water phase" : " per " + phase)
+                .orElse(per);
+    }
+
     private static String limit(JsonTree target, String unit) {
+        OptionalDouble confidence = target.number("confidence");
+        return sides(target, unit)
+                + (confidence.isPresent() ? ", " + PieceWords.percent(confidence.getAsDouble()) + " sure" : "");
+    }
+
+    private static String sides(JsonTree target, String unit) {
         OptionalDouble most = target.number("at-most");
         OptionalDouble least = target.number("at-least");
         if (most.isPresent() && least.isPresent()) {

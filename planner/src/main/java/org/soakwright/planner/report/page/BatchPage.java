@@ -73,7 +73,7 @@ final class BatchPage {
         html.open("main");
         answer();
         findings.section(Findings.REMEDIES).ifPresent(this::section);
-        for (String id : List.of(Findings.STEPS, Findings.TARGETS)) {
+        for (String id : List.of(Findings.STEPS, Findings.TARGETS, Findings.CHANCES, Findings.MEASURE)) {
             findings.section(id).ifPresent(this::section);
         }
         pictures();
@@ -106,6 +106,8 @@ final class BatchPage {
         add(anchors, Findings.REMEDIES, "What would help");
         add(anchors, Findings.STEPS, "Steps");
         add(anchors, Findings.TARGETS, "Targets");
+        add(anchors, Findings.CHANCES, "How sure");
+        add(anchors, Findings.MEASURE, "What to measure");
         anchors.add(new Shell.Anchor(PICTURES, "Pictures"));
         add(anchors, Findings.LIQUOR, "Liquor");
         add(anchors, Findings.EXPECTED, "Expected");

@@ -20,6 +20,7 @@ import org.soakwright.planner.batch.Trace;
 import org.soakwright.planner.report.Csv;
 import org.soakwright.planner.report.Findings;
 import org.soakwright.planner.report.PieceWords;
+import org.soakwright.planner.report.Way;
 import org.soakwright.planner.report.Wording;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
@@ -141,13 +142,17 @@ final class Tables {
         return " [" + species.start().unit() + "]";
     }
 
-    /** One row for each step and grade; the row without a grade is the lot's mean. */
+    /** One row for each step and grade; the row without a grade is the lot: its means, and what it weighs where that is known. */
     private void contents() {
         List<String> headers = new ArrayList<>(List.of("step number", "step", "grade", "end [s]"));
         for (Species species : recipe.species()) {
             for (Reading reading : Reading.values()) {
                 headers.add(species.name() + " " + reading.word() + unit(species));
             }
+        }
+        boolean weighed = ends.stream().anyMatch(end -> end.massKg().isPresent());
+        if (weighed) {
+            headers.add("mass [kg]");
         }
         Csv csv = new Csv(headers);
         for (int i = 0; i < ends.size(); i++) {
@@ -159,6 +164,9 @@ final class Tables {
                         csv.number(content.value(reading));
                     }
                 }
+                if (weighed) {
+                    csv.number(OptionalDouble.empty());
+                }
                 csv.end();
             }
             csv.number(i + 1).text(end.step().name()).text("").number(end.to());
@@ -166,6 +174,9 @@ final class Tables {
                 for (Reading reading : Reading.values()) {
                     csv.number(reading == Reading.MEAN ? OptionalDouble.of(mean.value()) : OptionalDouble.empty());
                 }
+            }
+            if (weighed) {
+                csv.number(end.massKg());
             }
             csv.end();
         }
@@ -302,9 +313,13 @@ final class Tables {
             recipe.lot().grades().forEach(grade -> {
                 String stated = PieceWords.differ(grade, species) ? " as stated" : "";
                 String outside = PieceWords.hasSeveralSides(grade) ? "middle of the face" : Reading.SURFACE.word();
-                for (String read : List.of(Reading.MEAN.word(), Reading.CORE.word() + stated, outside + stated)) {
-                    headers.add(species.name() + " " + read + ", " + grade.name() + unit(species));
+                String bare = Way.of(species, grade).fromSkin() ? "bare face" : outside;
+                List<String> read =
+                        new ArrayList<>(List.of(Reading.MEAN.word(), Reading.CORE.word() + stated, bare + stated));
+                if (Way.of(species, grade).fromSkin()) {
+                    read.add("face with skin" + stated);
                 }
+                read.forEach(one -> headers.add(species.name() + " " + one + ", " + grade.name() + unit(species)));
             });
         }
         Csv csv = new Csv(headers);
@@ -314,11 +329,17 @@ final class Tables {
                             moment.transfer()
                                     ? ""
                                     : recipe.steps().get(moment.step()).name());
-            for (Trace.Sight sight : moment.sights()) {
+            for (int s = 0; s < moment.sights().size(); s++) {
+                Trace.Sight sight = moment.sights().get(s);
                 csv.number(Double.isNaN(sight.liquor()) ? OptionalDouble.empty() : OptionalDouble.of(sight.liquor()));
                 for (int j = 0; j < sight.means().length; j++) {
                     double[] profile = sight.profiles()[j];
-                    csv.number(sight.means()[j]).number(profile[0]).number(profile[profile.length - 1]);
+                    Way way = Way.of(
+                            recipe.species().get(s), recipe.lot().grades().get(j));
+                    csv.number(sight.means()[j]).number(way.core(profile)).number(Way.bare(profile));
+                    if (way.fromSkin()) {
+                        csv.number(profile[0]);
+                    }
                 }
             }
             csv.end();

@@ -16,6 +16,7 @@ import org.soakwright.planner.batch.TargetState;
 import org.soakwright.planner.report.Figures;
 import org.soakwright.planner.report.PieceWords;
 import org.soakwright.planner.report.Stamp;
+import org.soakwright.planner.report.TargetWords;
 import org.soakwright.planner.report.Wording;
 import org.soakwright.recipes.model.Lot;
 import org.soakwright.recipes.model.Quantity;
@@ -200,7 +201,13 @@ final class Draft {
     }
 
     private static String atEnd(StepEnd end) {
-        return end.step() instanceof Step.Wet ? "pieces out" : "";
+        String weight = end.massKg().isPresent()
+                ? "the lot weighs " + Figures.measured(end.massKg().getAsDouble()) + " kg"
+                : "";
+        if (!(end.step() instanceof Step.Wet)) {
+            return weight;
+        }
+        return weight.isEmpty() ? "pieces out" : "pieces out; " + weight;
     }
 
     private List<String> window(int index, StepEnd end) {
@@ -218,14 +225,11 @@ final class Draft {
         List<Sheet.TargetLine> lines = new ArrayList<>();
         for (TargetState state : EachGrade.of(run)) {
             String grade = state.grade().orElse("");
-            String name = grade.isEmpty()
-                    ? state.name()
-                    : state.name().substring(0, state.name().length() - grade.length() - 2);
             lines.add(new Sheet.TargetLine(
-                    name,
+                    TargetWords.name(recipe, state),
                     grade,
                     when(state),
-                    Wording.limit(state),
+                    TargetWords.limit(recipe, state),
                     Wording.value(state),
                     !state.met() ? "MISSED" : binds.contains(state.name()) ? "decides" : "",
                     state.total().isPresent() ? "" : state.unit()));
@@ -240,7 +244,9 @@ final class Draft {
         if (state.total().isPresent()) {
             return "the batch";
         }
-        Reference after = state.target() instanceof Target.OfPieces pieces ? pieces.after() : null;
+        Reference after = state.target() instanceof Target.OfMass mass
+                ? mass.after()
+                : ((Target.OfPieces) state.target()).after();
         return after != null
                 ? after.name()
                 : recipe.steps().get(recipe.steps().size() - 1).name();

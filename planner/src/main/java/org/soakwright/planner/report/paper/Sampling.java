@@ -6,12 +6,15 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.batch.EachGrade;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.planner.report.PieceWords;
+import org.soakwright.recipes.model.Counted;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.GradeScope;
+import org.soakwright.recipes.model.Phase;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
@@ -39,7 +42,9 @@ final class Sampling {
         Map<Take, Of> takes = new LinkedHashMap<>();
         for (TargetState state : EachGrade.of(run)) {
             if (state.target() instanceof Target.OfPieces pieces) {
-                Take take = new Take(sampling.after(pieces), pieces.reading().word(), sampling.how(pieces, state));
+                String how = sampling.how(pieces, state) + sampling.against(pieces, run);
+                Take take = new Take(
+                        sampling.after(pieces.after()), pieces.reading().word(), how);
                 Of of = takes.computeIfAbsent(take, key -> new Of(new LinkedHashSet<>(), new LinkedHashSet<>()));
                 of.species().add(pieces.species().name());
                 of.grades().add(state.grade().orElseThrow());
@@ -54,6 +59,10 @@ final class Sampling {
                 lines.add("At the end of " + liquor.step().name()
                         + ", before the liquor is drained: stir, take a sample of" + " the liquor, assay it for "
                         + liquor.species().name() + ".");
+            } else if (state.target() instanceof Target.OfMass mass) {
+                String after = sampling.after(mass.after());
+                lines.add("At the end of " + after + ", at " + clock.both(endOf(run, after))
+                        + ": weigh the whole lot, drained as it was when it was loaded.");
             }
         }
         if (!takes.isEmpty()) {
@@ -72,8 +81,7 @@ final class Sampling {
         return last == 0 ? all.get(0) : String.join(", ", all.subList(0, last)) + " and " + all.get(last);
     }
 
-    private String after(Target.OfPieces target) {
-        Reference after = target.after();
+    private String after(@Nullable Reference after) {
         return after != null
                 ? after.name()
                 : recipe.steps().get(recipe.steps().size() - 1).name();
@@ -88,6 +96,24 @@ final class Sampling {
         throw new IllegalArgumentException("no step " + step);
     }
 
+    /** What the assay is counted against. */
+    private String against(Target.OfPieces target, Run run) {
+        String species = target.species().name();
+        String water = " Find the water of the same sample too: the limit is " + species;
+        if (target.counted() instanceof Counted.InPhase in) {
+            return water + (in.phase() == Phase.WATER ? " over " + species + " and water together." : " over water.");
+        }
+        return switch (((Counted.OfPiece) target.counted()).per()) {
+            case PRESENT -> " Count it per kg of the sample as it is.";
+            case DRY -> water + " per kg of all that is not water.";
+            case LOADED ->
+                run.end(0).massKg().isPresent()
+                        ? " The limit is per kg as loaded: take what is found per kg of the sample times the lot's mass then"
+                                + " over its mass as loaded."
+                        : "";
+        };
+    }
+
     private String how(Target.OfPieces target, TargetState state) {
         if (target.grade() instanceof GradeScope.WholeLot) {
             String all = "pieces of all grades, taken in the shares in which they are loaded";
@@ -97,14 +123,20 @@ final class Sampling {
                     : "Assay " + all + ", each alone: " + share + " of them, by mass, are to keep the limit.";
         }
         Grade grade = recipe.lot().grade(state.grade().orElseThrow()).orElseThrow();
-        return prepared(target.reading(), grade, target.share() != null) + counted(target, grade);
+        Species species = recipe.species(target.species().name()).orElseThrow();
+        return prepared(target.reading(), grade, target.share() != null, species.hasUnlikeFaces(grade))
+                + counted(target, grade);
     }
 
-    private String prepared(Reading reading, Grade grade, boolean each) {
+    private String prepared(Reading reading, Grade grade, boolean each, boolean unlike) {
         return switch (reading) {
             case MEAN -> (each ? "Homogenise each piece alone" : "Homogenise whole pieces") + apart();
             case CORE -> "Cut a plug from " + PieceWords.core(grade) + apart();
-            case SURFACE -> "Shave a thin layer off the wetted surface" + apart();
+            case SURFACE ->
+                (unlike
+                                ? "Take the skin off its face and shave a thin layer off either face; the mean of both counts"
+                                : "Shave a thin layer off the wetted surface")
+                        + apart();
             case HIGHEST -> layers(grade) + ", assay each; the highest counts" + apart();
             case LOWEST -> layers(grade) + ", assay each; the lowest counts" + apart();
             case RANGE -> layers(grade) + ", assay each; the highest less the lowest counts" + apart();

@@ -4,14 +4,16 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import org.soakwright.planner.batch.TargetState;
+import org.soakwright.planner.report.TargetWords;
 import org.soakwright.recipes.model.Basis;
+import org.soakwright.recipes.model.Counted;
 import org.soakwright.recipes.model.Limits;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Target;
 
 /**
- * A limit of the content of pieces, in the unit of the species.
+ * A limit of the content of pieces, in the unit of the species; one on what is counted otherwise than as loaded is none.
  *
  * @param text in the words and the unit of the target: {@code mean ≤ 25 g/kg}
  */
@@ -25,29 +27,27 @@ record Bound(double level, String text) {
         for (TargetState state : history.targets()) {
             if (state.target() instanceof Target.OfPieces pieces
                     && pieces.reading() != Reading.RANGE
+                    && pieces.counted().equals(Counted.AS_LOADED)
                     && pieces.species().name().equals(name)
                     && (state.grade().orElse("").equals(gradeName)
                             || state.grade().orElse("").equals("lot"))) {
                 double factor = perTargetUnit(history, species, grade, pieces);
-                add(bounds, state.atMost(), "≤", factor, pieces, state);
-                add(bounds, state.atLeast(), "≥", factor, pieces, state);
+                String sure = TargetWords.sure(history.recipe(), pieces);
+                add(bounds, state.atMost(), "≤", factor, sure, state);
+                add(bounds, state.atLeast(), "≥", factor, sure, state);
             }
         }
         return bounds;
     }
 
     private static void add(
-            List<Bound> bounds,
-            OptionalDouble limit,
-            String sign,
-            double factor,
-            Target.OfPieces pieces,
-            TargetState state) {
+            List<Bound> bounds, OptionalDouble limit, String sign, double factor, String sure, TargetState state) {
         if (limit.isPresent()) {
+            Target.OfPieces pieces = (Target.OfPieces) state.target();
             double value = limit.getAsDouble();
             Quantity share = pieces.share();
             String text = pieces.reading().word() + " " + sign + " " + Words.written(value) + " " + state.unit()
-                    + (share == null ? "" : " in " + share);
+                    + (share == null ? "" : " in " + share) + sure;
             bounds.add(new Bound(value * factor, text));
         }
     }

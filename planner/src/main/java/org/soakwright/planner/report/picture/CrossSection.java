@@ -7,6 +7,7 @@ import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Stream;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.batch.Section;
 import org.soakwright.planner.batch.StepEnd;
@@ -107,7 +108,7 @@ final class CrossSection {
     }
 
     private int rowHeight() {
-        return HEAD + height + (cut.isSealedBelow() ? SEALED_LINE : 0) + ROW_GAP;
+        return HEAD + height + (cut.isUnlikeBelow() ? SEALED_LINE : 0) + ROW_GAP;
     }
 
     private int wholeHeight() {
@@ -134,7 +135,7 @@ final class CrossSection {
         sheet.head(
                 title(),
                 "Shade: the content when each step ends. Cross: the core."
-                        + (cut.isSealedBelow() ? " Thick edge: sealed." : "")
+                        + (cut.isUnlikeBelow() ? " Thick edge: " + Words.list(unlike()) + "." : "")
                         + (differs() ? " A piece as stated." : ""));
         for (int i = 0; i < wholes.size(); i++) {
             int x = LEFT + i % columns * (slot + GAP);
@@ -188,7 +189,7 @@ final class CrossSection {
                 sheet.text(
                         tick.label(),
                         panel.x(tick.value()),
-                        area.getMaxY() + 17 + (cut.isSealedBelow() ? SEALED_LINE : 0),
+                        area.getMaxY() + 17 + (cut.isUnlikeBelow() ? SEALED_LINE : 0),
                         Sheet.Anchor.CENTRE,
                         Look.TEXT,
                         look.muted());
@@ -236,17 +237,11 @@ final class CrossSection {
     private void edges(Sheet sheet, Rectangle2D area) {
         Look look = sheet.look();
         sheet.draw(area, look.muted(), Look.dashed(1));
-        if (cut.isSealedBelow()) {
+        if (cut.isUnlikeBelow()) {
             sheet.fill(new Rectangle2D.Double(area.getX() - 1, area.getMaxY(), area.getWidth() + 2, 4), look.ink());
-            sheet.text(
-                    cut.isSealedLeft() ? "sealed: below and left" : "sealed face",
-                    area.getX(),
-                    area.getMaxY() + 16,
-                    Sheet.Anchor.LEFT,
-                    Look.SMALL,
-                    look.ink());
+            sheet.text(edges(), area.getX(), area.getMaxY() + 16, Sheet.Anchor.LEFT, Look.SMALL, look.ink());
         }
-        if (cut.isSealedLeft()) {
+        if (cut.isUnlikeLeft()) {
             sheet.fill(new Rectangle2D.Double(area.getX() - 4, area.getY() - 1, 4, area.getHeight() + 5), look.ink());
         }
         double x = area.getX() + cut.coreAcross() * area.getWidth();
@@ -272,7 +267,8 @@ final class CrossSection {
                 look.ink());
         Section.End held = cut.ends().get(step);
         sheet.text(
-                "core " + Words.number(cut.core(held)) + ", corners " + Words.number(cut.corner(held)),
+                "core " + Words.number(cut.core(held)) + (hasSkin() ? ", bare corners " : ", corners ")
+                        + Words.number(cut.corner(held)),
                 area.getX(),
                 area.getY() - 8,
                 Sheet.Anchor.LEFT,
@@ -300,6 +296,33 @@ final class CrossSection {
         }
     }
 
+    /** What kinds of thick edges there are. */
+    private List<String> unlike() {
+        return Stream.of(cut.below(), cut.left())
+                .filter(from -> from != CutFace.From.CORE)
+                .map(CrossSection::word)
+                .distinct()
+                .toList();
+    }
+
+    private static String word(CutFace.From from) {
+        return from == CutFace.From.SKIN ? "with a skin" : "sealed";
+    }
+
+    /** {@code sealed face}, {@code with a skin below, sealed left}. */
+    private String edges() {
+        if (!cut.isUnlikeLeft()) {
+            return cut.below() == CutFace.From.SKIN ? "face with skin" : "sealed face";
+        }
+        return cut.below() == cut.left()
+                ? word(cut.below()) + ": below and left"
+                : word(cut.below()) + " below, " + word(cut.left()) + " left";
+    }
+
+    private boolean hasSkin() {
+        return cut.below() == CutFace.From.SKIN || cut.left() == CutFace.From.SKIN;
+    }
+
     private boolean differs() {
         return PieceWords.differ(grade, history.recipe().species().get(species));
     }
@@ -311,7 +334,7 @@ final class CrossSection {
                 + history.ends().get(last.step()).step().name() + " ends, "
                 + (differs() ? "a piece of " + grade.name() + " as stated" : grade.name()) + " holds "
                 + Words.number(cut.core(last)) + unit + " at the core and " + Words.number(cut.corner(last)) + unit
-                + " where two faces of the cut meet.";
+                + " where two " + (hasSkin() ? "bare " : "") + "faces of the cut meet.";
     }
 
     private String altText() {
@@ -319,7 +342,7 @@ final class CrossSection {
         StringBuilder text = new StringBuilder("Cut of " + grade.name() + " through the core, "
                 + cut.across().dimension().word() + " " + cut.across().size() + " across, "
                 + cut.down().dimension().word() + " " + cut.down().size() + " down"
-                + (cut.isSealedBelow() ? ", sealed " + (cut.isSealedLeft() ? "below and on the left" : "below") : "")
+                + (cut.isUnlikeBelow() ? ", " + edges() : "")
                 + ": " + name() + " when each step ends.");
         for (Section.End end : cut.ends()) {
             text.append(' ')

@@ -3,12 +3,13 @@ package org.soakwright.planner.report.picture;
 import java.util.Arrays;
 import java.util.List;
 import org.soakwright.planner.batch.Section;
+import org.soakwright.planner.report.Way;
 import org.soakwright.recipes.model.Faces;
 import org.soakwright.recipes.model.Side;
 
 /**
- * A cut through the core as it is laid out: whole, from face to face, with what is sealed at the foot where one of its sides is. What was
- * computed runs from the core or the sealed face outwards.
+ * A cut through the core as it is laid out: whole, from face to face, with a face that is sealed or has a skin at the foot where one of its
+ * sides has such a face. What was computed runs from the core, the sealed face or the one with the skin outwards.
  */
 final class CutFace {
     private final Section section;
@@ -16,8 +17,32 @@ final class CutFace {
 
     CutFace(Section section) {
         this.section = section;
-        // A piece that is sealed on one face is shown lying on it.
-        turned = section.across().faces() == Faces.ONE && section.down().faces() == Faces.BOTH;
+        // A piece that is sealed on one face, or has a skin on one, is shown lying on it.
+        turned = begins(section.across()) != From.CORE && begins(section.down()) == From.CORE;
+    }
+
+    /** What the contents of a side begin at. */
+    enum From {
+        CORE,
+        SEALED_FACE,
+        SKIN
+    }
+
+    private From begins(Side side) {
+        if (side.faces() == Faces.ONE) {
+            return From.SEALED_FACE;
+        }
+        boolean first = side.equals(section.grade().sides().get(0));
+        return first && section.species().hasUnlikeFaces(section.grade()) ? From.SKIN : From.CORE;
+    }
+
+    /** What lies at the foot; the core is no face, so nothing special does. */
+    From below() {
+        return begins(down());
+    }
+
+    From left() {
+        return begins(across());
     }
 
     Side across() {
@@ -37,22 +62,23 @@ final class CutFace {
         return 1000 * down().size().si();
     }
 
-    boolean isSealedBelow() {
-        return down().faces() == Faces.ONE;
+    /** Whether the face at the foot is unlike that above. */
+    boolean isUnlikeBelow() {
+        return below() != From.CORE;
     }
 
-    boolean isSealedLeft() {
-        return across().faces() == Faces.ONE;
+    boolean isUnlikeLeft() {
+        return left() != From.CORE;
     }
 
     /** Where the core lies, as a share of the width from the left. */
     double coreAcross() {
-        return isSealedLeft() ? 0 : 0.5;
+        return left() == From.SEALED_FACE ? 0 : 0.5;
     }
 
     /** Where the core lies, as a share of the height from above. */
     double coreDown() {
-        return isSealedBelow() ? 1 : 0.5;
+        return below() == From.SEALED_FACE ? 1 : 0.5;
     }
 
     List<Section.End> ends() {
@@ -60,19 +86,32 @@ final class CutFace {
     }
 
     double core(Section.End end) {
-        return end.contents()[0][0];
+        return Way.at(down(end, core(section.across())), core(section.down()));
     }
 
-    /** Where the two faces of the cut meet. */
+    /** Position on a side. */
+    private double core(Side side) {
+        return begins(side) == From.SKIN ? 0.5 : 0;
+    }
+
+    /** Contents by position down, at a position across as they were computed. */
+    private static double[] down(Section.End end, double across) {
+        return Arrays.stream(end.contents())
+                .mapToDouble(row -> Way.at(row, across))
+                .toArray();
+    }
+
+    /** Where the two faces of the cut meet that are wetted and bare. */
     double corner(Section.End end) {
         double[] last = end.contents()[end.contents().length - 1];
         return last[last.length - 1];
     }
 
     double middleOfFace(Section.End end, boolean faceAcross) {
-        double[][] contents = end.contents();
         boolean first = faceAcross != turned;
-        return first ? contents[0][contents[0].length - 1] : contents[contents.length - 1][0];
+        return first
+                ? Way.at(down(end, 1), core(section.down()))
+                : Way.at(end.contents()[end.contents().length - 1], core(section.across()));
     }
 
     static double least(Section section) {
@@ -96,13 +135,13 @@ final class CutFace {
         double[][] contents = end.contents();
         int acrossPoints = turned ? contents.length : contents[0].length;
         int downPoints = turned ? contents[0].length : contents.length;
-        int columns = isSealedLeft() ? acrossPoints : 2 * acrossPoints - 1;
-        int rows = isSealedBelow() ? downPoints : 2 * downPoints - 1;
+        int columns = isUnlikeLeft() ? acrossPoints : 2 * acrossPoints - 1;
+        int rows = isUnlikeBelow() ? downPoints : 2 * downPoints - 1;
         double[][] whole = new double[columns][rows];
         for (int i = 0; i < columns; i++) {
-            int a = isSealedLeft() ? i : Math.abs(i - (acrossPoints - 1));
+            int a = isUnlikeLeft() ? i : Math.abs(i - (acrossPoints - 1));
             for (int j = 0; j < rows; j++) {
-                int d = isSealedBelow() ? downPoints - 1 - j : Math.abs(j - (downPoints - 1));
+                int d = isUnlikeBelow() ? downPoints - 1 - j : Math.abs(j - (downPoints - 1));
                 whole[i][j] = turned ? contents[a][d] : contents[d][a];
             }
         }

@@ -4,9 +4,12 @@ import java.awt.Graphics2D;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
+import java.util.stream.Collectors;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.report.PieceWords;
+import org.soakwright.planner.report.Way;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Reading;
 
@@ -24,7 +27,9 @@ final class DepthMap {
     private static final int COURSE_TOP = MAP_TOP + MAP_HEIGHT + 40;
     private static final int COURSE_HEIGHT = 124;
     private static final int HEIGHT = COURSE_TOP + COURSE_HEIGHT + 40;
-    private static final List<Reading> COURSES = List.of(Reading.CORE, Reading.MEAN, Reading.SURFACE);
+
+    static final String BARE = "bare face";
+    static final String SKIN = "face with skin";
 
     private final History history;
     private final Clock clock;
@@ -32,14 +37,22 @@ final class DepthMap {
     private final Ribbon ribbon;
     private final int species;
     private final Grade grade;
+    private final Way way;
     private final boolean several;
     private final boolean differs;
     private final double[][] profiles;
     private final List<Bound> bounds;
     private final Scale contents;
     private final Scale depths;
-    private final List<double[]> courses = new ArrayList<>();
+    private final List<Course> courses = new ArrayList<>();
     private final double[][] shares;
+
+    /** One number of each profile. */
+    private record Course(String name, double[] values) {
+        double last() {
+            return values[values.length - 1];
+        }
+    }
 
     /**
      * A map.
@@ -51,6 +64,7 @@ final class DepthMap {
         this.clock = clock;
         this.species = species;
         grade = history.grades().get(gradeIndex);
+        way = history.way(species, gradeIndex);
         profiles = history.profiles(species, gradeIndex);
         bounds = Bound.of(history, species, gradeIndex);
         right = right(bounds);
@@ -58,9 +72,17 @@ final class DepthMap {
         this.contents = contents;
         several = PieceWords.hasSeveralSides(grade);
         differs = PieceWords.differ(grade, history.recipe().species().get(species));
-        depths = Scale.full(1000 * grade.depth(), 6).reversed();
-        for (Reading reading : COURSES) {
-            courses.add(history.readings(species, gradeIndex, reading));
+        depths = Scale.full(way.millimetres(), 6).reversed();
+        courses.add(new Course(middle(), history.readings(species, gradeIndex, Reading.CORE)));
+        courses.add(new Course(Reading.MEAN.word(), history.readings(species, gradeIndex, Reading.MEAN)));
+        if (way.fromSkin()) {
+            courses.add(new Course(
+                    BARE, Arrays.stream(profiles).mapToDouble(Way::bare).toArray()));
+            courses.add(new Course(
+                    SKIN,
+                    Arrays.stream(profiles).mapToDouble(profile -> profile[0]).toArray()));
+        } else {
+            courses.add(new Course(outside(), history.readings(species, gradeIndex, Reading.SURFACE)));
         }
         shares = resampled();
     }
@@ -99,7 +121,8 @@ final class DepthMap {
         Look look = sheet.look();
         sheet.head(
                 title(),
-                "Shade: the content" + where() + ". Above: the steps. Below: core, mean and " + outside() + "."
+                "Shade: the content" + where() + ". Above: the steps. Below: "
+                        + Words.list(courses.stream().map(Course::name).toList()) + "."
                         + (bounds.isEmpty() ? "" : " Lines: contents that targets name."));
         int width = Look.WIDTH - LEFT - right;
         Panel map = new Panel(new Rectangle2D.Double(LEFT, MAP_TOP, width, MAP_HEIGHT), clock, depths);
@@ -120,11 +143,10 @@ final class DepthMap {
                     Look.dashed(1.2f, 4, 4));
             labels.add(bound.text(), course.y(bound.level()), look.limit());
         }
-        for (int i = 0; i < COURSES.size(); i++) {
-            double[] values = courses.get(i);
-            course.line(history.clocks(), values, look.series(i), Look.line(i));
-            double last = values[values.length - 1];
-            labels.add(word(i) + " " + Words.number(last), course.y(last), look.series(i));
+        for (int i = 0; i < courses.size(); i++) {
+            Course one = courses.get(i);
+            course.line(history.clocks(), one.values(), look.series(i), Look.line(i));
+            labels.add(one.name() + " " + Words.number(one.last()), course.y(one.last()), look.series(i));
         }
         course.on(sheet);
         course.nameRows(sheet, "content, " + history.unit(species));
@@ -140,13 +162,14 @@ final class DepthMap {
         return several ? "face" : "surface";
     }
 
-    private String word(int course) {
-        return COURSES.get(course) == Reading.SURFACE
-                ? outside()
-                : COURSES.get(course).word();
+    private String middle() {
+        return way.fromSkin() ? "middle" : Reading.CORE.word();
     }
 
     private String from() {
+        if (way.fromSkin()) {
+            return several ? BARE + ", " + PieceWords.way(grade) : BARE;
+        }
         return switch (grade.shape()) {
             case SLAB -> "wetted face";
             case BRICK -> "face, " + PieceWords.way(grade);
@@ -176,17 +199,11 @@ final class DepthMap {
             double share = Math.max(0, Math.min(1, (at - clocks[after - 1]) / (clocks[after] - clocks[after - 1])));
             for (int j = 0; j < ROWS; j++) {
                 double position = 1 - (j + 0.5) / ROWS;
-                double before = along(profiles[after - 1], position);
-                image[i][j] = contents.at(before + share * (along(profiles[after], position) - before));
+                double before = Way.at(profiles[after - 1], position);
+                image[i][j] = contents.at(before + share * (Way.at(profiles[after], position) - before));
             }
         }
         return image;
-    }
-
-    private static double along(double[] profile, double position) {
-        double at = position * (profile.length - 1);
-        int i = Math.min(profile.length - 2, (int) at);
-        return profile[i] + (at - i) * (profile[i + 1] - profile[i]);
     }
 
     private void contours(Sheet sheet, Panel map) {
@@ -214,25 +231,30 @@ final class DepthMap {
     }
 
     private double depthAt(double row) {
-        return 1000 * grade.depth() * (1 - row / (history.depths().length - 1));
+        return way.millimetres() * (1 - row / (history.depths().length - 1));
     }
 
     private String caption() {
         String unit = " " + history.unit(species);
-        double[] core = courses.get(0);
-        double[] surface = courses.get(2);
+        double[] core = courses.get(0).values();
         int last = core.length - 1;
         String text = (differs ? "In a piece of " + grade.name() + " as stated" : "In " + grade.name())
-                + (several ? ", from the core " + PieceWords.way(grade) + "," : "") + " the core goes from "
-                + Words.number(core[0]) + " to " + Words.number(core[last]) + unit + " and the " + outside() + " to "
-                + Words.number(surface[last]) + unit;
+                + (several
+                        ? ", from " + (way.fromSkin() ? "face to face " : "the core ") + PieceWords.way(grade) + ","
+                        : "")
+                + " the " + middle() + " goes from "
+                + Words.number(core[0]) + " to " + Words.number(core[last]) + unit
+                + courses.stream()
+                        .skip(2)
+                        .map(outer -> " and the " + outer.name() + " to " + Words.number(outer.last()) + unit)
+                        .collect(Collectors.joining());
         for (Bound bound : bounds) {
             int after = crossing(core, bound.level());
             if (after > 0) {
                 double share = (bound.level() - core[after - 1]) / (core[after] - core[after - 1]);
                 double at =
                         history.clocks()[after - 1] + share * (history.clocks()[after] - history.clocks()[after - 1]);
-                return text + "; the core comes to " + Words.written(round(bound.level())) + unit + " at "
+                return text + "; the " + middle() + " comes to " + Words.written(round(bound.level())) + unit + " at "
                         + Durations.clock(at) + ".";
             }
         }
@@ -240,8 +262,8 @@ final class DepthMap {
             double depth = depthReached(bound.level());
             if (depth > 0) {
                 return text + "; at the end " + Words.written(round(bound.level())) + unit + " is found "
-                        + Words.number(depth) + " mm deep, the core at " + Words.number(1000 * grade.depth())
-                        + " mm.";
+                        + Words.number(depth) + " mm deep, the " + (way.fromSkin() ? SKIN : "core") + " at "
+                        + Words.number(way.millimetres()) + " mm.";
             }
         }
         return text + ".";
@@ -276,17 +298,17 @@ final class DepthMap {
                 + title().substring(0, 1).toLowerCase(java.util.Locale.ROOT)
                 + title().substring(1) + ": across the running clock from 0:00 to " + Durations.clock(history.end())
                 + ", down the depth from the "
-                + (several ? PieceWords.face(grade) + " " + PieceWords.way(grade) : "surface")
-                + " to the core at " + Words.number(1000 * grade.depth())
+                + (several ? PieceWords.face(grade) + " " + PieceWords.way(grade) : way.fromSkin() ? BARE : "surface")
+                + " to the " + (way.fromSkin() ? SKIN : "core") + " at " + Words.number(way.millimetres())
                 + " mm. At the end of each step:");
         for (int i = 0; i < history.ends().size(); i++) {
             int at = history.momentAt(history.ends().get(i).to());
             text.append(i == 0 ? " " : "; ").append(history.ends().get(i).step().name());
-            for (int k = 0; k < COURSES.size(); k++) {
+            for (int k = 0; k < courses.size(); k++) {
                 text.append(k == 0 ? " " : ", ")
-                        .append(word(k))
+                        .append(courses.get(k).name())
                         .append(' ')
-                        .append(Words.number(courses.get(k)[at]))
+                        .append(Words.number(courses.get(k).values()[at]))
                         .append(unit);
             }
         }

@@ -11,6 +11,7 @@ import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.planner.batch.Trace;
+import org.soakwright.planner.report.Way;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
@@ -87,7 +88,7 @@ final class History {
         return ends.get(ends.size() - 1).to();
     }
 
-    /** From 0, the core, to 1, the wetted surface. */
+    /** From 0 to 1 along the {@link #way} through a piece. */
     double[] depths() {
         return depths.clone();
     }
@@ -96,10 +97,15 @@ final class History {
         return recipe.species().get(species).start().unit().symbol();
     }
 
-    /** By clock, then from core to surface; in the species' unit. */
+    /** Along which the profiles of a species in a grade run. */
+    Way way(int species, int grade) {
+        return Way.of(recipe.species().get(species), grades().get(grade));
+    }
+
+    /** By clock, then along the way through the piece; in the species' unit. */
     double[][] profiles(int species, int grade) {
         double[][] profiles = new double[clocks.length][];
-        profiles[0] = new Loaded(recipe, species).profile(depths);
+        profiles[0] = new Loaded(recipe, species).profile(way(species, grade), depths);
         for (int i = 1; i < clocks.length; i++) {
             profiles[i] = trace.moments().get(i - 1).sights().get(species).profiles()[grade];
         }
@@ -115,12 +121,13 @@ final class History {
     double[] readings(int species, int grade, Reading reading) {
         double[] values = new double[clocks.length];
         double[][] profiles = profiles(species, grade);
+        Way way = way(species, grade);
         for (int i = 0; i < values.length; i++) {
             double[] profile = profiles[i];
             values[i] = switch (reading) {
                 case MEAN -> mean(species, grade, i);
-                case CORE -> profile[0];
-                case SURFACE -> profile[profile.length - 1];
+                case CORE -> way.core(profile);
+                case SURFACE -> way.surface(profile);
                 case HIGHEST -> highest(profile);
                 case LOWEST -> lowest(profile);
                 case RANGE -> highest(profile) - lowest(profile);
@@ -154,7 +161,7 @@ final class History {
             return OptionalDouble.of(value);
         }
         Loaded start = new Loaded(recipe, species);
-        return OptionalDouble.of(value * start.mean(grades().get(grade)) / start.profile(new double[] {0})[0]);
+        return OptionalDouble.of(value * start.mean(grades().get(grade)) / start.core());
     }
 
     /** The lot's mean by clock, in the species' unit. */

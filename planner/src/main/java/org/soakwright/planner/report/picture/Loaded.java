@@ -2,6 +2,7 @@ package org.soakwright.planner.report.picture;
 
 import java.util.List;
 import org.jspecify.annotations.Nullable;
+import org.soakwright.planner.report.Way;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Spread;
@@ -22,11 +23,11 @@ final class Loaded {
         unit = start.unit();
     }
 
-    /** At positions from 0, the core, to 1, the surface. */
-    double[] profile(double[] positions) {
+    /** At positions of a way through a piece; what is stated from the core outwards goes both ways where it runs from face to face. */
+    double[] profile(Way way, double[] positions) {
         double[] values = new double[positions.length];
         for (int i = 0; i < values.length; i++) {
-            values[i] = at(positions[i]);
+            values[i] = at(way.fromSkin() ? Math.abs(2 * positions[i] - 1) : positions[i]);
         }
         return values;
     }
@@ -55,6 +56,11 @@ final class Loaded {
                     * (at(a) * Math.pow(a, s) + 4 * at(middle) * Math.pow(middle, s) + at(b) * Math.pow(b, s));
         }
         return (s + 1) * sum;
+    }
+
+    /** At the core. */
+    double core() {
+        return at(0);
     }
 
     private double at(double position) {

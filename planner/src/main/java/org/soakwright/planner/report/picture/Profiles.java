@@ -3,9 +3,12 @@ package org.soakwright.planner.report.picture;
 import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import org.soakwright.planner.batch.StepEnd;
 import org.soakwright.planner.report.PieceWords;
+import org.soakwright.planner.report.Way;
 import org.soakwright.recipes.model.Faces;
 import org.soakwright.recipes.model.Grade;
 
@@ -23,7 +26,18 @@ final class Profiles {
     private final int fieldHeight;
     private final int height;
 
-    private record Field(int species, Grade grade, List<double[]> profiles, Scale contents) {}
+    private record Field(int species, Grade grade, Way way, List<double[]> profiles, Scale contents) {
+        /** Where the way begins and ends, and the core on the way from face to face, by name. */
+        Map<String, Double> places(double[] profile) {
+            Map<String, Double> places = new LinkedHashMap<>();
+            places.put(way.fromSkin() ? DepthMap.SKIN : "core", profile[0]);
+            if (way.fromSkin()) {
+                places.put("middle", way.core(profile));
+            }
+            places.put(way.fromSkin() ? DepthMap.BARE : "surface", Way.bare(profile));
+            return places;
+        }
+    }
 
     Profiles(History history) {
         this.history = history;
@@ -41,7 +55,8 @@ final class Profiles {
                     most = Math.max(most, History.highest(profile));
                     least = Math.min(least, History.lowest(profile));
                 }
-                fields.add(new Field(s, history.grades().get(j), profiles, Scale.holding(least, most, 6)));
+                fields.add(new Field(
+                        s, history.grades().get(j), history.way(s, j), profiles, Scale.holding(least, most, 6)));
             }
         }
         columns = Math.min(2, fields.size());
@@ -62,7 +77,8 @@ final class Profiles {
         Sheet sheet = new Sheet(g, theme, Look.WIDTH, height);
         sheet.head(
                 title(),
-                "Content from the core, left, " + (several() ? "the shortest way " : "") + "to the surface, right."
+                "Content from the core" + (skinned() ? ", or a face with skin" : "") + ", left, "
+                        + (several() ? "the shortest way " : "") + "to the surface, right."
                         + (PieceWords.differ(history.recipe()) ? " Pieces as stated." : "")
                         + " The dotted line is the start.");
         double slot = (Look.WIDTH - GAP * (columns - 1.0)) / columns;
@@ -75,7 +91,7 @@ final class Profiles {
 
     private void draw(Sheet sheet, Field field, Rectangle2D area) {
         Look look = sheet.look();
-        double depth = 1000 * field.grade().depth();
+        double depth = field.way().millimetres();
         Panel panel = new Panel(area, Scale.full(depth, 4), field.contents());
         double[] positions = history.depths();
         for (int i = 0; i < positions.length; i++) {
@@ -93,17 +109,25 @@ final class Profiles {
         panel.on(sheet);
         String species = history.recipe().species().get(field.species()).name();
         panel.nameRows(sheet, species + " in " + field.grade().name() + ", " + history.unit(field.species()));
-        panel.nameColumns(sheet, "mm from the " + core(field.grade()));
+        panel.nameColumns(sheet, "mm from the " + beginning(field));
         labels.on(sheet, area.getY(), area.getMaxY());
     }
 
-    private static String core(Grade grade) {
+    private static String beginning(Field field) {
+        Grade grade = field.grade();
+        if (field.way().fromSkin()) {
+            return DepthMap.SKIN + (PieceWords.hasSeveralSides(grade) ? ", " + PieceWords.way(grade) : "");
+        }
         return switch (grade.shape()) {
             case SLAB -> grade.shortest().faces() == Faces.ONE ? "sealed face" : "middle";
             case CYLINDER -> "axis";
             case SPHERE -> "centre";
             case SHORT_CYLINDER, BRICK -> "core " + PieceWords.way(grade);
         };
+    }
+
+    private boolean skinned() {
+        return fields.stream().anyMatch(field -> field.way().fromSkin());
     }
 
     private boolean several() {
@@ -131,6 +155,14 @@ final class Profiles {
         double surface = last[last.length - 1];
         String species = history.recipe().species().get(steepest.species()).name();
         String way = PieceWords.hasSeveralSides(steepest.grade()) ? " " + PieceWords.way(steepest.grade()) : "";
+        if (steepest.way().fromSkin()) {
+            List<String> places = new ArrayList<>();
+            steepest.places(last)
+                    .forEach((place, value) -> places.add(Words.number(value) + unit + " at the " + place));
+            return "At the end " + steepest.grade().name() + " still holds " + species + way + " unevenly: "
+                    + Words.list(places)
+                    + (fields.size() > 1 ? ", the steepest profile that is left." : ".");
+        }
         return "At the end " + steepest.grade().name() + " still "
                 + (core >= surface ? "falls" : "rises") + way + " from " + Words.number(core) + unit + " " + species
                 + " at the core to " + Words.number(surface) + unit + " at the surface"
@@ -147,7 +179,10 @@ final class Profiles {
                     .append(" in ")
                     .append(field.grade().name())
                     .append(PieceWords.hasSeveralSides(field.grade()) ? ", " + PieceWords.way(field.grade()) : "")
-                    .append(", core and surface: ");
+                    .append(", ")
+                    .append(Words.list(
+                            List.copyOf(field.places(field.profiles().get(0)).keySet())))
+                    .append(": ");
             for (int k = 0; k < field.profiles().size(); k++) {
                 double[] profile = field.profiles().get(k);
                 text.append(
@@ -158,9 +193,9 @@ final class Profiles {
                                                         .get(k - 1)
                                                         .step()
                                                         .name() + " ")
-                        .append(Words.number(profile[0]))
-                        .append(" and ")
-                        .append(Words.number(profile[profile.length - 1]))
+                        .append(Words.list(field.places(profile).values().stream()
+                                .map(Words::number)
+                                .toList()))
                         .append(unit);
             }
             text.append('.');

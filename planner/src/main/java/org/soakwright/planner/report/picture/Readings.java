@@ -57,7 +57,8 @@ final class Readings {
                 .anyMatch(course -> !course.edges().isEmpty());
         sheet.head(
                 title(),
-                "Dashed: the limit. Dot: where it is read. Ring: it decides. Cross: it is missed."
+                "Dashed: the limit. Dot: where it is read" + (sure() ? ", as surely as asked" : "")
+                        + ". Ring: it decides. Cross: it is missed."
                         + (doubted ? " Dotted: 5 and 95 % of what may be." : ""));
         int width = Look.WIDTH - LEFT - RIGHT;
         double top = Sheet.TOP + Ribbon.HEIGHT + ROW_GAP;
@@ -76,6 +77,14 @@ final class Readings {
                 ribbon.key(sheet, panel);
             }
         }
+    }
+
+    /** Whether dots of targets with a confidence lie beside their lines, which are drawn at stated values. */
+    private boolean sure() {
+        return history.run().outlook().isPresent()
+                && history.targets().stream()
+                        .anyMatch(state ->
+                                history.recipe().confidence(state.target()).isPresent());
     }
 
     private void draw(Sheet sheet, Panel panel, Watched one) {

@@ -8,6 +8,7 @@ import java.util.OptionalDouble;
 import org.apache.commons.math3.special.Erf;
 import org.soakwright.planner.batch.Distribution;
 import org.soakwright.planner.batch.TargetState;
+import org.soakwright.planner.report.TargetWords;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Target;
 
@@ -16,6 +17,7 @@ import org.soakwright.recipes.model.Target;
  *
  * @param name what is read, without grade and share
  * @param share of the pieces that must keep the limits, 1; empty where their average must
+ * @param sure how surely, in words to be added to the limit; empty where no confidence is asked for
  */
 record Spreading(
         String name,
@@ -23,6 +25,7 @@ record Spreading(
         OptionalDouble atLeast,
         OptionalDouble atMost,
         OptionalDouble share,
+        String sure,
         List<Pieces> pieces) {
 
     /** The normal numbers of nothing and of all are infinite. */
@@ -104,6 +107,7 @@ record Spreading(
                     first.atLeast(),
                     first.atMost(),
                     first.share(),
+                    TargetWords.sure(history.recipe(), target),
                     List.copyOf(pieces)));
         });
         return all;
@@ -156,10 +160,12 @@ record Spreading(
     /** {@code at least 15 g/kg}. */
     String limits() {
         if (isBand()) {
-            return Words.written(atLeast.orElseThrow()) + " to " + Words.written(atMost.orElseThrow()) + " " + unit;
+            return Words.written(atLeast.orElseThrow()) + " to " + Words.written(atMost.orElseThrow()) + " " + unit
+                    + sure;
         }
         return (atMost.isPresent() ? "at most " : "at least ")
-                + Words.written(atMost.isPresent() ? atMost.getAsDouble() : atLeast.orElseThrow()) + " " + unit;
+                + Words.written(atMost.isPresent() ? atMost.getAsDouble() : atLeast.orElseThrow()) + " " + unit
+                + sure;
     }
 
     /** {@code 95 %}, of the pieces. */

@@ -136,7 +136,8 @@ final class Spreads {
                     : "average " + Words.number(pieces.read());
             words(sheet, read, x + SAMPLE + 8, y, room, look.ink());
             y += LINE;
-            String kept = Spreading.percent(one.kept(pieces)) + " keep the limit";
+            String kept = Spreading.percent(one.kept(pieces))
+                    + (one.sure().isEmpty() ? " keep the limit" : " at stated values");
             words(sheet, kept, x + SAMPLE + 8, y, room, look.muted());
         }
     }
@@ -163,6 +164,10 @@ final class Spreads {
             }
         } else {
             double share = pieces.below(pieces.read());
+            if (one.share().isPresent() && !one.sure().isEmpty()) {
+                // What so many samples keep lies beside the curve, which is drawn at stated values.
+                share = one.isFromAbove() ? 1 - one.inside() : one.inside();
+            }
             points.add(new double[] {pieces.read(), 100 * (one.isFromAbove() ? 1 - share : share)});
         }
         return points;

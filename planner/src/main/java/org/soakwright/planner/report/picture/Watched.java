@@ -5,13 +5,16 @@ import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.OptionalDouble;
 import java.util.stream.IntStream;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.batch.TargetState;
-import org.soakwright.recipes.model.Basis;
+import org.soakwright.planner.conditions.Strengths;
+import org.soakwright.planner.report.TargetWords;
 import org.soakwright.recipes.model.Grade;
-import org.soakwright.recipes.model.Liquor;
 import org.soakwright.recipes.model.Quantity;
+import org.soakwright.recipes.model.Reference;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
@@ -19,7 +22,7 @@ import org.soakwright.recipes.model.Target;
 /**
  * One target over the clock, in its own unit.
  *
- * @param name what is read, without the grade
+ * @param name what is read, without the grade and the confidence
  * @param courses one for each grade looked at, or one
  */
 record Watched(String name, String unit, List<Limit> limits, List<Course> courses) {
@@ -76,13 +79,11 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
 
     private static Watched of(History history, List<TargetState> states, List<String> binds) {
         TargetState first = states.get(0);
-        String tail = first.grade().map(grade -> ", " + grade).orElse("");
-        String name = first.name().endsWith(tail)
-                ? first.name().substring(0, first.name().length() - tail.length())
-                : first.name();
+        String name = TargetWords.name(history.recipe(), first);
+        String sure = TargetWords.sure(history.recipe(), first.target());
         List<Limit> limits = new ArrayList<>();
-        first.atMost().ifPresent(most -> limits.add(new Limit(most, "at most " + Words.written(most))));
-        first.atLeast().ifPresent(least -> limits.add(new Limit(least, "at least " + Words.written(least))));
+        first.atMost().ifPresent(most -> limits.add(new Limit(most, "at most " + Words.written(most) + sure)));
+        first.atLeast().ifPresent(least -> limits.add(new Limit(least, "at least " + Words.written(least) + sure)));
         List<Course> courses = new ArrayList<>();
         for (TargetState state : states) {
             courses.add(course(history, state, binds.contains(state.name())));
@@ -91,40 +92,43 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
     }
 
     private static Course course(History history, TargetState state, boolean decides) {
-        boolean ofPieces = state.target() instanceof Target.OfPieces;
-        int step = ofPieces
-                ? step(history, ((Target.OfPieces) state.target()).after())
-                : step(history, ((Target.OfLiquor) state.target()).step());
         int grade = grade(history, state.grade().orElse(""));
-        double readAt = history.ends().get(step).to();
+        int step = step(history, state.target());
+        boolean ofLiquor = state.target() instanceof Target.OfLiquor;
         return new Course(
                 state.name(),
-                state.grade().orElse("liquor"),
+                state.grade().orElse(ofLiquor ? "liquor" : "lot"),
                 Math.max(0, grade),
-                ofPieces
-                        ? ofPieces(history, (Target.OfPieces) state.target(), grade, state)
-                        : ofLiquor(history, (Target.OfLiquor) state.target()),
-                ofPieces
-                        ? history.band(state)
+                state.target() instanceof Target.OfLiquor liquor ? ofLiquor(history, liquor) : ofPieces(history, state),
+                ofLiquor
+                        ? List.of()
+                        : history.band(state)
                                 .map(band -> List.of(edge(history, band.low()), edge(history, band.high())))
-                                .orElse(List.of())
-                        : List.of(),
-                readAt,
+                                .orElse(List.of()),
+                history.ends().get(step).to(),
                 history.ends().get(step).step().name(),
                 state.value(),
                 state.met(),
                 decides);
     }
 
-    private static List<Piece> ofPieces(History history, Target.OfPieces target, int grade, TargetState state) {
-        int species = species(history, target.species().name());
-        OptionalDouble start = history.readAtStart(species, grade, target);
+    /** The step at whose end a target is read. */
+    private static int step(History history, Target target) {
+        if (target instanceof Target.OfLiquor liquor) {
+            return step(history, liquor.step());
+        }
+        return step(
+                history, target instanceof Target.OfPieces pieces ? pieces.after() : ((Target.OfMass) target).after());
+    }
+
+    private static List<Piece> ofPieces(History history, TargetState state) {
+        OptionalDouble start = AsLoaded.read(history, state);
         double[] later = history.course(state);
         if (start.isEmpty()) {
             return List.of(new Piece(Arrays.copyOfRange(history.clocks(), 1, later.length + 1), later));
         }
         double[] values = new double[later.length + 1];
-        values[0] = start.getAsDouble() / Bound.perTargetUnit(history, species, grade, target);
+        values[0] = start.getAsDouble();
         System.arraycopy(later, 0, values, 1, later.length);
         return List.of(new Piece(history.clocks(), values));
     }
@@ -141,16 +145,18 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
 
     private static List<Piece> ofLiquor(History history, Target.OfLiquor target) {
         int step = step(history, target.step());
-        Liquor liquor = ((Step.Wet) history.ends().get(step).step()).liquor();
-        double one = target.limits().unit().toSi(java.math.BigDecimal.ONE);
-        Quantity density = liquor.density();
-        double factor = target.limits().basis() == Basis.PER_MASS && density != null ? one * density.si() : one;
+        Step.Wet wet = (Step.Wet) history.ends().get(step).step();
+        Species solute =
+                history.recipe().species().get(species(history, target.species().name()));
+        Quantity like = target.limits().atMost() != null
+                ? target.limits().atMost()
+                : Objects.requireNonNull(target.limits().atLeast());
         List<Piece> pieces = new ArrayList<>();
         for (History.Fill fill : history.fills(species(history, target.species().name()))) {
             if (fill.step() == step) {
                 double[] values = fill.contents().clone();
                 for (int i = 0; i < values.length; i++) {
-                    values[i] /= factor;
+                    values[i] = Strengths.express(wet, solute, values[i], like);
                 }
                 pieces.add(new Piece(fill.clocks(), values));
             }
@@ -217,8 +223,7 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
         return most;
     }
 
-    private static int step(
-            History history, org.soakwright.recipes.model.@org.jspecify.annotations.Nullable Reference after) {
+    private static int step(History history, @Nullable Reference after) {
         for (int i = 0; i < history.ends().size(); i++) {
             if (after != null && history.ends().get(i).step().name().equals(after.name())) {
                 return i;
@@ -227,7 +232,7 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
         return history.ends().size() - 1;
     }
 
-    private static int species(History history, String name) {
+    static int species(History history, String name) {
         List<Species> species = history.recipe().species();
         for (int i = 0; i < species.size(); i++) {
             if (species.get(i).name().equals(name)) {
@@ -238,7 +243,7 @@ record Watched(String name, String unit, List<Limit> limits, List<Course> course
     }
 
     /** Below 0 where there is none of this name: the lot, or a liquor. */
-    private static int grade(History history, String name) {
+    static int grade(History history, String name) {
         List<Grade> grades = history.grades();
         for (int i = 0; i < grades.size(); i++) {
             if (grades.get(i).name().equals(name)) {

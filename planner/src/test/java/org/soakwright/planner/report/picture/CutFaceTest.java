@@ -50,8 +50,8 @@ class CutFaceTest {
     void aPieceSealedBelowStandsOnItsCore() {
         CutFace cut = cut(Faces.BOTH, Faces.ONE);
         assertArrayEquals(new double[][] {{4, 2}, {3, 1}, {4, 2}}, whole(cut));
-        assertTrue(cut.isSealedBelow());
-        assertFalse(cut.isSealedLeft());
+        assertTrue(cut.isUnlikeBelow());
+        assertFalse(cut.isUnlikeLeft());
         assertEquals(1, cut.coreDown());
     }
 
@@ -61,7 +61,7 @@ class CutFaceTest {
         assertArrayEquals(new double[][] {{4, 3}, {2, 1}, {4, 3}}, whole(cut));
         assertEquals(65, cut.width(), 1e-9);
         assertEquals(102, cut.height(), 1e-9);
-        assertTrue(cut.isSealedBelow());
+        assertTrue(cut.isUnlikeBelow());
         assertEquals(3, cut.middleOfFace(cut.ends().get(0), true), "the face that was down is across now");
         assertEquals(2, cut.middleOfFace(cut.ends().get(0), false));
     }
@@ -70,7 +70,7 @@ class CutFaceTest {
     void aPieceSealedOnBothSidesHasItsCoreInTheCorner() {
         CutFace cut = cut(Faces.ONE, Faces.ONE);
         assertArrayEquals(new double[][] {{3, 1}, {4, 2}}, whole(cut));
-        assertTrue(cut.isSealedBelow() && cut.isSealedLeft());
+        assertTrue(cut.isUnlikeBelow() && cut.isUnlikeLeft());
         assertEquals(0, cut.coreAcross());
         assertEquals(1, cut.coreDown());
     }

@@ -95,6 +95,7 @@ class SpreadingTest {
                 OptionalDouble.empty(),
                 OptionalDouble.of(60),
                 OptionalDouble.empty(),
+                "",
                 List.of(alike)));
         assertTrue(reach.high() - reach.low() > 0.5, reach.toString());
         assertEquals("; 10 far left", reach.beyond(OptionalDouble.of(10)));
