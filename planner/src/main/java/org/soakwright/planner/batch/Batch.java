@@ -242,6 +242,11 @@ public final class Batch {
         return stage == firstStage[step] ? physics.warming().lag(species, step) : Lag.NONE;
     }
 
+    /** Whether the time of any stage differs from the clock for what diffuses. */
+    boolean isLagging() {
+        return physics.warming().matters();
+    }
+
     Films films() {
         return physics.films();
     }

@@ -2,8 +2,10 @@ package org.soakwright.planner.batch;
 
 import org.soakwright.recipes.model.Per;
 import org.soakwright.recipes.model.Phase;
+import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Unit;
 import org.soakwright.recipes.text.Unsound;
 
 /** A number worked out of more than one reading, or of a reading and the mass of the pieces; SI. */
@@ -30,8 +32,12 @@ sealed interface Measure {
         throw new Unsound(
                 place,
                 "the target counts against " + what
-                        + ", and there is none where it is read: found " + below.value()
+                        + ", and there is none where it is read: found " + shown(below.value())
                         + " kg per kg of piece as loaded; count per loaded, or read another place");
+    }
+
+    private static String shown(double value) {
+        return Quantity.derived(value, Unit.ONE, Place.of("")).written();
     }
 
     /** The mass of the lot, kg. */
@@ -60,7 +66,7 @@ sealed interface Measure {
             if (isMean() && ratio.value() > 1 + NOTHING) {
                 throw new Unsound(
                         place,
-                        what + " is less than what the target finds in it: found " + ratio.value()
+                        what + " is less than what the target finds in it: found " + shown(ratio.value())
                                 + " kg per kg; correct the gains, the moisture or the contents of the recipe");
             }
             return ratio;

@@ -146,7 +146,8 @@ public final class Planner {
 
     /** Goal by goal, those before it capped at what was reached. */
     private Optional<Choice> branched(Descent.End relaxed, double[] inside, int starts, int agreed) {
-        boolean convex = Convexity.holds(batch.recipe());
+        // A step that its pieces warm in counts for more the longer it lasts: its decay is no exponential of the clock.
+        boolean convex = Convexity.holds(batch.recipe()) && !batch.isLagging();
         List<Linear.Cap> caps = new ArrayList<>();
         Found found = null;
         boolean complete = true;

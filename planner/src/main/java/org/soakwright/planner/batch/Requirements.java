@@ -15,7 +15,6 @@ import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Reference;
-import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
 import org.soakwright.recipes.text.Place;
@@ -220,7 +219,7 @@ final class Requirements {
                             + " of a phase is not computed in pieces of several sides where the water is a"
                             + " species; read the mean, core or surface, or state moisture instead of the species");
         }
-        if (differs(species) || differs(weighing.waterSpecies().orElseThrow())) {
+        if (!weighing.sharesClasses(species)) {
             throw new Unsound(
                     target.place(),
                     "the " + reading.word()
@@ -229,12 +228,6 @@ final class Requirements {
         }
         Population pieces = batch.classes(species).populations().get(grade);
         return new Measure.ExtremeOfPhase(target.place(), weighing, species, pieces, grade, highest, phase);
-    }
-
-    /** Whether a species tells pieces apart by more than their size, so that its classes are not those of another. */
-    private boolean differs(int species) {
-        Species one = recipe.species().get(species);
-        return one.diffusivityVaries() != null || one.startVaries() != null;
     }
 
     private Weighing weighing(Place place) {

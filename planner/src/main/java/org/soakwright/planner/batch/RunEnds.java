@@ -9,6 +9,7 @@ import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
+import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unsound;
 
 /** What the pieces of a run hold at its end, for the cautions to be tested on. */
@@ -45,37 +46,36 @@ final class RunEnds implements RecipeFacts.Ends {
         }
         State state = run.state(batch.lastStage(recipe.steps().size() - 1), false);
         List<Double> phases = new ArrayList<>();
-        try {
-            for (int j = 0; j < recipe.lot().grades().size(); j++) {
-                phase(weighing, index, j, reading)
-                        .ifPresent(measure -> phases.add(measure.read(state).value()));
-            }
-        } catch (Unsound dry) {
-            // Without water there is no phase to caution about; a target on it says so itself.
-            return List.of();
+        for (int j = 0; j < recipe.lot().grades().size(); j++) {
+            phase(weighing, index, j, reading)
+                    .flatMap(measure -> read(measure, state))
+                    .ifPresent(phases::add);
         }
         return phases;
     }
 
-    /** Empty for an extreme in pieces of several sides where the water is a species: it is not computed. */
+    /** Empty where there is no water: then there is no phase to judge. */
+    private static Optional<Double> read(Measure measure, State state) {
+        try {
+            return Optional.of(measure.read(state).value());
+        } catch (Unsound none) {
+            return Optional.empty();
+        }
+    }
+
+    /** Empty for an extreme that is not computed: in pieces of several sides, or that differ by more than size, where the water is a species. */
     private Optional<Measure> phase(Weighing weighing, int species, int grade, Reading reading) {
         Population pieces = run.batch().classes(species).populations().get(grade);
+        Place place = run.batch().recipe().species().get(species).place();
         boolean extreme = reading == Reading.HIGHEST || reading == Reading.LOWEST;
         if (!extreme || weighing.waterSpecies().isEmpty()) {
             Gauge gauge = new Gauge.Average(grade, pieces, reading);
-            return Optional.of(new Measure.InPhase(
-                    run.batch().recipe().lot().place(), weighing, species, gauge, reading, Phase.WATER));
+            return Optional.of(new Measure.InPhase(place, weighing, species, gauge, reading, Phase.WATER));
         }
         boolean oneSide = run.batch().recipe().lot().grades().get(grade).sides().size() == 1;
-        return oneSide
+        return oneSide && weighing.sharesClasses(species)
                 ? Optional.of(new Measure.ExtremeOfPhase(
-                        run.batch().recipe().lot().place(),
-                        weighing,
-                        species,
-                        pieces,
-                        grade,
-                        reading == Reading.HIGHEST,
-                        Phase.WATER))
+                        place, weighing, species, pieces, grade, reading == Reading.HIGHEST, Phase.WATER))
                 : Optional.empty();
     }
 }

@@ -61,6 +61,11 @@ final class Warming {
         return lags.get(species).get(step);
     }
 
+    /** Whether any step's time differs for anything. */
+    boolean matters() {
+        return lags.stream().flatMap(List::stream).anyMatch(lag -> lag != Lag.NONE);
+    }
+
     /** What was included or left out; empty where no step changes the temperature of its pieces, or nothing comes of it. */
     List<String> said() {
         return List.copyOf(said);

@@ -2,6 +2,7 @@ package org.soakwright.planner.batch;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.soakwright.planner.conditions.Known;
 import org.soakwright.recipes.model.Moisture;
 import org.soakwright.recipes.model.Quantity;
@@ -85,6 +86,13 @@ final class Weighing {
     /** The water's place among the species, where it is one. */
     Optional<Integer> waterSpecies() {
         return recipe.water().map(recipe.species()::indexOf);
+    }
+
+    /** Whether a species and the water tell pieces apart by size alone, so that a class of one is the same pieces as a class of the other. */
+    boolean sharesClasses(int species) {
+        return Stream.of(species, waterSpecies().orElse(species))
+                .map(recipe.species()::get)
+                .allMatch(one -> one.diffusivityVaries() == null && one.startVaries() == null);
     }
 
     /** A reading of a species, kg per kg of piece as loaded. */

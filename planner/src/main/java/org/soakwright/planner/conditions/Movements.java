@@ -36,7 +36,7 @@ final class Movements {
     }
 
     private static Conversion one(Species species, Diffusivity stated, Quantity temperature) {
-        double value = Movement.at(stated, temperature.si()).value();
+        double value = Movement.at(stated, temperature);
         return new Conversion(
                 "diffusivity of " + species.name() + " at " + temperature,
                 written(stated),

@@ -30,8 +30,7 @@ final class Refused {
 
     /** All that a check and a plan do. */
     static void used(Recipe recipe) {
-        Groups.of(recipe);
-        Cautions.of(recipe);
+        Checked.of(recipe);
         Batch batch = new Batch(recipe);
         Run run = batch.follow(StepTimes.nominal(recipe));
         for (int i = 0; i < recipe.steps().size(); i++) {

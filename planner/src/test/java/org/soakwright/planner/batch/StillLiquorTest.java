@@ -183,6 +183,34 @@ class StillLiquorTest {
         assertEquals(sherwood * SALT / 0.02, coefficient, 0.005 * coefficient);
     }
 
+    /** Behind a skin of 1e-6 m/s the liquor meets only what comes through: of the difference to the surface what the film has of both. */
+    @Test
+    void aSkinLeavesLessToMoveTheLiquor() {
+        String[] lines = lines(SLAB, "60 g/kg", "ratio: 3 L/kg, salt: 0 g/L", STILL);
+        double bare = films(Recipes.of(lines)).difference(0, 0).orElseThrow();
+        lines[5] = lines[5].replace("substance:", "skin: {permeance: 1e-6 m/s, face: both}, substance:");
+        Recipe recipe = Recipes.of(lines);
+        double coefficient = film(recipe).coefficient();
+        double both = 1 / (1 / coefficient + 1 / 1e-6);
+        Left across = left(0, 0.004, x -> 60, 0, 3, both);
+        double outside = denser(new Left(across.away(), across.more() * both / coefficient, 0), 1);
+        assertEquals(outside, films(recipe).difference(0, 0).orElseThrow(), 0.03 * outside);
+        assertTrue(outside < bare);
+        assertEquals(standing(0.12, outside, WATER, 998.2), coefficient, 0.01 * coefficient);
+    }
+
+    /** A tight skin on one of two faces: the other is as bare as ever, and the liquor at both is moved by half as much on average. */
+    @Test
+    void aSkinOnOneFaceHidesThatFace() {
+        String[] lines = lines(SLAB, "60 g/kg", "volume: unlimited, salt: 0 g/L", "{still: true, length: 120 mm}");
+        String[] covered = lines.clone();
+        covered[5] = lines[5].replace("substance:", "skin: {permeance: 1e-15 m/s, face: one}, substance:");
+        Recipe recipe = Recipes.of(covered);
+        double coefficient = film(recipe).coefficient();
+        double half = denser(left(0, 0.008, x -> 60, 0, 1e12, coefficient), 1) / 2;
+        assertEquals(half, films(recipe).difference(0, 0).orElseThrow(), 0.02 * half);
+    }
+
     /** 60 g/kg are in equilibrium with 75 g/L. */
     @Test
     void nearEquilibriumLittleMoves() {
