@@ -92,7 +92,7 @@ class ResultJsonTest {
                 "nearest-miss",
                 "remedies",
                 "cautions",
-                        "stops");
+                "stops");
         assertEquals(names, Json.names(followed()));
         assertEquals(names, Json.names(planned("60 g/kg")));
     }
