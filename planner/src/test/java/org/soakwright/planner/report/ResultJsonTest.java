@@ -265,4 +265,50 @@ class ResultJsonTest {
         assertTrue(Json.number(result, "targets", 0, "chance", "value") >= Json.number(result, "chance", "value"));
         assertFalse(followed().containsKey("chance") || followed().containsKey("uncertain"));
     }
+
+    private static final List<String> COUNTED = List.of(
+            "{species: salt, reading: mean, at-least: 3.5 %, phase: water, grade: thick, confidence: 80 %}",
+            "{species: salt, reading: mean, at-most: 70 g/kg, per: present}",
+            "{species: salt, reading: mean, at-most: 900 g/kg, per: dry}",
+            "{total: mass, at-least: 90 %, of: start, after: first water}",
+            "{total: mass, at-most: 120 kg}");
+
+    /** Targets that are not counted as loaded, and what the lot weighs; nothing of it where the recipe does not say. */
+    @Test
+    void whatTheLotWeighsAndWhatContentsCountAgainstIsTold() throws IOException {
+        String head = RECIPE.substring(0, RECIPE.indexOf("targets:"))
+                .replace("density: 1000 kg/m3", "density: 1000 kg/m3\n  moisture: {start: 60 %, end: 65 %}")
+                .replace("product: [food]", "product: [food]\nallowed-by: the head of quality");
+        Recipe recipe = ((Outcome.Accepted)
+                        Recipes.read("recipe.yaml", head + "targets:\n  - " + String.join("\n  - ", COUNTED) + "\n"))
+                .recipe();
+        Run run = new Batch(recipe).follow(StepTimes.definite(recipe));
+        Map<String, @Nullable Object> result = Json.object(ResultJson.of(STAMP, run));
+        assertEquals("the head of quality", Json.at(result, "allowed-by"));
+        assertEquals(List.of("value", "of-start", "unit"), Json.names(result, "steps", 1, "mass"));
+        // What is neither salt nor water stays: 0.4 of the mass as loaded, less the salt lost, is 0.35 of the mass at
+        // the end.
+        double lost = (100 - Json.number(result, "steps", 1, "species", "salt", "mean")) / 1000;
+        double mass = (0.4 - lost) / 0.35;
+        assertEquals(mass, Json.number(result, "steps", 1, "mass", "of-start"), 1e-9);
+        assertEquals(100 * mass, Json.number(result, "steps", 1, "mass", "value"), 1e-7);
+        assertEquals("kg", Json.at(result, "steps", 1, "mass", "unit"));
+        assertEquals("water", Json.at(result, "targets", 0, "phase"));
+        assertEquals(0.8, Json.number(result, "targets", 0, "confidence"));
+        assertEquals("present", Json.at(result, "targets", 1, "per"));
+        assertEquals("dry", Json.at(result, "targets", 2, "per"));
+        assertEquals(
+                List.of("total", "after", "at-least", "of", "value", "unit", "met"), Json.names(result, "targets", 3));
+        assertEquals(
+                100 * Json.number(result, "steps", 0, "mass", "of-start"),
+                Json.number(result, "targets", 3, "value"),
+                1e-7);
+        assertEquals("%", Json.at(result, "targets", 3, "unit"));
+        assertEquals(List.of("total", "at-most", "value", "unit", "met"), Json.names(result, "targets", 4));
+        assertEquals("mass", Json.at(result, "targets", 4, "total"));
+        assertEquals(100 * mass, Json.number(result, "targets", 4, "value"), 1e-7);
+        assertFalse(Json.names(followed(), "steps", 0).contains("mass"));
+        assertFalse(followed().containsKey("allowed-by"));
+        assertFalse(Json.names(followed(), "targets", 0).contains("per"));
+    }
 }

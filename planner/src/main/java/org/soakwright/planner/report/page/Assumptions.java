@@ -144,8 +144,10 @@ final class Assumptions {
         return "a skin that passes " + Wording.quantity(skin.permeance())
                 + ", counted as contents of the liquor, covers "
                 + (one
-                        ? "one face" + (PieceWords.hasSeveralSides(grade) ? " of the thickness" : "")
-                                + ", the other is bare;" + " surface readings are the mean of both"
+                        ? "one face"
+                                + (PieceWords.hasSeveralSides(grade)
+                                        ? " of the thickness, the other is bare"
+                                        : ", the other is bare; a surface reading is the mean of both")
                         : "every open face");
     }
 

@@ -134,7 +134,10 @@ final class Sampling {
             case CORE -> "Cut a plug from " + PieceWords.core(grade) + apart();
             case SURFACE ->
                 (unlike
-                                ? "Take the skin off its face and shave a thin layer off either face; the mean of both counts"
+                                ? "Take the skin off its face and shave a thin layer off "
+                                        + (PieceWords.hasSeveralSides(grade)
+                                                ? "every face; the mean over all counts"
+                                                : "either face; the mean of both counts")
                                 : "Shave a thin layer off the wetted surface")
                         + apart();
             case HIGHEST -> layers(grade) + ", assay each; the highest counts" + apart();

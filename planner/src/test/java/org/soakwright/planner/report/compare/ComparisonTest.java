@@ -201,4 +201,55 @@ class ComparisonTest {
         assertTrue(refused("[1]").contains("an object would be right"));
         assertTrue(refused(json.replaceFirst("\"kind\"", "\"name\"")).contains("this is no whole JSON text"), "twice");
     }
+
+    private static Side counted(String target) {
+        String text = RECIPE.replace("START", "100 g/kg")
+                .replace("TIME", "5 h")
+                .replace("CUR", "EUR")
+                .replace("density: 1000 kg/m3", "density: 1000 kg/m3\n  moisture: {start: 60 %, end: 65 %}")
+                .replace("{species: salt, reading: core, at-most: 60 g/kg}", target);
+        Recipe recipe = ((Outcome.Accepted) Recipes.read("recipe.yaml", text)).recipe();
+        return side(new Batch(recipe).follow(StepTimes.definite(recipe)));
+    }
+
+    @Test
+    void aReadingIsComparedOnlyWithOneCountedAlike() {
+        String dry = "{species: salt, reading: mean, at-most: 300 g/kg, per: dry}";
+        String water = "{species: salt, reading: mean, at-most: 30 %, phase: water}";
+        Comparison alike = Comparison.of(counted(dry), counted(dry));
+        assertEquals(1, alike.targets().size());
+        assertEquals("salt mean per dry mass", alike.targets().get(0).target());
+        Comparison unlike = Comparison.of(counted(dry), counted(water));
+        assertEquals(
+                List.of("salt mean per dry mass", "salt mean in the water phase"),
+                unlike.targets().stream().map(Comparison.TargetRow::target).toList());
+    }
+
+    @Test
+    void theSameLimitAskedMoreSurelyIsAnother() {
+        String target = "{species: salt, reading: mean, at-most: 30 %, phase: moisture, confidence: SURE}";
+        Comparison comparison =
+                Comparison.of(counted(target.replace("SURE", "80 %")), counted(target.replace("SURE", "90 %")));
+        assertEquals(
+                List.of("at most 30 %, 80 % sure", "at most 30 %, 90 % sure"),
+                comparison.targets().stream().map(Comparison.TargetRow::limit).toList());
+        assertEquals("salt mean per moisture", comparison.targets().get(0).target());
+    }
+
+    @Test
+    void whatTheLotWeighsIsComparedWhereEitherKnows() {
+        Side weighed = counted("{total: mass, at-most: 120 kg, after: first water}");
+        assertEquals(
+                "mass of the lot after first water", weighed.targets().get(0).name());
+        Side not = side(run("100 g/kg", "5 h", "EUR"));
+        Comparison.EndRow row = Comparison.of(weighed, not).ends().stream()
+                .filter(end -> end.species().equals("mass"))
+                .findFirst()
+                .orElseThrow();
+        assertEquals("kg", row.content().unit());
+        assertEquals(weighed.targets().get(0).value(), row.content().a().orElseThrow(), 1e-9);
+        assertTrue(row.content().b().isEmpty());
+        assertTrue(Comparison.of(not, not).ends().stream()
+                .noneMatch(end -> end.species().equals("mass")));
+    }
 }

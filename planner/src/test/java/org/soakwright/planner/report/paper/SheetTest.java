@@ -206,4 +206,36 @@ class SheetTest {
         assertTrue(all(sheet.timing()).contains("Times of day are local, with 60 minutes to every hour"));
         assertFalse(all(Batches.sheet(desalting, Optional.empty()).timing()).contains("Times of day"));
     }
+
+    @Test
+    void whatIsCountedOtherwiseIsAssayedOtherwise() {
+        String lot = "lot:\n  mass: 600 kg\n";
+        assertTrue(Batches.DESALTING.contains(lot));
+        String head = Batches.DESALTING
+                .substring(0, Batches.DESALTING.indexOf("targets:"))
+                .replace(lot, lot + "  moisture: {start: 50 %, end: 60 %}\n");
+        Sheet counted = Batches.sheet(Batches.followed(head + """
+                targets:
+                  - {species: salt, reading: mean, phase: water, at-most: 90 %, confidence: 80 %}
+                  - {species: salt, reading: mean, per: dry, at-most: 900 g/kg}
+                  - {species: salt, reading: mean, per: present, at-most: 900 g/kg}
+                  - {species: salt, reading: mean, at-most: 900 g/kg}
+                  - {total: mass, at-least: 10 kg}
+                """), Optional.empty());
+        String sampling = all(counted.sampling());
+        assertTrue(sampling.contains("the limit is salt over salt and water together."), sampling);
+        assertTrue(sampling.contains("the limit is salt per kg of all that is not water."), sampling);
+        assertTrue(sampling.contains("Count it per kg of the sample as it is."), sampling);
+        assertTrue(sampling.contains("The limit is per kg as loaded: take what is found"), sampling);
+        assertTrue(sampling.contains("weigh the whole lot"), sampling);
+        Sheet.TargetLine first = counted.targets().get(0);
+        assertEquals("salt mean in the water phase", first.target());
+        assertEquals("at most 90 %, 80 % sure", first.limit());
+        Sheet.TargetLine mass = counted.targets().get(counted.targets().size() - 1);
+        assertEquals("mass of the lot", mass.target());
+        assertEquals("kg", mass.unit());
+        Sheet.Part last = counted.parts().get(counted.parts().size() - 1);
+        assertTrue(moment(last, "End").planned().endsWith("the lot weighs " + mass.expected()), mass.expected());
+        assertFalse(moment(sheet.parts().get(0), "End").planned().contains("weighs"));
+    }
 }

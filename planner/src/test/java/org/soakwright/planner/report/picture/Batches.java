@@ -12,6 +12,7 @@ import java.util.Map;
 import java.util.Objects;
 import org.soakwright.planner.batch.Batch;
 import org.soakwright.planner.batch.Planner;
+import org.soakwright.planner.batch.Progress;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepTimes;
 import org.soakwright.planner.batch.Trace;
@@ -44,6 +45,7 @@ final class Batches {
             FOLLOWED.keySet().stream().sorted().forEach(name -> DRAWN.put(name, Pictures.of(followed(name))));
             DRAWN.put("crowded", Pictures.of(crowded()));
             DRAWN.put("corners", Pictures.of(corners()));
+            DRAWN.put("skinned", Pictures.of(skinned().judged(Progress.NONE)));
         }
         return DRAWN;
     }
@@ -72,6 +74,12 @@ final class Batches {
     /** Pieces of several sides that differ. */
     static Run corners() {
         Recipe recipe = resource("corners");
+        return new Batch(recipe).follow(StepTimes.definite(recipe));
+    }
+
+    /** Skins on one face, contents counted against what is there, and a value that is not known exactly. */
+    static Run skinned() {
+        Recipe recipe = resource("skinned");
         return new Batch(recipe).follow(StepTimes.definite(recipe));
     }
 
