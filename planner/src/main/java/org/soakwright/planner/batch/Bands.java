@@ -82,7 +82,8 @@ public final class Bands {
                 Arrays.fill(read[i], Double.NaN);
                 continue;
             }
-            State state = new State(sample, courses, upTo, run.totals().seconds(), upTo.length - 1, false);
+            State state =
+                    new State(sample, courses, upTo, run.batch().exchanging(run.seconds()), upTo.length - 1, false);
             for (int r = 0; r < read[i].length; r++) {
                 Requirement own = sample.requirements().get(r);
                 read[i][r] = own.ofPieces()

@@ -251,6 +251,22 @@ public final class Batch {
         return physics.films();
     }
 
+    /** Whether the pieces exchange anything in a stage; where they never do, whether it is a stage at all. */
+    boolean exchanges(int stage) {
+        Translation.Slot slot = slots.get(stage);
+        boolean onlyRests = recipe.steps().stream().allMatch(Step.Rest.class::isInstance);
+        return onlyRests || (slot.part() > 0 && !(recipe.steps().get(slot.step()) instanceof Step.Rest));
+    }
+
+    /** All the time in which the pieces exchange something, s. */
+    double exchanging(double[] stepSeconds) {
+        double sum = 0;
+        for (int k = 0; k < slots.size(); k++) {
+            sum += exchanges(k) ? slots.get(k).seconds(stepSeconds) : 0;
+        }
+        return sum;
+    }
+
     /** Derivatives by the durations of stages, as derivatives by those of the steps that the stages belong to. */
     double[] byStep(int species, double[] byStage, double[] stageSeconds) {
         double[] byStep = new double[recipe.steps().size()];

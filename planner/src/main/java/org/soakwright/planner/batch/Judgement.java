@@ -14,6 +14,7 @@ import org.soakwright.planner.batch.doubt.Chance;
 import org.soakwright.planner.batch.doubt.Draws;
 import org.soakwright.planner.batch.doubt.Percentile;
 import org.soakwright.planner.batch.doubt.Shares;
+import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Target;
 import org.soakwright.recipes.text.Unsound;
@@ -39,6 +40,9 @@ record Judgement(Outlook outlook, double[] held) {
     private static final int DEAR_ROUNDS = 8;
 
     private static final int DEAR_PER_ROUND = 32;
+
+    /** Samples beyond a percentile, at least. */
+    private static final double FEWEST_BEYOND = 2.5;
 
     /** Readings below this part of the largest have no logarithm worth explaining. */
     private static final double ABOVE_ZERO = 1e-9;
@@ -76,6 +80,22 @@ record Judgement(Outlook outlook, double[] held) {
             for (int r = 0; r < draws.rounds(); r++) {
                 progress.at("following what is not known exactly", (double) r / draws.rounds());
                 IntStream.range(r * perRound, (r + 1) * perRound).parallel().forEach(i -> sample(i, seconds));
+            }
+        }
+
+        /** A percentile beyond nearly all samples says nothing. */
+        private void requireEnough(int requirement) {
+            double level = run.batch().assurance().level(requirement);
+            double beyond = Math.min(level, 1 - level) * draws.size();
+            if (beyond < FEWEST_BEYOND) {
+                Recipe recipe = run.batch().recipe();
+                Target target =
+                        recipe.targets().get(requirements.get(requirement).target());
+                throw new Unsound(
+                        recipe.confidence(target).map(Quantity::place).orElse(target.place()),
+                        "so high a confidence cannot be told from the " + draws.size()
+                                + " samples that are followed of this recipe; write at most "
+                                + Math.floor(1000 * (1 - FEWEST_BEYOND / draws.size())) / 10 + " %");
             }
         }
 
@@ -128,6 +148,7 @@ record Judgement(Outlook outlook, double[] held) {
                 held[r] = percentile.value();
                 errors[r] = percentile.error();
             }
+            run.batch().assurance().held().forEach(this::requireEnough);
             Map<List<Object>, List<Integer>> byGrade = new LinkedHashMap<>();
             for (int r = 0; r < requirements.size(); r++) {
                 Optional<String> grade =

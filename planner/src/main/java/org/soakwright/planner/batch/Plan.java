@@ -29,6 +29,11 @@ public record Plan(
         return Cautions.of(run).stops();
     }
 
+    /** Whether every target is met and nothing forbids to use it. */
+    public boolean mayBeUsed() {
+        return met && stops().isEmpty();
+    }
+
     /** How far a claim of optimality reaches. */
     public enum Claim {
         /** No choice on the grid is better: shown by bounds that hold for the whole range. */

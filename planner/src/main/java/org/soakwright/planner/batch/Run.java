@@ -341,8 +341,7 @@ public final class Run {
 
     /** This run at the end of a stage. */
     State state(int stage, boolean sloping) {
-        double[] all = stageSeconds();
-        return new State(batch, courses, all, java.util.Arrays.stream(all).sum(), stage, sloping);
+        return new State(batch, courses, stageSeconds(), batch.exchanging(seconds), stage, sloping);
     }
 
     private double[] stageSeconds() {

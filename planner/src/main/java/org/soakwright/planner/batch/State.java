@@ -8,7 +8,7 @@ import org.soakwright.solver.chain.Course;
  *
  * @param courses of each species, up to the stage or farther
  * @param seconds of the stages by the clock, up to the stage or farther
- * @param whole of the recipe by the clock, s
+ * @param whole all the time of the recipe that {@link Batch#exchanging counts} for a moisture, s
  * @param sloping whether derivatives by the durations of the steps are wanted
  */
 record State(Batch batch, List<Course> courses, double[] seconds, double whole, int stage, boolean sloping) {
@@ -26,11 +26,11 @@ record State(Batch batch, List<Course> courses, double[] seconds, double whole, 
         return sloping ? Dual.constant(value, batch.recipe().steps().size()) : new Dual(value, new double[0]);
     }
 
-    /** The part of all the time of the recipe that is over, 1. */
+    /** The part of all the time in liquor or air that is over, 1; at rest nothing is exchanged. Where all is rest, of all the time. */
     Dual elapsed() {
         double over = 0;
         for (int k = 0; k <= stage; k++) {
-            over += seconds[k];
+            over += batch.exchanges(k) ? seconds[k] : 0;
         }
         if (!sloping) {
             return number(over / whole);
@@ -38,7 +38,9 @@ record State(Batch batch, List<Course> courses, double[] seconds, double whole, 
         double[] slopes = new double[batch.recipe().steps().size()];
         for (int k = 0; k < seconds.length; k++) {
             Translation.Slot slot = batch.slots().get(k);
-            slopes[slot.step()] += slot.part() * ((k <= stage ? 1 : 0) - over / whole) / whole;
+            if (batch.exchanges(k)) {
+                slopes[slot.step()] += slot.part() * ((k <= stage ? 1 : 0) - over / whole) / whole;
+            }
         }
         return new Dual(over / whole, slopes);
     }

@@ -120,7 +120,7 @@ public final class Trace {
         double[] seconds = run.seconds();
         List<Look> looks = new ArrayList<>();
         double clock = 0;
-        double all = run.totals().seconds();
+        double all = batch.exchanging(run.seconds());
         double[] done = new double[0];
         for (int k = 0; k < batch.slots().size(); k++) {
             Translation.Slot slot = batch.slots().get(k);

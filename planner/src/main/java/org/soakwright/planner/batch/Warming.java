@@ -31,7 +31,7 @@ final class Warming {
     /** Nobody times a step to less, s. */
     private static final double SHORT = 10;
 
-    /** Food that is colder holds ice, K (common practice: it begins to freeze at -1 to -2 Cel). */
+    /** What holds water and is colder holds ice, K (common practice: moist foods begin to freeze at -1 to -2 Cel); solvents may be colder. */
     private static final double FROZEN = 271.15;
 
     private final Recipe recipe;
@@ -74,7 +74,7 @@ final class Warming {
     /** Ice holds back both the warmth and the solute: nothing here knows how. */
     private void requireThawed(Step step, double arriving) {
         Quantity there = Objects.requireNonNull(step.temperature());
-        if (recipe.products().contains(Product.FOOD) && Math.min(arriving, there.si()) < FROZEN) {
+        if (!recipe.products().contains(Product.FLAMMABLE) && Math.min(arriving, there.si()) < FROZEN) {
             Quantity lot = recipe.lot().temperature();
             throw new Unsound(
                     lot != null && lot.si() == arriving ? lot.place() : there.place(),

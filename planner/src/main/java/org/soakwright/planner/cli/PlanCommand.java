@@ -37,7 +37,7 @@ final class PlanCommand extends RecipeCommand {
         Optional<LocalDateTime> moment = start.moment();
         Plan plan = Planner.plan(recipe, session.line());
         return new Finding(
-                plan.met() && plan.stops().isEmpty() ? Exit.DONE : Exit.NO_PLAN,
+                plan.mayBeUsed() ? Exit.DONE : Exit.NO_PLAN,
                 () -> BatchSheet.of(plan, moment, session.style()),
                 () -> ResultJson.of(stamp, plan),
                 () -> Report.of(plan, stamp, moment));

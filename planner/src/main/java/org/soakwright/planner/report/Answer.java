@@ -30,6 +30,9 @@ final class Answer {
         List<String> sentences = new ArrayList<>();
         sentences.add(takes + " and misses " + missed.size() + " of " + targets.size() + " targets.");
         missed.stream().limit(MOST_NAMED).forEach(state -> sentences.add("Missed: " + Wording.miss(state) + "."));
+        if (missed.size() > MOST_NAMED) {
+            sentences.add("And " + (missed.size() - MOST_NAMED) + " more.");
+        }
         return sentences;
     }
 

@@ -21,7 +21,7 @@ import org.soakwright.recipes.model.Recipe;
  *
  * @param about of what, a line each: {@code 600 kg: 40 % thin, slab of 18 mm; …}
  * @param answer the answer first: how long, what decides, how sure
- * @param met whether every target is met
+ * @param met whether every target is met, and of a plan, whether nothing forbids to use it
  * @param sections in the order in which they are to be read
  */
 public record Findings(String title, List<String> about, List<String> answer, boolean met, List<Section> sections) {
@@ -70,7 +70,7 @@ public record Findings(String title, List<String> about, List<String> answer, bo
         }
         sections.add(cautions(run));
         sections.addAll(at(sections, TOTALS), Prospects.sections(run, true));
-        return new Findings(title(run), about(run), sure(Answer.planned(plan), run), plan.met(), sections);
+        return new Findings(title(run), about(run), sure(Answer.planned(plan), run), plan.mayBeUsed(), sections);
     }
 
     private static int at(List<Section> sections, String id) {
@@ -98,6 +98,10 @@ public record Findings(String title, List<String> about, List<String> answer, bo
         Recipe recipe = run.batch().recipe();
         List<String> about = new ArrayList<>(List.of(lot(recipe)));
         PieceWords.differences(recipe).ifPresent(about::add);
+        String allowedBy = recipe.allowedBy();
+        if (allowedBy != null) {
+            about.add("In spite of cautions that would stop it, allowed by " + allowedBy);
+        }
         return about;
     }
 

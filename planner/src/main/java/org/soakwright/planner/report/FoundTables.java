@@ -75,6 +75,9 @@ final class FoundTables {
     }
 
     private static String worth(FilmFound film) {
+        if (film.worthSeconds().orElse(0) > film.stepSeconds()) {
+            return "more than its " + Durations.practical(film.stepSeconds());
+        }
         return film.worthSeconds().isPresent()
                 ? Durations.practical(film.worthSeconds().getAsDouble()) + " of "
                         + Durations.practical(film.stepSeconds())

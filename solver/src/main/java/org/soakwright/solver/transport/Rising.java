@@ -5,7 +5,9 @@ package org.soakwright.solver.transport;
  * Correlation}.
  */
 final class Rising {
-    private static final double LIQUID = 100;
+    /** Gases lie at 0.5 to 3, hot brine at 50: between, the lower formula is the one for liquids. */
+    private static final double LIQUID = 10;
+
     private static final double LYING_TURNS = 1e7;
     private static final double CUBE = 0.951;
     private static final double STUB = 0.967;

@@ -51,7 +51,9 @@ public final class Report {
     /** Of a plan; where no choice meets the targets, of its nearest miss, marked as such. */
     public static List<Folder.Entry> of(Plan plan, Stamp stamp, Optional<LocalDateTime> start) {
         Beside<Paper> paper = Beside.begin(() -> Paper.of(BatchPaper.of(again(plan), stamp, start)));
-        String kind = plan.met() ? "Batch plan" : "Nearest miss, not a plan";
+        String kind = plan.mayBeUsed()
+                ? "Batch plan"
+                : plan.met() ? "Stopped, not a plan to use" : "Nearest miss, not a plan";
         return entries(
                 new Told(kind, plan.run(), plan, Findings.of(plan, start), ResultJson.of(stamp, plan)),
                 paper,
@@ -79,7 +81,7 @@ public final class Report {
     private static Plan again(Plan plan) {
         return new Plan(
                 again(plan.run()),
-                plan.met(),
+                plan.mayBeUsed(),
                 plan.proof(),
                 plan.binds(),
                 plan.perHour(),
