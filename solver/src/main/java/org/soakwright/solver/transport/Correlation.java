@@ -94,7 +94,7 @@ public enum Correlation {
             atMost(Group.ASPECT, 5)),
     /**
      * Sh = 0.68 + 0.670 Ra^(1/4) / [1 + (0.492/Sc)^(9/16)]^(4/9) by height (Churchill and Chu 1975, Int J Heat Mass
-     * Transfer 18:1323, laminar, from memory), used from Sc 100 on, where layers stay laminar up to Ra 1e12: Wilke,
+     * Transfer 18:1323, laminar, from memory), stated from Sc 100 on, used from 10 on, where layers stay laminar up to Ra 1e12: Wilke,
      * Tobias and Eisenberg 1953, J Electrochem Soc 100:513, measured 0.66 Ra^(1/4) at Sc 500 to 80000 (from memory).
      * The formula for gases would give 1.3 times as much at Ra 1e8 and 2.3 times at 1e12.
      */
@@ -105,7 +105,7 @@ public enum Correlation {
             atLeast(Group.SCHMIDT, 100)),
     /**
      * Sh = {0.825 + 0.387 Ra^(1/6) / [1 + (0.492/Sc)^(9/16)]^(8/27)}^2 by height, laminar and turbulent; Ra 0.1 to 1e12
-     * (Churchill and Chu 1975, formula and a value read, range from memory). Used below Sc 100.
+     * (Churchill and Chu 1975, formula and a value read, range from memory). Used below Sc 10.
      */
     STANDING_PLATE_IN_GAS(
             "standing plate in still gas (Churchill and Chu 1975)", 0.2, new Limit(Group.RAYLEIGH, 0.1, 1e12)),
@@ -119,7 +119,7 @@ public enum Correlation {
             "lying plate in still liquor, turbulent (Lloyd and Moran 1974)", 0.3, new Limit(Group.RAYLEIGH, 1e7, 1e10)),
     /**
      * Sh = 0.36 + 0.518 Ra^(1/4) / [1 + (0.559/Sc)^(9/16)]^(4/9) (Churchill and Chu 1975, Int J Heat Mass Transfer
-     * 18:1049, laminar, from memory), used from Sc 100 on; Ra 1e-6 to 1e10: Schütz 1963, Int J Heat Mass Transfer
+     * 18:1049, laminar, from memory), used from Sc 10 on; Ra 1e-6 to 1e10: Schütz 1963, Int J Heat Mass Transfer
      * 6:873, measured 0.53 Ra^(1/4) there (from memory).
      */
     LYING_CYLINDER(
@@ -129,7 +129,7 @@ public enum Correlation {
             atLeast(Group.SCHMIDT, 100)),
     /**
      * Sh = {0.60 + 0.387 Ra^(1/6) / [1 + (0.559/Sc)^(9/16)]^(8/27)}^2; Ra 1e-5 to 1e12 (Churchill and Chu 1975, formula
-     * and a value read). Used below Sc 100.
+     * and a value read). Used below Sc 10.
      */
     LYING_CYLINDER_IN_GAS(
             "lying cylinder in still gas (Churchill and Chu 1975)", 0.2, new Limit(Group.RAYLEIGH, 1e-5, 1e12)),

@@ -89,15 +89,15 @@ class RisingTest {
                 List.of(), at(new Body.Cylinder(LENGTH), rayleigh * 0.99, 2000).cautions());
     }
 
-    /** What turbulence adds in gases is not there in liquors: the step at Sc 100, as stated with the correlation. */
+    /** What turbulence adds in gases is not there in liquors: the step at Sc 10, as stated with the correlation. */
     @Test
     void liquorsStayLaminarWhereGasesDoNot() {
         Body plate = new Body.Plate(LENGTH);
         double step = 1e-9;
-        double at8 = at(plate, 1e8, 100 - step).coefficient()
-                / at(plate, 1e8, 100 + step).coefficient();
-        double at12 = at(plate, 1e12, 100 - step).coefficient()
-                / at(plate, 1e12, 100 + step).coefficient();
+        double at8 = at(plate, 1e8, 10 - step).coefficient()
+                / at(plate, 1e8, 10 + step).coefficient();
+        double at12 = at(plate, 1e12, 10 - step).coefficient()
+                / at(plate, 1e12, 10 + step).coefficient();
         assertEquals(1.25, at8, 0.05);
         assertEquals(2.3, at12, 0.05);
         assertEquals(
