@@ -62,10 +62,14 @@ class CommandsTest {
         Desk.Printed stopped = desk.give("plan", warm.toString());
         assertEquals(Exit.NO_PLAN, stopped.status());
         assertTrue(stopped.out().contains("This is not a plan to use."), stopped.out());
+        desk.give("plan", warm.toString(), "--report", desk.path("stopped").toString());
+        String floor = Files.readString(desk.path("stopped").resolve("batch-sheet.html"));
+        assertTrue(floor.contains("NOT A PLAN: stopped by a caution"), floor);
         Files.writeString(warm, Files.readString(warm) + "\nallowed-by: E. Vik, quality\n");
         Desk.Printed allowed = desk.give("plan", warm.toString());
         assertFalse(allowed.out().contains("This is not a plan to use."), allowed.out());
         assertTrue(allowed.out().contains("longer than any rule of time allows"), allowed.out());
+        assertTrue(allowed.out().contains("allowed by E. Vik, quality"), allowed.out());
     }
 
     @Test

@@ -220,7 +220,7 @@ final class BatchPage {
                 .text(
                         findings.met()
                                 ? "To be printed and filled in on the floor: "
-                                : "The batch sheet, marked as missing its targets: ");
+                                : "The batch sheet, marked as not a plan: ");
         for (int i = 0; i < pages.size(); i++) {
             html.text(i == 0 ? "" : ", ").leaf("a", pages.get(i), "href", pages.get(i));
         }

@@ -38,6 +38,7 @@ final class Draft {
     private final List<PullWindow> windows;
     private final List<Checkpoint> checkpoints;
     private final Advice advice;
+    private final Cautions cautions;
 
     /**
      * A draft.
@@ -50,7 +51,8 @@ final class Draft {
         this.stamp = stamp;
         this.clock = clock;
         recipe = run.batch().recipe();
-        boolean followable = run.meetsTargets();
+        cautions = Cautions.of(run);
+        boolean followable = run.meetsTargets() && cautions.stops().isEmpty();
         windows = followable && !recipe.targets().isEmpty() ? PullWindow.of(run) : List.of();
         checkpoints = followable ? Checkpoint.of(run) : List.of();
         advice = new Advice(run, windows, clock);
@@ -61,6 +63,7 @@ final class Draft {
                 .filter(state -> !state.met())
                 .map(state -> Wording.miss(state) + ".")
                 .toList();
+        boolean plan = misses.isEmpty() && cautions.stops().isEmpty();
         List<Sheet.Part> parts = new ArrayList<>();
         for (int i = 0; i < recipe.steps().size(); i++) {
             parts.add(part(i));
@@ -68,6 +71,7 @@ final class Draft {
         return new Sheet(
                 recipe.title(),
                 misses,
+                cautions.stops(),
                 List.of(
                         new Sheet.Blank("Lot code", ""),
                         new Sheet.Blank("Loaded", recipe.lot().massKg().isPresent() ? "kg" : "L")),
@@ -75,9 +79,9 @@ final class Draft {
                 timing(),
                 parts,
                 targets(),
-                misses.isEmpty() ? Sampling.of(run, clock) : List.of(),
-                Cautions.of(run).shown(),
-                misses.isEmpty() ? List.of("Prepared", "Checked", "Released") : List.of("Prepared", "Checked"),
+                plan ? Sampling.of(run, clock) : List.of(),
+                cautions.shown(),
+                plan ? List.of("Prepared", "Checked", "Released") : List.of("Prepared", "Checked"),
                 stamp);
     }
 
@@ -90,6 +94,10 @@ final class Draft {
         PieceWords.differences(recipe)
                 .ifPresent(differences -> lines.add(
                         differences + " What is expected is the average over a grade, unless a share is named."));
+        String allowedBy = recipe.allowedBy();
+        if (allowedBy != null) {
+            lines.add("In spite of cautions that would stop it, allowed by " + allowedBy + ".");
+        }
         return lines;
     }
 

@@ -77,7 +77,7 @@ final class HtmlSheet {
         if (!sheet.isPlan()) {
             out.append("<div class=\"banner\" role=\"alert\">");
             element("strong", sheet.banner());
-            sheet.firstMisses().forEach(miss -> element("p", miss));
+            sheet.against().forEach(miss -> element("p", miss));
             out.append("</div>\n");
         }
         out.append("<header>\n<div>");

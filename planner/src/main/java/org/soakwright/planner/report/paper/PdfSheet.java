@@ -90,7 +90,7 @@ final class PdfSheet {
         List<Strip> strips = new ArrayList<>();
         strips.add(Strip.gap(inset - 2));
         strips.add(set.words(inside, set.semibold, Setting.TITLE, sheet.banner()));
-        sheet.firstMisses().forEach(miss -> strips.add(set.words(inside, set.regular, Setting.STEP, miss)));
+        sheet.against().forEach(miss -> strips.add(set.words(inside, set.regular, Setting.STEP, miss)));
         strips.add(Strip.gap(inset - 2));
         Strip inner = Strip.of(strips);
         List<Mark> marks = new ArrayList<>();

@@ -8,6 +8,7 @@ import org.soakwright.planner.report.Stamp;
  * What a batch sheet says, in the order in which it is read; no word of it is added later.
  *
  * @param misses the targets that are missed; none where this is a plan to run
+ * @param stops cautions that forbid to use it; none where this is a plan to run
  * @param lot how much of what
  * @param timing how long, from when to when, and how times are counted
  * @param targets each limit with what to expect and room for what is found
@@ -17,6 +18,7 @@ import org.soakwright.planner.report.Stamp;
 record Sheet(
         String title,
         List<String> misses,
+        List<String> stops,
         List<Blank> lotBlanks,
         List<String> lot,
         List<String> timing,
@@ -38,6 +40,7 @@ record Sheet(
 
     Sheet {
         misses = List.copyOf(misses);
+        stops = List.copyOf(stops);
         lotBlanks = List.copyOf(lotBlanks);
         lot = List.copyOf(lot);
         timing = List.copyOf(timing);
@@ -105,7 +108,7 @@ record Sheet(
     }
 
     boolean isPlan() {
-        return misses.isEmpty();
+        return misses.isEmpty() && stops.isEmpty();
     }
 
     /** Whether times of day are known. */
@@ -115,17 +118,22 @@ record Sheet(
                 .anyMatch(moment -> !moment.wall().isEmpty());
     }
 
-    /** The first misses, for the top, and how many more there are. */
-    List<String> firstMisses() {
+    /** What stops it, then the first misses, for the top, and how many more there are. */
+    List<String> against() {
+        List<String> against = new ArrayList<>(stops);
         if (misses.size() <= MOST_MISSES) {
-            return misses;
+            against.addAll(misses);
+            return against;
         }
-        List<String> firstMisses = new ArrayList<>(misses.subList(0, MOST_MISSES));
-        firstMisses.add("And " + (misses.size() - MOST_MISSES) + " more: see the targets.");
-        return firstMisses;
+        against.addAll(misses.subList(0, MOST_MISSES));
+        against.add("And " + (misses.size() - MOST_MISSES) + " more: see the targets.");
+        return against;
     }
 
     String banner() {
+        if (misses.isEmpty()) {
+            return NO_PLAN + ": stopped by a caution";
+        }
         return NO_PLAN + ": misses " + (misses.size() == 1 ? "a target" : misses.size() + " targets");
     }
 
