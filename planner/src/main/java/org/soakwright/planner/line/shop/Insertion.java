@@ -1,0 +1,261 @@
+package org.soakwright.planner.line.shop;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * Finds the earliest completion of one job on a floor whose other jobs stay where they are, given the least and most that each phase may last.
+ *
+ * <p>Forward, the set of all moments at which the job can have landed and can leave is carried from phase to phase, through every free window of
+ * every station: nothing is missed, so the completion found is the earliest there is. Backward, every event is put as late as that completion
+ * allows: pieces hang about in no station without need. The sets are cut off at a moment that is doubled until there is a completion.
+ */
+final class Insertion {
+    private static final int MOST_DOUBLINGS = 12;
+    private static final long HALF_A_DAY = 43_200;
+
+    private final Floor floor;
+    private final Job job;
+    private final long[] least;
+    private final long[] most;
+    private final List<Placed.Visit> done;
+    private final long takes;
+
+    /**
+     * Of the phases that are not done yet.
+     *
+     * @param done the first phases, which stay as they are
+     * @param least of every phase, s; allowed durations
+     * @param most of every phase, s
+     */
+    Insertion(Floor floor, Job job, List<Placed.Visit> done, long[] least, long[] most) {
+        this.floor = floor;
+        this.job = job;
+        this.done = done;
+        this.least = least;
+        this.most = most;
+        takes = floor.shop().carriage().takes();
+    }
+
+    /** A free window of a station with the moments at which the job can land in it and leave it. */
+    private record Window(
+            int station,
+            long from,
+            long to,
+            Moments calm,
+            Moments landing,
+            Moments leaving,
+            @Nullable Window same) {}
+
+    /** The placement with the earliest completion; null where there is none. */
+    @Nullable
+    Placed place(long notBefore) {
+        long begin =
+                done.isEmpty() ? Math.max(job.ready(), notBefore) : done.get(0).start();
+        long span = takes * 2;
+        for (int k = 0; k < job.size(); k++) {
+            span += least[k] + (k > 0 ? job.leastGap(k) : 0);
+        }
+        long until = begin + span + span / 4 + HALF_A_DAY;
+        for (int tries = 0; tries < MOST_DOUBLINGS; tries++) {
+            Placed placed = place(begin, until);
+            if (placed != null) {
+                return placed;
+            }
+            until += until - begin;
+        }
+        return null;
+    }
+
+    private @Nullable Placed place(long begin, long until) {
+        Moments lifts = floor.lifts(begin, until);
+        Moments hands = null;
+        List<List<Window>> windows = new ArrayList<>();
+        for (int k = 0; k < job.size(); k++) {
+            Phase phase = job.phase(k);
+            List<Window> now = new ArrayList<>();
+            if (k < done.size()) {
+                now.add(fixed(k, begin, until));
+            } else if (k > 0 && phase.before().stays()) {
+                hands = hands == null ? floor.hands(begin, until) : hands;
+                for (Window before : windows.get(k - 1)) {
+                    Moments landing = onward(before, phase.before(), hands);
+                    add(now, k, before.station(), before.from(), before.to(), landing, before, begin, until);
+                }
+            } else {
+                Moments arriving = k == 0
+                        ? lifts.lasting(takes).shifted(takes)
+                        : landing(leaving(windows.get(k - 1)), lifts, (Joint.Lift) phase.before());
+                if (!arriving.isEmpty()) {
+                    for (int station : phase.stations()) {
+                        rooms(now, k, station, arriving, begin, until);
+                    }
+                }
+            }
+            if (now.isEmpty()) {
+                return null;
+            }
+            windows.add(now);
+        }
+        return backward(windows, lifts);
+    }
+
+    private Window fixed(int k, long begin, long until) {
+        Placed.Visit visit = done.get(k);
+        Moments room = floor.room(visit.station(), job, begin, Math.max(until, visit.end()));
+        int around = room.interval(visit.end());
+        return new Window(
+                visit.station(),
+                room.from(around),
+                room.to(around),
+                Moments.ALWAYS,
+                Moments.of(visit.start(), visit.start()),
+                Moments.of(visit.end(), visit.end()),
+                null);
+    }
+
+    private void rooms(List<Window> now, int k, int station, Moments arriving, long begin, long until) {
+        Moments room = floor.room(station, job, begin, until);
+        for (int i = room.interval(arriving.first()); i < room.size() && room.from(i) <= arriving.last(); i++) {
+            Moments landing = arriving.within(room.from(i), room.to(i));
+            add(now, k, station, room.from(i), room.to(i), landing, null, begin, until);
+        }
+    }
+
+    private void add(
+            List<Window> now,
+            int k,
+            int station,
+            long from,
+            long to,
+            Moments landing,
+            @Nullable Window same,
+            long begin,
+            long until) {
+        if (landing.isEmpty()) {
+            return;
+        }
+        long last = Math.min(to, until);
+        Moments calm = floor.conditions(job.phase(k), begin, until);
+        Moments lasting = job.phase(k).lasting().within(least[k], most[k]);
+        Moments leaving = Moments.NONE;
+        for (int i = calm.interval(landing.first()); i < calm.size() && calm.from(i) <= landing.last(); i++) {
+            Moments within = landing.within(calm.from(i), calm.to(i)).plus(lasting);
+            leaving = leaving.or(within.within(calm.from(i), Math.min(last, calm.to(i))));
+        }
+        if (!leaving.isEmpty()) {
+            now.add(new Window(station, from, to, calm, landing, leaving, same));
+        }
+    }
+
+    private static Moments leaving(List<Window> windows) {
+        Moments any = Moments.NONE;
+        for (Window window : windows) {
+            any = any.or(window.leaving());
+        }
+        return any;
+    }
+
+    private static Moments onward(Window before, Joint joint, Moments hands) {
+        if (joint instanceof Joint.Change change) {
+            return before.leaving()
+                    .and(hands.lasting(change.seconds()))
+                    .shifted(change.seconds())
+                    .within(before.from(), before.to());
+        }
+        return before.leaving();
+    }
+
+    private static Moments landing(Moments leaving, Moments lifts, Joint.Lift lift) {
+        if (lift.most() == lift.least()) {
+            return leaving.and(lifts.lasting(lift.least())).shifted(lift.least());
+        }
+        Moments landing = Moments.NONE;
+        for (int i = 0; i < lifts.size(); i++) {
+            Moments from = leaving.within(lifts.from(i), lifts.to(i));
+            landing = landing.or(from.plus(lift.least(), lift.most()).within(lifts.from(i), lifts.to(i)));
+        }
+        return landing;
+    }
+
+    private @Nullable Placed backward(List<List<Window>> windows, Moments lifts) {
+        int n = job.size();
+        Moments out = lifts.lasting(takes);
+        Window at = null;
+        long end = Moments.NEVER;
+        for (Window window : windows.get(n - 1)) {
+            Moments leaving = window.leaving().and(out);
+            if (!leaving.isEmpty() && leaving.first() < end) {
+                end = leaving.first();
+                at = window;
+            }
+        }
+        if (at == null) {
+            return null;
+        }
+        Placed.Visit[] visits = new Placed.Visit[n];
+        for (int k = 0; k < done.size(); k++) {
+            visits[k] = done.get(k);
+        }
+        for (int k = n - 1; k >= done.size(); k--) {
+            long start = start(at, k, end);
+            visits[k] = new Placed.Visit(at.station(), start, end);
+            if (k == done.size()) {
+                break;
+            }
+            Joint joint = job.phase(k).before();
+            if (joint.stays() && at.same() != null) {
+                at = at.same();
+                end = start - job.leastGap(k);
+                continue;
+            }
+            Window from = null;
+            long latest = -Moments.NEVER;
+            for (Window before : windows.get(k - 1)) {
+                long leave = leave(before, start, joint, lifts);
+                if (leave > latest) {
+                    latest = leave;
+                    from = before;
+                }
+            }
+            if (from == null) {
+                throw new IllegalStateException(job.name() + " landed from nowhere");
+            }
+            at = from;
+            end = latest;
+        }
+        return new Placed(job, List.of(visits));
+    }
+
+    /** The latest landing from which a window can be left at a moment. */
+    private long start(Window at, int k, long end) {
+        Moments lasting = job.phase(k).lasting().within(least[k], most[k]);
+        int calm = at.calm().interval(end);
+        long earliest = Math.max(at.calm().from(calm), at.from());
+        long best = -Moments.NEVER;
+        for (int i = 0; i < lasting.size(); i++) {
+            long landed = at.landing().atOrBefore(end - lasting.from(i));
+            if (landed >= earliest && landed >= end - lasting.to(i)) {
+                best = Math.max(best, landed);
+            }
+        }
+        if (best == -Moments.NEVER) {
+            throw new IllegalStateException(job.name() + " left where it never landed");
+        }
+        return best;
+    }
+
+    /** The latest moment at which a window can be left so as to land at another. */
+    private static long leave(Window before, long landing, Joint joint, Moments lifts) {
+        if (!(joint instanceof Joint.Lift lift)) {
+            return before.leaving().contains(landing) ? landing : -Moments.NEVER;
+        }
+        int i = lifts.interval(landing);
+        if (i == lifts.size() || lifts.from(i) > landing) {
+            return -Moments.NEVER;
+        }
+        long leave = before.leaving().atOrBefore(landing - lift.least());
+        return leave >= landing - lift.most() && leave >= lifts.from(i) ? leave : -Moments.NEVER;
+    }
+}
