@@ -89,6 +89,17 @@ public final class Consistency {
                                 + "\"; write such as 20 min, or remove between"));
     }
 
+    /**
+     * Whether how a lot is handled fits its step.
+     *
+     * @param stays where that is written
+     * @param first whether no step comes before it
+     * @param fills how many the step has
+     */
+    public static List<Problem> ofHandling(Handling handling, Place stays, boolean first, int fills) {
+        return HandlingRules.of(handling, stays, first, fills);
+    }
+
     /** Drag-out is per mass of lot. */
     public List<Problem> ofDragOut(@Nullable Quantity dragOut) {
         return dragOut == null ? List.of() : needsLotDensity(dragOut.place(), "drag-out per mass of lot");

@@ -49,6 +49,7 @@ public record Recipe(
         problems.addAll(RecipeRules.agreement(declared, place, species, steps, targets, minimise));
         problems.addAll(Consistency.ofBetween(between));
         problems.addAll(Water.problems(lot.moisture(), species));
+        problems.addAll(HandlingRules.problems(steps));
         problems.addAll(Clinging.problems(steps, lot.massKg()));
         problems.addAll(Counting.problems(steps, targets, minimise, prices));
         Rules.require(problems);
@@ -85,6 +86,18 @@ public record Recipe(
     /** The price of the liquor of a step, its own or the recipe's; empty where there is none. */
     public Optional<LiquorPrice> liquorPrice(Step step) {
         return LiquorPrice.of(step, prices);
+    }
+
+    /** What lies between a step, from 0, and the one before it; nothing before the first. */
+    public Gap gapBefore(int step) {
+        Handling handling = steps.get(step).head().handling();
+        if (step == 0) {
+            return new Gap.None();
+        }
+        if (handling.stays()) {
+            return handling.changeover() == null ? new Gap.None() : new Gap.Refilling(handling.changeover());
+        }
+        return between == null ? new Gap.None() : new Gap.Transfer(between);
     }
 
     /** The same recipe with other steps. */

@@ -33,6 +33,17 @@ public sealed interface Step permits Step.Wet, Step.Rest, Step.Dry {
         return head().temperature();
     }
 
+    /** How many fills of liquor follow each other, each an equal part of the time; 1 where there are none to tell apart. */
+    default int fills() {
+        return 1;
+    }
+
+    /** What lies between two of its fills; nothing where it has but one. */
+    default Gap gapBetweenFills() {
+        Changeover changeover = head().handling().changeover();
+        return fills() == 1 || changeover == null ? new Gap.None() : new Gap.Refilling(changeover);
+    }
+
     /** A step in liquor. */
     sealed interface Wet extends Step permits Soak, Rinse {
         Liquor liquor();
@@ -116,6 +127,11 @@ public sealed interface Step permits Step.Wet, Step.Rest, Step.Dry {
         @Override
         public Rinse with(Film other) {
             return new Rinse(head, liquor, renewal, other, dragOut);
+        }
+
+        @Override
+        public int fills() {
+            return renewal instanceof Renewal.Fills several ? several.count() : 1;
         }
 
         public Rinse with(Renewal other) {

@@ -17,7 +17,8 @@ public record StepHead(
         @Nullable Quantity temperature,
         Overrides overrides,
         @Nullable LiquorPrice price,
-        @Nullable Quantity gain) {
+        @Nullable Quantity gain,
+        Handling handling) {
     public StepHead {
         Rules.named("a step", name, place);
         Rules.temperature(temperature);
@@ -32,22 +33,27 @@ public record StepHead(
                 Quantity.each(temperature, change),
                 overrides.each(change),
                 price,
-                Quantity.each(gain, change));
+                Quantity.each(gain, change),
+                handling);
     }
 
     public StepHead withName(String other) {
-        return new StepHead(place, other, time, temperature, overrides, price, gain);
+        return new StepHead(place, other, time, temperature, overrides, price, gain, handling);
     }
 
     public StepHead withOverrides(Overrides other) {
-        return new StepHead(place, name, time, temperature, other, price, gain);
+        return new StepHead(place, name, time, temperature, other, price, gain, handling);
     }
 
     public StepHead withTime(Time other) {
-        return new StepHead(place, name, other, temperature, overrides, price, gain);
+        return new StepHead(place, name, other, temperature, overrides, price, gain, handling);
     }
 
     public StepHead withTemperature(@Nullable Quantity other) {
-        return new StepHead(place, name, time, other, overrides, price, gain);
+        return new StepHead(place, name, time, other, overrides, price, gain, handling);
+    }
+
+    public StepHead withHandling(Handling other) {
+        return new StepHead(place, name, time, temperature, overrides, price, gain, other);
     }
 }

@@ -107,7 +107,11 @@ enum Section {
                     "gain",
                     "diffusivity",
                     "partition",
-                    "prices"),
+                    "prices",
+                    "stays",
+                    "changeover",
+                    "attended",
+                    "hold-at-most"),
             Later.OF_STEPS),
     RINSE(
             "a rinse",
@@ -122,10 +126,41 @@ enum Section {
                     "gain",
                     "diffusivity",
                     "partition",
-                    "prices"),
+                    "prices",
+                    "stays",
+                    "changeover",
+                    "attended",
+                    "hold-at-most"),
             Later.OF_STEPS),
-    REST("a rest", List.of("rest", "temperature", "time", "gain", "diffusivity"), Later.OF_STEPS),
-    DRY("a dry step", List.of("dry", "air", "film", "temperature", "time", "gain", "diffusivity"), Later.OF_STEPS),
+    REST(
+            "a rest",
+            List.of(
+                    "rest",
+                    "temperature",
+                    "time",
+                    "gain",
+                    "diffusivity",
+                    "stays",
+                    "changeover",
+                    "attended",
+                    "hold-at-most"),
+            Later.OF_STEPS),
+    DRY(
+            "a dry step",
+            List.of(
+                    "dry",
+                    "air",
+                    "film",
+                    "temperature",
+                    "time",
+                    "gain",
+                    "diffusivity",
+                    "stays",
+                    "changeover",
+                    "attended",
+                    "hold-at-most"),
+            Later.OF_STEPS),
+    CHANGEOVER("a changeover", List.of("drain", "refill"), List.of("measured")),
     SOAK_LIQUOR("the liquor of a soak", List.of("volume", "ratio", "density", "others"), List.of("measured")),
     RINSE_LIQUOR("the liquor of a rinse", List.of("volume", "ratio", "flow", "density", "others"), List.of("measured")),
     AIR("air", List.of("equilibrium"), List.of("temperature", "humidity", "speed")),
@@ -181,6 +216,12 @@ enum Section {
             entry("moisture", "the lot"),
             entry("thermal-diffusivity", "the lot"),
             entry("gain", "a step"),
+            entry("stays", "a step"),
+            entry("changeover", "a step"),
+            entry("attended", "a step"),
+            entry("hold-at-most", "a step"),
+            entry("drain", "the changeover of a step"),
+            entry("refill", "the changeover of a step"),
             entry("per", "a start, an equilibrium or a target on pieces"),
             entry("phase", "a target on pieces"),
             entry("confidence", "the recipe, or a target on pieces, a liquor or the mass"),
@@ -237,7 +278,7 @@ enum Section {
     }
 
     private static final class Later {
-        static final List<String> OF_STEPS = List.of("stays", "changeover", "attended", "hold-at-most", "measured");
+        static final List<String> OF_STEPS = List.of("measured");
 
         private Later() {}
     }

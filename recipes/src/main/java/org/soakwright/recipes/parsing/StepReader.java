@@ -11,6 +11,7 @@ import org.soakwright.recipes.model.Consistency;
 import org.soakwright.recipes.model.Declared;
 import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Film;
+import org.soakwright.recipes.model.Handling;
 import org.soakwright.recipes.model.Liquor;
 import org.soakwright.recipes.model.LiquorPrice;
 import org.soakwright.recipes.model.Names;
@@ -107,8 +108,8 @@ final class StepReader {
             problems.add(tree.place(), "steps is empty: found none; write such as - soak: first water");
         }
         List<Step> steps = new ArrayList<>();
-        for (Tree item : items.items()) {
-            Step step = step(item);
+        for (int i = 0; i < items.items().size(); i++) {
+            Step step = step(items.items().get(i), i == 0);
             if (step != null) {
                 steps.add(step);
             }
@@ -116,7 +117,7 @@ final class StepReader {
         return steps;
     }
 
-    private @Nullable Step step(Tree tree) {
+    private @Nullable Step step(Tree tree, boolean first) {
         Tree.Entry kind = kind(tree);
         Section section = kind == null ? null : KINDS.get(kind.key());
         if (kind == null || section == null) {
@@ -127,7 +128,8 @@ final class StepReader {
         if (fields == null) {
             return null;
         }
-        StepHead head = head(fields, kind);
+        Handling handling = new HandlingReader(values).handling(fields);
+        StepHead head = head(fields, kind, handling);
         Step step = switch (section) {
             case SOAK -> soak(fields, head, kind.key());
             case RINSE -> rinse(fields, head, kind.key());
@@ -136,6 +138,11 @@ final class StepReader {
         };
         if (step != null) {
             problems.addAll(consistency.of(step));
+        }
+        if (handling != null) {
+            // Of a step that is broken otherwise the fills written are taken for several.
+            int fills = step != null ? step.fills() : fields.known("fills") == null ? 1 : Renewal.MOST_FILLS;
+            problems.addAll(Consistency.ofHandling(handling, fields.place("stays"), first, fills));
         }
         return step;
     }
@@ -156,7 +163,7 @@ final class StepReader {
                 "a step begins with its kind and name, soak, rinse, rest or dry: found " + found + "; " + hint);
     }
 
-    private @Nullable StepHead head(Fields fields, Tree.Entry kind) {
+    private @Nullable StepHead head(Fields fields, Tree.Entry kind, @Nullable Handling handling) {
         String name = values.name(kind.key(), kind.value(), "first water");
         Time time = new TimeReader(values).time(fields.need("time", TIME));
         Quantity temperature = known.temperature("temperature", fields.get("temperature"));
@@ -173,9 +180,10 @@ final class StepReader {
         boolean broken = (temperature == null && fields.has("temperature"))
                 || (gain == null && fields.has("gain"))
                 || (price == null && prices != null);
-        return name == null || time == null || overrides == null || broken
+        return name == null || time == null || overrides == null || handling == null || broken
                 ? null
-                : problems.attempt(() -> new StepHead(fields.place(), name, time, temperature, overrides, price, gain));
+                : problems.attempt(
+                        () -> new StepHead(fields.place(), name, time, temperature, overrides, price, gain, handling));
     }
 
     private @Nullable Overrides overrides(Fields fields) {

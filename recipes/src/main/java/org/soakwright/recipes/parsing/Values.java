@@ -233,6 +233,20 @@ final class Values {
         }
     }
 
+    /** Whether something is so: {@code true} or {@code false}. */
+    @Nullable
+    Boolean truth(String what, @Nullable Tree tree) {
+        Tree.Leaf leaf = leaf(what, tree, "true");
+        if (leaf == null) {
+            return null;
+        }
+        if (!leaf.text().equals("true") && !leaf.text().equals("false")) {
+            problems.add(leaf.place(), what + ": found " + leaf.label() + "; write true or false");
+            return null;
+        }
+        return leaf.text().equals("true");
+    }
+
     /** A name or a title: text on one line, never wrapped in {@code {value: …}}. */
     @Nullable
     String name(String what, @Nullable Tree tree, String example) {
