@@ -87,6 +87,11 @@ public record Recipe(
         return LiquorPrice.of(step, prices);
     }
 
+    /** The currency of its prices; empty where there are none. */
+    public Optional<String> currency() {
+        return Counting.currency(steps, targets, prices);
+    }
+
     /** The same recipe with other steps. */
     public Recipe withSteps(List<Step> others) {
         return new Recipe(
