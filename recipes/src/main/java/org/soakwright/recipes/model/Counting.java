@@ -74,6 +74,11 @@ public final class Counting {
                 .toList();
     }
 
+    /** The currency in which anything has a price or a limit; empty where nothing has. */
+    static Optional<String> currency(List<Step> steps, List<Target> targets, @Nullable Prices prices) {
+        return money(steps, targets, prices).stream().findFirst().map(Counting::currency);
+    }
+
     private static List<Quantity> money(List<Step> steps, List<Target> targets, @Nullable Prices prices) {
         Stream<Quantity> ofRecipe =
                 prices == null ? Stream.of() : Stream.concat(Stream.ofNullable(prices.time()), parts(prices.liquor()));

@@ -100,6 +100,11 @@ public record Recipe(
         return between == null ? new Gap.None() : new Gap.Transfer(between);
     }
 
+    /** The currency of its prices; empty where there are none. */
+    public Optional<String> currency() {
+        return Counting.currency(steps, targets, prices);
+    }
+
     /** The same recipe with other steps. */
     public Recipe withSteps(List<Step> others) {
         return new Recipe(

@@ -33,7 +33,9 @@ public enum Kind {
     PER_AMOUNT("an amount per volume", "2 mol/L", "mol/L, mmol/L, mol/m3", Atoms.quotients(Atoms.AMOUNT, Atoms.VOLUME)),
     MOLAR_MASS("a molar mass", "58.44 g/mol", "g/mol, kg/mol", Atoms.quotients(Atoms.MASS, List.of(Atoms.MOLE))),
     TEMPERATURE_DIFFERENCE("a difference in temperature", "2 K", "K", List.of(Unit.of("K", "1"))),
-    SATURATION("a share of saturation", "75 % of saturation", "% of saturation", Atoms.SATURATION);
+    SATURATION("a share of saturation", "75 % of saturation", "% of saturation", Atoms.SATURATION),
+    POWER("a power", "40 kW", "kW, W", Atoms.POWER),
+    MASS_FLOW("a mass per time", "300 kg/h", "kg/h, kg/min, t/h", Atoms.quotients(Atoms.MASS, Atoms.TIME));
 
     private final String label;
     private final String example;

@@ -42,7 +42,9 @@ class UnitTableTest {
             Map.entry(Kind.PER_AMOUNT, "mol/m3"),
             Map.entry(Kind.MOLAR_MASS, "kg/mol"),
             Map.entry(Kind.TEMPERATURE_DIFFERENCE, "K"),
-            Map.entry(Kind.SATURATION, "1"));
+            Map.entry(Kind.SATURATION, "1"),
+            Map.entry(Kind.POWER, "W"),
+            Map.entry(Kind.MASS_FLOW, "kg/s"));
 
     static Stream<Arguments> everyUnit() {
         return Arrays.stream(Kind.values())
