@@ -17,16 +17,10 @@ public record Schedule(Shop shop, List<Placed> jobs) {
                 .orElse(0);
     }
 
-    /** Seconds after its due moment, not below 0. */
-    public long late(Placed placed) {
-        long due = placed.job().due().orElse(Moments.NEVER);
-        return Math.max(0, placed.finishes(shop.carriage()) - due);
-    }
-
     /** Lateness times weight, over all jobs. */
     public double lateness() {
         return jobs.stream()
-                .mapToDouble(placed -> placed.job().weight() * late(placed))
+                .mapToDouble(placed -> placed.job().lateness(placed.finishes(shop.carriage())))
                 .sum();
     }
 

@@ -114,13 +114,12 @@ public final class Search {
 
     private State first() {
         Comparator<Integer> byDue =
-                Comparator.comparingLong((Integer j) -> jobs.get(j).due().orElse(Moments.NEVER));
+                Comparator.comparingLong((Integer j) -> jobs.get(j).due());
         Comparator<Integer> byReady = Comparator.comparingLong(j -> jobs.get(j).ready());
         Comparator<Integer> byLength = Comparator.comparingLong(j -> -length(jobs.get(j)));
         Comparator<Integer> byWeight =
                 Comparator.comparingDouble(j -> -jobs.get(j).weight());
-        Comparator<Integer> bySlack =
-                Comparator.comparingLong(j -> jobs.get(j).due().orElse(Moments.NEVER) - length(jobs.get(j)));
+        Comparator<Integer> bySlack = Comparator.comparingLong(j -> jobs.get(j).due() - length(jobs.get(j)));
         List<Comparator<Integer>> rules = List.of(
                 byDue.thenComparing(byWeight).thenComparing(byLength),
                 bySlack.thenComparing(byReady),
@@ -199,8 +198,7 @@ public final class Search {
     private void sortByDue(int[] off) {
         int[] sorted = Arrays.stream(off)
                 .boxed()
-                .sorted(Comparator.comparingLong(
-                        (Integer j) -> jobs.get(j).due().orElse(Moments.NEVER)))
+                .sorted(Comparator.comparingLong((Integer j) -> jobs.get(j).due()))
                 .mapToInt(Integer::intValue)
                 .toArray();
         System.arraycopy(sorted, 0, off, 0, off.length);
@@ -226,8 +224,7 @@ public final class Search {
     private double badness(State state, int job) {
         Placement.Outcome outcome = state.of(job);
         long finishes = outcome.placed().finishes(shop.carriage());
-        long late = Math.max(0, finishes - jobs.get(job).due().orElse(Moments.NEVER));
-        return (outcome.met() ? 0 : 1e15) + 1e3 * jobs.get(job).weight() * late + finishes;
+        return (outcome.met() ? 0 : 1e15) + 1e3 * jobs.get(job).lateness(finishes) + finishes;
     }
 
     /** A job and others that are on the floor about the same time. */
