@@ -228,7 +228,7 @@ public final class Run {
     }
 
     /** A batch of a changed recipe held to what this run's targets would be, reading at stated values times what sureness was worth here. */
-    Batch holding(Batch other) {
+    public Batch holding(Batch other) {
         double[] own = batch.assurance().margins();
         for (int r : batch.assurance().held()) {
             double stated = stated(batch.requirements().get(r));
@@ -333,6 +333,27 @@ public final class Run {
                 content.species(),
                 content.gauge().gradient(courses.get(content.species()), content.stage()),
                 stageSeconds());
+    }
+
+    /**
+     * How far each requirement of the targets is missed, and how that goes with the durations: nearly straight, above zero where missed.
+     *
+     * @param slopes of each by the duration of each step, 1/s
+     */
+    public record Misses(double[] values, double[][] slopes) {}
+
+    /** Of every side of every target, for every grade it holds in. */
+    public Misses misses() {
+        List<Requirement> all = batch.requirements();
+        double[] values = new double[all.size()];
+        double[][] slopes = new double[all.size()][];
+        for (int r = 0; r < values.length; r++) {
+            // Within rounding of the limit is met, so that this and the targets never disagree.
+            double miss = miss(all.get(r));
+            values[r] = meets(all.get(r)) ? Math.min(miss, 0) : Math.max(miss, Double.MIN_NORMAL);
+            slopes[r] = missGradient(all.get(r));
+        }
+        return new Misses(values, slopes);
     }
 
     private State state(Requirement requirement, boolean sloping) {

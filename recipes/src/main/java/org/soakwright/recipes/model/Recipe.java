@@ -105,6 +105,40 @@ public record Recipe(
         return Counting.currency(steps, targets, prices);
     }
 
+    /** The same recipe for another lot. */
+    public Recipe withLot(Lot other) {
+        return new Recipe(
+                place,
+                title,
+                products,
+                other,
+                species,
+                between,
+                steps,
+                targets,
+                minimise,
+                prices,
+                allowedBy,
+                confidence);
+    }
+
+    /** The same recipe with other steps, and nothing between them but what they say. */
+    public Recipe running(List<Step> others) {
+        return new Recipe(
+                place,
+                title,
+                products,
+                lot,
+                species,
+                null,
+                others,
+                targets,
+                minimise,
+                prices,
+                allowedBy,
+                confidence);
+    }
+
     /** The same recipe with other steps. */
     public Recipe withSteps(List<Step> others) {
         return new Recipe(

@@ -63,7 +63,7 @@ final class Floor {
                         .take(
                                 visit.start(),
                                 visit.end(),
-                                sign * job.phase(k).draws().get(u));
+                                sign * job.phase(k).draw(visit.station(), u));
             }
             if (k + 1 == job.size() || !job.phase(k + 1).before().stays()) {
                 Station station = shop.stations().get(visit.station());
@@ -105,11 +105,12 @@ final class Floor {
     }
 
     /** When a phase may go on for what it draws and for whom it needs. */
-    Moments conditions(Phase phase, long from, long to) {
+    Moments conditions(Phase phase, int station, long from, long to) {
         Moments good = phase.attended() ? shop.staffing().shifts().within(from, to) : Moments.of(from, to);
         for (int u = 0; u < utilities.size(); u++) {
-            if (phase.draws().get(u) > 0) {
-                good = good.and(utilities.get(u).room(phase.draws().get(u), from, to));
+            long draw = phase.draw(station, u);
+            if (draw > 0) {
+                good = good.and(utilities.get(u).room(draw, from, to));
             }
         }
         return good;

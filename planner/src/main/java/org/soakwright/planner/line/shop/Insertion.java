@@ -137,7 +137,7 @@ final class Insertion {
             return;
         }
         long last = Math.min(to, until);
-        Moments calm = floor.conditions(job.phase(k), begin, until);
+        Moments calm = floor.conditions(job.phase(k), station, begin, until);
         Moments lasting = job.phase(k).lasting().within(least[k], most[k]);
         Moments leaving = Moments.NONE;
         for (int i = calm.interval(landing.first()); i < calm.size() && calm.from(i) <= landing.last(); i++) {

@@ -1,5 +1,6 @@
 package org.soakwright.planner.line.shop;
 
+import java.util.Collections;
 import java.util.List;
 
 /**
@@ -9,9 +10,9 @@ import java.util.List;
  * @param lasting how long it may last, s
  * @param attended whether it must lie within hours in which somebody is there
  * @param before how the job comes to it from the phase before; not asked of the first
- * @param draws what it takes of each utility, in the order of the shop's; one of each
+ * @param draws what it takes of each utility there, in the order of the shop's: a list for each of the stations
  */
-public record Phase(List<Integer> stations, Moments lasting, boolean attended, Joint before, List<Long> draws) {
+public record Phase(List<Integer> stations, Moments lasting, boolean attended, Joint before, List<List<Long>> draws) {
     private static final long MINUTE = 60;
 
     public Phase {
@@ -20,6 +21,20 @@ public record Phase(List<Integer> stations, Moments lasting, boolean attended, J
         if (stations.isEmpty() || lasting.isEmpty() || lasting.first() < 0) {
             throw new IllegalArgumentException("a phase has a station and a duration");
         }
+        if (draws.size() != stations.size()) {
+            throw new IllegalArgumentException("a phase draws something in each of its stations");
+        }
+    }
+
+    /** In stations that draw nothing. */
+    public static Phase of(List<Integer> stations, Moments lasting, boolean attended, Joint before) {
+        return new Phase(stations, lasting, attended, before, Collections.nCopies(stations.size(), List.of()));
+    }
+
+    /** What it takes of a utility in one of its stations. */
+    long draw(int station, int utility) {
+        List<Long> there = draws.get(stations.indexOf(station));
+        return there.isEmpty() ? 0 : there.get(utility);
     }
 
     /** The shortest, s. */
