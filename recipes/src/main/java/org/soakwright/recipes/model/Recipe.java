@@ -100,6 +100,17 @@ public record Recipe(
         return between == null ? new Gap.None() : new Gap.Transfer(between);
     }
 
+    /** All that lies before, between and within steps, s: from the first of them, from 0, up to but without the other. */
+    public double gapSeconds(int from, int to) {
+        double sum = 0;
+        for (int i = from; i < to; i++) {
+            Step step = steps.get(i);
+            sum += gapBefore(i).seconds()
+                    + (step.fills() - 1) * step.gapBetweenFills().seconds();
+        }
+        return sum;
+    }
+
     /** The same recipe with other steps. */
     public Recipe withSteps(List<Step> others) {
         return new Recipe(
