@@ -5,6 +5,7 @@ import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.conditions.Known;
 import org.soakwright.planner.conditions.Lag;
+import org.soakwright.recipes.model.Gap;
 import org.soakwright.recipes.model.Goal;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
@@ -123,12 +124,12 @@ public final class Batch {
         lastStage = new int[recipe.steps().size()];
         firstStage = new int[recipe.steps().size()];
         for (int k = slots.size() - 1; k >= 0; k--) {
-            if (slots.get(k).part() > 0) {
+            if (!slots.get(k).isGap()) {
                 firstStage[slots.get(k).step()] = k;
             }
         }
         for (int k = 0; k < slots.size(); k++) {
-            if (slots.get(k).part() > 0) {
+            if (!slots.get(k).isGap()) {
                 lastStage[slots.get(k).step()] = k;
             }
         }
@@ -256,7 +257,7 @@ public final class Batch {
     boolean exchanges(int stage) {
         Translation.Slot slot = slots.get(stage);
         boolean onlyRests = recipe.steps().stream().allMatch(Step.Rest.class::isInstance);
-        return onlyRests || (slot.part() > 0 && !(recipe.steps().get(slot.step()) instanceof Step.Rest));
+        return onlyRests || (!slot.isGap() && !(recipe.steps().get(slot.step()) instanceof Step.Rest));
     }
 
     /** All the time in which the pieces exchange something, s. */
@@ -295,17 +296,14 @@ public final class Batch {
     private Unsound tooShort(StageTooShort cause, int species, double[] seconds) {
         Translation.Slot slot = slots.get(cause.stage());
         Step step = recipe.steps().get(slot.step());
-        boolean between = slot.part() == 0 && recipe.between() != null;
-        double shortest = between ? cause.shortest() : cause.shortest() / slot.part();
+        double shortest = slot.isGap() ? cause.shortest() : cause.shortest() / slot.part();
         Unsound unsound = new Unsound(
-                between && recipe.between() != null
-                        ? recipe.between().place()
-                        : step.time().place(),
-                (between ? "the time between steps" : "the time of " + step.name())
+                slot.gap().place().orElse(step.time().place()),
+                lasting(slot)
                         + " is too short to be computed for "
                         + recipe.species().get(species).name()
                         + " by this version: found " + Durations.practical(seconds[cause.stage()])
-                        + (slot.part() > 0 && slot.part() < 1 ? " per fill" : "") + ", which needs more than "
+                        + (!slot.isGap() && slot.part() < 1 ? " per fill" : "") + ", which needs more than "
                         + cause.most() + " modes"
                         + (chains.get(species).lot().size() > 1
                                 ? " over " + chains.get(species).lot().size()
@@ -319,6 +317,18 @@ public final class Batch {
                         + "; write at least " + Durations.practical(Math.ceil(shortest)));
         unsound.initCause(cause);
         return unsound;
+    }
+
+    /** What lasts as long as a stage, in words. */
+    private String lasting(Translation.Slot slot) {
+        String next = recipe.steps().get(slot.next()).name();
+        if (slot.gap() instanceof Gap.Transfer) {
+            return "the time between steps";
+        }
+        if (slot.gap() instanceof Gap.Refilling) {
+            return "the changeover " + (slot.next() == slot.step() ? "between the fills of " : "before ") + next;
+        }
+        return "the time of " + next;
     }
 
     /** How a species tells the pieces apart. */
@@ -358,6 +368,12 @@ public final class Batch {
 
     int lastStage(int step) {
         return lastStage[step];
+    }
+
+    /** The stage of a fill of a step, both from 0. */
+    int stageOfFill(int step, int fill) {
+        boolean apart = recipe.steps().get(step).gapBetweenFills().lasts();
+        return firstStage[step] + (apart ? 2 : 1) * fill;
     }
 
     int step(String name) {

@@ -21,11 +21,13 @@ import org.soakwright.solver.chain.Probe;
  * that diffuse faster or slower than the recipe says: the steps that remain are planned again with that diffusivity.
  *
  * @param step from 0
- * @param seconds after the step's beginning
+ * @param seconds in liquor since the step's beginning
+ * @param clock after the step's beginning by the clock, which runs on between fills
  * @param species whose content is read
  * @param expected g/L
  */
-public record Checkpoint(int step, double seconds, String species, double expected, List<Deviation> deviations) {
+public record Checkpoint(
+        int step, double seconds, double clock, String species, double expected, List<Deviation> deviations) {
     /** The diffusivities tried, as shares of the recipe's. */
     private static final double[] FACTORS = {0.8, 1.25};
 
@@ -131,15 +133,23 @@ public record Checkpoint(int step, double seconds, String species, double expect
                 deviations.add(deviation(run, others.get(f), step, seconds, reading, FACTORS[f]));
             }
         }
-        return new Checkpoint(step, seconds, species, expected, deviations);
+        Step at = run.batch().recipe().steps().get(step);
+        int fill = fillAt(seconds, run.seconds()[step] / at.fills(), at.fills());
+        double clock = seconds + fill * at.gapBetweenFills().seconds();
+        return new Checkpoint(step, seconds, clock, species, expected, deviations);
+    }
+
+    /** In which fill a moment lies that is so far into the time in liquor; at a change of liquor in the one that goes. */
+    private static int fillAt(double seconds, double each, int fills) {
+        return Math.min(fills - 1, (int) Math.ceil(seconds / each - 1e-9) - 1);
     }
 
     private static double reading(Batch batch, double[] stepSeconds, int step, double seconds, String species) {
         int s = batch.species(species);
-        int fills = Translation.fills(batch.recipe().steps().get(step));
+        int fills = batch.recipe().steps().get(step).fills();
         double each = stepSeconds[step] / fills;
-        int fill = Math.min(fills - 1, (int) Math.ceil(seconds / each - 1e-9) - 1);
-        int stage = batch.lastStage(step) - fills + 1 + fill;
+        int fill = fillAt(seconds, each, fills);
+        int stage = batch.stageOfFill(step, fill);
         double[] upTo = new double[stage + 1];
         for (int k = 0; k < stage; k++) {
             upTo[k] = batch.slots().get(k).seconds(stepSeconds);
@@ -171,7 +181,7 @@ public record Checkpoint(int step, double seconds, String species, double expect
         Recipe recipe = batch.recipe();
         List<Time> times = new ArrayList<>();
         // Equal fills cannot be changed half-way: such a step goes on as planned, those after it make up for it.
-        boolean several = Translation.fills(recipe.steps().get(step)) > 1;
+        boolean several = recipe.steps().get(step).fills() > 1;
         boolean anythingFree = recipe.steps().stream()
                 .skip(several ? step + 1 : step)
                 .anyMatch(one -> one.time().isFree());

@@ -19,7 +19,7 @@ final class Convexity {
 
     /** Whether every target of the recipe is of that kind. */
     static boolean holds(Recipe recipe) {
-        if ((recipe.between() != null && recipe.between().si() > 0) || !uniformLiquor(recipe)) {
+        if (recipe.gapSeconds(0, recipe.steps().size()) > 0 || !uniformLiquor(recipe)) {
             return false;
         }
         for (Target target : recipe.targets()) {

@@ -12,7 +12,7 @@ import org.soakwright.recipes.model.Step;
 
 /** The totals of a recipe, all linear in the durations of its steps. */
 final class Cost {
-    private final double transferSeconds;
+    private final double gapSeconds;
     private final double standingM3;
     private final double standingMoney;
     private final double[] flowM3;
@@ -24,7 +24,7 @@ final class Cost {
     Cost(Recipe recipe) {
         List<Step> steps = recipe.steps();
         Prices prices = recipe.prices();
-        transferSeconds = recipe.between() == null ? 0 : recipe.between().si() * (steps.size() - 1);
+        gapSeconds = recipe.gapSeconds(0, steps.size());
         flowM3 = new double[steps.size()];
         moneyPerSecond = new double[steps.size()];
         moneyPerSecondOverall = prices == null ? 0 : prices.perSecond();
@@ -58,7 +58,7 @@ final class Cost {
             }
         }
         standingM3 = volume;
-        standingMoney = money + moneyPerSecondOverall * transferSeconds;
+        standingMoney = money + moneyPerSecondOverall * gapSeconds;
         countable = all;
         costed = priced && allPriced;
     }
@@ -86,7 +86,7 @@ final class Cost {
     /** What a total is before any step has lasted. */
     private double standing(Goal goal) {
         return switch (goal) {
-            case TIME -> transferSeconds;
+            case TIME -> gapSeconds;
             case LIQUOR -> standingM3;
             case COST -> standingMoney;
         };

@@ -74,8 +74,7 @@ public final class Run {
     private StepEnd ended(int step) {
         Recipe recipe = batch.recipe();
         int stage = batch.lastStage(step);
-        double between = recipe.between() == null ? 0 : recipe.between().si();
-        double from = step * between;
+        double from = recipe.gapSeconds(0, step) + recipe.gapBefore(step).seconds();
         for (int i = 0; i < step; i++) {
             from += seconds[i];
         }
@@ -102,13 +101,7 @@ public final class Run {
         }
         Step done = recipe.steps().get(step);
         return new StepEnd(
-                done,
-                from,
-                from + seconds[step],
-                List.copyOf(liquor),
-                List.copyOf(means),
-                List.copyOf(pieces),
-                mass(stage));
+                done, from, seconds[step], List.copyOf(liquor), List.copyOf(means), List.copyOf(pieces), mass(stage));
     }
 
     /** Of the lot, kg; empty where the recipe does not say how it changes. */

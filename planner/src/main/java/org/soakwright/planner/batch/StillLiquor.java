@@ -136,7 +136,7 @@ final class StillLiquor {
         for (int k = 0; k < chain.size(); k++) {
             double whole = slots.get(k).seconds(seconds);
             double[] upTo = java.util.Arrays.copyOf(done, k + 1);
-            boolean own = slots.get(k).step() == step && slots.get(k).part() > 0;
+            boolean own = slots.get(k).step() == step && !slots.get(k).isGap();
             for (int i = 0; own && i < LOOKS; i++) {
                 upTo[k] = whole * Math.pow((i + 0.5) / LOOKS, POWER);
                 double lasting = whole * (Math.pow((i + 1.0) / LOOKS, POWER) - Math.pow((double) i / LOOKS, POWER));

@@ -16,7 +16,7 @@ import org.soakwright.solver.chain.StageTooShort;
  */
 public final class Trace {
     private static final int PER_STEP = 28;
-    private static final int PER_TRANSFER = 6;
+    private static final int PER_GAP = 6;
     private static final int FEWEST = 4;
 
     /** Looks where a sketch of the chain shows what modes in their thousands would, however early a look is. */
@@ -34,11 +34,11 @@ public final class Trace {
     /**
      * One look.
      *
-     * @param step the step it belongs to; a transfer belongs to the step before
-     * @param transfer whether it lies between steps
+     * @param step the step it belongs to; a gap belongs to the step before
+     * @param gap whether it lies between steps or fills, the pieces in nothing
      * @param clock s since the start of the batch
      */
-    public record Moment(int step, boolean transfer, double clock, List<Sight> sights) {}
+    public record Moment(int step, boolean gap, double clock, List<Sight> sights) {}
 
     /**
      * One species at one moment.
@@ -124,9 +124,9 @@ public final class Trace {
         double[] done = new double[0];
         for (int k = 0; k < batch.slots().size(); k++) {
             Translation.Slot slot = batch.slots().get(k);
-            boolean transfer = slot.part() == 0;
+            boolean gap = slot.isGap();
             double whole = slot.seconds(seconds);
-            int count = transfer ? PER_TRANSFER : Math.max(PER_TRANSFER, (int) Math.ceil(PER_STEP * slot.part()));
+            int count = gap ? PER_GAP : Math.max(PER_GAP, (int) Math.ceil(PER_STEP * slot.part()));
             int modes = modes(run, k);
             count = modes > Chain.MOST_MODES || batch.isDear()
                     ? Math.min(count, OF_SKETCHES)
@@ -135,7 +135,7 @@ public final class Trace {
             for (int i = 1; i <= count; i++) {
                 // Squares: the profile moves with the root of time.
                 upTo[k] = whole * i * i / ((double) count * count);
-                look(batch, slot.step(), transfer, clock + upTo[k], all, upTo, depths)
+                look(batch, slot.step(), gap, clock + upTo[k], all, upTo, depths)
                         .ifPresent(looks::add);
             }
             done = upTo;
@@ -154,16 +154,16 @@ public final class Trace {
 
     /** Empty so early in a stage that the profile would need more modes than are kept: the next look will do. */
     private static Optional<Look> look(
-            Batch batch, int step, boolean transfer, double clock, double whole, double[] upTo, double[] depths) {
+            Batch batch, int step, boolean gap, double clock, double whole, double[] upTo, double[] depths) {
         try {
-            return Optional.of(see(batch, step, transfer, clock, whole, upTo, depths));
+            return Optional.of(see(batch, step, gap, clock, whole, upTo, depths));
         } catch (StageTooShort early) {
             return Optional.empty();
         }
     }
 
     private static Look see(
-            Batch batch, int step, boolean transfer, double clock, double whole, double[] upTo, double[] depths) {
+            Batch batch, int step, boolean gap, double clock, double whole, double[] upTo, double[] depths) {
         Recipe recipe = batch.recipe();
         int stage = upTo.length - 1;
         List<Sight> sights = new ArrayList<>();
@@ -196,6 +196,6 @@ public final class Trace {
         double[] read = batch.requirements().stream()
                 .mapToDouble(requirement -> requirement.ofPieces() ? Batch.read(requirement, state) : Double.NaN)
                 .toArray();
-        return new Look(new Moment(step, transfer, clock, List.copyOf(sights)), read, upTo.clone());
+        return new Look(new Moment(step, gap, clock, List.copyOf(sights)), read, upTo.clone());
     }
 }

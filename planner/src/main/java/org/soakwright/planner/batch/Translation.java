@@ -8,6 +8,7 @@ import org.soakwright.planner.conditions.Movement;
 import org.soakwright.recipes.model.Content;
 import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Diffusivity;
+import org.soakwright.recipes.model.Gap;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Grain;
 import org.soakwright.recipes.model.Medium;
@@ -26,8 +27,8 @@ import org.soakwright.solver.shape.Side;
 import org.soakwright.solver.stage.Surface;
 
 /**
- * A recipe in the solver's terms. A step is one stage, or one for each of its fills; the time between two steps is a stage
- * of rest at the conditions of the step before.
+ * A recipe in the solver's terms. A step is one stage, or one for each of its fills; what lies between two steps or fills is a stage of rest at
+ * the conditions of the step before, or of the step itself between its fills.
  */
 final class Translation {
     /** In the order in which the solver counts them. */
@@ -41,33 +42,45 @@ final class Translation {
         this.films = films;
     }
 
-    /** Which step each stage belongs to and what part of its time it takes; a stage between steps has a fixed time. */
-    record Slot(int step, double part, double fixedSeconds) {
+    /**
+     * Which step each stage belongs to and what part of its time it takes; a gap belongs to the step it follows, takes no part and has a time of
+     * its own.
+     *
+     * @param next the step that begins or goes on after it
+     */
+    record Slot(int step, double part, Gap gap, int next) {
+        static Slot of(int step, int fills) {
+            return new Slot(step, 1.0 / fills, new Gap.None(), step);
+        }
+
+        boolean isGap() {
+            return part == 0;
+        }
+
         double seconds(double[] stepSeconds) {
-            return fixedSeconds + part * stepSeconds[step];
+            return isGap() ? gap.seconds() : part * stepSeconds[step];
         }
     }
 
     List<Slot> slots() {
         List<Slot> slots = new ArrayList<>();
         for (int i = 0; i < recipe.steps().size(); i++) {
-            if (i > 0 && transfer() > 0) {
-                slots.add(new Slot(i - 1, 0, transfer()));
-            }
-            int fills = fills(recipe.steps().get(i));
-            for (int f = 0; f < fills; f++) {
-                slots.add(new Slot(i, 1.0 / fills, 0));
+            Step step = recipe.steps().get(i);
+            addGap(slots, i - 1, recipe.gapBefore(i), i);
+            for (int f = 0; f < step.fills(); f++) {
+                if (f > 0) {
+                    addGap(slots, i, step.gapBetweenFills(), i);
+                }
+                slots.add(Slot.of(i, step.fills()));
             }
         }
         return List.copyOf(slots);
     }
 
-    static int fills(Step step) {
-        return step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Fills fills ? fills.count() : 1;
-    }
-
-    private double transfer() {
-        return recipe.between() == null ? 0 : recipe.between().si();
+    private static void addGap(List<Slot> slots, int after, Gap gap, int next) {
+        if (gap.lasts()) {
+            slots.add(new Slot(after, 0, gap, next));
+        }
     }
 
     /** Each grade's pieces as the recipe states them, before any spread and without skins. */
@@ -129,7 +142,7 @@ final class Translation {
         Set<Integer> passing = new HashSet<>();
         List<Slot> slots = slots();
         for (int k = 0; k < slots.size(); k++) {
-            if (slots.get(k).part() == 0) {
+            if (slots.get(k).isGap()) {
                 passing.add(k);
             }
         }
@@ -178,14 +191,19 @@ final class Translation {
 
     private List<Stage> stages(Species species, List<Population> populations, int lastStep) {
         List<Stage> stages = new ArrayList<>();
-        for (int i = 0; i <= lastStep; i++) {
-            if (i > 0 && transfer() > 0) {
-                stages.add(rest(species, recipe.steps().get(i - 1)));
+        List<Stage> ofSteps = new ArrayList<>();
+        for (Slot slot : slots()) {
+            if (slot.next() > lastStep) {
+                break;
             }
-            Stage stage = stage(species, i, populations);
-            for (int f = 0; f < fills(recipe.steps().get(i)); f++) {
-                stages.add(stage);
+            if (slot.isGap()) {
+                stages.add(rest(species, recipe.steps().get(slot.step())));
+                continue;
             }
+            if (ofSteps.size() == slot.step()) {
+                ofSteps.add(stage(species, slot.step(), populations));
+            }
+            stages.add(ofSteps.get(slot.step()));
         }
         return stages;
     }

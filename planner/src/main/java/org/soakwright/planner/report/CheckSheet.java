@@ -27,6 +27,12 @@ public final class CheckSheet {
                 + count(recipe.targets().size(), "target") + "."));
         lines.add("");
         lines.addAll(GroupTable.section(recipe, checked.groups()).lines(style));
+        List<String> handling = HandlingWords.of(recipe);
+        if (!handling.isEmpty()) {
+            lines.add("");
+            lines.add(style.heading("Handling"));
+            handling.forEach(said -> lines.addAll(Prose.point(said)));
+        }
         List<String> pieces = PieceLines.of(recipe, checked.shapes());
         if (!pieces.isEmpty()) {
             lines.add("");

@@ -115,7 +115,7 @@ public record Findings(String title, List<String> about, List<String> answer, bo
 
     private static void body(Run run, List<String> binds, Optional<LocalDateTime> start, List<Section> sections) {
         StepTables tables = new StepTables(run);
-        sections.add(Section.of(STEPS, "Steps", tables.steps(start), tables.transfers()));
+        sections.add(Section.of(STEPS, "Steps", tables.steps(start), tables.handling()));
         Table liquor = tables.liquor();
         if (!liquor.isEmpty()) {
             sections.add(Section.of(LIQUOR, "Liquor to make up", liquor, tables.clinging()));

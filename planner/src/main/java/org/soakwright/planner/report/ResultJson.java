@@ -143,7 +143,7 @@ public final class ResultJson {
     private void step(JsonText json, StepEnd end) throws IOException {
         json.string("name", end.step().name());
         json.string("kind", end.step().kind());
-        json.number("seconds", end.to() - end.from());
+        json.number("seconds", end.seconds());
         json.object("liquor", () -> {
             for (StepEnd.Liquor liquor : end.liquor()) {
                 json.object(liquor.species(), () -> {

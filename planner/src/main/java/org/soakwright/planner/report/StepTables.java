@@ -55,7 +55,7 @@ final class StepTables {
                     number(i),
                     end.step().name(),
                     end.step().kind(),
-                    Durations.practical(end.to() - end.from()),
+                    Durations.practical(end.seconds()),
                     Durations.clock(end.from()) + " – " + Durations.clock(end.to()),
                     Wording.temperature(end.step())));
             start.ifPresent(
@@ -69,12 +69,17 @@ final class StepTables {
         return new Table().column("", "No.", Table.Kind.NUMBER, grouped);
     }
 
-    List<String> transfers() {
+    /** What lies between steps and fills, and how the lot is handled. */
+    List<String> handling() {
+        List<String> notes = new ArrayList<>();
         Quantity between = recipe.between();
-        return between == null || ends.size() < 2
-                ? List.of()
-                : List.of("Between steps " + Durations.practical(between.si())
-                        + " to drain and transfer; the clock counts them.");
+        if (between != null) {
+            HandlingWords.transferred(recipe)
+                    .ifPresent(where -> notes.add("Between " + where + " " + Durations.practical(between.si())
+                            + " to drain and transfer; the clock counts them."));
+        }
+        notes.addAll(HandlingWords.of(recipe));
+        return notes;
     }
 
     Table liquor() {
@@ -108,7 +113,7 @@ final class StepTables {
         for (Species species : solutes) {
             double strength = wet.liquor().kgPerM3(species.name());
             table.row(with(
-                    head, species.name(), strength(wet, species, strength), toDissolve(strength, all, fills(wet))));
+                    head, species.name(), strength(wet, species, strength), toDissolve(strength, all, wet.fills())));
         }
     }
 
@@ -128,9 +133,9 @@ final class StepTables {
         if (fill.isEmpty()) {
             return fill;
         }
-        double volume = fills(wet) * fill.getAsDouble();
+        double volume = wet.fills() * fill.getAsDouble();
         if (wet instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Flow flow) {
-            volume += flow.rate().si() * (ends.get(step).to() - ends.get(step).from());
+            volume += flow.rate().si() * ends.get(step).seconds();
         }
         return OptionalDouble.of(volume);
     }
@@ -144,11 +149,7 @@ final class StepTables {
     }
 
     private static String fill(Step.Wet wet, OptionalDouble fill) {
-        return (fills(wet) > 1 ? fills(wet) + " x " : "") + litres(fill);
-    }
-
-    private static int fills(Step.Wet wet) {
-        return wet instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Fills fills ? fills.count() : 1;
+        return (wet.fills() > 1 ? wet.fills() + " x " : "") + litres(fill);
     }
 
     private static String flow(Step.Wet wet) {

@@ -72,7 +72,10 @@ public final class RecipeFacts implements Facts {
         return recipe.products();
     }
 
-    /** The time between steps is a rest as warm as the step before it. */
+    /**
+     * What lies between steps is a rest as warm as the step before it. The fills of a step are one stay, all that lies between them another: a
+     * caution about long stays is not lost where a changeover parts one.
+     */
     @Override
     public List<Stay> steps() {
         List<Stay> stays = new ArrayList<>();
@@ -81,12 +84,16 @@ public final class RecipeFacts implements Facts {
             Quantity temperature = step.temperature();
             OptionalDouble kelvin = temperature == null ? OptionalDouble.empty() : OptionalDouble.of(temperature.si());
             stays.add(new Stay(StepKind.of(step), kelvin, seconds[i]));
-            Quantity between = recipe.between();
-            if (between != null && i < seconds.length - 1) {
-                stays.add(new Stay(StepKind.REST, kelvin, between.si()));
-            }
+            rest(stays, kelvin, (step.fills() - 1) * step.gapBetweenFills().seconds());
+            rest(stays, kelvin, i < seconds.length - 1 ? recipe.gapBefore(i + 1).seconds() : 0);
         }
         return stays;
+    }
+
+    private static void rest(List<Stay> stays, OptionalDouble kelvin, double seconds) {
+        if (seconds > 0) {
+            stays.add(new Stay(StepKind.REST, kelvin, seconds));
+        }
     }
 
     @Override

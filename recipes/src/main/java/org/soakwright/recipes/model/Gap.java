@@ -1,5 +1,6 @@
 package org.soakwright.recipes.model;
 
+import java.util.Optional;
 import org.soakwright.recipes.text.Place;
 
 /** Time in which the pieces are in nothing: before a step, or between two of its fills. They rest at the conditions of the step they come from. */
@@ -10,6 +11,11 @@ public sealed interface Gap {
     /** Whether there is any. */
     default boolean lasts() {
         return seconds() > 0;
+    }
+
+    /** Where it is stated; empty where there is none. */
+    default Optional<Place> place() {
+        return Optional.empty();
     }
 
     /** The next step or fill begins at once. */
@@ -27,8 +33,9 @@ public sealed interface Gap {
             return between.si();
         }
 
-        public Place place() {
-            return between.place();
+        @Override
+        public Optional<Place> place() {
+            return Optional.of(between.place());
         }
     }
 
@@ -39,8 +46,9 @@ public sealed interface Gap {
             return changeover.seconds();
         }
 
-        public Place place() {
-            return changeover.place();
+        @Override
+        public Optional<Place> place() {
+            return Optional.of(changeover.place());
         }
     }
 }

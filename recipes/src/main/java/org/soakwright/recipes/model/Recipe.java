@@ -125,18 +125,18 @@ public record Recipe(
     /** The same recipe with other steps, and nothing between them but what they say. */
     public Recipe running(List<Step> others) {
         return new Recipe(
-                place,
-                title,
-                products,
-                lot,
-                species,
-                null,
-                others,
-                targets,
-                minimise,
-                prices,
-                allowedBy,
-                confidence);
+                place, title, products, lot, species, null, others, targets, minimise, prices, allowedBy, confidence);
+    }
+
+    /** All that lies before, between and within steps, s: from the first of them, from 0, up to but without the other. */
+    public double gapSeconds(int from, int to) {
+        double sum = 0;
+        for (int i = from; i < to; i++) {
+            Step step = steps.get(i);
+            sum += gapBefore(i).seconds()
+                    + (step.fills() - 1) * step.gapBetweenFills().seconds();
+        }
+        return sum;
     }
 
     /** The same recipe with other steps. */

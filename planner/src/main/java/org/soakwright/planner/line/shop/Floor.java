@@ -60,10 +60,7 @@ final class Floor {
             for (int u = 0; u < utilities.size(); u++) {
                 utilities
                         .get(u)
-                        .take(
-                                visit.start(),
-                                visit.end(),
-                                sign * job.phase(k).draw(visit.station(), u));
+                        .take(visit.start(), visit.end(), sign * job.phase(k).draw(visit.station(), u));
             }
             if (k + 1 == job.size() || !job.phase(k + 1).before().stays()) {
                 Station station = shop.stations().get(visit.station());

@@ -8,12 +8,14 @@ import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.report.Figures;
+import org.soakwright.planner.report.HandlingWords;
 import org.soakwright.planner.report.PieceWords;
 import org.soakwright.planner.report.Wording;
 import org.soakwright.recipes.model.Diffusivities;
 import org.soakwright.recipes.model.Diffusivity;
 import org.soakwright.recipes.model.Faces;
 import org.soakwright.recipes.model.Film;
+import org.soakwright.recipes.model.Gap;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Grain;
 import org.soakwright.recipes.model.Medium;
@@ -261,9 +263,26 @@ final class Assumptions {
 
     private void between() {
         Quantity between = recipe.between();
-        if (between != null && recipe.steps().size() > 1) {
-            points.add("Between steps the pieces rest for " + Durations.practical(between.si())
-                    + " at the temperature of the step before; nothing leaves or enters them.");
+        List<String> drained = new ArrayList<>();
+        for (int i = 0; i < recipe.steps().size(); i++) {
+            Step step = recipe.steps().get(i);
+            if (recipe.gapBefore(i) instanceof Gap.Refilling) {
+                drained.add("before " + step.name());
+            }
+            if (step.gapBetweenFills().lasts()) {
+                drained.add("between the fills of " + step.name());
+            }
+        }
+        if (between != null) {
+            HandlingWords.transferred(recipe)
+                    .ifPresent(where -> points.add("Between " + where + " the pieces rest for "
+                            + Durations.practical(between.si())
+                            + " at the temperature of the step before; nothing leaves or enters them."));
+        }
+        if (!drained.isEmpty()) {
+            points.add(
+                    "While a vessel is drained and refilled, " + Wording.list(drained)
+                            + ", the pieces rest in it at the temperature of the liquor that goes; nothing leaves or enters them.");
         }
     }
 }

@@ -179,7 +179,7 @@ final class BatchPage {
             html.open("span", "class", "name")
                     .words((i + 1) + " " + end.step().name())
                     .close();
-            html.leaf("span", end.step().kind() + " " + Durations.practical(end.to() - end.from()), "class", "time");
+            html.leaf("span", end.step().kind() + " " + Durations.practical(end.seconds()), "class", "time");
             String more = surroundings(end.step());
             if (!more.isEmpty()) {
                 html.leaf("span", more, "class", "more");

@@ -86,7 +86,7 @@ final class Tables {
             csv.number(i + 1)
                     .text(end.step().name())
                     .text(end.step().kind())
-                    .number(end.to() - end.from())
+                    .number(end.seconds())
                     .number(end.from())
                     .number(end.to())
                     .number(temperature == null ? OptionalDouble.empty() : OptionalDouble.of(celsius(temperature)));
@@ -325,10 +325,7 @@ final class Tables {
         Csv csv = new Csv(headers);
         for (Trace.Moment moment : trace.moments()) {
             csv.number(moment.clock())
-                    .text(
-                            moment.transfer()
-                                    ? ""
-                                    : recipe.steps().get(moment.step()).name());
+                    .text(moment.gap() ? "" : recipe.steps().get(moment.step()).name());
             for (int s = 0; s < moment.sights().size(); s++) {
                 Trace.Sight sight = moment.sights().get(s);
                 csv.number(Double.isNaN(sight.liquor()) ? OptionalDouble.empty() : OptionalDouble.of(sight.liquor()));

@@ -207,7 +207,7 @@ final class Advice {
             double seconds = deviation.seconds().get(i);
             parts.add(
                     i == step
-                            ? "End at " + clock.both(run.end(i).from() + seconds)
+                            ? "End at " + clock.both(run.end(i).ending(seconds))
                             : run.end(i).step().name() + " lasts " + Durations.practical(seconds));
         }
         double added = deviation.added().orElseThrow();

@@ -14,10 +14,12 @@ import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
 import org.soakwright.planner.batch.TargetState;
 import org.soakwright.planner.report.Figures;
+import org.soakwright.planner.report.HandlingWords;
 import org.soakwright.planner.report.PieceWords;
 import org.soakwright.planner.report.Stamp;
 import org.soakwright.planner.report.TargetWords;
 import org.soakwright.planner.report.Wording;
+import org.soakwright.recipes.model.Gap;
 import org.soakwright.recipes.model.Lot;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.model.Recipe;
@@ -106,6 +108,7 @@ final class Draft {
         List<String> lines = new ArrayList<>();
         String span = clock.hasWall() ? ", from " + clock.wallWithYear(0) + " to " + clock.wallWithYear(total) : "";
         lines.add("Takes " + Durations.practical(total) + span + between() + ".");
+        lines.addAll(HandlingWords.of(recipe));
         lines.add("The clock runs in hours and minutes from the start of the first step."
                 + (clock.hasWall()
                         ? " Times of day are local, with 60 minutes to every hour: where summer time begins or ends,"
@@ -121,29 +124,31 @@ final class Draft {
 
     private String between() {
         Quantity between = recipe.between();
-        return between == null || recipe.steps().size() < 2
+        return between == null
                 ? ""
-                : ", with " + Durations.practical(between.si()) + " between steps to drain and transfer";
+                : HandlingWords.transferred(recipe)
+                        .map(where -> ", with " + Durations.practical(between.si()) + " between " + where
+                                + " to drain and transfer")
+                        .orElse("");
     }
 
     private Sheet.Part part(int index) {
         StepEnd end = run.end(index);
         Step step = end.step();
-        double seconds = end.to() - end.from();
         String temperature = Wording.temperature(step);
         List<Sheet.Moment> moments = new ArrayList<>();
-        moments.add(moment("Start", end.from(), step instanceof Step.Wet ? "pieces in the liquor" : "", "", List.of()));
+        moments.add(moment("Start", end.from(), atStart(step), "", List.of()));
         moments.addAll(fills(end));
         List<Sheet.Moment> readings = readings(index, end);
         moments.addAll(readings);
-        moments.add(moment("End", end.to(), atEnd(end), "", window(index, end)));
+        moments.add(moment("End", end.to(), atEnd(index, end), "", window(index, end)));
         moments.sort(Comparator.comparingDouble(Sheet.Moment::seconds));
         return new Sheet.Part(
                 index + 1,
                 step.name(),
-                (run.meetsTargets() ? "" : Sheet.NO_PLAN + ": ") + step.kind() + ", " + Durations.practical(seconds)
-                        + (temperature.isEmpty() ? "" : ", at " + temperature),
-                new MakeUp(recipe).of(index, seconds),
+                (run.meetsTargets() ? "" : Sheet.NO_PLAN + ": ") + step.kind() + ", "
+                        + Durations.practical(end.seconds()) + (temperature.isEmpty() ? "" : ", at " + temperature),
+                new MakeUp(recipe).of(index, end.seconds()),
                 moments,
                 notes(readings));
     }
@@ -154,22 +159,41 @@ final class Draft {
 
     /** Every fill but the first, which is the start. */
     private List<Sheet.Moment> fills(StepEnd end) {
-        int fills = MakeUp.fills(end.step());
+        int fills = end.step().fills();
         if (!(end.step() instanceof Step.Wet wet) || fills == 1) {
             return List.of();
         }
-        double each = (end.to() - end.from()) / fills;
+        Gap gap = end.step().gapBetweenFills();
         if (fills > MOST_FILLS) {
-            String words = "a fresh fill every " + Durations.practical(each) + ", " + fills + " in all";
-            return List.of(moment("Fills", end.from() + each, words, "", List.of()));
+            String words = "a fresh fill every " + Durations.practical(end.fillFrom(1) - end.from()) + ", " + fills
+                    + " in all" + drained(gap);
+            return List.of(moment("Fills", end.fillFrom(1), words, "", List.of()));
         }
-        String words = "drain, then "
-                + MakeUp.litres(wet.liquor().volumeM3(recipe.lot()).orElseThrow()) + " fresh";
+        String fresh = MakeUp.litres(wet.liquor().volumeM3(recipe.lot()).orElseThrow()) + " fresh";
         List<Sheet.Moment> moments = new ArrayList<>();
         for (int k = 1; k < fills; k++) {
-            moments.add(moment("Fill " + (k + 1), end.from() + k * each, words, "", List.of()));
+            if (gap instanceof Gap.Refilling refilling) {
+                moments.add(
+                        moment("Drain", end.fillTo(k - 1), HandlingWords.work(refilling.changeover()), "", List.of()));
+            }
+            moments.add(moment(
+                    "Fill " + (k + 1), end.fillFrom(k), gap.lasts() ? fresh : "drain, then " + fresh, "", List.of()));
         }
         return moments;
+    }
+
+    private static String drained(Gap gap) {
+        return gap instanceof Gap.Refilling refilling
+                ? "; between them " + HandlingWords.work(refilling.changeover())
+                : "";
+    }
+
+    private static String atStart(Step step) {
+        boolean wet = step instanceof Step.Wet;
+        if (step.head().handling().stays()) {
+            return wet ? "the pieces stayed, the liquor is in" : "the pieces stayed";
+        }
+        return wet ? "pieces in the liquor" : "";
     }
 
     private List<Sheet.Moment> readings(int index, StepEnd end) {
@@ -180,7 +204,7 @@ final class Draft {
                 Advice.Given given = advice.at(checkpoint);
                 moments.add(moment(
                         "Read",
-                        end.from() + checkpoint.seconds(),
+                        end.from() + checkpoint.clock(),
                         checkpoint.species() + " " + Advice.figure(checkpoint.expected()) + " g/L; "
                                 + (given.telling()
                                         ? "go on at " + given.asPlanned().shown()
@@ -208,23 +232,28 @@ final class Draft {
         return notes;
     }
 
-    private static String atEnd(StepEnd end) {
+    private String atEnd(int index, StepEnd end) {
         String weight = end.massKg().isPresent()
                 ? "the lot weighs " + Figures.measured(end.massKg().getAsDouble()) + " kg"
                 : "";
-        if (!(end.step() instanceof Step.Wet)) {
-            return weight;
-        }
-        return weight.isEmpty() ? "pieces out" : "pieces out; " + weight;
+        boolean stay = index + 1 < recipe.steps().size()
+                && recipe.steps().get(index + 1).head().handling().stays();
+        String pieces = stay ? stay(recipe.gapBefore(index + 1)) : end.step() instanceof Step.Wet ? "pieces out" : "";
+        return pieces + (pieces.isEmpty() || weight.isEmpty() ? "" : "; ") + weight;
+    }
+
+    private static String stay(Gap gap) {
+        return "pieces stay"
+                + (gap instanceof Gap.Refilling refilling ? ": " + HandlingWords.work(refilling.changeover()) : "");
     }
 
     private List<String> window(int index, StepEnd end) {
         Optional<PullWindow> window =
                 windows.stream().filter(one -> one.step() == index).findFirst();
-        return window.map(one -> List.of("Window: not before " + clock.both(end.from() + one.earliest())
+        return window.map(one -> List.of("Window: not before " + clock.both(end.ending(one.earliest()))
                         + (one.latest().isPresent()
                                 ? ", not after "
-                                        + clock.both(end.from() + one.latest().getAsDouble()) + "."
+                                        + clock.both(end.ending(one.latest().getAsDouble())) + "."
                                 : "; no later limit within three times the planned time.")))
                 .orElse(List.of());
     }

@@ -24,10 +24,6 @@ final class MakeUp {
         this.recipe = recipe;
     }
 
-    static int fills(Step step) {
-        return step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Fills fills ? fills.count() : 1;
-    }
-
     List<String> of(int index, double seconds) {
         Step step = recipe.steps().get(index);
         if (step instanceof Step.Wet wet) {
@@ -53,7 +49,7 @@ final class MakeUp {
             return "Make up " + litres(fill) + ", then let " + flow.rate() + " run through: " + litres(all) + " in "
                     + Durations.practical(seconds) + " in all; " + solutes(wet, OptionalDouble.of(all), 1) + ".";
         }
-        int fills = fills(wet);
+        int fills = wet.fills();
         String volume = fills > 1
                 ? fills + " fills of " + litres(fill) + ", " + litres(fills * fill) + " in all; "
                 : litres(fill) + "; ";
@@ -100,7 +96,7 @@ final class MakeUp {
     /** What the step in liquor before this one leaves on the pieces, m3; for a step of several fills, what a fill leaves to the next. */
     private double clinging(int index) {
         double most =
-                fills(recipe.steps().get(index)) > 1 ? dragOut(recipe.steps().get(index)) : 0;
+                recipe.steps().get(index).fills() > 1 ? dragOut(recipe.steps().get(index)) : 0;
         for (int i = index - 1; i >= 0; i--) {
             if (recipe.steps().get(i) instanceof Step.Wet) {
                 return Math.max(most, dragOut(recipe.steps().get(i)));

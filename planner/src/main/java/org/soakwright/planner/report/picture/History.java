@@ -15,7 +15,6 @@ import org.soakwright.planner.report.Way;
 import org.soakwright.recipes.model.Grade;
 import org.soakwright.recipes.model.Reading;
 import org.soakwright.recipes.model.Recipe;
-import org.soakwright.recipes.model.Renewal;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
 import org.soakwright.recipes.model.Target;
@@ -186,18 +185,12 @@ final class History {
         List<Fill> fills = new ArrayList<>();
         for (int k = 0; k < ends.size(); k++) {
             StepEnd end = ends.get(k);
-            int count = fillCount(end.step());
+            int count = end.step().fills();
             for (int f = 0; f < count; f++) {
-                double from = end.from() + (end.to() - end.from()) * f / count;
-                double to = end.from() + (end.to() - end.from()) * (f + 1) / count;
-                fill(species, k, from, to, f == count - 1).ifPresent(fills::add);
+                fill(species, k, end.fillFrom(f), end.fillTo(f), f == count - 1).ifPresent(fills::add);
             }
         }
         return fills;
-    }
-
-    static int fillCount(Step step) {
-        return step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Fills many ? many.count() : 1;
     }
 
     private java.util.Optional<Fill> fill(int species, int step, double from, double to, boolean last) {
@@ -214,7 +207,7 @@ final class History {
         for (Trace.Moment moment : trace.moments()) {
             double liquor = moment.sights().get(species).liquor();
             boolean within = moment.clock() > from + slack && moment.clock() <= to + slack;
-            if (within && moment.step() == step && !moment.transfer() && !Double.isNaN(liquor)) {
+            if (within && moment.step() == step && !moment.gap() && !Double.isNaN(liquor)) {
                 at[n] = moment.clock();
                 held[n++] = liquor;
             }

@@ -68,10 +68,11 @@ final class Ribbon {
             double to = panel.x(end.to());
             double gap = to - from > 6 ? 1 : 0;
             sheet.fill(new Rectangle2D.Double(from + gap, top, to - from - 2 * gap, HEIGHT), look.ribbon());
-            int fills = History.fillCount(end.step());
+            int fills = end.step().fills();
             for (int f = 1; f < fills && fills <= MOST_FILLS; f++) {
-                double at = panel.x(end.from() + (end.to() - end.from()) * f / fills);
-                sheet.fill(new Rectangle2D.Double(at - 0.5, top, 1, HEIGHT), look.ground());
+                double left = panel.x(end.fillTo(f - 1));
+                double right = panel.x(end.fillFrom(f));
+                sheet.fill(new Rectangle2D.Double(left - 0.5, top, Math.max(1, right - left), HEIGHT), look.ground());
             }
             sheet.text(shown.get(i), (from + to) / 2, top + 15, Sheet.Anchor.CENTRE, Look.TEXT, look.ink());
         }

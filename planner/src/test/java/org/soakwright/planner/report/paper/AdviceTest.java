@@ -27,7 +27,7 @@ class AdviceTest {
     }
 
     private static Checkpoint expecting(double reading, Checkpoint.Deviation... deviations) {
-        return new Checkpoint(0, 6 * HOUR, "salt", reading, List.of(deviations));
+        return new Checkpoint(0, 6 * HOUR, 6 * HOUR, "salt", reading, List.of(deviations));
     }
 
     @Test
