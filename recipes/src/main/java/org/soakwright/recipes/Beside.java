@@ -1,9 +1,5 @@
 package org.soakwright.recipes;
 
-import java.io.IOException;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.Files;
-import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
@@ -16,6 +12,8 @@ import org.soakwright.recipes.text.Unsound;
 
 /** The lists beside a recipe: in its folder or below it, never elsewhere. Each is read once. */
 final class Beside implements Lists {
+    private static final Neighbour NEIGHBOUR = new Neighbour("list", "recipe", "thickness.csv");
+
     private final @Nullable Path recipe;
     private final Map<String, Source> read = new LinkedHashMap<>();
 
@@ -44,39 +42,9 @@ final class Beside implements Lists {
         if (known != null) {
             return known;
         }
-        Source source = Source.list(below(recipe, name, place));
+        Source source = Source.list(NEIGHBOUR.path(recipe, name, place));
         read.put(name, source);
         return source;
-    }
-
-    private static Path below(Path recipe, String name, Place place) {
-        try {
-            Path relative = Path.of(name);
-            boolean leaves = relative.getRoot() != null;
-            for (Path part : relative) {
-                leaves |= part.toString().equals("..");
-            }
-            Path list = recipe.resolveSibling(relative);
-            if (!leaves && !Files.exists(list)) {
-                throw new Unsound(
-                        place,
-                        "there is no such list beside the recipe: found " + Shown.quoted(name) + "; check the name");
-            }
-            if (leaves
-                    || !list.toRealPath().startsWith(recipe.resolveSibling("").toRealPath())) {
-                throw elsewhere(name, place);
-            }
-            return list;
-        } catch (InvalidPathException | IOException e) {
-            throw elsewhere(name, place);
-        }
-    }
-
-    private static Unsound elsewhere(String name, Place place) {
-        return new Unsound(
-                place,
-                "a list lies in the folder of its recipe or below it: found " + Shown.quoted(name)
-                        + "; write its name, such as thickness.csv");
     }
 
     /** Of the recipe, and of every list that was read. */
@@ -84,9 +52,8 @@ final class Beside implements Lists {
         if (read.isEmpty()) {
             return source.sha256();
         }
-        StringBuilder sums = new StringBuilder(source.sha256()).append('\n');
-        read.forEach((name, list) ->
-                sums.append(list.sha256()).append("  ").append(name).append('\n'));
-        return Source.sha256(sums.toString().getBytes(StandardCharsets.UTF_8));
+        Map<String, String> sums = new LinkedHashMap<>();
+        read.forEach((name, list) -> sums.put(name, list.sha256()));
+        return Neighbour.sha256(source, sums);
     }
 }

@@ -55,10 +55,6 @@ record Route(Recipe written, Recipe run, List<Leg> legs, List<Joint> joints, int
         return recipe.withLot(other);
     }
 
-    static int fills(Step step) {
-        return step instanceof Step.Rinse rinse && rinse.renewal() instanceof Renewal.Fills fills ? fills.count() : 1;
-    }
-
     int size() {
         return legs.size();
     }
@@ -105,7 +101,7 @@ record Route(Recipe written, Recipe run, List<Leg> legs, List<Joint> joints, int
 
         Route built() {
             for (int i = 0; i < written.steps().size(); i++) {
-                int fills = fills(written.steps().get(i));
+                int fills = written.steps().get(i).fills();
                 for (int f = 0; f < fills; f++) {
                     add(i, f, fills);
                 }
@@ -140,15 +136,11 @@ record Route(Recipe written, Recipe run, List<Leg> legs, List<Joint> joints, int
         }
 
         private Joint joint(int i, int fill) {
-            Changeover changeover = written.steps().get(i).head().handling().changeover();
-            if (fill > 0) {
-                return changeover == null ? new Joint.Onward() : change(changeover);
-            }
-            Gap gap = written.gapBefore(i);
+            Gap gap = fill > 0 ? written.steps().get(i).gapBetweenFills() : written.gapBefore(i);
             if (gap instanceof Gap.Refilling refilling) {
                 return change(refilling.changeover());
             }
-            if (i > 0 && written.steps().get(i).head().handling().stays()) {
+            if (fill > 0 || written.steps().get(i).head().handling().stays()) {
                 return new Joint.Onward();
             }
             long least = Math.max(moves.seconds(), (long) Math.ceil(gap.seconds()));

@@ -15,19 +15,19 @@ import org.soakwright.recipes.text.Tree;
 
 /** The keys and values of one section; unknown keys and keys of later versions are reported as it is opened. */
 final class Fields {
-    private final Section section;
+    private final Keys section;
     private final Tree.Entries entries;
     private final Map<String, Tree.Entry> byKey = new LinkedHashMap<>();
     private final Problems problems;
 
-    private Fields(Section section, Tree.Entries entries, Problems problems) {
+    private Fields(Keys section, Tree.Entries entries, Problems problems) {
         this.section = section;
         this.entries = entries;
         this.problems = problems;
         entries.entries().forEach(entry -> byKey.put(entry.key(), entry));
     }
 
-    static @Nullable Fields of(Tree tree, Section section, Problems problems) {
+    static @Nullable Fields of(Tree tree, Keys section, Problems problems) {
         Fields fields = open(tree, section, problems);
         if (fields != null) {
             fields.checkKeys(section.keys());
@@ -36,7 +36,7 @@ final class Fields {
     }
 
     /** With the species' names as keys beside those of the section; where none could be read, any may stand. */
-    static @Nullable Fields withSpecies(Tree tree, Section section, Collection<String> names, Problems problems) {
+    static @Nullable Fields withSpecies(Tree tree, Keys section, Collection<String> names, Problems problems) {
         Fields fields = open(tree, section, problems);
         if (fields != null && !names.isEmpty()) {
             Set<String> known = new LinkedHashSet<>(section.keys());
@@ -47,7 +47,7 @@ final class Fields {
     }
 
     /** Whatever its keys; for a section whose keys are names being declared. */
-    static @Nullable Fields open(Tree tree, Section section, Problems problems) {
+    static @Nullable Fields open(Tree tree, Keys section, Problems problems) {
         if (tree instanceof Tree.Entries entries) {
             return new Fields(section, entries, problems);
         }
@@ -74,7 +74,7 @@ final class Fields {
             problems.add(entry.place(), key + ": not computed yet by this version; remove it");
             return;
         }
-        String home = Section.home(key);
+        String home = section.home(key);
         String hint =
                 home.isEmpty() || home.equals(section.label()) ? Nearest.hint(key, known) : "it belongs to " + home;
         problems.unknownKey(

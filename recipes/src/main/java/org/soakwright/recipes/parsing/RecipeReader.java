@@ -29,7 +29,7 @@ import org.soakwright.recipes.text.Tree;
  * targets can be held against it even where some of it is broken.
  */
 public final class RecipeReader {
-    private static final BigDecimal LANGUAGE = BigDecimal.ONE;
+    static final BigDecimal LANGUAGE = BigDecimal.ONE;
 
     private final Lists lists;
     private final Values values;

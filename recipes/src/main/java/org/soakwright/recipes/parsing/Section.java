@@ -9,7 +9,7 @@ import java.util.Map;
  * Which keys may stand where. The JSON Schema has a definition of the same name for each, with the same keys; a test
  * holds the two together.
  */
-enum Section {
+enum Section implements Keys {
     RECIPE(
             "a recipe",
             List.of(
@@ -241,7 +241,11 @@ enum Section {
             entry("soak", "a step of its own"),
             entry("rinse", "a step of its own"),
             entry("rest", "a step of its own"),
-            entry("dry", "a step of its own"));
+            entry("dry", "a step of its own"),
+            entry("vessels", "the file of a line"),
+            entry("crew", "the file of a line"),
+            entry("moves", "the file of a line"),
+            entry("lots", "the file of a line"));
 
     private final String label;
 
@@ -257,23 +261,23 @@ enum Section {
         this.later = later;
     }
 
-    /** With its article, for messages. */
-    String label() {
+    @Override
+    public String label() {
         return label;
     }
 
-    /** Every key that means something here. */
-    List<String> keys() {
+    @Override
+    public List<String> keys() {
         return keys;
     }
 
-    /** Keys of the language that this version cannot compute here. */
-    List<String> later() {
+    @Override
+    public List<String> later() {
         return later;
     }
 
-    /** Where a key that is unknown here belongs; empty for one that is unknown everywhere. */
-    static String home(String key) {
+    @Override
+    public String home(String key) {
         return HOMES.getOrDefault(key, "");
     }
 

@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Function;
 import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
@@ -245,6 +246,34 @@ final class Values {
             return null;
         }
         return leaf.text().equals("true");
+    }
+
+    /** A whole number that an int holds; anything larger is as wrong as the largest. */
+    @Nullable
+    Integer whole(String what, @Nullable Tree tree, String example) {
+        Long count = count(what, tree, example);
+        return count == null ? null : Integer.valueOf((int) Math.max(-1, Math.min(count, Integer.MAX_VALUE)));
+    }
+
+    /** Every item of a list; none where nothing is written; null where the list or an item is broken. */
+    <T> @Nullable List<T> each(String what, @Nullable Tree tree, String example, Function<Tree, @Nullable T> read) {
+        if (tree == null) {
+            return List.of();
+        }
+        if (!(tree instanceof Tree.Items items)) {
+            if (!(tree instanceof Tree.Broken)) {
+                problems.add(tree.place(), what + " is a list: found " + tree.label() + "; write such as " + example);
+            }
+            return null;
+        }
+        List<T> all = new ArrayList<>();
+        for (Tree item : items.items()) {
+            T one = read.apply(item);
+            if (one != null) {
+                all.add(one);
+            }
+        }
+        return all.size() < items.items().size() ? null : all;
     }
 
     /** A name or a title: text on one line, never wrapped in {@code {value: …}}. */

@@ -17,23 +17,7 @@ import java.util.HexFormat;
 /** The text of a file and the fingerprint of its bytes. */
 public record Source(String file, String text, String sha256) {
     /** The largest recipe read. */
-    public static final int MOST_BYTES = 1 << 20;
-
-    /** What a file is to hold, for its size and for messages. */
-    private enum Use {
-        RECIPE("recipe", MOST_BYTES, "a recipe needs a few kilobytes"),
-        LIST("list", 8 << 20, "a list of 100 000 pieces needs less");
-
-        private final String label;
-        private final int mostBytes;
-        private final String enough;
-
-        Use(String label, int mostBytes, String enough) {
-            this.label = label;
-            this.mostBytes = mostBytes;
-            this.enough = enough;
-        }
-    }
+    public static final int MOST_BYTES = Document.RECIPE.mostBytes;
 
     /**
      * Reads a recipe file of UTF-8 text.
@@ -41,7 +25,7 @@ public record Source(String file, String text, String sha256) {
      * @throws Unsound where it is missing, unreadable, a folder, larger than 1 MiB, or not text
      */
     public static Source of(Path path) {
-        return of(path, Use.RECIPE);
+        return of(path, Document.RECIPE);
     }
 
     /**
@@ -50,10 +34,15 @@ public record Source(String file, String text, String sha256) {
      * @throws Unsound where it is missing, unreadable, a folder, larger than 8 MiB, or not text
      */
     public static Source list(Path path) {
-        return of(path, Use.LIST);
+        return of(path, Document.LIST);
     }
 
-    private static Source of(Path path, Use use) {
+    /**
+     * Reads a file of UTF-8 text.
+     *
+     * @throws Unsound where it is missing, unreadable, a folder, larger than such a one may be, or not text
+     */
+    public static Source of(Path path, Document use) {
         String file = path.toString();
         Place place = Place.of(file);
         if (!Files.exists(path)) {
@@ -75,19 +64,19 @@ public record Source(String file, String text, String sha256) {
      * @throws Unsound where they are more than 1 MiB, or not text
      */
     public static Source of(String file, byte[] bytes) {
-        return of(file, bytes, Use.RECIPE);
+        return of(file, bytes, Document.RECIPE);
     }
 
-    private static Source of(String file, byte[] bytes, Use use) {
+    private static Source of(String file, byte[] bytes, Document use) {
         if (bytes.length > use.mostBytes) {
             throw new Unsound(
                     Place.of(file),
-                    "the file is too large: found more than " + (use.mostBytes >> 20) + " MiB; " + use.enough);
+                    "the file is too large: found more than " + (use.mostBytes >> 20) + " MiB; " + use.enoughBytes);
         }
         return new Source(file, decoded(file, bytes, use), sha256(bytes));
     }
 
-    private static String decoded(String file, byte[] bytes, Use use) {
+    private static String decoded(String file, byte[] bytes, Document use) {
         CharsetDecoder decoder = StandardCharsets.UTF_8
                 .newDecoder()
                 .onMalformedInput(CodingErrorAction.REPORT)

@@ -27,29 +27,33 @@ public final class YamlReader {
     /** Deeper than any recipe, shallow enough to recurse. */
     private static final int DEEPEST = 30;
 
-    /** Far more than any recipe; bounds the work and the problems of a hostile file. */
-    private static final int MOST_VALUES = 10_000;
-
     private static final int LONGEST_REASON = 160;
 
     private final String file;
     private final Problems problems;
     private final Parser events;
+    private final Document document;
     private int values;
 
-    private YamlReader(String file, String text, Problems problems) {
+    private YamlReader(String file, String text, Document document, Problems problems) {
         LoaderOptions options = new LoaderOptions();
-        options.setCodePointLimit(Source.MOST_BYTES);
+        options.setCodePointLimit(document.mostBytes);
         this.file = file;
+        this.document = document;
         this.problems = problems;
         // The parser alone: constructing and resolving, which are never wanted, cost a good part of the start-up.
         this.events = new ParserImpl(new StreamReader(new StringReader(text)), options);
     }
 
-    /** The document in the text; null, with the problem added, where there is none to read. */
+    /** The recipe in the text; null, with the problem added, where there is none to read. */
     public static @Nullable Tree read(String file, String text, Problems problems) {
+        return read(file, text, Document.RECIPE, problems);
+    }
+
+    /** The document in the text; null, with the problem added, where there is none to read. */
+    public static @Nullable Tree read(String file, String text, Document document, Problems problems) {
         try {
-            return new YamlReader(file, text, problems).document();
+            return new YamlReader(file, text, document, problems).document();
         } catch (Unsound unsound) {
             problems.addAll(unsound.problems());
         } catch (MarkedYAMLException e) {
@@ -77,12 +81,16 @@ public final class YamlReader {
             event = events.getEvent();
         }
         if (event.is(Event.ID.StreamEnd)) {
-            throw new Unsound(Place.of(file), "the file is empty; write a recipe that begins with language: 1");
+            throw new Unsound(
+                    Place.of(file),
+                    "the file is empty; write a " + document.label + " that begins with " + document.first);
         }
         Tree root = node(event, 0);
         for (Event rest = events.getEvent(); !rest.is(Event.ID.StreamEnd); rest = events.getEvent()) {
             if (rest.is(Event.ID.DocumentStart)) {
-                throw new Unsound(place(rest), "a second document begins here; one file holds one recipe, split it");
+                throw new Unsound(
+                        place(rest),
+                        "a second document begins here; one file holds one " + document.label + ", split it");
             }
         }
         return root;
@@ -91,12 +99,14 @@ public final class YamlReader {
     private Tree node(Event event, int depth) {
         Place place = place(event);
         if (depth > DEEPEST) {
-            throw new Unsound(place, "too deep: found more than " + DEEPEST + " levels; a recipe needs fewer than ten");
-        }
-        if (++values > MOST_VALUES) {
             throw new Unsound(
                     place,
-                    "too long: found more than " + MOST_VALUES + " keys and values; a recipe needs a few hundred");
+                    "too deep: found more than " + DEEPEST + " levels; a " + document.label + " needs fewer than ten");
+        }
+        if (++values > document.mostValues) {
+            throw new Unsound(
+                    place,
+                    "too long: found more than " + document.mostValues + " keys and values; " + document.enoughValues);
         }
         if (event instanceof AliasEvent alias) {
             problems.add(

@@ -17,10 +17,14 @@ public enum LineGoal implements Word {
     /** Moves that begin at night. */
     NIGHT_MOVES;
 
-    /** Where nothing is stated: all that can be counted, in the order of this list. */
+    /** Where nothing is stated: all that can be counted, in the order of this list; a cost in one currency. */
     public static List<LineGoal> defaults(Collection<Recipe> recipes) {
         List<LineGoal> goals = new ArrayList<>(List.of(values()));
-        if (recipes.stream().allMatch(recipe -> recipe.currency().isEmpty())) {
+        long currencies = recipes.stream()
+                .flatMap(recipe -> recipe.currency().stream())
+                .distinct()
+                .count();
+        if (currencies != 1) {
             goals.remove(COST);
         }
         return List.copyOf(goals);
