@@ -17,7 +17,10 @@ import java.time.LocalTime;
 import java.time.ZonedDateTime;
 import java.util.List;
 import java.util.Objects;
+import java.util.Random;
 import java.util.Set;
+import java.util.regex.MatchResult;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
@@ -249,5 +252,59 @@ class LinesTest {
                 assertInstanceOf(Outcome.Refused.class, Recipes.read(ACCEPTED.resolve("minimal.yaml")));
         assertTrue(refused.problems().stream()
                 .anyMatch(problem -> problem.what().endsWith("found \"vessels\"; it belongs to the file of a line")));
+    }
+
+    @Test
+    void noDamageToALineOrItsListEverEscapesAsAnException() throws IOException {
+        String line = Files.readString(ACCEPTED.resolve("every-key.yaml"));
+        String listing = Files.readString(ACCEPTED.resolve("listed-with-commas.yaml"));
+        String list = Files.readString(ACCEPTED.resolve("lists/commas.csv"));
+        Files.createDirectories(folder.resolve("lists"));
+        Files.createDirectories(folder.resolve("recipes"));
+        for (String recipe : List.of("recipes/soaking.yaml", "recipes/river.yaml")) {
+            Files.copy(ACCEPTED.resolve(recipe), folder.resolve(recipe));
+        }
+        Path file = folder.resolve("line.yaml");
+        Random random = new Random(20260302);
+        int refused = 0;
+        for (int trial = 0; trial < 1500; trial++) {
+            Files.writeString(file, Damage.to(line, random));
+            refused += Lines.read(file) instanceof LineOutcome.Refused ? 1 : 0;
+        }
+        assertTrue(refused > 750, "most damage to a line is noticed: " + refused);
+        Files.writeString(file, listing);
+        refused = 0;
+        for (int trial = 0; trial < 1500; trial++) {
+            Files.writeString(folder.resolve("lists/commas.csv"), Damage.to(list, random));
+            refused += Lines.read(file) instanceof LineOutcome.Refused ? 1 : 0;
+        }
+        assertTrue(refused > 500, "much damage to a list is noticed: " + refused);
+    }
+
+    @Test
+    void aNumberBeyondAllMeasureNeverEscapesAsAnException() throws IOException {
+        String line = Files.readString(ACCEPTED.resolve("every-key.yaml"));
+        Files.createDirectories(folder.resolve("recipes"));
+        for (String recipe : List.of("recipes/soaking.yaml", "recipes/river.yaml")) {
+            Files.copy(ACCEPTED.resolve(recipe), folder.resolve(recipe));
+        }
+        Path file = folder.resolve("line.yaml");
+        List<MatchResult> numbers = Pattern.compile("(?<=: )[0-9.]+(?=[ ,}])")
+                .matcher(line)
+                .results()
+                .toList();
+        assertTrue(numbers.size() > 25, "numbers: " + numbers.size());
+        for (MatchResult number : numbers) {
+            for (String other : List.of("1e300", "-1e300", "-1")) {
+                String changed = line.substring(0, number.start()) + other + line.substring(number.end());
+                Files.writeString(file, changed);
+                boolean isName = line.startsWith("lot: ", number.start() - 5);
+                assertEquals(!isName, Lines.read(file) instanceof LineOutcome.Refused, changed);
+            }
+            for (String odd : List.of("1e-300", "99999999999")) {
+                Files.writeString(file, line.substring(0, number.start()) + odd + line.substring(number.end()));
+                Lines.read(file);
+            }
+        }
     }
 }
