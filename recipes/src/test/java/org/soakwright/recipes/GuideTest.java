@@ -79,6 +79,6 @@ class GuideTest {
                     () -> Recipes.read(recipe).toString());
             read++;
         }
-        assertEquals(8, read, "two recipes and six parts");
+        assertEquals(9, read, "two recipes and seven parts");
     }
 }
