@@ -54,7 +54,8 @@ class HandlingWordsTest {
                 List.of(
                         "Before second and third the pieces stay in the vessel of the step before: 20 min to drain, 30 min to"
                                 + " refill; the clock counts them.",
-                        "Between the fills of fills the pieces stay drained: 15 min to drain; the clock counts them.",
+                        "Between the fills of fills the pieces stay drained: 15 min to drain; the clock counts them, the time of the step does"
+                                + " not.",
                         "Somebody attends second and fills: on a line in crew hours only.",
                         "A line may hold third up to 2 h longer.",
                         "A line may hold fills no longer than the recipe says."),

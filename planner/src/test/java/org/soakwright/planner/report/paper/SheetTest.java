@@ -120,7 +120,7 @@ class SheetTest {
                         .toList());
         assertEquals("10 min to drain, 20 min to refill", moment(fills, "Drain").planned());
         assertEquals("100 L fresh", moment(fills, "Fill 2").planned());
-        assertTrue(fills.doing().contains("rinse, 45 min"), fills.doing());
+        assertTrue(fills.doing().contains("rinse, 45 min in liquor"), fills.doing());
         assertEquals("pieces out", moment(fills, "End").planned());
         assertEquals("pieces stay", moment(stays.parts().get(2), "End").planned());
         assertEquals("the pieces stayed", moment(stays.parts().get(3), "Start").planned());
