@@ -127,18 +127,19 @@ class HandlingTest {
         assertEquals(expected.end(6).from(), found.end(1).from());
     }
 
-    /** A step of fills that stays takes the changeover before it as well: 40 min, then two waters of 4 h, 40 min between them. */
+    /** A step of fills that stays takes the changeover before it as well: 40 min, then two waters of 4 h, 40 min between them at a pace of their own. */
     @Test
     void fillsThatStayHaveTheChangeoverBeforeThemToo() {
+        String own = ", diffusivity: {salt: 2e-9 m2/s}";
         Recipe fills = Recipes.of(
                 Recipes.LOINS + "between: 15 min\nsteps:",
                 Recipes.water("first", "ratio: 2 L/kg", "4 h"),
-                fills(2, "8 h, stays: true, changeover: {drain: 0 min, refill: 40 min}"));
+                fills(2, "8 h" + own + ", stays: true, changeover: {drain: 0 min, refill: 40 min}"));
         Recipe soaks = Recipes.of(
                 Recipes.LOINS + "between: 40 min\nsteps:",
                 Recipes.water("first", "ratio: 2 L/kg", "4 h"),
-                Recipes.water("a", "ratio: 1 L/kg", "4 h"),
-                Recipes.water("b", "ratio: 1 L/kg", "4 h"));
+                Recipes.water("a", "ratio: 1 L/kg", "4 h" + own),
+                Recipes.water("b", "ratio: 1 L/kg", "4 h" + own));
         Run found = new Batch(fills).follow(4 * HOUR, 8 * HOUR);
         Run expected = new Batch(soaks).follow(4 * HOUR, 4 * HOUR, 4 * HOUR);
         assertAlike(expected.end(2), found.end(1));
