@@ -82,7 +82,7 @@ class GuideTest {
                     () -> Recipes.read(recipe).toString());
             read++;
         }
-        assertEquals(8, read, "two recipes and six parts");
+        assertEquals(9, read, "two recipes and seven parts");
     }
 
     @Test
