@@ -101,7 +101,8 @@ final class Estimate {
     }
 
     private void add(Tangent tangent) {
-        if (tangents.size() < MOST_TANGENTS) {
+        // Where nothing is asked there is nothing to remember, and jobs of any length may share it.
+        if (tangent.size() > 0 && tangents.size() < MOST_TANGENTS) {
             last = tangents.size();
             tangents.add(tangent);
             int length = tangent.at.length;

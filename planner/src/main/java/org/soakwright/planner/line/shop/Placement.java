@@ -19,6 +19,16 @@ final class Placement {
     private final IdentityHashMap<Job, Known> known = new IdentityHashMap<>();
     private long placings;
 
+    /**
+     * What a placement is not to do, so that others have room.
+     *
+     * @param notBefore s; its first move begins no earlier
+     * @param without a station that it does without where it can; -1 for none
+     */
+    record Whim(long notBefore, int without) {
+        static final Whim NONE = new Whim(-Moments.NEVER, -1);
+    }
+
     /** A job placed, and whether what was asked of it holds. */
     record Outcome(Placed placed, boolean met, int style) {}
 
@@ -46,11 +56,17 @@ final class Placement {
      */
     @Nullable
     Outcome place(Floor floor, Job job, int only) {
+        return place(floor, job, only, Whim.NONE);
+    }
+
+    /** The same with a whim, which nothing is kept from the floor for. */
+    @Nullable
+    Outcome place(Floor floor, Job job, int only, Whim whim) {
         List<long[]> styles = known(job).styles();
         Outcome best = null;
         for (int s = 0; s < styles.size(); s++) {
             if (only < 0 || s == only) {
-                Placed placed = exactly(floor, job, s);
+                Placed placed = exactly(floor, job, s, whim);
                 if (placed != null && (best == null || isEarlier(floor, placed, best.placed()))) {
                     best = new Outcome(placed, true, s);
                 }
@@ -65,7 +81,7 @@ final class Placement {
         placings++;
         long[] style = styles.get(0);
         long[] most = job.phases().stream().mapToLong(Phase::longest).toArray();
-        Placed placed = new Insertion(floor, job, List.of(), style, most).place(job.ready());
+        Placed placed = new Insertion(floor, job, List.of(), style, most).place(-Moments.NEVER);
         return placed == null ? null : new Outcome(placed, isMet(placed), 0);
     }
 
@@ -84,10 +100,10 @@ final class Placement {
         return estimates.computeIfAbsent(job.physics(), Estimate::new);
     }
 
-    private @Nullable Placed exactly(Floor floor, Job job, int style) {
+    private @Nullable Placed exactly(Floor floor, Job job, int style, Whim whim) {
         Estimate estimate = estimate(job);
         for (int repair = 0; repair < MOST_REPAIRS; repair++) {
-            Placed placed = estimated(floor, job, style, estimate);
+            Placed placed = estimated(floor, job, style, estimate, whim);
             if (placed == null || estimate.exactly(placed.times()).met()) {
                 return placed;
             }
@@ -95,7 +111,7 @@ final class Placement {
         return null;
     }
 
-    private @Nullable Placed estimated(Floor floor, Job job, int style, Estimate estimate) {
+    private @Nullable Placed estimated(Floor floor, Job job, int style, Estimate estimate, Whim whim) {
         long[] durations = known(job).styles().get(style);
         Outlook outlook = new Outlook(job, estimate);
         List<Placed.Visit> done = List.of();
@@ -111,7 +127,9 @@ final class Placement {
             // With the same bounds as before, what is to come would be placed where it is.
             if (placed == null || before == null || !bounds.equalFrom(done.size(), before)) {
                 placings++;
-                Placed next = new Insertion(floor, job, done, bounds.least(), bounds.most()).place(job.ready());
+                Placed next = new Insertion(floor, job, done, bounds.least(), bounds.most())
+                        .without(whim.without())
+                        .place(whim.notBefore());
                 if (next == null) {
                     return placed;
                 }

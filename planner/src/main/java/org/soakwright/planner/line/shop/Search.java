@@ -183,11 +183,18 @@ public final class Search {
     }
 
     private void put(State state, int job, int style) {
-        Placement.Outcome outcome = placement.place(state.floor, jobs.get(job), style);
-        if (outcome == null) {
+        if (!put(state, job, style, Placement.Whim.NONE)) {
             throw new Unplaceable(jobs.get(job));
         }
-        put(state, job, outcome);
+    }
+
+    /** Whether a job could be put on. */
+    private boolean put(State state, int job, int style, Placement.Whim whim) {
+        Placement.Outcome outcome = placement.place(state.floor, jobs.get(job), style, whim);
+        if (outcome != null) {
+            put(state, job, outcome);
+        }
+        return outcome != null;
     }
 
     private void put(State state, int job, Placement.Outcome outcome) {
@@ -197,9 +204,11 @@ public final class Search {
     }
 
     /** Puts jobs on again, as long as what comes of it can still be within a limit. */
-    private @Nullable State putOn(State state, int[] off, int[] styles, Score limit) {
+    private @Nullable State putOn(State state, int[] off, int[] styles, boolean whims, Score limit) {
         for (int i = 0; i < off.length; i++) {
-            put(state, off[i], styles[i]);
+            if (!put(state, off[i], styles[i], whims ? whim(state, off[i]) : Placement.Whim.NONE)) {
+                return null;
+            }
             state.score = score(state);
             if (state.score.compareTo(limit) > 0) {
                 return null;
@@ -244,11 +253,11 @@ public final class Search {
             styles[i] = free ? -1 : state.of(off[i]).style();
             next.takeOff(off[i]);
         }
-        return putOn(next, off, styles, limit);
+        return putOn(next, off, styles, false, limit);
     }
 
     private @Nullable State changed(State state, Score limit) {
-        int[] off = near(state, seed(state), 1 + random.nextInt(Math.min(MOST_OFF, jobs.size())));
+        int[] off = near(state, seed(state), 1 + random.nextInt(Math.min(Integer.getInteger("off", 6), jobs.size())));
         State next = state.copy();
         for (int job : off) {
             next.takeOff(job);
@@ -262,11 +271,30 @@ public final class Search {
         int[] styles = new int[off.length];
         for (int i = 0; i < off.length; i++) {
             int count = Outlook.styles(jobs.get(off[i])).size();
-            styles[i] = random.nextInt(4) == 0
+            styles[i] = random.nextInt(Integer.getInteger("free", 4)) == 0
                     ? -1
                     : random.nextBoolean() ? state.of(off[i]).style() : random.nextInt(count);
         }
-        return putOn(next, off, styles, limit);
+        return putOn(next, off, styles, true, limit);
+    }
+
+    /** Mostly none; else a job gives way to another: it comes after something that the other does, or does without a station. */
+    private Placement.Whim whim(State state, int job) {
+        if (random.nextInt(100) >= Integer.getInteger("whim", 25)) {
+            return Placement.Whim.NONE;
+        }
+        if (random.nextInt(3) == 0) {
+            return new Placement.Whim(-Moments.NEVER, random.nextInt(shop.stations().size()));
+        }
+        int other = random.nextInt(jobs.size());
+        Placement.Outcome outcome = state.at[other];
+        if (outcome == null || other == job) {
+            return Placement.Whim.NONE;
+        }
+        List<Placed.Visit> visits = outcome.placed().visits();
+        Placed.Visit visit = visits.get(random.nextInt(visits.size()));
+        return new Placement.Whim(
+                (random.nextBoolean() ? visit.start() : visit.end()) - random.nextInt(2) * shop.carriage().takes(), -1);
     }
 
     private void sortByDue(int[] off) {
