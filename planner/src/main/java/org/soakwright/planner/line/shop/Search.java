@@ -19,6 +19,15 @@ public final class Search {
     private static final int MOST_OFF = 6;
     private static final int MOST_EARLIER = 12;
 
+    /** How many placings in a hundred give way to another job; more among few jobs, whose orders are soon tried. */
+    private static final int FEWEST_WHIMS = 4;
+
+    /** How many changes in a hundred place all that come after a job anew. */
+    private static final int REORDERING = 12;
+
+    /** How many changes ago a schedule may have been as good as the next one must be. */
+    private static final int MEMORY = 100;
+
     private final Shop shop;
     private final List<Job> jobs;
     private final List<Aim> aims;
@@ -98,13 +107,12 @@ public final class Search {
     public Found best(long effort) {
         State found = best == null ? first() : best;
         State now = found;
-        int MEMORY = Integer.getInteger("mem", 100);
         Score[] memory = new Score[MEMORY];
         Arrays.fill(memory, now.score);
         for (long change = 0; placement.placings() < effort && jobs.size() > 1; change++) {
             int slot = (int) (change % MEMORY);
             Score limit = memory[slot].compareTo(now.score) > 0 ? memory[slot] : now.score;
-            State next = random.nextInt(100) < Integer.getInteger("reorder", 12) ? reordered(now, limit) : changed(now, limit);
+            State next = random.nextInt(100) < REORDERING ? reordered(now, limit) : changed(now, limit);
             if (next != null) {
                 now = next;
             }
@@ -257,7 +265,7 @@ public final class Search {
     }
 
     private @Nullable State changed(State state, Score limit) {
-        int[] off = near(state, seed(state), 1 + random.nextInt(Math.min(Integer.getInteger("off", 6), jobs.size())));
+        int[] off = near(state, seed(state), 1 + random.nextInt(Math.min(MOST_OFF, jobs.size())));
         State next = state.copy();
         for (int job : off) {
             next.takeOff(job);
@@ -271,7 +279,7 @@ public final class Search {
         int[] styles = new int[off.length];
         for (int i = 0; i < off.length; i++) {
             int count = Outlook.styles(jobs.get(off[i])).size();
-            styles[i] = random.nextInt(Integer.getInteger("free", 4)) == 0
+            styles[i] = random.nextInt(4) == 0
                     ? -1
                     : random.nextBoolean() ? state.of(off[i]).style() : random.nextInt(count);
         }
@@ -280,7 +288,7 @@ public final class Search {
 
     /** Mostly none; else a job gives way to another: it comes after something that the other does, or does without a station. */
     private Placement.Whim whim(State state, int job) {
-        if (random.nextInt(100) >= Integer.getInteger("whim", 25)) {
+        if (random.nextInt(100) >= Math.max(FEWEST_WHIMS, 100 / (jobs.size() + 1))) {
             return Placement.Whim.NONE;
         }
         if (random.nextInt(3) == 0) {

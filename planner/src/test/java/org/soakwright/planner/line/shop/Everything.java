@@ -139,7 +139,8 @@ final class Everything {
             if (leaves) {
                 Station station = shop.stations().get(stations[k]);
                 long own = bits(starts[from], ends[k] + (int) (station.turnaround() / TinyShop.STEP));
-                if ((own & (taken[stations[k]] | closed(station))) != 0) {
+                // A turnaround is between one load and the next: a job that comes back itself need not wait for it.
+                if ((own & closed(station)) != 0) {
                     return null;
                 }
                 taken[stations[k]] |= own;
