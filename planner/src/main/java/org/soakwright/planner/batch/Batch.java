@@ -6,7 +6,6 @@ import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.conditions.Known;
 import org.soakwright.planner.conditions.Lag;
 import org.soakwright.recipes.model.Gap;
-import org.soakwright.recipes.model.Goal;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.Species;
 import org.soakwright.recipes.model.Step;
@@ -354,16 +353,6 @@ public final class Batch {
 
     Cost cost() {
         return cost;
-    }
-
-    /** What it costs however long its steps last, money; nothing where nothing is priced. */
-    public double standingMoney() {
-        return cost.of(Goal.COST, new double[recipe.steps().size()]);
-    }
-
-    /** What a second of a step adds to that, money. */
-    public double moneyPerSecond(int step) {
-        return cost.rate(Goal.COST, step);
     }
 
     int lastStage(int step) {

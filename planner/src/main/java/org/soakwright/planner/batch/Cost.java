@@ -11,7 +11,7 @@ import org.soakwright.recipes.model.Renewal;
 import org.soakwright.recipes.model.Step;
 
 /** The totals of a recipe, all linear in the durations of its steps. */
-final class Cost {
+public final class Cost {
     private final double gapSeconds;
     private final double standingM3;
     private final double standingMoney;
@@ -21,7 +21,7 @@ final class Cost {
     private final boolean costed;
     private final double moneyPerSecondOverall;
 
-    Cost(Recipe recipe) {
+    public Cost(Recipe recipe) {
         List<Step> steps = recipe.steps();
         Prices prices = recipe.prices();
         gapSeconds = recipe.gapSeconds(0, steps.size());
@@ -75,7 +75,7 @@ final class Cost {
     }
 
     /** Seconds, m3 or money. */
-    double of(Goal goal, double[] seconds) {
+    public double of(Goal goal, double[] seconds) {
         double sum = standing(goal);
         for (int i = 0; i < seconds.length; i++) {
             sum += rate(goal, i) * seconds[i];
@@ -93,7 +93,7 @@ final class Cost {
     }
 
     /** What one second of a step adds to a total. */
-    double rate(Goal goal, int step) {
+    public double rate(Goal goal, int step) {
         return switch (goal) {
             case TIME -> 1;
             case LIQUOR -> flowM3[step];

@@ -190,15 +190,15 @@ public final class Moments {
     }
 
     /** Puts intervals together, added by rising beginning; what touches becomes one. */
-    static final class Builder {
+    public static final class Builder {
         private long[] ends;
         private int length;
 
-        Builder(int expected) {
+        public Builder(int expected) {
             ends = new long[Math.max(2, 2 * expected)];
         }
 
-        void add(long from, long to) {
+        public void add(long from, long to) {
             if (length > 0 && from <= ends[length - 1]) {
                 ends[length - 1] = Math.max(ends[length - 1], to);
                 return;
@@ -210,7 +210,7 @@ public final class Moments {
             ends[length++] = to;
         }
 
-        Moments built() {
+        public Moments built() {
             return length == 0 ? NONE : new Moments(length == ends.length ? ends : Arrays.copyOf(ends, length));
         }
     }

@@ -1,0 +1,90 @@
+package org.soakwright.planner.line;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.OptionalLong;
+import org.soakwright.planner.batch.Progress;
+import org.soakwright.planner.batch.Run;
+import org.soakwright.planner.line.shop.Aim;
+import org.soakwright.planner.line.shop.Placed;
+import org.soakwright.planner.line.shop.Search;
+import org.soakwright.recipes.model.line.Line;
+import org.soakwright.recipes.text.Unsound;
+
+/** Schedules a line: who goes where and when, and how long each step lasts, so that every lot meets its targets. */
+public final class LinePlanner {
+    /** Placings of a job that take about a second. */
+    private static final long PLACINGS_PER_EFFORT = 6_000;
+
+    private LinePlanner() {}
+
+    /**
+     * The best schedule found. Same line and options, same schedule.
+     *
+     * @throws Unsound where a lot cannot be made on this line however late: with the place of each
+     */
+    public static LinePlan plan(Line line, Options options, Progress progress) {
+        Hall hall = new Hall(line);
+        Jobs jobs = new Jobs(line, hall, options.decoupled(), progress);
+        List<Aim> aims =
+                line.minimise().stream().map(goal -> Aim.valueOf(goal.name())).toList();
+        List<Jobs.Made> alone = jobs.of(Loads.alone(line));
+        List<Jobs.Made> made = alone;
+        Search search =
+                new Search(hall.shop(), alone.stream().map(Jobs.Made::job).toList(), aims);
+        Search.Found first = search.best(0);
+        List<Load> together =
+                Loads.together(line, alone.stream().map(Jobs.Made::load).toList(), 0);
+        if (together.size() < alone.size()) {
+            List<Jobs.Made> shared = jobs.of(together);
+            Search other =
+                    new Search(hall.shop(), shared.stream().map(Jobs.Made::job).toList(), aims);
+            Search.Found otherFirst = other.best(0);
+            if (otherFirst.score().compareTo(first.score()) < 0) {
+                made = shared;
+                search = other;
+            }
+        }
+        progress.at("scheduling", 0.5);
+        Search.Found found = search.best((long) (options.effort() * PLACINGS_PER_EFFORT));
+        return told(line, hall, made, found);
+    }
+
+    private static LinePlan told(Line line, Hall hall, List<Jobs.Made> made, Search.Found found) {
+        List<LoadPlan> loads = new ArrayList<>();
+        for (int j = 0; j < made.size(); j++) {
+            loads.add(load(hall, made.get(j), found.schedule().jobs().get(j)));
+        }
+        loads.sort(Comparator.comparingLong(
+                        (LoadPlan load) -> load.placed().begins(hall.shop().carriage()))
+                .thenComparing(load -> load.load().name()));
+        return new LinePlan(
+                line,
+                hall.clock(),
+                found.schedule(),
+                loads,
+                new LinePlan.Proof(OptionalDouble.empty(), OptionalLong.empty()),
+                List.of());
+    }
+
+    private static LoadPlan load(Hall hall, Jobs.Made made, Placed placed) {
+        Run run = made.physics().follow(placed.times());
+        Route route = made.route();
+        List<LoadPlan.LegPlan> legs = new ArrayList<>();
+        for (int k = 0; k < route.size(); k++) {
+            Placed.Visit visit = placed.visit(k);
+            legs.add(new LoadPlan.LegPlan(
+                    route.legs().get(k),
+                    route.written().steps().get(route.legs().get(k).step()).name(),
+                    route.steps()[k],
+                    hall.shop().stations().get(visit.station()).name(),
+                    visit.start(),
+                    visit.end(),
+                    visit.end(),
+                    ""));
+        }
+        return new LoadPlan(made.load(), placed, run, run.targets(), legs, List.of());
+    }
+}
