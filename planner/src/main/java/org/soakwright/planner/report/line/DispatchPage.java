@@ -10,6 +10,7 @@ import org.soakwright.planner.report.page.Shell;
 /** The dispatch list to be printed: a page for each shift, with room to tick off what is done. */
 final class DispatchPage {
     private static final String STYLE = """
+            #answer { border-color: var(--mark); }
             td:last-child { min-width: 7rem; }
             @media print {
               section + section { break-before: page; margin-top: 0; }

@@ -113,7 +113,14 @@ final class HallChart {
     private void add(Stay stay) {
         Station station = plan.schedule().shop().stations().get(stay.station());
         long until = stay.until() + station.turnaround();
-        int lane = lanes[stay.station()].of(stay.from(), until);
+        int lane = station.holdsMany() ? lanes[stay.station()].of(stay.from(), until) : 0;
+        List<TimeChart.Stay> before = stays.get(stay.station());
+        if (!station.holdsMany() && !before.isEmpty()) {
+            // A load that comes back into its own vessel need not wait for the turnaround.
+            TimeChart.Stay last = before.get(before.size() - 1);
+            busy[stay.station()] -= Math.max(0, last.after().until() - stay.from());
+            before.set(before.size() - 1, last.until(stay.from()));
+        }
         busy[stay.station()] += until - stay.from();
         List<TimeChart.Span> legs = new ArrayList<>();
         List<TimeChart.Span> changes = new ArrayList<>();
@@ -125,14 +132,8 @@ final class HallChart {
             }
         }
         int kind = account.recipeFiles().indexOf(stay.load().load().recipeFile());
-        stays.get(stay.station())
-                .add(new TimeChart.Stay(
-                        lane,
-                        kind,
-                        labels(stay.load().load()),
-                        legs,
-                        changes,
-                        new TimeChart.Span(stay.until(), until)));
+        before.add(new TimeChart.Stay(
+                lane, kind, labels(stay.load().load()), legs, changes, new TimeChart.Span(stay.until(), until)));
         if (stay.last()) {
             account.latest(stay.load())
                     .ifPresent(lot -> dues.get(stay.station())

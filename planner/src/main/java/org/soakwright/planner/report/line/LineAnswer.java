@@ -38,7 +38,10 @@ final class LineAnswer {
     }
 
     private String outcome() {
-        List<Account.Lot> late = account.lateLots();
+        List<String> late = account.lateLots().stream()
+                .map(lot -> lot.order().lot())
+                .distinct()
+                .toList();
         List<String> missing =
                 account.missing().stream().map(load -> load.load().name()).toList();
         if (late.isEmpty() && missing.isEmpty()) {
@@ -48,9 +51,9 @@ final class LineAnswer {
         }
         List<String> parts = new ArrayList<>();
         if (!late.isEmpty()) {
-            parts.add(late.size() + " of " + account.lots().size()
-                    + (account.lots().size() == 1 ? " lot is" : " lots are") + " late: "
-                    + named(late.stream().map(Account.Lot::name).toList()));
+            int all = plan.line().orders().size();
+            parts.add(late.size() + " of " + all + (all == 1 ? " lot" : " lots") + (late.size() == 1 ? " is" : " are")
+                    + " late: " + named(late));
         }
         if (!missing.isEmpty()) {
             parts.add(count(missing.size(), "load") + (missing.size() == 1 ? " misses" : " miss") + " a target: "

@@ -77,13 +77,14 @@ public final class LineFindings {
                 ? loads
                 : loads.stream().filter(load -> tables.isBad(load)).limit(most).toList();
         int left = loads.size() - shown.size();
-        List<String> notes = left == 0
-                ? List.of()
-                : List.of((shown.isEmpty() ? "All " + left : left + " more")
+        List<String> notes = new ArrayList<>(List.of("Against due in hours and minutes."));
+        if (left > 0) {
+            notes.add((shown.isEmpty() ? "All " + left : left + " more")
                         + " are in time and meet their targets; --report DIR lists them.");
+        }
         return shown.isEmpty()
                 ? new Section(LOTS, "Lots", Optional.empty(), List.of(), notes)
-                : Section.of(LOTS, "Lots", tables.lots(shown), notes);
+                : Section.of(LOTS, "Lots", tables.lots(shown, most < Integer.MAX_VALUE), notes);
     }
 
     private Section moves(int most) {

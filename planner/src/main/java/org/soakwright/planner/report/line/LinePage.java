@@ -157,7 +157,11 @@ final class LinePage {
         size("The last lot is out", times.wall(end), List.of(Times.lasting(end) + " after the start"));
         size(
                 "Lots late",
-                account.lateLots().size() + " of " + account.lots().size(),
+                account.lateLots().stream()
+                                .map(lot -> lot.order().lot())
+                                .distinct()
+                                .count()
+                        + " of " + plan.line().orders().size(),
                 plan.schedule().lateness() > 0
                         ? List.of("the latest by "
                                 + Times.lasting(account.lateLots().stream()

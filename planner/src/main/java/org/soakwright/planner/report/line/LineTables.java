@@ -5,7 +5,9 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;
+import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.line.LinePlan;
+import org.soakwright.planner.line.Load;
 import org.soakwright.planner.line.LoadPlan;
 import org.soakwright.planner.report.Figures;
 import org.soakwright.planner.report.Table;
@@ -54,22 +56,26 @@ final class LineTables {
         return !load.met() || account.latest(load).isPresent();
     }
 
-    /** A line for each load. */
-    Table lots(List<LoadPlan> loads) {
+    /**
+     * A line for each load.
+     *
+     * @param brief whether room is short
+     */
+    Table lots(List<LoadPlan> loads, boolean brief) {
         Table table = new Table()
                 .text("Lot")
                 .text("Recipe")
-                .text("Begins")
-                .text("Done")
-                .text("Due")
-                .text("Against due")
+                .number("Begins")
+                .number("Done")
+                .number("Due")
+                .number("Against due")
                 .verdict("Verdict");
         for (LoadPlan load : loads) {
             long done = load.placed().finishes(plan.schedule().shop().carriage());
             Long due = account.due(load);
             table.row(List.of(
-                    load.load().name(),
-                    account.recipeTitle(load.load().recipeFile()),
+                    brief ? briefly(load.load()) : load.load().name(),
+                    withoutEnding(load.load().recipeFile()),
                     times.wall(load.placed().begins(plan.schedule().shop().carriage())),
                     times.wall(done),
                     due == null ? "" : times.wall(due),
@@ -80,7 +86,26 @@ final class LineTables {
     }
 
     private static String against(long late) {
-        return late > 0 ? Times.lasting(late) + " late" : late == 0 ? "just in time" : Times.lasting(-late) + " early";
+        return Durations.clock(Math.abs(late)) + (late > 0 ? " late" : " early");
+    }
+
+    /** {@code L1 1/2}, {@code C1 + 3}. */
+    static String briefly(Load load) {
+        Load.Share first = load.shares().get(0);
+        int more = load.shares().size() - 1;
+        if (more == 1) {
+            return load.name();
+        }
+        return first.order().lot()
+                + (first.parts() == 1 ? "" : " " + first.part() + "/" + first.parts())
+                + (more == 0 ? "" : " + " + more);
+    }
+
+    /** {@code loin-desalting}. */
+    static String withoutEnding(String file) {
+        String name = file.substring(file.lastIndexOf('/') + 1);
+        int dot = name.lastIndexOf('.');
+        return dot > 0 ? name.substring(0, dot) : name;
     }
 
     private String verdict(LoadPlan load) {
@@ -102,10 +127,10 @@ final class LineTables {
         return points;
     }
 
+    /** Whole sentences stay apart; what are none become one. */
     private static String sentences(List<String> chain) {
-        return chain.stream()
-                .map(part -> part.endsWith(".") ? part : part + ".")
-                .collect(Collectors.joining(" "));
+        boolean whole = chain.stream().allMatch(part -> part.endsWith("."));
+        return whole ? String.join(" ", chain) : String.join("; ", chain) + ".";
     }
 
     List<String> missed() {

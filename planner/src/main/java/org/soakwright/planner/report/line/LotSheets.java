@@ -22,7 +22,10 @@ import org.soakwright.recipes.model.Step;
 /** A sheet for every load, to be printed and to go with it: where it is when, what to make up, until when it can wait, what to expect. */
 final class LotSheets {
     private static final String BLANK = "________";
+    private static final String NO_PLAN = "NOT A PLAN";
     private static final String STYLE = """
+            #answer { border-color: var(--mark); }
+            .against { font-weight: 600; color: var(--bad); }
             section section { margin-top: 1.2rem; }
             .lots p { margin: 0 0 0.2rem; }
             @media print {
@@ -86,7 +89,13 @@ final class LotSheets {
                 .close();
         load.load().shares().forEach(share -> html.open("p").words(share(load, share)).close());
         html.close();
-        List<String> bad = new ArrayList<>(LineAnswer.misses(load));
+        Cautions cautions = account.cautions().get(load.load().recipeFile());
+        List<String> stops = cautions == null ? List.of() : cautions.stops();
+        if (!load.met() || !stops.isEmpty()) {
+            html.leaf("p", NO_PLAN + (load.met() ? ": stopped by a caution" : ": misses a target"), "class", "against");
+        }
+        List<String> bad = new ArrayList<>(stops);
+        bad.addAll(LineAnswer.misses(load));
         account.latest(load).ifPresent(lot -> bad.addAll(lot.why()));
         shell.points(bad);
         part(id + "-steps", "Where it is when", steps(load));
@@ -94,7 +103,6 @@ final class LotSheets {
         if (!load.targets().isEmpty()) {
             part(id + "-targets", "Targets", targets(load));
         }
-        Cautions cautions = account.cautions().get(load.load().recipeFile());
         if (cautions != null && !cautions.shown().isEmpty()) {
             html.leaf("h3", "Cautions");
             shell.points(cautions.shown());

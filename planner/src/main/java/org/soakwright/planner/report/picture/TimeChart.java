@@ -53,6 +53,12 @@ public final class TimeChart {
             legs = List.copyOf(legs);
             changes = List.copyOf(changes);
         }
+
+        /** With the vessel in use again from a moment on. */
+        public Stay until(long moment) {
+            Span shorter = new Span(after.from(), Math.max(after.from(), Math.min(after.until(), moment)));
+            return new Stay(lane, kind, labels, legs, changes, shorter);
+        }
     }
 
     /** Something that was to be over before, in a lane of a row. */
