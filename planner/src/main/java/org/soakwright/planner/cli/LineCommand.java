@@ -92,9 +92,7 @@ final class LineCommand implements Callable<Integer> {
         LineOutcome.Accepted accepted = (LineOutcome.Accepted) outcome;
         Stamp stamp = new Stamp(Version.current(), accepted.sha256());
         String result = verify.getValue();
-        return result == null
-                ? planned(accepted.line(), options, stamp)
-                : verified(accepted.line(), result, stamp);
+        return result == null ? planned(accepted.line(), options, stamp) : verified(accepted.line(), result, stamp);
     }
 
     private Finding planned(Line read, Options options, Stamp stamp) {
@@ -111,7 +109,7 @@ final class LineCommand implements Callable<Integer> {
             throw new Refusal(Exit.BAD_INPUT, "--verify writes no report; leave --report out");
         }
         Path path = RecipeFile.path("RESULT", result);
-        List<String> broken = Verifying.of(read, Source.of(path).text());
+        List<String> broken = Verifying.NOBODY.broken(read, Source.of(path).text());
         return new Finding(
                 broken.isEmpty() ? Exit.DONE : Exit.NO_PLAN,
                 () -> VerifiedSheet.of(read, broken, session.style()),

@@ -62,7 +62,7 @@ public final class HandmadePlan {
                 loins(0, 0.25, 7, 11, 15, firstUntil),
                 loins(1, 0.5, 7.5, 11.5, 15.5, 26.25),
                 loins(0, 24.25, 32, 36, 39.5, 50),
-                cords(6, 8.5, 27.5),
+                cords(6.25, 8.5, 27.5),
                 cords(10, 12.5, 34));
         List<Jobs.Made> made = new Jobs(line, hall, false, Progress.NONE).of(loads);
         List<LoadPlan> plans = new ArrayList<>();

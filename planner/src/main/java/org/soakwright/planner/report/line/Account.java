@@ -69,8 +69,8 @@ final class Account {
         }
         moves = Moves.of(plan);
         supplies = Supplies.of(plan);
-        supplies.forEach(supply -> byLeg.computeIfAbsent(supply.leg(), key -> new ArrayList<>())
-                .add(supply));
+        supplies.forEach(supply ->
+                byLeg.computeIfAbsent(supply.leg(), key -> new ArrayList<>()).add(supply));
     }
 
     LinePlan plan() {

@@ -66,11 +66,7 @@ final class Calendar {
     /** Of what it is about and not of when. */
     private String identifier(Move move) {
         String about = String.join(
-                "\n",
-                account.plan().line().title(),
-                move.loadName(),
-                move.word(),
-                Integer.toString(move.stage()));
+                "\n", account.plan().line().title(), move.loadName(), move.word(), Integer.toString(move.stage()));
         try {
             byte[] sum = MessageDigest.getInstance("SHA-256").digest(about.getBytes(StandardCharsets.UTF_8));
             return HexFormat.of().formatHex(sum, 0, 16);

@@ -65,10 +65,18 @@ record ChartClock(
         List<TimeChart.Span> away = new ArrayList<>();
         List<TimeChart.Span> pauses = new ArrayList<>();
         if (crew != null) {
-            away.addAll(spans(clock, crew.shifts(clock.at(from).toInstant(), clock.at(until).toInstant()), n -> n == 0));
-            there.addAll(spans(clock, crew.shifts(clock.at(from).toInstant(), clock.at(until).toInstant()), n -> n > 0));
-            List<TimeChart.Span> idle =
-                    spans(clock, crew.spans(clock.at(from).toInstant(), clock.at(until).toInstant()), n -> n == 0);
+            away.addAll(spans(
+                    clock,
+                    crew.shifts(clock.at(from).toInstant(), clock.at(until).toInstant()),
+                    n -> n == 0));
+            there.addAll(spans(
+                    clock,
+                    crew.shifts(clock.at(from).toInstant(), clock.at(until).toInstant()),
+                    n -> n > 0));
+            List<TimeChart.Span> idle = spans(
+                    clock,
+                    crew.spans(clock.at(from).toInstant(), clock.at(until).toInstant()),
+                    n -> n == 0);
             for (TimeChart.Span one : idle) {
                 for (TimeChart.Span shift : there) {
                     if (one.from() < shift.until() && one.until() > shift.from()) {

@@ -43,8 +43,7 @@ final class DispatchPage {
         for (int i = 0; i < shifts.size(); i++) {
             Shifts.Worked shift = shifts.get(i);
             shell.section(
-                    new Section(
-                            id(i), shift.name(), Optional.of(tables.dispatch(shift.moves())), List.of(), List.of()),
+                    new Section(id(i), shift.name(), Optional.of(tables.dispatch(shift.moves())), List.of(), List.of()),
                     List.of());
         }
         shell.html().close();

@@ -61,9 +61,7 @@ final class HallChart {
         Lanes hands = new Lanes();
         List<TimeChart.Tick> work = account.moves().stream()
                 .map(move -> new TimeChart.Tick(
-                        hands.of(move.start(), move.end()),
-                        new TimeChart.Span(move.start(), move.end()),
-                        move.hoist()))
+                        hands.of(move.start(), move.end()), new TimeChart.Span(move.start(), move.end()), move.hoist()))
                 .toList();
         return new TimeChart.Subject(
                 "Who is in which vessel when",
@@ -136,8 +134,8 @@ final class HallChart {
                 lane, kind, labels(stay.load().load()), legs, changes, new TimeChart.Span(stay.until(), until)));
         if (stay.last()) {
             account.latest(stay.load())
-                    .ifPresent(lot -> dues.get(stay.station())
-                            .add(new TimeChart.Due(lane, lot.done() - lot.late(), lot.done())));
+                    .ifPresent(lot ->
+                            dues.get(stay.station()).add(new TimeChart.Due(lane, lot.done() - lot.late(), lot.done())));
         }
     }
 
@@ -159,7 +157,8 @@ final class HallChart {
                 .filter(outage -> outage.concerns(number))
                 .forEach(outage -> closed.add(new TimeChart.Named(
                         new TimeChart.Span(
-                                plan.clock().seconds(outage.from()), plan.clock().seconds(outage.to())),
+                                plan.clock().seconds(outage.from()),
+                                plan.clock().seconds(outage.to())),
                         outage.reason() == null ? "" : outage.reason())));
         return closed;
     }
@@ -208,10 +207,10 @@ final class HallChart {
     }
 
     private String altText() {
-        String rows = plan.schedule().shop().stations().stream().map(Station::name).collect(Collectors.joining(", "));
+        String rows =
+                plan.schedule().shop().stations().stream().map(Station::name).collect(Collectors.joining(", "));
         Map<String, Long> loads = new LinkedHashMap<>();
-        plan.loads()
-                .forEach(load -> loads.merge(account.recipeTitle(load.load().recipeFile()), 1L, Long::sum));
+        plan.loads().forEach(load -> loads.merge(account.recipeTitle(load.load().recipeFile()), 1L, Long::sum));
         String recipes = loads.entrySet().stream()
                 .map(entry -> entry.getValue() + " of " + entry.getKey())
                 .collect(Collectors.joining(", "));

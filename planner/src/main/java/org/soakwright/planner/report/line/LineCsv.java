@@ -36,12 +36,23 @@ final class LineCsv {
 
     private String lots() {
         Csv csv = new Csv(List.of(
-                "lot", "part", "parts", "load", "recipe", "mass [kg]", "ready", "due", "loaded", "done", "late [s]",
-                "targets met", "why late"));
+                "lot",
+                "part",
+                "parts",
+                "load",
+                "recipe",
+                "mass [kg]",
+                "ready",
+                "due",
+                "loaded",
+                "done",
+                "late [s]",
+                "targets met",
+                "why late"));
         for (Account.Lot lot : account.lots()) {
             csv.text(lot.order().lot())
-                    .number(lot.share().part())
-                    .number(lot.share().parts())
+                    .whole(lot.share().part())
+                    .whole(lot.share().parts())
                     .text(lot.load().load().name())
                     .text(lot.load().load().recipeFile())
                     .number(lot.share().kg())
@@ -49,7 +60,7 @@ final class LineCsv {
                     .text(Optional.ofNullable(lot.order().due()).map(Times::iso).orElse(""))
                     .text(times.iso(lot.loaded()))
                     .text(times.iso(lot.done()))
-                    .number(lot.late())
+                    .whole(lot.late())
                     .text(lot.load().met() ? "yes" : "no")
                     .text(String.join(" ", lot.why()))
                     .end();
@@ -59,17 +70,22 @@ final class LineCsv {
 
     private String steps() {
         Csv csv = new Csv(List.of(
-                "load", "step", "kind", "fill", "vessel", "start", "end", "duration [s]", "latest pull", "slack [s]",
+                "load",
+                "step",
+                "kind",
+                "fill",
+                "vessel",
+                "start",
+                "end",
+                "duration [s]",
+                "latest pull",
+                "slack [s]",
                 "limited by"));
         for (LoadPlan load : plan.loads()) {
             for (LoadPlan.LegPlan leg : load.legs()) {
                 csv.text(load.load().name())
                         .text(leg.name())
-                        .text(load.load()
-                                .recipe()
-                                .steps()
-                                .get(leg.leg().step())
-                                .kind())
+                        .text(load.load().recipe().steps().get(leg.leg().step()).kind())
                         .number(
                                 leg.leg().fills() > 1
                                         ? OptionalDouble.of(leg.leg().fill() + 1)
@@ -77,9 +93,9 @@ final class LineCsv {
                         .text(leg.vessel())
                         .text(times.iso(leg.start()))
                         .text(times.iso(leg.end()))
-                        .number(leg.seconds())
+                        .whole(leg.seconds())
                         .text(times.iso(leg.latestPull()))
-                        .number(leg.slack())
+                        .whole(leg.slack())
                         .text(leg.reason())
                         .end();
             }
@@ -89,7 +105,16 @@ final class LineCsv {
 
     private String moves() {
         Csv csv = new Csv(List.of(
-                "kind", "load", "from", "to", "for", "start", "end", "duration [s]", "heads", "heads free besides",
+                "kind",
+                "load",
+                "from",
+                "to",
+                "for",
+                "start",
+                "end",
+                "duration [s]",
+                "heads",
+                "heads free besides",
                 "hoist"));
         for (Move move : account.moves()) {
             csv.text(move.word())
@@ -99,9 +124,12 @@ final class LineCsv {
                     .text(move.step())
                     .text(times.iso(move.start()))
                     .text(times.iso(move.end()))
-                    .number(move.end() - move.start())
-                    .number(move.heads())
-                    .number(plan.line().crew() == null ? OptionalDouble.empty() : OptionalDouble.of(move.free()))
+                    .whole(move.end() - move.start())
+                    .whole(move.heads())
+                    .number(
+                            plan.line().crew() == null
+                                    ? OptionalDouble.empty()
+                                    : OptionalDouble.of((double) move.free()))
                     .text(move.hoist() ? "yes" : "no")
                     .end();
         }
@@ -111,11 +139,24 @@ final class LineCsv {
     /** A row for each species that a liquor holds, and one where it holds none: litres are said once for each liquor. */
     private String liquor() {
         Csv csv = new Csv(List.of(
-                "day", "from", "vessel", "load", "step", "fill", "kind", "volume [L]", "species", "strength [g/L]",
+                "day",
+                "from",
+                "vessel",
+                "load",
+                "step",
+                "fill",
+                "kind",
+                "volume [L]",
+                "species",
+                "strength [g/L]",
                 "mass [kg]"));
         for (Supply supply : account.supplies()) {
             if (supply.strengths().isEmpty()) {
-                head(csv, supply, true).text("").number(OptionalDouble.empty()).number(OptionalDouble.empty()).end();
+                head(csv, supply, true)
+                        .text("")
+                        .number(OptionalDouble.empty())
+                        .number(OptionalDouble.empty())
+                        .end();
             }
             boolean first = true;
             for (Map.Entry<String, Double> solute : supply.strengths().entrySet()) {

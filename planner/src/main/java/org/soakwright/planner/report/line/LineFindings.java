@@ -80,7 +80,7 @@ public final class LineFindings {
         List<String> notes = new ArrayList<>(List.of("Against due in hours and minutes."));
         if (left > 0) {
             notes.add((shown.isEmpty() ? "All " + left : left + " more")
-                        + " are in time and meet their targets; --report DIR lists them.");
+                    + " are in time and meet their targets; --report DIR lists them.");
         }
         return shown.isEmpty()
                 ? new Section(LOTS, "Lots", Optional.empty(), List.of(), notes)

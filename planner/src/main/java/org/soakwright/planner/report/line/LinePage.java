@@ -82,8 +82,9 @@ final class LinePage {
     private List<String> hands() {
         return plan.line().crew() == null
                 ? List.of("No crew is stated: somebody is taken to be there whenever a move begins.")
-                : List.of("Free besides: who is there all the while with nothing else to do. Hoist: moves at once while this"
-                        + " one lasts, of those that can be.");
+                : List.of(
+                        "Free besides: who is there all the while with nothing else to do. Hoist: moves at once while this"
+                                + " one lasts, of those that can be.");
     }
 
     private void section(Section section) {
@@ -183,10 +184,8 @@ final class LinePage {
                         ? List.of()
                         : List.of("and what is unlimited"));
         account.cost()
-                .ifPresent(cost -> size(
-                        "Cost",
-                        Wording.money(cost, account.currency().orElse("")),
-                        List.of()));
+                .ifPresent(cost ->
+                        size("Cost", Wording.money(cost, account.currency().orElse("")), List.of()));
         busiest().ifPresent(words -> size("Longest in a vessel", words.get(0), words.subList(1, words.size())));
         html.close();
     }

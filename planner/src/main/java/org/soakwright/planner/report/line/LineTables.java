@@ -86,7 +86,7 @@ final class LineTables {
     }
 
     private static String against(long late) {
-        return Durations.clock(Math.abs(late)) + (late > 0 ? " late" : " early");
+        return Durations.clock((double) Math.abs(late)) + (late > 0 ? " late" : " early");
     }
 
     /** {@code L1 1/2}, {@code C1 + 3}. */

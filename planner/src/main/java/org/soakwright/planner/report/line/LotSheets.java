@@ -84,10 +84,13 @@ final class LotSheets {
         shell.open(id, load.load().name());
         html.open("div", "class", "lots");
         html.open("p")
-                .words(account.recipeTitle(load.load().recipeFile()) + " (" + load.load().recipeFile() + "), "
+                .words(account.recipeTitle(load.load().recipeFile()) + " ("
+                        + load.load().recipeFile() + "), "
                         + Figures.made(load.load().kg()) + " kg")
                 .close();
-        load.load().shares().forEach(share -> html.open("p").words(share(load, share)).close());
+        load.load()
+                .shares()
+                .forEach(share -> html.open("p").words(share(load, share)).close());
         html.close();
         Cautions cautions = account.cautions().get(load.load().recipeFile());
         List<String> stops = cautions == null ? List.of() : cautions.stops();
@@ -115,10 +118,9 @@ final class LotSheets {
         java.time.ZonedDateTime due = share.order().due();
         String when = due == null
                 ? "no due time"
-                : "due " + times.wall(plan.clock().seconds(due))
-                        + (late > 0 ? ", late by " + Times.lasting(late) : "");
-        return "Lot " + share.name() + ": " + Figures.made(share.kg()) + " kg, "
-                + when + ", done " + times.wall(load.placed().finishes(plan.schedule().shop().carriage()));
+                : "due " + times.wall(plan.clock().seconds(due)) + (late > 0 ? ", late by " + Times.lasting(late) : "");
+        return "Lot " + share.name() + ": " + Figures.made(share.kg()) + " kg, " + when + ", done "
+                + times.wall(load.placed().finishes(plan.schedule().shop().carriage()));
     }
 
     private void part(String id, String heading, Table table) {
@@ -166,7 +168,9 @@ final class LotSheets {
                     Legs.name(leg),
                     Wording.temperature(step),
                     liquor(own),
-                    String.join("; ", own.stream().limit(1).map(LineTables::dissolve).toList()),
+                    String.join(
+                            "; ",
+                            own.stream().limit(1).map(LineTables::dissolve).toList()),
                     liquorAtPull(end),
                     piecesAtPull(end)));
         }
@@ -182,9 +186,8 @@ final class LotSheets {
                 .filter(Supply::running)
                 .mapToDouble(supply -> supply.litres().orElse(0))
                 .sum();
-        String made = fill.map(one -> one.litres().isPresent()
-                        ? Figures.made(one.litres().getAsDouble()) + " L"
-                        : "unlimited")
+        String made = fill.map(one ->
+                        one.litres().isPresent() ? Figures.made(one.litres().getAsDouble()) + " L" : "unlimited")
                 .orElse("");
         return running > 0 ? made + ", then " + Figures.made(running) + " L run in" : made;
     }
@@ -204,7 +207,8 @@ final class LotSheets {
             int species = s;
             String grades = end.pieces().size() < 2
                     ? ""
-                    : " (" + String.join(
+                    : " ("
+                            + String.join(
                                     ", ",
                                     end.pieces().stream()
                                             .map(piece -> piece.name() + " "

@@ -37,12 +37,12 @@ final class Moves {
         all.tasks.sort(byTime.thenComparing(task -> task.placed().job().name()).thenComparingInt(Placed.Task::phase));
         List<Move> moves = new ArrayList<>();
         for (Placed.Task task : all.tasks) {
-            moves.add(all.move(plan, task, java.util.Objects.requireNonNull(loads.get(task))));
+            moves.add(all.move(task, java.util.Objects.requireNonNull(loads.get(task))));
         }
         return List.copyOf(moves);
     }
 
-    private Move move(LinePlan plan, Placed.Task task, LoadPlan load) {
+    private Move move(Placed.Task task, LoadPlan load) {
         List<LoadPlan.LegPlan> legs = load.legs();
         boolean out = task.kind() == Placed.Task.Kind.UNLOAD;
         Optional<String> from = task.phase() == 0

@@ -54,6 +54,6 @@ final class Times {
 
     /** {@code 3 h 20 min}. */
     static String lasting(long seconds) {
-        return Durations.practical(seconds);
+        return Durations.practical((double) seconds);
     }
 }

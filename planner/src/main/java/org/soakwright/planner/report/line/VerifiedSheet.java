@@ -27,8 +27,7 @@ public final class VerifiedSheet {
         String answer = broken.isEmpty()
                 ? "The result breaks no rule of the line."
                 : "The result breaks " + broken.size() + (broken.size() == 1 ? " rule" : " rules") + " of the line.";
-        return BatchSheet.of(
-                new Findings(line.title(), List.of(), List.of(answer), broken.isEmpty(), sections), style);
+        return BatchSheet.of(new Findings(line.title(), List.of(), List.of(answer), broken.isEmpty(), sections), style);
     }
 
     /** For programs. */

@@ -11,7 +11,7 @@ import java.util.List;
 
 /** Draws a {@link TimeChart}: panels below each other, vessels below each other in each. */
 final class TimePanels {
-    private static final double HEAD = 36;
+    private static final double HEAD = 38;
     private static final double NIGHT = 4;
     private static final double PANEL_GAP = 22;
     private static final double PADDING = 3;

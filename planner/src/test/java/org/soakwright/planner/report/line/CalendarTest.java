@@ -25,7 +25,8 @@ class CalendarTest {
     /** 3.1: lines end in CR LF and have 75 octets at most; a space at the beginning continues the line before. */
     private List<String> unfolded() {
         assertTrue(text.endsWith("\r\n"));
-        assertFalse(text.replace("\r\n", "").contains("\n") || text.replace("\r\n", "").contains("\r"));
+        assertFalse(text.replace("\r\n", "").contains("\n")
+                || text.replace("\r\n", "").contains("\r"));
         List<String> lines = new ArrayList<>();
         for (String line : text.substring(0, text.length() - 2).split("\r\n", -1)) {
             assertTrue(line.getBytes(StandardCharsets.UTF_8).length <= 75, line);

@@ -73,11 +73,9 @@ class LineJsonTest {
             for (Object step : list(lot, "steps")) {
                 assertFalse(time(step, "start").isBefore(before));
                 before = time(step, "end");
-                assertEquals(
-                        number(step, "seconds"),
+                assertEquals(number(step, "seconds"), (double)
                         Duration.between(time(step, "start"), before).toSeconds());
-                assertEquals(
-                        number(step, "slack-seconds"),
+                assertEquals(number(step, "slack-seconds"), (double)
                         Duration.between(before, time(step, "latest-pull")).toSeconds());
             }
             assertTrue(time(lot, "done").isAfter(before));
@@ -86,8 +84,9 @@ class LineJsonTest {
 
     @Test
     void fillsAreNumberedWhereThereAreSeveral() {
-        List<Object> fills =
-                list(json, "lots", 0, "steps").stream().map(step -> at(step, "fill")).toList();
+        List<Object> fills = list(json, "lots", 0, "steps").stream()
+                .map(step -> at(step, "fill"))
+                .toList();
         assertEquals("[null, 1.0, 2.0, null]", fills.toString());
     }
 

@@ -76,7 +76,8 @@ class LineReportTest {
         Map<String, byte[]> files = written(HandmadePlan.of());
         Account account = new Account(HandmadePlan.of());
         assertEquals(1 + 6, CsvText.read(text(files, "tables/lots.csv")).size());
-        assertEquals(1 + 3 * 4 + 2 * 3, CsvText.read(text(files, "tables/steps.csv")).size());
+        assertEquals(
+                1 + 3 * 4 + 2 * 3, CsvText.read(text(files, "tables/steps.csv")).size());
         assertEquals(
                 1 + account.moves().size(),
                 CsvText.read(text(files, "tables/moves.csv")).size());
@@ -153,7 +154,8 @@ class LineReportTest {
         Account account = new Account(HandmadePlan.of());
         // The changeovers of both parts overlap from 13:30 to 13:50 and need both heads.
         List<Move> changes = account.moves().stream()
-                .filter(move -> move.step().equals("washing, fill 1 of 2") && move.loadName().startsWith("L1"))
+                .filter(move -> move.step().equals("washing, fill 1 of 2")
+                        && move.loadName().startsWith("L1"))
                 .toList();
         assertEquals(List.of(0L, 0L), changes.stream().map(Move::free).toList());
         assertEquals(1, account.moves().get(0).free());

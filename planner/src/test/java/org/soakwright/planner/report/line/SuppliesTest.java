@@ -30,14 +30,17 @@ class SuppliesTest {
         assertEquals(List.of(FRIDAY, FRIDAY), washing.stream().map(Supply::day).toList());
         assertEquals(900, washing.get(0).litres().orElseThrow(), 1e-9);
         assertEquals(1.8, washing.get(0).kg("salt"), 1e-9, "2 g/L");
-        assertEquals(List.of(FRIDAY), of("C1 + C2", "brine", false).stream().map(Supply::day).toList());
+        assertEquals(
+                List.of(FRIDAY),
+                of("C1 + C2", "brine", false).stream().map(Supply::day).toList());
         assertEquals(144, of("C1 + C2", "brine", false).get(0).kg("salt"), 1e-9, "800 L of 180 g/L");
     }
 
     @Test
     void runningWaterIsCutAtLocalMidnight() {
         List<Supply> running = of("L1 (1 of 2)", "running water", true);
-        assertEquals(List.of(FRIDAY, SATURDAY), running.stream().map(Supply::day).toList());
+        assertEquals(
+                List.of(FRIDAY, SATURDAY), running.stream().map(Supply::day).toList());
         // From 21:15 until 08:00 at 5 L/min.
         assertEquals(5 * 165, running.get(0).litres().orElseThrow(), 1e-9);
         assertEquals(5 * 480, running.get(1).litres().orElseThrow(), 1e-9);
@@ -46,7 +49,8 @@ class SuppliesTest {
     @Test
     void theNightWithAnHourMoreNeedsAnHourMore() {
         List<Supply> running = of("L2", "running water", true);
-        assertEquals(List.of(SATURDAY, SUNDAY), running.stream().map(Supply::day).toList());
+        assertEquals(
+                List.of(SATURDAY, SUNDAY), running.stream().map(Supply::day).toList());
         // Until 07:00 by the clock on the wall, eight hours after midnight.
         assertEquals(5 * 480, running.get(1).litres().orElseThrow(), 1e-9);
     }
