@@ -13,7 +13,7 @@ final class DispatchPage {
             #answer { border-color: var(--mark); }
             td:last-child { min-width: 7rem; }
             @media print {
-              section + section { break-before: page; margin-top: 0; }
+              main > section:nth-of-type(n + 3) { break-before: page; margin-top: 0; }
               thead { display: table-header-group; }
               td, th { padding-top: 0.45rem; padding-bottom: 0.45rem; }
             }

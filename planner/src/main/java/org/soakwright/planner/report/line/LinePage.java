@@ -117,6 +117,7 @@ final class LinePage {
     private void answer() {
         shell.openAnswer(findings);
         sizes();
+        html.open("div", "class", "files");
         html.leaf("h3", "To print");
         html.open("p", "class", "files");
         link("The dispatch list", LineReport.DISPATCH);
@@ -134,6 +135,7 @@ final class LinePage {
         }
         html.text(".").close();
         sheets();
+        html.close();
         shell.close();
     }
 

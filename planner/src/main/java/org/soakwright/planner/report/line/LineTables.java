@@ -191,11 +191,11 @@ final class LineTables {
                 .text("Done");
         for (Move move : moves) {
             table.row(List.of(
-                    times.hour(move.start()) + " – " + times.hour(move.end()),
+                    solid(times.hour(move.start()) + " – " + times.hour(move.end())),
                     move.word(),
                     move.loadName(),
-                    move.from().orElse(""),
-                    move.to().orElse(""),
+                    solid(move.from().orElse("")),
+                    solid(move.to().orElse("")),
                     move.step(),
                     Long.toString(move.heads()),
                     plan.line().crew() == null ? "" : Long.toString(move.free()),
@@ -203,6 +203,11 @@ final class LineTables {
                     "________"));
         }
         return table;
+    }
+
+    /** Never parted at a space. */
+    static String solid(String text) {
+        return text.replace(' ', '\u00a0');
     }
 
     private String hoist(Move move) {

@@ -29,7 +29,7 @@ final class LotSheets {
             section section { margin-top: 1.2rem; }
             .lots p { margin: 0 0 0.2rem; }
             @media print {
-              main > section + section { break-before: page; margin-top: 0; }
+              main > section:nth-of-type(n + 3) { break-before: page; margin-top: 0; }
               section section { margin-top: 0.8rem; }
             }
             """;
@@ -141,10 +141,10 @@ final class LotSheets {
         for (LoadPlan.LegPlan leg : load.legs()) {
             table.row(List.of(
                     Legs.name(leg),
-                    leg.vessel(),
-                    times.wall(leg.start()),
-                    times.wall(leg.end()),
-                    leg.slack() > 0 ? times.wall(leg.latestPull()) : "then",
+                    LineTables.solid(leg.vessel()),
+                    LineTables.solid(times.wall(leg.start())),
+                    LineTables.solid(times.wall(leg.end())),
+                    leg.slack() > 0 ? LineTables.solid(times.wall(leg.latestPull())) : "then",
                     leg.slack() > 0 ? Times.lasting(leg.slack()) : "none",
                     leg.reason(),
                     BLANK));
@@ -166,7 +166,7 @@ final class LotSheets {
             StepEnd end = load.run().end(leg.runStep());
             table.row(List.of(
                     Legs.name(leg),
-                    Wording.temperature(step),
+                    LineTables.solid(Wording.temperature(step)),
                     liquor(own),
                     String.join(
                             "; ",
