@@ -71,6 +71,9 @@ class GuideTest {
                 continue;
             }
             assertEquals("yaml", block.language());
+            if (block.part().equals("line")) {
+                continue;
+            }
             Path recipe = folder.resolve("recipe.yaml");
             Files.writeString(recipe, block.part().isEmpty() ? block.text() : whole(block));
             assertInstanceOf(
@@ -79,6 +82,23 @@ class GuideTest {
                     () -> Recipes.read(recipe).toString());
             read++;
         }
-        assertEquals(8, read, "two recipes and six parts");
+        assertEquals(9, read, "two recipes and seven parts");
+    }
+
+    @Test
+    void theLineInTheGuideIsReadWithItsListAndTheFirstRecipe(@TempDir Path folder) throws IOException {
+        for (Block block : blocks()) {
+            boolean first = block.language().equals("yaml") && !Files.exists(folder.resolve("fillets.yaml"));
+            String name = block.part().equals("line") ? "line.yaml" : first ? "fillets.yaml" : block.part();
+            if (first || block.language().equals("csv") || block.part().equals("line")) {
+                Files.writeString(folder.resolve(name), block.text());
+            }
+        }
+        Path line = folder.resolve("line.yaml");
+        LineOutcome.Accepted accepted = assertInstanceOf(
+                LineOutcome.Accepted.class,
+                Lines.read(line),
+                () -> Lines.read(line).toString());
+        assertEquals(3, accepted.line().orders().size());
     }
 }

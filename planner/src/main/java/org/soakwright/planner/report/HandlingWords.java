@@ -54,8 +54,8 @@ public final class HandlingWords {
         }
         staying.forEach((what, steps) -> said.add(
                 "Before " + Wording.list(steps) + " the pieces stay in the vessel of the step before: " + what + "."));
-        fills.forEach((what, steps) ->
-                said.add("Between the fills of " + Wording.list(steps) + " the pieces stay drained: " + what + "."));
+        fills.forEach((what, steps) -> said.add("Between the fills of " + Wording.list(steps)
+                + " the pieces stay drained: " + what + ", the time of the step does not."));
         if (!attended.isEmpty()) {
             said.add("Somebody attends " + Wording.list(attended) + ": on a line in crew hours only.");
         }

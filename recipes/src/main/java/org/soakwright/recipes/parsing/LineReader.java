@@ -86,7 +86,7 @@ public final class LineReader {
                 problems.addAll(Agreement.ofServes(group, recipes.values()));
             }
             if (utilities != null) {
-                problems.addAll(Agreement.ofDraws(group, utilities));
+                problems.addAll(Agreement.ofDraws(group, utilities, recipes));
             }
         }
         problems.addAll(Agreement.unserved(tree.place(), vessels, recipes));

@@ -29,13 +29,19 @@ final class LotList {
 
     private final Source source;
     private final Problems problems;
+    private int broken;
 
     LotList(Source source, Problems problems) {
         this.source = source;
         this.problems = problems;
     }
 
-    /** A row for each lot; null where there is none to read, with a problem added. */
+    /** Whether every row could be read, once they are. */
+    boolean isWhole() {
+        return broken == 0;
+    }
+
+    /** Every row that could be read; null where there is none, with a problem added. */
     @Nullable
     List<Tree> rows() {
         List<String> lines = List.of(source.text().split("\n", -1));
@@ -96,7 +102,6 @@ final class LotList {
 
     private @Nullable List<Tree> rows(List<String> lines, int header, List<Csv.Cell> names, char separator) {
         List<Tree> rows = new ArrayList<>();
-        int broken = 0;
         for (int i = header + 1; i < lines.size() && rows.size() <= Agreement.MOST_ORDERS; i++) {
             if (lines.get(i).isBlank()) {
                 continue;
@@ -110,7 +115,7 @@ final class LotList {
                     problems.add(
                             Place.of(source.file()),
                             "there may be more to correct after the first " + broken + " problems");
-                    return null;
+                    return rows;
                 }
                 continue;
             }
@@ -121,7 +126,7 @@ final class LotList {
                     Place.of(source.file()),
                     "the list has no lots: found a header alone; write one lot per row below it");
         }
-        return rows.isEmpty() || broken > 0 ? null : rows;
+        return rows.isEmpty() ? null : rows;
     }
 
     private boolean fits(List<Csv.Cell> cells, List<Csv.Cell> names, char separator) {

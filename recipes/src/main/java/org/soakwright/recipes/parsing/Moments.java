@@ -54,12 +54,16 @@ final class Moments {
         if (known.contains(leaf.text())) {
             return ZoneId.of(leaf.text());
         }
-        String nearest = Nearest.of(leaf.text(), known).orElse("UTC");
+        boolean named = leaf.text().chars().anyMatch(Character::isLetter);
+        String nearest = Nearest.of(leaf.text(), known)
+                .filter(near -> named)
+                .map(near -> "the nearest is \"" + near + "\", ")
+                .orElse("an offset alone does not say when clocks change, ");
         values.problems()
                 .add(
                         leaf.place(),
-                        "no time zone has this name: found " + leaf.label() + "; the nearest is \"" + nearest
-                                + "\", write such as Europe/Oslo");
+                        "no time zone has this name: found " + leaf.label() + "; " + nearest
+                                + "write such as Europe/Oslo");
         return null;
     }
 

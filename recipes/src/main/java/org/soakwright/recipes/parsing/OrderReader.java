@@ -82,12 +82,10 @@ final class OrderReader {
     private List<Order> listed(Tree.Leaf leaf) {
         String name = values.name("lots", leaf, "orders.csv");
         Source source = name == null ? null : problems.attempt(() -> files.lots(name, leaf.place()));
-        List<Tree> rows = source == null ? null : new LotList(source, problems).rows();
-        if (source == null || rows == null) {
-            whole = false;
-            return List.of();
-        }
-        return all(rows, LotList.MOST_PROBLEMS, Place.of(source.file()));
+        LotList list = source == null ? null : new LotList(source, problems);
+        List<Tree> rows = list == null ? null : list.rows();
+        whole &= list != null && rows != null && list.isWhole();
+        return source == null || rows == null ? List.of() : all(rows, LotList.MOST_PROBLEMS, Place.of(source.file()));
     }
 
     /** @param mostBroken after so many that cannot be read the rest is left unread */

@@ -17,19 +17,22 @@ import java.util.Objects;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.regex.Pattern;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
+import org.soakwright.recipes.Lines;
 import org.soakwright.recipes.Recipes;
 import org.soakwright.recipes.text.Kind;
 import org.soakwright.recipes.text.Unit;
 
 /** The shipped schema knows exactly the keys and the units that the reader knows. */
 class SchemaTest {
-    private static final JsonNode SCHEMA = schema();
+    private static final JsonNode SCHEMA = schema(Recipes.SCHEMA);
+    private static final JsonNode OF_LINES = schema(Lines.SCHEMA);
 
-    private static JsonNode schema() {
-        try (InputStream in = Recipes.class.getResourceAsStream(Recipes.SCHEMA)) {
+    private static JsonNode schema(String resource) {
+        try (InputStream in = Recipes.class.getResourceAsStream(resource)) {
             return new ObjectMapper().readTree(Objects.requireNonNull(in));
         } catch (IOException e) {
             throw new IllegalStateException(e);
@@ -38,6 +41,10 @@ class SchemaTest {
 
     private static JsonNode definition(String name) {
         return SCHEMA.path("$defs").path(name);
+    }
+
+    private static String definitionName(LineSection section) {
+        return section.name().toLowerCase(Locale.ROOT).replace('_', '-');
     }
 
     private static String definitionName(Section section) {
@@ -59,6 +66,17 @@ class SchemaTest {
     }
 
     @ParameterizedTest
+    @EnumSource(
+            value = LineSection.class,
+            mode = EnumSource.Mode.EXCLUDE,
+            names = {"VESSELS", "DRAWS", "UTILITIES"})
+    void aSectionOfALineHasTheSameKeysInTheSchema(LineSection section) {
+        JsonNode definition =
+                section == LineSection.LINE ? OF_LINES : OF_LINES.path("$defs").path(definitionName(section));
+        assertEquals(new TreeSet<>(section.keys()), keys(definition.path("properties")), section::name);
+    }
+
+    @ParameterizedTest
     @EnumSource(Section.class)
     void noKeyIsBothKnownAndForLater(Section section) {
         assertTrue(Collections.disjoint(section.keys(), section.later()), section::name);
@@ -67,24 +85,31 @@ class SchemaTest {
     @Test
     void everyDefinitionWithKeysBelongsToASection() {
         Set<String> withKeys = new LinkedHashSet<>();
-        definitionNames().forEach(name -> {
-            if (definition(name).has("properties")) {
-                withKeys.add(name);
-            }
-        });
+        for (JsonNode schema : List.of(SCHEMA, OF_LINES)) {
+            keys(schema.path("$defs")).stream()
+                    .filter(name -> schema.path("$defs").path(name).has("properties"))
+                    .forEach(withKeys::add);
+        }
         Set<String> sections = new LinkedHashSet<>();
         Arrays.stream(Section.values()).forEach(section -> sections.add(definitionName(section)));
+        Arrays.stream(LineSection.values()).forEach(section -> sections.add(definitionName(section)));
         withKeys.removeAll(sections);
         assertEquals(Set.of(), withKeys);
     }
 
     @ParameterizedTest
     @EnumSource(Kind.class)
-    void aKindHasTheSameUnitsInTheSchema(Kind kind) {
-        Pattern pattern =
-                Pattern.compile(definition(kind.name().toLowerCase(Locale.ROOT).replace('_', '-') + "-text")
-                        .path("pattern")
-                        .asText());
+    void aKindHasTheSameUnitsInEverySchemaThatHasIt(Kind kind) {
+        String name = kind.name().toLowerCase(Locale.ROOT).replace('_', '-') + "-text";
+        List<String> patterns = Stream.of(SCHEMA, OF_LINES)
+                .map(schema -> schema.path("$defs").path(name).path("pattern").asText())
+                .filter(pattern -> !pattern.isEmpty())
+                .toList();
+        assertFalse(patterns.isEmpty(), name);
+        patterns.forEach(pattern -> assertUnits(kind, Pattern.compile(pattern)));
+    }
+
+    private static void assertUnits(Kind kind, Pattern pattern) {
         for (Unit unit : kind.units()) {
             String written = "12.5e-1 " + unit.symbol();
             assertTrue(pattern.matcher(written).find(), () -> written + " in " + pattern);
@@ -101,19 +126,17 @@ class SchemaTest {
 
     @Test
     void theSchemaSaysWhichLanguageItIs() {
-        assertEquals(
-                "https://json-schema.org/draft/2020-12/schema",
-                SCHEMA.path("$schema").asText());
-        assertFalse(SCHEMA.path("additionalProperties").asBoolean(true));
+        for (JsonNode schema : List.of(SCHEMA, OF_LINES)) {
+            assertEquals(
+                    "https://json-schema.org/draft/2020-12/schema",
+                    schema.path("$schema").asText());
+            assertFalse(schema.path("additionalProperties").asBoolean(true));
+        }
     }
 
     private static Set<String> keys(JsonNode properties) {
         Set<String> keys = new TreeSet<>();
         properties.fieldNames().forEachRemaining(keys::add);
         return keys;
-    }
-
-    private static List<String> definitionNames() {
-        return List.copyOf(keys(SCHEMA.path("$defs")));
     }
 }

@@ -2,7 +2,6 @@ package org.soakwright.planner.line.shop;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.jspecify.annotations.Nullable;
 
 /**
  * What comes of times, from tangents at times followed exactly. Misses are nearly straight in the times, so a tangent nearby is good to parts in
@@ -13,87 +12,124 @@ final class Estimate {
     /** How far a tangent is trusted: the change it foretells. */
     private static final double TRUSTED = 0.15;
 
-    private static final int MOST_TANGENTS = 400;
+    /** A tangent so near is not worth looking further. */
+    private static final double NEAR = 0.03;
+
+    private static final int MOST_TANGENTS = 300;
 
     /** Most that a tangent is taken to be off: 0.05 % of a content. What is off by more shows when it is followed. */
     private static final double MOST_OFF = 5e-4;
 
     private final Physics physics;
     private final List<Tangent> tangents = new ArrayList<>();
+    private int last;
+    private boolean rising;
 
     Estimate(Physics physics) {
         this.physics = physics;
     }
 
-    private record Tangent(long[] at, Physics.Reading reading) {
-        double change(long[] times) {
-            double most = 0;
+    /** At times that were followed. */
+    static final class Tangent {
+        private final long[] at;
+        private final Physics.Reading reading;
+        /** The steepest of all misses by each time. */
+        private final double[] steepest;
+
+        Tangent(long[] at, Physics.Reading reading) {
+            this.at = at.clone();
+            this.reading = reading;
+            steepest = new double[at.length];
             for (double[] slopes : reading.slopes()) {
-                double sum = 0;
-                for (int i = 0; i < times.length; i++) {
-                    sum += Math.abs(slopes[i] * (times[i] - at[i]));
+                for (int i = 0; i < steepest.length; i++) {
+                    steepest[i] = Math.max(steepest[i], Math.abs(slopes[i]));
                 }
-                most = Math.max(most, sum);
             }
-            return most;
+        }
+
+        /** What change it foretells, at most; beyond a limit no more than that it is beyond. */
+        double change(long[] times, double limit) {
+            double sum = 0;
+            for (int i = 0; i < times.length && sum < limit; i++) {
+                sum += steepest[i] * Math.abs(times[i] - at[i]);
+            }
+            return sum;
+        }
+
+        int size() {
+            return reading.misses().length;
+        }
+
+        /** By each time, 1/s. */
+        double[] slopes(int requirement) {
+            return reading.slopes()[requirement];
         }
 
         /** Misses are mostly convex, so a tangent flatters: by about half the square of the change. */
-        double[] misses(long[] times) {
-            double[] misses = reading.misses().clone();
-            double change = change(times);
-            double off = Math.min(MOST_OFF, change * change / 2);
-            for (int r = 0; r < misses.length; r++) {
-                misses[r] += off;
-                for (int i = 0; i < times.length; i++) {
-                    misses[r] += reading.slopes()[r][i] * (times[i] - at[i]);
-                }
+        double miss(int requirement, long[] times) {
+            double miss = reading.misses()[requirement];
+            double change = 0;
+            double[] slopes = reading.slopes()[requirement];
+            for (int i = 0; i < times.length; i++) {
+                double step = slopes[i] * (times[i] - at[i]);
+                miss += step;
+                change += Math.abs(step);
             }
-            return misses;
+            return miss + Math.min(MOST_OFF, change * change / 2);
         }
     }
 
-    /** How far each requirement is missed, about. */
-    double[] misses(long[] times) {
-        return near(times).misses(times);
+    /** Whether more time has ever been seen to harm. */
+    boolean rises() {
+        return rising;
     }
 
-    /** How each miss goes with each time, about, 1/s. */
-    double[][] slopes(long[] times) {
-        return near(times).reading().slopes();
+    private void add(Tangent tangent) {
+        if (tangents.size() < MOST_TANGENTS) {
+            last = tangents.size();
+            tangents.add(tangent);
+        }
+        for (int r = 0; r < tangent.size() && !rising; r++) {
+            for (int i = 0; i < tangent.at.length; i += 2) {
+                rising |= tangent.slopes(r)[i] > 0;
+            }
+        }
     }
 
     /** Exactly. */
     Physics.Reading exactly(long[] times) {
         Physics.Reading reading = physics.read(times);
-        if (tangents.size() < MOST_TANGENTS && nearest(times, 1e-6) == null) {
-            tangents.add(new Tangent(times.clone(), reading));
+        if (tangents.size() < MOST_TANGENTS) {
+            for (Tangent tangent : tangents) {
+                if (tangent.change(times, 1e-6) < 1e-6) {
+                    return reading;
+                }
+            }
+            add(new Tangent(times, reading));
         }
         return reading;
     }
 
-    private Tangent near(long[] times) {
-        Tangent nearest = nearest(times, TRUSTED);
-        if (nearest != null) {
-            return nearest;
-        }
-        Tangent tangent = new Tangent(times.clone(), physics.read(times));
-        if (tangents.size() < MOST_TANGENTS) {
-            tangents.add(tangent);
-        }
-        return tangent;
-    }
-
-    private @Nullable Tangent nearest(long[] times, double within) {
-        Tangent nearest = null;
-        double least = within;
-        for (Tangent tangent : tangents) {
-            double change = tangent.change(times);
+    /** A tangent near some times. */
+    Tangent near(long[] times) {
+        int count = tangents.size();
+        double least = TRUSTED;
+        int nearest = -1;
+        for (int n = 0; n < count && least > NEAR; n++) {
+            // The one that served last serves again most often, and those made lately before older ones.
+            int i = n == 0 ? last : count - n;
+            double change = tangents.get(i).change(times, least);
             if (change < least) {
                 least = change;
-                nearest = tangent;
+                nearest = i;
             }
         }
-        return nearest;
+        if (nearest >= 0) {
+            last = nearest;
+            return tangents.get(nearest);
+        }
+        Tangent tangent = new Tangent(times, physics.read(times));
+        add(tangent);
+        return tangent;
     }
 }

@@ -9,7 +9,8 @@ import org.jspecify.annotations.Nullable;
  */
 final class Outlook {
     private static final double MOST = 4;
-    private static final int HALVINGS = 24;
+    private static final int MOST_STEPS = 24;
+    private static final double MINUTE = 60;
 
     private final Job job;
     private final Estimate estimate;
@@ -51,28 +52,48 @@ final class Outlook {
         return new Bounds(least, most);
     }
 
+    /** By false position, which a nearly straight miss ends in a few steps. */
     private long @Nullable [] scaled(long[] style, long[] past, int over) {
         long[] shortest = shortest();
-        if (misses(at(0, style, shortest, past, over), past, over, style) <= 0) {
-            return at(0, style, shortest, past, over);
+        double low = 0;
+        double below = misses(at(low, style, shortest, past, over), past, over, style);
+        if (below <= 0) {
+            return at(low, style, shortest, past, over);
         }
         double high = 1;
-        while (misses(at(high, style, shortest, past, over), past, over, style) > 0) {
+        double above = misses(at(high, style, shortest, past, over), past, over, style);
+        while (above > 0) {
+            low = high;
+            below = above;
             high *= 1.5;
             if (high > MOST) {
                 return null;
             }
+            above = misses(at(high, style, shortest, past, over), past, over, style);
         }
-        double low = 0;
-        for (int i = 0; i < HALVINGS && high - low > 1e-5; i++) {
-            double middle = 0.5 * (low + high);
-            if (misses(at(middle, style, shortest, past, over), past, over, style) <= 0) {
-                high = middle;
+        double enough = MINUTE / Math.max(MINUTE, beyond(style, shortest, over));
+        for (int i = 0; i < MOST_STEPS && high - low > enough; i++) {
+            double share = below / (below - above);
+            double next = low + (high - low) * Math.min(0.95, Math.max(0.05, i % 3 == 2 ? 0.5 : share + 0.01));
+            double miss = misses(at(next, style, shortest, past, over), past, over, style);
+            if (miss <= 0) {
+                high = next;
+                above = miss;
             } else {
-                low = middle;
+                low = next;
+                below = miss;
             }
         }
         return at(high, style, shortest, past, over);
+    }
+
+    /** How much of a style is more than the shortest, s. */
+    private static double beyond(long[] style, long[] shortest, int over) {
+        double sum = 0;
+        for (int k = over; k < style.length; k++) {
+            sum += Math.max(0, style[k] - shortest[k]);
+        }
+        return sum;
     }
 
     private long[] at(double share, long[] style, long[] shortest, long[] past, int over) {
@@ -88,15 +109,14 @@ final class Outlook {
     /** The worst of what more time helps with. */
     private double misses(long[] durations, long[] past, int over, long[] style) {
         long[] times = times(durations, past, over);
-        double[] misses = estimate.misses(times);
-        double[][] slopes = estimate.slopes(times);
+        Estimate.Tangent near = estimate.near(times);
         double worst = Double.NEGATIVE_INFINITY;
-        for (int r = 0; r < misses.length; r++) {
-            if (!rises(slopes[r], over, style)) {
-                worst = Math.max(worst, misses[r]);
+        for (int r = 0; r < near.size(); r++) {
+            if (!rises(near.slopes(r), over, style)) {
+                worst = Math.max(worst, near.miss(r, times));
             }
         }
-        return misses.length == 0 ? -1 : worst;
+        return near.size() == 0 ? -1 : worst;
     }
 
     /** Whether more of what is to come makes a miss worse. */
@@ -111,14 +131,17 @@ final class Outlook {
     /** How long a phase may last before what more time harms is missed, those after it as short as can be. */
     private long most(long[] least, long[] past, int over, int k) {
         long longest = job.phase(k).longest();
+        if (!estimate.rises()) {
+            return longest;
+        }
         long[] durations = least.clone();
         for (int j = k + 1; j < durations.length; j++) {
             durations[j] = job.phase(j).shortest();
         }
-        double[][] slopes = estimate.slopes(times(durations, past, over));
+        Estimate.Tangent near = estimate.near(times(durations, past, over));
         boolean any = false;
-        for (double[] slope : slopes) {
-            any |= slope[2 * k] > 0;
+        for (int r = 0; r < near.size(); r++) {
+            any |= near.slopes(r)[2 * k] > 0;
         }
         if (!any) {
             return longest;
@@ -147,10 +170,9 @@ final class Outlook {
         long[] longer = durations.clone();
         longer[k] = seconds;
         long[] times = times(longer, past, over);
-        double[] misses = estimate.misses(times);
-        double[][] slopes = estimate.slopes(times);
-        for (int r = 0; r < misses.length; r++) {
-            if (slopes[r][2 * k] > 0 && misses[r] > 0) {
+        Estimate.Tangent near = estimate.near(times);
+        for (int r = 0; r < near.size(); r++) {
+            if (near.slopes(r)[2 * k] > 0 && near.miss(r, times) > 0) {
                 return true;
             }
         }

@@ -28,6 +28,23 @@ public interface Physics {
      */
     List<long[]> styles();
 
+    /** What holds for all times that satisfy everything, whatever else: proofs rest on it. */
+    default List<Cut> certain() {
+        return List.of();
+    }
+
+    /** Whether every miss is convex in the times, so that its tangents hold for all times that satisfy it. */
+    default boolean convex() {
+        return false;
+    }
+
+    /**
+     * Times weighed by these sum to no less than so much.
+     *
+     * @param weights one for each time
+     */
+    record Cut(double[] weights, double atLeast) {}
+
     /**
      * How far each requirement is missed.
      *

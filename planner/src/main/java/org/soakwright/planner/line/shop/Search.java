@@ -17,15 +17,20 @@ public final class Search {
     private static final long SEED = 20_261_201;
     private static final int MEMORY = 30;
     private static final int MOST_OFF = 6;
+    private static final int MOST_EARLIER = 12;
 
-    /** Every so many changes all jobs are placed anew in the order in which they begin: what was left between them closes. */
-    private static final int COMPACTION = 60;
+    /**
+     * Every so many changes all jobs are placed anew in the order in which they begin, but for one that comes earlier: what was left between them
+     * closes, and what no small change mends has a chance.
+     */
+    private static final int REORDERING = 8;
 
     private final Shop shop;
     private final List<Job> jobs;
     private final List<Aim> aims;
     private final Placement placement = new Placement();
     private final SplittableRandom random = new SplittableRandom(SEED);
+    private @Nullable State best;
 
     public Search(Shop shop, List<Job> jobs, List<Aim> aims) {
         this.shop = shop;
@@ -78,17 +83,17 @@ public final class Search {
     }
 
     /**
-     * The best schedule found.
+     * The best schedule found so far; goes on from what was found before.
      *
-     * @param effort placings to spend; the first schedules are made in any case
+     * @param effort placings to spend in all; the first schedules are made in any case
      */
     public Found best(long effort) {
-        State best = first();
-        State now = best;
+        State found = best == null ? first() : best;
+        State now = found;
         Score[] memory = new Score[MEMORY];
         Arrays.fill(memory, now.score);
         for (long change = 0; placement.placings() < effort && jobs.size() > 1; change++) {
-            State next = change % COMPACTION == COMPACTION - 1 ? compacted(now) : changed(now);
+            State next = change % REORDERING == REORDERING - 1 ? reordered(now) : changed(now);
             int slot = (int) (change % MEMORY);
             if (next.score.compareTo(memory[slot]) <= 0 || next.score.compareTo(now.score) <= 0) {
                 now = next;
@@ -96,11 +101,14 @@ public final class Search {
             if (now.score.compareTo(memory[slot]) < 0) {
                 memory[slot] = now.score;
             }
-            if (now.score.compareTo(best.score) < 0) {
-                best = now;
+            if (now.score.compareTo(found.score) < 0) {
+                found = now;
+                if (System.getenv("TRACE") != null)
+                    System.err.println(change + " " + placement.placings() + " " + now.score);
             }
         }
-        return found(best);
+        best = found;
+        return found(found);
     }
 
     /** The schedule that comes of placing the jobs in an order. */
@@ -165,15 +173,20 @@ public final class Search {
         return outcome;
     }
 
-    private State compacted(State state) {
-        int[] order = IntStream.range(0, jobs.size())
+    private State reordered(State state) {
+        List<Integer> order = new ArrayList<>(IntStream.range(0, jobs.size())
                 .boxed()
                 .sorted(Comparator.comparingLong(
                                 (Integer j) -> state.of(j).placed().begins(shop.carriage()))
                         .thenComparing(Comparator.naturalOrder()))
-                .mapToInt(Integer::intValue)
-                .toArray();
-        return placed(order, state);
+                .toList());
+        if (random.nextInt(4) > 0) {
+            Integer job = seed(state);
+            int at = order.indexOf(job);
+            order.remove(job);
+            order.add(at - random.nextInt(Math.min(at, MOST_EARLIER) + 1), job);
+        }
+        return placed(order.stream().mapToInt(Integer::intValue).toArray(), random.nextInt(4) == 0 ? null : state);
     }
 
     private State changed(State state) {
@@ -183,13 +196,17 @@ public final class Search {
             floor.remove(state.of(job).placed());
         }
         Placement.Outcome[] at = state.at.clone();
-        shuffle(off);
-        if (random.nextInt(3) == 0) {
+        int order = random.nextInt(3);
+        if (order == 0) {
             sortByDue(off);
+        } else if (order == 1) {
+            shuffle(off);
         }
         for (int job : off) {
             int styles = Outlook.styles(jobs.get(job)).size();
-            int style = random.nextInt(4) == 0 ? random.nextInt(styles) : -1;
+            int style = random.nextInt(4) == 0
+                    ? -1
+                    : random.nextBoolean() ? state.of(job).style() : random.nextInt(styles);
             at[job] = put(floor, jobs.get(job), style);
         }
         return scored(floor, at);

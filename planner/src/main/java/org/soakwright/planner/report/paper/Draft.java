@@ -147,7 +147,9 @@ final class Draft {
                 index + 1,
                 step.name(),
                 (run.meetsTargets() ? "" : Sheet.NO_PLAN + ": ") + step.kind() + ", "
-                        + Durations.practical(end.seconds()) + (temperature.isEmpty() ? "" : ", at " + temperature),
+                        + Durations.practical(end.seconds())
+                        + (step.gapBetweenFills().lasts() ? " in liquor" : "")
+                        + (temperature.isEmpty() ? "" : ", at " + temperature),
                 new MakeUp(recipe).of(index, end.seconds()),
                 moments,
                 notes(readings));

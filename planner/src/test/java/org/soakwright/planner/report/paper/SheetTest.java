@@ -96,6 +96,38 @@ class SheetTest {
         assertEquals("drain, then 100 L fresh", moment(fills, "Fill 3").planned());
     }
 
+    /** From 1:00 on, 30 min after the tank was left alone: 15 min a fill, 10 and 20 min to drain and refill between them, out at 2:45. */
+    @Test
+    void aLotThatStaysIsDrainedAndRefilledByTheClock() {
+        String staying = Batches.BRINING
+                .replace(
+                        "    fills: 3\n",
+                        "    fills: 3\n    stays: true\n    changeover: {drain: 10 min, refill: 20 min}\n")
+                .replace("  - rest: room\n", "  - rest: room\n    stays: true\n    attended: true\n");
+        Sheet stays = Batches.sheet(Batches.followed(staying), Optional.empty());
+        Sheet.Part tank = stays.parts().get(0);
+        Sheet.Part fills = stays.parts().get(1);
+        assertEquals(
+                "pieces stay: 10 min to drain, 20 min to refill",
+                moment(tank, "End").planned());
+        assertEquals(
+                "the pieces stayed, the liquor is in", moment(fills, "Start").planned());
+        assertEquals(
+                List.of("Start 1:00", "Drain 1:15", "Fill 2 1:45", "Drain 2:00", "Fill 3 2:30", "End 2:45"),
+                fills.moments().stream()
+                        .filter(one -> !one.what().equals("Read"))
+                        .map(one -> one.what() + " " + one.clock())
+                        .toList());
+        assertEquals("10 min to drain, 20 min to refill", moment(fills, "Drain").planned());
+        assertEquals("100 L fresh", moment(fills, "Fill 2").planned());
+        assertTrue(fills.doing().contains("rinse, 45 min in liquor"), fills.doing());
+        assertEquals("pieces out", moment(fills, "End").planned());
+        assertEquals("pieces stay", moment(stays.parts().get(2), "End").planned());
+        assertEquals("the pieces stayed", moment(stays.parts().get(3), "Start").planned());
+        assertEquals("Takes 14 h 55 min.", stays.timing().get(0));
+        assertTrue(stays.timing().contains("Somebody attends room: on a line in crew hours only."));
+    }
+
     @Test
     void readingsAreExpectedAsTheCheckpointsSay() {
         List<Checkpoint> checkpoints = Checkpoint.of(desalting);

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.soakwright.planner.batch.Batch;
 import org.soakwright.planner.batch.Planner;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.StepEnd;
@@ -130,5 +131,34 @@ class HistoryTest {
                 }
             }
         }
+    }
+
+    /** Two hours a fill, 50 min between them: in liquor from 0:00, 2:50 and 5:40 on. */
+    @Test
+    void betweenFillsThereIsNoLiquorToDraw() {
+        Recipe recipe = Batches.read("fills", """
+                language: 1
+                title: Fills
+                product: [other]
+                lot: {mass: 10 kg, density: 1100 kg/m3, pieces: [{name: slice, shape: slab, thickness: 8 mm}]}
+                species: {salt: {start: 60 g/kg, diffusivity: 8e-10 m2/s, partition: 0.8}}
+                steps:
+                  - rinse: fills
+                    liquor: {ratio: 2 L/kg, salt: 0 g/L}
+                    fills: 3
+                    changeover: {drain: 20 min, refill: 30 min}
+                    film: negligible
+                    time: 6 h
+                """);
+        History history = Batches.history(new Batch(recipe).follow(6 * 3600));
+        List<History.Fill> fills = history.fills(0);
+        assertEquals(3, fills.size());
+        for (int f = 0; f < 3; f++) {
+            double from = f * (2 * 3600 + 50 * 60);
+            double[] clocks = fills.get(f).clocks();
+            assertTrue(clocks[0] >= from && clocks[0] < from + 600, f + ": " + clocks[0]);
+            assertEquals(from + 2 * 3600, clocks[clocks.length - 1], 1e-6);
+        }
+        assertEquals(6 * 3600 + 100 * 60, history.end());
     }
 }

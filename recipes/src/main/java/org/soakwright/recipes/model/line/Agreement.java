@@ -149,54 +149,9 @@ public final class Agreement {
         return List.of();
     }
 
-    /** What is drawn is there, and counted alike. */
-    public static List<Problem> ofDraws(VesselGroup group, Collection<Utility> utilities) {
-        List<Problem> problems = new ArrayList<>();
-        group.draws()
-                .forEach((name, draw) -> utilities.stream()
-                        .filter(one -> one.name().equals(name))
-                        .findFirst()
-                        .ifPresentOrElse(
-                                utility -> problems.addAll(ofDraw(draw, utility)),
-                                () -> problems.add(new Problem(
-                                        draw.place(),
-                                        "no utility has this name: found \"" + name + "\"; "
-                                                + Nearest.hint(
-                                                        name,
-                                                        utilities.stream()
-                                                                .map(Utility::name)
-                                                                .toList())
-                                                + (utilities.isEmpty()
-                                                        ? ", write such as utilities: {water: 60 L/min}"
-                                                        : "")))));
-        return problems;
-    }
-
-    private static List<Problem> ofDraw(Draw draw, Utility utility) {
-        if (draw instanceof Draw.Steady steady) {
-            Quantity value = steady.value();
-            if (!utility.kind().has(value.unit())) {
-                return List.of(new Problem(
-                        value.place(),
-                        "what is drawn of " + utility.name() + " is "
-                                + utility.kind().label() + " like its limit of "
-                                + utility.atMost() + ": found \"" + value + "\"; write such as "
-                                + utility.kind().example()));
-            }
-            return value.si() <= utility.atMost().si()
-                    ? List.of()
-                    : List.of(new Problem(
-                            value.place(),
-                            "one vessel draws more of " + utility.name() + " than there is: found \"" + value
-                                    + "\" where at most " + utility.atMost() + " is; correct one of them"));
-        }
-        return utility.kind() == Kind.FLOW
-                ? List.of()
-                : List.of(new Problem(
-                        draw.place(),
-                        "the flow of a rinse cannot be drawn of " + utility.name() + ", whose limit is "
-                                + utility.atMost() + "; write such as "
-                                + utility.kind().example()));
+    /** What is drawn is there, counted alike, and no more than there is. */
+    public static List<Problem> ofDraws(VesselGroup group, Collection<Utility> utilities, Map<String, Recipe> recipes) {
+        return DrawRules.of(group, utilities, recipes);
     }
 
     /** Every step has a vessel, and every liquor of a stated volume fits one. */
@@ -271,7 +226,7 @@ public final class Agreement {
                                 + "; correct the hours, or the heads of moves"));
     }
 
-    private static String named(Step step, String file) {
+    static String named(Step step, String file) {
         return "the " + step.kind() + " \"" + step.name() + "\" of " + file;
     }
 }

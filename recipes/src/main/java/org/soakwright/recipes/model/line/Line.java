@@ -55,7 +55,7 @@ public record Line(
             problems.addAll(Agreement.ofLiquor(group, recipes));
         });
         for (VesselGroup group : vessels) {
-            problems.addAll(Agreement.ofDraws(group, utilities));
+            problems.addAll(Agreement.ofDraws(group, utilities, recipes));
         }
         problems.addAll(Agreement.unserved(place, vessels, recipes));
         problems.addAll(Agreement.ofGoals(minimise, recipes, place));

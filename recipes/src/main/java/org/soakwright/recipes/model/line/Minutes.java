@@ -2,9 +2,11 @@ package org.soakwright.recipes.model.line;
 
 import java.time.LocalTime;
 import java.time.ZonedDateTime;
+import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Problem;
 import org.soakwright.recipes.text.Unsound;
 
 /** The rule that a line counts in whole minutes. */
@@ -15,29 +17,29 @@ final class Minutes {
     private Minutes() {}
 
     /** A time of zero or more whole minutes. */
-    static void require(String what, @Nullable Quantity time, String example) {
+    static List<Problem> ifNone(String what, @Nullable Quantity time, String example) {
         if (time == null) {
-            return;
+            return List.of();
         }
+        String remedy = ": found \"" + time + "\"; write such as " + example;
         if (!(time.si() >= 0 && time.si() <= MOST_SECONDS)) {
-            throw new Unsound(
-                    time.place(), what + " lies from 0 min to 366 d: found \"" + time + "\"; write such as " + example);
+            return List.of(new Problem(time.place(), what + " lies from 0 min to 366 d" + remedy));
         }
-        if (Math.rint(time.si() / 60) * 60 != time.si()) {
-            throw new Unsound(
-                    time.place(), what + " is whole minutes: found \"" + time + "\"; write such as " + example);
-        }
+        return Math.rint(time.si() / 60) * 60 == time.si()
+                ? List.of()
+                : List.of(new Problem(time.place(), what + " is whole minutes" + remedy));
     }
 
     static void require(String what, @Nullable ZonedDateTime time, Place place) {
-        if (time != null && (time.getSecond() != 0 || time.getNano() != 0)) {
-            throw new Unsound(place, what + " is a whole minute: found \"" + time + "\"; leave the seconds out");
+        if (time != null) {
+            require(what, time.toLocalTime(), place);
         }
     }
 
     static void require(String what, LocalTime time, Place place) {
         if (time.getSecond() != 0 || time.getNano() != 0) {
-            throw new Unsound(place, what + " is a whole minute: found \"" + time + "\"; write such as 06:00");
+            throw new Unsound(
+                    place, what + " is a whole minute: found \"" + time + "\"; leave the seconds out, such as 06:00");
         }
     }
 

@@ -1,8 +1,11 @@
 package org.soakwright.recipes.model.line;
 
+import java.util.ArrayList;
+import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.recipes.model.Quantity;
 import org.soakwright.recipes.text.Place;
+import org.soakwright.recipes.text.Problem;
 import org.soakwright.recipes.text.Unsound;
 
 /**
@@ -25,15 +28,18 @@ public record Moves(
     private static final int MOST = 999;
 
     public Moves {
-        Minutes.require("a move", takes, "15 min");
-        Minutes.require("the time that pieces hang", hangsAtMost, "10 min");
+        List<Problem> problems = new ArrayList<>(Minutes.ifNone("a move", takes, "15 min"));
+        problems.addAll(Minutes.ifNone("the time that pieces hang", hangsAtMost, "10 min"));
         if (atOnce < 1 || atOnce > MOST) {
-            throw new Unsound(
-                    place, "1 to " + MOST + " moves happen at once: found " + atOnce + "; write such as at-once: 1");
+            problems.add(new Problem(
+                    place, "1 to " + MOST + " moves happen at once: found " + atOnce + "; write such as at-once: 1"));
         }
         if (heads < 1 || heads > MOST) {
-            throw new Unsound(
-                    place, "a move needs 1 to " + MOST + " heads: found " + heads + "; write such as heads: 1");
+            problems.add(new Problem(
+                    place, "a move needs 1 to " + MOST + " heads: found " + heads + "; write such as heads: 1"));
+        }
+        if (!problems.isEmpty()) {
+            throw new Unsound(problems);
         }
     }
 

@@ -75,13 +75,15 @@ public record VesselGroup(
                                 + count));
             }
         }
+        problems.addAll(Minutes.ifNone("a turnaround", turnaround, "40 min"));
+        if (capacity != null && !(capacity.si() > 0)) {
+            problems.add(new Problem(
+                    capacity.place(),
+                    "the capacity must be above zero: found \"" + capacity + "\"; write such as 4000 kg"));
+        }
         if (!problems.isEmpty()) {
             throw new Unsound(problems);
         }
-        if (capacity != null) {
-            capacity.positive("the capacity");
-        }
-        Minutes.require("a turnaround", turnaround, "40 min");
     }
 
     /** What the vessel of a number, from 1, is called: {@code tank 2}; of one alone the group's name. */
