@@ -112,7 +112,8 @@ class LineReportTest {
             begin = sheets.indexOf("-heading\">" + load);
         }
         assertTrue(begin > 0, load);
-        String sheet = sheets.substring(begin, sheets.indexOf("</section>", begin)).replace('\u00a0', ' ');
+        String sheet =
+                sheets.substring(begin, sheets.indexOf("</section>", begin)).replace('\u00a0', ' ');
         Times times = new Times(plan.clock());
         plan.loads().stream()
                 .filter(one -> one.load().name().equals(load))
