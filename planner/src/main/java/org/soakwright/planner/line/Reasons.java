@@ -50,7 +50,7 @@ final class Reasons {
     List<String> late(Placed placed, long due, List<Jobs.Made> made) {
         List<String> chain = new ArrayList<>();
         long out = placed.finishes(schedule.shop().carriage());
-        chain.add(placed.job().name() + " is out " + at(out) + ", " + Durations.practical(out - due)
+        chain.add(placed.job().name() + " is out " + at(out) + ", " + Durations.practical((double) (out - due))
                 + " after it is due");
         Search.Found alone = new Search(schedule.shop(), List.of(placed.job()), List.of()).best(0);
         long earliest = alone.schedule().makespan();
@@ -96,7 +96,7 @@ final class Reasons {
 
     private static String step(Placed placed, int phase, List<Jobs.Made> made) {
         return made.stream()
-                .filter(one -> one.job() == placed.job())
+                .filter(one -> one.job().name().equals(placed.job().name()))
                 .findFirst()
                 .orElseThrow()
                 .route()
