@@ -42,7 +42,7 @@ public record Slack(long latest, Reason reason, @Nullable Job by) {
     /** Of a phase of a job of a schedule. */
     public static Slack of(Schedule schedule, Placed placed, int phase) {
         Floor floor = new Floor(schedule.shop());
-        schedule.jobs().stream().filter(other -> other != placed).forEach(floor::put);
+        schedule.jobs().stream().filter(other -> !other.isOf(placed.job())).forEach(floor::put);
         return new Finder(schedule, placed, floor, phase).slack();
     }
 

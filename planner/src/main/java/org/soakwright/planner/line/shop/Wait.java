@@ -45,7 +45,7 @@ public record Wait(
     /** The waits of a job of a schedule, the last first. */
     public static List<Wait> of(Schedule schedule, Placed placed) {
         Floor floor = new Floor(schedule.shop());
-        schedule.jobs().stream().filter(other -> other != placed).forEach(floor::put);
+        schedule.jobs().stream().filter(other -> !other.isOf(placed.job())).forEach(floor::put);
         List<Wait> waits = new ArrayList<>();
         Job job = placed.job();
         for (int k = job.size(); k >= 0; k--) {
@@ -115,7 +115,7 @@ public record Wait(
 
     private static @Nullable Placed lifting(Schedule schedule, Placed placed, long from, long until) {
         return schedule.tasks().stream()
-                .filter(task -> task.placed() != placed && task.from() < until && task.until() > from)
+                .filter(task -> !task.placed().isOf(placed.job()) && task.from() < until && task.until() > from)
                 .map(Placed.Task::placed)
                 .findFirst()
                 .orElse(null);
@@ -127,7 +127,10 @@ public record Wait(
         long latest = -Moments.NEVER;
         for (Placed other : schedule.jobs()) {
             for (Placed.Visit visit : other.visits()) {
-                if (other != placed && visit.station() == station && visit.start() <= moment && visit.end() > latest) {
+                if (!other.isOf(placed.job())
+                        && visit.station() == station
+                        && visit.start() <= moment
+                        && visit.end() > latest) {
                     latest = visit.end();
                     last = other;
                 }
