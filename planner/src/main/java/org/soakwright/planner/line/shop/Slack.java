@@ -161,7 +161,7 @@ public record Slack(long latest, Reason reason, @Nullable Job by) {
             long first = Moments.NEVER;
             for (Placed other : schedule.jobs()) {
                 for (Placed.Visit visit : other.visits()) {
-                    if (other != placed
+                    if (!other.isOf(job)
                             && visit.station() == station
                             && visit.start() >= end
                             && visit.start() < first) {
