@@ -65,6 +65,23 @@ class LineCommandTest {
     }
 
     @Test
+    void aCautionStopsALineUntilSomebodyAnswersForIt() throws IOException {
+        String line = hall("18:00");
+        Path cords = desk.path("cords.yaml");
+        Files.writeString(cords, Files.readString(cords).replaceAll("temperature: [0-9]+ Cel", "temperature: 30 Cel"));
+        Desk.Printed stopped = desk.give("line", line, "--effort", "0");
+        assertEquals(Exit.NO_PLAN, stopped.status(), stopped.err());
+        assertTrue(stopped.out().contains("This is not a plan to use."), stopped.out());
+        desk.give(
+                "line", line, "--effort", "0", "--report", desk.path("stopped").toString());
+        String sheets = Files.readString(desk.path("stopped").resolve("lot-sheets.html"));
+        assertTrue(sheets.contains("NOT A PLAN: stopped by a caution"), sheets);
+        Files.writeString(cords, Files.readString(cords) + "allowed-by: E. Vik, quality\n");
+        Desk.Printed allowed = desk.give("line", line, "--effort", "0");
+        assertEquals(Exit.DONE, allowed.status(), allowed.out());
+    }
+
+    @Test
     void jsonOnStandardOutputStandsAloneAndRepeats() throws IOException {
         String line = hall("18:00");
         Desk.Printed printed = desk.give("line", line, "--effort", "0", "--json", "-");

@@ -3,15 +3,12 @@ package org.soakwright.planner.report.line;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.IdentityHashMap;
-import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
-import org.soakwright.planner.batch.Cautions;
 import org.soakwright.planner.line.LinePlan;
 import org.soakwright.planner.line.Load;
 import org.soakwright.planner.line.LoadPlan;
@@ -28,7 +25,7 @@ final class Account {
     private final IdentityHashMap<LoadPlan.LegPlan, List<Supply>> byLeg = new IdentityHashMap<>();
     private final List<Move> moves;
     private final List<Supply> supplies;
-    private final Map<String, Cautions> cautions = new LinkedHashMap<>();
+    private final Warnings warnings;
 
     /**
      * A lot, or the part of one that is in a load.
@@ -65,8 +62,8 @@ final class Account {
                 lots.add(lot);
                 byLoad.computeIfAbsent(load, key -> new ArrayList<>()).add(lot);
             }
-            cautions.computeIfAbsent(load.load().recipeFile(), file -> Cautions.of(load.run()));
         }
+        warnings = new Warnings(plan.loads());
         moves = Moves.of(plan);
         supplies = Supplies.of(plan);
         supplies.forEach(supply ->
@@ -113,16 +110,24 @@ final class Account {
         return plan.loads().stream().filter(load -> !load.met()).toList();
     }
 
-    /** Of each recipe, by its file, as its first load runs. */
-    Map<String, Cautions> cautions() {
-        return cautions;
+    Warnings warnings() {
+        return warnings;
     }
 
-    /** What forbids to use the plan until somebody answers for it. */
+    /** What forbids to use the plan until somebody answers for it, each with whose it is. */
     List<String> stops() {
-        Set<String> stops = new LinkedHashSet<>();
-        cautions.values().forEach(one -> stops.addAll(one.stops()));
-        return List.copyOf(stops);
+        return words(warnings.stops());
+    }
+
+    /** Every caution once, with whose it is. */
+    List<String> cautions() {
+        return words(warnings.shown());
+    }
+
+    private List<String> words(List<Warnings.Warning> some) {
+        return some.stream()
+                .map(warning -> warnings.whose(warning, this::recipeTitle) + warning.words())
+                .toList();
     }
 
     /** Whether every target is met, no lot late and nothing forbids to use it. */

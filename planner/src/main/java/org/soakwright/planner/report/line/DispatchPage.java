@@ -12,6 +12,7 @@ final class DispatchPage {
     private static final String STYLE = """
             #answer { border-color: var(--mark); }
             td:last-child { min-width: 7rem; }
+            tbody th { white-space: nowrap; }
             @media print {
               main > section:nth-of-type(n + 3) { break-before: page; margin-top: 0; }
               thead { display: table-header-group; }

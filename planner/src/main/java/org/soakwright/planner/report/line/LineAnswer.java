@@ -46,8 +46,10 @@ final class LineAnswer {
                 account.missing().stream().map(load -> load.load().name()).toList();
         if (late.isEmpty() && missing.isEmpty()) {
             boolean due = account.lots().stream().anyMatch(lot -> lot.order().due() != null);
-            return count(plan.loads().size(), "load") + ": every lot meets its targets"
-                    + (due ? " and none is late." : ".");
+            int all = plan.line().orders().size();
+            return all == 1
+                    ? "The lot meets its targets" + (due ? " and is not late." : ".")
+                    : "All " + all + " lots meet their targets" + (due ? " and none is late." : ".");
         }
         List<String> parts = new ArrayList<>();
         if (!late.isEmpty()) {

@@ -61,7 +61,7 @@ public final class LineFindings {
         if (!account.plan().notes().isEmpty()) {
             sections.add(Section.of(NOTES, "Notes", account.plan().notes()));
         }
-        sections.add(Section.of(CAUTIONS, "Cautions", tables.cautions()));
+        sections.add(Section.of(CAUTIONS, "Cautions", account.cautions()));
         return new Findings(
                 account.plan().line().title(),
                 tables.about(),

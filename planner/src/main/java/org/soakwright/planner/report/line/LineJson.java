@@ -3,7 +3,6 @@ package org.soakwright.planner.report.line;
 import java.io.IOException;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import org.soakwright.planner.batch.Cautions;
 import org.soakwright.planner.line.LinePlan;
 import org.soakwright.planner.line.LoadPlan;
 import org.soakwright.planner.report.JsonText;
@@ -75,8 +74,12 @@ public final class LineJson {
         });
         json.strings("notes", plan.notes());
         json.array("cautions", () -> {
-            for (String file : account.cautions().keySet()) {
-                json.element(() -> cautions(json, file));
+            for (Warnings.Warning warning : account.warnings().shown()) {
+                json.element(() -> {
+                    json.string("caution", warning.words());
+                    json.strings("recipes", Warnings.files(warning.loads()));
+                    json.whole("loads", warning.loads().size());
+                });
             }
         });
         json.strings("stops", account.stops());
@@ -169,11 +172,5 @@ public final class LineJson {
                 json.number(entry.getKey(), entry.getValue());
             }
         });
-    }
-
-    private void cautions(JsonText json, String file) throws IOException {
-        Cautions own = account.cautions().getOrDefault(file, new Cautions(java.util.List.of(), java.util.List.of()));
-        json.string("recipe", file);
-        json.strings("shown", own.shown());
     }
 }

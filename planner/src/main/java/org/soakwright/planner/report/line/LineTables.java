@@ -1,9 +1,7 @@
 package org.soakwright.planner.report.line;
 
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.stream.Collectors;
 import org.soakwright.planner.batch.Durations;
 import org.soakwright.planner.line.LinePlan;
@@ -280,21 +278,5 @@ final class LineTables {
             notes.add("Not counted, since it is unlimited: the liquor of " + String.join(", ", steps) + ".");
         }
         return notes;
-    }
-
-    /** Each once, with the recipes it is about where there are several. */
-    List<String> cautions() {
-        Map<String, List<String>> about = new LinkedHashMap<>();
-        account.cautions()
-                .forEach((file, own) -> own.shown()
-                        .forEach(caution -> about.computeIfAbsent(caution, key -> new ArrayList<>())
-                                .add(account.recipeTitle(file))));
-        boolean several = account.cautions().size() > 1;
-        return about.entrySet().stream()
-                .map(entry ->
-                        several && entry.getValue().size() < account.cautions().size()
-                                ? String.join(", ", entry.getValue()) + ": " + entry.getKey()
-                                : entry.getKey())
-                .toList();
     }
 }

@@ -29,7 +29,7 @@ final class LotSheets {
             section section { margin-top: 1.2rem; }
             .lots p { margin: 0 0 0.2rem; }
             @media print {
-              main > section:nth-of-type(n + 3) { break-before: page; margin-top: 0; }
+              main > section + section { break-before: page; margin-top: 0; }
               section section { margin-top: 0.8rem; }
             }
             """;
@@ -92,8 +92,8 @@ final class LotSheets {
                 .shares()
                 .forEach(share -> html.open("p").words(share(load, share)).close());
         html.close();
-        Cautions cautions = account.cautions().get(load.load().recipeFile());
-        List<String> stops = cautions == null ? List.of() : cautions.stops();
+        Cautions cautions = account.warnings().of(load);
+        List<String> stops = cautions.stops();
         if (!load.met() || !stops.isEmpty()) {
             html.leaf("p", NO_PLAN + (load.met() ? ": stopped by a caution" : ": misses a target"), "class", "against");
         }
@@ -106,7 +106,7 @@ final class LotSheets {
         if (!load.targets().isEmpty()) {
             part(id + "-targets", "Targets", targets(load));
         }
-        if (cautions != null && !cautions.shown().isEmpty()) {
+        if (!cautions.shown().isEmpty()) {
             html.leaf("h3", "Cautions");
             shell.points(cautions.shown());
         }

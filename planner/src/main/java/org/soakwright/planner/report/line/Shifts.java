@@ -4,6 +4,7 @@ import java.time.LocalDate;
 import java.time.ZonedDateTime;
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
@@ -42,9 +43,8 @@ final class Shifts {
     static List<Worked> of(LinePlan plan, List<Move> moves) {
         Shifts shifts = new Shifts(plan);
         List<Worked> worked = new ArrayList<>();
-        Map<Window, List<Move>> groups = new TreeMap<>(Comparator.comparingLong(Window::from)
-                .thenComparingLong(Window::until)
-                .thenComparingInt(Window::heads));
+        // In the order of their first moves.
+        Map<Window, List<Move>> groups = new LinkedHashMap<>();
         Map<LocalDate, List<Window>> known = new TreeMap<>();
         for (Move move : moves) {
             groups.computeIfAbsent(shifts.window(move.start(), known), key -> new ArrayList<>())
