@@ -3,10 +3,10 @@ package org.soakwright.planner.line;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.OptionalDouble;
 import java.util.OptionalLong;
 import org.soakwright.planner.batch.Progress;
 import org.soakwright.planner.batch.Run;
+import org.soakwright.planner.line.constraint.Improvement;
 import org.soakwright.planner.line.shop.Aim;
 import org.soakwright.planner.line.shop.Placed;
 import org.soakwright.planner.line.shop.Search;
@@ -17,6 +17,14 @@ import org.soakwright.recipes.text.Unsound;
 public final class LinePlanner {
     /** Placings of a job that take about a second. */
     private static final long PLACINGS_PER_EFFORT = 6_000;
+
+    /** Parts of an effort that are spent on placing before and while constraint programming proposes schedules. */
+    private static final double SEARCHING = 0.3;
+
+    private static final double POLISHING = 0.3;
+
+    /** Deterministic work of constraint programming, in its own unit, for the rest. */
+    private static final double WORK_PER_EFFORT = 0.2;
 
     private LinePlanner() {}
 
@@ -48,11 +56,17 @@ public final class LinePlanner {
             }
         }
         progress.at("scheduling", 0.5);
-        Search.Found found = search.best((long) (options.effort() * PLACINGS_PER_EFFORT));
-        return told(line, hall, made, found);
+        Search.Found found = search.best((long) (options.effort() * SEARCHING * PLACINGS_PER_EFFORT));
+        progress.at("improving", 0.7);
+        Improvement.Outcome improved = new Improvement(
+                        hall.shop(), made.stream().map(Jobs.Made::job).toList(), aims, search)
+                .of(found, options.effort() * WORK_PER_EFFORT, (long)
+                        (options.effort() * POLISHING * PLACINGS_PER_EFFORT));
+        return told(line, hall, made, improved);
     }
 
-    private static LinePlan told(Line line, Hall hall, List<Jobs.Made> made, Search.Found found) {
+    private static LinePlan told(Line line, Hall hall, List<Jobs.Made> made, Improvement.Outcome outcome) {
+        Search.Found found = outcome.found();
         List<LoadPlan> loads = new ArrayList<>();
         for (int j = 0; j < made.size(); j++) {
             loads.add(load(hall, made.get(j), found.schedule().jobs().get(j)));
@@ -65,7 +79,11 @@ public final class LinePlanner {
                 hall.clock(),
                 found.schedule(),
                 loads,
-                new LinePlan.Proof(OptionalDouble.empty(), OptionalLong.empty()),
+                new LinePlan.Proof(
+                        outcome.lateness(),
+                        outcome.makespan().isPresent()
+                                ? OptionalLong.of(Math.round(outcome.makespan().getAsDouble()))
+                                : OptionalLong.empty()),
                 List.of());
     }
 

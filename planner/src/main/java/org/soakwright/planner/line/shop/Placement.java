@@ -57,6 +57,13 @@ final class Placement {
         return placed == null ? null : new Outcome(placed, isMet(placed), 0);
     }
 
+    /** In a style that is not of its own: durations that somebody proposes; null where it does not lead anywhere. */
+    @Nullable
+    Outcome like(Floor floor, Job job, long[] style) {
+        Placed placed = exactly(floor, job, style);
+        return placed == null ? null : new Outcome(placed, true, 0);
+    }
+
     private static boolean isEarlier(Floor floor, Placed one, Placed other) {
         Carriage carriage = floor.shop().carriage();
         long difference = one.finishes(carriage) - other.finishes(carriage);
@@ -66,6 +73,11 @@ final class Placement {
     /** Whether what was asked of a job holds, followed exactly. */
     boolean isMet(Placed placed) {
         return estimate(placed.job()).exactly(placed.times()).met();
+    }
+
+    List<Followed> followed(Physics physics) {
+        Estimate estimate = estimates.get(physics);
+        return estimate == null ? List.of() : estimate.followed();
     }
 
     private Estimate estimate(Job job) {

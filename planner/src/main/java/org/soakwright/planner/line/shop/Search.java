@@ -88,11 +88,30 @@ public final class Search {
      * @param effort placings to spend in all; the first schedules are made in any case
      */
     public Found best(long effort) {
-        State found = best == null ? first() : best;
-        State now = found;
+        State found = improved(best == null ? first() : best, effort);
+        best = found;
+        return found(found);
+    }
+
+    /**
+     * Goes on from a schedule made by somebody else, whose jobs are these in their order; what is best so far stays so unless that gets better.
+     *
+     * @param placings to spend
+     */
+    public Found from(Schedule schedule, long placings) {
+        State found = improved(state(schedule), placement.placings() + placings);
+        if (best == null || found.score.compareTo(best.score) < 0) {
+            best = found;
+        }
+        return found(found);
+    }
+
+    private State improved(State start, long until) {
+        State found = start;
+        State now = start;
         Score[] memory = new Score[MEMORY];
         Arrays.fill(memory, now.score);
-        for (long change = 0; placement.placings() < effort && jobs.size() > 1; change++) {
+        for (long change = 0; placement.placings() < until && jobs.size() > 1; change++) {
             State next = change % REORDERING == REORDERING - 1 ? reordered(now) : changed(now);
             int slot = (int) (change % MEMORY);
             if (next.score.compareTo(memory[slot]) <= 0 || next.score.compareTo(now.score) <= 0) {
@@ -103,17 +122,73 @@ public final class Search {
             }
             if (now.score.compareTo(found.score) < 0) {
                 found = now;
-                if (System.getenv("TRACE") != null)
-                    System.err.println(change + " " + placement.placings() + " " + now.score);
             }
         }
-        best = found;
-        return found(found);
+        return found;
     }
 
     /** The schedule that comes of placing the jobs in an order. */
     public Found inOrder(List<Integer> order) {
         return found(placed(order.stream().mapToInt(Integer::intValue).toArray(), null));
+    }
+
+    /**
+     * The schedule that comes of placing the jobs in the order of another schedule with durations like its own, which may miss what is asked: as much
+     * longer or shorter as it takes, or in a style of their own where that is out earlier.
+     */
+    public Found like(Schedule schedule) {
+        int[] order = IntStream.range(0, jobs.size())
+                .boxed()
+                .sorted(Comparator.comparingLong(
+                                (Integer j) -> schedule.jobs().get(j).begins(shop.carriage()))
+                        .thenComparing(Comparator.naturalOrder()))
+                .mapToInt(Integer::intValue)
+                .toArray();
+        Floor floor = new Floor(shop);
+        Placement.Outcome[] at = new Placement.Outcome[jobs.size()];
+        for (int j : order) {
+            Placed proposed = schedule.jobs().get(j);
+            long[] style =
+                    proposed.visits().stream().mapToLong(Placed.Visit::seconds).toArray();
+            Placement.Outcome like = placement.like(floor, jobs.get(j), style);
+            long wanted = proposed.finishes(shop.carriage());
+            if (like == null || like.placed().finishes(shop.carriage()) > wanted) {
+                Placement.Outcome own = placement.place(floor, jobs.get(j), -1);
+                like = like == null
+                                || (own != null
+                                        && own.placed().finishes(shop.carriage())
+                                                < like.placed().finishes(shop.carriage()))
+                        ? own
+                        : like;
+            }
+            if (like == null) {
+                throw new Unplaceable(jobs.get(j));
+            }
+            floor.put(like.placed());
+            at[j] = like;
+        }
+        return found(scored(floor, at));
+    }
+
+    /** A schedule made by somebody else, whose jobs are these in their order. */
+    public Found of(Schedule schedule) {
+        return found(state(schedule));
+    }
+
+    private State state(Schedule schedule) {
+        Floor floor = new Floor(shop);
+        Placement.Outcome[] at = new Placement.Outcome[jobs.size()];
+        for (int j = 0; j < at.length; j++) {
+            Placed placed = schedule.jobs().get(j);
+            floor.put(placed);
+            at[j] = new Placement.Outcome(placed, placement.isMet(placed), 0);
+        }
+        return scored(floor, at);
+    }
+
+    /** Times that were followed on the way, those nearest to just meeting everything first. */
+    public List<Followed> followed(Physics physics) {
+        return placement.followed(physics);
     }
 
     private Found found(State state) {
