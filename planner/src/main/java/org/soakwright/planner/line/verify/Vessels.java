@@ -169,8 +169,13 @@ final class Vessels {
         double capacity = vessel.group().capacity().si();
         Peaks peaks = new Peaks();
         for (Visit visit : vessel.visits()) {
-            // Its place is free again when the turnaround is over.
+            // Its place is free again when the turnaround is over, or when it comes back itself.
             long until = visit.until() + vessel.group().turnaroundSeconds();
+            for (Visit other : vessel.visits()) {
+                if (other.cargo() == visit.cargo() && other.from() >= visit.until()) {
+                    until = Math.min(until, other.from());
+                }
+            }
             peaks.add(visit.cargo().name(), visit.from(), until, visit.cargo().kg() - GRAM);
         }
         for (Peaks.Excess excess : peaks.over(at -> capacity * (1 + ROUNDING), false)) {
