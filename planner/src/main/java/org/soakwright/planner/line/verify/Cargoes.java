@@ -1,6 +1,5 @@
 package org.soakwright.planner.line.verify;
 
-import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
@@ -17,6 +16,8 @@ import org.soakwright.recipes.text.Shown;
 final class Cargoes {
     /** What sums of parts may be off by: rounding. */
     private static final double ROUNDING = 1e-9;
+
+    private static final double TOO_MUCH = 10;
 
     private final Line line;
     private final Result result;
@@ -82,7 +83,7 @@ final class Cargoes {
     }
 
     private static String kg(double kg) {
-        return Shown.number(BigDecimal.valueOf(kg)) + " kg";
+        return Faults.number(kg) + " kg";
     }
 
     private void add(List<Cargo> all, String name, List<Result.Entry> entries) {
@@ -114,7 +115,9 @@ final class Cargoes {
         }
         double kg = entries.stream().mapToDouble(Result.Entry::kg).sum();
         List<Cargo.Part> parts = parts(name, orders.get(0), first.steps());
-        if (alike && kg > 0 && !parts.isEmpty()) {
+        // Of what weighs much more than was ordered it is told already.
+        double most = TOO_MUCH * orders.stream().mapToDouble(order -> order.mass().si()).sum();
+        if (alike && kg > 0 && kg <= most && !parts.isEmpty()) {
             all.add(new Cargo(
                     name,
                     List.copyOf(entries),

@@ -18,6 +18,9 @@ final class Hands {
     /** Changes the liquor around a lot that stays. */
     private static final int HEADS_OF_A_CHANGEOVER = 1;
 
+    /** No move is longer; of one that is, it is told otherwise. */
+    private static final long A_YEAR = 366 * 86_400;
+
     private final Line line;
     private final Wall wall;
     private final Faults faults;
@@ -63,7 +66,7 @@ final class Hands {
     private void asked(Result.Move move) {
         String what = move.load() + ": the " + move.way() + " at " + wall.at(move.start());
         if (line.crew() != null && move.heads() != heads(move)) {
-            faults.add(what + " takes " + move.heads() + " heads, " + heads(move) + " would be right.");
+            faults.add(what + " takes " + Faults.count(move.heads(), "head") + ", " + heads(move) + " would be right.");
         }
         if (move.hoist() == isChangeover(move)) {
             faults.add(what + (move.hoist() ? " takes a hoist, none" : " takes no hoist, one") + " would be right.");
@@ -168,9 +171,10 @@ final class Hands {
             return;
         }
         Peaks peaks = new Peaks();
-        moves.forEach(move -> peaks.add(told(move), move.start(), move.end(), heads(move)));
+        moves.forEach(move ->
+                peaks.add(told(move), move.start(), Math.min(move.end(), move.start() + A_YEAR), heads(move)));
         for (Peaks.Excess excess : peaks.over(wall::heads, true)) {
-            faults.add("At " + wall.at(excess.from()) + " " + count(excess.used(), "head") + " of the crew "
+            faults.add("At " + wall.at(excess.from()) + " " + Faults.count(Math.round(excess.used()), "head") + " of the crew "
                     + (excess.used() == 1 ? "is" : "are") + " needed for " + excess.who() + ", at most "
                     + Math.round(excess.limit()) + " would be right.");
         }
@@ -182,14 +186,9 @@ final class Hands {
                 .filter(move -> !isChangeover(move))
                 .forEach(move -> peaks.add(told(move), move.start(), move.end(), 1));
         for (Peaks.Excess excess : peaks.over(at -> line.moves().atOnce(), false)) {
-            faults.add("At " + wall.at(excess.from()) + " " + count(excess.used(), "load") + " are on the move with "
+            faults.add("At " + wall.at(excess.from()) + " " + Faults.count(Math.round(excess.used()), "load") + " are on the move with "
                     + excess.who() + ", at most " + line.moves().atOnce() + " at once would be right.");
         }
-    }
-
-    private static String count(double number, String what) {
-        long whole = Math.round(number);
-        return whole + " " + what + (whole == 1 ? "" : "s");
     }
 
     private static String told(Result.Move move) {

@@ -1,7 +1,5 @@
 package org.soakwright.planner.line.verify;
 
-import java.math.BigDecimal;
-import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -9,7 +7,6 @@ import org.soakwright.planner.batch.Batch;
 import org.soakwright.planner.batch.Progress;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.batch.TargetState;
-import org.soakwright.recipes.text.Shown;
 import org.soakwright.recipes.text.Unsound;
 
 /** Whether the targets of a load stand as the result says: followed exactly with its real times, and judged where a confidence is asked for. */
@@ -92,12 +89,12 @@ final class Judge {
                 Math.abs(state.value()),
                 Math.max(state.atMost().orElse(0), state.atLeast().orElse(0)));
         if (!sure && !(Math.abs(state.value() - reached.value()) <= ROUNDING * scale)) {
-            faults.add(what + " is said to be " + number(reached.value()) + " " + state.unit() + ", "
-                    + number(state.value()) + " " + state.unit() + " would be right.");
+            faults.add(what + " is said to be " + Faults.number(reached.value()) + " " + state.unit() + ", "
+                    + Faults.number(state.value()) + " " + state.unit() + " would be right.");
         }
         if (state.met() != reached.met()) {
             faults.add(what + " is said to be " + (reached.met() ? "met" : "missed") + " with "
-                    + number(state.value()) + " " + state.unit() + ", " + (state.met() ? "met" : "missed")
+                    + Faults.number(state.value()) + " " + state.unit() + ", " + (state.met() ? "met" : "missed")
                     + ", held to "
                     + limits(state.atMost(), state.atLeast(), state.unit()) + ", would be right.");
         }
@@ -105,12 +102,8 @@ final class Judge {
 
     private static String limits(OptionalDouble atMost, OptionalDouble atLeast, String unit) {
         List<String> sides = new ArrayList<>();
-        atLeast.ifPresent(limit -> sides.add("at least " + number(limit)));
-        atMost.ifPresent(limit -> sides.add("at most " + number(limit)));
+        atLeast.ifPresent(limit -> sides.add("at least " + Faults.number(limit)));
+        atMost.ifPresent(limit -> sides.add("at most " + Faults.number(limit)));
         return sides.isEmpty() ? "no limit" : String.join(" and ", sides) + " " + unit;
-    }
-
-    private static String number(double number) {
-        return Shown.number(BigDecimal.valueOf(number).round(new MathContext(10)));
     }
 }

@@ -1,14 +1,11 @@
 package org.soakwright.planner.line.verify;
 
-import java.math.BigDecimal;
-import java.math.MathContext;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalLong;
 import org.soakwright.recipes.model.line.Line;
 import org.soakwright.recipes.model.line.Order;
-import org.soakwright.recipes.text.Shown;
 
 /** Whether what is said of each lot's time and of the whole is what its steps and moves make. */
 final class Sums {
@@ -48,7 +45,7 @@ final class Sums {
             faults.add(entry.name() + " is due " + told(entry.due()) + ", " + told(due) + " would be right.");
         }
         if (entry.late() != late(cargo, order)) {
-            faults.add(entry.name() + " is late by " + number(entry.late()) + " s, " + late(cargo, order)
+            faults.add(entry.name() + " is late by " + Faults.number(entry.late()) + " s, " + late(cargo, order)
                     + " s would be right.");
         }
     }
@@ -98,13 +95,13 @@ final class Sums {
                 .count();
         equal("night-moves", result.nightMoves(), (double) nights);
         if (result.bound().orElse(0) > makespan) {
-            faults.add("bound-seconds is " + number(result.bound().orElse(0)) + ", no more than the makespan of "
+            faults.add("bound-seconds is " + Faults.number(result.bound().orElse(0)) + ", no more than the makespan of "
                     + makespan + " would be right.");
         }
         if (result.boundLateness().orElse(0) > lateness * (1 + ROUNDING) + ROUNDING) {
             faults.add(
-                    "bound-lateness-seconds is " + number(result.boundLateness().orElse(0))
-                            + ", no more than the lateness of " + number(lateness) + " would be right.");
+                    "bound-lateness-seconds is " + Faults.number(result.boundLateness().orElse(0))
+                            + ", no more than the lateness of " + Faults.number(lateness) + " would be right.");
         }
         boolean good = met && lateness == 0 && result.stops() == 0;
         if (result.met() != good) {
@@ -127,25 +124,21 @@ final class Sums {
         }
         if (currency.isEmpty()) {
             if (result.cost().isPresent()) {
-                faults.add("cost is " + number(result.cost().getAsDouble())
+                faults.add("cost is " + Faults.number(result.cost().getAsDouble())
                         + ", none would be right where recipes do not share one currency.");
             }
         } else if (cost.isPresent()) {
             if (result.cost().isPresent()) {
                 equal("cost", result.cost().getAsDouble(), cost.getAsDouble());
             } else {
-                faults.add("cost is missing, " + number(cost.getAsDouble()) + " would be right.");
+                faults.add("cost is missing, " + Faults.number(cost.getAsDouble()) + " would be right.");
             }
         }
     }
 
     private void equal(String what, double found, double right) {
         if (!(Math.abs(found - right) <= ROUNDING * Math.abs(right))) {
-            faults.add(what + " is " + number(found) + ", " + number(right) + " would be right.");
+            faults.add(what + " is " + Faults.number(found) + ", " + Faults.number(right) + " would be right.");
         }
-    }
-
-    private static String number(double number) {
-        return Shown.number(BigDecimal.valueOf(number).round(new MathContext(12)));
     }
 }

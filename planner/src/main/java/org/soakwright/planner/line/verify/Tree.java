@@ -22,6 +22,11 @@ import org.jspecify.annotations.Nullable;
 final class Tree {
     private static final String MOMENT = "a time with its offset such as 2026-03-02T06:15+01:00";
 
+    /** Lines start from 2000 to 2199, and no step lasts longer than a century. */
+    private static final int FIRST_YEAR = 1900;
+
+    private static final int LAST_YEAR = 2400;
+
     private final Faults faults;
     private final String path;
     private final Map<?, ?> members;
@@ -174,7 +179,9 @@ final class Tree {
         if (found instanceof String text) {
             try {
                 OffsetDateTime time = OffsetDateTime.parse(text);
-                if (time.getNano() != 0) {
+                if (time.getYear() < FIRST_YEAR || time.getYear() > LAST_YEAR) {
+                    wrong(name, found, "a time from " + FIRST_YEAR + " to " + LAST_YEAR);
+                } else if (time.getNano() != 0) {
                     wrong(name, found, "a whole second");
                 } else if (!zone.getRules().getOffset(time.toInstant()).equals(time.getOffset())) {
                     wrong(

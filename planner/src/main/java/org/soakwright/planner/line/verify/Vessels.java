@@ -1,7 +1,5 @@
 package org.soakwright.planner.line.verify;
 
-import java.math.BigDecimal;
-import java.math.MathContext;
 import java.time.ZonedDateTime;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -22,9 +20,6 @@ import org.soakwright.recipes.text.Shown;
 final class Vessels {
     /** What sums may be off by: rounding. */
     private static final double ROUNDING = 1e-9;
-
-    /** To what masses in one room are weighed, kg a load. */
-    private static final double GRAM = 1e-3;
 
     private final Line line;
     private final Wall wall;
@@ -97,17 +92,13 @@ final class Vessels {
             }
         }
         if (group.capacity() != null && cargo.kg() > group.capacity().si() * (1 + ROUNDING)) {
-            faults.add(what + " brings " + number(cargo.kg()) + " kg into " + vessel.name() + ", at most "
+            faults.add(what + " brings " + Faults.number(cargo.kg()) + " kg into " + vessel.name() + ", at most "
                     + group.capacity() + " would be right.");
         }
     }
 
     private static String litres(double m3) {
-        return number(m3 * 1000) + " L";
-    }
-
-    private static String number(double number) {
-        return Shown.number(BigDecimal.valueOf(number).round(new MathContext(7)));
+        return Faults.number(m3 * 1000) + " L";
     }
 
     private void visits(Cargo cargo) {
@@ -176,10 +167,10 @@ final class Vessels {
                     until = Math.min(until, other.from());
                 }
             }
-            peaks.add(visit.cargo().name(), visit.from(), until, visit.cargo().kg() - GRAM);
+            peaks.add(visit.cargo().name(), visit.from(), until, visit.cargo().kg());
         }
         for (Peaks.Excess excess : peaks.over(at -> capacity * (1 + ROUNDING), false)) {
-            faults.add(vessel.name() + " holds " + number(excess.used()) + " kg at " + wall.at(excess.from()) + " with "
+            faults.add(vessel.name() + " holds " + Faults.number(excess.used()) + " kg at " + wall.at(excess.from()) + " with "
                     + excess.who() + ", at most " + vessel.group().capacity() + " would be right.");
         }
     }
@@ -209,7 +200,7 @@ final class Vessels {
         double most = utility.atMost().si();
         for (Peaks.Excess excess : peaks.over(at -> most * (1 + ROUNDING), false)) {
             faults.add("Of " + utility.name() + " "
-                    + number(utility.atMost().unit().fromSi(excess.used())) + " "
+                    + Faults.number(utility.atMost().unit().fromSi(excess.used())) + " "
                     + utility.atMost().unit().symbol() + " are drawn at " + wall.at(excess.from()) + " by "
                     + excess.who() + ", at most " + utility.atMost() + " would be right.");
         }
