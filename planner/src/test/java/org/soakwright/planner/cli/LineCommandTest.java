@@ -68,7 +68,8 @@ class LineCommandTest {
     void aCautionStopsALineUntilSomebodyAnswersForIt() throws IOException {
         String line = hall("18:00");
         Path cords = desk.path("cords.yaml");
-        Files.writeString(cords, Files.readString(cords).replaceAll("temperature: [0-9]+ Cel", "temperature: 30 Cel"));
+        String warm = Files.readString(cords).replaceAll("temperature: [0-9]+ Cel", "temperature: 30 Cel");
+        Files.writeString(cords, warm.replace("from: 2 h", "from: 6 h"));
         Desk.Printed stopped = desk.give("line", line, "--effort", "0");
         assertEquals(Exit.NO_PLAN, stopped.status(), stopped.err());
         assertTrue(stopped.out().contains("This is not a plan to use."), stopped.out());

@@ -59,8 +59,9 @@ public final class Improvement {
      *
      * @param lateness no schedule has less, s times weight
      * @param makespan no schedule no later than the one found has less, s
+     * @param tooLarge whether there is more than a program takes
      */
-    public record Outcome(Search.Found found, OptionalDouble lateness, OptionalDouble makespan) {}
+    public record Outcome(Search.Found found, OptionalDouble lateness, OptionalDouble makespan, boolean tooLarge) {}
 
     /**
      * Improves a schedule that meets everything.
@@ -69,11 +70,9 @@ public final class Improvement {
      * @param placings of the search to spend on what the program proposes
      */
     public Outcome of(Search.Found first, double work, long placings) {
-        if (!Native.loads()
-                || work <= 0
-                || jobs.stream().mapToInt(Job::size).sum() > MOST_PHASES
-                || first.missing() > 0) {
-            return new Outcome(first, OptionalDouble.empty(), OptionalDouble.empty());
+        boolean tooLarge = jobs.stream().mapToInt(Job::size).sum() > MOST_PHASES;
+        if (tooLarge || work <= 0 || first.missing() > 0 || !Native.loads()) {
+            return new Outcome(first, OptionalDouble.empty(), OptionalDouble.empty(), tooLarge);
         }
         first.schedule().jobs().forEach(this::cutAt);
         jobs.stream().map(Job::physics).distinct().forEach(this::cutWhereFollowed);
@@ -120,7 +119,7 @@ public final class Improvement {
             lateness = proof.lateness();
             makespan = proof.makespan();
         }
-        return new Outcome(best, lateness, makespan);
+        return new Outcome(best, lateness, makespan, false);
     }
 
     /** A schedule in the order of another whose times meet everything; empty where so many tangents do not lead to one. */

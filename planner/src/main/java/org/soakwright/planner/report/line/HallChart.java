@@ -24,7 +24,7 @@ final class HallChart {
     private final Times times;
     private final ChartClock clock;
     private final List<List<TimeChart.Stay>> stays = new ArrayList<>();
-    private final List<List<TimeChart.Due>> dues = new ArrayList<>();
+    private final List<List<TimeChart.Late>> late = new ArrayList<>();
     private final Lanes[] lanes;
     private final long[] busy;
 
@@ -39,7 +39,7 @@ final class HallChart {
         for (int i = 0; i < lanes.length; i++) {
             lanes[i] = new Lanes();
             stays.add(new ArrayList<>());
-            dues.add(new ArrayList<>());
+            late.add(new ArrayList<>());
         }
     }
 
@@ -56,7 +56,7 @@ final class HallChart {
         List<Station> stations = plan.schedule().shop().stations();
         for (int i = 0; i < stations.size(); i++) {
             rows.add(new TimeChart.Row(
-                    stations.get(i).name(), lanes[i].count(), stays.get(i), closed(stations.get(i)), dues.get(i)));
+                    stations.get(i).name(), lanes[i].count(), stays.get(i), closed(stations.get(i)), late.get(i)));
         }
         Lanes hands = new Lanes();
         List<TimeChart.Tick> work = account.moves().stream()
@@ -81,8 +81,12 @@ final class HallChart {
                 clock.panels());
     }
 
-    /** The legs of a load from one lift to the next. */
-    private record Stay(LoadPlan load, int station, List<Placed.Visit> visits, boolean last) {
+    /**
+     * The legs of a load from one lift to the next.
+     *
+     * @param before when the stay before it was over; before everything for the first
+     */
+    private record Stay(LoadPlan load, int station, List<Placed.Visit> visits, long before, boolean last) {
         long from() {
             return visits.get(0).start();
         }
@@ -96,12 +100,14 @@ final class HallChart {
         Placed placed = load.placed();
         List<Stay> stays = new ArrayList<>();
         List<Placed.Visit> visits = new ArrayList<>();
+        long before = Long.MIN_VALUE;
         int size = placed.job().size();
         for (int k = 0; k < size; k++) {
             visits.add(placed.visit(k));
             boolean leaves = k + 1 == size || placed.job().phase(k + 1).before() instanceof Joint.Lift;
             if (leaves) {
-                stays.add(new Stay(load, placed.visit(k).station(), List.copyOf(visits), k + 1 == size));
+                stays.add(new Stay(load, placed.visit(k).station(), List.copyOf(visits), before, k + 1 == size));
+                before = placed.visit(k).end();
                 visits.clear();
             }
         }
@@ -132,10 +138,15 @@ final class HallChart {
         int kind = account.recipeFiles().indexOf(stay.load().load().recipeFile());
         before.add(new TimeChart.Stay(
                 lane, kind, labels(stay.load().load()), legs, changes, new TimeChart.Span(stay.until(), until)));
-        if (stay.last()) {
-            account.latest(stay.load())
-                    .ifPresent(lot ->
-                            dues.get(stay.station()).add(new TimeChart.Due(lane, lot.done() - lot.late(), lot.done())));
+        account.latest(stay.load()).ifPresent(lot -> late(stay, lane, lot.done() - lot.late()));
+    }
+
+    /** What of a stay comes after its load was due; the first such stay bears the flag. */
+    private void late(Stay stay, int lane, long due) {
+        boolean first = stay.before() <= due && (stay.until() > due || stay.last());
+        if (first || stay.from() > due) {
+            long from = Math.min(Math.max(due, stay.from()), stay.until());
+            late.get(stay.station()).add(new TimeChart.Late(lane, new TimeChart.Span(from, stay.until()), first));
         }
     }
 

@@ -61,15 +61,19 @@ public final class TimeChart {
         }
     }
 
-    /** Something that was to be over before, in a lane of a row. */
-    public record Due(int lane, long moment, long done) {}
+    /**
+     * A time of a stay that lies after it was to be over.
+     *
+     * @param first whether a flag stands where it begins
+     */
+    public record Late(int lane, Span span, boolean first) {}
 
     /** One vessel. */
-    public record Row(String name, int lanes, List<Stay> stays, List<Named> closed, List<Due> dues) {
+    public record Row(String name, int lanes, List<Stay> stays, List<Named> closed, List<Late> late) {
         public Row {
             stays = List.copyOf(stays);
             closed = List.copyOf(closed);
-            dues = List.copyOf(dues);
+            late = List.copyOf(late);
         }
     }
 

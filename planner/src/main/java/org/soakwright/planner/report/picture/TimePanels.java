@@ -142,10 +142,11 @@ final class TimePanels {
                     on.draw(box, on.look().grid(), Look.dashed(1));
                 });
             }
-            if (subject.rows().stream().anyMatch(row -> !row.dues().isEmpty())) {
-                pen.entry(
-                        "due, and how late",
-                        (on, box) -> due(on, box.getX() + 1, box.getMaxX(), box.getY(), box.getMaxY()));
+            if (subject.rows().stream().anyMatch(row -> !row.late().isEmpty())) {
+                pen.entry("late from here on", (on, box) -> {
+                    flag(on, box.getX() + 1, box.getY(), box.getMaxY());
+                    under(on, box.getX() + 1, box.getMaxX(), box.getMaxY() - 1);
+                });
             }
             return pen.line + 1;
         }
@@ -189,19 +190,24 @@ final class TimePanels {
         }
     }
 
-    /** From when something was due until it was done. */
-    private static void due(Sheet sheet, double from, double until, double top, double bottom) {
+    /** Where something was due. */
+    private static void flag(Sheet sheet, double at, double top, double bottom) {
         Look look = sheet.look();
         Path2D flag = new Path2D.Double();
-        flag.moveTo(from - 1, top);
-        flag.lineTo(from + 6, top);
-        flag.lineTo(from - 1, top + 6);
+        flag.moveTo(at - 1, top);
+        flag.lineTo(at + 6, top);
+        flag.lineTo(at - 1, top + 6);
         flag.closePath();
         sheet.fill(flag, look.limit());
-        sheet.draw(new Line2D.Double(from, top, from, bottom), look.limit(), new BasicStroke(2));
-        if (until > from + 1) {
-            sheet.draw(new Line2D.Double(from, bottom - 1, until, bottom - 1), look.limit(), Look.dashed(2, 3, 3));
-        }
+        sheet.draw(new Line2D.Double(at, top, at, bottom), look.limit(), new BasicStroke(2));
+    }
+
+    /** Under what is late. */
+    private static void under(Sheet sheet, double from, double until, double y) {
+        sheet.draw(
+                new Line2D.Double(from, y, Math.max(until, from + 1), y),
+                sheet.look().limit(),
+                Look.dashed(2, 3, 3));
     }
 
     /** One panel. */
@@ -322,12 +328,19 @@ final class TimePanels {
             for (TimeChart.Stay stay : row.stays()) {
                 stay(stay, y + PADDING + stay.lane() * lane, lane - 1);
             }
-            for (TimeChart.Due due : row.dues()) {
-                boolean here = due.moment() >= span.from() && due.moment() < span.until();
-                if (here) {
-                    double at = y + PADDING + due.lane() * lane;
-                    due(sheet, x(due.moment()), x(Math.min(due.done(), span.until())), at - 2, at + lane + 1);
-                }
+            for (TimeChart.Late late : row.late()) {
+                late(late, y + PADDING + late.lane() * lane, lane);
+            }
+        }
+
+        private void late(TimeChart.Late late, double y, double lane) {
+            TimeChart.Span shown = late.span().within(span);
+            boolean begins = late.span().from() >= span.from() && late.span().from() < span.until();
+            if (late.first() && begins) {
+                flag(sheet, x(late.span().from()), y - 2, y + lane + 1);
+            }
+            if (shown.length() > 0) {
+                under(sheet, x(shown.from()), x(shown.until()), y + lane);
             }
         }
 

@@ -44,7 +44,9 @@ class TimeChartTest {
                     1,
                     stays,
                     v == 1 ? List.of(new TimeChart.Named(new TimeChart.Span(DAY, 2 * DAY), "inspection")) : List.of(),
-                    v == 2 ? List.of(new TimeChart.Due(0, DAY, 2 * DAY)) : List.of()));
+                    v == 2
+                            ? List.of(new TimeChart.Late(0, new TimeChart.Span(8 * HOUR, 12 * HOUR), true))
+                            : List.of()));
         }
         List<TimeChart.Span> panels = new ArrayList<>();
         List<TimeChart.Mark> days = new ArrayList<>();
