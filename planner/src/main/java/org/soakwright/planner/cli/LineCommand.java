@@ -1,12 +1,12 @@
 package org.soakwright.planner.cli;
 
 import java.nio.file.Path;
-import java.util.List;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.line.LinePlan;
 import org.soakwright.planner.line.LinePlanner;
 import org.soakwright.planner.line.Options;
+import org.soakwright.planner.line.verify.Verification;
 import org.soakwright.planner.report.Figures;
 import org.soakwright.planner.report.Stamp;
 import org.soakwright.planner.report.line.LineFindings;
@@ -17,6 +17,7 @@ import org.soakwright.planner.report.line.VerifiedSheet;
 import org.soakwright.recipes.LineOutcome;
 import org.soakwright.recipes.Lines;
 import org.soakwright.recipes.model.line.Line;
+import org.soakwright.recipes.text.Document;
 import org.soakwright.recipes.text.Shown;
 import org.soakwright.recipes.text.Source;
 import org.soakwright.recipes.text.Unsound;
@@ -109,11 +110,12 @@ final class LineCommand implements Callable<Integer> {
             throw new Refusal(Exit.BAD_INPUT, "--verify writes no report; leave --report out");
         }
         Path path = RecipeFile.path("RESULT", result);
-        List<String> broken = Verifying.NOBODY.broken(read, Source.of(path).text());
+        Verification.Verdict verdict =
+                Verification.of(read, Source.of(path, Document.RESULT).text());
         return new Finding(
-                broken.isEmpty() ? Exit.DONE : Exit.NO_PLAN,
-                () -> VerifiedSheet.of(read, broken, session.style()),
-                () -> VerifiedSheet.json(stamp, read, broken));
+                verdict.isFine() ? Exit.DONE : Exit.NO_PLAN,
+                () -> VerifiedSheet.of(read, verdict, session.style()),
+                () -> VerifiedSheet.json(stamp, read, verdict));
     }
 
     private Options options() throws Refusal {

@@ -225,6 +225,22 @@ final class Model {
                     start, LinearExpr.newBuilder().add(before).add(gap / tick).build());
             if (gap > 0) {
                 heads.add(new Taken(fixed(before, gap, job.name()), 1));
+                drawnOn(job, k - 1, before, gap);
+            }
+        }
+    }
+
+    /** What a phase draws goes on while people change what is around the job. */
+    private void drawnOn(Job job, int k, LinearArgument from, long gap) {
+        for (int u = 0; u < utilities.size(); u++) {
+            for (Map.Entry<Integer, Literal> in : in(job, k).entrySet()) {
+                long draw = draw(job.phase(k), in.getKey(), u);
+                if (draw > 0) {
+                    IntervalVar there = in(job, k).size() == 1
+                            ? fixed(from, gap, job.name())
+                            : model.newOptionalFixedSizeIntervalVar(from, gap / tick, in.getValue(), job.name());
+                    utilities.get(u).add(new Taken(there, draw));
+                }
             }
         }
     }
