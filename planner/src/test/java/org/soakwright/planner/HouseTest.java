@@ -20,6 +20,8 @@ class HouseTest {
             .definedBy("org.soakwright.planner.cli..")
             .layer("report")
             .definedBy("org.soakwright.planner.report..")
+            .layer("line")
+            .definedBy("org.soakwright.planner.line..")
             .layer("batch")
             .definedBy("org.soakwright.planner.batch..")
             .layer("conditions")
@@ -32,12 +34,14 @@ class HouseTest {
             .mayNotBeAccessedByAnyLayer()
             .whereLayer("report")
             .mayOnlyBeAccessedByLayers("cli")
-            .whereLayer("batch")
+            .whereLayer("line")
             .mayOnlyBeAccessedByLayers("report", "cli")
+            .whereLayer("batch")
+            .mayOnlyBeAccessedByLayers("line", "report", "cli")
             .whereLayer("conditions")
-            .mayOnlyBeAccessedByLayers("batch", "report", "cli")
+            .mayOnlyBeAccessedByLayers("batch", "line", "report", "cli")
             .whereLayer("recipes")
-            .mayOnlyBeAccessedByLayers("conditions", "batch", "report", "cli")
+            .mayOnlyBeAccessedByLayers("conditions", "batch", "line", "report", "cli")
             .whereLayer("solver")
             .mayOnlyBeAccessedByLayers("conditions", "batch");
 
@@ -56,6 +60,20 @@ class HouseTest {
             .should()
             .dependOnClassesThat()
             .resideInAnyPackage("java.io..", "java.nio..", "java.time..", "java.text..", "org.yaml..");
+
+    @ArchTest
+    static final ArchRule theShopKnowsNoRecipeNoFileAndNoClockOnAWall = noClasses()
+            .that()
+            .resideInAPackage("org.soakwright.planner.line.shop..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage(
+                    "org.soakwright.recipes..",
+                    "org.soakwright.planner.batch..",
+                    "org.soakwright.planner.conditions..",
+                    "java.io..",
+                    "java.nio..",
+                    "java.time..");
 
     @ArchTest
     static final ArchRule insideTheSolverChainsStandOnStagesAndStagesOnShapes = layeredArchitecture()

@@ -24,7 +24,9 @@ final class Misuse {
                 return "two batches are compared; name both such as " + spec.name()
                         + " three-waters.yaml four-waters.yaml";
             }
-            return "no recipe is named; name one such as " + spec.name() + " loin-desalting.yaml";
+            return isLine(spec)
+                    ? "no line is named; name one such as " + spec.name() + " quayside-hall.yaml"
+                    : "no recipe is named; name one such as " + spec.name() + " loin-desalting.yaml";
         }
         String message = String.valueOf(problem.getMessage());
         return message.isEmpty()
@@ -32,10 +34,15 @@ final class Misuse {
                 : message.substring(0, 1).toLowerCase(java.util.Locale.ROOT) + message.substring(1);
     }
 
+    private static boolean isLine(CommandSpec spec) {
+        return spec.name().equals(LineCommand.NAME);
+    }
+
     private static String unmatched(String word, CommandSpec spec) {
         boolean option = word.startsWith("-");
         if (!option && spec.subcommands().isEmpty()) {
-            String most = spec.positionalParameters().size() > 1 ? "two batches" : "one recipe";
+            String most =
+                    spec.positionalParameters().size() > 1 ? "two batches" : isLine(spec) ? "one line" : "one recipe";
             return most + " at a time: found " + Shown.quoted(word) + " as well";
         }
         Collection<String> known =

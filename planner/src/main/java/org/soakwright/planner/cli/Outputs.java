@@ -44,6 +44,11 @@ final class Outputs {
         spec.addOption(quiet);
     }
 
+    /** Whether a folder was named for a report. */
+    boolean wantsReport() {
+        return report.getValue() != null;
+    }
+
     /** What looks into its input only after the outputs have been found fit. */
     interface Work {
         Finding find() throws Refusal;

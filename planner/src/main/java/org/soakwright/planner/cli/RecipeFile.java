@@ -27,6 +27,6 @@ final class RecipeFile {
     }
 
     private static Unsound notAFile(String label) {
-        return new Unsound(Place.of(label), "this is no file name; name a recipe file");
+        return new Unsound(Place.of(label), "this is no file name; name a file");
     }
 }

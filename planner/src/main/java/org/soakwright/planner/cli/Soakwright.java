@@ -59,7 +59,7 @@ public final class Soakwright {
                 "java -jar soakwright.jar COMMAND --help tells more.",
                 "",
                 "Exit status: 0 done, follow also when targets are missed; 1 plan found no choice that meets",
-                "the targets; 2 bad input or usage; 3 internal error or output that could not be written");
+                "the targets, line none with every lot in time; 2 bad input or usage; 3 internal error or output that could not be written");
         top.usageMessage()
                 .customSynopsis("soakwright COMMAND RECIPE [--json FILE] [--report DIR] [--quiet]")
                 .optionListHeading("%n")
@@ -70,6 +70,8 @@ public final class Soakwright {
                 .forEach(spec -> top.addSubcommand(spec.name(), spec));
         CommandSpec compare = new CompareCommand(session).spec();
         top.addSubcommand(compare.name(), compare);
+        CommandSpec line = new LineCommand(session).spec();
+        top.addSubcommand(line.name(), line);
         CommandLine commands = new CommandLine(top)
                 .setOut(out)
                 .setErr(err)

@@ -72,9 +72,9 @@ final class Hall {
         return groups.get(station);
     }
 
-    /** What a load takes of vessels that hold many, in grams. */
+    /** What a load takes of vessels that hold many, in grams, rounded up. */
     static long amount(double kg) {
-        return Math.round(kg * GRAMS);
+        return (long) Math.ceil(kg * GRAMS - 1e-6);
     }
 
     private Station station(VesselGroup group, int number) {
@@ -87,7 +87,9 @@ final class Hall {
         return new Station(
                 group.vessel(number),
                 line.vessels().indexOf(group),
-                group.capacity() == null ? 0 : amount(group.capacity().si()),
+                group.capacity() == null
+                        ? 0
+                        : Math.max(1, (long) Math.floor(group.capacity().si() * GRAMS + 1e-6)),
                 group.turnaroundSeconds(),
                 closed);
     }

@@ -13,6 +13,7 @@ import org.soakwright.planner.batch.Cost;
 import org.soakwright.planner.batch.Plan;
 import org.soakwright.planner.batch.Planner;
 import org.soakwright.planner.batch.Progress;
+import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.line.shop.Job;
 import org.soakwright.planner.line.shop.Phase;
 import org.soakwright.planner.line.shop.Tariff;
@@ -56,7 +57,12 @@ final class Jobs {
     private record Prepared(Plan plan, double[] seconds, RoutePhysics physics) {}
 
     /** What a load looks like for the shop, and what goes on in it. */
-    record Made(Load load, Route route, RoutePhysics physics, Plan alone, Job job) {}
+    record Made(Load load, Route route, RoutePhysics physics, Plan alone, Job job) {
+        /** Followed with such times, with the mass of this load. */
+        Run followed(long[] times) {
+            return alone.run().holding(new Batch(route.run())).follow(route.seconds(times));
+        }
+    }
 
     /**
      * The jobs of loads.

@@ -55,6 +55,11 @@ record Route(Recipe written, Recipe run, List<Leg> legs, List<Joint> joints, int
         return recipe.withLot(other);
     }
 
+    /** The step of a leg. */
+    String name(int leg) {
+        return written.steps().get(legs.get(leg).step()).name();
+    }
+
     int size() {
         return legs.size();
     }

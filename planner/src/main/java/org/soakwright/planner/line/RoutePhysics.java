@@ -5,7 +5,9 @@ import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import org.jspecify.annotations.Nullable;
 import org.soakwright.planner.batch.Batch;
+import org.soakwright.planner.batch.LeastTime;
 import org.soakwright.planner.batch.Run;
 import org.soakwright.planner.line.shop.Physics;
 
@@ -17,6 +19,7 @@ final class RoutePhysics implements Physics {
     private final Batch batch;
     private final List<long[]> styles;
     private final Map<Times, Reading> known = new LinkedHashMap<>();
+    private @Nullable List<Cut> certain;
 
     /**
      * A route's physics.
@@ -70,6 +73,16 @@ final class RoutePhysics implements Physics {
     @Override
     public List<long[]> styles() {
         return styles;
+    }
+
+    @Override
+    public List<Cut> certain() {
+        if (certain == null) {
+            certain = LeastTime.of(route.run()).stream()
+                    .map(bound -> new Cut(route.byTimes(bound.weights()), bound.seconds()))
+                    .toList();
+        }
+        return certain;
     }
 
     Run follow(long[] times) {

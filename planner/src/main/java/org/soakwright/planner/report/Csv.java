@@ -38,6 +38,10 @@ public final class Csv {
                         : Double.toString(value));
     }
 
+    public Csv whole(long value) {
+        return cell(Long.toString(value));
+    }
+
     /** An empty cell where there is none. */
     public Csv number(OptionalDouble value) {
         return value.isPresent() ? number(value.getAsDouble()) : cell("");

@@ -52,6 +52,16 @@ public final class ResultJson {
         return JsonText.object(new ResultJson(stamp, plan.run(), plan)::write);
     }
 
+    /** A member {@code targets} with each as it stands in a run. */
+    public static void targets(JsonText json, Run run, List<TargetState> states) throws IOException {
+        ResultJson result = new ResultJson(new Stamp("", ""), run, null);
+        json.array("targets", () -> {
+            for (TargetState state : states) {
+                json.element(() -> result.target(json, state));
+            }
+        });
+    }
+
     private void write(JsonText json) throws IOException {
         json.string("soakwright", stamp.version());
         json.string("title", recipe.title());
@@ -67,11 +77,7 @@ public final class ResultJson {
                 json.element(() -> step(json, end));
             }
         });
-        json.array("targets", () -> {
-            for (TargetState state : run.targets()) {
-                json.element(() -> target(json, state));
-            }
-        });
+        targets(json, run, run.targets());
         totals(json, "totals", run.totals());
         reasons(json);
         Cautions cautions = Cautions.of(run);

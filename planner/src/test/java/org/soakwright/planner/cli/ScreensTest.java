@@ -12,6 +12,9 @@ import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import org.soakwright.planner.line.HandmadePlan;
+import org.soakwright.planner.report.Style;
+import org.soakwright.planner.report.line.LineSheet;
 
 /** What people see, character by character. */
 class ScreensTest {
@@ -36,7 +39,7 @@ class ScreensTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"check", "follow", "plan", "compare"})
+    @ValueSource(strings = {"check", "follow", "plan", "compare", "line"})
     void everyCommandHelpsWithAnExample(String command) throws IOException {
         Desk.Printed printed = desk.give(command, "--help");
         assertEquals(Exit.DONE, printed.status());
@@ -78,6 +81,22 @@ class ScreensTest {
         assertShown(screen, printed.out());
     }
 
+    /** Plans put together by hand, so that screens do not change with how plans are made. */
+    @Test
+    void aLineReadsAsItIsMeantTo() throws IOException {
+        assertFits("line.txt", LineSheet.of(HandmadePlan.of(), Style.PLAIN));
+    }
+
+    @Test
+    void aLineThatMissesReadsAsItIsMeantTo() throws IOException {
+        assertFits("line-missing.txt", LineSheet.of(HandmadePlan.missing(), Style.PLAIN));
+    }
+
+    private static void assertFits(String screen, String shown) throws IOException {
+        assertTrue(shown.lines().allMatch(line -> line.codePointCount(0, line.length()) <= WIDEST));
+        assertShown(screen, shown);
+    }
+
     @Test
     void timesOfDayStandBesideTheClock() throws IOException {
         Desk.Printed printed = desk.give("follow", desk.recipe("desalting.yaml"), "--start", "2026-12-31T18:00");
@@ -108,6 +127,8 @@ class ScreensTest {
         "'plan a.yaml --json',   misuse-no-file.txt",
         "'compare a.yaml',       misuse-no-second.txt",
         "'compare a b c',        misuse-three.txt",
+        "'line',                 misuse-no-line.txt",
+        "'line a.yaml b.yaml',   misuse-two-lines.txt",
     })
     void aMisspeltCommandLineGetsAHint(String line, String screen) throws IOException {
         Desk.Printed printed = desk.give(line.split(" ", -1));

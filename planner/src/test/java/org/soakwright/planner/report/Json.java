@@ -11,14 +11,14 @@ import java.util.Map;
 import org.jspecify.annotations.Nullable;
 
 /** JSON read back into maps in the order written, lists, strings, numbers, truths and null. */
-final class Json {
+public final class Json {
     private final JsonParser parser;
 
     private Json(JsonParser parser) {
         this.parser = parser;
     }
 
-    static Map<String, @Nullable Object> object(String text) throws IOException {
+    public static Map<String, @Nullable Object> object(String text) throws IOException {
         try (JsonParser parser = new JsonFactory().createParser(text)) {
             parser.nextToken();
             return new Json(parser).object();
@@ -60,7 +60,7 @@ final class Json {
 
     /** What a path of names and positions leads to. */
     @SuppressWarnings("unchecked")
-    static @Nullable Object at(@Nullable Object from, Object... path) {
+    public static @Nullable Object at(@Nullable Object from, Object... path) {
         @Nullable Object here = from;
         for (Object step : path) {
             if (step instanceof Integer index) {
@@ -73,13 +73,13 @@ final class Json {
     }
 
     /** The number a path leads to. */
-    static double number(@Nullable Object from, Object... path) {
+    public static double number(@Nullable Object from, Object... path) {
         return (double) java.util.Objects.requireNonNull(at(from, path));
     }
 
     /** The names of the members of what a path leads to. */
     @SuppressWarnings("unchecked")
-    static List<String> names(@Nullable Object from, Object... path) {
+    public static List<String> names(@Nullable Object from, Object... path) {
         return List.copyOf(((Map<String, @Nullable Object>) java.util.Objects.requireNonNull(at(from, path))).keySet());
     }
 }

@@ -5,7 +5,8 @@ public enum Document {
     RECIPE("recipe", 1 << 20, "a recipe needs a few kilobytes", 10_000, "a recipe needs a few hundred", "language: 1"),
     LINE("line", 2 << 20, "a line of 5000 lots needs less", 100_000, "a line of 5000 lots needs fewer", "a title"),
     LIST("list", 8 << 20, "a list of 100 000 pieces needs less", 0, "", ""),
-    LOTS("list", 2 << 20, "a list of 5000 lots needs less", 0, "", "");
+    LOTS("list", 2 << 20, "a list of 5000 lots needs less", 0, "", ""),
+    RESULT("result", 64 << 20, "a result of 5000 lots needs less", 0, "", "");
 
     final String label;
 

@@ -10,11 +10,13 @@ import com.google.ortools.sat.LinearExpr;
 import com.google.ortools.sat.Literal;
 import com.google.ortools.util.Domain;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Set;
 import org.soakwright.planner.line.shop.Carriage;
 import org.soakwright.planner.line.shop.Job;
@@ -29,20 +31,20 @@ import org.soakwright.planner.line.shop.Staffing;
 import org.soakwright.planner.line.shop.Station;
 
 /**
- * A shop's rules as constraints on when phases start and end, in ticks. Alike stations are one thing of which several can be taken; which of
- * them a job gets is settled afterwards, so this is a relaxation where single stations are closed. Physics comes in as linear cuts.
+ * A shop's rules as constraints on when phases start and end, in ticks. Alike stations are one pool of which several can be taken; which of
+ * them a job gets is settled afterwards. A station that is closed at times, or holds many, is a pool of its own. Physics comes in as linear cuts.
  */
 final class Model {
     /** What the largest weight of a cut becomes. */
-    private static final long FINE = 10_000;
+    private static final long FINE = 1_000_000;
 
     private final CpModel model = new CpModel();
     private final Shop shop;
-    private final List<Job> jobs;
+    private final Pools pools;
     private final long tick;
     private final long horizon;
     private final IdentityHashMap<Job, Unknowns> unknowns = new IdentityHashMap<>();
-    private final Map<Integer, List<Taken>> byGroup = new LinkedHashMap<>();
+    private final Map<Integer, List<Taken>> byPool = new LinkedHashMap<>();
     private final List<Taken> heads = new ArrayList<>();
     private final List<Taken> hoist = new ArrayList<>();
     private final List<Taken> watched = new ArrayList<>();
@@ -53,7 +55,7 @@ final class Model {
     /**
      * What is to be found of a job.
      *
-     * @param in whether a phase is in each group that it can be in
+     * @param in whether a phase is in each pool that it can be in
      */
     private record Unknowns(IntVar[] starts, IntVar[] ends, List<Map<Integer, Literal>> in) {}
 
@@ -67,7 +69,7 @@ final class Model {
      */
     Model(Shop shop, List<Job> jobs, long tick, long horizon) {
         this.shop = shop;
-        this.jobs = jobs;
+        pools = new Pools(shop);
         this.tick = tick;
         this.horizon = horizon / tick;
         lifting = staffed(shop.carriage().heads());
@@ -82,6 +84,10 @@ final class Model {
         }
     }
 
+    Pools pools() {
+        return pools;
+    }
+
     CpModel model() {
         return model;
     }
@@ -94,7 +100,7 @@ final class Model {
         return of(job).ends()[phase];
     }
 
-    /** Whether a phase is in each group that it can be in. */
+    /** Whether a phase is in each pool that it can be in. */
     Map<Integer, Literal> in(Job job, int phase) {
         return of(job).in().get(phase);
     }
@@ -219,6 +225,22 @@ final class Model {
                     start, LinearExpr.newBuilder().add(before).add(gap / tick).build());
             if (gap > 0) {
                 heads.add(new Taken(fixed(before, gap, job.name()), 1));
+                drawnOn(job, k - 1, before, gap);
+            }
+        }
+    }
+
+    /** What a phase draws goes on while people change what is around the job. */
+    private void drawnOn(Job job, int k, LinearArgument from, long gap) {
+        for (int u = 0; u < utilities.size(); u++) {
+            for (Map.Entry<Integer, Literal> in : in(job, k).entrySet()) {
+                long draw = draw(job.phase(k), in.getKey(), u);
+                if (draw > 0) {
+                    IntervalVar there = in(job, k).size() == 1
+                            ? fixed(from, gap, job.name())
+                            : model.newOptionalFixedSizeIntervalVar(from, gap / tick, in.getValue(), job.name());
+                    utilities.get(u).add(new Taken(there, draw));
+                }
             }
         }
     }
@@ -237,17 +259,15 @@ final class Model {
 
     private Map<Integer, Literal> choice(Job job, int k) {
         Set<Integer> open = new LinkedHashSet<>();
-        job.phase(k)
-                .stations()
-                .forEach(station -> open.add(shop.stations().get(station).group()));
+        job.phase(k).stations().forEach(station -> open.add(pools.of(station)));
         Map<Integer, Literal> in = new LinkedHashMap<>();
         if (open.size() == 1) {
             in.put(open.iterator().next(), model.trueLiteral());
             return in;
         }
-        for (int group : open) {
-            BoolVar literal = model.newBoolVar(job.name() + " " + k + " in " + group);
-            in.put(group, literal);
+        for (int pool : open) {
+            BoolVar literal = model.newBoolVar(job.name() + " " + k + " in " + pool);
+            in.put(pool, literal);
         }
         model.addExactlyOne(in.values());
         return in;
@@ -276,9 +296,9 @@ final class Model {
     }
 
     /** Alike stations draw alike. */
-    private long draw(Phase phase, int group, int utility) {
+    private long draw(Phase phase, int pool, int utility) {
         for (int i = 0; i < phase.stations().size(); i++) {
-            if (shop.stations().get(phase.stations().get(i)).group() == group) {
+            if (pools.of(phase.stations().get(i)) == pool) {
                 List<Long> draws = phase.draws().get(i);
                 return draws.isEmpty() ? 0 : draws.get(utility);
             }
@@ -288,8 +308,8 @@ final class Model {
 
     private void occupy(Job job, int first, int last) {
         Map<Integer, Literal> in = in(job, first);
-        in.forEach((group, literal) -> {
-            Station station = any(group);
+        in.forEach((pool, literal) -> {
+            Station station = shop.stations().get(pools.stations(pool).get(0));
             long turnaround = station.turnaround() / tick;
             IntVar length = model.newIntVar(0, horizon + turnaround, job.name() + " takes " + first);
             LinearExpr over =
@@ -297,28 +317,20 @@ final class Model {
             IntervalVar interval = in.size() == 1
                     ? model.newIntervalVar(start(job, first), length, over, job.name())
                     : model.newOptionalIntervalVar(start(job, first), length, over, literal, job.name());
-            byGroup.computeIfAbsent(group, any -> new ArrayList<>())
+            byPool.computeIfAbsent(pool, any -> new ArrayList<>())
                     .add(new Taken(interval, station.holdsMany() ? job.amount() : 1));
         });
     }
 
-    private Station any(int group) {
-        return shop.stations().stream()
-                .filter(station -> station.group() == group)
-                .findFirst()
-                .orElseThrow();
-    }
-
     private void stations() {
-        byGroup.forEach((group, taken) -> {
+        byPool.forEach((pool, taken) -> {
             long capacity = 0;
-            for (Station station : shop.stations()) {
-                if (station.group() == group) {
-                    long own = station.holdsMany() ? station.limit() : 1;
-                    capacity += own;
-                    for (int i = 0; i < station.closed().size(); i++) {
-                        block(taken, station.closed().from(i), station.closed().to(i), own);
-                    }
+            for (int s : pools.stations(pool)) {
+                Station station = shop.stations().get(s);
+                long own = station.holdsMany() ? station.limit() : 1;
+                capacity += own;
+                for (int i = 0; i < station.closed().size(); i++) {
+                    block(taken, station.closed().from(i), station.closed().to(i), own);
                 }
             }
             cumulative(taken, capacity);
@@ -414,14 +426,86 @@ final class Model {
                 model.addHint(end(job, k), placed.visit(k).end() / tick);
                 Map<Integer, Literal> in = in(job, k);
                 if (in.size() > 1 && (k == 0 || !job.phase(k).before().stays())) {
-                    int own = shop.stations().get(placed.visit(k).station()).group();
-                    in.forEach((group, literal) -> model.addHint(literal, group == own));
+                    int own = pools.of(placed.visit(k).station());
+                    in.forEach((pool, literal) -> model.addHint(literal, pool == own));
                 }
             }
         }
     }
 
-    List<Job> jobs() {
-        return jobs;
+    /** Whatever uses a station or the only hoist after another keeps to that order. */
+    void keepOrder(Schedule schedule) {
+        List<List<Turn>> byStation = new ArrayList<>();
+        shop.stations().forEach(station -> byStation.add(new ArrayList<>()));
+        List<Turn> lifts = new ArrayList<>();
+        for (Placed placed : schedule.jobs()) {
+            Job job = placed.job();
+            int first = 0;
+            for (int k = 0; k < job.size(); k++) {
+                if (k + 1 == job.size() || !job.phase(k + 1).before().stays()) {
+                    int station = placed.visit(k).station();
+                    byStation
+                            .get(station)
+                            .add(new Turn(
+                                    placed.visit(first).start(),
+                                    start(job, first),
+                                    end(job, k),
+                                    shop.stations().get(station).turnaround() / tick));
+                    keepPool(job, first, pools.of(station));
+                    first = k + 1;
+                }
+            }
+            lifts(placed, lifts);
+        }
+        for (int s = 0; s < byStation.size(); s++) {
+            if (!shop.stations().get(s).holdsMany()) {
+                keepOrder(byStation.get(s));
+            }
+        }
+        if (shop.carriage().atOnce() == 1) {
+            keepOrder(lifts);
+        }
+    }
+
+    /**
+     * Somebody's turn.
+     *
+     * @param was when it began, by which turns are ordered
+     * @param after from its end until the next may begin, ticks
+     */
+    private record Turn(long was, LinearArgument from, LinearArgument to, long after) {}
+
+    private void keepPool(Job job, int phase, int pool) {
+        Map<Integer, Literal> in = in(job, phase);
+        if (in.size() > 1) {
+            model.addBoolOr(List.of(Objects.requireNonNull(in.get(pool))));
+        }
+    }
+
+    private void lifts(Placed placed, List<Turn> lifts) {
+        long takes = shop.carriage().takes() / tick;
+        if (takes == 0) {
+            return;
+        }
+        Job job = placed.job();
+        LinearExpr begin =
+                LinearExpr.newBuilder().add(start(job, 0)).add(-takes).build();
+        lifts.add(new Turn(placed.begins(shop.carriage()), begin, start(job, 0), 0));
+        for (int k = 1; k < job.size(); k++) {
+            if (!job.phase(k).before().stays()) {
+                lifts.add(new Turn(placed.visit(k - 1).end(), end(job, k - 1), start(job, k), 0));
+            }
+        }
+        lifts.add(new Turn(placed.visit(job.size() - 1).end(), end(job, job.size() - 1), out(job), 0));
+    }
+
+    private void keepOrder(List<Turn> turns) {
+        turns.sort(Comparator.comparingLong(Turn::was));
+        for (int i = 1; i < turns.size(); i++) {
+            Turn before = turns.get(i - 1);
+            model.addGreaterOrEqual(
+                    turns.get(i).from(),
+                    LinearExpr.newBuilder().add(before.to()).add(before.after()).build());
+        }
     }
 }

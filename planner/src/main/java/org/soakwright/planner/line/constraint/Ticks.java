@@ -9,12 +9,14 @@ import org.soakwright.planner.line.shop.Shop;
 import org.soakwright.planner.line.shop.Staffing;
 import org.soakwright.planner.line.shop.Station;
 
-/** The longest span of which every stated time is a multiple: what a constraint program counts in. */
+/** A minute, or less where stated times are no whole minutes: what a constraint program counts in. */
 final class Ticks {
+    private static final long MINUTE = 60;
+
     private Ticks() {}
 
     static long of(Shop shop, List<Job> jobs) {
-        long tick = shop.carriage().takes();
+        long tick = gcd(MINUTE, shop.carriage().takes());
         for (Station station : shop.stations()) {
             tick = gcd(gcd(tick, station.turnaround()), all(station.closed()));
         }

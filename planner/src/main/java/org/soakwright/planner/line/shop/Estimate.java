@@ -2,6 +2,7 @@ package org.soakwright.planner.line.shop;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
 
 /**
@@ -134,6 +135,14 @@ final class Estimate {
             add(new Tangent(times, reading));
         }
         return reading;
+    }
+
+    /** Where it is known exactly, those nearest to just meeting everything first. */
+    List<Followed> followed() {
+        return tangents.stream()
+                .sorted(Comparator.comparingDouble(tangent -> Math.abs(tangent.reading.worst())))
+                .map(tangent -> new Followed(tangent.at.clone(), tangent.reading))
+                .toList();
     }
 
     /** A tangent near some times. */

@@ -57,10 +57,14 @@ final class Floor {
         int first = 0;
         for (int k = 0; k < job.size(); k++) {
             Placed.Visit visit = placed.visit(k);
+            // What is drawn goes on while people change what is around the job.
+            long drawnUntil = k + 1 < job.size() && job.phase(k + 1).before() instanceof Joint.Change
+                    ? placed.visit(k + 1).start()
+                    : visit.end();
             for (int u = 0; u < utilities.size(); u++) {
                 utilities
                         .get(u)
-                        .take(visit.start(), visit.end(), sign * job.phase(k).draw(visit.station(), u));
+                        .take(visit.start(), drawnUntil, sign * job.phase(k).draw(visit.station(), u));
             }
             if (k + 1 == job.size() || !job.phase(k + 1).before().stays()) {
                 Station station = shop.stations().get(visit.station());
@@ -103,7 +107,13 @@ final class Floor {
 
     /** When a phase may go on for what it draws and for whom it needs. */
     Moments conditions(Phase phase, int station, long from, long to) {
-        Moments good = phase.attended() ? shop.staffing().shifts().within(from, to) : Moments.of(from, to);
+        Moments good = supplied(phase, station, from, to);
+        return phase.attended() ? good.and(shop.staffing().shifts()) : good;
+    }
+
+    /** When there is what a phase draws. */
+    Moments supplied(Phase phase, int station, long from, long to) {
+        Moments good = Moments.of(from, to);
         for (int u = 0; u < utilities.size(); u++) {
             long draw = phase.draw(station, u);
             if (draw > 0) {

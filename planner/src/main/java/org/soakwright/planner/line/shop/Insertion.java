@@ -97,7 +97,8 @@ final class Insertion {
             } else if (k > 0 && phase.before().stays()) {
                 hands = hands == null ? floor.hands(begin, until) : hands;
                 for (Window before : windows.get(k - 1)) {
-                    Moments landing = onward(before, phase.before(), hands);
+                    Moments supplied = floor.supplied(job.phase(k - 1), before.station(), begin, until);
+                    Moments landing = onward(before, phase.before(), hands.and(supplied));
                     add(now, k, before.station(), before.from(), before.to(), landing, before, begin, until);
                 }
             } else {

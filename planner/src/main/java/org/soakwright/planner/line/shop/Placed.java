@@ -19,6 +19,11 @@ public record Placed(Job job, List<Visit> visits) {
         }
     }
 
+    /** Whether it places a job; jobs are told apart by name. */
+    boolean isOf(Job other) {
+        return job.name().equals(other.name());
+    }
+
     public Visit visit(int k) {
         return visits.get(k);
     }

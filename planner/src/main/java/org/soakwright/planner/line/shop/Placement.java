@@ -15,6 +15,9 @@ final class Placement {
 
     private static final int MOST_REPAIRS = 12;
 
+    /** Instead of the number of a style: durations that are none of the job's own. */
+    private static final int FOREIGN = -1;
+
     private final IdentityHashMap<Physics, Estimate> estimates = new IdentityHashMap<>();
     private final IdentityHashMap<Job, Known> known = new IdentityHashMap<>();
     private long placings;
@@ -66,7 +69,7 @@ final class Placement {
         Outcome best = null;
         for (int s = 0; s < styles.size(); s++) {
             if (only < 0 || s == only) {
-                Placed placed = exactly(floor, job, s, whim);
+                Placed placed = exactly(floor, job, s, styles.get(s), whim);
                 if (placed != null && (best == null || isEarlier(floor, placed, best.placed()))) {
                     best = new Outcome(placed, true, s);
                 }
@@ -85,6 +88,13 @@ final class Placement {
         return placed == null ? null : new Outcome(placed, isMet(placed), 0);
     }
 
+    /** In a style that is not of its own: durations that somebody proposes; null where it does not lead anywhere. */
+    @Nullable
+    Outcome like(Floor floor, Job job, long[] style) {
+        Placed placed = exactly(floor, job, FOREIGN, style, Whim.NONE);
+        return placed == null ? null : new Outcome(placed, true, 0);
+    }
+
     private static boolean isEarlier(Floor floor, Placed one, Placed other) {
         Carriage carriage = floor.shop().carriage();
         long difference = one.finishes(carriage) - other.finishes(carriage);
@@ -96,14 +106,19 @@ final class Placement {
         return estimate(placed.job()).exactly(placed.times()).met();
     }
 
+    List<Followed> followed(Physics physics) {
+        Estimate estimate = estimates.get(physics);
+        return estimate == null ? List.of() : estimate.followed();
+    }
+
     private Estimate estimate(Job job) {
         return estimates.computeIfAbsent(job.physics(), Estimate::new);
     }
 
-    private @Nullable Placed exactly(Floor floor, Job job, int style, Whim whim) {
+    private @Nullable Placed exactly(Floor floor, Job job, int style, long[] durations, Whim whim) {
         Estimate estimate = estimate(job);
         for (int repair = 0; repair < MOST_REPAIRS; repair++) {
-            Placed placed = estimated(floor, job, style, estimate, whim);
+            Placed placed = estimated(floor, job, style, durations, estimate, whim);
             if (placed == null || estimate.exactly(placed.times()).met()) {
                 return placed;
             }
@@ -111,16 +126,17 @@ final class Placement {
         return null;
     }
 
-    private @Nullable Placed estimated(Floor floor, Job job, int style, Estimate estimate, Whim whim) {
-        long[] durations = known(job).styles().get(style);
+    private @Nullable Placed estimated(
+            Floor floor, Job job, int style, long[] durations, Estimate estimate, Whim whim) {
         Outlook outlook = new Outlook(job, estimate);
         List<Placed.Visit> done = List.of();
         long[] past = new long[2 * job.size() - 1];
         Placed placed = null;
         Outlook.Bounds before = null;
         while (true) {
-            Outlook.Bounds bounds =
-                    done.isEmpty() ? fresh(job, style, outlook, estimate) : outlook.after(durations, past, done.size());
+            Outlook.Bounds bounds = done.isEmpty() && style != FOREIGN
+                    ? fresh(job, style, outlook, estimate)
+                    : outlook.after(durations, past, done.size());
             if (bounds == null) {
                 return placed;
             }

@@ -17,6 +17,11 @@ public record Schedule(Shop shop, List<Placed> jobs) {
                 .orElse(0);
     }
 
+    /** How long after the first moment that somebody waits for a job is out, s. */
+    public long late(Placed placed) {
+        return Math.max(0, placed.finishes(shop.carriage()) - placed.job().due());
+    }
+
     /** Lateness times weight, over all jobs. */
     public double lateness() {
         return jobs.stream()

@@ -105,11 +105,30 @@ public final class Search {
      * @param effort placings to spend in all; the first schedules are made in any case
      */
     public Found best(long effort) {
-        State found = best == null ? first() : best;
-        State now = found;
+        State found = improved(best == null ? first() : best, effort);
+        best = found;
+        return found(found);
+    }
+
+    /**
+     * Goes on from a schedule made by somebody else, whose jobs are these in their order; what is best so far stays so unless that gets better.
+     *
+     * @param placings to spend
+     */
+    public Found from(Schedule schedule, long placings) {
+        State found = improved(state(schedule), placement.placings() + placings);
+        if (best == null || found.score.compareTo(best.score) < 0) {
+            best = found;
+        }
+        return found(found);
+    }
+
+    private State improved(State start, long until) {
+        State found = start;
+        State now = start;
         Score[] memory = new Score[MEMORY];
         Arrays.fill(memory, now.score);
-        for (long change = 0; placement.placings() < effort && jobs.size() > 1; change++) {
+        for (long change = 0; placement.placings() < until && jobs.size() > 1; change++) {
             int slot = (int) (change % MEMORY);
             Score limit = memory[slot].compareTo(now.score) > 0 ? memory[slot] : now.score;
             State next = random.nextInt(100) < REORDERING ? reordered(now, limit) : changed(now, limit);
@@ -123,8 +142,7 @@ public final class Search {
                 found = now;
             }
         }
-        best = found;
-        return found(found);
+        return found;
     }
 
     /** The schedule that comes of placing the jobs in an order. */
@@ -132,15 +150,61 @@ public final class Search {
         return found(placed(order.stream().mapToInt(Integer::intValue).toArray()));
     }
 
+    /**
+     * The schedule that comes of placing the jobs in the order of another schedule with durations like its own, which may miss what is asked: as much
+     * longer or shorter as it takes, or in a style of their own where that is out earlier.
+     */
+    public Found like(Schedule schedule) {
+        int[] order = IntStream.range(0, jobs.size())
+                .boxed()
+                .sorted(Comparator.comparingLong(
+                                (Integer j) -> schedule.jobs().get(j).begins(shop.carriage()))
+                        .thenComparing(Comparator.naturalOrder()))
+                .mapToInt(Integer::intValue)
+                .toArray();
+        State state = new State(new Floor(shop), jobs.size());
+        for (int j : order) {
+            Placed proposed = schedule.jobs().get(j);
+            long[] style =
+                    proposed.visits().stream().mapToLong(Placed.Visit::seconds).toArray();
+            Placement.Outcome like = placement.like(state.floor, jobs.get(j), style);
+            long wanted = proposed.finishes(shop.carriage());
+            if (like == null || like.placed().finishes(shop.carriage()) > wanted) {
+                Placement.Outcome own = placement.place(state.floor, jobs.get(j), -1);
+                like = like == null
+                                || (own != null
+                                        && own.placed().finishes(shop.carriage())
+                                                < like.placed().finishes(shop.carriage()))
+                        ? own
+                        : like;
+            }
+            if (like == null) {
+                throw new Unplaceable(jobs.get(j));
+            }
+            put(state, j, like);
+        }
+        state.score = score(state);
+        return found(state);
+    }
+
     /** A schedule made by somebody else, whose jobs are these in their order. */
     public Found of(Schedule schedule) {
+        return found(state(schedule));
+    }
+
+    private State state(Schedule schedule) {
         State state = new State(new Floor(shop), jobs.size());
         for (int j = 0; j < jobs.size(); j++) {
             Placed placed = schedule.jobs().get(j);
             put(state, j, new Placement.Outcome(placed, placement.isMet(placed), 0));
         }
         state.score = score(state);
-        return found(state);
+        return state;
+    }
+
+    /** Times that were followed on the way, those nearest to just meeting everything first. */
+    public List<Followed> followed(Physics physics) {
+        return placement.followed(physics);
     }
 
     private Found found(State state) {

@@ -5,7 +5,7 @@ import java.util.Deque;
 import java.util.Set;
 
 /** A page being written. Everything that is not {@link #trusted} is escaped, and every element that is opened is closed. */
-final class Html {
+public final class Html {
     private static final Set<String> BLOCKS = Set.of(
             "head",
             "body",
@@ -38,13 +38,13 @@ final class Html {
     private final Deque<String> open = new ArrayDeque<>();
 
     /** Opens an element; attributes by name and value in turn. */
-    Html open(String name, String... attributes) {
+    public Html open(String name, String... attributes) {
         tag(name, attributes);
         open.push(name);
         return this;
     }
 
-    Html close() {
+    public Html close() {
         String name = open.pop();
         text.append("</").append(name).append('>');
         if (BLOCKS.contains(name)) {
@@ -54,7 +54,7 @@ final class Html {
     }
 
     /** An element of plain text. */
-    Html leaf(String name, String content, String... attributes) {
+    public Html leaf(String name, String content, String... attributes) {
         return open(name, attributes).text(content).close();
     }
 
@@ -75,13 +75,13 @@ final class Html {
         text.append('>');
     }
 
-    Html text(String content) {
+    public Html text(String content) {
         escape(content);
         return this;
     }
 
     /** Someone else's words, whose direction of writing must not disturb what stands beside them. */
-    Html words(String content) {
+    public Html words(String content) {
         return isPlain(content) ? text(content) : leaf("bdi", content);
     }
 

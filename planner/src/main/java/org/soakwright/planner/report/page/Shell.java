@@ -13,20 +13,29 @@ import org.soakwright.planner.report.picture.Picture;
 import org.soakwright.planner.report.picture.Pictures;
 
 /** What every page of ours has in common: one file that needs no other, asks no network and runs no script. */
-final class Shell {
+public final class Shell {
     private static final String STYLE = style();
 
     private final Html html = new Html();
 
     /** Begins a page up to its first heading. */
-    Shell(String kind, String title, List<String> about) {
+    public Shell(String kind, String title, List<String> about) {
+        this(kind, title, about, "");
+    }
+
+    /**
+     * The same.
+     *
+     * @param more rules of its own, after those that all pages have
+     */
+    public Shell(String kind, String title, List<String> about, String more) {
         html.trusted("<!DOCTYPE html>\n").open("html", "lang", "en");
         html.open("head");
         html.empty("meta", "charset", "utf-8");
         html.empty("meta", "name", "viewport", "content", "width=device-width, initial-scale=1");
         html.empty("meta", "name", "color-scheme", "content", "light dark");
         html.leaf("title", title + " – " + kind);
-        html.open("style").trusted("\n" + Pictures.stylesheet() + STYLE).close();
+        html.open("style").trusted("\n" + Pictures.stylesheet() + STYLE + more).close();
         html.close();
         html.open("body");
         html.leaf("a", "Skip to the answer", "class", "skip", "href", "#answer");
@@ -45,19 +54,19 @@ final class Shell {
         }
     }
 
-    Html html() {
+    public Html html() {
         return html;
     }
 
     /** Ends the page. */
-    String end() {
+    public String end() {
         return html.close().close().toString();
     }
 
     /** A link of the contents. */
-    record Anchor(String id, String label) {}
+    public record Anchor(String id, String label) {}
 
-    void contents(List<Anchor> anchors) {
+    public void contents(List<Anchor> anchors) {
         html.open("nav", "aria-label", "Contents").open("ul");
         for (Anchor anchor : anchors) {
             html.open("li").leaf("a", anchor.label(), "href", "#" + anchor.id()).close();
@@ -66,7 +75,7 @@ final class Shell {
     }
 
     /** Opens the section that comes first: its sentences, then whatever is added. */
-    void openAnswer(Findings findings) {
+    public void openAnswer(Findings findings) {
         html.open(
                 "section",
                 "id",
@@ -81,7 +90,7 @@ final class Shell {
         paragraphs(sentences.subList(1, sentences.size()));
     }
 
-    void open(String id, String heading) {
+    public void open(String id, String heading) {
         open(id, heading, List.of());
     }
 
@@ -93,15 +102,15 @@ final class Shell {
         html.close();
     }
 
-    void close() {
+    public void close() {
         html.close();
     }
 
-    void paragraphs(List<String> sentences) {
+    public void paragraphs(List<String> sentences) {
         sentences.forEach(sentence -> html.open("p").words(sentence).close());
     }
 
-    void points(List<String> points) {
+    public void points(List<String> points) {
         if (!points.isEmpty()) {
             html.open("ul");
             points.forEach(point -> html.open("li").words(point).close());
@@ -110,7 +119,7 @@ final class Shell {
     }
 
     /** A section with its table; a link to it where there is one as a file. */
-    void section(Section section, List<String> files) {
+    public void section(Section section, List<String> files) {
         String file = Tables.file(section.id());
         open(section.id(), section.heading(), files.contains(file) ? List.of(file) : List.of());
         section.table().ifPresent(table -> table(section.id() + "-heading", table));
@@ -124,13 +133,13 @@ final class Shell {
     }
 
     /** Wide ones scroll by themselves, also by the keyboard. */
-    void table(String labelledBy, Table table) {
+    public void table(String labelledBy, Table table) {
         html.open("div", "class", "scroll", "role", "region", "aria-labelledby", labelledBy, "tabindex", "0");
         TableHtml.write(html, labelledBy, table);
         html.close();
     }
 
-    void picture(Picture picture) {
+    public void picture(Picture picture) {
         html.open("figure", "id", "picture-" + picture.id());
         html.open("figcaption").words(picture.caption()).close();
         html.open("div", "class", "scroll picture", "role", "region", "aria-label", picture.title(), "tabindex", "0");
@@ -139,7 +148,7 @@ final class Shell {
     }
 
     /** Below everything else: where it comes from. */
-    void footer(List<String> lines) {
+    public void footer(List<String> lines) {
         html.open("footer");
         lines.forEach(line -> html.open("p").words(line).close());
         html.close();

@@ -72,7 +72,9 @@ final class Look {
                 Oklab.ofPolar(0.5, 0.02, 260),
                 Oklab.ofPolar(0.925, 0.005, 260),
                 Oklab.ofPolar(0.94, 0.015, 240),
-                Oklab.ofPolar(0.54, 0.19, 32)
+                Oklab.ofPolar(0.54, 0.19, 32),
+                Oklab.ofPolar(0.97, 0.008, 240),
+                Oklab.ofPolar(0.82, 0.012, 250)
             },
             SERIES_LIGHT,
             Oklab.ofPolar(0.65, 0.105, 205),
@@ -85,7 +87,9 @@ final class Look {
                 Oklab.ofPolar(0.74, 0.015, 260),
                 Oklab.ofPolar(0.34, 0.015, 260),
                 Oklab.ofPolar(0.305, 0.02, 250),
-                Oklab.ofPolar(0.7, 0.165, 38)
+                Oklab.ofPolar(0.7, 0.165, 38),
+                Oklab.ofPolar(0.262, 0.018, 255),
+                Oklab.ofPolar(0.44, 0.015, 255)
             },
             SERIES_DARK,
             Oklab.ofPolar(0.63, 0.1, 262),
@@ -98,7 +102,9 @@ final class Look {
                 new Oklab(0.48, 0, 0),
                 new Oklab(0.925, 0, 0),
                 new Oklab(0.94, 0, 0),
-                new Oklab(0.01, 0, 0)
+                new Oklab(0.01, 0, 0),
+                new Oklab(0.97, 0, 0),
+                new Oklab(0.82, 0, 0)
             },
             SERIES_LIGHT,
             new Oklab(0.645, 0, 0),
@@ -110,6 +116,8 @@ final class Look {
     private final Color grid;
     private final Color ribbon;
     private final Color limit;
+    private final Color pause;
+    private final Color closed;
     private final List<Color> series = new ArrayList<>();
     private final List<Color> order = new ArrayList<>();
     private final List<Color> contents;
@@ -122,6 +130,8 @@ final class Look {
         grid = roles[3].color();
         ribbon = roles[4].color();
         limit = roles[5].color();
+        pause = roles[6].color();
+        closed = roles[7].color();
         for (int place : LADDER) {
             series.add((grey ? ladder[place].grey() : ladder[place]).color());
         }
@@ -169,6 +179,16 @@ final class Look {
         return limit;
     }
 
+    /** Between {@link #ground} and {@link #ribbon}. */
+    Color pause() {
+        return pause;
+    }
+
+    /** What cannot be used. */
+    Color closed() {
+        return closed;
+    }
+
     Color series(int index) {
         return series.get(index % SERIES);
     }
@@ -202,6 +222,8 @@ final class Look {
         roles.put("grid", grid);
         roles.put("ribbon", ribbon);
         roles.put("limit", limit);
+        roles.put("pause", pause);
+        roles.put("closed", closed);
         for (int i = 0; i < SERIES; i++) {
             roles.put("series-" + i, series.get(i));
         }

@@ -10,6 +10,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -17,7 +18,7 @@ import nu.validator.client.EmbeddedValidator;
 import org.xml.sax.SAXException;
 
 /** What every page of ours must be: valid HTML by the checker of the validator.nu project, whole without a network, usable by all. */
-final class PageCheck {
+public final class PageCheck {
     private static final Pattern ID = Pattern.compile(" id=\"([^\"]*)\"");
     private static final Pattern LINK = Pattern.compile(" (?:href|src)=\"([^\"]*)\"");
     private static final Pattern HEADING = Pattern.compile("<h([1-6])[ >]");
@@ -25,6 +26,13 @@ final class PageCheck {
     private static final Pattern SVG = Pattern.compile("<svg([^>]*)>");
 
     private PageCheck() {}
+
+    /** Pages that lead to each other. */
+    public static void assertSound(Map<String, String> pages, Set<String> files) {
+        Set<String> known = new HashSet<>(files);
+        pages.forEach((name, page) -> ids(page).forEach(id -> known.add(name + "#" + id)));
+        pages.values().forEach(page -> assertSound(page, known));
+    }
 
     static void assertSound(String page, Set<String> files) {
         assertValid(page);
