@@ -15,7 +15,7 @@ import org.jspecify.annotations.Nullable;
  */
 public final class Search {
     private static final long SEED = 20_261_201;
-    
+
     private static final int MOST_OFF = 6;
     private static final int MOST_EARLIER = 12;
 
@@ -356,7 +356,8 @@ public final class Search {
             return Placement.Whim.NONE;
         }
         if (random.nextInt(3) == 0) {
-            return new Placement.Whim(-Moments.NEVER, random.nextInt(shop.stations().size()));
+            return new Placement.Whim(
+                    -Moments.NEVER, random.nextInt(shop.stations().size()));
         }
         int other = random.nextInt(jobs.size());
         Placement.Outcome outcome = state.at[other];
@@ -366,7 +367,9 @@ public final class Search {
         List<Placed.Visit> visits = outcome.placed().visits();
         Placed.Visit visit = visits.get(random.nextInt(visits.size()));
         return new Placement.Whim(
-                (random.nextBoolean() ? visit.start() : visit.end()) - random.nextInt(2) * shop.carriage().takes(), -1);
+                (random.nextBoolean() ? visit.start() : visit.end())
+                        - random.nextInt(2) * shop.carriage().takes(),
+                -1);
     }
 
     private void sortByDue(int[] off) {

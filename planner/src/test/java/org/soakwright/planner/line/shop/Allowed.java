@@ -41,7 +41,11 @@ final class Allowed {
         stations.forEach((index, taken) -> {
             Station station = shop.stations().get(index);
             for (int i = 0; i < station.closed().size(); i++) {
-                take(taken, station.closed().from(i), station.closed().to(i), station.holdsMany() ? station.limit() : 1);
+                take(
+                        taken,
+                        station.closed().from(i),
+                        station.closed().to(i),
+                        station.holdsMany() ? station.limit() : 1);
             }
             assertTrue(most(taken) <= (station.holdsMany() ? station.limit() : 1), station.name() + " is full");
         });
@@ -56,11 +60,14 @@ final class Allowed {
     private static void alone(Shop shop, Placed placed) {
         Job job = placed.job();
         assertTrue(placed.begins(shop.carriage()) >= job.ready(), job.name() + " is not ready");
-        assertTrue(job.physics().read(placed.times()).met(), () -> job.name() + " misses with " + Arrays.toString(placed.times()));
+        assertTrue(
+                job.physics().read(placed.times()).met(),
+                () -> job.name() + " misses with " + Arrays.toString(placed.times()));
         for (int k = 0; k < job.size(); k++) {
             Phase phase = job.phase(k);
             Placed.Visit visit = placed.visit(k);
-            assertTrue(phase.stations().contains(visit.station()), job.name() + " is in a station that does not serve it");
+            assertTrue(
+                    phase.stations().contains(visit.station()), job.name() + " is in a station that does not serve it");
             assertTrue(phase.lasting().contains(visit.seconds()), job.name() + " lasts what it may not");
             assertTrue(!phase.attended() || isInside(shop.staffing().shifts(), visit), job.name() + " is left alone");
             if (k > 0) {

@@ -181,8 +181,8 @@ final class Everything {
     private static long closed(Station station) {
         long bits = 0;
         for (int i = 0; i < station.closed().size(); i++) {
-            bits |= bits(
-                    (int) (station.closed().from(i) / TinyShop.STEP), (int) (station.closed().to(i) / TinyShop.STEP));
+            bits |= bits((int) (station.closed().from(i) / TinyShop.STEP), (int)
+                    (station.closed().to(i) / TinyShop.STEP));
         }
         return bits;
     }

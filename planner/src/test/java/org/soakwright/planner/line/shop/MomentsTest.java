@@ -85,7 +85,11 @@ class MomentsTest {
             same(t -> in(one, t) || in(other, t), set.or(set(other)), -1, SPAN);
             same(t -> in(one, t) && t >= from && t <= to, set.within(from, to), -1, SPAN);
             same(t -> in(one, t - 7), set.shifted(7), -1, SPAN + 8);
-            same(t -> in(one, t) || in(other, t) || t == from, Moments.any(List.of(set, set(other), Moments.of(from, from))), -1, SPAN);
+            same(
+                    t -> in(one, t) || in(other, t) || t == from,
+                    Moments.any(List.of(set, set(other), Moments.of(from, from))),
+                    -1,
+                    SPAN);
         }
     }
 
@@ -176,8 +180,7 @@ class MomentsTest {
                 same(
                         t -> t >= from
                                 && t <= to
-                                && (fits(taken, t, amount, limit)
-                                        || (t > from && fits(taken, t - 1, amount, limit))),
+                                && (fits(taken, t, amount, limit) || (t > from && fits(taken, t - 1, amount, limit))),
                         usage.copy().room(amount, from, to),
                         0,
                         SPAN - 1);

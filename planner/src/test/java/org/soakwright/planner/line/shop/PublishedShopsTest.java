@@ -43,7 +43,8 @@ class PublishedShopsTest {
 
     @Test
     void taillardsGeneratorMakesHisFirstShop() {
-        // The verification file of the generator as rewritten by D. C. Mattfeld and R. J. M. Vaessens (1996), first and last job.
+        // The verification file of the generator as rewritten by D. C. Mattfeld and R. J. M. Vaessens (1996), first and
+        // last job.
         long[][] first = Published.taillard(1);
         assertArrayEquals(new long[] {54, 79, 16, 66, 58}, first[0]);
         assertArrayEquals(new long[] {94, 77, 40, 31, 28}, first[19]);
@@ -93,28 +94,41 @@ class PublishedShopsTest {
     void theJobShopOfFisherAndThompsonComesWithinSixPercentAndBlockedWithinTwo() {
         // 55: the optimum that the OR-Library's file jobshop1 quotes for ft06.
         within(6, 55, makespan(ClassicalShop.of(Published.fisherAndThompson(), Between.STORE), 20_000), "ft06");
-        // 63: proven for the blocking job shop where jobs may change places; M. Pranzo and D. Pacciarelli (2016), An iterated greedy metaheuristic
-        // for the blocking job shop scheduling problem, Journal of Heuristics 22, solve these instances; the value as in the public results of a
+        // 63: proven for the blocking job shop where jobs may change places; M. Pranzo and D. Pacciarelli (2016), An
+        // iterated greedy metaheuristic
+        // for the blocking job shop scheduling problem, Journal of Heuristics 22, solve these instances; the value as
+        // in the public results of a
         // constraint solver for them.
-        within(2, 63, makespan(ClassicalShop.of(Published.fisherAndThompson(), Between.BLOCKED), 20_000), "blocked ft06");
+        within(
+                2,
+                63,
+                makespan(ClassicalShop.of(Published.fisherAndThompson(), Between.BLOCKED), 20_000),
+                "blocked ft06");
     }
 
     @Test
     void flowShopsOfTaillardAreNeverBelowWhatIsProven() {
-        // Optima of ta001 to ta005 with overtaking are no more than those of permutations: 1278, 1359, 1081, 1293, 1235, which Taillard (1993),
-        // Table 3 has as upper bounds and A. J. Benavides and M. Ritt (2018), Fast heuristics for minimizing the makespan in non-permutation flow
+        // Optima of ta001 to ta005 with overtaking are no more than those of permutations: 1278, 1359, 1081, 1293,
+        // 1235, which Taillard (1993),
+        // Table 3 has as upper bounds and A. J. Benavides and M. Ritt (2018), Fast heuristics for minimizing the
+        // makespan in non-permutation flow
         // shops, Computers & Operations Research 100, as best known with overtaking.
         long[] known = {1278, 1359, 1081, 1293, 1235};
         for (int number = 1; number <= known.length; number++) {
             long found = makespan(ClassicalShop.flow(Published.taillard(number), Between.STORE), 20_000);
             assertTrue(found >= TAILLARDS_BOUNDS[number - 1]);
-            within(6, TAILLARDS_BOUNDS[number - 1], Math.max(found - (known[number - 1] - TAILLARDS_BOUNDS[number - 1]), TAILLARDS_BOUNDS[number - 1]), "ta00" + number);
+            within(
+                    6,
+                    TAILLARDS_BOUNDS[number - 1],
+                    Math.max(found - (known[number - 1] - TAILLARDS_BOUNDS[number - 1]), TAILLARDS_BOUNDS[number - 1]),
+                    "ta00" + number);
         }
     }
 
     @Test
     void twoMachinesAreAsJohnsonOrdersThem() {
-        // The example of S. M. Johnson (1954), Optimal two- and three-stage production schedules with setup times included, Naval Research Logistics
+        // The example of S. M. Johnson (1954), Optimal two- and three-stage production schedules with setup times
+        // included, Naval Research Logistics
         // Quarterly 1, 61-68, from memory. The makespan is worked out by his rule here, not taken from there.
         long[][] minutes = {{4, 5}, {4, 1}, {30, 4}, {6, 30}, {2, 3}};
         assertEquals(johnson(minutes), makespan(ClassicalShop.flow(minutes, Between.STORE), 2000));
@@ -124,8 +138,8 @@ class PublishedShopsTest {
     /** Jobs that are quicker first come first, by rising first duration; the others by falling second. */
     private static long johnson(long[][] minutes) {
         List<long[]> order = java.util.Arrays.stream(minutes)
-                .sorted(java.util.Comparator.comparingLong((long[] job) ->
-                        job[0] < job[1] ? job[0] - Long.MAX_VALUE / 2 : -job[1]))
+                .sorted(java.util.Comparator.comparingLong(
+                        (long[] job) -> job[0] < job[1] ? job[0] - Long.MAX_VALUE / 2 : -job[1]))
                 .toList();
         long first = 0;
         long second = 0;

@@ -68,7 +68,10 @@ record TinyShop(Shop shop, List<Job> jobs) {
                     : people ? new Joint.Lift(STEP, STEP * (1 + random.nextInt(2))) : new Joint.Lift(0, 0);
             List<Integer> where = stays
                     ? phases.get(k - 1).stations()
-                    : IntStream.range(0, stations).filter(s -> random.nextInt(3) > 0).boxed().toList();
+                    : IntStream.range(0, stations)
+                            .filter(s -> random.nextInt(3) > 0)
+                            .boxed()
+                            .toList();
             phases.add(Phase.of(
                     where.isEmpty() ? List.of(random.nextInt(stations)) : where,
                     Moments.of(least, most),

@@ -39,7 +39,8 @@ class TinyShopsTest {
             }
             Allowed.check(found.schedule());
             assertEquals(0, found.missing());
-            double value = (late ? found.schedule().lateness() : found.schedule().makespan()) / TinyShop.STEP;
+            double value =
+                    (late ? found.schedule().lateness() : found.schedule().makespan()) / TinyShop.STEP;
             long whole = (long) Math.ceil(value - 1e-9);
             long latest = found.schedule().makespan() / TinyShop.STEP + SLACK;
             shops++;

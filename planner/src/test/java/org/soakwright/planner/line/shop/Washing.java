@@ -49,7 +49,9 @@ final class Washing implements Physics {
         for (int k = 0; k < style.length; k++) {
             style[k] = only < 0
                     ? planned[2 * k]
-                    : only == k ? phases.get(k).shortest() + 4 * TinyShop.STEP : phases.get(k).shortest();
+                    : only == k
+                            ? phases.get(k).shortest() + 4 * TinyShop.STEP
+                            : phases.get(k).shortest();
         }
         return style;
     }
