@@ -173,7 +173,7 @@ class MomentsTest {
                     takings.add(more);
                     take(usage, taken, more[0], more[1], more[2]);
                 }
-                long amount = 1 + random.nextInt(limit);
+                long amount = 1L + random.nextInt(limit);
                 int from = random.nextInt(SPAN);
                 int to = random.nextInt(from, SPAN);
                 // Somebody leaves as another comes: a moment belongs to the room on both its sides.

@@ -27,12 +27,12 @@ final class Published {
     static Map<String, long[][]> carlier() {
         Map<String, List<long[]>> rows = new LinkedHashMap<>();
         List<long[]> now = new ArrayList<>();
-        for (String line : text("carlier-1978.txt").split("\n")) {
+        for (String line : text("carlier-1978.txt").lines().toList()) {
             if (line.startsWith("car")) {
                 now = new ArrayList<>();
                 rows.put(line.strip(), now);
             } else if (!line.startsWith("#") && !line.isBlank()) {
-                now.add(Arrays.stream(line.strip().split(" +"))
+                now.add(Arrays.stream(line.strip().split(" +", -1))
                         .mapToLong(Long::parseLong)
                         .toArray());
             }
@@ -78,7 +78,7 @@ final class Published {
     private static List<List<Operation>> jobs(String... rows) {
         List<List<Operation>> jobs = new ArrayList<>();
         for (String row : rows) {
-            String[] numbers = row.split(" ");
+            String[] numbers = row.split(" ", -1);
             List<Operation> job = new ArrayList<>();
             for (int i = 0; i < numbers.length; i += 2) {
                 job.add(new Operation(Integer.parseInt(numbers[i]), Long.parseLong(numbers[i + 1])));
