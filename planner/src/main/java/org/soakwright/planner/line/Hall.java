@@ -87,7 +87,9 @@ final class Hall {
         return new Station(
                 group.vessel(number),
                 line.vessels().indexOf(group),
-                group.capacity() == null ? 0 : Math.max(1, (long) Math.floor(group.capacity().si() * GRAMS + 1e-6)),
+                group.capacity() == null
+                        ? 0
+                        : Math.max(1, (long) Math.floor(group.capacity().si() * GRAMS + 1e-6)),
                 group.turnaroundSeconds(),
                 closed);
     }

@@ -116,7 +116,8 @@ final class Cargoes {
         double kg = entries.stream().mapToDouble(Result.Entry::kg).sum();
         List<Cargo.Part> parts = parts(name, orders.get(0), first.steps());
         // Of what weighs much more than was ordered it is told already.
-        double most = TOO_MUCH * orders.stream().mapToDouble(order -> order.mass().si()).sum();
+        double most = TOO_MUCH
+                * orders.stream().mapToDouble(order -> order.mass().si()).sum();
         if (alike && kg > 0 && kg <= most && !parts.isEmpty()) {
             all.add(new Cargo(
                     name,

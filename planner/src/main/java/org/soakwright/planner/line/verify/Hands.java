@@ -171,10 +171,11 @@ final class Hands {
             return;
         }
         Peaks peaks = new Peaks();
-        moves.forEach(move ->
-                peaks.add(told(move), move.start(), Math.min(move.end(), move.start() + A_YEAR), heads(move)));
+        moves.forEach(
+                move -> peaks.add(told(move), move.start(), Math.min(move.end(), move.start() + A_YEAR), heads(move)));
         for (Peaks.Excess excess : peaks.over(wall::heads, true)) {
-            faults.add("At " + wall.at(excess.from()) + " " + Faults.count(Math.round(excess.used()), "head") + " of the crew "
+            faults.add("At " + wall.at(excess.from()) + " " + Faults.count(Math.round(excess.used()), "head")
+                    + " of the crew "
                     + (excess.used() == 1 ? "is" : "are") + " needed for " + excess.who() + ", at most "
                     + Math.round(excess.limit()) + " would be right.");
         }
@@ -186,8 +187,9 @@ final class Hands {
                 .filter(move -> !isChangeover(move))
                 .forEach(move -> peaks.add(told(move), move.start(), move.end(), 1));
         for (Peaks.Excess excess : peaks.over(at -> line.moves().atOnce(), false)) {
-            faults.add("At " + wall.at(excess.from()) + " " + Faults.count(Math.round(excess.used()), "load") + " are on the move with "
-                    + excess.who() + ", at most " + line.moves().atOnce() + " at once would be right.");
+            faults.add("At " + wall.at(excess.from()) + " " + Faults.count(Math.round(excess.used()), "load")
+                    + " are on the move with " + excess.who() + ", at most "
+                    + line.moves().atOnce() + " at once would be right.");
         }
     }
 

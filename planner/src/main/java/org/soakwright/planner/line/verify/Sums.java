@@ -99,9 +99,9 @@ final class Sums {
                     + makespan + " would be right.");
         }
         if (result.boundLateness().orElse(0) > lateness * (1 + ROUNDING) + ROUNDING) {
-            faults.add(
-                    "bound-lateness-seconds is " + Faults.number(result.boundLateness().orElse(0))
-                            + ", no more than the lateness of " + Faults.number(lateness) + " would be right.");
+            faults.add("bound-lateness-seconds is "
+                    + Faults.number(result.boundLateness().orElse(0)) + ", no more than the lateness of "
+                    + Faults.number(lateness) + " would be right.");
         }
         boolean good = met && lateness == 0 && result.stops() == 0;
         if (result.met() != good) {

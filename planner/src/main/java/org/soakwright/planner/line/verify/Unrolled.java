@@ -94,7 +94,7 @@ record Unrolled(Recipe recipe, double[] seconds) {
     }
 
     private static Time lasting(long seconds, Place place) {
-        return new Time.Fixed(Quantity.ofSi(seconds, SECOND, place));
+        return new Time.Fixed(Quantity.ofSi((double) seconds, SECOND, place));
     }
 
     private static String unused(String wanted, Set<String> names) {

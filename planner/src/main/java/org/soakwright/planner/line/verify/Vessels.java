@@ -170,8 +170,8 @@ final class Vessels {
             peaks.add(visit.cargo().name(), visit.from(), until, visit.cargo().kg());
         }
         for (Peaks.Excess excess : peaks.over(at -> capacity * (1 + ROUNDING), false)) {
-            faults.add(vessel.name() + " holds " + Faults.number(excess.used()) + " kg at " + wall.at(excess.from()) + " with "
-                    + excess.who() + ", at most " + vessel.group().capacity() + " would be right.");
+            faults.add(vessel.name() + " holds " + Faults.number(excess.used()) + " kg at " + wall.at(excess.from())
+                    + " with " + excess.who() + ", at most " + vessel.group().capacity() + " would be right.");
         }
     }
 

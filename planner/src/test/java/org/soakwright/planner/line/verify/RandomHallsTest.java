@@ -31,8 +31,8 @@ class RandomHallsTest {
 
     private static void assertKept(Line line, Options options, long seed) {
         LinePlan plan = LinePlanner.plan(line, options, Progress.NONE);
-        List<String> faults =
-                Verification.of(line, LineJson.of(new Stamp("0.1.0", "00"), plan)).faults();
+        List<String> faults = Verification.of(line, LineJson.of(new Stamp("0.1.0", "00"), plan))
+                .faults();
         assertEquals(List.of(), faults, "hall " + seed);
     }
 
@@ -48,7 +48,8 @@ class RandomHallsTest {
                     planned++;
                 } catch (Unsound unsound) {
                     unsound.problems()
-                            .forEach(problem -> assertFalse(problem.place().toString().isBlank(), problem.toString()));
+                            .forEach(problem ->
+                                    assertFalse(problem.place().toString().isBlank(), problem.toString()));
                 }
             }
         }

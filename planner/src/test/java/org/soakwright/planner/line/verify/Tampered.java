@@ -135,7 +135,9 @@ final class Tampered {
             }
             text.append(list.isEmpty() ? "[]" : "]");
         } else if (value instanceof String word) {
-            text.append('"').append(word.replace("\\", "\\\\").replace("\"", "\\\"")).append('"');
+            text.append('"')
+                    .append(word.replace("\\", "\\\\").replace("\"", "\\\""))
+                    .append('"');
         } else {
             text.append(value);
         }
