@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.OptionalDouble;
 import java.util.stream.Collectors;
 import org.soakwright.recipes.model.Renewal;
@@ -84,7 +85,8 @@ final class Vessels {
             OptionalDouble liquor = part.step() instanceof Step.Wet wet
                     ? wet.liquor().volumeM3(cargo.recipe().lot())
                     : OptionalDouble.empty();
-            double pieces = cargo.kg() / cargo.recipe().lot().density().si();
+            double pieces = cargo.kg()
+                    / Objects.requireNonNull(cargo.recipe().lot().density()).si();
             double usable = group.volume().usableM3();
             if (pieces + liquor.orElse(0) > usable * (1 + ROUNDING)) {
                 faults.add(what + " fills " + vessel.name() + " with " + litres(pieces + liquor.orElse(0))
@@ -146,27 +148,21 @@ final class Vessels {
                 Visit one = visits.get(i);
                 Visit other = visits.get(j);
                 boolean earlier = one.from() < other.from() || (one.from() == other.from() && i < j);
-                long needed = one.cargo() == other.cargo() ? 0 : turnaround;
-                if (i != j && earlier && other.from() < one.until() + needed) {
+                if (i != j && earlier && other.from() < one.until() + turnaround) {
                     faults.add(other.cargo().name() + " lands in " + vessel.name() + " at " + wall.at(other.from())
                             + ", where " + one.cargo().name() + " is until " + wall.at(one.until()) + "; "
-                            + wall.at(one.until() + needed) + " or later would be right.");
+                            + wall.at(one.until() + turnaround) + " or later would be right.");
                 }
             }
         }
     }
 
     private void together(Vessel vessel) {
-        double capacity = vessel.group().capacity().si();
+        double capacity = Objects.requireNonNull(vessel.group().capacity()).si();
         Peaks peaks = new Peaks();
         for (Visit visit : vessel.visits()) {
-            // Its place is free again when the turnaround is over, or when it comes back itself.
+            // Its place is free again when the turnaround is over, for itself too.
             long until = visit.until() + vessel.group().turnaroundSeconds();
-            for (Visit other : vessel.visits()) {
-                if (other.cargo() == visit.cargo() && other.from() >= visit.until()) {
-                    until = Math.min(until, other.from());
-                }
-            }
             peaks.add(visit.cargo().name(), visit.from(), until, visit.cargo().kg());
         }
         for (Peaks.Excess excess : peaks.over(at -> capacity * (1 + ROUNDING), false)) {

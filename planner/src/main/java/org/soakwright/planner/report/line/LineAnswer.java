@@ -94,7 +94,7 @@ final class LineAnswer {
             sentences.add("No schedule that is no later is done sooner: this is proven.");
         } else {
             sentences.add("No schedule that is no later takes less than " + Times.lasting(least.getAsLong())
-                    + ": at most " + percent(takes - least.getAsLong(), least.getAsLong()) + " could be gained.");
+                    + ": at most " + percent(takes - least.getAsLong(), takes) + " could be gained.");
         }
         return sentences;
     }

@@ -18,8 +18,6 @@ final class TimePanels {
     private static final double LEAST_NAME = 50;
     private static final double MOST_NAME = 150;
     private static final double HATCH = 4;
-    private static final double KEY_LINE = 18;
-    private static final double SWATCH = 14;
     private static final double WORK_LANE = 9;
 
     /** Light on dark and dark on light with at least 4.5 to 1 in every theme: bars carry letters. */
@@ -29,7 +27,7 @@ final class TimePanels {
     private final List<TimeChart.Span> panels;
     private final String title;
     private final double left;
-    private final Key key;
+    private final TimeKey key;
     private final double rowsHeight;
     private final double workHeight;
 
@@ -46,7 +44,7 @@ final class TimePanels {
         left = Math.ceil(Math.max(LEAST_NAME, Math.min(MOST_NAME, widest)) + 10);
         rowsHeight = rows;
         workHeight = subject.work().isEmpty() ? 0 : 2 * PADDING + WORK_LANE * Math.max(1, subject.workLanes()) + 4;
-        key = new Key(subject);
+        key = new TimeKey(subject);
     }
 
     int height() {
@@ -97,101 +95,8 @@ final class TimePanels {
         }
     }
 
-    /** What colours and patterns mean. */
-    private static final class Key {
-        private final TimeChart.Subject subject;
-        private final int lines;
-
-        Key(TimeChart.Subject subject) {
-            this.subject = subject;
-            lines = walk(null, 0);
-        }
-
-        double height() {
-            return lines * KEY_LINE + 10;
-        }
-
-        void on(Sheet sheet, double top) {
-            walk(sheet, top);
-        }
-
-        /** Draws every entry where there is a sheet, and counts the lines. */
-        private int walk(@org.jspecify.annotations.Nullable Sheet sheet, double top) {
-            Pen pen = new Pen(sheet, top);
-            for (int kind = 0; kind < subject.kinds().size(); kind++) {
-                int own = kind;
-                pen.entry(subject.kinds().get(kind), (on, box) -> on.fill(box, colour(on.look(), own)));
-            }
-            if (subject.rows().stream()
-                    .anyMatch(row -> row.stays().stream()
-                            .anyMatch(stay ->
-                                    stay.after().length() > 0 || !stay.changes().isEmpty()))) {
-                pen.entry(
-                        "changeover or turnaround",
-                        (on, box) -> hatch(on, box, on.look().muted()));
-            }
-            if (subject.rows().stream().anyMatch(row -> !row.closed().isEmpty())) {
-                pen.entry("outage", (on, box) -> on.fill(box, on.look().closed()));
-            }
-            if (!subject.away().isEmpty()) {
-                pen.entry("nobody there", (on, box) -> on.fill(box, on.look().ribbon()));
-            }
-            if (!subject.pauses().isEmpty()) {
-                pen.entry("break", (on, box) -> {
-                    on.fill(box, on.look().pause());
-                    on.draw(box, on.look().grid(), Look.dashed(1));
-                });
-            }
-            if (subject.rows().stream().anyMatch(row -> !row.late().isEmpty())) {
-                pen.entry("late from here on", (on, box) -> {
-                    flag(on, box.getX() + 1, box.getY(), box.getMaxY());
-                    under(on, box.getX() + 1, box.getMaxX(), box.getMaxY() - 1);
-                });
-            }
-            return pen.line + 1;
-        }
-
-        /** A place in lines of entries. */
-        private static final class Pen {
-            private final @org.jspecify.annotations.Nullable Sheet sheet;
-            private final double top;
-            private double x;
-            private int line;
-
-            Pen(@org.jspecify.annotations.Nullable Sheet sheet, double top) {
-                this.sheet = sheet;
-                this.top = top;
-            }
-
-            interface Sample {
-                void on(Sheet sheet, Rectangle2D box);
-            }
-
-            void entry(String words, Sample sample) {
-                String fitted = Typeface.fitted(words, Look.TEXT, Look.WIDTH / 2.0);
-                double width = SWATCH + 6 + Typeface.width(fitted, Look.TEXT) + 18;
-                if (x > 0 && x + width > Look.WIDTH) {
-                    x = 0;
-                    line++;
-                }
-                if (sheet != null) {
-                    double y = top + line * KEY_LINE;
-                    sample.on(sheet, new Rectangle2D.Double(x, y, SWATCH, 11));
-                    sheet.text(
-                            fitted,
-                            x + SWATCH + 6,
-                            y + 10,
-                            Sheet.Anchor.LEFT,
-                            Look.TEXT,
-                            sheet.look().ink());
-                }
-                x += width;
-            }
-        }
-    }
-
     /** Where something was due. */
-    private static void flag(Sheet sheet, double at, double top, double bottom) {
+    static void flag(Sheet sheet, double at, double top, double bottom) {
         Look look = sheet.look();
         Path2D flag = new Path2D.Double();
         flag.moveTo(at - 1, top);
@@ -203,7 +108,7 @@ final class TimePanels {
     }
 
     /** Under what is late. */
-    private static void under(Sheet sheet, double from, double until, double y) {
+    static void under(Sheet sheet, double from, double until, double y) {
         sheet.draw(
                 new Line2D.Double(from, y, Math.max(until, from + 1), y),
                 sheet.look().limit(),
