@@ -6,6 +6,7 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.NavigableMap;
 import java.util.TreeMap;
 
 /** Whether a schedule keeps the rules of its shop. Knows only the rules: sweeps over what is taken, moment by moment. */
@@ -101,12 +102,12 @@ final class Allowed {
         return false;
     }
 
-    private static void take(TreeMap<Long, Long> changes, long from, long until, long amount) {
+    private static void take(NavigableMap<Long, Long> changes, long from, long until, long amount) {
         changes.merge(from, amount, Long::sum);
         changes.merge(until, -amount, Long::sum);
     }
 
-    private static long most(TreeMap<Long, Long> changes) {
+    private static long most(NavigableMap<Long, Long> changes) {
         long now = 0;
         long most = 0;
         for (long change : List.copyOf(changes.values())) {
