@@ -40,9 +40,15 @@ final class RoutePhysics implements Physics {
             return other instanceof Times times && Arrays.equals(values, times.values);
         }
 
+        /** Times are mostly whole minutes, of which the usual sum with powers of 31 makes the same number over and over. */
         @Override
         public int hashCode() {
-            return Arrays.hashCode(values);
+            long hash = values.length;
+            for (long value : values) {
+                hash = (hash ^ value) * 0x9E3779B97F4A7C15L;
+                hash ^= hash >>> 32;
+            }
+            return (int) hash;
         }
     }
 

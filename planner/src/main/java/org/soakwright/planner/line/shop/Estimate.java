@@ -1,6 +1,7 @@
 package org.soakwright.planner.line.shop;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 
@@ -18,11 +19,20 @@ final class Estimate {
 
     private static final int MOST_TANGENTS = 300;
 
+    /** How much nearer a tangent had to be to be worth looking at one more of them. */
+    private static final double WORTH = 1e-3;
+
+    /** A tangent no further away is at the same times. */
+    private static final double SAME = 1e-6;
+
     /** Most that a tangent is taken to be off: 0.05 % of a content. What is off by more shows when it is followed. */
     private static final double MOST_OFF = 5e-4;
 
     private final Physics physics;
     private final List<Tangent> tangents = new ArrayList<>();
+    /** Of every tangent its times and how steep it is in each, one after the other: all of them are looked through again and again. */
+    private double[] near = new double[0];
+
     private int last;
     private boolean rising;
 
@@ -46,15 +56,6 @@ final class Estimate {
                     steepest[i] = Math.max(steepest[i], Math.abs(slopes[i]));
                 }
             }
-        }
-
-        /** What change it foretells, at most; beyond a limit no more than that it is beyond. */
-        double change(long[] times, double limit) {
-            double sum = 0;
-            for (int i = 0; i < times.length && sum < limit; i++) {
-                sum += steepest[i] * Math.abs(times[i] - at[i]);
-            }
-            return sum;
         }
 
         int size() {
@@ -85,10 +86,35 @@ final class Estimate {
         return rising;
     }
 
+    /** How many tangents there are: what was worked out holds until there are more. */
+    int tangents() {
+        return tangents.size();
+    }
+
+    /** What change a tangent foretells, at most; beyond a limit no more than that it is beyond. */
+    private double change(int tangent, long[] times, double limit) {
+        double sum = 0;
+        int base = 2 * times.length * tangent;
+        for (int i = 0; i < times.length && sum < limit; i++) {
+            sum += near[base + 2 * i + 1] * Math.abs(times[i] - near[base + 2 * i]);
+        }
+        return sum;
+    }
+
     private void add(Tangent tangent) {
-        if (tangents.size() < MOST_TANGENTS) {
+        // Where nothing is asked there is nothing to remember, and jobs of any length may share it.
+        if (tangent.size() > 0 && tangents.size() < MOST_TANGENTS) {
             last = tangents.size();
             tangents.add(tangent);
+            int length = tangent.at.length;
+            int base = 2 * length * last;
+            if (base + 2 * length > near.length) {
+                near = Arrays.copyOf(near, 2 * (base + 2 * length));
+            }
+            for (int i = 0; i < length; i++) {
+                near[base + 2 * i] = tangent.at[i];
+                near[base + 2 * i + 1] = tangent.steepest[i];
+            }
         }
         for (int r = 0; r < tangent.size() && !rising; r++) {
             for (int i = 0; i < tangent.at.length; i += 2) {
@@ -101,8 +127,8 @@ final class Estimate {
     Physics.Reading exactly(long[] times) {
         Physics.Reading reading = physics.read(times);
         if (tangents.size() < MOST_TANGENTS) {
-            for (Tangent tangent : tangents) {
-                if (tangent.change(times, 1e-6) < 1e-6) {
+            for (int i = 0; i < tangents.size(); i++) {
+                if (change(i, times, SAME) < SAME) {
                     return reading;
                 }
             }
@@ -121,13 +147,13 @@ final class Estimate {
 
     /** A tangent near some times. */
     Tangent near(long[] times) {
-        int count = tangents.size();
+        int count = tangents.isEmpty() ? -1 : tangents.size();
         double least = TRUSTED;
         int nearest = -1;
-        for (int n = 0; n < count && least > NEAR; n++) {
+        for (int n = 0; n <= count && (nearest < 0 || n * WORTH < least - NEAR); n++) {
             // The one that served last serves again most often, and those made lately before older ones.
             int i = n == 0 ? last : count - n;
-            double change = tangents.get(i).change(times, least);
+            double change = change(i, times, least);
             if (change < least) {
                 least = change;
                 nearest = i;

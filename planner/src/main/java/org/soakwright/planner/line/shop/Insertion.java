@@ -1,7 +1,9 @@
 package org.soakwright.planner.line.shop;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -21,6 +23,10 @@ final class Insertion {
     private final long[] most;
     private final List<Placed.Visit> done;
     private final long takes;
+    private final Set<Bar> barred = new HashSet<>();
+
+    /** A station that a phase must not be in. */
+    private record Bar(int phase, int station) {}
 
     /**
      * Of the phases that are not done yet.
@@ -36,6 +42,17 @@ final class Insertion {
         this.least = least;
         this.most = most;
         takes = floor.shop().carriage().takes();
+    }
+
+    /** Keeps the job out of a station wherever it has another. */
+    Insertion without(int station) {
+        for (int k = 0; station >= 0 && k < job.size(); k++) {
+            List<Integer> stations = job.phase(k).stations();
+            if (stations.size() > 1 && stations.contains(station)) {
+                barred.add(new Bar(k, station));
+            }
+        }
+        return this;
     }
 
     /** A free window of a station with the moments at which the job can land in it and leave it. */
@@ -117,6 +134,9 @@ final class Insertion {
     }
 
     private void rooms(List<Window> now, int k, int station, Moments arriving, long begin, long until) {
+        if (!barred.isEmpty() && barred.contains(new Bar(k, station))) {
+            return;
+        }
         Moments room = floor.room(station, job, begin, until);
         for (int i = room.interval(arriving.first()); i < room.size() && room.from(i) <= arriving.last(); i++) {
             Moments landing = arriving.within(room.from(i), room.to(i));
@@ -140,6 +160,15 @@ final class Insertion {
         long last = Math.min(to, until);
         Moments calm = floor.conditions(job.phase(k), station, begin, until);
         Moments lasting = job.phase(k).lasting().within(least[k], most[k]);
+        if (calm.size() == 1) {
+            Moments leaving = landing.within(calm.from(0), calm.to(0))
+                    .plus(lasting)
+                    .within(calm.from(0), Math.min(last, calm.to(0)));
+            if (!leaving.isEmpty()) {
+                now.add(new Window(station, from, to, calm, landing, leaving, same));
+            }
+            return;
+        }
         Moments leaving = Moments.NONE;
         for (int i = calm.interval(landing.first()); i < calm.size() && calm.from(i) <= landing.last(); i++) {
             Moments within = landing.within(calm.from(i), calm.to(i)).plus(lasting);
@@ -151,11 +180,14 @@ final class Insertion {
     }
 
     private static Moments leaving(List<Window> windows) {
-        Moments any = Moments.NONE;
-        for (Window window : windows) {
-            any = any.or(window.leaving());
+        if (windows.size() == 1) {
+            return windows.get(0).leaving();
         }
-        return any;
+        List<Moments> sets = new ArrayList<>(windows.size());
+        for (Window window : windows) {
+            sets.add(window.leaving());
+        }
+        return Moments.any(sets);
     }
 
     private static Moments onward(Window before, Joint joint, Moments hands) {
@@ -172,12 +204,17 @@ final class Insertion {
         if (lift.most() == lift.least()) {
             return leaving.and(lifts.lasting(lift.least())).shifted(lift.least());
         }
-        Moments landing = Moments.NONE;
-        for (int i = 0; i < lifts.size(); i++) {
-            Moments from = leaving.within(lifts.from(i), lifts.to(i));
-            landing = landing.or(from.plus(lift.least(), lift.most()).within(lifts.from(i), lifts.to(i)));
+        Moments.Builder landing = new Moments.Builder(leaving.size());
+        for (int i = lifts.interval(leaving.first()); i < lifts.size() && lifts.from(i) <= leaving.last(); i++) {
+            long to = lifts.to(i);
+            for (int j = leaving.interval(lifts.from(i)); j < leaving.size() && leaving.from(j) <= to; j++) {
+                long from = Math.max(lifts.from(i), leaving.from(j)) + lift.least();
+                if (from <= to) {
+                    landing.add(from, Math.min(to, leaving.to(j) + lift.most()));
+                }
+            }
         }
-        return landing;
+        return landing.built();
     }
 
     private @Nullable Placed backward(List<List<Window>> windows, Moments lifts) {
@@ -229,12 +266,23 @@ final class Insertion {
         return new Placed(job, List.of(visits));
     }
 
-    /** The latest landing from which a window can be left at a moment. */
+    /**
+     * The landing from which a window can be left at a moment: the latest, for who hangs about elsewhere is in nobody's way; the earliest in a
+     * station that holds many, where waiting keeps others out least.
+     */
     private long start(Window at, int k, long end) {
         Moments lasting = job.phase(k).lasting().within(least[k], most[k]);
         int calm = at.calm().interval(end);
         long earliest = Math.max(at.calm().from(calm), at.from());
         long best = -Moments.NEVER;
+        if (floor.shop().stations().get(at.station()).holdsMany()) {
+            for (int i = lasting.size() - 1; i >= 0; i--) {
+                long landed = at.landing().atOrAfter(Math.max(earliest, end - lasting.to(i)));
+                if (landed <= end - lasting.from(i)) {
+                    return landed;
+                }
+            }
+        }
         for (int i = 0; i < lasting.size(); i++) {
             long landed = at.landing().atOrBefore(end - lasting.from(i));
             if (landed >= earliest && landed >= end - lasting.to(i)) {

@@ -1,6 +1,7 @@
 package org.soakwright.planner.line.shop;
 
 import java.util.Arrays;
+import java.util.List;
 
 /**
  * A set of moments, or of durations: closed intervals of whole seconds, rising, that do not touch. Immutable. Operations cost a pass over the
@@ -145,8 +146,47 @@ public final class Moments {
         return any.built();
     }
 
+    /** The moments of any of several sets. */
+    static Moments any(List<Moments> sets) {
+        int count = 0;
+        for (Moments set : sets) {
+            count += set.ends.length;
+        }
+        long[] all = new long[count];
+        int length = 0;
+        for (Moments set : sets) {
+            System.arraycopy(set.ends, 0, all, length, set.ends.length);
+            length += set.ends.length;
+        }
+        return merged(all);
+    }
+
+    /** Intervals in any order, put in order by insertion: they come in a few rising runs that hardly overlap. */
+    private static Moments merged(long[] ends) {
+        for (int i = 2; i < ends.length; i += 2) {
+            long from = ends[i];
+            long to = ends[i + 1];
+            int j = i - 2;
+            while (j >= 0 && ends[j] > from) {
+                ends[j + 2] = ends[j];
+                ends[j + 3] = ends[j + 1];
+                j -= 2;
+            }
+            ends[j + 2] = from;
+            ends[j + 3] = to;
+        }
+        Builder any = new Builder(ends.length / 2);
+        for (int i = 0; i < ends.length; i += 2) {
+            any.add(ends[i], ends[i + 1]);
+        }
+        return any.built();
+    }
+
     /** Every moment of this plus every duration of another set. */
     public Moments plus(Moments durations) {
+        if (durations.size() == 1) {
+            return plus(durations.from(0), durations.to(0));
+        }
         Moments sum = NONE;
         for (int d = 0; d < durations.size(); d++) {
             sum = sum.or(plus(durations.from(d), durations.to(d)));

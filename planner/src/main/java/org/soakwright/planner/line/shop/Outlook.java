@@ -1,5 +1,6 @@
 package org.soakwright.planner.line.shop;
 
+import java.util.Arrays;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 
@@ -21,7 +22,14 @@ final class Outlook {
     }
 
     /** Least and most that each phase may last, s. */
-    record Bounds(long[] least, long[] most) {}
+    record Bounds(long[] least, long[] most) {
+        /** Whether they are those of others from a phase on. */
+        boolean equalFrom(int phase, Bounds other) {
+            int n = least.length;
+            return Arrays.equals(least, phase, n, other.least, phase, n)
+                    && Arrays.equals(most, phase, n, other.most, phase, n);
+        }
+    }
 
     /** The shortest durations of each phase. */
     private long[] shortest() {

@@ -15,11 +15,36 @@ final class Placement {
 
     private static final int MOST_REPAIRS = 12;
 
+    /** Instead of the number of a style: durations that are none of the job's own. */
+    private static final int FOREIGN = -1;
+
     private final IdentityHashMap<Physics, Estimate> estimates = new IdentityHashMap<>();
+    private final IdentityHashMap<Job, Known> known = new IdentityHashMap<>();
     private long placings;
+
+    /**
+     * What a placement is not to do, so that others have room.
+     *
+     * @param notBefore s; its first move begins no earlier
+     * @param without a station that it does without where it can; -1 for none
+     */
+    record Whim(long notBefore, int without) {
+        static final Whim NONE = new Whim(-Moments.NEVER, -1);
+    }
 
     /** A job placed, and whether what was asked of it holds. */
     record Outcome(Placed placed, boolean met, int style) {}
+
+    /** Bounds of a style of which nothing is over yet, worked out with so many tangents; they are asked for again and again. */
+    private record Fresh(int tangents, Outlook.@Nullable Bounds bounds) {}
+
+    /** What does not depend on the floor. */
+    private record Known(List<long[]> styles, @Nullable Fresh[] fresh) {
+        static Known of(Job job) {
+            List<long[]> styles = Outlook.styles(job);
+            return new Known(styles, new Fresh[styles.size()]);
+        }
+    }
 
     /** How often a job has been placed. */
     long placings() {
@@ -34,11 +59,17 @@ final class Placement {
      */
     @Nullable
     Outcome place(Floor floor, Job job, int only) {
-        List<long[]> styles = Outlook.styles(job);
+        return place(floor, job, only, Whim.NONE);
+    }
+
+    /** The same with a whim, which nothing is kept from the floor for. */
+    @Nullable
+    Outcome place(Floor floor, Job job, int only, Whim whim) {
+        List<long[]> styles = known(job).styles();
         Outcome best = null;
         for (int s = 0; s < styles.size(); s++) {
             if (only < 0 || s == only) {
-                Placed placed = exactly(floor, job, styles.get(s));
+                Placed placed = exactly(floor, job, s, styles.get(s), whim);
                 if (placed != null && (best == null || isEarlier(floor, placed, best.placed()))) {
                     best = new Outcome(placed, true, s);
                 }
@@ -53,14 +84,14 @@ final class Placement {
         placings++;
         long[] style = styles.get(0);
         long[] most = job.phases().stream().mapToLong(Phase::longest).toArray();
-        Placed placed = new Insertion(floor, job, List.of(), style, most).place(job.ready());
+        Placed placed = new Insertion(floor, job, List.of(), style, most).place(-Moments.NEVER);
         return placed == null ? null : new Outcome(placed, isMet(placed), 0);
     }
 
     /** In a style that is not of its own: durations that somebody proposes; null where it does not lead anywhere. */
     @Nullable
     Outcome like(Floor floor, Job job, long[] style) {
-        Placed placed = exactly(floor, job, style);
+        Placed placed = exactly(floor, job, FOREIGN, style, Whim.NONE);
         return placed == null ? null : new Outcome(placed, true, 0);
     }
 
@@ -84,10 +115,10 @@ final class Placement {
         return estimates.computeIfAbsent(job.physics(), Estimate::new);
     }
 
-    private @Nullable Placed exactly(Floor floor, Job job, long[] style) {
+    private @Nullable Placed exactly(Floor floor, Job job, int style, long[] durations, Whim whim) {
         Estimate estimate = estimate(job);
         for (int repair = 0; repair < MOST_REPAIRS; repair++) {
-            Placed placed = estimated(floor, job, style, estimate);
+            Placed placed = estimated(floor, job, style, durations, estimate, whim);
             if (placed == null || estimate.exactly(placed.times()).met()) {
                 return placed;
             }
@@ -95,22 +126,32 @@ final class Placement {
         return null;
     }
 
-    private @Nullable Placed estimated(Floor floor, Job job, long[] style, Estimate estimate) {
+    private @Nullable Placed estimated(
+            Floor floor, Job job, int style, long[] durations, Estimate estimate, Whim whim) {
         Outlook outlook = new Outlook(job, estimate);
         List<Placed.Visit> done = List.of();
         long[] past = new long[2 * job.size() - 1];
         Placed placed = null;
+        Outlook.Bounds before = null;
         while (true) {
-            Outlook.Bounds bounds = outlook.after(style, past, done.size());
+            Outlook.Bounds bounds = done.isEmpty() && style != FOREIGN
+                    ? fresh(job, style, outlook, estimate)
+                    : outlook.after(durations, past, done.size());
             if (bounds == null) {
                 return placed;
             }
-            placings++;
-            Placed next = new Insertion(floor, job, done, bounds.least(), bounds.most()).place(job.ready());
-            if (next == null) {
-                return placed;
+            // With the same bounds as before, what is to come would be placed where it is.
+            if (placed == null || before == null || !bounds.equalFrom(done.size(), before)) {
+                placings++;
+                Placed next = new Insertion(floor, job, done, bounds.least(), bounds.most())
+                        .without(whim.without())
+                        .place(whim.notBefore());
+                if (next == null) {
+                    return placed;
+                }
+                placed = next;
             }
-            placed = next;
+            before = bounds;
             int stretched = stretched(placed, bounds.least(), done.size());
             if (stretched >= job.size() - 1) {
                 return placed;
@@ -118,6 +159,21 @@ final class Placement {
             done = new ArrayList<>(placed.visits().subList(0, stretched + 1));
             past = placed.times();
         }
+    }
+
+    private Outlook.@Nullable Bounds fresh(Job job, int style, Outlook outlook, Estimate estimate) {
+        Known known = known(job);
+        Fresh fresh = known.fresh()[style];
+        if (fresh == null || fresh.tangents() != estimate.tangents()) {
+            Outlook.Bounds bounds = outlook.after(known.styles().get(style), new long[2 * job.size() - 1], 0);
+            fresh = new Fresh(estimate.tangents(), bounds);
+            known.fresh()[style] = fresh;
+        }
+        return fresh.bounds();
+    }
+
+    private Known known(Job job) {
+        return known.computeIfAbsent(job, Known::of);
     }
 
     /** The first phase not over yet that lasts longer than it must, or is longer in the air before the next. */

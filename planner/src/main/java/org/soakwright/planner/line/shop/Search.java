@@ -15,15 +15,18 @@ import org.jspecify.annotations.Nullable;
  */
 public final class Search {
     private static final long SEED = 20_261_201;
-    private static final int MEMORY = 30;
+
     private static final int MOST_OFF = 6;
     private static final int MOST_EARLIER = 12;
 
-    /**
-     * Every so many changes all jobs are placed anew in the order in which they begin, but for one that comes earlier: what was left between them
-     * closes, and what no small change mends has a chance.
-     */
-    private static final int REORDERING = 8;
+    /** How many placings in a hundred give way to another job; more among few jobs, whose orders are soon tried. */
+    private static final int FEWEST_WHIMS = 4;
+
+    /** How many changes in a hundred place all that come after a job anew. */
+    private static final int REORDERING = 12;
+
+    /** How many changes ago a schedule may have been as good as the next one must be. */
+    private static final int MEMORY = 100;
 
     private final Shop shop;
     private final List<Job> jobs;
@@ -61,16 +64,25 @@ public final class Search {
         }
     }
 
-    /** Jobs on a floor. */
+    /** Jobs on a floor; some may be off it while they are moved. */
     private static final class State {
-        private Floor floor;
+        private final Floor floor;
         private final Placement.@Nullable Outcome[] at;
-        private Score score;
+        private final double[][] parts;
+        private Score score = new Score(List.of());
 
-        State(Floor floor, Placement.@Nullable Outcome[] at, Score score) {
+        State(Floor floor, int jobs) {
+            this(floor, new Placement.Outcome[jobs], new double[jobs][]);
+        }
+
+        private State(Floor floor, Placement.@Nullable Outcome[] at, double[][] parts) {
             this.floor = floor;
             this.at = at;
-            this.score = score;
+            this.parts = parts;
+        }
+
+        State copy() {
+            return new State(floor.copy(), at.clone(), parts.clone());
         }
 
         Placement.Outcome of(int job) {
@@ -79,6 +91,11 @@ public final class Search {
                 throw new IllegalStateException("job " + job + " is off the floor");
             }
             return outcome;
+        }
+
+        void takeOff(int job) {
+            floor.remove(of(job).placed());
+            at[job] = null;
         }
     }
 
@@ -112,9 +129,10 @@ public final class Search {
         Score[] memory = new Score[MEMORY];
         Arrays.fill(memory, now.score);
         for (long change = 0; placement.placings() < until && jobs.size() > 1; change++) {
-            State next = change % REORDERING == REORDERING - 1 ? reordered(now) : changed(now);
             int slot = (int) (change % MEMORY);
-            if (next.score.compareTo(memory[slot]) <= 0 || next.score.compareTo(now.score) <= 0) {
+            Score limit = memory[slot].compareTo(now.score) > 0 ? memory[slot] : now.score;
+            State next = random.nextInt(100) < REORDERING ? reordered(now, limit) : changed(now, limit);
+            if (next != null) {
                 now = next;
             }
             if (now.score.compareTo(memory[slot]) < 0) {
@@ -129,7 +147,7 @@ public final class Search {
 
     /** The schedule that comes of placing the jobs in an order. */
     public Found inOrder(List<Integer> order) {
-        return found(placed(order.stream().mapToInt(Integer::intValue).toArray(), null));
+        return found(placed(order.stream().mapToInt(Integer::intValue).toArray()));
     }
 
     /**
@@ -144,16 +162,15 @@ public final class Search {
                         .thenComparing(Comparator.naturalOrder()))
                 .mapToInt(Integer::intValue)
                 .toArray();
-        Floor floor = new Floor(shop);
-        Placement.Outcome[] at = new Placement.Outcome[jobs.size()];
+        State state = new State(new Floor(shop), jobs.size());
         for (int j : order) {
             Placed proposed = schedule.jobs().get(j);
             long[] style =
                     proposed.visits().stream().mapToLong(Placed.Visit::seconds).toArray();
-            Placement.Outcome like = placement.like(floor, jobs.get(j), style);
+            Placement.Outcome like = placement.like(state.floor, jobs.get(j), style);
             long wanted = proposed.finishes(shop.carriage());
             if (like == null || like.placed().finishes(shop.carriage()) > wanted) {
-                Placement.Outcome own = placement.place(floor, jobs.get(j), -1);
+                Placement.Outcome own = placement.place(state.floor, jobs.get(j), -1);
                 like = like == null
                                 || (own != null
                                         && own.placed().finishes(shop.carriage())
@@ -164,10 +181,10 @@ public final class Search {
             if (like == null) {
                 throw new Unplaceable(jobs.get(j));
             }
-            floor.put(like.placed());
-            at[j] = like;
+            put(state, j, like);
         }
-        return found(scored(floor, at));
+        state.score = score(state);
+        return found(state);
     }
 
     /** A schedule made by somebody else, whose jobs are these in their order. */
@@ -176,14 +193,13 @@ public final class Search {
     }
 
     private State state(Schedule schedule) {
-        Floor floor = new Floor(shop);
-        Placement.Outcome[] at = new Placement.Outcome[jobs.size()];
-        for (int j = 0; j < at.length; j++) {
+        State state = new State(new Floor(shop), jobs.size());
+        for (int j = 0; j < jobs.size(); j++) {
             Placed placed = schedule.jobs().get(j);
-            floor.put(placed);
-            at[j] = new Placement.Outcome(placed, placement.isMet(placed), 0);
+            put(state, j, new Placement.Outcome(placed, placement.isMet(placed), 0));
         }
-        return scored(floor, at);
+        state.score = score(state);
+        return state;
     }
 
     /** Times that were followed on the way, those nearest to just meeting everything first. */
@@ -215,7 +231,7 @@ public final class Search {
                     .sorted(rule.thenComparing(Comparator.naturalOrder()))
                     .mapToInt(Integer::intValue)
                     .toArray();
-            State state = placed(order, null);
+            State state = placed(order);
             best = best == null || state.score.compareTo(best.score) < 0 ? state : best;
         }
         if (best == null) {
@@ -228,63 +244,132 @@ public final class Search {
         return Arrays.stream(Outlook.styles(job).get(0)).sum();
     }
 
-    /** All jobs placed in an order; in the styles they have, or the best. */
-    private State placed(int[] order, @Nullable State styled) {
-        Floor floor = new Floor(shop);
-        Placement.Outcome[] at = new Placement.Outcome[jobs.size()];
+    /** All jobs placed in an order, each in its best style. */
+    private State placed(int[] order) {
+        State state = new State(new Floor(shop), jobs.size());
         for (int job : order) {
-            at[job] = put(
-                    floor, jobs.get(job), styled == null ? -1 : styled.of(job).style());
+            put(state, job, -1);
         }
-        return scored(floor, at);
+        state.score = score(state);
+        return state;
     }
 
-    private Placement.Outcome put(Floor floor, Job job, int style) {
-        Placement.Outcome outcome = placement.place(floor, job, style);
-        if (outcome == null) {
-            throw new Unplaceable(job);
+    private void put(State state, int job, int style) {
+        if (!put(state, job, style, Placement.Whim.NONE)) {
+            throw new Unplaceable(jobs.get(job));
         }
-        floor.put(outcome.placed());
-        return outcome;
     }
 
-    private State reordered(State state) {
-        List<Integer> order = new ArrayList<>(IntStream.range(0, jobs.size())
+    /** Whether a job could be put on. */
+    private boolean put(State state, int job, int style, Placement.Whim whim) {
+        Placement.Outcome outcome = placement.place(state.floor, jobs.get(job), style, whim);
+        if (outcome != null) {
+            put(state, job, outcome);
+        }
+        return outcome != null;
+    }
+
+    private void put(State state, int job, Placement.Outcome outcome) {
+        state.floor.put(outcome.placed());
+        state.at[job] = outcome;
+        state.parts[job] = parts(outcome);
+    }
+
+    /** Puts jobs on again, as long as what comes of it can still be within a limit. */
+    private @Nullable State putOn(State state, int[] off, int[] styles, boolean whims, Score limit) {
+        for (int i = 0; i < off.length; i++) {
+            if (!put(state, off[i], styles[i], whims ? whim(state, off[i]) : Placement.Whim.NONE)) {
+                return null;
+            }
+            state.score = score(state);
+            if (state.score.compareTo(limit) > 0) {
+                return null;
+            }
+        }
+        return state;
+    }
+
+    /**
+     * One job earlier or later in the order in which they begin, and all that come after it placed anew: what was left between them closes, and
+     * what no small change mends has a chance.
+     */
+    private @Nullable State reordered(State state, Score limit) {
+        int n = jobs.size();
+        int[] order = IntStream.range(0, n)
                 .boxed()
                 .sorted(Comparator.comparingLong(
                                 (Integer j) -> state.of(j).placed().begins(shop.carriage()))
                         .thenComparing(Comparator.naturalOrder()))
-                .toList());
-        if (random.nextInt(4) > 0) {
-            Integer job = seed(state);
-            int at = order.indexOf(job);
-            order.remove(job);
-            order.add(at - random.nextInt(Math.min(at, MOST_EARLIER) + 1), job);
+                .mapToInt(Integer::intValue)
+                .toArray();
+        int job = seed(state);
+        int from = 0;
+        while (order[from] != job) {
+            from++;
         }
-        return placed(order.stream().mapToInt(Integer::intValue).toArray(), random.nextInt(4) == 0 ? null : state);
+        int to = random.nextInt(4) > 0
+                ? Math.max(0, from - random.nextInt(MOST_EARLIER + 1))
+                : Math.min(n - 1, from + random.nextInt(MOST_EARLIER + 1));
+        if (to < from) {
+            System.arraycopy(order, to, order, to + 1, from - to);
+        } else {
+            System.arraycopy(order, from + 1, order, from, to - from);
+        }
+        order[to] = job;
+        int first = Math.min(from, to);
+        boolean free = random.nextInt(4) == 0;
+        State next = state.copy();
+        int[] off = Arrays.copyOfRange(order, first, n);
+        int[] styles = new int[off.length];
+        for (int i = 0; i < off.length; i++) {
+            styles[i] = free ? -1 : state.of(off[i]).style();
+            next.takeOff(off[i]);
+        }
+        return putOn(next, off, styles, false, limit);
     }
 
-    private State changed(State state) {
+    private @Nullable State changed(State state, Score limit) {
         int[] off = near(state, seed(state), 1 + random.nextInt(Math.min(MOST_OFF, jobs.size())));
-        Floor floor = state.floor.copy();
+        State next = state.copy();
         for (int job : off) {
-            floor.remove(state.of(job).placed());
+            next.takeOff(job);
         }
-        Placement.Outcome[] at = state.at.clone();
         int order = random.nextInt(3);
         if (order == 0) {
             sortByDue(off);
         } else if (order == 1) {
             shuffle(off);
         }
-        for (int job : off) {
-            int styles = Outlook.styles(jobs.get(job)).size();
-            int style = random.nextInt(4) == 0
+        int[] styles = new int[off.length];
+        for (int i = 0; i < off.length; i++) {
+            int count = Outlook.styles(jobs.get(off[i])).size();
+            styles[i] = random.nextInt(4) == 0
                     ? -1
-                    : random.nextBoolean() ? state.of(job).style() : random.nextInt(styles);
-            at[job] = put(floor, jobs.get(job), style);
+                    : random.nextBoolean() ? state.of(off[i]).style() : random.nextInt(count);
         }
-        return scored(floor, at);
+        return putOn(next, off, styles, true, limit);
+    }
+
+    /** Mostly none; else a job gives way to another: it comes after something that the other does, or does without a station. */
+    private Placement.Whim whim(State state, int job) {
+        if (random.nextInt(100) >= Math.max(FEWEST_WHIMS, 100 / (jobs.size() + 1))) {
+            return Placement.Whim.NONE;
+        }
+        if (random.nextInt(3) == 0) {
+            return new Placement.Whim(
+                    -Moments.NEVER, random.nextInt(shop.stations().size()));
+        }
+        int other = random.nextInt(jobs.size());
+        Placement.Outcome outcome = state.at[other];
+        if (outcome == null || other == job) {
+            return Placement.Whim.NONE;
+        }
+        List<Placed.Visit> visits = outcome.placed().visits();
+        Placed.Visit visit = visits.get(random.nextInt(visits.size()));
+        return new Placement.Whim(
+                (random.nextBoolean() ? visit.start() : visit.end())
+                        - random.nextInt(2) * shop.carriage().takes(),
+                -1);
     }
 
     private void sortByDue(int[] off) {
@@ -360,10 +445,31 @@ public final class Search {
         }
     }
 
-    private State scored(Floor floor, Placement.@Nullable Outcome[] at) {
-        State state = new State(floor, at, new Score(List.of()));
-        state.score = Score.of(schedule(state), aims, missing(state));
-        return state;
+    /** What one job adds to a score, in its order. */
+    private double[] parts(Placement.Outcome outcome) {
+        double[] parts = new double[aims.size() + 2];
+        Schedule alone = new Schedule(shop, List.of(outcome.placed()));
+        parts[0] = outcome.met() ? 0 : 1;
+        for (int i = 0; i < aims.size(); i++) {
+            parts[i + 1] = aims.get(i).of(alone);
+        }
+        parts[aims.size() + 1] = outcome.placed().finishes(shop.carriage());
+        return parts;
+    }
+
+    /** Of the jobs that are on the floor; more jobs make no number less. */
+    private Score score(State state) {
+        double[] sum = new double[aims.size() + 2];
+        for (int j = 0; j < state.parts.length; j++) {
+            if (state.at[j] != null) {
+                for (int i = 0; i < sum.length; i++) {
+                    double part = state.parts[j][i];
+                    boolean last = i > 0 && i <= aims.size() && aims.get(i - 1) == Aim.MAKESPAN;
+                    sum[i] = last ? Math.max(sum[i], part) : sum[i] + part;
+                }
+            }
+        }
+        return new Score(Arrays.stream(sum).boxed().toList());
     }
 
     private long missing(State state) {
