@@ -35,8 +35,8 @@ final class Unplaced {
             if (problems.isEmpty() && one.job() == first.job()) {
                 problems.add(unplaced.problem(
                         one,
-                        "found room for it on an empty line, and none beside the others within "
-                                + Hall.AFTERWARDS_DAYS + " d after the last lot is ready; plan them in parts"));
+                        "found room for it on an empty line, and none beside the others within " + Hall.AFTERWARDS_DAYS
+                                + " d after the last lot is ready; plan them in parts"));
             }
         }
         Unsound unsound = new Unsound(problems);
@@ -98,8 +98,8 @@ final class Unplaced {
         }
         return "found no time within " + Hall.AFTERWARDS_DAYS
                 + " d after the last lot is ready at which its steps, as long as they may be held, end when somebody is"
-                + " there and the next vessel is not out; give steps more hold-at-most, the crew longer hours, or fewer"
-                + " outages";
+                + " there and the next vessel is not out; give steps more hold-at-most, the crew longer hours or fewer"
+                + " outages, and let a lot that comes back to its only vessel stay there";
     }
 
     private static String people(long lifting) {
