@@ -3,7 +3,6 @@ package org.soakwright.planner.line;
 import java.time.Instant;
 import java.time.LocalDate;
 import java.time.LocalDateTime;
-import java.time.ZonedDateTime;
 import java.util.ArrayList;
 import java.util.List;
 import org.soakwright.planner.line.shop.Carriage;
@@ -29,8 +28,8 @@ final class Hall {
 
     private static final double GRAMS = 1000;
 
-    /** How long after the last order anything is still planned. */
-    private static final long AFTERWARDS_DAYS = 366;
+    /** How long after the last lot is ready anything is still planned. */
+    static final long AFTERWARDS_DAYS = 366;
 
     private final Line line;
     private final Clock clock;
@@ -125,11 +124,8 @@ final class Hall {
     private Instant last() {
         Instant last = first();
         for (var order : line.orders()) {
-            for (ZonedDateTime time : new ZonedDateTime[] {order.ready(), order.due()}) {
-                if (time != null && time.toInstant().isAfter(last)) {
-                    last = time.toInstant();
-                }
-            }
+            Instant ready = order.ready().toInstant();
+            last = ready.isAfter(last) ? ready : last;
         }
         return last.plusSeconds(AFTERWARDS_DAYS * 86_400);
     }

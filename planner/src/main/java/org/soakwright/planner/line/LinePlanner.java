@@ -45,15 +45,14 @@ public final class LinePlanner {
         List<Jobs.Made> made = alone;
         Search search =
                 new Search(hall.shop(), alone.stream().map(Jobs.Made::job).toList(), aims);
-        Search.Found first = search.best(0);
+        Search.Found first = first(hall, alone, search);
         List<Load> together =
                 Loads.together(line, alone.stream().map(Jobs.Made::load).toList(), 0);
         if (together.size() < alone.size()) {
             List<Jobs.Made> shared = jobs.of(together);
             Search other =
                     new Search(hall.shop(), shared.stream().map(Jobs.Made::job).toList(), aims);
-            Search.Found otherFirst = other.best(0);
-            if (otherFirst.score().compareTo(first.score()) < 0) {
+            if (isBetter(other, first)) {
                 made = shared;
                 search = other;
             }
@@ -66,6 +65,23 @@ public final class LinePlanner {
                 .of(found, options.effort() * WORK_PER_EFFORT, (long)
                         (options.effort() * POLISHING * PLACINGS_PER_EFFORT));
         return told(line, hall, made, improved);
+    }
+
+    private static Search.Found first(Hall hall, List<Jobs.Made> made, Search search) {
+        try {
+            return search.best(0);
+        } catch (Search.Unplaceable nowhere) {
+            throw Unplaced.told(hall, made, nowhere);
+        }
+    }
+
+    /** Lots that have a place each need not have one together. */
+    private static boolean isBetter(Search other, Search.Found first) {
+        try {
+            return other.best(0).score().compareTo(first.score()) < 0;
+        } catch (Search.Unplaceable nowhere) {
+            return false;
+        }
     }
 
     private static LinePlan told(Line line, Hall hall, List<Jobs.Made> made, Improvement.Outcome outcome) {

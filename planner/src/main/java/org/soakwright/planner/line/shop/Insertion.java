@@ -15,6 +15,7 @@ import org.jspecify.annotations.Nullable;
  */
 final class Insertion {
     private static final int MOST_DOUBLINGS = 12;
+    private static final int MOST_RETURNS = 20;
     private static final long HALF_A_DAY = 43_200;
 
     private final Floor floor;
@@ -39,7 +40,7 @@ final class Insertion {
         this.floor = floor;
         this.job = job;
         this.done = done;
-        this.least = least;
+        this.least = least.clone();
         this.most = most;
         takes = floor.shop().carriage().takes();
     }
@@ -65,9 +66,60 @@ final class Insertion {
             Moments leaving,
             @Nullable Window same) {}
 
-    /** The placement with the earliest completion; null where there is none. */
+    /**
+     * The placement with the earliest completion; null where there is none. A job that comes back to a station must find it turned around too,
+     * which the sets do not know: where it would not, that station is barred to that phase, or what comes between made longer, and it is placed
+     * again. Then an earlier completion may be missed.
+     */
     @Nullable
     Placed place(long notBefore) {
+        for (int tries = 0; tries < MOST_RETURNS; tries++) {
+            Placed placed = earliest(notBefore);
+            if (placed == null || !isBack(placed)) {
+                return placed;
+            }
+        }
+        return null;
+    }
+
+    /** Whether a job is back in a station too early; sees to it that it will not be. */
+    private boolean isBack(Placed placed) {
+        for (int k = Math.max(1, done.size()); k < job.size(); k++) {
+            int station = placed.visit(k).station();
+            Station one = floor.shop().stations().get(station);
+            if (job.phase(k).before().stays()) {
+                continue;
+            }
+            for (int before = k - 1; before >= 0; before--) {
+                long missing = placed.visit(before).end()
+                        + one.turnaround()
+                        - placed.visit(k).start();
+                if (placed.visit(before).station() == station && missing > 0) {
+                    part(k, before, station, missing);
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
+    /** Elsewhere, or else later, or else it was elsewhere before. */
+    private void part(int k, int before, int station, long missing) {
+        if (job.phase(k).stations().stream()
+                .anyMatch(other -> other != station && !barred.contains(new Bar(k, other)))) {
+            barred.add(new Bar(k, station));
+        } else if (before < k - 1 && k - 1 >= done.size() && least[k - 1] + missing <= most[k - 1]) {
+            least[k - 1] += missing;
+        } else {
+            int first = before;
+            while (first > 0 && job.phase(first).before().stays()) {
+                first--;
+            }
+            barred.add(new Bar(first, station));
+        }
+    }
+
+    private @Nullable Placed earliest(long notBefore) {
         long begin =
                 done.isEmpty() ? Math.max(job.ready(), notBefore) : done.get(0).start();
         long span = takes * 2;
@@ -107,7 +159,10 @@ final class Insertion {
                         : landing(leaving(windows.get(k - 1)), lifts, (Joint.Lift) phase.before());
                 if (!arriving.isEmpty()) {
                     for (int station : phase.stations()) {
-                        rooms(now, k, station, arriving, begin, until);
+                        Moments there = k == 0 ? arriving : arriving(windows.get(k - 1), k, station, arriving, lifts);
+                        if (!there.isEmpty()) {
+                            rooms(now, k, station, there, begin, until);
+                        }
                     }
                 }
             }
@@ -117,6 +172,24 @@ final class Insertion {
             windows.add(now);
         }
         return backward(windows, lifts);
+    }
+
+    /** When the job can land in a station, which it must not have left just before: not until it has been turned around. */
+    private Moments arriving(List<Window> before, int k, int station, Moments fromAny, Moments lifts) {
+        long turnaround = floor.shop().stations().get(station).turnaround();
+        Joint.Lift lift = (Joint.Lift) job.phase(k).before();
+        if (turnaround <= lift.least() || before.stream().noneMatch(window -> window.station() == station)) {
+            return fromAny;
+        }
+        List<Window> others =
+                before.stream().filter(window -> window.station() != station).toList();
+        Moments arriving = others.isEmpty() ? Moments.NONE : landing(leaving(others), lifts, lift);
+        if (turnaround > lift.most()) {
+            return arriving;
+        }
+        List<Window> same =
+                before.stream().filter(window -> window.station() == station).toList();
+        return arriving.or(landing(leaving(same), lifts, new Joint.Lift(turnaround, lift.most())));
     }
 
     private Window fixed(int k, long begin, long until) {
@@ -251,7 +324,7 @@ final class Insertion {
             Window from = null;
             long latest = -Moments.NEVER;
             for (Window before : windows.get(k - 1)) {
-                long leave = leave(before, start, joint, lifts);
+                long leave = leave(before, start, from(before, at, joint), lifts);
                 if (leave > latest) {
                     latest = leave;
                     from = before;
@@ -295,8 +368,19 @@ final class Insertion {
         return best;
     }
 
+    /** How a job comes from one window to another: back to the same station not before that is turned around; null where it cannot. */
+    private @Nullable Joint from(Window before, Window to, Joint joint) {
+        long turnaround = floor.shop().stations().get(to.station()).turnaround();
+        return joint instanceof Joint.Lift lift && before.station() == to.station() && lift.least() < turnaround
+                ? turnaround > lift.most() ? null : new Joint.Lift(turnaround, lift.most())
+                : joint;
+    }
+
     /** The latest moment at which a window can be left so as to land at another. */
-    private static long leave(Window before, long landing, Joint joint, Moments lifts) {
+    private static long leave(Window before, long landing, @Nullable Joint joint, Moments lifts) {
+        if (joint == null) {
+            return -Moments.NEVER;
+        }
         if (!(joint instanceof Joint.Lift lift)) {
             return before.leaving().contains(landing) ? landing : -Moments.NEVER;
         }

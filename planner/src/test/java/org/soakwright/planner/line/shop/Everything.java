@@ -174,8 +174,7 @@ final class Everything {
             if (leaves) {
                 Station station = shop.stations().get(stations[k]);
                 long own = bits(starts[from], ends[k] + (int) (station.turnaround() / TinyShop.STEP));
-                // A turnaround is between one load and the next: a job that comes back itself need not wait for it.
-                if ((own & closed(station)) != 0) {
+                if ((own & (taken[stations[k]] | closed(station))) != 0) {
                     return null;
                 }
                 taken[stations[k]] |= own;

@@ -146,7 +146,7 @@ final class Tampered {
     /** The hall with some words in one of its files written otherwise, each where it comes first. */
     static Line hall(Path folder, String file, String... fromTo) {
         try {
-            Path own = HandmadePlan.FILE.toAbsolutePath().getParent();
+            Path own = Objects.requireNonNull(HandmadePlan.FILE.toAbsolutePath().getParent());
             for (String name : List.of("small-hall.yaml", "thin-loins.yaml", "cords.yaml")) {
                 String text = Files.readString(own.resolve(name));
                 for (int i = 0; name.equals(file) && i < fromTo.length; i += 2) {
