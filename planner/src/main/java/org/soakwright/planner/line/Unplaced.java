@@ -32,7 +32,7 @@ final class Unplaced {
             }
         }
         for (Jobs.Made one : made) {
-            if (problems.isEmpty() && one.job() == first.job()) {
+            if (problems.isEmpty() && one.job().name().equals(first.job().name())) {
                 problems.add(unplaced.problem(
                         one,
                         "found room for it on an empty line, and none beside the others within " + Hall.AFTERWARDS_DAYS
