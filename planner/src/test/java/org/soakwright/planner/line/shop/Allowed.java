@@ -6,6 +6,7 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.SortedMap;
 import java.util.TreeMap;
 
 /** Whether a schedule keeps the rules of its shop. Knows only the rules: sweeps over what is taken, moment by moment. */
@@ -14,9 +15,9 @@ final class Allowed {
 
     static void check(Schedule schedule) {
         Shop shop = schedule.shop();
-        Map<Integer, TreeMap<Long, Long>> stations = new HashMap<>();
-        TreeMap<Long, Long> heads = new TreeMap<>();
-        TreeMap<Long, Long> hoist = new TreeMap<>();
+        Map<Integer, SortedMap<Long, Long>> stations = new HashMap<>();
+        SortedMap<Long, Long> heads = new TreeMap<>();
+        SortedMap<Long, Long> hoist = new TreeMap<>();
         for (Placed placed : schedule.jobs()) {
             alone(shop, placed);
             int first = 0;
@@ -101,12 +102,12 @@ final class Allowed {
         return false;
     }
 
-    private static void take(TreeMap<Long, Long> changes, long from, long until, long amount) {
+    private static void take(Map<Long, Long> changes, long from, long until, long amount) {
         changes.merge(from, amount, Long::sum);
         changes.merge(until, -amount, Long::sum);
     }
 
-    private static long most(TreeMap<Long, Long> changes) {
+    private static long most(SortedMap<Long, Long> changes) {
         long now = 0;
         long most = 0;
         for (long change : List.copyOf(changes.values())) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Tries every schedule of a tiny shop on its steps of time: all ways of every job alone, then all of them together. Knows the rules and nothing of
@@ -48,6 +49,40 @@ final class Everything {
         ways.sort(Comparator.comparingInt(List::size));
         all.combine(ways, 0, new long[all.resources], 0);
         return all.best;
+    }
+
+    /** When a job can be out at the earliest, in steps, if others stay where they are; the horizon if not before. */
+    static long earliest(TinyShop tiny, Job job, List<Placed> others, int horizon) {
+        Everything all = new Everything(tiny, false, horizon, horizon);
+        long[] taken = new long[all.resources];
+        for (Placed placed : others) {
+            int n = placed.job().size();
+            int[] stations = new int[n];
+            int[] starts = new int[n];
+            int[] ends = new int[n];
+            for (int k = 0; k < n; k++) {
+                stations[k] = placed.visit(k).station();
+                starts[k] = (int) (placed.visit(k).start() / TinyShop.STEP);
+                ends[k] = (int) (placed.visit(k).end() / TinyShop.STEP);
+            }
+            Way way = all.way(placed.job(), stations, starts, ends);
+            if (way == null) {
+                throw new IllegalArgumentException(placed + " is against the rules");
+            }
+            for (int r = 0; r < all.resources; r++) {
+                taken[r] |= way.taken()[r];
+            }
+        }
+        List<Way> ways = new ArrayList<>();
+        int n = job.size();
+        all.extend(job, 0, new int[n], new int[n], new int[n], ways);
+        ways.sort(Comparator.comparingLong(Way::value));
+        for (Way way : ways) {
+            if (all.fits(way.taken(), taken)) {
+                return way.value();
+            }
+        }
+        return horizon;
     }
 
     private long staffed() {
@@ -125,7 +160,7 @@ final class Everything {
     }
 
     /** What a way takes; null where it is against a rule that concerns the job alone. */
-    private Way way(Job job, int[] stations, int[] starts, int[] ends) {
+    private @Nullable Way way(Job job, int[] stations, int[] starts, int[] ends) {
         long[] taken = new long[resources];
         long hands = takes > 0 ? bits(starts[0] - takes, starts[0]) : 0;
         long[] times = new long[2 * job.size() - 1];

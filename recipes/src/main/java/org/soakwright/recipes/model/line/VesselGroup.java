@@ -24,7 +24,8 @@ import org.soakwright.recipes.text.Unsound;
  * @param steps the names of steps that they serve besides
  * @param volume what each holds of pieces and liquor together; null where that limits nothing
  * @param capacity the mass that each holds of many lots at once, kg, above zero; null where lots are alone
- * @param turnaround between a load and the next in one vessel, whole minutes; null is none
+ * @param turnaround from a load's leaving until the next one lands in the same vessel, or the same one again, whole minutes; null is
+ *     none
  * @param draws what each draws while a lot is in it, by the name of the utility
  */
 public record VesselGroup(
