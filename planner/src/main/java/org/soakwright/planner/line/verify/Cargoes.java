@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Set;
 import java.util.stream.Collectors;
 import org.soakwright.recipes.model.Step;
@@ -22,34 +23,35 @@ final class Cargoes {
     private final Line line;
     private final Result result;
     private final Faults faults;
+    private final Map<String, Order> known = new LinkedHashMap<>();
 
     Cargoes(Line line, Result result, Faults faults) {
         this.line = line;
         this.result = result;
         this.faults = faults;
+        line.orders().forEach(order -> known.put(order.lot(), order));
     }
 
     /** Those that follow their recipe step by step; of others it is told what is wrong. */
     List<Cargo> all() {
         Map<String, List<Result.Entry>> byLoad = new LinkedHashMap<>();
+        Map<String, List<Result.Entry>> byLot = new LinkedHashMap<>();
         for (Result.Entry entry : result.lots()) {
-            if (line.order(entry.lot()).isEmpty()) {
+            byLot.computeIfAbsent(entry.lot(), name -> new ArrayList<>()).add(entry);
+            if (!known.containsKey(entry.lot())) {
                 faults.add("Lot " + Shown.quoted(entry.lot()) + " is no lot of the line, one of its "
                         + line.orders().size() + " would be right.");
             } else {
                 byLoad.computeIfAbsent(entry.load(), name -> new ArrayList<>()).add(entry);
             }
         }
-        line.orders().forEach(this::made);
+        line.orders().forEach(order -> made(order, byLot.getOrDefault(order.lot(), List.of())));
         List<Cargo> all = new ArrayList<>();
         byLoad.forEach((name, entries) -> add(all, name, entries));
         return all;
     }
 
-    private void made(Order order) {
-        List<Result.Entry> own = result.lots().stream()
-                .filter(entry -> entry.lot().equals(order.lot()))
-                .toList();
+    private void made(Order order, List<Result.Entry> own) {
         if (own.isEmpty()) {
             faults.add(
                     "Lot " + order.lot() + " is not in the result, all its " + order.mass() + " made would be right.");
@@ -88,7 +90,7 @@ final class Cargoes {
 
     private void add(List<Cargo> all, String name, List<Result.Entry> entries) {
         List<Order> orders = entries.stream()
-                .flatMap(entry -> line.order(entry.lot()).stream())
+                .map(entry -> Objects.requireNonNull(known.get(entry.lot())))
                 .toList();
         Result.Entry first = entries.get(0);
         boolean alike = true;

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Set;
 import java.util.stream.Collectors;
 import org.soakwright.recipes.model.line.Line;
+import org.soakwright.recipes.model.line.Order;
 
 /**
  * Checks a result of {@code line --json} against every rule of its line. It knows the rules as the guide says them and nothing of how the schedule
@@ -64,11 +65,12 @@ public final class Verification {
         if (whole && cargoes.size() == loads.size()) {
             sums.whole(result, cargoes, judge.cost());
         }
+        Set<String> orders = line.orders().stream().map(Order::lot).collect(Collectors.toSet());
         return new Verdict(
                 faults.all(),
                 (int) result.lots().stream()
                         .map(Result.Entry::lot)
-                        .filter(lot -> line.order(lot).isPresent())
+                        .filter(orders::contains)
                         .distinct()
                         .count(),
                 cargoes.stream().mapToInt(cargo -> cargo.parts().size()).sum(),
