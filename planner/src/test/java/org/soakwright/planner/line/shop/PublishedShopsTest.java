@@ -95,8 +95,8 @@ class PublishedShopsTest {
     @Test
     void flowShopsOfCarlierComeWithinFourPercent() {
         Published.carlier()
-                .forEach((name, minutes) -> within(
-                        4, optimum(name), makespan(ClassicalShop.flow(minutes, Between.STORE), 20_000), name));
+                .forEach((name, minutes) ->
+                        within(4, optimum(name), makespan(ClassicalShop.flow(minutes, Between.STORE), 20_000), name));
     }
 
     @Test
