@@ -29,7 +29,7 @@ final class Allowed {
                     take(
                             stations.computeIfAbsent(placed.visit(k).station(), s -> new TreeMap<>()),
                             placed.visit(first).start(),
-                            Math.min(placed.visit(k).end() + station.turnaround(), back(placed, k)),
+                            placed.visit(k).end() + station.turnaround(),
                             station.holdsMany() ? placed.job().amount() : 1);
                     first = k + 1;
                 }
@@ -81,16 +81,6 @@ final class Allowed {
                 assertTrue(joined, job.name() + " comes to phase " + k + " after " + gap + " s");
             }
         }
-    }
-
-    /** When a job comes back to a station it has left: a turnaround is between one load and the next. */
-    private static long back(Placed placed, int k) {
-        for (int later = k + 1; later < placed.job().size(); later++) {
-            if (placed.visit(later).station() == placed.visit(k).station()) {
-                return placed.visit(later).start();
-            }
-        }
-        return Moments.NEVER;
     }
 
     private static boolean isInside(Moments shifts, Placed.Visit visit) {

@@ -1,7 +1,6 @@
 package org.soakwright.planner.line.shop;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
-import static org.junit.jupiter.api.Assertions.assertNotNull;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
@@ -30,13 +29,18 @@ class PlacementTest {
             List<Placed> others = new ArrayList<>();
             for (int j = 1; j < tiny.jobs().size(); j++) {
                 Placement.Outcome outcome = placement.place(floor, tiny.jobs().get(j), -1);
-                assertNotNull(outcome);
-                floor.put(outcome.placed());
-                others.add(outcome.placed());
+                if (outcome != null) {
+                    floor.put(outcome.placed());
+                    others.add(outcome.placed());
+                }
             }
             Job job = tiny.jobs().get(0);
             Placement.Outcome found = placement.place(floor, job, -1);
-            assertNotNull(found);
+            if (found == null) {
+                // It would have to be back in its only station before that is turned around.
+                assertEquals((long) HORIZON, Everything.earliest(tiny, job, others, HORIZON), "draw " + draw);
+                continue;
+            }
             long out = found.placed().finishes(tiny.shop().carriage()) / TinyShop.STEP;
             boolean within =
                     others.stream().allMatch(other -> other.finishes(tiny.shop().carriage()) < HORIZON * TinyShop.STEP);
@@ -57,7 +61,9 @@ class PlacementTest {
             Placement placement = new Placement();
             for (Job job : tiny.jobs()) {
                 Placement.Outcome outcome = placement.place(floor, job, -1);
-                assertNotNull(outcome);
+                if (outcome == null) {
+                    continue;
+                }
                 assertTrue(outcome.met(), "draw " + draw);
                 assertTrue(job.physics().read(outcome.placed().times()).met(), "draw " + draw);
                 floor.put(outcome.placed());
@@ -85,9 +91,14 @@ class PlacementTest {
         StringBuilder all = new StringBuilder();
         for (int draw = 0; draw < 20; draw++) {
             TinyShop tiny = TinyShop.drawn(random, draw % 2 == 0);
-            Search.Found found = new Search(tiny.shop(), tiny.jobs(), List.of(Aim.LATENESS, Aim.MAKESPAN)).best(400);
-            found.schedule().jobs().forEach(placed -> all.append(placed.visits()));
-            all.append(found.score()).append('\n');
+            try {
+                Search.Found found =
+                        new Search(tiny.shop(), tiny.jobs(), List.of(Aim.LATENESS, Aim.MAKESPAN)).best(400);
+                found.schedule().jobs().forEach(placed -> all.append(placed.visits()));
+                all.append(found.score()).append('\n');
+            } catch (Search.Unplaceable unplaceable) {
+                all.append(unplaceable.job().name()).append('\n');
+            }
         }
         return all.toString();
     }
