@@ -87,9 +87,10 @@ public final class LinePlanner {
     private static LinePlan told(Line line, Hall hall, List<Jobs.Made> made, Improvement.Outcome outcome) {
         Schedule schedule = outcome.found().schedule();
         Reasons reasons = new Reasons(schedule, hall.clock());
+        List<List<Slack>> slacks = Slack.of(schedule);
         List<LoadPlan> loads = new ArrayList<>();
         for (int j = 0; j < made.size(); j++) {
-            loads.add(load(hall, made, j, schedule, reasons));
+            loads.add(load(hall, made, j, schedule, slacks.get(j), reasons));
         }
         loads.sort(Comparator.comparingLong(
                         (LoadPlan load) -> load.placed().begins(hall.shop().carriage()))
@@ -107,7 +108,8 @@ public final class LinePlanner {
                 notes(loads, outcome));
     }
 
-    private static LoadPlan load(Hall hall, List<Jobs.Made> all, int index, Schedule schedule, Reasons reasons) {
+    private static LoadPlan load(
+            Hall hall, List<Jobs.Made> all, int index, Schedule schedule, List<Slack> slacks, Reasons reasons) {
         Jobs.Made made = all.get(index);
         Placed placed = schedule.jobs().get(index);
         Run run = made.followed(placed.times());
@@ -115,7 +117,7 @@ public final class LinePlanner {
         List<LoadPlan.LegPlan> legs = new ArrayList<>();
         for (int k = 0; k < route.size(); k++) {
             Placed.Visit visit = placed.visit(k);
-            Slack slack = Slack.of(schedule, placed, k);
+            Slack slack = slacks.get(k);
             String name = route.name(k);
             legs.add(new LoadPlan.LegPlan(
                     route.legs().get(k),

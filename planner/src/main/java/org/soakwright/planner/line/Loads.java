@@ -2,8 +2,10 @@ package org.soakwright.planner.line;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.TreeMap;
 import org.soakwright.recipes.model.Recipe;
 import org.soakwright.recipes.model.line.Line;
@@ -42,10 +44,26 @@ final class Loads {
                         List.of(new Load.Share(order, part, parts, kg))));
             }
         }
+        problems.addAll(alike(loads));
         if (!problems.isEmpty()) {
             throw new Unsound(problems);
         }
         return loads;
+    }
+
+    /** A lot may be called what a part of another is called. */
+    private static List<Problem> alike(List<Load> loads) {
+        Set<String> names = new HashSet<>();
+        List<Problem> problems = new ArrayList<>();
+        for (Load load : loads) {
+            if (!names.add(load.name())) {
+                problems.add(new Problem(
+                        load.shares().get(0).order().place(),
+                        "two loads would have one name: found " + Shown.quoted(load.name())
+                                + ", which a part of another lot is called; give the lot another name"));
+            }
+        }
+        return problems;
     }
 
     private static int parts(Line line, Order order) {
@@ -127,7 +145,8 @@ final class Loads {
                 loads.add(open);
             }
         }
-        return loads;
+        // Names that cannot be told apart are worth less than a shared load.
+        return alike(loads).isEmpty() ? loads : alone;
     }
 
     private static Load joined(Load one, Load other) {

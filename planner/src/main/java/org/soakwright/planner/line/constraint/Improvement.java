@@ -89,7 +89,7 @@ public final class Improvement {
         int idle = 0;
         double left = convex ? work : work * (1 - FOR_PROOF);
         for (int round = 0; round < MOST_ROUNDS && left > 0; round++) {
-            double share = round == 0 ? left / 3 : left / 4;
+            double share = convex ? left : round == 0 ? left / 3 : left / 4;
             Program.Answer answer = program.solve(best.schedule(), hint, cuts, share);
             left -= share;
             if (convex) {

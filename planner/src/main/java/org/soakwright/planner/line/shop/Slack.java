@@ -1,6 +1,8 @@
 package org.soakwright.planner.line.shop;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -39,11 +41,22 @@ public record Slack(long latest, Reason reason, @Nullable Job by) {
         NOTHING
     }
 
-    /** Of a phase of a job of a schedule. */
-    public static Slack of(Schedule schedule, Placed placed, int phase) {
+    /** Of every phase of every job of a schedule, in its order. */
+    public static List<List<Slack>> of(Schedule schedule) {
         Floor floor = new Floor(schedule.shop());
-        schedule.jobs().stream().filter(other -> !other.isOf(placed.job())).forEach(floor::put);
-        return new Finder(schedule, placed, floor, phase).slack();
+        schedule.jobs().forEach(floor::put);
+        Floor empty = new Floor(schedule.shop());
+        List<List<Slack>> all = new ArrayList<>();
+        for (Placed placed : schedule.jobs()) {
+            floor.remove(placed);
+            List<Slack> own = new ArrayList<>();
+            for (int k = 0; k < placed.job().size(); k++) {
+                own.add(new Finder(schedule, placed, floor, empty, k).slack());
+            }
+            all.add(List.copyOf(own));
+            floor.put(placed);
+        }
+        return List.copyOf(all);
     }
 
     /** Narrows it down, one reason after the other. */
@@ -51,16 +64,18 @@ public record Slack(long latest, Reason reason, @Nullable Job by) {
         private final Schedule schedule;
         private final Placed placed;
         private final Floor floor;
+        private final Floor empty;
         private final int k;
         private final Job job;
         private final long end;
         private long latest;
         private Reason reason = Reason.NOTHING;
 
-        Finder(Schedule schedule, Placed placed, Floor floor, int k) {
+        Finder(Schedule schedule, Placed placed, Floor floor, Floor empty, int k) {
             this.schedule = schedule;
             this.placed = placed;
             this.floor = floor;
+            this.empty = empty;
             this.k = k;
             job = placed.job();
             end = placed.visit(k).end();
@@ -123,8 +138,7 @@ public record Slack(long latest, Reason reason, @Nullable Job by) {
                 return;
             }
             long moment = reach(windows.lasting(seconds), end);
-            boolean staffed =
-                    reach(new Floor(floor.shop()).lifts(end, moment + FAR).lasting(seconds), end) > moment;
+            boolean staffed = reach(empty.lifts(end, moment + FAR).lasting(seconds), end) > moment;
             until(moment, staffed ? Reason.HOIST : Reason.PEOPLE);
         }
 
