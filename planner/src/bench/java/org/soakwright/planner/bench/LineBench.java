@@ -3,6 +3,8 @@ package org.soakwright.planner.bench;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Locale;
 import java.util.OptionalLong;
 import org.soakwright.planner.batch.Progress;
@@ -31,7 +33,8 @@ public final class LineBench {
     /**
      * Prints the table.
      *
-     * @param args {@code week} for 60 lots, {@code month} for 500, {@code growth} for 20 to 640; all of them without any
+     * @param args {@code week} for 60 lots, {@code month} for 500, {@code growth} for 20 to 640, which is drawn to target/line-growth.svg; all of them
+     *     without any
      */
     public static void main(String[] args) throws IOException {
         String what = args.length == 0 ? "all" : args[0];
@@ -45,24 +48,27 @@ public final class LineBench {
             rows(500);
         }
         if (what.equals("all") || what.equals("growth")) {
+            List<GrowthPicture.Point> points = new ArrayList<>();
             for (int lots : GROWTH) {
-                rows(lots);
+                points.add(new GrowthPicture.Point(lots, rows(lots)));
             }
+            Files.writeString(Path.of("target", "line-growth.svg"), GrowthPicture.of(points));
         }
     }
 
-    private static void rows(int lots) throws IOException {
+    private static double rows(int lots) throws IOException {
         Path folder = Files.createTempDirectory("line-bench");
         Path file = MadeLine.in(folder, lots, SEED);
-        row(file, lots, 0);
+        double seconds = row(file, lots, 0);
         if (lots == MOST_IMPROVED) {
             for (double effort : EFFORTS) {
                 row(file, lots, effort);
             }
         }
+        return seconds;
     }
 
-    private static void row(Path file, int lots, double effort) {
+    private static double row(Path file, int lots, double effort) {
         long begun = System.nanoTime();
         LineOutcome outcome = Lines.read(file);
         if (outcome instanceof LineOutcome.Refused refused) {
@@ -93,5 +99,6 @@ public final class LineBench {
                 bound.isPresent()
                         ? String.format(Locale.ROOT, "%.1f", 100.0 * (makespan - bound.getAsLong()) / makespan)
                         : "");
+        return seconds;
     }
 }
