@@ -89,7 +89,7 @@ class ImprovementTest {
     @Test
     void smallShopsEndAtTheirOptimumAndItIsProven() {
         SplittableRandom random = new SplittableRandom(7);
-        for (int draw = 0; draw < 15; draw++) {
+        for (int draw = 0; draw < 8; draw++) {
             long[][] minutes = new long[6][3];
             for (long[] job : minutes) {
                 Arrays.setAll(job, k -> random.nextLong(5, 90));
