@@ -30,6 +30,11 @@ public final class Improvement {
     private static final double NEAR = 0.2;
 
     private static final int MOST_FOLLOWED = 50;
+    private static final int FEWEST_FOLLOWED = 6;
+    private static final int MOST_CUTS = 1000;
+
+    /** What reading a program takes for each phase, counted as work. */
+    private static final double READING = 5e-4;
 
     /** A tangent asks for a little more than to be met, so that times that just miss do not come again. */
     private static final double BEYOND = 2e-5;
@@ -91,7 +96,7 @@ public final class Improvement {
         for (int round = 0; round < MOST_ROUNDS && left > 0; round++) {
             double share = convex ? left : round == 0 ? left / 3 : left / 4;
             Program.Answer answer = program.solve(best.schedule(), hint, cuts, share);
-            left -= share;
+            left -= share + reading();
             if (convex) {
                 lateness = larger(lateness, answer.lateness());
                 makespan = larger(makespan, answer.makespan());
@@ -120,6 +125,10 @@ public final class Improvement {
             makespan = proof.makespan();
         }
         return new Outcome(best, lateness, makespan, false);
+    }
+
+    private double reading() {
+        return READING * jobs.stream().mapToInt(Job::size).sum();
     }
 
     /** A schedule in the order of another whose times meet everything; empty where so many tangents do not lead to one. */
@@ -158,7 +167,7 @@ public final class Improvement {
     private void cutWhereFollowed(Physics physics) {
         search.followed(physics).stream()
                 .filter(followed -> Math.abs(followed.reading().worst()) < NEAR)
-                .limit(MOST_FOLLOWED)
+                .limit(Math.max(FEWEST_FOLLOWED, Math.min(MOST_FOLLOWED, MOST_CUTS / jobs.size())))
                 .forEach(followed -> cut(physics, followed.times(), followed.reading()));
     }
 
