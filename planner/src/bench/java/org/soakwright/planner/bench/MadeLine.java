@@ -14,7 +14,7 @@ import java.util.SplittableRandom;
  */
 final class MadeLine {
     private static final DateTimeFormatter MINUTES = DateTimeFormatter.ofPattern("yyyy-MM-dd'T'HH:mm");
-    private static final LocalDateTime STARTS = LocalDateTime.of(2026, 3, 2, 6, 0);
+    private static final LocalDateTime STARTS = LocalDateTime.of(2026, 4, 6, 6, 0);
 
     /** Hours that a lot keeps one of the six tanks busy, all steps together and shared by six. */
     private static final double HOURS_A_LOT = 2.9;
@@ -62,7 +62,7 @@ final class MadeLine {
 
     private static final String LINE = """
             title: Made line
-            starts: 2026-03-02T06:00
+            starts: 2026-04-06T06:00
             zone: Europe/Oslo
             vessels:
               tank:
