@@ -3,7 +3,8 @@ package org.soakwright.planner.line;
 /**
  * How a line is planned.
  *
- * @param effort how much work to spend on a better schedule; 1 is about a second on one core of a common machine, 0 makes the first ones only
+ * @param effort how much work to spend on a better schedule; 1 takes one to four seconds of a common machine, most with many lots; 0
+ *     makes the first ones only
  * @param decoupled whether every recipe keeps the times it has when planned alone, for comparison
  */
 public record Options(double effort, boolean decoupled) {
