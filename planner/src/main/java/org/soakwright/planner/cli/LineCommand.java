@@ -44,7 +44,7 @@ final class LineCommand implements Callable<Integer> {
     private final OptionSpec effort = OptionSpec.builder("--effort")
             .type(String.class)
             .paramLabel("N")
-            .description("how long to look for a better schedule, in about seconds, 0 to "
+            .description("how much work to spend on a better schedule, some seconds each, 0 to "
                     + Figures.written(Options.MOST_EFFORT) + "; " + Figures.written(Options.USUAL_EFFORT)
                     + " if not given")
             .build();
