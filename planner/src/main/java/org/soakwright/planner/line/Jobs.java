@@ -145,7 +145,10 @@ final class Jobs {
 
     private static String failed(Load load, Plan plan) {
         return load.recipeFile() + " cannot meet its targets, whatever its times, with "
-                + Shown.number(BigDecimal.valueOf(load.kg()).round(new MathContext(4))) + " kg"
+                + BigDecimal.valueOf(load.kg())
+                        .round(new MathContext(4))
+                        .stripTrailingZeros()
+                        .toPlainString() + " kg"
                 + plan.nearestMiss()
                         .map(miss -> ": nearest is " + miss.target().name() + " missed by "
                                 + Shown.number(BigDecimal.valueOf(miss.by()).round(new MathContext(3))) + " "

@@ -10,13 +10,11 @@ import com.google.ortools.sat.LinearExpr;
 import com.google.ortools.sat.Literal;
 import com.google.ortools.util.Domain;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.Objects;
 import java.util.Set;
 import org.soakwright.planner.line.shop.Carriage;
 import org.soakwright.planner.line.shop.Job;
@@ -430,82 +428,6 @@ final class Model {
                     in.forEach((pool, literal) -> model.addHint(literal, pool == own));
                 }
             }
-        }
-    }
-
-    /** Whatever uses a station or the only hoist after another keeps to that order. */
-    void keepOrder(Schedule schedule) {
-        List<List<Turn>> byStation = new ArrayList<>();
-        shop.stations().forEach(station -> byStation.add(new ArrayList<>()));
-        List<Turn> lifts = new ArrayList<>();
-        for (Placed placed : schedule.jobs()) {
-            Job job = placed.job();
-            int first = 0;
-            for (int k = 0; k < job.size(); k++) {
-                if (k + 1 == job.size() || !job.phase(k + 1).before().stays()) {
-                    int station = placed.visit(k).station();
-                    byStation
-                            .get(station)
-                            .add(new Turn(
-                                    placed.visit(first).start(),
-                                    start(job, first),
-                                    end(job, k),
-                                    shop.stations().get(station).turnaround() / tick));
-                    keepPool(job, first, pools.of(station));
-                    first = k + 1;
-                }
-            }
-            lifts(placed, lifts);
-        }
-        for (int s = 0; s < byStation.size(); s++) {
-            if (!shop.stations().get(s).holdsMany()) {
-                keepOrder(byStation.get(s));
-            }
-        }
-        if (shop.carriage().atOnce() == 1) {
-            keepOrder(lifts);
-        }
-    }
-
-    /**
-     * Somebody's turn.
-     *
-     * @param was when it began, by which turns are ordered
-     * @param after from its end until the next may begin, ticks
-     */
-    private record Turn(long was, LinearArgument from, LinearArgument to, long after) {}
-
-    private void keepPool(Job job, int phase, int pool) {
-        Map<Integer, Literal> in = in(job, phase);
-        if (in.size() > 1) {
-            model.addBoolOr(List.of(Objects.requireNonNull(in.get(pool))));
-        }
-    }
-
-    private void lifts(Placed placed, List<Turn> lifts) {
-        long takes = shop.carriage().takes() / tick;
-        if (takes == 0) {
-            return;
-        }
-        Job job = placed.job();
-        LinearExpr begin =
-                LinearExpr.newBuilder().add(start(job, 0)).add(-takes).build();
-        lifts.add(new Turn(placed.begins(shop.carriage()), begin, start(job, 0), 0));
-        for (int k = 1; k < job.size(); k++) {
-            if (!job.phase(k).before().stays()) {
-                lifts.add(new Turn(placed.visit(k - 1).end(), end(job, k - 1), start(job, k), 0));
-            }
-        }
-        lifts.add(new Turn(placed.visit(job.size() - 1).end(), end(job, job.size() - 1), out(job), 0));
-    }
-
-    private void keepOrder(List<Turn> turns) {
-        turns.sort(Comparator.comparingLong(Turn::was));
-        for (int i = 1; i < turns.size(); i++) {
-            Turn before = turns.get(i - 1);
-            model.addGreaterOrEqual(
-                    turns.get(i).from(),
-                    LinearExpr.newBuilder().add(before.to()).add(before.after()).build());
         }
     }
 }

@@ -70,7 +70,7 @@ final class Program {
     Optional<Schedule> retimed(
             Schedule known, Schedule order, IdentityHashMap<Physics, List<Physics.Cut>> cuts, double work) {
         Model model = model(known, order, cuts);
-        model.keepOrder(order);
+        Turns.keep(model, shop, tick, order);
         return new Solving(model, known, true).answer(work).schedule();
     }
 

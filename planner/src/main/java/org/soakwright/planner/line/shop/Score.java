@@ -1,25 +1,16 @@
 package org.soakwright.planner.line.shop;
 
-import java.util.ArrayList;
 import java.util.List;
 
-/** Numbers of which the first that differs decides; less is better. */
+/**
+ * Numbers of which the first that differs decides; less is better: jobs that miss, then the aims in order, then, so that a search knows where to go,
+ * when all jobs are out on average.
+ */
 public record Score(List<Double> values) implements Comparable<Score> {
     private static final double SAME = 1e-9;
 
     public Score {
         values = List.copyOf(values);
-    }
-
-    /** Jobs that miss, then the aims in order, then, so that a search knows where to go, when all jobs are out on average. */
-    static Score of(Schedule schedule, List<Aim> aims, long missing) {
-        List<Double> values = new ArrayList<>();
-        values.add((double) missing);
-        aims.forEach(aim -> values.add(aim.of(schedule)));
-        values.add(schedule.jobs().stream()
-                .mapToDouble(placed -> placed.finishes(schedule.shop().carriage()))
-                .sum());
-        return new Score(values);
     }
 
     @Override

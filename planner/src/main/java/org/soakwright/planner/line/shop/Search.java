@@ -146,11 +146,6 @@ public final class Search {
         return found;
     }
 
-    /** The schedule that comes of placing the jobs in an order. */
-    public Found inOrder(List<Integer> order) {
-        return found(placed(order.stream().mapToInt(Integer::intValue).toArray()));
-    }
-
     /**
      * The schedule that comes of placing the jobs in the order of another schedule with durations like its own, which may miss what is asked: as much
      * longer or shorter as it takes, or in a style of their own where that is out earlier.

@@ -1,22 +1,18 @@
 package org.soakwright.planner.line.verify;
 
-import com.fasterxml.jackson.core.JsonFactory;
-import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
-import com.fasterxml.jackson.core.JsonToken;
-import com.fasterxml.jackson.core.StreamReadFeature;
 import java.io.IOException;
 import java.time.DateTimeException;
 import java.time.OffsetDateTime;
 import java.time.ZoneId;
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalLong;
 import org.jspecify.annotations.Nullable;
+import org.soakwright.planner.json.JsonValues;
 
 /** A value of a JSON text with the path that leads to it. What is missing or of another type becomes a fault, and something harmless in its place. */
 final class Tree {
@@ -39,66 +35,26 @@ final class Tree {
 
     /** Reads one object; empty with a fault where the text is none. */
     static Optional<Tree> read(String text, Faults faults) {
-        JsonFactory factory = JsonFactory.builder()
-                .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
-                .build();
-        try (JsonParser parser = factory.createParser(text)) {
-            parser.nextToken();
-            Object value = value(parser);
-            if (parser.nextToken() != null) {
+        try {
+            JsonValues.Read read = JsonValues.read(text);
+            if (read.goesOn()) {
                 faults.add("The text goes on after the result ends; one JSON object would be right.");
-            } else if (value instanceof Map<?, ?> members) {
+            } else if (read.value() instanceof Map<?, ?> members) {
                 return Optional.of(new Tree(faults, "", members));
             } else {
                 faults.add("The text is no JSON object; what line writes with --json would be right.");
             }
         } catch (JsonProcessingException e) {
-            String found = String.valueOf(e.getOriginalMessage())
-                    .lines()
-                    .findFirst()
-                    .orElse("a fault")
-                    .strip();
             String where = e.getLocation() == null
                     ? ""
                     : " in line " + Math.max(1, e.getLocation().getLineNr()) + ", column "
                             + Math.max(1, e.getLocation().getColumnNr());
-            faults.add("The text is no whole JSON" + where + ": " + plain(found) + "; write it anew with --json.");
+            faults.add(
+                    "The text is no whole JSON" + where + ": " + JsonValues.fault(e) + "; write it anew with --json.");
         } catch (IOException e) {
             faults.add("The text cannot be read; write it anew with --json.");
         }
         return Optional.empty();
-    }
-
-    private static @Nullable Object value(JsonParser parser) throws IOException {
-        JsonToken token = parser.currentToken();
-        if (token == JsonToken.START_OBJECT) {
-            Map<String, @Nullable Object> members = new LinkedHashMap<>();
-            while (parser.nextToken() != JsonToken.END_OBJECT) {
-                String name = parser.currentName();
-                parser.nextToken();
-                members.put(name, value(parser));
-            }
-            return members;
-        }
-        if (token == JsonToken.START_ARRAY) {
-            List<@Nullable Object> elements = new ArrayList<>();
-            while (parser.nextToken() != JsonToken.END_ARRAY) {
-                elements.add(value(parser));
-            }
-            return elements;
-        }
-        if (token == JsonToken.VALUE_NUMBER_INT || token == JsonToken.VALUE_NUMBER_FLOAT) {
-            return parser.getDoubleValue();
-        }
-        if (token == JsonToken.VALUE_TRUE || token == JsonToken.VALUE_FALSE) {
-            return token == JsonToken.VALUE_TRUE;
-        }
-        return token == JsonToken.VALUE_STRING ? plain(parser.getText()) : null;
-    }
-
-    /** A terminal obeys control characters; a name has none. */
-    private static String plain(String text) {
-        return text.replaceAll("\\p{Cntrl}", " ");
     }
 
     String path() {

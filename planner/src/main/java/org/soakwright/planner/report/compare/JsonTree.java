@@ -1,10 +1,6 @@
 package org.soakwright.planner.report.compare;
 
-import com.fasterxml.jackson.core.JsonFactory;
-import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
-import com.fasterxml.jackson.core.JsonToken;
-import com.fasterxml.jackson.core.StreamReadFeature;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -14,6 +10,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
+import org.soakwright.planner.json.JsonValues;
 import org.soakwright.recipes.text.Place;
 import org.soakwright.recipes.text.Unsound;
 
@@ -35,16 +32,12 @@ final class JsonTree {
      * @throws Unsound where the text is no JSON
      */
     static JsonTree read(String file, String text) {
-        JsonFactory factory = JsonFactory.builder()
-                .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
-                .build();
-        try (JsonParser parser = factory.createParser(text)) {
-            parser.nextToken();
-            Object value = value(parser);
-            if (parser.nextToken() != null) {
+        try {
+            JsonValues.Read read = JsonValues.read(text);
+            if (read.goesOn()) {
                 throw new Unsound(Place.of(file), "this is no result: found more after its end");
             }
-            return new JsonTree(file, "", value);
+            return new JsonTree(file, "", read.value());
         } catch (JsonProcessingException e) {
             Place place = e.getLocation() == null
                     ? Place.of(file)
@@ -52,43 +45,11 @@ final class JsonTree {
                             file,
                             Math.max(0, e.getLocation().getLineNr()),
                             Math.max(0, e.getLocation().getColumnNr()));
-            throw new Unsound(place, "this is no whole JSON text: found " + lines(e) + "; write it anew with --json");
+            throw new Unsound(
+                    place, "this is no whole JSON text: found " + JsonValues.fault(e) + "; write it anew with --json");
         } catch (IOException e) {
             throw new Unsound(Place.of(file), "the text cannot be read");
         }
-    }
-
-    private static String lines(JsonProcessingException e) {
-        String message = String.valueOf(e.getOriginalMessage());
-        return message.lines().findFirst().orElse("a fault").strip();
-    }
-
-    private static @Nullable Object value(JsonParser parser) throws IOException {
-        JsonToken token = parser.currentToken();
-        if (token == JsonToken.START_OBJECT) {
-            Map<String, @Nullable Object> members = new LinkedHashMap<>();
-            while (parser.nextToken() != JsonToken.END_OBJECT) {
-                String name = parser.currentName();
-                parser.nextToken();
-                members.put(name, value(parser));
-            }
-            return members;
-        }
-        if (token == JsonToken.START_ARRAY) {
-            List<@Nullable Object> elements = new ArrayList<>();
-            while (parser.nextToken() != JsonToken.END_ARRAY) {
-                elements.add(value(parser));
-            }
-            return elements;
-        }
-        if (token == JsonToken.VALUE_NUMBER_INT || token == JsonToken.VALUE_NUMBER_FLOAT) {
-            return parser.getDoubleValue();
-        }
-        if (token == JsonToken.VALUE_TRUE || token == JsonToken.VALUE_FALSE) {
-            return token == JsonToken.VALUE_TRUE;
-        }
-        // A terminal obeys control characters; a name has none.
-        return token == JsonToken.VALUE_STRING ? parser.getText().replaceAll("\\p{Cntrl}", " ") : null;
     }
 
     private Unsound wrong(String wanted) {
